@@ -1,0 +1,27 @@
+/** The levels at which the side seam may stand off the plain quarter. */
+export const balanceLevels = ['chest', 'bust', 'underbust', 'waist', 'topHip', 'hip', 'knee'] as const;
+export type BalanceLevel = (typeof balanceLevels)[number];
+
+/** What the edge of a piece becomes, which decides its allowance. */
+export const edgeKinds = ['seam', 'side', 'zip', 'top', 'hem', 'fold', 'mouth'] as const;
+export type EdgeKind = (typeof edgeKinds)[number];
+
+/** How a workroom drafts (method sections 4, 6, 7), millimetres; they travel with the draft. */
+export type HouseRules = {
+  /** Added to the front quarter and taken from the back one, by level. */
+  readonly balance: { readonly [L in BalanceLevel]: number };
+  /** Part of the waist suppression that the side seam takes, 0 to 1. */
+  readonly sideShare: number;
+  /** Widest intake sewn in one dart. */
+  readonly dartWidest: number;
+  /** Darts stop this short of the bust point. */
+  readonly dartClearance: number;
+  /** Allowance beyond the seam line by kind of edge; a fold has none. */
+  readonly allowance: {
+    readonly seam: number;
+    readonly side: number;
+    readonly zip: number;
+    readonly top: number;
+    readonly hem: number;
+  };
+};

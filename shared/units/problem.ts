@@ -1,0 +1,14 @@
+import type { Said } from './said.ts';
+
+/**
+ * Something a person can act on: what is wrong, where, and the remedy, in one sentence.
+ * `field` is the dotted key of the contract (`card.bustGirth`, `style.ease.waist`, `rules.share`);
+ * `with` names the other fields of an impossible combination.
+ */
+export type Problem = {
+  readonly code: string;
+  readonly severity: 'error' | 'warning';
+  readonly field: string;
+  readonly with?: readonly string[];
+  readonly said: Said;
+};
