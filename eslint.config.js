@@ -1,0 +1,69 @@
+import eslint from '@eslint/js';
+import { defineConfig, globalIgnores } from 'eslint/config';
+import tseslint from 'typescript-eslint';
+
+const geometryEngines = [
+  { name: 'paper', message: 'Paper is named only in shared/geometry and the canvas.' },
+  { name: 'clipper2-ts', message: 'Clipper is named only in shared/geometry.' },
+];
+
+/** `as` may only be what a named function gives back, so that every assertion has a name. */
+const namedAssertions = {
+  selector:
+    'TSAsExpression:not([typeAnnotation.typeName.name="const"])' +
+    ':not(FunctionDeclaration > BlockStatement > ReturnStatement > TSAsExpression)' +
+    ':not(VariableDeclarator > ArrowFunctionExpression > TSAsExpression)',
+  message: 'Put the assertion in a small named function that says why it is true.',
+};
+
+export default defineConfig(
+  globalIgnores(['dist/', '.ellwand/', 'coverage/', 'test-results/', 'playwright-report/']),
+  eslint.configs.recommended,
+  tseslint.configs.strictTypeChecked,
+  {
+    languageOptions: {
+      parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname },
+    },
+    rules: {
+      'max-lines': ['error', { max: 300 }],
+      'no-restricted-syntax': ['error', namedAssertions],
+      'no-restricted-imports': [
+        'error',
+        {
+          paths: geometryEngines,
+          patterns: [
+            {
+              group: ['paper/*'],
+              message: 'Paper is named only in shared/geometry and the canvas.',
+            },
+          ],
+        },
+      ],
+      eqeqeq: 'error',
+      '@typescript-eslint/no-explicit-any': 'error',
+      '@typescript-eslint/no-non-null-assertion': 'error',
+      '@typescript-eslint/consistent-type-assertions': [
+        'error',
+        { assertionStyle: 'as', objectLiteralTypeAssertions: 'never' },
+      ],
+      '@typescript-eslint/consistent-type-definitions': ['error', 'type'],
+      '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
+      '@typescript-eslint/switch-exhaustiveness-check': 'error',
+      '@typescript-eslint/no-confusing-void-expression': ['error', { ignoreArrowShorthand: true }],
+    },
+  },
+  {
+    files: ['shared/geometry/**', 'src/**/canvas/**', 'tests/geometry/**', 'tests/bench/**'],
+    rules: { 'no-restricted-imports': 'off' },
+  },
+  {
+    files: ['**/*.mjs', '**/*.js', '**/*.cjs'],
+    languageOptions: {
+      globals: Object.fromEntries(
+        ['process', 'console', 'setTimeout', 'clearTimeout', 'fetch', 'URL', 'Buffer'].map(
+          (name) => [name, 'readonly'],
+        ),
+      ),
+    },
+  },
+);

@@ -1,0 +1,41 @@
+import { defineConfig } from 'vitest/config';
+
+/** Laws and the server stand apart: the one takes minutes, the other needs PostgreSQL. */
+const apart = ['tests/laws/**', 'tests/server/**', 'tests/architecture/**'];
+
+export default defineConfig({
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: { name: 'unit', include: ['tests/**/*.test.ts'], exclude: apart },
+      },
+      {
+        extends: true,
+        test: { name: 'screens', include: ['tests/**/*.test.tsx'], environment: 'happy-dom' },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'architecture',
+          include: ['tests/architecture/**/*.test.ts'],
+          testTimeout: 60_000,
+        },
+      },
+      {
+        extends: true,
+        test: { name: 'laws', include: ['tests/laws/**/*.test.ts'], testTimeout: 900_000 },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'server',
+          include: ['tests/server/**/*.test.ts'],
+          globalSetup: ['tests/server/support/cluster-setup.ts'],
+          testTimeout: 60_000,
+          hookTimeout: 60_000,
+        },
+      },
+    ],
+  },
+});
