@@ -46,7 +46,9 @@ export type MeasureCard = {
   readonly name?: string | undefined;
   /** Day the measures were taken, `2026-11-14`. */
   readonly date?: string | undefined;
-} & { readonly [K in CoreMeasure]: number } & { readonly [K in FurtherMeasure]?: number | undefined };
+} & { readonly [K in CoreMeasure]: number } & {
+  readonly [K in FurtherMeasure]?: number | undefined;
+};
 
 /** A card completed: every measure has a value, and the estimated ones say by which rule. */
 export type Body = {

@@ -12,3 +12,11 @@ export type Problem = {
   readonly with?: readonly string[];
   readonly said: Said;
 };
+
+type ProblemParts = Omit<Problem, 'severity'>;
+
+/** A problem that keeps the gown from being drawn until it is mended. */
+export const error = (parts: ProblemParts): Problem => ({ severity: 'error', ...parts });
+
+/** A problem the maker may overrule. */
+export const warning = (parts: ProblemParts): Problem => ({ severity: 'warning', ...parts });
