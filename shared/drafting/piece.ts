@@ -1,4 +1,4 @@
-import type { Path } from '../geometry/path.ts';
+import type { Line, Path } from '../geometry/path.ts';
 import type { Point } from '../geometry/point.ts';
 import type { EdgeKind } from './house-rules.ts';
 
@@ -96,9 +96,17 @@ export type Piece = {
 /** One line of lettering; `at` is the left end of its base line, `size` its height in mm. */
 export type Lettering = { readonly text: string; readonly at: Point; readonly size: number };
 
+/** The strokes of a notch, each from the seam line out to the cutting line. */
+export type NotchMark = {
+  readonly name: string;
+  readonly edge: string;
+  readonly strokes: readonly Line[];
+};
+
 /** A piece with everything the scissors need. */
 export type FinishedPiece = Piece & {
   /** Closed outline to cut, clockwise; runs along the fold where there is one. */
   readonly cutLine: Path;
+  readonly notchMarks: readonly NotchMark[];
   readonly lettering: readonly Lettering[];
 };

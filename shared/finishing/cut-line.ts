@@ -1,0 +1,133 @@
+import type { HouseRules } from '../drafting/house-rules.ts';
+import type { Edge, Piece } from '../drafting/piece.ts';
+import { clearLoops, crossesItself } from '../geometry/clear-loops.ts';
+import { type Joined, type Run, endAtLine, joinRuns, lines, startAtLine } from '../geometry/corner.ts';
+import { endTangent, startTangent } from '../geometry/curve.ts';
+import { parallel } from '../geometry/offset.ts';
+import type { Path, Segment } from '../geometry/path.ts';
+import { type Point, add, cross, distance, dot, scale, turnLeft } from '../geometry/point.ts';
+import { allowanceOf, pressedOpen } from './allowance.ts';
+import { dartCap } from './dart-cap.ts';
+
+/** Inner angles wider than 98 and narrower than 140 degrees have their allowance end mirrored. */
+const leastMirrored = (40 * Math.PI) / 180;
+const mostMirrored = (82 * Math.PI) / 180;
+
+type Corner = { readonly a: Run; readonly b: Run; readonly at: Point };
+
+/**
+ * The end of an allowance that is folded back along the first edge, cut as the second edge's cutting
+ * line shows through the fold, so that it reaches that line again when pressed open.
+ */
+function mirroredEnd({ a, b, at }: Corner, turn: number): Joined | undefined {
+  const after = startAtLine(b, at, at, a.along);
+  const valley = after?.[0]?.from;
+  if (!after || !valley) return undefined;
+  const tip = add(
+    valley,
+    add(scale(a.along, a.distance / Math.tan(turn)), scale(turnLeft(a.along), a.distance)),
+  );
+  const end = add(at, scale(turnLeft(a.along), a.distance));
+  return { before: a.path, between: lines([end, tip, valley]), after, folded: false };
+}
+
+/** The same at the start of the second edge, when that is the one folded back. */
+function mirroredStart({ a, b, at }: Corner, turn: number): Joined | undefined {
+  const before = endAtLine(a, at, at, b.along);
+  const valley = before?.at(-1)?.to;
+  if (!before || !valley) return undefined;
+  const tip = add(
+    valley,
+    add(scale(b.along, -b.distance / Math.tan(turn)), scale(turnLeft(b.along), b.distance)),
+  );
+  const start = add(at, scale(turnLeft(b.along), b.distance));
+  return { before, between: lines([valley, tip, start]), after: b.path, folded: false };
+}
+
+/** A corner of the piece: mitred, squared, or mirrored where an allowance is folded back over it. */
+function turnCorner(corner: Corner, first: Edge, second: Edge): Joined {
+  const { a, b, at } = corner;
+  const turn = Math.atan2(cross(a.along, b.along), dot(a.along, b.along));
+  const folds = [first, second].map((edge) => edge.kind === 'hem' || pressedOpen(edge));
+  if (turn > leastMirrored && turn < mostMirrored && first.kind !== 'fold' && second.kind !== 'fold') {
+    // A hem is turned up after the seams that run into it, so there the hem is the fold.
+    const firstFolds = folds[0] && second.kind !== 'hem' && !(folds[1] && first.kind !== 'hem');
+    const secondFolds = folds[1] && first.kind !== 'hem' && !(folds[0] && second.kind !== 'hem');
+    const joined = firstFolds
+      ? mirroredEnd(corner, turn)
+      : secondFolds
+        ? mirroredStart(corner, turn)
+        : undefined;
+    if (joined) return joined;
+  }
+  return joinRuns(a, b, at);
+}
+
+const endOf = (path: Path): Point | undefined => path.at(-1)?.to;
+
+/** Lays stretches end to end, bridging what gaps there are with straight pieces. */
+function closed(parts: readonly Path[]): Path {
+  const outline: Segment[] = [];
+  for (const part of parts) {
+    for (const segment of part) {
+      const last = outline.at(-1)?.to;
+      if (last && distance(last, segment.from) > 1e-6) outline.push(...lines([last, segment.from]));
+      outline.push(segment);
+    }
+  }
+  const [start, end] = [outline[0]?.from, outline.at(-1)?.to];
+  if (start && end && distance(start, end) > 1e-6) outline.push(...lines([end, start]));
+  return outline;
+}
+
+/**
+ * The closed cutting line of a piece, clockwise: every edge moved out by its allowance, corners
+ * mitred, mirrored or squared, dart mouths capped. Where it would fold over itself the loops are
+ * cleared away.
+ */
+export function cutLine(piece: Piece, rules: HouseRules): Path {
+  const count = piece.edges.length;
+  const own = piece.edges.map((edge) => allowanceOf(edge.kind, rules));
+  const reach = piece.edges.map((edge, index) =>
+    edge.kind === 'mouth'
+      ? Math.max(own[(index + count - 1) % count] ?? 0, own[(index + 1) % count] ?? 0)
+      : (own[index] ?? 0),
+  );
+  let folded = false;
+  const runs = piece.edges.map((edge, index) => {
+    const side = parallel(edge.path, reach[index] ?? 0);
+    if (side.folded) folded = true;
+    return side.path;
+  });
+  const bridges: Path[] = piece.edges.map(() => []);
+  const runAt = (index: number, end: 'start' | 'end'): Run => ({
+    path: runs[index] ?? [],
+    distance: reach[index] ?? 0,
+    along: (end === 'start' ? startTangent : endTangent)(piece.edges[index]?.path ?? []),
+  });
+
+  const capped = new Set<number>();
+  piece.edges.forEach((edge, index) => {
+    const dart = edge.open ? piece.darts.find((each) => each.mouth === edge.name) : undefined;
+    if (!dart) return;
+    const last = (index + count - 1) % count;
+    const next = (index + 1) % count;
+    const cap = dartCap(edge, dart, runAt(last, 'end'), runAt(next, 'start'));
+    if (!cap) return;
+    [runs[last], runs[index], runs[next]] = [cap.before, cap.cap, cap.after];
+    capped.add(index);
+  });
+
+  piece.edges.forEach((edge, index) => {
+    const next = (index + 1) % count;
+    const following = piece.edges[next];
+    const at = endOf(edge.path);
+    if (!following || !at || capped.has(index) || capped.has(next)) return;
+    const joined = turnCorner({ a: runAt(index, 'end'), b: runAt(next, 'start'), at }, edge, following);
+    if (joined.folded) folded = true;
+    [runs[index], bridges[index], runs[next]] = [joined.before, joined.between, joined.after];
+  });
+
+  const outline = closed(runs.flatMap((run, index) => [run, bridges[index] ?? []]));
+  return folded || crossesItself(outline) ? clearLoops(outline) : outline;
+}
