@@ -37,6 +37,12 @@ const packageHomes = {
   react: '^(src/|tests/)',
 };
 
+/**
+ * @param {string} name
+ * @param {Record<string, string | string[]>} from
+ * @param {Record<string, string | string[] | boolean>} to
+ * @returns {import('dependency-cruiser').IForbiddenRuleType}
+ */
 const rule = (name, from, to) => ({ name, severity: 'error', from, to });
 
 const inner = Object.entries(sharedArrows).map(([folder, may]) =>
