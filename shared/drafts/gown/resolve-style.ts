@@ -1,0 +1,42 @@
+import type { Body } from '../../body/card.ts';
+import type { BodyLevels } from '../../body/levels.ts';
+import type { EaseLevel, GownStyle, StyleCard, StyleLength } from './style-card.ts';
+import { styleLimits } from './style-limits.ts';
+
+/**
+ * Makes every choice a style card leaves open, by the initial values of this body's limits. A flare length that is
+ * given wins over the clearance, which then follows from it. Bounds are not checked here (`checkStyle`).
+ */
+export function resolveStyle(style: StyleCard, body: Body, levels: BodyLevels): GownStyle {
+  const limits = styleLimits(body, levels, style);
+  const length = (key: StyleLength): number => style[key] ?? limits[key].initial;
+  const ease = (level: EaseLevel): number => style.ease?.[level] ?? limits[`ease.${level}`].initial;
+  const flareLength = length('flareLength');
+  return {
+    topDrop: length('topDrop'),
+    neckDepth: length('neckDepth'),
+    neckWidth: length('neckWidth'),
+    sideDepth: length('sideDepth'),
+    backDepth: length('backDepth'),
+    shaping: style.shaping ?? 'princess',
+    dartLength: length('dartLength'),
+    kneeLevel: length('kneeLevel'),
+    kneeFinished: length('kneeFinished'),
+    flareFraction: length('flareFraction'),
+    flareLength,
+    floorClearance:
+      style.flareLength === undefined
+        ? length('floorClearance')
+        : limits.flareLength.max - flareLength,
+    heelHeight: length('heelHeight'),
+    clothWidth: length('clothWidth'),
+    ease: {
+      chest: ease('chest'),
+      bust: ease('bust'),
+      underbust: ease('underbust'),
+      waist: ease('waist'),
+      topHip: ease('topHip'),
+      hip: ease('hip'),
+    },
+  };
+}

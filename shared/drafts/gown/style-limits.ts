@@ -1,0 +1,107 @@
+import type { Body } from '../../body/card.ts';
+import type { BodyLevels } from '../../body/levels.ts';
+import { easeLevels, styleLengths } from './style-card.ts';
+import type { EaseLevel, StyleCard, StyleLength } from './style-card.ts';
+
+/** Bounds of one style choice and what it is when left open, millimetres (`flareFraction`: part of a circle). */
+export type Limit = { readonly min: number; readonly max: number; readonly initial: number };
+
+/** Dotted keys as the contract writes them. */
+export type StyleKey = StyleLength | `ease.${EaseLevel}`;
+export type StyleLimits = { readonly [K in StyleKey]: Limit };
+
+/** Every style choice that has bounds, in the order of the style card. */
+export const styleKeys: readonly StyleKey[] = [
+  ...styleLengths,
+  ...easeLevels.map((level): StyleKey => `ease.${level}`),
+];
+
+/** A limit whose bounds stay in order on any body, with the initial value between them. */
+const limit = (min: number, max: number, initial: number): Limit => {
+  const top = Math.max(min, max);
+  return { min, max: top, initial: Math.min(top, Math.max(min, initial)) };
+};
+
+/** A back top line may not rise nearer to the nape than this (common practice, no source). */
+const belowNape = 90;
+
+/** Steepest mean run of a side seam from hip in to the knee seam: 27 degrees (our rule). */
+const steepestRun = 0.5;
+
+/** The least of hip and knee the straight part of a skirt needs between them (our rule). */
+const leastHipToKneeSeam = 150;
+
+/** Girths a wearer can stand and step in at the knee seam (method section 6, walking). */
+function kneeFinished(body: Body, levels: BodyLevels, kneeLevel: number, hipEase: number): Limit {
+  const { bothKneesGirth, hipGirth } = body.measures;
+  const run = levels.knee - kneeLevel - levels.hip;
+  const standing = bothKneesGirth + 40;
+  const notTooSteep = hipGirth + hipEase - 4 * steepestRun * run;
+  const least = Math.ceil(Math.max(standing, notTooSteep));
+  return limit(least, Math.max(hipGirth + 100, least + 60), Math.max(762, 0.76 * hipGirth));
+}
+
+/** The back top line at the centre back, above the waist. */
+function backDepth(body: Body, levels: BodyLevels): Limit {
+  const least = Math.max(100, Math.ceil(levels.waist - levels.bust + 10));
+  const most = Math.min(Math.max(250, least + 60), body.measures.backWaistLength - belowNape);
+  return limit(least, most, 180);
+}
+
+/** Ease the woven, boned gown takes at each level (method section 4), and how far a maker may go. */
+const easeLimits: { readonly [K in `ease.${EaseLevel}`]: Limit } = {
+  'ease.chest': limit(-60, 60, -20),
+  'ease.bust': limit(-40, 100, 0),
+  'ease.underbust': limit(-60, 80, -15),
+  'ease.waist': limit(-60, 100, -10),
+  'ease.topHip': limit(-40, 100, 5),
+  'ease.hip': limit(-20, 120, 20),
+};
+
+/**
+ * Bounds and initial value of every style choice on this body, millimetres (method section 6 and, where it is silent,
+ * our own rules named above). Bounds that hang on another choice take it from `style`, or its own initial value.
+ */
+export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {}): StyleLimits {
+  const { bustSpan, waistToHip } = body.measures;
+  const topDrop = limit(levels.bust - 110, levels.bust - 60, levels.bust - 85);
+  const peak = style.topDrop ?? topDrop.initial;
+  const longestDart = Math.min(150, waistToHip - 45);
+  const highestKnee = Math.min(250, levels.knee - levels.hip - leastHipToKneeSeam);
+  const kneeLevel = limit(0, highestKnee, 100);
+  const seamAboveKnee = style.kneeLevel ?? kneeLevel.initial;
+  const heelHeight = limit(0, 150, 50);
+  const seamToFloor =
+    levels.floor - levels.knee + seamAboveKnee + (style.heelHeight ?? heelHeight.initial);
+  const shortestFlare = 150;
+  const floorClearance = limit(0, seamToFloor - shortestFlare, 20);
+  return {
+    topDrop,
+    neckDepth: limit(peak, levels.bust - 20, peak + 35),
+    neckWidth: limit(40, bustSpan / 2 + 40, 76),
+    sideDepth: limit(
+      Math.max(peak, Math.min(levels.underarm, levels.bust - 15)),
+      levels.bust - 10,
+      Math.min(levels.underarm + 10, levels.bust - 15),
+    ),
+    backDepth: backDepth(body, levels),
+    dartLength: limit(Math.min(100, longestDart - 15), longestDart, 127),
+    kneeLevel,
+    kneeFinished: kneeFinished(
+      body,
+      levels,
+      seamAboveKnee,
+      style.ease?.hip ?? easeLimits['ease.hip'].initial,
+    ),
+    flareFraction: limit(0.25, 1, 0.5),
+    flareLength: limit(
+      shortestFlare,
+      seamToFloor,
+      seamToFloor - (style.floorClearance ?? floorClearance.initial),
+    ),
+    floorClearance,
+    heelHeight,
+    clothWidth: limit(700, 3000, 1450),
+    ...easeLimits,
+  };
+}
