@@ -11,7 +11,11 @@ export type Finding = {
   readonly expected: number;
   readonly bound: number;
   /** Piece and, where it fits, edge names looked at. */
-  readonly where: readonly { readonly piece: string; readonly edge?: string; readonly at?: Point }[];
+  readonly where: readonly {
+    readonly piece: string;
+    readonly edge?: string;
+    readonly at?: Point;
+  }[];
 };
 
 /** A line of method section 8, with all it looked at. */

@@ -1,0 +1,80 @@
+import type { Edge, FinishedPiece } from '../drafting/piece.ts';
+import type { HouseRules } from '../drafting/house-rules.ts';
+import { crossingsOfLine, pointAt, tangentAt } from '../geometry/curve.ts';
+import type { Segment } from '../geometry/path.ts';
+import { type Point, add, dot, scale, subtract, turnLeft } from '../geometry/point.ts';
+import { boxOf } from './crossing-itself.ts';
+
+/** Shares of a stretch at which its clearance is taken. */
+const lookOut = {
+  line: [0.02, 0.5, 0.98],
+  cubic: [0.02, 0.125, 0.25, 0.375, 0.5, 0.625, 0.75, 0.875, 0.98],
+} as const;
+
+/** How far inside the seam line a cutting line that has slipped would still be found, mm. */
+const inside = 5;
+
+/** What the house rules ask beyond an edge; a fold is cut on the line, a mouth follows its cap. */
+export const allowanceOf = (edge: Edge, rules: HouseRules): number | undefined => {
+  if (edge.kind === 'mouth' || edge.open === true) return undefined;
+  return edge.kind === 'fold' ? 0 : rules.allowance[edge.kind];
+};
+
+/** Where the cutting line stands off an edge least rightly: measured square to the seam line. */
+export type Clearance = {
+  readonly edge: Edge;
+  readonly wanted: number;
+  readonly found: number;
+  readonly at: Point;
+};
+
+type Boxed = { readonly segment: Segment; readonly box: ReturnType<typeof boxOf> };
+
+/** The stretches of a cutting line, each with the box round it. */
+export const boxedCut = (piece: FinishedPiece): readonly Boxed[] =>
+  piece.cutLine.map((segment) => ({ segment, box: boxOf(segment) }));
+
+/** Distance from a place to the cutting line along an outward direction; no answer within reach. */
+export function reachCut(
+  cut: readonly Boxed[],
+  at: Point,
+  out: Point,
+  reach: number,
+): number | undefined {
+  const start = add(at, scale(out, -inside));
+  const end = add(at, scale(out, reach));
+  const left = Math.min(start.x, end.x);
+  const right = Math.max(start.x, end.x);
+  const top = Math.min(start.y, end.y);
+  const bottom = Math.max(start.y, end.y);
+  let nearest: number | undefined;
+  for (const { segment, box } of cut) {
+    if (box.right < left || box.left > right || box.bottom < top || box.top > bottom) continue;
+    for (const t of crossingsOfLine(segment, at, end)) {
+      const away = dot(subtract(pointAt(segment, t), at), out);
+      if (away < -inside || away > reach) continue;
+      if (nearest === undefined || Math.abs(away) < Math.abs(nearest)) nearest = away;
+    }
+  }
+  return nearest;
+}
+
+/** For each edge that has an allowance, the place where the cutting line is farthest from it. */
+export function worstClearances(piece: FinishedPiece, rules: HouseRules): readonly Clearance[] {
+  const cut = boxedCut(piece);
+  return piece.edges.flatMap((edge) => {
+    const wanted = allowanceOf(edge, rules);
+    if (wanted === undefined) return [];
+    let worst: Clearance | undefined;
+    for (const segment of edge.path) {
+      for (const t of lookOut[segment.kind]) {
+        const at = pointAt(segment, t);
+        const out = turnLeft(tangentAt(segment, t));
+        const found = reachCut(cut, at, out, wanted + 2 * inside) ?? -inside;
+        if (worst && Math.abs(found - wanted) <= Math.abs(worst.found - wanted)) continue;
+        worst = { edge, wanted, found, at };
+      }
+    }
+    return worst ? [worst] : [];
+  });
+}

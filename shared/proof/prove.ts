@@ -1,0 +1,53 @@
+import type { Construction } from '../drafting/construction.ts';
+import type { HouseRules } from '../drafting/house-rules.ts';
+import type { FinishedPiece } from '../drafting/piece.ts';
+import type { Said } from '../units/said.ts';
+import { proveCorners } from './corners.ts';
+import { proveDarts } from './darts.ts';
+import { proveGirths } from './girths.ts';
+import { joinedPairs, placeEdges } from './joined-edges.ts';
+import { proveOutlines } from './outlines.ts';
+import type { Proof, ProofLine } from './proof.ts';
+import { proveSeams } from './seams.ts';
+import { proveTopEdge } from './top-edge.ts';
+
+/** What a proof is made from: the pieces as cut, what they were meant to be, the allowances. */
+export type ProofInput = {
+  readonly pieces: readonly FinishedPiece[];
+  readonly construction: Construction;
+  readonly rules: HouseRules;
+};
+
+function verdictOf(lines: readonly ProofLine[]): Said {
+  const failed = lines.flatMap((line) => line.findings.filter((each) => !each.holds));
+  const [first, ...others] = failed;
+  if (first === undefined) return ['These pieces sew together.'];
+  const more =
+    others.length === 0
+      ? ''
+      : ` ${others.length} more ${others.length === 1 ? 'place does' : 'places do'} not hold.`;
+  return ['These pieces do not sew together yet. ', ...first.said, more];
+}
+
+/** The proof of a gown (method section 8, lines 1 to 5 and 8), measured from the pieces themselves. */
+export function prove({ pieces, construction, rules }: ProofInput): Proof {
+  const placed = placeEdges(pieces);
+  const pairs = joinedPairs(placed);
+  const girths = proveGirths(pieces, construction);
+  const seams = proveSeams(placed, pairs);
+  const lines = [
+    girths.line,
+    seams.line,
+    proveDarts(pieces, pairs),
+    proveCorners(pieces, pairs),
+    proveOutlines(pieces, rules),
+    proveTopEdge(pieces, construction, girths.chest),
+  ];
+  return {
+    holds: lines.every((line) => line.holds),
+    verdict: verdictOf(lines),
+    lines,
+    girths: girths.rows,
+    seams: seams.rows,
+  };
+}
