@@ -1,11 +1,18 @@
 import type { HouseRules } from '../drafting/house-rules.ts';
 import type { Edge, Piece } from '../drafting/piece.ts';
 import { clearLoops, crossesItself } from '../geometry/clear-loops.ts';
-import { type Joined, type Run, endAtLine, joinRuns, lines, startAtLine } from '../geometry/corner.ts';
+import {
+  type Joined,
+  type Run,
+  endAtLine,
+  joinRuns,
+  lines,
+  startAtLine,
+} from '../geometry/corner.ts';
 import { endTangent, startTangent } from '../geometry/curve.ts';
 import { parallel } from '../geometry/offset.ts';
-import type { Path, Segment } from '../geometry/path.ts';
-import { type Point, add, cross, distance, dot, scale, turnLeft } from '../geometry/point.ts';
+import { type Path, type Segment, line } from '../geometry/path.ts';
+import { type Point, add, cross, dot, scale, subtract, turnLeft, unit } from '../geometry/point.ts';
 import { allowanceOf, pressedOpen } from './allowance.ts';
 import { dartCap } from './dart-cap.ts';
 
@@ -49,7 +56,12 @@ function turnCorner(corner: Corner, first: Edge, second: Edge): Joined {
   const { a, b, at } = corner;
   const turn = Math.atan2(cross(a.along, b.along), dot(a.along, b.along));
   const folds = [first, second].map((edge) => edge.kind === 'hem' || pressedOpen(edge));
-  if (turn > leastMirrored && turn < mostMirrored && first.kind !== 'fold' && second.kind !== 'fold') {
+  if (
+    turn > leastMirrored &&
+    turn < mostMirrored &&
+    first.kind !== 'fold' &&
+    second.kind !== 'fold'
+  ) {
     // A hem is turned up after the seams that run into it, so there the hem is the fold.
     const firstFolds = folds[0] && second.kind !== 'hem' && !(folds[1] && first.kind !== 'hem');
     const secondFolds = folds[1] && first.kind !== 'hem' && !(folds[0] && second.kind !== 'hem');
@@ -65,18 +77,30 @@ function turnCorner(corner: Corner, first: Edge, second: Edge): Joined {
 
 const endOf = (path: Path): Point | undefined => path.at(-1)?.to;
 
+/** Adds a stretch to an outline; a straight one that runs on lengthens the one before it. */
+function append(outline: Segment[], segment: Segment): void {
+  const last = outline.at(-1);
+  if (last?.kind === 'line' && segment.kind === 'line') {
+    const along = unit(subtract(last.to, last.from));
+    const ahead = subtract(segment.to, last.from);
+    if (Math.abs(cross(along, ahead)) < 1e-6 && dot(along, subtract(segment.to, last.to)) > 0) {
+      outline[outline.length - 1] = line(last.from, segment.to);
+      return;
+    }
+  }
+  outline.push(segment);
+}
+
 /** Lays stretches end to end, bridging what gaps there are with straight pieces. */
 function closed(parts: readonly Path[]): Path {
   const outline: Segment[] = [];
-  for (const part of parts) {
-    for (const segment of part) {
-      const last = outline.at(-1)?.to;
-      if (last && distance(last, segment.from) > 1e-6) outline.push(...lines([last, segment.from]));
-      outline.push(segment);
-    }
+  for (const segment of parts.flat()) {
+    const last = outline.at(-1)?.to;
+    if (last) for (const bridge of lines([last, segment.from])) append(outline, bridge);
+    append(outline, segment);
   }
   const [start, end] = [outline[0]?.from, outline.at(-1)?.to];
-  if (start && end && distance(start, end) > 1e-6) outline.push(...lines([end, start]));
+  if (start && end) for (const bridge of lines([end, start])) append(outline, bridge);
   return outline;
 }
 
@@ -93,12 +117,8 @@ export function cutLine(piece: Piece, rules: HouseRules): Path {
       ? Math.max(own[(index + count - 1) % count] ?? 0, own[(index + 1) % count] ?? 0)
       : (own[index] ?? 0),
   );
-  let folded = false;
-  const runs = piece.edges.map((edge, index) => {
-    const side = parallel(edge.path, reach[index] ?? 0);
-    if (side.folded) folded = true;
-    return side.path;
-  });
+  const sides = piece.edges.map((edge, index) => parallel(edge.path, reach[index] ?? 0));
+  const runs = sides.map((side) => side.path);
   const bridges: Path[] = piece.edges.map(() => []);
   const runAt = (index: number, end: 'start' | 'end'): Run => ({
     path: runs[index] ?? [],
@@ -107,26 +127,28 @@ export function cutLine(piece: Piece, rules: HouseRules): Path {
   });
 
   const capped = new Set<number>();
-  piece.edges.forEach((edge, index) => {
+  for (const [index, edge] of piece.edges.entries()) {
     const dart = edge.open ? piece.darts.find((each) => each.mouth === edge.name) : undefined;
-    if (!dart) return;
+    if (!dart) continue;
     const last = (index + count - 1) % count;
     const next = (index + 1) % count;
     const cap = dartCap(edge, dart, runAt(last, 'end'), runAt(next, 'start'));
-    if (!cap) return;
+    if (!cap) continue;
     [runs[last], runs[index], runs[next]] = [cap.before, cap.cap, cap.after];
     capped.add(index);
-  });
+  }
 
-  piece.edges.forEach((edge, index) => {
+  let folded = sides.some((side) => side.folded);
+  for (const [index, edge] of piece.edges.entries()) {
     const next = (index + 1) % count;
     const following = piece.edges[next];
     const at = endOf(edge.path);
-    if (!following || !at || capped.has(index) || capped.has(next)) return;
-    const joined = turnCorner({ a: runAt(index, 'end'), b: runAt(next, 'start'), at }, edge, following);
+    if (!following || !at || capped.has(index) || capped.has(next)) continue;
+    const corner = { a: runAt(index, 'end'), b: runAt(next, 'start'), at };
+    const joined = turnCorner(corner, edge, following);
     if (joined.folded) folded = true;
     [runs[index], bridges[index], runs[next]] = [joined.before, joined.between, joined.after];
-  });
+  }
 
   const outline = closed(runs.flatMap((run, index) => [run, bridges[index] ?? []]));
   return folded || crossesItself(outline) ? clearLoops(outline) : outline;

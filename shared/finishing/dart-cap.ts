@@ -3,7 +3,16 @@ import { pathCrossings, reverse, splitPath, startOf, startTangent } from '../geo
 import { type Run, endAtLine, startAtLine } from '../geometry/corner.ts';
 import type { Path } from '../geometry/path.ts';
 import { line } from '../geometry/path.ts';
-import { type Point, add, between, distance, dot, scale, subtract, unit } from '../geometry/point.ts';
+import {
+  type Point,
+  add,
+  between,
+  distance,
+  dot,
+  scale,
+  subtract,
+  unit,
+} from '../geometry/point.ts';
 
 /** An endless line: a place on it and its direction, length one. */
 type Crease = { readonly at: Point; readonly along: Point };
@@ -66,14 +75,25 @@ export function dartCap(mouth: Edge, dart: Dart, before: Run, after: Run): DartC
       : [dart.sideLeg, dart.centreLeg];
   const first: Crease = { at: start, along: startTangent(legBefore) };
   const second: Crease = { at: end, along: startTangent(legAfter) };
-  const middle: Crease = { at: between(start, end, 0.5), along: unit(add(first.along, second.along)) };
+  const middle: Crease = {
+    at: between(start, end, 0.5),
+    along: unit(add(first.along, second.along)),
+  };
   const cutBefore = endAtLine(before, start, first.at, first.along);
   const cutAfter = startAtLine(after, end, second.at, second.along);
   if (!cutBefore || !cutAfter) return undefined;
   if (laidBefore(dart, legBefore, legAfter)) {
     const near = toMiddle(mirroredPath(reverse(cutBefore), first), middle);
-    return { before: cutBefore, cap: [...near, ...reverse(mirroredPath(near, middle))], after: cutAfter };
+    return {
+      before: cutBefore,
+      cap: [...near, ...reverse(mirroredPath(near, middle))],
+      after: cutAfter,
+    };
   }
   const near = toMiddle(mirroredPath(cutAfter, second), middle);
-  return { before: cutBefore, cap: [...mirroredPath(near, middle), ...reverse(near)], after: cutAfter };
+  return {
+    before: cutBefore,
+    cap: [...mirroredPath(near, middle), ...reverse(near)],
+    after: cutAfter,
+  };
 }

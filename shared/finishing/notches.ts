@@ -1,7 +1,7 @@
 import type { Notch, NotchMark } from '../drafting/piece.ts';
 import { crossingsOfLine, pointAt } from '../geometry/curve.ts';
-import { type Path, line } from '../geometry/path.ts';
-import { type Point, add, dot, scale, subtract, turnRight } from '../geometry/point.ts';
+import { type Path, type Segment, line } from '../geometry/path.ts';
+import { type Point, add, cross, dot, scale, subtract, turnRight } from '../geometry/point.ts';
 
 /** Distance between the two strokes of a back notch, mm (common practice, no source). */
 const strokeGap = 6;
@@ -12,11 +12,20 @@ const longest = 80;
 /** A stroke on a fold, where no allowance stands, is drawn this far into the piece, mm. */
 const onFold = 5;
 
+/** Whether a stretch may cross the endless line through a place: its handles lie on both sides. */
+function mayCross(segment: Segment, from: Point, along: Point): boolean {
+  const side = (p: Point): number => cross(along, subtract(p, from));
+  const ends = [side(segment.from), side(segment.to)];
+  const all = segment.kind === 'line' ? ends : [...ends, side(segment.c1), side(segment.c2)];
+  return Math.min(...all) <= 0 && Math.max(...all) >= 0;
+}
+
 /** How far out from a place the cutting line lies; no answer where it is not met. */
 function reachOut(cutLine: Path, from: Point, outward: Point): number | undefined {
   const beyond = add(from, outward);
   let nearest: number | undefined;
   for (const segment of cutLine) {
+    if (!mayCross(segment, from, outward)) continue;
     for (const t of crossingsOfLine(segment, from, beyond)) {
       const reach = dot(subtract(pointAt(segment, t), from), outward);
       if (reach < -1e-6 || reach > longest) continue;

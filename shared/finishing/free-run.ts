@@ -1,0 +1,153 @@
+import type { Piece } from '../drafting/piece.ts';
+import { flatten } from '../geometry/curve.ts';
+import type { Path } from '../geometry/path.ts';
+import type { Point } from '../geometry/point.ts';
+
+/** A stretch of x, mm, that nothing crosses. */
+export type Span = { readonly left: number; readonly right: number };
+
+/** The free stretches of a piece at evenly spaced heights, from its top down. */
+export type FreeRows = {
+  readonly top: number;
+  readonly spacing: number;
+  readonly rows: readonly (readonly Span[])[];
+};
+
+/** A free rectangle in which lettering may stand. */
+export type FreePlace = Span & { readonly top: number };
+
+const rowsAtMost = 48;
+const leastSpacing = 5;
+/** Kept clear of the outline and of darts, grain line and drill points, mm. */
+const clearOfOutline = 9;
+const clearOfMarks = 3;
+
+type Chain = readonly Point[];
+
+/** Evenly spaced heights, mm. */
+type Heights = { readonly top: number; readonly spacing: number; readonly count: number };
+
+/** Where a closed chain of points crosses each height, from left to right. */
+function crossings(chain: Chain, { top, spacing, count }: Heights): readonly number[][] {
+  const found: number[][] = Array.from({ length: count }, () => []);
+  let before = chain.at(-1);
+  for (const p of chain) {
+    if (before && before.y !== p.y) {
+      const [upper, lower] = before.y < p.y ? [before, p] : [p, before];
+      const slope = (lower.x - upper.x) / (lower.y - upper.y);
+      const first = Math.max(0, Math.ceil((upper.y - top) / spacing - 0.5));
+      const last = Math.min(count - 1, Math.ceil((lower.y - top) / spacing - 0.5) - 1);
+      for (let row = first; row <= last; row += 1) {
+        found[row]?.push(upper.x + (top + (row + 0.5) * spacing - upper.y) * slope);
+      }
+    }
+    before = p;
+  }
+  for (const row of found) row.sort((a, b) => a - b);
+  return found;
+}
+
+function without(spans: readonly Span[], left: number, right: number): readonly Span[] {
+  if (spans.every((span) => span.right <= left || span.left >= right)) return spans;
+  return spans
+    .flatMap((span) => [
+      { left: span.left, right: Math.min(span.right, left) },
+      { left: Math.max(span.left, right), right: span.right },
+    ])
+    .filter((span) => span.right - span.left > 1);
+}
+
+const chainOf = (paths: readonly Path[]): Chain => paths.flatMap((path) => flatten(path, 1));
+
+/** Straight marks as chains there and back, so that they cross a height like any outline. */
+function marks(piece: Piece): readonly Chain[] {
+  const darts = piece.darts.map((dart) => [
+    ...flatten(dart.centreLeg, 1),
+    ...flatten(dart.sideLeg, 1).toReversed(),
+  ]);
+  const drills = piece.drills.map(({ x, y }) => [
+    { x: x - 2, y: y - 6 },
+    { x: x + 2, y: y + 6 },
+  ]);
+  return [...darts, [piece.grain.from, piece.grain.to], ...drills];
+}
+
+/** The stretches at evenly spaced heights that lie inside the finished outline and clear of its marks. */
+export function freeRows(piece: Piece): FreeRows {
+  const outline = chainOf(piece.edges.map((edge) => edge.path));
+  let top = Infinity;
+  let foot = -Infinity;
+  for (const { y } of outline) {
+    if (y < top) top = y;
+    if (y > foot) foot = y;
+  }
+  const spacing = Math.max(leastSpacing, (foot - top) / rowsAtMost);
+  const heights = { top, spacing, count: Math.max(0, Math.floor((foot - top) / spacing)) };
+  const obstacles = marks(piece).map((mark) => crossings(mark, heights));
+  const rows = crossings(outline, heights).map((met, row) => {
+    const inside: Span[] = [];
+    for (let i = 1; i < met.length; i += 2) {
+      const left = (met[i - 1] ?? 0) + clearOfOutline;
+      const right = (met[i] ?? 0) - clearOfOutline;
+      if (right > left) inside.push({ left, right });
+    }
+    let spans: readonly Span[] = inside;
+    for (const obstacle of obstacles) {
+      const hits = obstacle[row] ?? [];
+      const [first, last] = [hits[0], hits.at(-1)];
+      if (first !== undefined && last !== undefined) {
+        spans = without(spans, first - clearOfMarks, last + clearOfMarks);
+      }
+    }
+    return spans;
+  });
+  return { top, spacing, rows };
+}
+
+function overlap(a: readonly Span[], b: readonly Span[]): readonly Span[] {
+  const both: Span[] = [];
+  for (const one of a) {
+    for (const other of b) {
+      const left = Math.max(one.left, other.left);
+      const right = Math.min(one.right, other.right);
+      if (right > left) both.push({ left, right });
+    }
+  }
+  return both;
+}
+
+const widest = (spans: readonly Span[]): Span | undefined =>
+  spans.reduce<Span | undefined>(
+    (best, span) => (best && best.right - best.left >= span.right - span.left ? best : span),
+    undefined,
+  );
+
+/** The widest stretch free over a whole block of rows. */
+function freeOver(rows: FreeRows['rows'], start: number, count: number): Span | undefined {
+  let spans = rows[start] ?? [];
+  for (let row = start + 1; row < start + count && spans.length > 0; row += 1) {
+    spans = overlap(spans, rows[row] ?? []);
+  }
+  return widest(spans);
+}
+
+/**
+ * The free place for a block of the given width and height, mm, nearest to two fifths of the way
+ * down the piece; where it fits nowhere, the widest of its height; none on a piece too low for it.
+ */
+export function freePlace(free: FreeRows, width: number, height: number): FreePlace | undefined {
+  const window = Math.ceil(height / free.spacing) + 1;
+  const last = free.rows.length - window;
+  const aim = Math.max(0, Math.min(last, Math.round(0.4 * free.rows.length - window / 2)));
+  let best: FreePlace | undefined;
+  for (let away = 0; away <= last; away += 1) {
+    for (const start of away === 0 ? [aim] : [aim - away, aim + away]) {
+      if (start < 0 || start > last) continue;
+      const span = freeOver(free.rows, start, window);
+      if (!span || (best && span.right - span.left <= best.right - best.left)) continue;
+      best = { ...span, top: free.top + (start + 0.5) * free.spacing };
+      if (span.right - span.left >= width) return best;
+    }
+  }
+  return best;
+}

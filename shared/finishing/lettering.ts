@@ -1,0 +1,143 @@
+import type { Lettering, Piece } from '../drafting/piece.ts';
+import { type FreePlace, freePlace, freeRows } from './free-run.ts';
+
+/** What the label of every piece of a draft says besides the piece's own name and cut. */
+export type LabelFacts = {
+  /** Whose card, as typed; absent where the card has no name. */
+  readonly cardName?: string | undefined;
+  /** Day of the card, `2026-11-14`. */
+  readonly date?: string | undefined;
+  readonly draftNumber: string;
+  /** What it is cut from: `cloth`, `lining`. */
+  readonly cloth: string;
+};
+
+type Line = { readonly text: string; readonly size: number };
+
+/** How large the lettering is tried, from the best to the smallest: sizes in mm and widest line. */
+const layouts = [
+  { title: 7, text: 5, note: 4, width: 130 },
+  { title: 6, text: 4.5, note: 4, width: 80 },
+  { title: 5, text: 4, note: 4, width: 54 },
+  { title: 4, text: 4, note: 4, width: 38 },
+] as const;
+
+/** Longest name written out, characters. */
+const longestName = 40;
+
+/** Height of a line over the size of its letters. */
+const leading = 1.35;
+
+const narrow = new Set(" .,:;'’!|ijl·()");
+const broad = new Set('mwMW%@…');
+
+/** Width of a letter over its height, on the safe side of the sans-serif faces it may be drawn in. */
+function letterWidth(letter: string): number {
+  if (narrow.has(letter)) return 0.36;
+  if (broad.has(letter) || letter >= '\u2e80') return 1;
+  return (letter >= 'A' && letter <= 'Z') || letter >= '\u00c0' ? 0.72 : 0.6;
+}
+
+/** Width of a text, mm. */
+function textWidth(text: string, size: number): number {
+  let ems = 0;
+  for (const letter of text) ems += letterWidth(letter);
+  return ems * size;
+}
+
+/** A typed text on one line: no control characters, no runs of spaces. */
+const plain = (text: string): string => text.replace(/[\p{C}\s]+/gu, ' ').trim();
+
+/** A text of at most so many characters, shortened with an ellipsis. */
+function shortened(text: string, most: number): string {
+  const letters = Array.from(text);
+  return letters.length <= most
+    ? text
+    : `${letters
+        .slice(0, most - 1)
+        .join('')
+        .trimEnd()}…`;
+}
+
+/** A text shortened with an ellipsis until it is no wider than `width` mm. */
+function fitted(text: string, size: number, width: number): string {
+  let most = Array.from(text).length;
+  let shown = text;
+  while (most > 1 && textWidth(shown, size) > width) {
+    most -= 1;
+    shown = shortened(text, most);
+  }
+  return shown;
+}
+
+/** A line broken between words so that no part is wider than `width` mm. */
+function wrapped(line: Line, width: number): readonly Line[] {
+  if (textWidth(line.text, line.size) <= width) return [line];
+  const parts: string[] = [];
+  for (const word of line.text.split(' ')) {
+    const last = parts.at(-1);
+    const longer = last === undefined ? word : `${last} ${word}`;
+    if (last !== undefined && textWidth(longer, line.size) <= width)
+      parts[parts.length - 1] = longer;
+    else parts.push(word);
+  }
+  return parts
+    .map((part) => part.replace(/ ·$|^· /, ''))
+    .filter((part) => part !== '' && part !== '·')
+    .map((part) => ({ text: fitted(part, line.size, width), size: line.size }));
+}
+
+function label(piece: Piece, facts: LabelFacts, sizes: (typeof layouts)[number]): readonly Line[] {
+  const card = [facts.cardName, facts.date]
+    .map((each) => shortened(plain(each ?? ''), longestName))
+    .filter((each) => each !== '')
+    .join(' · ');
+  const lines: readonly Line[] = [
+    { text: piece.title, size: sizes.title },
+    { text: piece.cut, size: sizes.text },
+    { text: card, size: sizes.text },
+    { text: `draft ${facts.draftNumber} · ${plain(facts.cloth)}`, size: sizes.note },
+    { text: 'seam line dashed · cut on the solid line', size: sizes.note },
+    { text: 'print at 100 %', size: sizes.note },
+  ];
+  return lines.filter((line) => line.text !== '').flatMap((line) => wrapped(line, sizes.width));
+}
+
+function set(lines: readonly Line[], place: FreePlace, width: number): readonly Lettering[] {
+  const left = place.left + Math.max(0, (place.right - place.left - width) / 2);
+  let y = place.top;
+  return lines.map(({ text, size }) => {
+    y += size * leading;
+    return { text, size, at: { x: left, y: y - 0.35 * size } };
+  });
+}
+
+/**
+ * The label of a piece, line by line, in letters 4 to 7 mm high: where it fits inside the finished
+ * outline clear of darts, grain line and drill points. A piece too small for all of it carries as many
+ * lines as it holds, its name first; none where not even a short name would lie inside.
+ */
+export function lettering(piece: Piece, facts: LabelFacts): readonly Lettering[] {
+  const free = freeRows(piece);
+  let lines: readonly Line[] = [];
+  for (const sizes of layouts) {
+    lines = label(piece, facts, sizes);
+    const width = Math.max(...lines.map((line) => textWidth(line.text, line.size)));
+    const height = lines.reduce((sum, line) => sum + line.size * leading, 0);
+    const place = freePlace(free, width, height);
+    if (place && place.right - place.left >= width) return set(lines, place, width);
+  }
+  for (let count = lines.length - 1; count > 0; count -= 1) {
+    const kept = lines.slice(0, count);
+    const place = freePlace(free, 38, count * 4 * leading);
+    if (!place || place.right - place.left < 16) continue;
+    const run = place.right - place.left;
+    const short = kept.map((line) => ({ ...line, text: fitted(line.text, line.size, run) }));
+    return set(
+      short,
+      place,
+      Math.min(run, Math.max(...short.map((each) => textWidth(each.text, 4)))),
+    );
+  }
+  return [];
+}
