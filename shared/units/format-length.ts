@@ -3,6 +3,12 @@ import type { Unit } from './said.ts';
 /** Millimetres in an inch, exact since the international inch of 1959. */
 export const millimetresPerInch = 25.4;
 
+/**
+ * Half a sixteenth of an inch: as far as a bound may lie from how it reads. Checks allow it, so that a bound typed as it
+ * was shown is taken.
+ */
+export const readingGrace = millimetresPerInch / 32;
+
 const minus = '\u2212';
 /** Keeps the whole and its fraction on one line: parted, they would be read as two numbers. */
 const join = '\u00a0';
