@@ -5,7 +5,7 @@ import { startServer } from './server-process.mjs';
 import { run } from './shell.mjs';
 
 /** Journeys of many browsers come from one address; the limits have tests of their own. */
-const roomForManyBrowsers = { PRINT_PER_MINUTE: '1000', DRAFTS_PER_MINUTE: '1000' };
+const roomForManyBrowsers = { PRINTS_PER_MINUTE: '1000', DRAFTS_PER_MINUTE: '1000' };
 
 /**
  * Runs browser journeys against the production build, on a cluster and a port of their own.

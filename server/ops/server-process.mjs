@@ -42,10 +42,13 @@ export async function startServer(args, address, env) {
     child.kill('SIGTERM');
     await ended;
   };
-  for (const until = Date.now() + 60_000; Date.now() < until; await pause(50)) {
-    if (child.exitCode !== null)
+  const until = Date.now() + 60_000;
+  while (Date.now() < until) {
+    if (child.exitCode !== null) {
       throw new StopError(`The server ended at once (code ${child.exitCode}).`);
+    }
     if ((await whoAnswers(address)) === 'ellwand') return { ended, stop };
+    await pause(50);
   }
   await stop();
   throw new StopError('The server did not answer within a minute.');

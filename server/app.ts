@@ -1,0 +1,50 @@
+import express, { type Express } from 'express';
+import type { Logger } from 'pino';
+import type { Database } from './database/client.ts';
+import { ping } from './database/client.ts';
+import { draftsRouter } from './features/drafts/router.ts';
+import { printRouter } from './features/print/router.ts';
+import { samplesRouter } from './features/samples/router.ts';
+import { errorReply } from './http/error-reply.ts';
+import { RefusalError } from './http/refusal.ts';
+import { requestLog } from './http/request-log.ts';
+import { securityHeaders } from './http/security-headers.ts';
+import type { Limits } from './settings.ts';
+
+/** All an application is built from; nothing in it is global. */
+export type Parts = {
+  readonly database: Database;
+  readonly log: Logger;
+  readonly limits: Limits;
+  readonly overHttps: boolean;
+  readonly trustedProxies: number;
+  /** What answers outside the API: the built screens, or Vite in development. */
+  readonly screens: express.RequestHandler;
+  /** Development needs inline scripts, which the content security policy forbids. */
+  readonly strictHeaders: boolean;
+};
+
+const bodyLimit = '64kb';
+
+/** Builds the application; it does not listen. */
+export function buildApp(parts: Parts): Express {
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('trust proxy', parts.trustedProxies);
+  app.use(requestLog(parts.log));
+  app.use(securityHeaders({ overHttps: parts.overHttps, strict: parts.strictHeaders }));
+  app.get('/api/health', async (_request, response) => {
+    await ping(parts.database);
+    response.setHeader('Cache-Control', 'no-store').json({ name: 'ellwand', database: 'answers' });
+  });
+  app.use('/api', express.json({ limit: bodyLimit }));
+  app.use(samplesRouter(parts.database));
+  app.use(draftsRouter(parts.limits));
+  app.use(printRouter(parts.limits));
+  app.use('/api', (_request, _response, next) => {
+    next(new RefusalError('not-found', 'The API has nothing at this address.'));
+  });
+  app.use(parts.screens);
+  app.use(errorReply(parts.log));
+  return app;
+}

@@ -1,0 +1,69 @@
+import type { ErrorRequestHandler } from 'express';
+import type { Logger } from 'pino';
+import { RefusalError, statusOf } from './refusal.ts';
+import { requestIdOf } from './request-log.ts';
+
+/**
+ * What may be logged of a bug: its kind and where it happened. Messages are left out, as they can
+ * quote what a person typed (a query's parameters, a piece of the body).
+ */
+function traceOf(error: unknown): { kind: string; code?: unknown; frames: string[] } {
+  if (!(error instanceof Error)) return { kind: typeof error, frames: [] };
+  const frames = (error.stack ?? '')
+    .split('\n')
+    .filter((line) => line.trimStart().startsWith('at '));
+  const cause = error.cause instanceof Error ? error.cause : error;
+  return {
+    kind: `${error.name}${cause === error ? '' : ` of ${cause.name}`}`,
+    ...('code' in cause ? { code: cause.code } : {}),
+    frames: frames.slice(0, 12).map((line) => line.trim()),
+  };
+}
+
+/** Refusals of the body parser, in our words; its own quote the body. */
+function fromParser(error: unknown): RefusalError | undefined {
+  if (typeof error !== 'object' || error === null || !('type' in error)) return undefined;
+  if (error.type === 'entity.too.large') {
+    return new RefusalError(
+      'too-large',
+      'The request is larger than 64 kB. A card and a style need a few kB.',
+    );
+  }
+  if (typeof error.type === 'string' && /^(entity|encoding|charset|request)\./.test(error.type)) {
+    return new RefusalError('malformed', 'The request is not readable JSON in UTF-8.');
+  }
+  return undefined;
+}
+
+/** A path that cannot be decoded is a stranger's mistake, not a bug. */
+function fromPath(error: unknown): RefusalError | undefined {
+  return error instanceof URIError
+    ? new RefusalError('malformed', 'The address is not readable.')
+    : undefined;
+}
+
+/** Turns every failure into one shape of reply; only bugs are logged, with the request's id. */
+export const errorReply =
+  (log: Logger): ErrorRequestHandler =>
+  (error: unknown, _request, response, next) => {
+    if (response.headersSent) {
+      next(error);
+      return;
+    }
+    const known = error instanceof RefusalError ? error : (fromParser(error) ?? fromPath(error));
+    const id = requestIdOf(response);
+    if (known === undefined) log.error({ id, ...traceOf(error) }, 'fault');
+    const refusal =
+      known ??
+      new RefusalError('fault', 'Something went wrong here. It is noted under the id given.');
+    if (refusal.retryAfterSeconds !== undefined) {
+      response.setHeader('Retry-After', String(refusal.retryAfterSeconds));
+    }
+    response.setHeader('Cache-Control', 'no-store');
+    response.status(statusOf[refusal.code]).json({
+      code: refusal.code,
+      message: refusal.message,
+      problems: refusal.problems,
+      requestId: id,
+    });
+  };

@@ -1,0 +1,42 @@
+import type { RequestHandler } from 'express';
+import { pino } from 'pino';
+import { buildApp } from './app.ts';
+import { connect } from './database/client.ts';
+import { migrate } from './database/migrate.ts';
+import { seedSamples } from './database/sample-seed.ts';
+import { listen } from './listen.ts';
+import { places, readSettings } from './settings.ts';
+
+/** Runs a server until it is asked to stop: database brought up to date first, then open. */
+export async function runServer(screens: {
+  readonly handler: RequestHandler;
+  readonly strictHeaders: boolean;
+  readonly close?: () => Promise<void>;
+}): Promise<void> {
+  const settings = readSettings(process.env);
+  const log = pino({ level: settings.logLevel, base: null });
+  const { database, close } = connect(settings.databaseUrl, (error) => {
+    log.warn({ kind: error.name }, 'a database connection was lost');
+  });
+  await migrate(database, places.migrations);
+  await seedSamples(database);
+  const { limits, overHttps, trustedProxies } = settings;
+  const app = buildApp({
+    database,
+    log,
+    limits,
+    overHttps,
+    trustedProxies,
+    screens: screens.handler,
+    strictHeaders: screens.strictHeaders,
+  });
+  const stopListening = await listen(app, settings.port, settings.host);
+  log.info({ port: settings.port }, 'open');
+  const stop = async () => {
+    await stopListening();
+    await screens.close?.();
+    await close();
+    log.info('closed');
+  };
+  for (const signal of ['SIGINT', 'SIGTERM'] as const) process.once(signal, () => void stop());
+}

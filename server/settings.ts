@@ -1,0 +1,64 @@
+import { dirname, join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+
+/** What the surroundings decide about a running server. */
+export type Settings = {
+  readonly databaseUrl: string;
+  readonly host: string;
+  readonly port: number;
+  /** Whether people reach it over https, so that browsers are told to stay there. */
+  readonly overHttps: boolean;
+  /** How many proxies stand before it and are believed about addresses. */
+  readonly trustedProxies: number;
+  readonly logLevel: string;
+  readonly limits: Limits;
+};
+
+/** How much one address, and all together, may ask for. */
+export type Limits = {
+  readonly draftsPerMinute: number;
+  readonly printsPerMinute: number;
+  /** Prints that may wait for their turn; further ones are sent away for a moment. */
+  readonly printsWaiting: number;
+};
+
+function wholeNumber(env: NodeJS.ProcessEnv, name: string, otherwise: number): number {
+  const text = env[name];
+  if (text === undefined || text === '') return otherwise;
+  const value = Number(text);
+  if (!Number.isInteger(value) || value < 0) {
+    throw new Error(`${name} must be a whole number, 0 or more; it is "${text}".`);
+  }
+  return value;
+}
+
+/** Reads the settings from the environment; throws a plain sentence where one cannot be right. */
+export function readSettings(env: NodeJS.ProcessEnv): Settings {
+  const databaseUrl = env['DATABASE_URL'];
+  if (databaseUrl === undefined || databaseUrl === '') {
+    throw new Error('DATABASE_URL must name a PostgreSQL database; npm start sets it by itself.');
+  }
+  return {
+    databaseUrl,
+    host: env['HOST'] ?? '127.0.0.1',
+    port: wholeNumber(env, 'PORT', 4173),
+    overHttps: env['PUBLIC_URL']?.startsWith('https:') ?? false,
+    trustedProxies: wholeNumber(env, 'TRUST_PROXY', 0),
+    logLevel: env['LOG_LEVEL'] ?? 'info',
+    limits: {
+      draftsPerMinute: wholeNumber(env, 'DRAFTS_PER_MINUTE', 240),
+      printsPerMinute: wholeNumber(env, 'PRINTS_PER_MINUTE', 30),
+      printsWaiting: wholeNumber(env, 'PRINTS_WAITING', 24),
+    },
+  };
+}
+
+/** Folder of this file: `server/` as written, `dist/server/` when bundled. */
+const here = dirname(fileURLToPath(import.meta.url));
+const isBundled = here.endsWith(join('dist', 'server'));
+
+/** Where the files lie that the server reads beside its code. */
+export const places = {
+  migrations: isBundled ? join(here, 'migrations') : join(here, 'database', 'migrations'),
+  client: isBundled ? join(here, '..', 'client') : join(here, '..', 'dist', 'client'),
+};

@@ -1,0 +1,64 @@
+import { randomBytes } from 'node:crypto';
+import type { RequestHandler } from 'express';
+import { Client } from 'pg';
+import { pino } from 'pino';
+import { inject } from 'vitest';
+import { buildApp } from '#server/app.ts';
+import { connect } from '#server/database/client.ts';
+import { listen } from '#server/listen.ts';
+import type { Limits } from '#server/settings.ts';
+import { freePort } from '#server/ops/free-port.mjs';
+import { template } from './cluster-setup.ts';
+
+export type ServerUnderTest = {
+  readonly address: string;
+  /** Every line the server has logged so far. */
+  readonly logged: () => string;
+  readonly databaseUrl: string;
+  readonly close: () => Promise<void>;
+};
+
+const roomy: Limits = { draftsPerMinute: 10_000, printsPerMinute: 10_000, printsWaiting: 100 };
+
+async function asAdmin(sentence: string): Promise<void> {
+  const admin = new Client({ connectionString: inject('clusterUrl') });
+  await admin.connect();
+  await admin.query(sentence);
+  await admin.end();
+}
+
+/** A real server on a real database of its own, cloned from the template. */
+export async function startServer(
+  options: {
+    readonly limits?: Partial<Limits>;
+    readonly screens?: RequestHandler;
+    readonly overHttps?: boolean;
+  } = {},
+): Promise<ServerUnderTest> {
+  const name = `clone_${randomBytes(6).toString('hex')}`;
+  await asAdmin(`create database ${name} template ${template}`);
+  const databaseUrl = inject('clusterUrl').replace(/postgres$/, name);
+  const { database, close } = connect(databaseUrl, () => undefined);
+  const lines: string[] = [];
+  const app = buildApp({
+    database,
+    log: pino({ base: null }, { write: (line) => void lines.push(line) }),
+    limits: { ...roomy, ...options.limits },
+    overHttps: options.overHttps ?? false,
+    trustedProxies: 0,
+    screens: options.screens ?? ((_request, _response, next) => next()),
+    strictHeaders: true,
+  });
+  const port = await freePort();
+  const stopListening = await listen(app, port, '127.0.0.1');
+  return {
+    address: `http://127.0.0.1:${port}`,
+    logged: () => lines.join(''),
+    databaseUrl,
+    close: async () => {
+      await stopListening();
+      await close();
+      await asAdmin(`drop database if exists ${name} with (force)`);
+    },
+  };
+}
