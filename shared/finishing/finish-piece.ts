@@ -13,7 +13,7 @@ export function finishPiece(piece: Piece, rules: HouseRules, label: LabelFacts):
   return {
     ...piece,
     cutLine: outline,
-    notchMarks: piece.notches.map((notch) => notchMark(notch, outline)),
+    notchMarks: piece.notches.map((notch) => notchMark(notch, piece, outline, rules)),
     lettering: lettering(piece, label),
   };
 }

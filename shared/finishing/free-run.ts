@@ -16,7 +16,7 @@ export type FreeRows = {
 /** A free rectangle in which lettering may stand. */
 export type FreePlace = Span & { readonly top: number };
 
-const rowsAtMost = 48;
+const rowsAtMost = 32;
 const leastSpacing = 5;
 /** Kept clear of the outline and of darts, grain line and drill points, mm. */
 const clearOfOutline = 9;
@@ -27,9 +27,9 @@ type Chain = readonly Point[];
 /** Evenly spaced heights, mm. */
 type Heights = { readonly top: number; readonly spacing: number; readonly count: number };
 
-/** Where a closed chain of points crosses each height, from left to right. */
-function crossings(chain: Chain, { top, spacing, count }: Heights): readonly number[][] {
-  const found: number[][] = Array.from({ length: count }, () => []);
+/** Visits every place where a closed chain of points crosses one of the heights. */
+function cross(chain: Chain, heights: Heights, visit: (row: number, x: number) => void): void {
+  const { top, spacing, count } = heights;
   let before = chain.at(-1);
   for (const p of chain) {
     if (before && before.y !== p.y) {
@@ -38,26 +38,55 @@ function crossings(chain: Chain, { top, spacing, count }: Heights): readonly num
       const first = Math.max(0, Math.ceil((upper.y - top) / spacing - 0.5));
       const last = Math.min(count - 1, Math.ceil((lower.y - top) / spacing - 0.5) - 1);
       for (let row = first; row <= last; row += 1) {
-        found[row]?.push(upper.x + (top + (row + 0.5) * spacing - upper.y) * slope);
+        visit(row, upper.x + (top + (row + 0.5) * spacing - upper.y) * slope);
       }
     }
     before = p;
   }
-  for (const row of found) row.sort((a, b) => a - b);
-  return found;
+}
+
+/** The free stretches of each row inside a closed chain. */
+function insideOf(outline: Chain, heights: Heights): (readonly Span[])[] {
+  const met: number[][] = Array.from({ length: heights.count }, () => []);
+  cross(outline, heights, (row, x) => met[row]?.push(x));
+  return met.map((row) => {
+    row.sort((a, b) => a - b);
+    const spans: Span[] = [];
+    for (let i = 1; i < row.length; i += 2) {
+      const left = (row[i - 1] ?? 0) + clearOfOutline;
+      const right = (row[i] ?? 0) - clearOfOutline;
+      if (right > left) spans.push({ left, right });
+    }
+    return spans;
+  });
 }
 
 function without(spans: readonly Span[], left: number, right: number): readonly Span[] {
-  if (spans.every((span) => span.right <= left || span.left >= right)) return spans;
-  return spans
-    .flatMap((span) => [
-      { left: span.left, right: Math.min(span.right, left) },
-      { left: Math.max(span.left, right), right: span.right },
-    ])
-    .filter((span) => span.right - span.left > 1);
+  const kept: Span[] = [];
+  for (const span of spans) {
+    if (span.right <= left || span.left >= right) kept.push(span);
+    else {
+      if (left - span.left > 1) kept.push({ left: span.left, right: left });
+      if (span.right - right > 1) kept.push({ left: right, right: span.right });
+    }
+  }
+  return kept;
 }
 
-const chainOf = (paths: readonly Path[]): Chain => paths.flatMap((path) => flatten(path, 1));
+/** Takes a mark's width, and a little on either side, out of the rows it crosses. */
+function takeOut(rows: (readonly Span[])[], mark: Chain, heights: Heights): void {
+  const left: number[] = [];
+  const right: number[] = [];
+  cross(mark, heights, (row, x) => {
+    left[row] = Math.min(left[row] ?? x, x);
+    right[row] = Math.max(right[row] ?? x, x);
+  });
+  left.forEach((x, row) => {
+    rows[row] = without(rows[row] ?? [], x - clearOfMarks, (right[row] ?? x) + clearOfMarks);
+  });
+}
+
+const chainOf = (paths: readonly Path[]): Chain => paths.flatMap((path) => flatten(path, 2));
 
 /** Straight marks as chains there and back, so that they cross a height like any outline. */
 function marks(piece: Piece): readonly Chain[] {
@@ -83,24 +112,8 @@ export function freeRows(piece: Piece): FreeRows {
   }
   const spacing = Math.max(leastSpacing, (foot - top) / rowsAtMost);
   const heights = { top, spacing, count: Math.max(0, Math.floor((foot - top) / spacing)) };
-  const obstacles = marks(piece).map((mark) => crossings(mark, heights));
-  const rows = crossings(outline, heights).map((met, row) => {
-    const inside: Span[] = [];
-    for (let i = 1; i < met.length; i += 2) {
-      const left = (met[i - 1] ?? 0) + clearOfOutline;
-      const right = (met[i] ?? 0) - clearOfOutline;
-      if (right > left) inside.push({ left, right });
-    }
-    let spans: readonly Span[] = inside;
-    for (const obstacle of obstacles) {
-      const hits = obstacle[row] ?? [];
-      const [first, last] = [hits[0], hits.at(-1)];
-      if (first !== undefined && last !== undefined) {
-        spans = without(spans, first - clearOfMarks, last + clearOfMarks);
-      }
-    }
-    return spans;
-  });
+  const rows = insideOf(outline, heights);
+  for (const mark of marks(piece)) takeOut(rows, mark, heights);
   return { top, spacing, rows };
 }
 
