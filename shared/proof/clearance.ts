@@ -2,8 +2,9 @@ import type { Edge, FinishedPiece } from '../drafting/piece.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
 import { crossingsOfLine, pointAt, tangentAt } from '../geometry/curve.ts';
 import type { Segment } from '../geometry/path.ts';
-import { type Point, add, dot, scale, subtract, turnLeft } from '../geometry/point.ts';
+import { type Point, add, distance, dot, scale, subtract, turnLeft } from '../geometry/point.ts';
 import { boxOf } from './crossing-itself.ts';
+import { cornerBetween } from './joined-edges.ts';
 
 /** Shares of a stretch at which its clearance is taken. */
 const lookOut = {
@@ -59,16 +60,62 @@ export function reachCut(
   return nearest;
 }
 
+/** Corners blunter than this may have the end of an allowance folded back over the seam, degrees. */
+const blunt = 98;
+
+/**
+ * How much of an edge's end, as a share of its allowance, lies under a corner that is shaped for
+ * pressing: folded back at a blunt corner (up to 140 degrees), or turned over with a dart.
+ */
+function shaped(edge: Edge, neighbour: Edge, degrees: number): number {
+  if (edge.open === true || neighbour.open === true) return Math.tan(Math.PI / 6);
+  return degrees > blunt ? 1 / Math.tan((40 * Math.PI) / 180) : 0;
+}
+
+type EdgeSpan = {
+  readonly from: Point;
+  readonly to: Point;
+  readonly head: number;
+  readonly tail: number;
+};
+
+/** The ends of an edge, and how much of each is left to the corners, mm. */
+function spanOf(
+  piece: FinishedPiece,
+  index: number,
+  wanted: readonly number[],
+): EdgeSpan | undefined {
+  const count = piece.edges.length;
+  const edge = piece.edges[index];
+  const before = piece.edges.at(index - 1);
+  const after = piece.edges[(index + 1) % count];
+  const from = edge?.path[0]?.from;
+  const to = edge?.path.at(-1)?.to;
+  if (!edge || !before || !after || !from || !to) return undefined;
+  const own = wanted[index] ?? 0;
+  const last = wanted.at(index - 1) ?? 0;
+  const next = wanted[(index + 1) % count] ?? 0;
+  return {
+    from,
+    to,
+    head: Math.max(own, last) * shaped(edge, before, cornerBetween(before, edge)),
+    tail: Math.max(own, next) * shaped(edge, after, cornerBetween(edge, after)),
+  };
+}
+
 /** For each edge that has an allowance, the place where the cutting line is farthest from it. */
 export function worstClearances(piece: FinishedPiece, rules: HouseRules): readonly Clearance[] {
   const cut = boxedCut(piece);
-  return piece.edges.flatMap((edge) => {
+  const allowances = piece.edges.map((edge) => allowanceOf(edge, rules) ?? 0);
+  return piece.edges.flatMap((edge, index) => {
     const wanted = allowanceOf(edge, rules);
-    if (wanted === undefined) return [];
+    const span = spanOf(piece, index, allowances);
+    if (wanted === undefined || !span) return [];
     let worst: Clearance | undefined;
     for (const segment of edge.path) {
       for (const t of lookOut[segment.kind]) {
         const at = pointAt(segment, t);
+        if (distance(at, span.from) < span.head || distance(at, span.to) < span.tail) continue;
         const out = turnLeft(tangentAt(segment, t));
         const found = reachCut(cut, at, out, wanted + 2 * inside) ?? -inside;
         if (worst && Math.abs(found - wanted) <= Math.abs(worst.found - wanted)) continue;
