@@ -1,0 +1,14 @@
+/** What can hurt at the cutting table and at the party; printed wherever somebody is about to cut. */
+export const cuttingCautions =
+  'Shears, rotary blades and seam rippers cut; count pins and needles before a fitting. Irons and ' +
+  'steam burn: let pressed seams cool. Cap or bind every boning end. Net, tulle and organza burn ' +
+  'fast: keep them from candles and stoves. A narrow or trained hem trips on stairs and ' +
+  'escalators: try it in the shoes. Local rules on cloth, labels and fire come first, and a licensed ' +
+  'practitioner’s word before this sheet.';
+
+/** How sheets become a pattern, in three sentences. */
+export const assembly = [
+  'Print at 100 % and measure both squares before cutting anything.',
+  'Trim each sheet along its left and top lines where they name a neighbour.',
+  'Lay it on that neighbour’s glue strip, lozenge on lozenge: first along the rows, then row to row.',
+] as const;

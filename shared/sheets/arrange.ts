@@ -1,0 +1,89 @@
+import { type Motion, moved } from '../geometry/motion.ts';
+import { type Layout, type Placement, type Shape, boxOf } from './layout.ts';
+import type { Paper } from './papers.ts';
+import { countTiles, overlap, printedArea } from './tile-plan.ts';
+
+/** Room between pieces, so that scissors get round each, and to the edge of the drawing. */
+const gap = 6;
+const edge = 2;
+
+/** More sheets side by side than this do not fit a cutting table. */
+const widest = 10;
+
+type Turn = 'as drafted' | 'upright' | 'lying';
+type Laid = {
+  readonly shape: Shape;
+  readonly turned: boolean;
+  readonly width: number;
+  readonly height: number;
+};
+
+const size = (shape: Shape, turned: boolean): Laid => {
+  const box = boxOf(shape.chain);
+  return turned
+    ? { shape, turned, width: box.height, height: box.width }
+    : { shape, turned, width: box.width, height: box.height };
+};
+
+function lay(shape: Shape, turn: Turn, room: number): Laid {
+  const straight = size(shape, false);
+  const turned = size(shape, true);
+  const wish =
+    turn === 'as drafted' || (turn === 'upright') === straight.height >= straight.width
+      ? straight
+      : turned;
+  const other = wish.turned ? straight : turned;
+  return wish.width > room && other.width < wish.width ? other : wish;
+}
+
+function motionTo({ shape, turned }: Laid, x: number, y: number): Motion {
+  const quarter: Motion = turned
+    ? { cos: 0, sin: 1, dx: 0, dy: 0 }
+    : { cos: 1, sin: 0, dx: 0, dy: 0 };
+  const box = boxOf(shape.chain.map((each) => moved(each, quarter)));
+  return { ...quarter, dx: x - box.x, dy: y - box.y };
+}
+
+/** Lays pieces on shelves: tallest first, each on the first shelf with room for it. */
+function shelve(shapes: readonly Shape[], turn: Turn, width: number): Layout {
+  const room = width - 2 * edge;
+  const sorted = shapes
+    .map((shape, order) => ({ laid: lay(shape, turn, room), order }))
+    .sort((a, b) => b.laid.height - a.laid.height || a.order - b.order);
+  const shelves: { y: number; height: number; filled: number }[] = [];
+  const placements: Placement[] = [];
+  let bottom = edge;
+  let right = 0;
+  for (const { laid } of sorted) {
+    let shelf = shelves.find((each) => each.filled + laid.width <= room + edge + 1e-9);
+    if (!shelf) {
+      shelf = { y: bottom, height: laid.height, filled: edge };
+      shelves.push(shelf);
+      bottom += laid.height + gap;
+    }
+    placements.push({ shape: laid.shape, motion: motionTo(laid, shelf.filled, shelf.y) });
+    shelf.filled += laid.width + gap;
+    right = Math.max(right, shelf.filled - gap);
+  }
+  return { width: right + edge, height: bottom - gap + edge, placements };
+}
+
+/**
+ * Lays pieces out on one drawing so that few sheets of the paper are needed: shelves of every width
+ * from one sheet to ten, pieces as drafted, upright or lying; the first layout with fewest sheets
+ * wins, so the same pieces always give the same drawing.
+ */
+export function arrange(shapes: readonly Shape[], paper: Paper): Layout {
+  const use = printedArea(paper);
+  let best: Layout = { width: 0, height: 0, placements: [] };
+  let fewest = Infinity;
+  if (shapes.length === 0) return best;
+  for (let columns = 1; columns <= widest; columns += 1) {
+    for (const turn of ['as drafted', 'upright', 'lying'] as const) {
+      const layout = shelve(shapes, turn, columns * (use.width - overlap) + overlap);
+      const sheets = countTiles(layout, paper);
+      if (sheets < fewest) [best, fewest] = [layout, sheets];
+    }
+  }
+  return best;
+}
