@@ -1,0 +1,35 @@
+import { endpoint } from './endpoint.ts';
+import { draftSchema } from './draft-reply.ts';
+import { draftRequest, printRequest } from './requests.ts';
+
+/** A gown drafted and proven, as JSON. */
+export const draftGownRequest = endpoint({
+  method: 'POST',
+  path: '/api/drafts',
+  body: draftRequest,
+  reply: { kind: 'json', schema: draftSchema },
+});
+
+/** True-scale pages to glue together. */
+export const printTiles = endpoint({
+  method: 'POST',
+  path: '/api/prints/tiles',
+  body: printRequest,
+  reply: { kind: 'file', mediaType: 'application/pdf' },
+});
+
+/** One page at quarter scale to draft from with tape and chalk. */
+export const printChalkSheet = endpoint({
+  method: 'POST',
+  path: '/api/prints/chalk-sheet',
+  body: printRequest,
+  reply: { kind: 'file', mediaType: 'application/pdf' },
+});
+
+/** The pieces as SVG, one user unit to the millimetre. */
+export const printPieces = endpoint({
+  method: 'POST',
+  path: '/api/prints/pieces.svg',
+  body: printRequest,
+  reply: { kind: 'file', mediaType: 'image/svg+xml' },
+});

@@ -1,0 +1,108 @@
+import { z } from 'zod';
+import { coreMeasures, furtherMeasures, type MeasureKey } from '../body/card.ts';
+import { measureGuide } from '../body/measure-guide.ts';
+import { styleLabels } from '../drafts/gown/style-labels.ts';
+import { styleKeys } from '../drafts/gown/style-limits.ts';
+import type { DraftInputs } from '../engine/draft.ts';
+import { error, type Problem } from '../units/problem.ts';
+import { said, type Said } from '../units/said.ts';
+import { draftRequest } from './requests.ts';
+
+/** No more than this many problems at once: a body of nonsense gets a short answer. */
+const most = 40;
+
+const names = new Map<string, string>([
+  ...[...coreMeasures, ...furtherMeasures].map(
+    (key: MeasureKey) => [`card.${key}`, measureGuide[key].label] as const,
+  ),
+  ...styleKeys.map((key) => [`style.${key}`, styleLabels[key]] as const),
+  ['card', 'The measure card'],
+  ['style', 'The style card'],
+  ['rules', 'The house rules'],
+  ['', 'The request'],
+]);
+
+const called = (field: string): string => names.get(field) ?? `“${field}”`;
+
+const short = (text: string): string => (text.length > 60 ? `${text.slice(0, 60)}…` : text);
+
+/** What stands at a path of the value as it came, if anything. */
+const found = (value: unknown, path: readonly PropertyKey[]): unknown =>
+  path.reduce<unknown>(
+    (at, key) =>
+      typeof at === 'object' && at !== null && Object.hasOwn(at, key)
+        ? Reflect.get(at, key)
+        : undefined,
+    value,
+  );
+
+const wrongType = (field: string, expected: string, missing: boolean): Said => {
+  const name = called(field);
+  if (missing) return said`${name} is missing: measure it and give it as “${field}”.`;
+  if (expected === 'object') {
+    return said`${name} must be an object of keys and values, such as {"bustGirth": 920}.`;
+  }
+  if (expected !== 'number') return said`${name} must be text in quotes.`;
+  const unit = field.endsWith('shoulderSlope') ? 'of degrees' : 'of millimetres';
+  return field === 'style.flareFraction' || field === 'rules.sideShare'
+    ? said`${name} must be a plain number, without quotes, such as 0.5.`
+    : said`${name} must be a plain number ${unit}, without quotes or a unit, such as ${unit === 'of degrees' ? 20 : 920}.`;
+};
+
+function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
+  const name = called(field);
+  if (issue.code === 'invalid_type') return wrongType(field, issue.expected, value === undefined);
+  if (issue.code === 'too_big') {
+    return said`${name} is too long: keep it to ${Number(issue.maximum)} letters.`;
+  }
+  if (issue.code === 'invalid_format') {
+    return said`${name} must be a day written as year, month, day, such as 2026-11-14.`;
+  }
+  if (issue.code === 'invalid_value') {
+    const choices = issue.values.map((each) => `“${String(each)}”`).join(', ');
+    return said`${name} must be one of ${choices}.`;
+  }
+  return said`${name} cannot be read: look up its form in the README.`;
+}
+
+const fieldOf = (path: readonly PropertyKey[]): string => short(path.map(String).join('.'));
+
+function problemsOf(issue: z.core.$ZodIssue, value: unknown): readonly Problem[] {
+  if (issue.code === 'unrecognized_keys') {
+    return issue.keys.slice(0, most).map((key) => {
+      const field = fieldOf([...issue.path, key]);
+      return error({
+        code: 'unknown-field',
+        field,
+        said: said`There is no field “${field}”: take it out, or look up its name in the README.`,
+      });
+    });
+  }
+  const field = fieldOf(issue.path);
+  const at = found(value, issue.path);
+  const code = at === undefined ? 'missing' : 'wrong-form';
+  return [error({ code, field, said: remedy(issue, field, at) })];
+}
+
+/** A body read against its schema: the value, or what is wrong with its shape, field by field. */
+export type Reading<T> = { readonly value: T } | { readonly problems: readonly Problem[] };
+
+/** Reads unknown JSON against a schema of the contract, in our own words where it does not fit. */
+export function readBody<S extends z.ZodType>(schema: S, value: unknown): Reading<z.output<S>> {
+  const parsed = schema.safeParse(value);
+  if (parsed.success) return { value: parsed.data };
+  return {
+    problems: parsed.error.issues.flatMap((issue) => problemsOf(issue, value)).slice(0, most),
+  };
+}
+
+/**
+ * Turns unknown JSON (`{ card, style?, rules? }`) into the inputs of a draft, or into problems of shape. Server,
+ * command line and browser read alike; bounds are checked by the engine.
+ */
+export function readInputs(
+  value: unknown,
+): { readonly inputs: DraftInputs } | { readonly problems: readonly Problem[] } {
+  const reading = readBody(draftRequest, value);
+  return 'value' in reading ? { inputs: reading.value } : reading;
+}

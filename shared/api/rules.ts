@@ -1,0 +1,60 @@
+import { z } from 'zod';
+import { balanceLevels, type BalanceLevel, type HouseRules } from '../drafting/house-rules.ts';
+import { houseRulePresets } from '../drafting/house-rule-presets.ts';
+
+type Balance = { [L in BalanceLevel]: z.ZodNumber };
+
+/** `fromEntries` forgets the keys; they are those of the list. */
+const balances = () =>
+  Object.fromEntries(
+    balanceLevels.map((level) => [
+      level,
+      z.number().describe(`Front quarter over the plain one at ${level}, mm.`),
+    ]),
+  ) as Balance;
+
+const balance = z.strictObject(balances());
+
+const allowance = z.strictObject({
+  seam: z.number().describe('Plain seams, mm.'),
+  side: z.number().describe('Side seams, mm.'),
+  zip: z.number().describe('Centre back with the zip, mm.'),
+  top: z.number().describe('Enclosed top edge, mm.'),
+  hem: z.number().describe('Circular hem, mm.'),
+});
+
+/** House rules with every value, as a draft tells them. */
+export const houseRules = z.strictObject({
+  balance,
+  sideShare: z.number().describe('Part of the waist suppression that the side seam takes, 0 to 1.'),
+  dartWidest: z.number().describe('Widest intake sewn in one dart, mm.'),
+  dartClearance: z.number().describe('Darts stop this short of the bust point, mm.'),
+  allowance,
+}) satisfies z.ZodType<HouseRules>;
+
+/** What a rules file may hold: a preset to start from (balanced when left out) and whatever differs from it. */
+export const rulesCard = z.strictObject({
+  preset: z.enum(['balanced', 'quarterRule']).optional().describe('The house rules to start from.'),
+  ...houseRules.partial().shape,
+  balance: balance.partial().optional(),
+  allowance: allowance.partial().optional(),
+});
+
+/** Fills a rules file up from the preset it starts from. */
+export function fillRules(card: z.output<typeof rulesCard>): HouseRules {
+  const base = houseRulePresets[card.preset ?? 'balanced'];
+  return {
+    balance: merged(base.balance, card.balance),
+    sideShare: card.sideShare ?? base.sideShare,
+    dartWidest: card.dartWidest ?? base.dartWidest,
+    dartClearance: card.dartClearance ?? base.dartClearance,
+    allowance: merged(base.allowance, card.allowance),
+  };
+}
+
+/** What is given, over what is not: an open value never hides the preset's. */
+const merged = <T extends Readonly<Record<string, number>>>(
+  base: T,
+  given: { readonly [K in keyof T]?: number | undefined } | undefined,
+): T =>
+  Object.fromEntries(Object.entries(base).map(([key, value]) => [key, given?.[key] ?? value])) as T;
