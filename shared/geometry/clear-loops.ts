@@ -3,7 +3,12 @@ import { flatten, pointAt } from './curve.ts';
 import { type Path, type Segment, line } from './path.ts';
 import { type Point, cross, subtract } from './point.ts';
 
-type Box = { readonly left: number; readonly right: number; readonly top: number; readonly foot: number };
+type Box = {
+  readonly left: number;
+  readonly right: number;
+  readonly top: number;
+  readonly foot: number;
+};
 
 /** The box of a stretch's corners and handles, which holds the stretch. */
 function hull(segment: Segment): Box {

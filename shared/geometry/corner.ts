@@ -1,7 +1,17 @@
 import { pathCrossings, splitPath } from './curve.ts';
 import type { Station } from './curve.ts';
 import { type Path, type Segment, line } from './path.ts';
-import { type Point, add, cross, distance as apart, dot, scale, subtract, turnLeft, unit } from './point.ts';
+import {
+  type Point,
+  add,
+  cross,
+  distance as apart,
+  dot,
+  scale,
+  subtract,
+  turnLeft,
+  unit,
+} from './point.ts';
 
 /**
  * A parallel that comes to a corner of the line it accompanies (or leaves it): the parallel, its
@@ -73,7 +83,12 @@ export function startAtLine(run: Run, corner: Point, from: Point, along: Point):
 }
 
 /** Where two parallels cross before an inward corner: each in turn is cut by the other's tangent. */
-function meeting(a: Path, b: Path, start: Point, along: Point): readonly [Station, Station] | undefined {
+function meeting(
+  a: Path,
+  b: Path,
+  start: Point,
+  along: Point,
+): readonly [Station, Station] | undefined {
   let from = start;
   let direction = along;
   for (let i = 0; i < 12; i += 1) {
@@ -144,9 +159,19 @@ export function joinRuns(a: Run, b: Run, corner: Point): Joined {
   if (reachA < 0) {
     const before = endAtLine(a, corner, ends[1], b.along);
     if (!before) return whole(a, b, lines(ends), true);
-    return { before, between: lines([before.at(-1)?.to ?? ends[0], ends[1]]), after: b.path, folded: false };
+    return {
+      before,
+      between: lines([before.at(-1)?.to ?? ends[0], ends[1]]),
+      after: b.path,
+      folded: false,
+    };
   }
   const after = startAtLine(b, corner, ends[0], a.along);
   if (!after) return whole(a, b, lines(ends), true);
-  return { before: a.path, between: lines([ends[0], after[0]?.from ?? ends[1]]), after, folded: false };
+  return {
+    before: a.path,
+    between: lines([ends[0], after[0]?.from ?? ends[1]]),
+    after,
+    folded: false,
+  };
 }

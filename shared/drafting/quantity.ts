@@ -1,0 +1,40 @@
+import type { MeasureKey } from '../body/card.ts';
+import { type Said, mm, said } from '../units/said.ts';
+
+/** A length together with the arithmetic that led to it, and the measures it rests on. */
+export type Quantity = {
+  readonly value: number;
+  readonly how: Said;
+  readonly measures: readonly MeasureKey[];
+};
+
+/** A measure of the body, as the card gives it; an estimate says so wherever it is spoken. */
+export const taken = (
+  name: string,
+  key: MeasureKey,
+  body: { readonly measures: Readonly<Record<MeasureKey, number>>; readonly estimated: object },
+): Quantity => ({
+  value: body.measures[key],
+  how: said`${name} ${mm(body.measures[key])}${key in body.estimated ? ' (estimated)' : ''}`,
+  measures: [key],
+});
+
+/** The same length with a named amount added; a taken-off amount is negative. */
+export const plus = (quantity: Quantity, name: string, amount: number): Quantity => ({
+  value: quantity.value + amount,
+  how:
+    amount === 0
+      ? quantity.how
+      : said`${quantity.how} ${amount < 0 ? '−' : '+'} ${name} ${mm(Math.abs(amount))}`,
+  measures: quantity.measures,
+});
+
+/** A quarter of a girth. */
+export const quarterOf = (girth: Quantity): Quantity => ({
+  value: girth.value / 4,
+  how: said`a quarter of (${girth.how}) = ${mm(girth.value / 4)}`,
+  measures: girth.measures,
+});
+
+/** The whole sum: how it was worked out, and what it comes to. */
+export const worked = (quantity: Quantity): Said => said`${quantity.how} = ${mm(quantity.value)}`;

@@ -1,0 +1,92 @@
+import type { Point } from '../../geometry/point.ts';
+import { type Profile, straightProfile } from '../../geometry/profile.ts';
+import type { Intake } from './intakes.ts';
+
+/** Share of the front's reduction that the princess or dart takes at least. */
+const openingShare = 0.6;
+/** The side leans in above the bust by at most this, 8 degrees. */
+const leanIn = Math.tan((8 * Math.PI) / 180);
+/** Above the bust point the opening widens by a square over this height, then straight. */
+const rounding = 30;
+/** The opening reaches its amount at least this high above the bust point. */
+const lowestPeak = 60;
+/** A narrower opening is not worth sewing: the side takes it. */
+const narrowestOpening = 2;
+
+/** What one half takes in above the bust, at chest level: by the lean of its side, by its opening. */
+export type Contour = {
+  readonly reduction: number;
+  readonly lean: number;
+  readonly opening: number;
+};
+
+/**
+ * Shares R = bust quarter - chest quarter between side and opening (method section 6). The back
+ * leans first, and opens only where its edge stands high enough; what it cannot take without leaning
+ * more than 8 degrees goes to the front, where the fullness of the bust lies [our rule].
+ */
+export function contours(
+  front: { readonly bust: number; readonly chest: number },
+  back: { readonly bust: number; readonly chest: number },
+  rise: number,
+  backOpens: boolean,
+): { readonly front: Contour; readonly back: Contour; readonly moved: number } {
+  const backR = back.bust - back.chest;
+  const backLean = Math.min(backR, rise * leanIn);
+  const left = backR - backLean;
+  const backOpening = backOpens && left >= narrowestOpening ? left : 0;
+  const moved = left - backOpening;
+  const frontR = front.bust - front.chest + moved;
+  const frontLean =
+    frontR * openingShare < narrowestOpening
+      ? frontR
+      : Math.min((1 - openingShare) * frontR, rise * leanIn);
+  return {
+    front: { reduction: frontR, lean: frontLean, opening: frontR - frontLean },
+    back: { reduction: backR - moved, lean: backLean, opening: backOpening },
+    moved,
+  };
+}
+
+/** The straight upper parts of two legs: they would meet at the pivot, each this far off upright. */
+export type StraightLegs = { readonly pivot: Point; readonly angle: number };
+
+/** The princess gap above the bust point, and the straight run of its legs. */
+export function princessAbove(
+  axis: number,
+  bust: number,
+  opening: number,
+  peak: number,
+): { readonly intake: Intake; readonly legs: StraightLegs; readonly height: number } {
+  const height = Math.max(lowestPeak, bust - peak);
+  const square = opening / (rounding * (2 * height - rounding));
+  const knee = { y: bust - rounding, x: square * rounding * rounding };
+  const top = { y: bust - 2 * height, x: knee.x + 2 * square * rounding * (2 * height - rounding) };
+  const gap: Profile = [
+    ...straightProfile(top, knee),
+    { from: knee.y, to: bust, a: knee.x, b: -2 * square * rounding, c: square, d: 0 },
+  ];
+  return {
+    intake: { axis, gap, top: top.y, foot: bust },
+    legs: { pivot: { x: axis, y: bust - rounding / 2 }, angle: Math.atan(square * rounding) },
+    height: bust - height,
+  };
+}
+
+/** A top dart: straight legs from its tip, short of the bust point, wide enough at the peak. */
+export function topDart(
+  axis: number,
+  bust: number,
+  opening: number,
+  peak: number,
+  clearance: number,
+): { readonly legs: StraightLegs; readonly height: number } {
+  const height = Math.max(lowestPeak, bust - peak);
+  return {
+    legs: {
+      pivot: { x: axis, y: bust - clearance },
+      angle: Math.atan(opening / 2 / (height - clearance)),
+    },
+    height: bust - height,
+  };
+}

@@ -1,0 +1,136 @@
+import type { Body } from '../../body/card.ts';
+import type { BodyLevels } from '../../body/levels.ts';
+import type { Construction, Handle, TopOpening } from '../../drafting/construction.ts';
+import type { DraftingTable } from '../../drafting/drafting-table.ts';
+import type { HouseRules } from '../../drafting/house-rules.ts';
+import type { LevelName, Piece, Side } from '../../drafting/piece.ts';
+import { xAt } from '../../geometry/profile.ts';
+import { mm, said } from '../../units/said.ts';
+import { type FlarePlan, flarePieces, flareRadius, planFlare } from './flare.ts';
+import { drawTop } from './draw-top.ts';
+import { gownHandles } from './handles.ts';
+import type { Half } from './half.ts';
+import { middlePiece } from './middle.ts';
+import { narrateHalf, warnOfShift } from './narrate-halves.ts';
+import { pairHalves } from './pair-halves.ts';
+import { finishedQuarters, wantedGirths } from './quarters.ts';
+import type { SideHeights } from './side-line.ts';
+import type { GownStyle } from './style-card.ts';
+import { topPartner } from './top.ts';
+import { type Walking, walking } from './walking.ts';
+
+/** A gown drawn: pieces without allowances, and what proof and screens need to know of them. */
+export type DrawnGown = {
+  readonly pieces: readonly Piece[];
+  readonly levels: { readonly [L in LevelName]: number };
+  readonly construction: Construction;
+  readonly handles: readonly Handle[];
+  readonly walking: Walking;
+};
+
+/** The raised waist seam lies this far above the waist, and at least `underBust` below the under-bust. */
+const raisedBy = 76;
+const underBust = 20;
+
+function waistSeamLevel(table: DraftingTable, levels: BodyLevels): number {
+  const paper = table.part('Levels', 'both');
+  const raised = levels.waist - raisedBy;
+  const lowest = levels.underbust + underBust;
+  return raised >= lowest
+    ? paper.level('Waist seam', said`Raised ${mm(raisedBy)} above the waist`, raised, [])
+    : paper.level(
+        'Waist seam',
+        said`Raised ${mm(raisedBy)} it would lie within ${mm(underBust)} of the under-bust; it is moved down to clear it`,
+        lowest,
+        [],
+      );
+}
+
+/** Draws the gown on the table: levels, halves, tops, middles and flare, in drafting order. */
+export function drawGown(
+  table: DraftingTable,
+  body: Body,
+  bodyLevels: BodyLevels,
+  style: GownStyle,
+  rules: HouseRules,
+): DrawnGown {
+  const seam = waistSeamLevel(table, bodyLevels);
+  const knee = table
+    .part('Levels', 'both')
+    .level(
+      'Knee seam',
+      said`${mm(style.kneeLevel)} above the knee`,
+      bodyLevels.knee - style.kneeLevel,
+      ['waistToKnee'],
+    );
+  const levels: SideHeights = { ...bodyLevels, seam, knee };
+  const quarters = {
+    front: finishedQuarters('front', body, style, rules, bodyLevels, seam),
+    back: finishedQuarters('back', body, style, rules, bodyLevels, seam),
+  };
+  const pair = pairHalves({ quarters, levels, style, rules, frontAxis: bodyLevels.bustPointX });
+  const depth = style.flareLength;
+  const inner = flareRadius(style.kneeFinished, style.flareFraction);
+  const flare = {
+    front: planFlare(quarters.front.knee.value, inner, depth, style.clothWidth),
+    back: planFlare(quarters.back.knee.value, inner, depth, style.clothWidth),
+  };
+  const sides = (['front', 'back'] as const).map((side) =>
+    drawSide(table, side, { pair, quarters, flare, style, rules }),
+  );
+  warnOfShift(table, pair);
+  const { front, back } = pair;
+  return {
+    pieces: sides.flatMap((each) => each.pieces),
+    levels: {
+      chest: bodyLevels.underarm,
+      bust: bodyLevels.bust,
+      underbust: bodyLevels.underbust,
+      'waist-seam': seam,
+      waist: bodyLevels.waist,
+      'top-hip': bodyLevels.topHip,
+      hip: bodyLevels.hip,
+      'knee-seam': knee,
+      hem: knee + depth,
+    },
+    construction: {
+      wanted: wantedGirths(body, style, 2 * (quarters.front.seam.value + quarters.back.seam.value)),
+      chestSide: { front: chestSide(front), back: chestSide(back) },
+      topOpenings: sides.flatMap((each) => each.openings),
+    },
+    handles: gownHandles(
+      sides.flatMap((each) => each.pieces),
+      style,
+    ),
+    walking: walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style.kneeFinished),
+  };
+}
+
+const chestSide = (half: Half): number => xAt(half.line, half.heights.underarm);
+
+type Shared = {
+  readonly pair: ReturnType<typeof pairHalves>;
+  readonly quarters: {
+    readonly front: ReturnType<typeof finishedQuarters>;
+    readonly back: ReturnType<typeof finishedQuarters>;
+  };
+  readonly flare: { readonly front: FlarePlan; readonly back: FlarePlan };
+  readonly style: GownStyle;
+  readonly rules: HouseRules;
+};
+
+function drawSide(
+  table: DraftingTable,
+  side: Side,
+  shared: Shared,
+): { readonly pieces: readonly Piece[]; readonly openings: readonly TopOpening[] } {
+  const { pair, style, rules, flare } = shared;
+  const half = pair[side];
+  const contour = pair.contour[side];
+  const paper = narrateHalf(table, half, shared.quarters[side], contour, pair.contour.moved);
+  const top = drawTop(table, paper, half, pair.front, contour.opening, style, rules);
+  const middle = middlePiece(paper, half, flare[side], topPartner(side, style.shaping));
+  const other = flare[side === 'front' ? 'back' : 'front'];
+  const gores = flarePieces(table.part('Flare', 'flare'), side, flare[side], other.gores);
+  return { pieces: [...top.pieces, middle, ...gores], openings: top.openings };
+}

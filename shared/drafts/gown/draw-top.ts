@@ -1,0 +1,119 @@
+import type { TopOpening } from '../../drafting/construction.ts';
+import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
+import type { HouseRules } from '../../drafting/house-rules.ts';
+import type { Piece } from '../../drafting/piece.ts';
+import { pathLength } from '../../geometry/curve.ts';
+import { point } from '../../geometry/point.ts';
+import { profileLength, slopeAt, xAt } from '../../geometry/profile.ts';
+import { mm, said } from '../../units/said.ts';
+import { princessAbove, topDart } from './contour.ts';
+import { type Half, heightAtArc, heightOn } from './half.ts';
+import type { GownStyle } from './style-card.ts';
+import { dartedTop, princessPanels } from './top.ts';
+import { type TopLine, type TopLinePoints, topLine } from './top-line.ts';
+
+/** The top line stays at least this far above the bust point. */
+const overBust = 30;
+
+/** Draws the top of a half: its top line, its princess panels or its one darted piece. */
+export function drawTop(
+  table: DraftingTable,
+  paper: PartTable,
+  half: Half,
+  front: Half,
+  opening: number,
+  style: GownStyle,
+  rules: HouseRules,
+): { readonly pieces: readonly Piece[]; readonly openings: readonly TopOpening[] } {
+  const { side, axis } = half;
+  const points = topLinePoints(half, front, style);
+  const bust = heightOn(half, 'bust', axis);
+  const peak = side === 'front' ? style.topDrop : Math.min(points.centre.y, points.side.y);
+  const sideTop = points.side.y;
+  if (style.shaping === 'princess') {
+    const above = princessAbove(axis, bust, opening, peak);
+    const top = topLine(points, above.legs);
+    narrateTop(table, paper, half, points, top);
+    return {
+      pieces: princessPanels({
+        half,
+        top,
+        above: above.intake,
+        sideTop,
+        dartClearance: rules.dartClearance,
+      }),
+      openings: openingOf(
+        half,
+        opening,
+        above.height,
+        { piece: `${side}-top-centre`, edge: 'princess' },
+        { piece: `${side}-top-side`, edge: 'princess' },
+      ),
+    };
+  }
+  const dart = topDart(axis, bust, opening, peak, rules.dartClearance);
+  const top = topLine(points, dart.legs);
+  narrateTop(table, paper, half, points, top);
+  const on = { piece: `${side}-top`, edge: 'top-mouth' };
+  return {
+    pieces: dartedTop({
+      half,
+      top,
+      sideTop,
+      dartClearance: rules.dartClearance,
+      ...(opening > 0 ? { topDartTip: dart.legs.pivot } : {}),
+    }),
+    openings: openingOf(half, opening, dart.height, on, on),
+  };
+}
+
+const openingOf = (
+  half: Half,
+  wanted: number,
+  height: number,
+  centre: TopOpening['centre'],
+  outer: TopOpening['outer'],
+): readonly TopOpening[] =>
+  wanted > 0 ? [{ side: half.side, wanted, height, centre, outer }] : [];
+
+/** Where the top line runs: the back meets the front at the side seam, at the same length from the waist. */
+function topLinePoints(half: Half, front: Half, style: GownStyle): TopLinePoints {
+  const arc = profileLength(front.line, style.sideDepth, front.heights.waist);
+  const y = half.side === 'front' ? style.sideDepth : heightAtArc(half, arc);
+  const end = { side: point(xAt(half.line, y), y), sideLean: slopeAt(half.line, y) };
+  return half.side === 'front'
+    ? { centre: point(0, style.neckDepth), peak: point(style.neckWidth, style.topDrop), ...end }
+    : { centre: point(0, half.levels.waist - style.backDepth), ...end };
+}
+
+function narrateTop(
+  table: DraftingTable,
+  paper: PartTable,
+  half: Half,
+  points: TopLinePoints,
+  top: TopLine,
+): void {
+  const { centre, peak, side } = points;
+  const run = peak
+    ? said`From ${mm(centre.y)} down at the centre up to the peak, ${mm(peak.x)} out and ${mm(peak.y)} down, and on to the side seam ${mm(side.y)} down`
+    : said`From ${mm(half.levels.waist - centre.y)} above the waist at the centre to the side seam, where it meets the front`;
+  paper.draw(
+    'Top line',
+    said`${run}; drawn with the opening closed so that it crosses the seam without a kink, ${mm(pathLength(top.centre) + pathLength(top.outer))} long when sewn.`,
+    {
+      why: said`It sets out square to the centre and arrives square to the side seam, so front and back join without a corner.`,
+      points: { 'top-centre': centre, ...(peak ? { 'top-peak': peak } : {}), 'top-side': side },
+      lines: [top.centre, top.outer],
+    },
+  );
+  const bust = heightOn(half, 'bust', half.axis);
+  if (half.side === 'front' && bust - top.crossing < overBust) {
+    table.warn({
+      code: 'top-line-low',
+      severity: 'warning',
+      field: 'style.topDrop',
+      with: ['style.sideDepth'],
+      said: said`The top line passes ${mm(bust - top.crossing)} above the bust point; under ${mm(overBust)} it may not hold. Raise the top line or the side.`,
+    });
+  }
+}

@@ -1,0 +1,135 @@
+import type { PartTable } from '../../drafting/drafting-table.ts';
+import { edge, notchAtLength, to } from '../../drafting/outline.ts';
+import type { Edge, Piece, Side } from '../../drafting/piece.ts';
+import { arc } from '../../geometry/arc.ts';
+import { reverse } from '../../geometry/curve.ts';
+import { line } from '../../geometry/path.ts';
+import { type Point, point } from '../../geometry/point.ts';
+import { deg, mm, said } from '../../units/said.ts';
+
+/** Lost to both selvedges. */
+const selvedges = 20;
+
+/**
+ * Inner radius of a circle flare: seam length over 2 pi times the part of a full circle.
+ * Millimetres. Source: plane geometry; check values in `tests/outside`.
+ */
+export const flareRadius = (seam: number, fraction: number): number =>
+  seam / (2 * Math.PI * fraction);
+
+/** Length of the hem of a circle flare: the seam's own, and a part of 2 pi times the depth more. */
+export const flareHem = (seam: number, fraction: number, depth: number): number =>
+  seam + 2 * Math.PI * fraction * depth;
+
+/** One half of the flare in equal gores: the first on the fold, the others whole. */
+export type FlarePlan = {
+  readonly inner: number;
+  readonly outer: number;
+  /** Angle of the half, and of half a gore, radians. */
+  readonly angle: number;
+  readonly halfGore: number;
+  readonly gores: number;
+};
+
+/** Divides a half of the flare until each gore fits the cloth and is at most a half circle. */
+export function planFlare(
+  seamHalf: number,
+  inner: number,
+  depth: number,
+  clothWidth: number,
+): FlarePlan {
+  const angle = seamHalf / inner;
+  const outer = inner + depth;
+  const fits = (halfGore: number): boolean =>
+    halfGore <= Math.PI / 2 + 1e-9 && 2 * outer * Math.sin(halfGore) <= clothWidth - selvedges;
+  let gores = 1;
+  while (!fits(angle / (2 * gores - 1)) && gores < 12) gores += 1;
+  return { inner, outer, angle, halfGore: angle / (2 * gores - 1), gores };
+}
+
+/** Widths of the knee stretches of a half, from the centre out. */
+export const kneeWidths = (plan: FlarePlan): readonly number[] =>
+  Array.from({ length: plan.gores }, (_, k) => plan.inner * plan.halfGore * (k === 0 ? 1 : 2));
+
+/** Name of a gore, from the centre out. */
+export const goreName = (side: Side, k: number): string =>
+  k === 0 ? `flare-${side}` : `flare-${side}-${k + 1}`;
+
+/** Names of the knee stretches of a flare of several gores. */
+export const kneeStretch = (k: number, gores: number): string =>
+  gores === 1 ? 'knee' : `knee-${'abcdefghijkl'[k] ?? ''}`;
+
+/** The pieces of one half of the flare, each in a frame of its own: the apex at the origin. */
+export function flarePieces(
+  paper: PartTable,
+  side: Side,
+  plan: FlarePlan,
+  otherGores: number,
+): readonly Piece[] {
+  const degrees = (plan.angle * 180) / Math.PI;
+  paper.draw(
+    `Flare ${side}`,
+    said`From one point strike an inner arc at ${mm(plan.inner)} and the hem at ${mm(plan.outer)}; the ${side} half takes ${deg(degrees)} of it, knee quarter ${mm(plan.inner * plan.angle)} over the radius${plan.gores > 1 ? `, in ${plan.gores} gores so that each fits the cloth` : ''}.`,
+    {
+      lines: [
+        arc(point(0, 0), plan.outer, 0, plan.angle),
+        arc(point(0, 0), plan.inner, 0, plan.angle),
+      ],
+    },
+  );
+  return Array.from({ length: plan.gores }, (_, k) => gore(side, plan, k, otherGores));
+}
+
+function gore(side: Side, plan: FlarePlan, k: number, otherGores: number): Piece {
+  const { inner, outer, halfGore, gores } = plan;
+  const onFold = k === 0;
+  const last = k === gores - 1;
+  const from = onFold ? 0 : -halfGore;
+  const origin = point(0, 0);
+  const rim = (radius: number, angle: number): Point =>
+    point(radius * Math.sin(angle), radius * Math.cos(angle));
+  const other = side === 'front' ? 'back' : 'front';
+  const strokes = side === 'front' ? 1 : 2;
+  const knee = edge(
+    kneeStretch(k, gores),
+    'seam',
+    arc(origin, inner, from, halfGore),
+    to(`${side}-middle`, kneeStretch(k, gores)),
+  );
+  const outwards = [line(rim(inner, halfGore), rim(outer, halfGore))];
+  const far: Edge = last
+    ? edge('side', 'side', outwards, to(goreName(other, otherGores - 1), 'side'))
+    : edge(`gore-${k + 1}`, 'seam', outwards, to(goreName(side, k + 1), `gore-${k + 1}`));
+  const hem = edge('hem', 'hem', reverse(arc(origin, outer, from, halfGore)));
+  const inwards = [line(rim(outer, from), rim(inner, from))];
+  const near: Edge = onFold
+    ? edge('centre', 'fold', inwards)
+    : edge(`gore-${k}`, 'seam', inwards, to(goreName(side, k - 1), `gore-${k}`));
+  const width = inner * (halfGore - from);
+  return {
+    name: goreName(side, k),
+    title: `Flare, ${side}${gores > 1 ? (onFold ? ', centre gore' : `, gore ${k + 1}`) : ''}`,
+    side,
+    part: 'flare',
+    cut: onFold ? 'cut 1 on fold' : 'cut 2 (a pair)',
+    copies: onFold ? 1 : 2,
+    edges: [knee, far, hem, near],
+    darts: [],
+    levels: [],
+    notches: gores === 1 ? notchAtLength('knee-half', knee, width / 2, strokes) : [],
+    grain: grainOf(inner, outer, onFold ? halfGore * 0.3 : 0),
+    drills: [],
+  };
+}
+
+const grainOf = (
+  inner: number,
+  outer: number,
+  angle: number,
+): { readonly from: Point; readonly to: Point } => {
+  const x = (inner + (outer - inner) * 0.3) * Math.sin(angle);
+  return {
+    from: point(x, inner + (outer - inner) * 0.2),
+    to: point(x, inner + (outer - inner) * 0.85),
+  };
+};

@@ -1,0 +1,270 @@
+import type { HouseRules } from '../../drafting/house-rules.ts';
+import type { Side } from '../../drafting/piece.ts';
+import type { Cubic } from '../../geometry/path.ts';
+import { type Profile, profileLength, slopeAt, xAt } from '../../geometry/profile.ts';
+import { bustToHip, narrowestDart, shareSuppression, sideLine } from './side-line.ts';
+import type { SideHeights, SideWidths, Suppression } from './side-line.ts';
+import { closedSeam, fallFor } from './waist-seam.ts';
+
+const sideLevels = ['underarm', 'bust', 'underbust', 'seam', 'topHip', 'hip', 'knee'] as const;
+
+/** Quarter widths at the levels, millimetres. */
+export type QuarterWidths = { readonly [L in keyof SideWidths as Exclude<L, 'lean'>]-?: number };
+
+/** What a half is drawn from. */
+export type HalfInputs = {
+  readonly side: Side;
+  readonly quarters: QuarterWidths;
+  /** Heights at the centre line. */
+  readonly levels: SideHeights;
+  readonly rules: HouseRules;
+  /** Width taken in above the bust by the lean of the side. */
+  readonly lean: number;
+  /** Half the gap of the princess or dart lies on each side of this distance from the centre. */
+  readonly axis: number;
+  /** Height at which the first dart of the middle ends; a second ends 20 higher. */
+  readonly dartTip: number;
+  /** Where the dart plan is given: one dart or two. */
+  readonly dartCount: 1 | 2;
+  /** Slope (dy/dx) at which the waist seam arrives at the side; the half's own square where absent. */
+  readonly seamSlope?: number;
+  /** Lengths along the front's side seam from the waist: the back is trued to them. */
+  readonly trueTo?: SideArcs;
+};
+
+/** Lengths along the side seam from the waist up (bust, …) or down (hip, …), all positive. */
+export type SideArcs = Omit<SideHeights, 'waist'>;
+
+/** Shares of the intake by dart. */
+export const dartShares = (count: 1 | 2): readonly number[] => (count === 1 ? [1] : [0.6, 0.4]);
+
+/** A half of the body in lines: everything the pieces of that side are cut from. */
+export type Half = {
+  readonly side: Side;
+  readonly levels: SideHeights;
+  /** Heights at the side seam: the levels themselves in front, trued to the front in the back. */
+  readonly heights: SideHeights;
+  readonly quarters: QuarterWidths;
+  readonly suppression: Suppression;
+  readonly line: Profile;
+  /** The waist seam, drawn with its darts closed. */
+  readonly seam: Cubic;
+  /** Total intake at under-bust, waist seam and waist. */
+  readonly gap: { readonly underbust: number; readonly seam: number; readonly waist: number };
+  readonly axis: number;
+  readonly dartCount: 1 | 2;
+  /** Axes of the darts of the middle, from the centre out, and the heights of their tips. */
+  readonly dartAxes: readonly number[];
+  readonly dartTips: readonly number[];
+};
+
+/** Height of a slanting level at a distance from the centre line. */
+export const heightOn = (
+  half: Pick<Half, 'levels' | 'heights' | 'line'>,
+  level: keyof SideHeights,
+  x: number,
+): number => {
+  const centre = half.levels[level];
+  const side = half.heights[level];
+  return centre + ((side - centre) * x) / xAt(half.line, side);
+};
+
+/** Part of the waist intake that a dart still holds at a height below the waist. */
+export const heldBelow = (waist: number, tip: number, y: number): number =>
+  tip <= waist ? 0 : Math.max(0, (tip - y) / (tip - waist));
+
+/** What one round of drawing leaves for the next. */
+type Round = {
+  readonly heights: SideHeights;
+  readonly axes: readonly number[];
+  readonly line: Profile;
+  readonly seam: Cubic;
+  readonly gap: { readonly underbust: number; readonly seam: number };
+  /** The side is held to the quarter there because a dart would turn negative (or not be worth sewing). */
+  readonly held: { readonly underbust: boolean; readonly seam: boolean };
+};
+
+/** The darts of the middle: shares of the intake and heights of the tips. */
+type DartPlan = { readonly shares: readonly number[]; readonly tips: readonly number[] };
+
+const roundsAtMost = 60;
+
+/**
+ * Draws a half: side seam, waist seam and intakes, so that every level holds its quarter. The back
+ * is trued: its heights at the side are moved until its lengths from the waist are the front's.
+ */
+export function drawHalf(inputs: HalfInputs): Half {
+  const { quarters, levels, rules } = inputs;
+  const shares = dartShares(inputs.dartCount);
+  const darts: DartPlan = {
+    shares,
+    tips: shares.map((_, k) => Math.max(levels.waist, inputs.dartTip - 20 * k)),
+  };
+  const suppression = shareSuppression(quarters, rules.sideShare, (waist) => ({
+    line: bustToHip(
+      levels,
+      widthsAt(inputs, darts, waist, () => levels.topHip),
+    ),
+    top: levels.bust,
+    foot: levels.hip,
+  }));
+  let round = firstRound(inputs, darts, suppression.side);
+  for (let count = 0; count < roundsAtMost; count += 1) {
+    const next = nextRound(inputs, darts, suppression.side, round);
+    const change = Math.max(
+      Math.abs(next.gap.seam - round.gap.seam),
+      ...sideLevels.map((level) => Math.abs(next.heights[level] - round.heights[level])),
+    );
+    const settled =
+      next.held.underbust === round.held.underbust && next.held.seam === round.held.seam;
+    round = next;
+    if (change < 1e-8 && settled) break;
+  }
+  return {
+    side: inputs.side,
+    levels,
+    heights: round.heights,
+    quarters,
+    suppression,
+    line: round.line,
+    seam: round.seam,
+    gap: { ...round.gap, waist: suppression.dart },
+    axis: inputs.axis,
+    dartCount: inputs.dartCount,
+    dartAxes: round.axes,
+    dartTips: darts.tips,
+  };
+}
+
+/** Side widths for a width at the waist: the top hip carries what the darts still hold there. */
+function widthsAt(
+  inputs: HalfInputs,
+  darts: DartPlan,
+  waist: number,
+  topHipAt: (dart: number) => number,
+): SideWidths {
+  const { quarters, levels } = inputs;
+  const held = darts.shares.reduce(
+    (sum, share, k) => sum + share * heldBelow(levels.waist, darts.tips[k] ?? 0, topHipAt(k)),
+    0,
+  );
+  return {
+    bust: quarters.bust,
+    waist,
+    topHip: quarters.topHip + (waist - quarters.waist) * held,
+    hip: quarters.hip,
+    knee: quarters.knee,
+    lean: inputs.lean,
+  };
+}
+
+function firstRound(inputs: HalfInputs, darts: DartPlan, waist: number): Round {
+  const { levels, quarters } = inputs;
+  return {
+    heights: levels,
+    axes: darts.shares.map(() => inputs.axis),
+    line: sideLine(
+      levels,
+      widthsAt(inputs, darts, waist, () => levels.topHip),
+    ),
+    seam: closedSeam(quarters.seam, levels.seam, 0, 0),
+    gap: { underbust: 0, seam: 0 },
+    held: { underbust: false, seam: false },
+  };
+}
+
+function nextRound(inputs: HalfInputs, darts: DartPlan, waist: number, last: Round): Round {
+  const { levels, quarters } = inputs;
+  const widths: SideWidths = {
+    ...widthsAt(inputs, darts, waist, (k) =>
+      heightOn({ levels, ...last }, 'topHip', last.axes[k] ?? inputs.axis),
+    ),
+    ...(last.held.underbust ? { underbust: quarters.underbust } : {}),
+    ...(last.held.seam ? { seam: last.seam.to.x } : {}),
+  };
+  const line = sideLine(last.heights, widths);
+  const slope = inputs.seamSlope ?? -slopeAt(line, last.heights.seam);
+  const fall = inputs.trueTo ? last.heights.seam - levels.seam : fallFor(slope, quarters.seam);
+  const seam = closedSeam(quarters.seam, levels.seam, fall, slope);
+  const underbust = xAt(line, last.heights.underbust) - quarters.underbust;
+  const opening = xAt(line, last.heights.seam) - seam.to.x;
+  const held = {
+    underbust: last.held.underbust || underbust < 0,
+    seam: last.held.seam || opening < narrowestDart,
+  };
+  const gap = {
+    underbust: held.underbust ? 0 : underbust,
+    seam: held.seam ? 0 : opening,
+  };
+  return {
+    heights: inputs.trueTo
+      ? truedHeights(line, last.heights, inputs.trueTo)
+      : { ...levels, seam: levels.seam + fall },
+    axes: dartAxes(inputs.axis, gap.seam, darts.shares, line, last.heights),
+    line,
+    seam,
+    gap,
+    held,
+  };
+}
+
+/** The first dart's centre leg continues the princess seam above; a second stands midway to the side. */
+function dartAxes(
+  axis: number,
+  gap: number,
+  shares: readonly number[],
+  line: Profile,
+  heights: SideHeights,
+): readonly number[] {
+  const first = axis - gap / 2 + ((shares[0] ?? 1) * gap) / 2;
+  if (shares.length === 1) return [first];
+  const side = Math.min(xAt(line, heights.seam), xAt(line, heights.waist));
+  return [first, (first + side) / 2];
+}
+
+/** Moves each height so that its length along the line from the waist becomes the front's. */
+function truedHeights(line: Profile, heights: SideHeights, arcs: SideArcs): SideHeights {
+  const above = (level: keyof SideArcs): number =>
+    heights[level] + profileLength(line, heights[level], heights.waist) - arcs[level];
+  const below = (level: keyof SideArcs): number =>
+    heights[level] - profileLength(line, heights.waist, heights[level]) + arcs[level];
+  return {
+    underarm: above('underarm'),
+    bust: above('bust'),
+    underbust: above('underbust'),
+    seam: above('seam'),
+    waist: heights.waist,
+    topHip: below('topHip'),
+    hip: below('hip'),
+    knee: below('knee'),
+  };
+}
+
+/** Lengths along a half's side seam from the waist to every level. */
+export function sideArcs(half: Half): SideArcs {
+  const { line, heights } = half;
+  const above = (level: keyof SideArcs): number =>
+    profileLength(line, heights[level], heights.waist);
+  const below = (level: keyof SideArcs): number =>
+    profileLength(line, heights.waist, heights[level]);
+  return {
+    underarm: above('underarm'),
+    bust: above('bust'),
+    underbust: above('underbust'),
+    seam: above('seam'),
+    topHip: below('topHip'),
+    hip: below('hip'),
+    knee: below('knee'),
+  };
+}
+
+/** Height on a half's side seam at a length from the waist upwards. */
+export function heightAtArc(half: Half, arc: number): number {
+  let y = half.heights.waist - arc;
+  for (let i = 0; i < 40; i += 1) {
+    const off = profileLength(half.line, y, half.heights.waist) - arc;
+    y += off;
+    if (Math.abs(off) < 1e-9) break;
+  }
+  return y;
+}

@@ -1,0 +1,140 @@
+import { splitSegment } from '../../geometry/curve.ts';
+import { shift, movedPath } from '../../geometry/motion.ts';
+import type { Path, Segment } from '../../geometry/path.ts';
+import {
+  type Profile,
+  cubicProfile,
+  offsetProfile,
+  positiveSpline,
+  profilePath,
+  straightProfile,
+} from '../../geometry/profile.ts';
+import { type Half, dartShares, heightOn } from './half.ts';
+import { seamAt } from './waist-seam.ts';
+
+/** Steepest gap at a dart tip: 30 degrees between its legs (method section 6). */
+export const widestTip = 2 * Math.tan((15 * Math.PI) / 180);
+
+/** An intake about an upright axis: its whole width at every height between its ends. */
+export type Intake = {
+  readonly axis: number;
+  readonly gap: Profile;
+  readonly top: number;
+  readonly foot: number;
+};
+
+/** The edge of an intake nearer the centre, or nearer the side, travelled downwards. */
+export const intakeEdge = (intake: Intake, towards: 'centre' | 'side'): Path =>
+  profilePath(
+    offsetProfile(intake.axis, intake.gap, towards === 'centre' ? -0.5 : 0.5),
+    intake.top,
+    intake.foot,
+  );
+
+/** Places along the closed waist seam at which the darts of the middle open, from the centre out. */
+export const mouthsOnSeam = (half: Half): readonly number[] => {
+  let before = 0;
+  return dartShares(half.dartCount).map((share, k) => {
+    const at = (half.dartAxes[k] ?? half.axis) - before - (share * half.gap.seam) / 2;
+    before += share * half.gap.seam;
+    return at;
+  });
+};
+
+/** The waist seam in stretches between mouths, each shifted out by the openings before it. */
+export function seamStretches(half: Half, openings: readonly number[]): readonly Path[] {
+  const stretches: Path[] = [];
+  let rest: Segment = half.seam;
+  let shiftBy = 0;
+  let start = 0;
+  mouthsOnSeam(half).forEach((x, k) => {
+    const t = seamAt(half.seam, x).t;
+    const [before, after] = splitSegment(rest, (t - start) / (1 - start));
+    stretches.push(movedPath([before], shift(shiftBy, 0)));
+    rest = after;
+    start = t;
+    shiftBy += openings[k] ?? 0;
+  });
+  stretches.push(movedPath([rest], shift(shiftBy, 0)));
+  return stretches;
+}
+
+/** The princess gap from the bust point, where both panels touch upright, down to the waist seam. */
+export function princessBelow(half: Half): Intake {
+  const bust = heightOn(half, 'bust', half.axis);
+  const underbust = heightOn(half, 'underbust', half.axis);
+  const seam = seamAt(half.seam, mouthsOnSeam(half)[0] ?? half.axis).y;
+  return {
+    axis: half.axis,
+    top: bust,
+    foot: seam,
+    gap: positiveSpline(
+      [
+        { y: bust, x: 0 },
+        { y: underbust, x: half.gap.underbust },
+        { y: seam, x: half.gap.seam },
+      ],
+      0,
+      0,
+    ),
+  };
+}
+
+/** Dart tips in the top end this far above the under-bust at the lowest. */
+const tipAboveUnderbust = 10;
+
+/** The darts of a top from short of the bust point down to the waist seam. */
+export function topDarts(half: Half, clearance: number): readonly Intake[] {
+  const mouths = mouthsOnSeam(half);
+  return dartShares(half.dartCount).map((share, k) => {
+    const axis = half.dartAxes[k] ?? half.axis;
+    const underbust = heightOn(half, 'underbust', axis);
+    const seam = seamAt(half.seam, mouths[k] ?? axis).y;
+    const wished = heightOn(half, 'bust', axis) + clearance + 20 * k;
+    const held = share * half.gap.underbust;
+    const tip = held === 0 ? underbust : Math.min(wished, underbust - tipAboveUnderbust);
+    const knots = [
+      { y: tip, x: 0 },
+      ...(held === 0 ? [] : [{ y: underbust, x: held }]),
+      { y: seam, x: share * half.gap.seam },
+    ];
+    const chord = held === 0 ? (share * half.gap.seam) / (seam - tip) : held / (underbust - tip);
+    return {
+      axis,
+      top: tip,
+      foot: seam,
+      gap: positiveSpline(knots, Math.min(chord, widestTip), 0),
+    };
+  });
+}
+
+/** The darts of the middle: upright at the waist seam, a cubic to the waist, straight to the tip. */
+export function middleDarts(half: Half): readonly Intake[] {
+  const { waist } = half.levels;
+  const mouths = mouthsOnSeam(half);
+  return dartShares(half.dartCount).map((share, k) => {
+    const axis = half.dartAxes[k] ?? half.axis;
+    const top = seamAt(half.seam, mouths[k] ?? axis).y;
+    const tip = half.dartTips[k] ?? waist;
+    const atSeam = { y: top, x: share * half.gap.seam };
+    const atWaist = { y: waist, x: share * half.gap.waist };
+    if (half.gap.waist === 0 || tip <= waist) {
+      return {
+        axis,
+        top,
+        foot: waist,
+        gap: cubicProfile(atSeam, { y: waist, x: 0 }, 0, -atSeam.x / (waist - top)),
+      };
+    }
+    const closing = -atWaist.x / (tip - waist);
+    return {
+      axis,
+      top,
+      foot: tip,
+      gap: [
+        ...cubicProfile(atSeam, atWaist, 0, closing),
+        ...straightProfile(atWaist, { y: tip, x: 0 }),
+      ],
+    };
+  });
+}

@@ -1,0 +1,105 @@
+import type { Body, MeasureKey } from '../../body/card.ts';
+import type { BodyLevels } from '../../body/levels.ts';
+import type { DraftingTable } from '../../drafting/drafting-table.ts';
+import { mm, said } from '../../units/said.ts';
+
+/** Underarm nearer to the bust point than this is set `raisedBy` above it (method section 3). */
+const nearest = 10;
+const raisedBy = 20;
+
+/** Heights of the body below the side neck point, by method section 3. */
+export function gownLevels(table: DraftingTable, body: Body): BodyLevels {
+  const paper = table.part('Levels', 'both');
+  const m = body.measures;
+  const est = (key: MeasureKey): string => (key in body.estimated ? ' (estimated)' : '');
+
+  const sideNeckX = m.neckGirth / 5 - 7;
+  const bustPointX = m.bustSpan / 2;
+  paper.draw(
+    'Side neck point',
+    said`A fifth of the neck girth ${mm(m.neckGirth)}${est('neckGirth')} less ${mm(7)} = ${mm(sideNeckX)} out from the centre. Everything hangs from its height.`,
+    { points: { 'side-neck': { x: sideNeckX, y: 0 } }, measures: ['neckGirth'] },
+  );
+  const across = bustPointX - sideNeckX;
+  const bust = paper.level(
+    'Bust',
+    said`Half the bust span ${mm(m.bustSpan)} puts the bust point ${mm(bustPointX)} out; the slanting measure ${mm(m.sideNeckToBustPoint)} from the side neck then falls`,
+    Math.sqrt(m.sideNeckToBustPoint ** 2 - across ** 2),
+    ['bustSpan', 'sideNeckToBustPoint'],
+  );
+  const underbust = paper.level(
+    'Under-bust',
+    said`Side neck to under-bust ${mm(m.sideNeckToUnderbust)} less to bust point ${mm(m.sideNeckToBustPoint)} hangs it ${mm(m.sideNeckToUnderbust - m.sideNeckToBustPoint)} under the bust level`,
+    bust + m.sideNeckToUnderbust - m.sideNeckToBustPoint,
+    ['sideNeckToUnderbust', 'sideNeckToBustPoint'],
+  );
+  const waist = paper.level(
+    'Waist',
+    said`Front waist length ${mm(m.frontWaistLength)} less side neck to bust point hangs it ${mm(m.frontWaistLength - m.sideNeckToBustPoint)} under the bust level`,
+    bust + m.frontWaistLength - m.sideNeckToBustPoint,
+    ['frontWaistLength', 'sideNeckToBustPoint'],
+  );
+  const nape = waist - m.backWaistLength;
+  const underarm = underarmLevel(table, body, bust, waist);
+  const topHip = paper.level(
+    'Top hip',
+    said`${mm(m.waistToTopHip)}${est('waistToTopHip')} under the waist`,
+    waist + m.waistToTopHip,
+    ['waistToTopHip'],
+  );
+  const hip = paper.level('Hip', said`${mm(m.waistToHip)} under the waist`, waist + m.waistToHip, [
+    'waistToHip',
+  ]);
+  const knee = paper.level(
+    'Knee',
+    said`${mm(m.waistToKnee)}${est('waistToKnee')} under the waist`,
+    waist + m.waistToKnee,
+    ['waistToKnee'],
+  );
+  const floor = paper.level(
+    'Floor',
+    said`${mm(m.waistToFloor)} under the waist, barefoot`,
+    waist + m.waistToFloor,
+    ['waistToFloor'],
+  );
+  return {
+    sideNeckX,
+    bustPointX,
+    bust,
+    underbust,
+    underarm,
+    nape,
+    waist,
+    topHip,
+    hip,
+    knee,
+    floor,
+  };
+}
+
+function underarmLevel(table: DraftingTable, body: Body, bust: number, waist: number): number {
+  const paper = table.part('Levels', 'both');
+  const up = body.measures.underarmToWaist;
+  const level = waist - up;
+  if (bust - level >= nearest) {
+    return paper.level(
+      'Underarm',
+      said`Underarm to waist ${mm(up)}${'underarmToWaist' in body.estimated ? ' (estimated)' : ''} up from the waist`,
+      level,
+      ['underarmToWaist'],
+    );
+  }
+  table.warn({
+    code: 'underarm-below-bust',
+    severity: 'warning',
+    field: 'card.underarmToWaist',
+    with: ['card.frontWaistLength'],
+    said: said`Underarm to waist ${mm(up)} against front waist length ${mm(body.measures.frontWaistLength)} puts the armpit at or under the bust point; it was set ${mm(raisedBy)} above it. Measure both again.`,
+  });
+  return paper.level(
+    'Underarm',
+    said`Underarm to waist ${mm(up)} would come out level with the bust point; it is set ${mm(raisedBy)} above it`,
+    bust - raisedBy,
+    ['underarmToWaist'],
+  );
+}

@@ -1,0 +1,167 @@
+import type { PartTable } from '../../drafting/drafting-table.ts';
+import {
+  edge,
+  levelLine,
+  mouth,
+  notchAtHeight,
+  notchAtLength,
+  to,
+} from '../../drafting/outline.ts';
+import type { Dart, Edge, Piece } from '../../drafting/piece.ts';
+import { endOf, pathLength, startOf } from '../../geometry/curve.ts';
+import { type Path, line } from '../../geometry/path.ts';
+import { type Point, point } from '../../geometry/point.ts';
+import { profilePath, xAt } from '../../geometry/profile.ts';
+import { mm, said } from '../../units/said.ts';
+import { type FlarePlan, goreName, kneeStretch, kneeWidths } from './flare.ts';
+import { type Half, dartShares } from './half.ts';
+import { intakeEdge, middleDarts, seamStretches } from './intakes.ts';
+
+/** The zip ends this far above the hip at the highest. */
+const zipAboveHip = 20;
+/** Drill points stand this far inside a dart tip (common practice, no source: 10 to 15). */
+const drillInside = 12;
+
+const letters = ['a', 'b', 'c'];
+
+/** Names of the stretches of the waist seam, from the centre out. */
+export const waistStretch = (k: number): string => `waist-${letters[k] ?? String(k)}`;
+
+/** Which piece of the top each stretch of the waist seam is sewn to. */
+export type TopPartner = (stretch: number) => string;
+
+/** Front or back from the waist seam to the knee seam: one quarter, with the darts of the waist. */
+export function middlePiece(
+  paper: PartTable,
+  half: Half,
+  flare: FlarePlan,
+  topPartner: TopPartner,
+): Piece {
+  const { side, heights, levels, line: seam } = half;
+  const name = `${side}-middle`;
+  const strokes = side === 'front' ? 1 : 2;
+  const darts = middleDarts(half);
+  const openings = dartShares(half.dartCount).map((share) => share * half.gap.seam);
+  const stretches = seamStretches(half, openings);
+  const sewn: Dart[] = darts.flatMap((intake, k) => {
+    if (half.gap.waist === 0 && half.gap.seam === 0) return [];
+    const open = (openings[k] ?? 0) > 0;
+    return [
+      {
+        name: k === 0 ? 'waist' : `waist-${k + 1}`,
+        tip: open ? 'below' : 'both',
+        centreLeg: intakeEdge(intake, 'centre'),
+        sideLeg: intakeEdge(intake, 'side'),
+        ...(open ? { mouth: `waist-mouth-${letters[k] ?? ''}` } : {}),
+        pressed: 'centre',
+      },
+    ];
+  });
+  const sideEdge = edge(
+    'side',
+    'side',
+    profilePath(seam, heights.seam, heights.knee),
+    to(side === 'front' ? 'back-middle' : 'front-middle', 'side'),
+  );
+  const kneeSide = point(xAt(seam, heights.knee), heights.knee);
+  const kneeCentre = point(0, heights.knee);
+  const centreTop = startOf(stretches[0] ?? []) ?? point(0, levels.seam);
+  const centre = edge(
+    'centre',
+    side === 'front' ? 'fold' : 'zip',
+    [line(kneeCentre, centreTop)],
+    side === 'front' ? undefined : 'self',
+  );
+  const knees = kneeEdges(side, flare, heights.knee);
+  paper.draw(
+    'Middle',
+    said`From the waist seam to the knee seam the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the knee seam.`,
+    {
+      lines: [
+        sideEdge.path,
+        ...knees.map((knee) => knee.path),
+        ...stretches,
+        ...sewn.flatMap((dart) => [dart.centreLeg, dart.sideLeg]),
+      ],
+    },
+  );
+  return {
+    name,
+    title: side === 'front' ? 'Front, waist to knee' : 'Back, waist to knee',
+    side,
+    part: 'middle',
+    cut: side === 'front' ? 'cut 1 on fold' : 'cut 2 (a pair)',
+    copies: side === 'front' ? 1 : 2,
+    edges: [...waistEdges(stretches, sewn, topPartner), sideEdge, ...knees, centre],
+    darts: sewn,
+    levels: [
+      levelLine('waist', point(0, levels.waist), point(xAt(seam, heights.waist), heights.waist)),
+      levelLine(
+        'top-hip',
+        point(0, levels.topHip),
+        point(xAt(seam, heights.topHip), heights.topHip),
+      ),
+      levelLine('hip', point(0, levels.hip), point(xAt(seam, heights.hip), heights.hip)),
+      levelLine('knee-seam', kneeCentre, kneeSide),
+    ],
+    notches: [
+      ...notchAtHeight('waist', sideEdge, heights.waist, strokes),
+      ...notchAtHeight('hip', sideEdge, heights.hip, strokes),
+      ...(knees.length === 1
+        ? knees.flatMap((knee) => notchAtLength('knee-half', knee, kneeSide.x / 2, strokes))
+        : []),
+      ...(side === 'back'
+        ? [
+            ...notchAtHeight('waist', centre, levels.waist, strokes),
+            ...notchAtHeight('zip-end', centre, levels.hip - zipAboveHip, strokes),
+          ]
+        : []),
+    ],
+    grain: grainIn(half),
+    drills: sewn.flatMap(drillOf),
+  };
+}
+
+/** The knee seam from the side to the centre, in a stretch for each gore of the flare. */
+function kneeEdges(side: Piece['side'], flare: FlarePlan, y: number): readonly Edge[] {
+  let x = 0;
+  return kneeWidths(flare)
+    .map((width, k) => {
+      const from = x;
+      x += width;
+      const name = kneeStretch(k, flare.gores);
+      return edge(name, 'seam', [line(point(x, y), point(from, y))], to(goreName(side, k), name));
+    })
+    .reverse();
+}
+
+const drillOf = (dart: Dart): readonly Point[] => {
+  const tip = endOf(dart.centreLeg);
+  return tip ? [point(tip.x, tip.y - drillInside)] : [];
+};
+
+/** Beside the darts, between hip and knee. */
+const grainIn = (half: Half): { readonly from: Point; readonly to: Point } => {
+  const reach = half.levels.knee - half.levels.hip;
+  const x = xAt(half.line, half.levels.hip) * 0.62;
+  return {
+    from: point(x, half.levels.hip + 0.05 * reach),
+    to: point(x, half.levels.hip + 0.75 * reach),
+  };
+};
+
+/** Stretches of the waist seam with the mouths of their darts between, from the centre out. */
+export function waistEdges(
+  stretches: readonly Path[],
+  darts: readonly Dart[],
+  partner: TopPartner,
+): readonly Edge[] {
+  return stretches.flatMap((path, k) => {
+    const own = edge(waistStretch(k), 'seam', path, to(partner(k), waistStretch(k)));
+    const after = stretches[k + 1];
+    const name = darts[k]?.mouth;
+    const from = endOf(path);
+    const until = after ? startOf(after) : undefined;
+    return name && from && until ? [own, mouth(name, from, until)] : [own];
+  });
+}

@@ -1,0 +1,162 @@
+import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
+import type { Side } from '../../drafting/piece.ts';
+import { point } from '../../geometry/point.ts';
+import { profilePath, steepest, xAt } from '../../geometry/profile.ts';
+import { deg, mm, said } from '../../units/said.ts';
+import type { Contour } from './contour.ts';
+import { type Half, dartShares } from './half.ts';
+import type { PairedHalves } from './pair-halves.ts';
+import type { Quarters } from './quarters.ts';
+
+const levelRows = [
+  ['bust', 'Bust line'],
+  ['underbust', 'Under-bust line'],
+  ['waist', 'Waist line'],
+  ['topHip', 'Top hip line'],
+  ['hip', 'Hip line'],
+  ['knee', 'Knee seam line'],
+] as const;
+
+const balanceWhy = said`The balance moves the side seam between front and back: what the front gains, the back gives.`;
+
+/** Records how a half came about: its quarters, suppression, side seam, waist seam and intakes. */
+export function narrateHalf(
+  table: DraftingTable,
+  half: Half,
+  quarters: Quarters,
+  contour: Contour,
+  moved: number,
+): PartTable {
+  const paper = table.part(half.side === 'front' ? 'Front' : 'Back', half.side);
+  for (const [level, title] of levelRows) {
+    paper.squareAcross(
+      title,
+      half.levels[level],
+      quarters[level],
+      level === 'bust' ? balanceWhy : undefined,
+    );
+  }
+  narrateSuppression(table, paper, half);
+  narrateSide(paper, half);
+  narrateContour(paper, half.side, contour, moved);
+  narrateWaistSeam(paper, half, quarters);
+  return paper;
+}
+
+function narrateSuppression(table: DraftingTable, paper: PartTable, half: Half): void {
+  const { suppression, quarters, side } = half;
+  const mean = (quarters.bust + quarters.hip) / 2;
+  const inwards = mean - suppression.side;
+  const shares = dartShares(half.dartCount);
+  const darts =
+    suppression.dart === 0
+      ? 'nothing is left for a dart'
+      : shares.length === 1
+        ? said`the dart or princess line takes ${mm(suppression.dart)}`
+        : said`two darts take ${mm(suppression.dart * (shares[0] ?? 1))} and ${mm(suppression.dart * (shares[1] ?? 0))}`;
+  paper.draw(
+    'Waist suppression',
+    said`Mean of bust and hip quarters ${mm(mean)} less the waist quarter ${mm(quarters.waist)} leaves ${mm(suppression.whole)} to take in. The side seam takes ${mm(inwards)}; ${darts}.`,
+    {
+      why: said`The side seam stays inside the bust and leans at most 25°, so that it hangs without a hollow.`,
+      measures: ['bustGirth', 'hipGirth', 'waistGirth'],
+    },
+  );
+  if (suppression.steep) {
+    table.warn({
+      code: `${side}-side-steep`,
+      severity: 'warning',
+      field: 'card.waistGirth',
+      with: ['card.hipGirth'],
+      said: said`The ${side} side seam leans more than 25° between bust and hip: that is the least this body allows. Check waist, hip and waist to hip, and look at the hip curve in the toile.`,
+    });
+  }
+  if (suppression.dart * (shares[0] ?? 1) > 45) {
+    table.warn({
+      code: `${side}-dart-wide`,
+      severity: 'warning',
+      field: 'card.waistGirth',
+      with: ['card.hipGirth'],
+      said: said`The ${side} waist dart takes ${mm(suppression.dart * (shares[0] ?? 1))} even in two: fit it in the toile, or give the side seam a larger share in the house rules.`,
+    });
+  }
+}
+
+function narrateSide(paper: PartTable, half: Half): void {
+  const { line, heights, side } = half;
+  const lean = (Math.atan(steepest(line, heights.bust, heights.hip)) * 180) / Math.PI;
+  const trued =
+    side === 'front'
+      ? said`It is the master for the back.`
+      : said`Its heights are trued: from the waist every level lies as far along the seam as on the front.`;
+  paper.draw(
+    'Side seam',
+    said`One fair curve through bust, waist, top hip and hip, upright at bust and hip, then upright into the knee seam; it leans ${deg(lean)} at most. ${trued}`,
+    {
+      lines: [profilePath(line, heights.underarm, heights.knee)],
+      points: {
+        'side-bust': point(xAt(line, heights.bust), heights.bust),
+        'side-waist': point(xAt(line, heights.waist), heights.waist),
+        'side-hip': point(xAt(line, heights.hip), heights.hip),
+        'side-knee': point(xAt(line, heights.knee), heights.knee),
+      },
+    },
+  );
+}
+
+function narrateContour(paper: PartTable, side: Side, contour: Contour, moved: number): void {
+  const shared =
+    moved > 0.05
+      ? side === 'front'
+        ? said` ${mm(moved)} of it comes from the back, whose side would lean too far.`
+        : said` ${mm(moved)} more than the side can lean goes to the front.`
+      : said``;
+  const opening =
+    contour.opening === 0
+      ? said`no opening is needed`
+      : said`the opening at the top edge takes ${mm(contour.opening)}`;
+  paper.draw(
+    'Above the bust',
+    said`Bust quarter less upper chest quarter leaves ${mm(contour.reduction)}: the side leans ${contour.lean < 0 ? 'out' : 'in'} by ${mm(Math.abs(contour.lean))}, ${opening}.${shared}`,
+    {
+      why: said`This is the only amount taken out above the bust: with it the top edge lies on the upper chest and cannot gape.`,
+      measures: ['bustGirth', 'upperChestGirth'],
+    },
+  );
+}
+
+function narrateWaistSeam(paper: PartTable, half: Half, quarters: Quarters): void {
+  const fall = half.seam.to.y - half.seam.from.y;
+  const way =
+    Math.abs(fall) < 0.05
+      ? said`stays level`
+      : said`${fall > 0 ? 'falls' : 'rises'} ${mm(Math.abs(fall))}`;
+  paper.draw(
+    'Waist seam',
+    said`Drawn with its intake closed, ${mm(quarters.seam.value)} long (${quarters.seam.how}): square at the centre, it ${way} at the side, then is opened by ${mm(half.gap.seam)}.`,
+    {
+      why: said`Top and middle are cut from this one line, so they are equal by construction.`,
+      lines: [[half.seam]],
+      measures: quarters.seam.measures,
+    },
+  );
+}
+
+/** A shift of the back's levels beyond this is worth a look at the measures. */
+const farShift = 8;
+
+/** Says where truing moved a level of the back farther than 8 mm. */
+export function warnOfShift(table: DraftingTable, { back }: PairedHalves): void {
+  const shifted = levelRows
+    .map(([level, title]) => ({ title, by: back.heights[level] - back.levels[level] }))
+    .filter(({ by }) => Math.abs(by) > farShift);
+  const [first] = shifted;
+  if (!first) return;
+  table.warn({
+    code: 'back-trued-far',
+    severity: 'warning',
+    field: 'card.waistGirth',
+    with: ['card.hipGirth', 'card.bustGirth'],
+    said: said`Truing the back to the front moved its ${first.title.toLowerCase()} by ${mm(Math.abs(first.by))} at the side. The seams meet; look at the level in the toile.`,
+  });
+}

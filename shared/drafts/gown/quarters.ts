@@ -1,0 +1,130 @@
+import type { Body, MeasureKey } from '../../body/card.ts';
+import type { BodyLevels } from '../../body/levels.ts';
+import type { WantedGirth } from '../../drafting/construction.ts';
+import type { BalanceLevel, HouseRules } from '../../drafting/house-rules.ts';
+import { type Quantity, plus, quarterOf, taken } from '../../drafting/quantity.ts';
+import type { LevelName, Side } from '../../drafting/piece.ts';
+import { monotoneProfile, xAt } from '../../geometry/profile.ts';
+import type { GownStyle } from './style-card.ts';
+
+/** Finished quarter widths of one side of the body, seam line to seam line, by level. */
+export type Quarters = { readonly [L in BalanceLevel | 'seam']: Quantity };
+
+type Level = { readonly key: BalanceLevel; readonly name: string; readonly girth: MeasureKey };
+
+const levels: readonly Level[] = [
+  { key: 'chest', name: 'upper chest', girth: 'upperChestGirth' },
+  { key: 'bust', name: 'bust', girth: 'bustGirth' },
+  { key: 'underbust', name: 'under-bust', girth: 'underbustGirth' },
+  { key: 'waist', name: 'waist', girth: 'waistGirth' },
+  { key: 'topHip', name: 'top hip', girth: 'topHipGirth' },
+  { key: 'hip', name: 'hip', girth: 'hipGirth' },
+];
+
+/** Ease at a level; the knee girth is given finished. */
+const easeAt = (style: GownStyle, key: BalanceLevel): number =>
+  key === 'knee' ? 0 : style.ease[key];
+
+/** Where the raised waist seam lies between under-bust and waist, 0 to 1. */
+const seamShare = (levels: BodyLevels, seam: number): number =>
+  (seam - levels.underbust) / (levels.waist - levels.underbust);
+
+/**
+ * Finished quarters (method section 4): (girth + ease)/4, plus the balance in front and less it in
+ * the back. At the waist seam the girth is the measured one, else the monotone cubic through the
+ * quarters of the other levels.
+ */
+export function finishedQuarters(
+  side: Side,
+  body: Body,
+  style: GownStyle,
+  rules: HouseRules,
+  heights: BodyLevels,
+  seam: number,
+): Quarters {
+  const sign = side === 'front' ? 1 : -1;
+  const quarter = (key: BalanceLevel, girth: Quantity): Quantity =>
+    plus(quarterOf(plus(girth, 'ease', easeAt(style, key))), 'balance', sign * rules.balance[key]);
+  const at = (level: Level): Quantity => quarter(level.key, taken(level.name, level.girth, body));
+  const [chest, bust, underbust, waist, topHip, hip] = levels.map(at);
+  if (!chest || !bust || !underbust || !waist || !topHip || !hip)
+    throw new Error('levels are listed above');
+  const knee = quarter('knee', {
+    value: style.kneeFinished,
+    how: ['finished knee ', { mm: style.kneeFinished }],
+    measures: [],
+  });
+  const share = seamShare(heights, seam);
+  const eased = (key: 'underbust' | 'waist'): number => style.ease[key];
+  const seamQuarter: Quantity =
+    'waistSeamGirth' in body.estimated
+      ? {
+          value: xAt(
+            monotoneProfile([
+              { y: heights.underarm, x: chest.value },
+              { y: heights.bust, x: bust.value },
+              { y: heights.underbust, x: underbust.value },
+              { y: heights.waist, x: waist.value },
+              { y: heights.topHip, x: topHip.value },
+              { y: heights.hip, x: hip.value },
+            ]),
+            seam,
+          ),
+          how: ['the smooth line through the quarters above and below'],
+          measures: [],
+        }
+      : plus(
+          quarterOf(
+            plus(
+              taken('waist seam', 'waistSeamGirth', body),
+              'ease',
+              eased('underbust') + share * (eased('waist') - eased('underbust')),
+            ),
+          ),
+          'balance',
+          sign *
+            (rules.balance.underbust + share * (rules.balance.waist - rules.balance.underbust)),
+        );
+  return { chest, bust, underbust, waist, topHip, hip, knee, seam: seamQuarter };
+}
+
+const levelName: { readonly [K in BalanceLevel]: LevelName } = {
+  chest: 'chest',
+  bust: 'bust',
+  underbust: 'underbust',
+  waist: 'waist',
+  topHip: 'top-hip',
+  hip: 'hip',
+  knee: 'knee-seam',
+};
+
+/** The girths the draft promises at every level: body and ease, whole-body millimetres. */
+export function wantedGirths(
+  body: Body,
+  style: GownStyle,
+  seamGirth: number,
+): readonly WantedGirth[] {
+  const rows: WantedGirth[] = levels.map(({ key, girth }) => ({
+    level: levelName[key],
+    body: body.measures[girth],
+    ease: easeAt(style, key),
+    wanted: body.measures[girth] + easeAt(style, key),
+    estimated: girth in body.estimated,
+  }));
+  const seam: WantedGirth =
+    'waistSeamGirth' in body.estimated
+      ? { level: 'waist-seam', wanted: seamGirth, estimated: true }
+      : {
+          level: 'waist-seam',
+          body: body.measures.waistSeamGirth,
+          ease: seamGirth - body.measures.waistSeamGirth,
+          wanted: seamGirth,
+          estimated: false,
+        };
+  return [
+    ...rows.slice(0, 3),
+    seam,
+    ...rows.slice(3),
+    { level: 'knee-seam', wanted: style.kneeFinished, estimated: false },
+  ];
+}

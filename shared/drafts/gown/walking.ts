@@ -1,0 +1,49 @@
+import type { Body } from '../../body/card.ts';
+import type { BodyLevels } from '../../body/levels.ts';
+import type { PartTable } from '../../drafting/drafting-table.ts';
+import { type Said, mm, said } from '../../units/said.ts';
+
+/** The hip joint lies at this part of waist to hip under the waist [named estimate, method section 6]. */
+const hipJointShare = 0.8;
+/** A shorter step than this is a caution, in plain words. */
+const easyStep = 600;
+
+/** What the knee seam lets the wearer do. */
+export type Walking = { readonly step: number; readonly caution: boolean; readonly said: Said };
+
+/**
+ * Longest step, mm, for a skirt of girth `skirt` at depth k below the hip joint: the knees open by
+ * d = step x k / leg, and the skirt must reach round both, 2 d + one knee.
+ * Source: derived, common practice (hobble-skirt formula); not tried on a person.
+ */
+export const longestStep = (skirt: number, knee: number, leg: number, depth: number): number =>
+  Math.max(0, ((skirt - knee) / 2) * (leg / depth));
+
+/** Girth round both knees standing together, from one: G (1 + 2/pi). Source: derived, two circles in a band. */
+export const kneesTogether = (knee: number): number => knee * (1 + 2 / Math.PI);
+
+/** The step the knee seam allows, stated on every gown. */
+export function walking(
+  paper: PartTable,
+  body: Body,
+  levels: BodyLevels,
+  kneeSeam: number,
+  kneeFinished: number,
+): Walking {
+  const joint = levels.waist + hipJointShare * (levels.hip - levels.waist);
+  const step = longestStep(
+    kneeFinished,
+    body.measures.kneeGirth,
+    levels.floor - joint,
+    kneeSeam - joint,
+  );
+  const caution = step < easyStep;
+  const sentence = said`Finished knee ${mm(kneeFinished)} lets her step about ${mm(step)}.${
+    caution ? ' Stairs, kerbs and getting into a car need care: try it at the fitting.' : ''
+  }`;
+  paper.draw('Walking', sentence, {
+    why: said`The knees open as the foot goes forward, and the seam must reach round both. An unhurried step is about ${mm(650)}.`,
+    measures: ['kneeGirth', 'waistToHip', 'waistToFloor'],
+  });
+  return { step, caution, said: sentence };
+}

@@ -1,0 +1,62 @@
+import { checkCard } from '../body/check-card.ts';
+import { completeCard } from '../body/complete-card.ts';
+import { checkRules } from '../drafting/check-rules.ts';
+import { DraftingError } from '../drafting/drafting-error.ts';
+import { openTable } from '../drafting/drafting-table.ts';
+import { drawGown } from '../drafts/gown/draw-gown.ts';
+import { gownLevels } from '../drafts/gown/levels.ts';
+import { resolveStyle } from '../drafts/gown/resolve-style.ts';
+import { checkStyle } from '../drafts/gown/style-check.ts';
+import { finishPiece } from '../finishing/finish-piece.ts';
+import { prove } from '../proof/prove.ts';
+import type { Problem } from '../units/problem.ts';
+import type { Draft, DraftInputs } from './draft.ts';
+import { draftNumber } from './draft-number.ts';
+
+/** Version of the drafting rules: a saved gown keeps it, a change of any shape raises it. */
+export const engineVersion = '1.0.0';
+
+const errorsOf = (problems: readonly Problem[]): readonly Problem[] =>
+  problems.filter((problem) => problem.severity === 'error');
+
+function refuse(problems: readonly Problem[]): void {
+  const errors = errorsOf(problems);
+  if (errors.length > 0) throw new DraftingError(errors);
+}
+
+/**
+ * Drafts a gown: checks the three inputs, draws on a clean table, finishes the pieces and proves
+ * them. Pure: the same inputs give the same draft, byte for byte.
+ * @throws DraftingError where the inputs are outside their limits; its problems name the fields.
+ */
+export function draftGown(inputs: DraftInputs): Draft {
+  const { card, style, rules } = inputs;
+  const aboutCard = checkCard(card);
+  refuse([...aboutCard, ...checkRules(rules)]);
+  const body = completeCard(card);
+  const table = openTable();
+  const levels = gownLevels(table, body);
+  const aboutStyle = checkStyle(style, body, levels);
+  refuse(aboutStyle);
+  const resolved = resolveStyle(style, body, levels);
+  const drawn = drawGown(table, body, levels, resolved, rules);
+  const number = draftNumber(JSON.stringify([engineVersion, card, style, rules]));
+  const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'cloth' };
+  const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
+  return {
+    engine: engineVersion,
+    number,
+    inputs,
+    body,
+    bodyLevels: levels,
+    style: resolved,
+    levels: drawn.levels,
+    pieces,
+    steps: table.steps,
+    handles: drawn.handles,
+    construction: drawn.construction,
+    walking: drawn.walking,
+    warnings: [...aboutCard, ...aboutStyle, ...table.warnings],
+    proof: prove({ pieces, construction: drawn.construction, rules }),
+  };
+}
