@@ -60,14 +60,14 @@ function cornerAt({ edge, before, after }: PlacedEdge, end: 'start' | 'end'): Se
 }
 
 /**
- * Whether a piece turns an outer corner into this neighbour: not where a dart opens, and not where
- * it runs on across a seam between two other pieces.
+ * Whether a piece turns an outer corner into this neighbour: not where a dart opens, not where the
+ * same two pieces run on joined, and not where it runs on across a seam between two other pieces.
  */
 function turnsCorner(neighbour: Edge, other: Piece, placed: Placed): boolean {
   if (neighbour.open === true) return false;
   if (neighbour.joins === undefined || neighbour.joins === 'self') return true;
   const beside = placed.get(keyOf(neighbour.joins))?.piece;
-  if (beside === undefined || beside === other) return true;
+  if (beside === undefined) return true;
   return beside.part !== other.part || beside.side !== other.side;
 }
 
