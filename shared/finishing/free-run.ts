@@ -1,7 +1,7 @@
 import type { Piece } from '../drafting/piece.ts';
 import { flatten } from '../geometry/curve.ts';
 import type { Path } from '../geometry/path.ts';
-import type { Point } from '../geometry/point.ts';
+import { type Point, add, scale, subtract, turnRight, unit } from '../geometry/point.ts';
 
 /** A stretch of x, mm, that nothing crosses. */
 export type Span = { readonly left: number; readonly right: number };
@@ -21,6 +21,9 @@ const leastSpacing = 5;
 /** Kept clear of the outline and of darts, grain line and drill points, mm. */
 const clearOfOutline = 9;
 const clearOfMarks = 3;
+/** Room a fold bracket and its words take beside the fold, and a drill point round itself, mm. */
+const foldBracket = 18;
+const drillMark = 3;
 
 type Chain = readonly Point[];
 
@@ -88,17 +91,27 @@ function takeOut(rows: (readonly Span[])[], mark: Chain, heights: Heights): void
 
 const chainOf = (paths: readonly Path[]): Chain => paths.flatMap((path) => flatten(path, 2));
 
-/** Straight marks as chains there and back, so that they cross a height like any outline. */
+/** A straight mark as a thin chain there and back, so that it crosses a height like any outline. */
+function strip(from: Point, to: Point, left: number, right: number): Chain {
+  const across = turnRight(unit(subtract(to, from)));
+  const shifted = (p: Point, by: number): Point => add(p, scale(across, by));
+  return [shifted(from, -left), shifted(to, -left), shifted(to, right), shifted(from, right)];
+}
+
+/** What lettering keeps clear of: darts, the grain line and its word, fold brackets, drill points. */
 function marks(piece: Piece): readonly Chain[] {
   const darts = piece.darts.map((dart) => [
-    ...flatten(dart.centreLeg, 1),
-    ...flatten(dart.sideLeg, 1).toReversed(),
+    ...flatten(dart.centreLeg, 2),
+    ...flatten(dart.sideLeg, 2).toReversed(),
   ]);
-  const drills = piece.drills.map(({ x, y }) => [
-    { x: x - 2, y: y - 6 },
-    { x: x + 2, y: y + 6 },
-  ]);
-  return [...darts, [piece.grain.from, piece.grain.to], ...drills];
+  const folds = piece.edges.flatMap(({ kind, path }) => {
+    const [from, to] = [path[0]?.from, path.at(-1)?.to];
+    return kind === 'fold' && from && to ? [strip(from, to, 0, foldBracket)] : [];
+  });
+  const drills = piece.drills.map(({ x, y }) =>
+    strip({ x, y: y - drillMark }, { x, y: y + drillMark }, drillMark, drillMark),
+  );
+  return [...darts, ...folds, strip(piece.grain.from, piece.grain.to, 4, 4), ...drills];
 }
 
 /** The stretches at evenly spaced heights that lie inside the finished outline and clear of its marks. */
