@@ -1,4 +1,5 @@
 import { sql } from 'drizzle-orm';
+import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
 import type { Database } from './client.ts';
 import { sampleGowns } from './schema/sample-gowns.ts';
 
@@ -10,8 +11,7 @@ export const sampleSeed: readonly SampleRow[] = [
     id: 'tamsin',
     position: 1,
     title: 'Tamsin, petite',
-    scenario:
-      'A registry wedding in May, flat shoes. Short from shoulder to waist, so every level sits high.',
+    note: 'A registry wedding in May, flat shoes. Short from shoulder to waist, so every level sits high.',
     card: {
       name: 'Tamsin Orrell',
       date: '2026-10-06',
@@ -27,13 +27,13 @@ export const sampleSeed: readonly SampleRow[] = [
       waistToFloor: 952,
     },
     style: { heelHeight: 10 },
+    rules: houseRulePresets.balanced,
   },
   {
     id: 'judith',
     position: 2,
     title: 'Judith, middle figure',
-    scenario:
-      'A gala dinner in November with a little dancing: the plain case a class begins with.',
+    note: 'A gala dinner in November with a little dancing: the plain case a class begins with.',
     card: {
       name: 'Judith Amsel',
       date: '2026-10-12',
@@ -49,13 +49,13 @@ export const sampleSeed: readonly SampleRow[] = [
       waistToFloor: 1050,
     },
     style: { heelHeight: 60 },
+    rules: houseRulePresets.balanced,
   },
   {
     id: 'bridget',
     position: 3,
     title: 'Bridget, full bust',
-    scenario:
-      'Singing at the winter concert. The gown must hold without straps, so the top edge is drawn close.',
+    note: 'Singing at the winter concert. The gown must hold without straps, so the top edge is drawn close.',
     card: {
       name: 'Bridget Tallow',
       date: '2026-11-02',
@@ -71,12 +71,13 @@ export const sampleSeed: readonly SampleRow[] = [
       waistToFloor: 1062,
     },
     style: { heelHeight: 45, kneeLevel: 80 },
+    rules: houseRulePresets.balanced,
   },
   {
     id: 'lotte',
     position: 4,
     title: 'Lotte, fuller hip',
-    scenario: 'A summer ball. Wide hips over a small waist: the side seam has the most to do here.',
+    note: 'A summer ball. Wide hips over a small waist: the side seam has the most to do here.',
     card: {
       name: 'Lotte Verbruin',
       date: '2026-11-14',
@@ -92,6 +93,7 @@ export const sampleSeed: readonly SampleRow[] = [
       waistToFloor: 1046,
     },
     style: { heelHeight: 70 },
+    rules: houseRulePresets.balanced,
   },
 ];
 
@@ -105,9 +107,10 @@ export async function seedSamples(database: Database): Promise<void> {
       set: {
         position: sql`excluded.position`,
         title: sql`excluded.title`,
-        scenario: sql`excluded.scenario`,
+        note: sql`excluded.note`,
         card: sql`excluded.card`,
         style: sql`excluded.style`,
+        rules: sql`excluded.rules`,
       },
     });
 }

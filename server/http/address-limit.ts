@@ -15,10 +15,9 @@ export const addressLimit = (perMinute: number): RequestHandler =>
       const seconds = Number(response.get('Retry-After') ?? 60);
       next(
         new RefusalError(
-          'too-many',
+          'too-many-requests',
           `That was more than ${perMinute} requests in a minute from one address. Try again in ${seconds} seconds.`,
-          [],
-          seconds,
+          { retryAfterSeconds: seconds },
         ),
       );
     },

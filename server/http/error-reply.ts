@@ -1,5 +1,8 @@
 import type { ErrorRequestHandler } from 'express';
 import type { Logger } from 'pino';
+import { problemSchema } from '#shared/api/problem.ts';
+import type { Refusal } from '#shared/api/problem-codes.ts';
+import type { Problem } from '#shared/units/problem.ts';
 import { RefusalError, statusOf } from './refusal.ts';
 import { requestIdOf } from './request-log.ts';
 
@@ -30,7 +33,7 @@ function fromParser(error: unknown): RefusalError | undefined {
     );
   }
   if (typeof error.type === 'string' && /^(entity|encoding|charset|request)\./.test(error.type)) {
-    return new RefusalError('malformed', 'The request is not readable JSON in UTF-8.');
+    return new RefusalError('not-json', 'The request is not readable JSON in UTF-8.');
   }
   return undefined;
 }
@@ -38,7 +41,7 @@ function fromParser(error: unknown): RefusalError | undefined {
 /** A path that cannot be decoded is a stranger's mistake, not a bug. */
 function fromPath(error: unknown): RefusalError | undefined {
   return error instanceof URIError
-    ? new RefusalError('malformed', 'The address is not readable.')
+    ? new RefusalError('not-found', 'The address is not readable.')
     : undefined;
 }
 
@@ -53,17 +56,18 @@ export const errorReply =
     const known = error instanceof RefusalError ? error : (fromParser(error) ?? fromPath(error));
     const id = requestIdOf(response);
     if (known === undefined) log.error({ id, ...traceOf(error) }, 'fault');
-    const refusal =
-      known ??
-      new RefusalError('fault', 'Something went wrong here. It is noted under the id given.');
-    if (refusal.retryAfterSeconds !== undefined) {
-      response.setHeader('Retry-After', String(refusal.retryAfterSeconds));
-    }
+    const refused =
+      known ?? new RefusalError('internal', 'Something went wrong here; it is noted.');
+    const { problems, retryAfterSeconds, allow } = refused.details;
+    if (retryAfterSeconds !== undefined) response.setHeader('Retry-After', retryAfterSeconds);
+    if (allow !== undefined) response.setHeader('Allow', allow);
     response.setHeader('Cache-Control', 'no-store');
-    response.status(statusOf[refusal.code]).json({
-      code: refusal.code,
-      message: refusal.message,
-      problems: refusal.problems,
-      requestId: id,
-    });
+    const body: Refusal = {
+      code: refused.code,
+      message: refused.message,
+      ...(problems === undefined ? {} : { problems: problems.map(asSent) }),
+    };
+    response.status(statusOf[refused.code]).json(body);
   };
+
+const asSent = (problem: Problem) => problemSchema.parse(problem);

@@ -17,8 +17,7 @@ export function firstComeQueue(waiting: number): Queue {
       throw new RefusalError(
         'busy',
         'Many people are printing at this moment. Try again in a few seconds.',
-        [],
-        5,
+        { retryAfterSeconds: 5 },
       );
     }
     inside += 1;

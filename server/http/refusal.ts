@@ -1,28 +1,47 @@
+import type { RefusalCode } from '#shared/api/problem-codes.ts';
 import type { Problem } from '#shared/units/problem.ts';
+import { speak } from '#shared/units/speak.ts';
+import type { Unit } from '#shared/units/said.ts';
 
-/** Why the server does not do what was asked; one place knows their HTTP statuses. */
-export type RefusalCode =
-  'malformed' | 'not-found' | 'too-large' | 'cannot-be-drafted' | 'too-many' | 'busy' | 'fault';
-
+/** The one place that knows HTTP statuses. */
 export const statusOf: { readonly [C in RefusalCode]: number } = {
-  malformed: 400,
+  'not-json': 400,
   'not-found': 404,
+  'method-not-allowed': 405,
   'too-large': 413,
-  'cannot-be-drafted': 422,
-  'too-many': 429,
+  'wrong-media-type': 415,
+  'bad-input': 422,
+  'not-drawable': 422,
+  'too-many-requests': 429,
+  internal: 500,
   busy: 503,
-  fault: 500,
 };
 
-/** A refusal a person can act on; `problems` name the fields where there are any. */
+/** What goes with a refusal, where it has any. */
+type Details = {
+  /** Which fields to change, and how. */
+  readonly problems?: readonly Problem[];
+  readonly retryAfterSeconds?: number;
+  /** Methods the address does answer. */
+  readonly allow?: string;
+};
+
+/** A refusal a person can act on. */
 export class RefusalError extends Error {
   constructor(
     readonly code: RefusalCode,
     message: string,
-    readonly problems: readonly Problem[] = [],
-    readonly retryAfterSeconds?: number,
+    readonly details: Details = {},
   ) {
     super(message);
     this.name = 'RefusalError';
   }
 }
+
+/** A refusal for its problems' sake; its message is their sentences. */
+export const refusalFor = (
+  code: 'bad-input' | 'not-drawable',
+  problems: readonly Problem[],
+  unit: Unit,
+): RefusalError =>
+  new RefusalError(code, problems.map((each) => speak(each.said, unit)).join(' '), { problems });

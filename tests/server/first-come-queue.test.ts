@@ -31,7 +31,7 @@ describe('prints are made one after the other', () => {
     const second = queue(() => pause(1));
     const third = queue(() => pause(1));
     await expect(third).rejects.toBeInstanceOf(RefusalError);
-    await expect(third).rejects.toMatchObject({ code: 'busy', retryAfterSeconds: 5 });
+    await expect(third).rejects.toMatchObject({ code: 'busy', details: { retryAfterSeconds: 5 } });
     await Promise.all([first, second]);
     await expect(queue(() => Promise.resolve('printed'))).resolves.toBe('printed');
   });

@@ -1,4 +1,5 @@
 import type { MeasureCard } from '#shared/body/card.ts';
+import type { HouseRules } from '#shared/drafting/house-rules.ts';
 import type { StyleCard } from '#shared/drafts/gown/style-card.ts';
 import { integer, jsonb, pgTable, text } from 'drizzle-orm/pg-core';
 
@@ -7,7 +8,8 @@ export const sampleGowns = pgTable('sample_gowns', {
   id: text('id').primaryKey(),
   position: integer('position').notNull().unique(),
   title: text('title').notNull(),
-  scenario: text('scenario').notNull(),
+  note: text('note').notNull(),
   card: jsonb('card').$type<MeasureCard>().notNull(),
   style: jsonb('style').$type<StyleCard>().notNull(),
+  rules: jsonb('rules').$type<HouseRules>().notNull(),
 });

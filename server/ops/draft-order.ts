@@ -1,0 +1,88 @@
+import { readFileSync } from 'node:fs';
+import { parseArgs } from 'node:util';
+import { readInputs } from '#shared/api/read-body.ts';
+import type { DraftInputs } from '#shared/engine/draft.ts';
+import { type PaperName, papers } from '#shared/sheets/papers.ts';
+import type { Problem } from '#shared/units/problem.ts';
+import type { Unit } from '#shared/units/said.ts';
+import { speak } from '#shared/units/speak.ts';
+
+export const usage = `Use: npm run --silent draft -- --measures card.json --style style.json
+       [--rules rules.json] [--paper A4|Letter] [--unit cm|in] --out DIR
+     npm run --silent draft -- --schema card|style|rules`;
+
+/** Bad input on the command line; its message is for stderr and names the field or the option. */
+export class RefusedError extends Error {
+  constructor(lines: readonly string[]) {
+    super(lines.join('\n'));
+    this.name = 'RefusedError';
+  }
+}
+
+export const refuse = (...lines: string[]): never => {
+  throw new RefusedError(lines);
+};
+
+export const refuseProblems = (problems: readonly Problem[], unit: Unit): never =>
+  refuse(...problems.map((each) => `${each.field}: ${speak(each.said, unit)}`));
+
+export function readOptions(args: readonly string[]) {
+  try {
+    return parseArgs({
+      args: [...args],
+      options: {
+        measures: { type: 'string' },
+        style: { type: 'string' },
+        rules: { type: 'string' },
+        paper: { type: 'string', default: 'A4' },
+        unit: { type: 'string', default: 'cm' },
+        out: { type: 'string' },
+        schema: { type: 'string' },
+      },
+    }).values;
+  } catch (error) {
+    return refuse(error instanceof Error ? error.message : String(error), usage);
+  }
+}
+
+function readJson(option: string, path: string): unknown {
+  let text: string;
+  try {
+    text = readFileSync(path, 'utf8');
+  } catch {
+    return refuse(`--${option}: the file ${path} cannot be read.`);
+  }
+  try {
+    return JSON.parse(text);
+  } catch {
+    return refuse(`--${option}: the file ${path} is not JSON.`);
+  }
+}
+
+const isPaper = (name: string): name is PaperName => Object.hasOwn(papers, name);
+const isUnit = (name: string): name is Unit => name === 'cm' || name === 'in';
+
+/** What is to be drawn, and how it is printed and told. */
+export type Order = {
+  readonly inputs: DraftInputs;
+  readonly paper: PaperName;
+  readonly unit: Unit;
+  readonly out: string;
+};
+
+/** Reads the three files and the choices, or refuses by name what cannot be right. */
+export function readOrder(options: ReturnType<typeof readOptions>): Order {
+  const { measures, style, rules, paper, unit, out } = options;
+  if (measures === undefined) return refuse('--measures is missing: name the measure card.', usage);
+  if (style === undefined) return refuse('--style is missing: name the style card.', usage);
+  if (out === undefined) return refuse('--out is missing: name a folder for the files.', usage);
+  if (!isPaper(paper)) return refuse(`--paper must be A4 or Letter; it is “${paper}”.`);
+  if (!isUnit(unit)) return refuse(`--unit must be cm or in; it is “${unit}”.`);
+  const reading = readInputs({
+    card: readJson('measures', measures),
+    style: readJson('style', style),
+    ...(rules === undefined ? {} : { rules: readJson('rules', rules) }),
+  });
+  if ('problems' in reading) return refuseProblems(reading.problems, unit);
+  return { inputs: reading.inputs, paper, unit, out };
+}

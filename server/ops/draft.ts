@@ -1,0 +1,78 @@
+import { mkdirSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { type InputFile, inputFiles, jsonSchema } from '#shared/api/json-schema.ts';
+import { DraftingError } from '#shared/drafting/drafting-error.ts';
+import type { Draft } from '#shared/engine/draft.ts';
+import { draftGown } from '#shared/engine/draft-gown.ts';
+import { draftJson, proofJson } from '#shared/exports/json.ts';
+import { piecesSvg } from '#shared/exports/svg.ts';
+import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
+import { speak } from '#shared/units/speak.ts';
+import { tilesPdf } from '../features/print/tiles-pdf.ts';
+import {
+  type Order,
+  RefusedError,
+  readOptions,
+  readOrder,
+  refuse,
+  refuseProblems,
+} from './draft-order.ts';
+
+/** What the command ends with: every proof line holds, drawn but a line fails, or bad input. */
+const ends = { proven: 0, unproven: 1, refused: 2 } as const;
+
+async function draw({ inputs, paper, unit }: Order): Promise<{ draft: Draft; tiles: Uint8Array }> {
+  try {
+    const draft = draftGown(inputs);
+    return { draft, tiles: await tilesPdf(draft, { paper, unit, selection: 'whole-gown' }) };
+  } catch (error) {
+    if (error instanceof DraftingError) return refuseProblems(error.problems, unit);
+    if (error instanceof SheetLimitError) return refuseProblems([error.problem], unit);
+    throw error;
+  }
+}
+
+function write(folder: string, files: Readonly<Record<string, string | Uint8Array>>): void {
+  try {
+    mkdirSync(folder, { recursive: true });
+    for (const [name, content] of Object.entries(files)) writeFileSync(join(folder, name), content);
+  } catch {
+    refuse(`--out: the folder ${folder} cannot be written to.`);
+  }
+}
+
+const isInputFile = (name: string): name is InputFile => inputFiles.some((each) => each === name);
+
+function tellSchema(name: string): void {
+  if (!isInputFile(name)) return refuse(`--schema must be card, style or rules; it is “${name}”.`);
+  console.log(JSON.stringify(jsonSchema(name), undefined, 2));
+}
+
+async function main(args: readonly string[]): Promise<number> {
+  const options = readOptions(args);
+  if (options.schema !== undefined) {
+    tellSchema(options.schema);
+    return ends.proven;
+  }
+  const order = readOrder(options);
+  const { draft, tiles } = await draw(order);
+  write(order.out, {
+    'pieces.svg': piecesSvg(draft, order.unit),
+    'draft.json': draftJson(draft),
+    'proof.json': proofJson(draft),
+    'tiles.pdf': tiles,
+  });
+  for (const each of draft.warnings) {
+    console.error(`${each.field}: ${speak(each.said, order.unit)}`);
+  }
+  console.log(speak(draft.proof.verdict, order.unit));
+  return draft.proof.holds ? ends.proven : ends.unproven;
+}
+
+try {
+  process.exitCode = await main(process.argv.slice(2));
+} catch (error) {
+  if (!(error instanceof RefusedError)) throw error;
+  console.error(error.message);
+  process.exitCode = ends.refused;
+}
