@@ -2,7 +2,7 @@ import type { Draft } from '../engine/draft.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
 import type { Selection } from '../sheets/selection.ts';
 import type { SheetPlan } from '../sheets/sheet-plan.ts';
-import { printerMargin } from '../sheets/tile-plan.ts';
+import { printerMargin } from '../sheets/tile-grid.ts';
 import type { Unit } from '../units/said.ts';
 import { speak } from '../units/speak.ts';
 import { assembly, cuttingCautions } from './cautions.ts';

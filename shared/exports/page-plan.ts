@@ -3,7 +3,7 @@ import type { Path } from '../geometry/path.ts';
 import type { Point } from '../geometry/point.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
 import type { SheetPlan } from '../sheets/sheet-plan.ts';
-import { overlap } from '../sheets/tile-plan.ts';
+import { overlap } from '../sheets/tile-grid.ts';
 import type { Mark } from './drawing.ts';
 import { box, outline, pens, words } from './marks.ts';
 

@@ -124,7 +124,7 @@ export function drawPiece(piece: FinishedPiece): Drawing {
       ...piece.levels.flatMap(levelMarks),
       ...grainMarks(piece.grain),
       ...piece.lettering.map(({ text, at, size }) =>
-        words(text, at.x, at.y, size, { heavy: size === piece.lettering[0]?.size }),
+        words(text, at.x, at.y, size, { heavy: piece.title.includes(text) }),
       ),
     ],
   };

@@ -1,6 +1,7 @@
 import { shift } from '../geometry/motion.ts';
 import type { SheetPlan } from '../sheets/sheet-plan.ts';
-import { type Tile, type TilePlan, overlap, printerMargin } from '../sheets/tile-plan.ts';
+import { overlap, printerMargin } from '../sheets/tile-grid.ts';
+import type { Tile, TilePlan } from '../sheets/tile-plan.ts';
 import { point } from '../geometry/point.ts';
 import type { Drawing, Mark, Window } from './drawing.ts';
 import { boxOf, placedChain } from '../sheets/layout.ts';
@@ -197,9 +198,9 @@ export function drawTiles(
       ...over,
       words(
         `${legend} · sheet ${order + 1} of ${tiles.length}`,
-        left + 14,
-        top + use.height - overlap - 7,
-        2.6,
+        left + 3,
+        top + use.height - overlap / 2 + 1,
+        2.4,
         { grey: 0.3 },
       ),
     ];

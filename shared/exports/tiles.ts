@@ -4,11 +4,10 @@ import { type Selection, choosePieces } from '../sheets/selection.ts';
 import { refuseTooManySheets } from '../sheets/sheet-limit.ts';
 import { planSheets } from '../sheets/sheet-plan.ts';
 import type { Unit } from '../units/said.ts';
-import { coverPage, draftLine, selectionTitles } from './cover.ts';
+import { coverPage, selectionTitles } from './cover.ts';
 import type { PrintJob } from './drawing.ts';
 import { drawPiece } from './piece-drawing.ts';
 import { drawTiles, tileFurniture } from './tile-pages.ts';
-import { shorten } from './type-width.ts';
 
 export type TileChoice = {
   readonly paper: PaperName;
@@ -25,12 +24,14 @@ export function tilesJob(draft: Draft, choice: TileChoice): PrintJob {
   const sheets = planSheets(draft.pieces, choice);
   refuseTooManySheets(sheets);
   const titles = new Map(pieces.map((each) => [each.name, each.title]));
-  const legend = shorten(draftLine(draft), 2.6, 120);
   return {
     title: `Ellwand ${selectionTitles[choice.selection].toLowerCase()}, draft ${draft.number}`,
     ...(draft.inputs.card.date === undefined ? {} : { date: draft.inputs.card.date }),
     paper: papers[choice.paper],
     drawings: [...pieces.map(drawPiece), ...tileFurniture(sheets.plan)],
-    pages: [coverPage(draft, sheets, pieces, choice), ...drawTiles(sheets, titles, legend)],
+    pages: [
+      coverPage(draft, sheets, pieces, choice),
+      ...drawTiles(sheets, titles, `draft ${draft.number}`),
+    ],
   };
 }

@@ -1,7 +1,8 @@
 import { type Motion, moved } from '../geometry/motion.ts';
 import { type Layout, type Placement, type Shape, boxOf } from './layout.ts';
+import { inkedTiles } from './inked-tiles.ts';
 import type { Paper } from './papers.ts';
-import { countTiles, overlap, printedArea } from './tile-plan.ts';
+import { tileGrid } from './tile-grid.ts';
 
 /** Room between pieces, so that scissors get round each, and to the edge of the drawing. */
 const gap = 6;
@@ -50,14 +51,14 @@ function shelve(shapes: readonly Shape[], turn: Turn, width: number): Layout {
   const sorted = shapes
     .map((shape, order) => ({ laid: lay(shape, turn, room), order }))
     .sort((a, b) => b.laid.height - a.laid.height || a.order - b.order);
-  const shelves: { y: number; height: number; filled: number }[] = [];
+  const shelves: { y: number; filled: number }[] = [];
   const placements: Placement[] = [];
   let bottom = edge;
   let right = 0;
   for (const { laid } of sorted) {
     let shelf = shelves.find((each) => each.filled + laid.width <= room + edge + 1e-9);
     if (!shelf) {
-      shelf = { y: bottom, height: laid.height, filled: edge };
+      shelf = { y: bottom, filled: edge };
       shelves.push(shelf);
       bottom += laid.height + gap;
     }
@@ -68,21 +69,28 @@ function shelve(shapes: readonly Shape[], turn: Turn, width: number): Layout {
   return { width: right + edge, height: bottom - gap + edge, placements };
 }
 
+/** Fewer sheets first; of layouts with as many, the one that spreads least over the table. */
+function cost(layout: Layout, paper: Paper): number {
+  const grid = tileGrid(layout, paper);
+  const sheets = inkedTiles(layout, grid).filter((each) => each !== undefined).length;
+  return sheets + (grid.columns * grid.step.x + grid.rows * grid.step.y) / 1e6;
+}
+
 /**
  * Lays pieces out on one drawing so that few sheets of the paper are needed: shelves of every width
- * from one sheet to ten, pieces as drafted, upright or lying; the first layout with fewest sheets
- * wins, so the same pieces always give the same drawing.
+ * from one sheet to ten, pieces as drafted, upright or lying; the first layout of least cost wins, so
+ * the same pieces always give the same drawing.
  */
 export function arrange(shapes: readonly Shape[], paper: Paper): Layout {
-  const use = printedArea(paper);
   let best: Layout = { width: 0, height: 0, placements: [] };
-  let fewest = Infinity;
+  let least = Infinity;
   if (shapes.length === 0) return best;
+  const { use, step } = tileGrid(best, paper);
   for (let columns = 1; columns <= widest; columns += 1) {
     for (const turn of ['as drafted', 'upright', 'lying'] as const) {
-      const layout = shelve(shapes, turn, columns * (use.width - overlap) + overlap);
-      const sheets = countTiles(layout, paper);
-      if (sheets < fewest) [best, fewest] = [layout, sheets];
+      const layout = shelve(shapes, turn, use.width + (columns - 1) * step.x);
+      const price = cost(layout, paper);
+      if (price < least) [best, least] = [layout, price];
     }
   }
   return best;

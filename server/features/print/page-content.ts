@@ -19,12 +19,15 @@ const f = (value: number): string => {
 
 const at = ({ x, y }: Point): string => `${n(x)} ${n(y)}`;
 
+/** Ends that differ by less than is written down are one place, or a closed outline would fall apart. */
+const parted = (a: Point, b: Point): boolean =>
+  Math.abs(a.x - b.x) > 0.005 || Math.abs(a.y - b.y) > 0.005;
+
 function pathOperators(path: Path): string {
   let out = '';
   let last: Point | undefined;
   for (const segment of path) {
-    if (!last || last.x !== segment.from.x || last.y !== segment.from.y)
-      out += `${at(segment.from)} m\n`;
+    if (!last || parted(last, segment.from)) out += `${at(segment.from)} m\n`;
     out +=
       segment.kind === 'line'
         ? `${at(segment.to)} l\n`
