@@ -91,16 +91,24 @@ function append(outline: Segment[], segment: Segment): void {
   outline.push(segment);
 }
 
-/** Lays stretches end to end, bridging what gaps there are with straight pieces. */
+/**
+ * Lays stretches end to end: gaps are bridged with straight pieces, and what rounding leaves between
+ * two stretches is closed, so that no line laid through a joint slips between them.
+ */
 function closed(parts: readonly Path[]): Path {
   const outline: Segment[] = [];
   for (const segment of parts.flat()) {
-    const last = outline.at(-1)?.to;
-    if (last) for (const bridge of lines([last, segment.from])) append(outline, bridge);
-    append(outline, segment);
+    const last = outline.at(-1)?.to ?? segment.from;
+    for (const bridge of lines([last, segment.from])) append(outline, bridge);
+    append(outline, { ...segment, from: outline.at(-1)?.to ?? segment.from });
   }
-  const [start, end] = [outline[0]?.from, outline.at(-1)?.to];
-  if (start && end) for (const bridge of lines([end, start])) append(outline, bridge);
+  const [start, end] = [outline[0]?.from, outline.at(-1)];
+  if (start && end) {
+    for (const bridge of lines([end.to, start])) append(outline, bridge);
+    const last = outline.length - 1;
+    const closing = outline[last];
+    if (closing) outline[last] = { ...closing, to: start };
+  }
   return outline;
 }
 
