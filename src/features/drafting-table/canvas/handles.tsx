@@ -1,0 +1,133 @@
+import { useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
+
+import type { Handle } from '#shared/drafting/construction.ts';
+import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
+import { styleLimits, type Limit } from '#shared/drafts/gown/style-limits.ts';
+import type { Draft } from '#shared/engine/draft.ts';
+import { dot, subtract } from '#shared/geometry/point.ts';
+import { formatLength, formatWithUnit } from '#shared/units/format-length.ts';
+import type { Unit } from '#shared/units/said.ts';
+
+import type { Layout } from './layout.ts';
+import { toScreen, type View } from './view.ts';
+
+/** One press of an arrow key, and with shift, millimetres. */
+const nudges: Record<Unit, { readonly small: number; readonly large: number }> = {
+  cm: { small: 1, large: 10 },
+  in: { small: 25.4 / 8, large: 25.4 },
+};
+
+type HandlesProps = {
+  readonly draft: Draft;
+  readonly layout: Layout;
+  readonly view: View;
+  readonly unit: Unit;
+  readonly onMove: (key: Handle['key'], value: number) => void;
+  readonly onHold: (held: boolean) => void;
+};
+
+/** Brass lozenges at the points a maker moves by hand; drag them, or step them with the arrow keys. */
+export const Handles = ({ draft, ...rest }: HandlesProps) => {
+  const limits = styleLimits(draft.body, draft.bodyLevels, draft.inputs.style);
+  return draft.handles.map((handle) => (
+    <Lozenge
+      key={handle.key}
+      handle={handle}
+      value={draft.style[handle.key]}
+      limit={limits[handle.key]}
+      {...rest}
+    />
+  ));
+};
+
+type LozengeProps = Omit<HandlesProps, 'draft'> & {
+  readonly handle: Handle;
+  readonly value: number;
+  readonly limit: Limit;
+};
+
+const Lozenge = ({ handle, value, limit, layout, view, unit, onMove, onHold }: LozengeProps) => {
+  const [near, setNear] = useState(false);
+  const from = useRef<{ readonly x: number; readonly y: number; readonly value: number }>(
+    undefined,
+  );
+  const placed = layout.placed.find(({ piece }) => piece.name === handle.piece);
+  if (placed === undefined) return null;
+  const at = toScreen(view, { x: handle.at.x + placed.at.x, y: handle.at.y + placed.at.y });
+  const { small, large } = nudges[unit];
+  const move = (to: number) => onMove(handle.key, Math.min(limit.max, Math.max(limit.min, to)));
+
+  const press = (event: KeyboardEvent) => {
+    const way = { ArrowUp: 1, ArrowRight: 1, ArrowDown: -1, ArrowLeft: -1 }[event.key];
+    if (way === undefined) return;
+    event.preventDefault();
+    event.stopPropagation();
+    // A depth grows downwards, so the arrow that points down deepens it.
+    const grows = Math.abs(handle.along.y) > 0.7 && event.key.match(/Up|Down/) ? -1 : 1;
+    move(value + way * grows * (event.shiftKey ? large : small));
+  };
+  const grab = (event: PointerEvent<SVGGElement>) => {
+    event.stopPropagation();
+    event.currentTarget.setPointerCapture(event.pointerId);
+    event.currentTarget.focus();
+    from.current = { x: event.clientX, y: event.clientY, value };
+    onHold(true);
+  };
+  const drag = (event: PointerEvent) => {
+    event.stopPropagation();
+    if (from.current === undefined) return;
+    const pixels = subtract({ x: event.clientX, y: event.clientY }, from.current);
+    const grown = (dot(pixels, handle.along) / view.scale) * handle.perMillimetre;
+    move(Math.round((from.current.value + grown) / small) * small);
+  };
+  const drop = () => {
+    from.current = undefined;
+    onHold(false);
+  };
+
+  return (
+    <g
+      role="slider"
+      tabIndex={0}
+      aria-label={styleLabels[handle.key]}
+      aria-valuemin={Math.round(limit.min)}
+      aria-valuemax={Math.round(limit.max)}
+      aria-valuenow={Math.round(value)}
+      aria-valuetext={formatWithUnit(value, unit)}
+      data-handle={handle.key}
+      transform={`translate(${at.x} ${at.y})`}
+      className="pointer-events-auto cursor-grab touch-none outline-none focus-visible:[&_.ring]:opacity-100"
+      onKeyDown={press}
+      onPointerDown={grab}
+      onPointerMove={drag}
+      onPointerUp={drop}
+      onPointerCancel={drop}
+      onPointerEnter={() => setNear(true)}
+      onPointerLeave={() => setNear(false)}
+      onFocus={() => setNear(true)}
+      onBlur={() => setNear(false)}
+    >
+      <circle r={22} className="fill-transparent" />
+      <path
+        d="M0 -13L13 0L0 13L-13 0Z"
+        className="ring fill-none stroke-brass opacity-0"
+        strokeWidth={2}
+      />
+      <path
+        d="M0 -7L7 0L0 7L-7 0Z"
+        strokeWidth={1.5}
+        className={`stroke-brass ${near ? 'fill-brass' : 'fill-paper'}`}
+      />
+      {near && <Flag text={`${styleLabels[handle.key]} ${formatLength(value, unit)}`} />}
+    </g>
+  );
+};
+
+/** The value written beside a lozenge while it matters. */
+const Flag = ({ text }: { text: string }) => (
+  <foreignObject x={14} y={-12} width={240} height={26} className="pointer-events-none">
+    <span className="figures inline-block rounded-one bg-brass px-2 text-sm leading-6 font-semibold text-on-brass">
+      {text}
+    </span>
+  </foreignObject>
+);

@@ -1,0 +1,98 @@
+import { spread } from '#shared/exports/spread.ts';
+import {
+  levelNames,
+  type FinishedPiece,
+  type LevelName,
+  type Side,
+} from '#shared/drafting/piece.ts';
+import type { Path } from '#shared/geometry/path.ts';
+import { add, point, type Point } from '#shared/geometry/point.ts';
+
+import type { Box } from './view.ts';
+
+export type Placed = { readonly piece: FinishedPiece; readonly at: Point; readonly box: Box };
+
+/** Where the pieces lie on the table, and where the frames they were drafted in lie. */
+export type Layout = {
+  readonly placed: readonly Placed[];
+  readonly frames: Readonly<Record<Side | 'flare', Point>>;
+  readonly levels: readonly { readonly name: LevelName; readonly y: number }[];
+  readonly box: Box;
+};
+
+/** Room between the frames of front, back and flare, mm. */
+const gap = 90;
+
+/** The pieces as they were drafted: each side in one frame, front, back and flare side by side. */
+export function asDrafted(pieces: readonly FinishedPiece[]): Layout {
+  const groups = [
+    pieces.filter((each) => each.part !== 'flare' && each.side === 'front'),
+    pieces.filter((each) => each.part !== 'flare' && each.side === 'back'),
+    pieces.filter((each) => each.part === 'flare'),
+  ];
+  let x = 0;
+  const [front, back, flare] = groups.map((group) => {
+    const box = around(group.map(boxOf));
+    const at = point(x - box.left, 0);
+    x += box.right - box.left + gap;
+    return { at, placed: group.map((piece) => place(piece, at)) };
+  });
+  const origin = point(0, 0);
+  return laid([...(front?.placed ?? []), ...(back?.placed ?? []), ...(flare?.placed ?? [])], {
+    front: front?.at ?? origin,
+    back: back?.at ?? origin,
+    flare: flare?.at ?? origin,
+  });
+}
+
+/** The pieces cut apart, as they lie in the SVG too. */
+export function asCut(pieces: readonly FinishedPiece[]): Layout {
+  const placed = spread(pieces).placed.map(({ piece, translate }) => place(piece, translate));
+  const origin = point(0, 0);
+  return laid(placed, { front: origin, back: origin, flare: origin });
+}
+
+const place = (piece: FinishedPiece, at: Point): Placed => ({
+  piece,
+  at,
+  box: moved(boxOf(piece), at),
+});
+
+function laid(placed: readonly Placed[], frames: Layout['frames']): Layout {
+  const levels = levelNames.flatMap((name) => {
+    for (const { piece, at } of placed) {
+      const found = piece.levels.find((each) => each.level === name);
+      if (found !== undefined && piece.part !== 'flare')
+        return [{ name, y: add(found.from, at).y }];
+    }
+    return [];
+  });
+  return { placed, frames, levels, box: around(placed.map((each) => each.box)) };
+}
+
+const moved = (box: Box, by: Point): Box => ({
+  left: box.left + by.x,
+  right: box.right + by.x,
+  top: box.top + by.y,
+  bottom: box.bottom + by.y,
+});
+
+/** The box round a piece's cutting line, from the ends and handles of its stretches. */
+function boxOf(piece: FinishedPiece): Box {
+  return around(hull(piece.cutLine).map(({ x, y }) => ({ left: x, right: x, top: y, bottom: y })));
+}
+
+const hull = (path: Path): readonly Point[] =>
+  path.flatMap((each) =>
+    each.kind === 'line' ? [each.from, each.to] : [each.from, each.c1, each.c2, each.to],
+  );
+
+const around = (boxes: readonly Box[]): Box =>
+  boxes.length === 0
+    ? { left: 0, right: 0, top: 0, bottom: 0 }
+    : {
+        left: Math.min(...boxes.map((each) => each.left)),
+        right: Math.max(...boxes.map((each) => each.right)),
+        top: Math.min(...boxes.map((each) => each.top)),
+        bottom: Math.max(...boxes.map((each) => each.bottom)),
+      };

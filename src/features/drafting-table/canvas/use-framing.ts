@@ -1,0 +1,37 @@
+import { useState } from 'react';
+
+import type { Point } from '#shared/geometry/point.ts';
+
+import { fitted, panned, zoomed, type Box, type Size, type View } from './view.ts';
+
+type Framing =
+  { readonly key: string; readonly box: Box } | { readonly key: string; readonly view: View };
+
+/**
+ * How the drawing is looked at: a box that stays fitted as the window changes, until the reader moves
+ * or zooms by hand. A new set of pieces, or pieces of quite another size, is fitted again.
+ */
+export function useFraming(key: string, box: Box, size: Size, still: boolean) {
+  const [framing, setFraming] = useState<Framing>({ key, box });
+  const outgrown = 'box' in framing && still && outgrows(box, framing.box);
+  if (framing.key !== key || outgrown) setFraming({ key, box });
+  const view = 'view' in framing ? framing.view : fitted(framing.box, size);
+  return {
+    view,
+    fit: (to: Box) => setFraming({ key, box: to }),
+    pan: (by: Point) => setFraming((now) => ({ key, view: panned(seen(now, size), by) })),
+    zoom: (by: number, at: Point) =>
+      setFraming((now) => ({ key, view: zoomed(seen(now, size), by, at) })),
+  };
+}
+
+const seen = (framing: Framing, size: Size): View =>
+  'view' in framing ? framing.view : fitted(framing.box, size);
+
+/** Whether pieces have grown or shrunk so far that the fitted box no longer frames them. */
+function outgrows(now: Box, framed: Box): boolean {
+  const reach = 0.08 * Math.max(framed.right - framed.left, framed.bottom - framed.top, 1);
+  return (['left', 'right', 'top', 'bottom'] as const).some(
+    (side) => Math.abs(now[side] - framed[side]) > reach,
+  );
+}

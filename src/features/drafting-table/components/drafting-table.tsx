@@ -1,0 +1,146 @@
+import { useDeferredValue, useEffect, useReducer, useRef, useState } from 'react';
+
+import { useMedia } from '../../../lib/use-media.ts';
+import { Tabs, type Tab } from '../../../ui/tabs.tsx';
+import { keepTable, keptTable } from '../saved-table.ts';
+import { litSeam } from '../seams.ts';
+import { tableState, type Panel } from '../table-state.ts';
+import { Drawing } from './drawing.tsx';
+import { EmptyTable } from './empty-table.tsx';
+import { Foot } from './foot.tsx';
+import { MeasureCard } from './measure-card.tsx';
+import { PiecesPanel } from './pieces-panel.tsx';
+import { PrintDialog } from './print-dialog.tsx';
+import { ProofPanel } from './proof-panel.tsx';
+import { StepsPanel } from './steps-panel.tsx';
+import { StyleCard } from './style-card.tsx';
+import { TableHeader } from './table-header.tsx';
+
+/** The drafting table: cards, drawing and panels, all of one state. */
+export const DraftingTable = () => {
+  const [state, dispatch] = useReducer(tableState, undefined, () => keptTable());
+  const [kept, setKept] = useState(true);
+  const [printing, setPrinting] = useState(false);
+  const cards = useRef<HTMLDivElement>(null);
+  const wide = useMedia('(min-width: 1100px)');
+
+  useEffect(() => setKept(keepTable(state)), [state]);
+
+  const { draft } = state.drawn;
+  // The drawing follows at once; tables and sentences may come a moment later.
+  const told = useDeferredValue(draft);
+  const waiting = <p className="text-slate">Here as soon as the ten measures are in.</p>;
+  const lit = draft === undefined ? undefined : litSeam(draft, state.seam, state.unit)?.title;
+
+  const measures: Tab<Panel> = {
+    value: 'measures',
+    label: 'Measures',
+    render: () => <MeasureCard state={state} dispatch={dispatch} />,
+  };
+  const style: Tab<Panel> = {
+    value: 'style',
+    label: 'Style',
+    render: () => <StyleCard state={state} dispatch={dispatch} />,
+  };
+  const panels: readonly Tab<Panel>[] = [
+    {
+      value: 'steps',
+      label: 'Steps',
+      render: () =>
+        told === undefined ? (
+          waiting
+        ) : (
+          <StepsPanel draft={told} chosen={state.step} unit={state.unit} dispatch={dispatch} />
+        ),
+    },
+    {
+      value: 'proof',
+      label: 'Proof',
+      render: () =>
+        told === undefined ? (
+          waiting
+        ) : (
+          <ProofPanel draft={told} lit={lit} unit={state.unit} dispatch={dispatch} />
+        ),
+    },
+    {
+      value: 'pieces',
+      label: 'Pieces',
+      render: () => (told === undefined ? waiting : <PiecesPanel draft={told} unit={state.unit} />),
+    },
+  ];
+  const besides = panels.some(({ value }) => value === state.panel) ? state.panel : 'proof';
+  const choose = (panel: Panel) => dispatch({ type: 'panel', panel });
+
+  const drawing = (
+    <div className="flex min-h-0 min-w-0 grow flex-col" id="content">
+      {draft === undefined ? (
+        <EmptyTable
+          state={state}
+          dispatch={dispatch}
+          onType={() => {
+            choose('measures');
+            requestAnimationFrame(() =>
+              cards.current?.querySelector<HTMLInputElement>('input[inputmode]')?.focus(),
+            );
+          }}
+        />
+      ) : (
+        <>
+          <Drawing draft={draft} state={state} dispatch={dispatch} />
+          <Foot draft={draft} state={state} />
+        </>
+      )}
+    </div>
+  );
+
+  return (
+    <div className="flex h-dvh flex-col overflow-hidden">
+      <TableHeader
+        state={state}
+        kept={kept}
+        dispatch={dispatch}
+        onPrint={() => setPrinting(true)}
+      />
+      {wide ? (
+        <main className="flex min-h-0 grow">
+          <div
+            ref={cards}
+            className="w-[19rem] shrink-0 space-y-8 overflow-y-auto border-r border-rule bg-cloth px-4 py-4"
+          >
+            <MeasureCard state={state} dispatch={dispatch} />
+            <StyleCard state={state} dispatch={dispatch} />
+          </div>
+          {drawing}
+          <div className="w-[21rem] shrink-0 border-l border-rule bg-cloth px-4 pt-4">
+            <Tabs label="About the draft" tabs={panels} value={besides} onChoose={choose} />
+          </div>
+        </main>
+      ) : (
+        <main className="flex min-h-0 grow flex-col sm:landscape:flex-row">
+          {drawing}
+          <div
+            ref={cards}
+            className="h-[46dvh] shrink-0 border-t border-rule bg-cloth px-3 pt-2 sm:landscape:h-auto sm:landscape:w-[22rem] sm:landscape:border-t-0 sm:landscape:border-l"
+          >
+            <Tabs
+              label="Cards and panels"
+              tabs={[measures, style, ...panels]}
+              value={state.panel}
+              onChoose={choose}
+            />
+          </div>
+        </main>
+      )}
+      {draft !== undefined && (
+        <PrintDialog
+          draft={draft}
+          fresh={state.drawn.fresh}
+          unit={state.unit}
+          open={printing}
+          onClose={() => setPrinting(false)}
+        />
+      )}
+    </div>
+  );
+};

@@ -1,0 +1,70 @@
+import type { Dispatch } from 'react';
+
+import { coreMeasures } from '#shared/body/card.ts';
+import { measureGuide } from '#shared/body/measure-guide.ts';
+
+import { Button } from '../../../ui/button.tsx';
+import { valueOf } from '../fields.ts';
+import type { TableAction, TableState } from '../table-state.ts';
+import { Samples } from './samples.tsx';
+
+type EmptyTableProps = {
+  readonly state: TableState;
+  readonly dispatch: Dispatch<TableAction>;
+  readonly onType: () => void;
+};
+
+/** Before there is a drawing: the rod fills with the measures as they are typed. */
+export const EmptyTable = ({ state, dispatch, onType }: EmptyTableProps) => {
+  const taken = coreMeasures.filter((key) => valueOf(state.entries[`card.${key}`]) !== undefined);
+  return (
+    <div className="flex min-h-0 grow flex-col items-start gap-4 overflow-y-auto p-4 sm:p-10">
+      <MeasureRod taken={taken} />
+      <p className="text-xl font-semibold sm:text-2xl">
+        {taken.length === 0 ? 'Type ten measures' : `${taken.length} of ten measures`}
+      </p>
+      {taken.length === 0 ? (
+        <>
+          <p className="max-w-prose">
+            The pieces of a strapless gown appear here, proven to sew together, and follow every
+            figure you change. Or lay out a sample body and look round first.
+          </p>
+          <div className="flex flex-wrap items-center gap-3">
+            <Button kind="primary" onClick={onType}>
+              Type ten measures
+            </Button>
+            <Samples dispatch={dispatch} />
+          </div>
+        </>
+      ) : (
+        <p className="max-w-prose">
+          {`Still open: ${coreMeasures
+            .filter((key) => !taken.includes(key))
+            .map((key) => measureGuide[key].label.toLowerCase())
+            .join(', ')}.`}
+        </p>
+      )}
+    </div>
+  );
+};
+
+/** A rod of ten marks; each measure taken fills one stretch with brass. */
+const MeasureRod = ({ taken }: { taken: readonly string[] }) => (
+  <svg viewBox="0 0 402 26" className="h-auto w-full max-w-xl" aria-hidden="true">
+    {coreMeasures.map((key, index) => (
+      <rect
+        key={key}
+        x={1 + index * 40}
+        y={16}
+        width={40}
+        height={8}
+        className={taken.includes(key) ? 'fill-brass' : 'fill-transparent'}
+      />
+    ))}
+    <path
+      d={`M1 24H401${Array.from({ length: 21 }, (_, mark) => `M${1 + mark * 20} 24V${mark % 2 === 0 ? 4 : 15}`).join('')}`}
+      className="fill-none stroke-brass"
+      strokeWidth={1.5}
+    />
+  </svg>
+);

@@ -1,0 +1,94 @@
+import { useState, type Dispatch } from 'react';
+
+import { coreMeasures, furtherMeasures, type MeasureKey } from '#shared/body/card.ts';
+import { measureGuide } from '#shared/body/measure-guide.ts';
+
+import type { TableAction, TableState } from '../table-state.ts';
+import { BodyFigure } from './body-figure.tsx';
+import { FigureField } from './figure-field.tsx';
+
+type MeasureCardProps = {
+  readonly state: TableState;
+  readonly dispatch: Dispatch<TableAction>;
+};
+
+/** The list of measures beside a body figure on which the current measure's tape is lit. */
+export const MeasureCard = ({ state, dispatch }: MeasureCardProps) => {
+  const [current, setCurrent] = useState<MeasureKey>();
+  const [all, setAll] = useState(false);
+  const guide = current === undefined ? undefined : measureGuide[current];
+  const estimates = state.drawn.draft?.body;
+
+  const row = (key: MeasureKey) => (
+    <FigureField
+      key={key}
+      field={`card.${key}`}
+      label={measureGuide[key].label}
+      state={state}
+      dispatch={dispatch}
+      describedBy="how-taken"
+      onStart={() => setCurrent(key)}
+      open={
+        estimates !== undefined && key in estimates.estimated
+          ? { value: estimates.measures[key], mark: 'est.' }
+          : undefined
+      }
+    />
+  );
+
+  return (
+    <section aria-labelledby="measure-card">
+      <h2 id="measure-card" className="heading">
+        Measure card
+      </h2>
+      <div className="sticky -top-4 z-10 -mx-1 flex h-40 gap-3 border-b border-rule bg-cloth px-1 py-2 lg:h-44">
+        <BodyFigure tape={guide?.tape} label={guide?.label ?? ''} />
+        <p id="how-taken" className="text-sm leading-snug">
+          {guide === undefined ? (
+            <span className="text-slate">
+              Ten measures make a gown. Type them as you read them off the tape: 36 1/2, 36.5 in,
+              92.7 cm. Enter goes to the next.
+            </span>
+          ) : (
+            <>
+              <strong className="block font-semibold">{guide.term}</strong>
+              {guide.how}
+            </>
+          )}
+        </p>
+      </div>
+      <form onSubmit={(event) => event.preventDefault()}>
+        <label className="flex items-center justify-between gap-3 border-b border-rule py-1">
+          <span className="shrink-0">Whose card</span>
+          <input
+            name="card.name"
+            autoComplete="off"
+            maxLength={60}
+            className="h-9 w-0 min-w-0 grow rounded-one border border-rule bg-paper px-2"
+            value={state.name}
+            onChange={(event) => dispatch({ type: 'named', name: event.currentTarget.value })}
+          />
+        </label>
+        {coreMeasures.map(row)}
+        <button
+          type="button"
+          aria-expanded={all}
+          className="min-h-10 font-semibold text-brass"
+          onClick={() => setAll(!all)}
+        >
+          {all
+            ? 'Only the ten measures'
+            : `All measures (${coreMeasures.length + furtherMeasures.length})`}
+        </button>
+        {all && (
+          <>
+            <p className="pb-2 text-sm text-slate">
+              What you leave open is estimated from the ten, marked est.
+            </p>
+            {furtherMeasures.map(row)}
+          </>
+        )}
+      </form>
+    </section>
+  );
+};

@@ -1,0 +1,88 @@
+import { useMemo, useState } from 'react';
+
+import type { Draft } from '#shared/engine/draft.ts';
+import { planSheets } from '#shared/sheets/sheet-plan.ts';
+import type { PaperName } from '#shared/sheets/papers.ts';
+import type { Unit } from '#shared/units/said.ts';
+
+import { Dialog } from '../../../ui/dialog.tsx';
+import { Segmented } from '../../../ui/segmented.tsx';
+import { FilesToKeep } from './files-to-keep.tsx';
+import { PrintRow } from './print-row.tsx';
+
+type PrintDialogProps = {
+  readonly draft: Draft;
+  readonly fresh: boolean;
+  readonly unit: Unit;
+  readonly open: boolean;
+  readonly onClose: () => void;
+};
+
+/** Chalk sheet, bodice toile or whole gown, each with its number of sheets before anything is printed. */
+export const PrintDialog = ({ open, onClose, ...rest }: PrintDialogProps) => (
+  <Dialog title="Print" open={open} onClose={onClose}>
+    <PrintChoices {...rest} />
+  </Dialog>
+);
+
+const PrintChoices = ({ draft, fresh, unit }: Omit<PrintDialogProps, 'open' | 'onClose'>) => {
+  const [paper, setPaper] = useState<PaperName>(unit === 'in' ? 'Letter' : 'A4');
+  const sheets = useMemo(
+    () => ({
+      toile: planSheets(draft.pieces, { paper, selection: 'bodice-toile' }).sheets,
+      gown: planSheets(draft.pieces, { paper, selection: 'whole-gown' }).sheets,
+    }),
+    [draft, paper],
+  );
+  const order = { draft, unit, paper };
+  return (
+    <>
+      {!fresh && (
+        <p className="mt-3 font-semibold text-madder">
+          A figure is being corrected: this prints the last drawing that held.
+        </p>
+      )}
+      {!draft.proof.holds && (
+        <p className="mt-3 font-semibold text-madder">
+          These pieces do not yet sew together: see Proof before you cut.
+        </p>
+      )}
+      <div className="mt-4 flex items-center gap-3">
+        <span>Paper</span>
+        <Segmented
+          legend="Paper"
+          choices={[
+            { value: 'A4', label: 'A4' },
+            { value: 'Letter', label: 'Letter' },
+          ]}
+          value={paper}
+          onChoose={setPaper}
+        />
+      </div>
+      <div className="mt-2">
+        <PrintRow
+          title="Chalk sheet"
+          note="Every point as a distance, at quarter scale: draft straight onto paper or cloth."
+          sheets={1}
+          order={{ ...order, kind: 'chalk-sheet' }}
+        />
+        <PrintRow
+          title="Bodice toile"
+          note="The top at true scale, to try on in calico first."
+          sheets={sheets.toile}
+          order={{ ...order, kind: 'bodice-toile' }}
+        />
+        <PrintRow
+          title="Whole gown"
+          note="Every piece at true scale, to glue together."
+          sheets={sheets.gown}
+          order={{ ...order, kind: 'whole-gown' }}
+        />
+      </div>
+      <FilesToKeep order={order} />
+      <p className="mt-4 text-sm text-slate">
+        Print at 100 %, not “fit to page”, and measure the test squares on the cover before you cut.
+      </p>
+    </>
+  );
+};

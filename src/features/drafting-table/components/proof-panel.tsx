@@ -1,0 +1,133 @@
+import type { Dispatch } from 'react';
+
+import type { Draft } from '#shared/engine/draft.ts';
+import type { ProofLine, SeamRow } from '#shared/proof/proof.ts';
+import { formatLength, formatWithUnit } from '#shared/units/format-length.ts';
+import type { Unit } from '#shared/units/said.ts';
+import { speak } from '#shared/units/speak.ts';
+
+import type { TableAction } from '../table-state.ts';
+import { GirthAudit } from './girth-audit.tsx';
+
+type ProofPanelProps = {
+  readonly draft: Draft;
+  readonly lit: string | undefined;
+  readonly unit: Unit;
+  readonly dispatch: Dispatch<TableAction>;
+};
+
+/** The verdict first; the numbers it rests on under it. */
+export const ProofPanel = ({ draft: { proof }, lit, unit, dispatch }: ProofPanelProps) => {
+  const [verdict, ...rest] = sentences(speak(proof.verdict, unit));
+  const holding = proof.lines.filter((line) => line.holds).length;
+  return (
+    <section aria-label="Proof" className="space-y-6">
+      <div className="flex items-start gap-3">
+        <VerdictMark holds={proof.holds} />
+        <div>
+          <p className={`text-xl leading-tight font-semibold ${proof.holds ? '' : 'text-madder'}`}>
+            {verdict}
+          </p>
+          {rest.length > 0 && <p className="figures text-madder">{rest.join(' ')}</p>}
+          <p className="text-slate">
+            {`${holding} of ${proof.lines.length} checks hold, ${proof.seams.length} seams walked`}
+          </p>
+        </div>
+      </div>
+      <GirthAudit rows={proof.girths} unit={unit} />
+      <div>
+        <h3 className="heading">Seams walked</h3>
+        <table className="figures w-full">
+          <thead className="text-sm text-slate">
+            <tr className="border-b border-rule">
+              <th className="py-1 text-left font-normal">Seam</th>
+              <th className="py-1 text-right font-normal whitespace-nowrap">{`Length, ${unit}`}</th>
+              <th className="py-1 pl-3 text-right font-normal">Partner</th>
+            </tr>
+          </thead>
+          <tbody>
+            {proof.seams.map((row) => (
+              <tr key={`${row.first.piece} ${row.first.edge}`} className="border-b border-rule">
+                <th scope="row" className="py-1 text-left font-normal">
+                  <button
+                    type="button"
+                    className="text-left underline decoration-rule underline-offset-4 aria-pressed:font-semibold"
+                    aria-pressed={row.title === lit}
+                    onClick={() =>
+                      dispatch({ type: 'seam', seam: row.title === lit ? undefined : row.first })
+                    }
+                  >
+                    {row.title}
+                  </button>
+                </th>
+                <td className="py-1 text-right align-top whitespace-nowrap">
+                  {formatLength(row.first.length, unit)}
+                </td>
+                <td
+                  className={`py-1 pl-3 text-right align-top ${row.holds ? 'text-verdigris' : 'font-semibold text-madder'}`}
+                >
+                  {partnerWords(row, unit)}
+                </td>
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </div>
+      <div>
+        <h3 className="heading">Checks</h3>
+        {proof.lines.map((line) => (
+          <Check key={line.number} line={line} unit={unit} />
+        ))}
+      </div>
+    </section>
+  );
+};
+
+const sentences = (text: string): string[] => text.split(/(?<=\.) /);
+
+function partnerWords(row: SeamRow, unit: Unit): string {
+  if (!row.holds) return `${formatLength(row.second.length, unit)}: does not meet`;
+  return row.ease === 0 ? 'equal' : `eased ${formatLength(Math.abs(row.ease), unit)}`;
+}
+
+const Check = ({ line, unit }: { line: ProofLine; unit: Unit }) => {
+  const failing = line.findings.filter((finding) => !finding.holds);
+  return (
+    <details className="border-b border-rule" open={failing.length > 0}>
+      <summary className="flex justify-between gap-3 py-2">
+        <span>{line.title}</span>
+        <span className={line.holds ? 'text-verdigris' : 'font-semibold text-madder'}>
+          {line.holds ? 'holds' : `${failing.length} of ${line.findings.length} fail`}
+        </span>
+      </summary>
+      <ul className="figures pb-2 text-sm">
+        {[...failing, ...line.findings.filter((finding) => finding.holds)].map((finding) => (
+          <li
+            key={speak(finding.said, unit)}
+            className={`py-px ${finding.holds ? 'text-slate' : 'text-madder'}`}
+          >
+            {speak(finding.said, unit)}
+            {!finding.holds && ` (within ${formatWithUnit(finding.bound, unit)})`}
+          </li>
+        ))}
+      </ul>
+    </details>
+  );
+};
+
+const VerdictMark = ({ holds }: { holds: boolean }) => (
+  <svg viewBox="0 0 40 40" className="h-10 w-10 shrink-0" aria-hidden="true">
+    <circle
+      cx={20}
+      cy={20}
+      r={18}
+      strokeWidth={2}
+      className={`fill-none ${holds ? 'stroke-verdigris' : 'stroke-madder'}`}
+    />
+    <path
+      d={holds ? 'M12 20L18 26L29 14' : 'M20 10V23M20 27V30'}
+      strokeWidth={3}
+      className={`fill-none ${holds ? 'stroke-verdigris' : 'stroke-madder'}`}
+    />
+  </svg>
+);

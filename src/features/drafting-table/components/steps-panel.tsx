@@ -1,0 +1,49 @@
+import type { Dispatch } from 'react';
+
+import type { Draft } from '#shared/engine/draft.ts';
+import type { Unit } from '#shared/units/said.ts';
+import { speak } from '#shared/units/speak.ts';
+
+import type { TableAction } from '../table-state.ts';
+
+type StepsPanelProps = {
+  readonly draft: Draft;
+  readonly chosen: string | undefined;
+  readonly unit: Unit;
+  readonly dispatch: Dispatch<TableAction>;
+};
+
+/** How the draft came about, step by step; a chosen step shows what it drew. */
+export const StepsPanel = ({ draft, chosen, unit, dispatch }: StepsPanelProps) => {
+  const parts = [...new Set(draft.steps.map((step) => step.part))];
+  const choose = (id: string | undefined) => dispatch({ type: 'step', step: id });
+  return (
+    <section aria-label="Steps" className="space-y-6">
+      {parts.map((part) => (
+        <div key={part}>
+          <h3 className="heading">{part}</h3>
+          <ol>
+            {draft.steps
+              .filter((step) => step.part === part)
+              .map((step) => (
+                <li key={step.id} className="border-b border-rule">
+                  <button
+                    type="button"
+                    aria-pressed={step.id === chosen}
+                    className="figures w-full border-l-2 border-transparent py-2 pl-2 text-left aria-pressed:border-brass aria-pressed:bg-paper"
+                    onClick={() => choose(step.id === chosen ? undefined : step.id)}
+                  >
+                    <strong className="block font-semibold">{step.title}</strong>
+                    {speak(step.said, unit)}
+                    {step.why !== undefined && (
+                      <span className="block text-sm text-slate">{speak(step.why, unit)}</span>
+                    )}
+                  </button>
+                </li>
+              ))}
+          </ol>
+        </div>
+      ))}
+    </section>
+  );
+};

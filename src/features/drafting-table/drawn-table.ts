@@ -1,0 +1,43 @@
+import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
+import { checkMeasure } from '#shared/body/check-card.ts';
+import { DraftingError } from '#shared/drafting/drafting-error.ts';
+import { draftGown } from '#shared/engine/draft-gown.ts';
+import type { Draft } from '#shared/engine/draft.ts';
+import type { Problem } from '#shared/units/problem.ts';
+
+import { fieldKeys } from './fields.ts';
+import { cardOf, hasCoreMeasures, rulesOf, styleOf, type Choices } from './table-inputs.ts';
+
+/** What lies on the table: the last draft that could be drawn, and what stands in the way of the next. */
+export type Drawn = {
+  readonly draft?: Draft;
+  /** Whether the draft is that of the figures now in the fields. */
+  readonly fresh: boolean;
+  readonly problems: readonly Problem[];
+};
+
+export const nothingDrawn: Drawn = { fresh: false, problems: [] };
+
+const measures = [...coreMeasures, ...furtherMeasures];
+
+/** Draws the figures in the fields; where they cannot be drawn the last drawing stays, no longer fresh. */
+export function drawn(choices: Choices, last: Drawn): Drawn {
+  const stale = (problems: readonly Problem[]): Drawn => ({ ...last, fresh: false, problems });
+
+  const unread = fieldKeys.flatMap((field): Problem[] => {
+    const entry = choices.entries[field];
+    if (entry === undefined || !('unread' in entry)) return [];
+    return [{ code: 'not-read', severity: 'error', field, said: entry.unread }];
+  });
+  if (unread.length > 0) return stale(unread);
+
+  const card = cardOf(choices);
+  if (!hasCoreMeasures(card)) return stale(measures.flatMap((key) => checkMeasure(key, card[key])));
+  try {
+    const draft = draftGown({ card, style: styleOf(choices), rules: rulesOf(choices) });
+    return { draft, fresh: true, problems: draft.warnings };
+  } catch (error) {
+    if (error instanceof DraftingError) return stale(error.problems);
+    throw error;
+  }
+}

@@ -1,0 +1,75 @@
+import type { Unit } from '#shared/units/said.ts';
+
+import { fieldKeys, readEntry, writeValue, type Entries, type FieldKey } from './fields.ts';
+import { emptyTable, redrawn, type TableState } from './table-state.ts';
+
+const key = 'ellwand.table';
+const version = 1;
+
+/** The table as this browser kept it; an empty one where nothing was kept or it cannot be trusted. */
+export function keptTable(storage: Storage | undefined = browserStorage()): TableState {
+  try {
+    const text = storage?.getItem(key);
+    return text === null || text === undefined ? emptyTable : fromKept(JSON.parse(text));
+  } catch {
+    return emptyTable;
+  }
+}
+
+/** Keeps the table in this browser; false where the browser does not allow it. */
+export function keepTable(
+  state: TableState,
+  storage: Storage | undefined = browserStorage(),
+): boolean {
+  const { unit, name, date, shaping, preset, entries } = state;
+  try {
+    if (storage === undefined) return false;
+    storage.setItem(key, JSON.stringify({ version, unit, name, date, shaping, preset, entries }));
+    return true;
+  } catch {
+    return false;
+  }
+}
+
+/** Some browsers refuse even to name their storage. */
+function browserStorage(): Storage | undefined {
+  try {
+    return globalThis.localStorage;
+  } catch {
+    return undefined;
+  }
+}
+
+function fromKept(kept: unknown): TableState {
+  if (!isRecord(kept) || kept['version'] !== version) return emptyTable;
+  const unit: Unit = kept['unit'] === 'in' ? 'in' : 'cm';
+  const entries = isRecord(kept['entries']) ? kept['entries'] : {};
+  return redrawn({
+    ...emptyTable,
+    unit,
+    name: typeof kept['name'] === 'string' ? kept['name'].slice(0, 60) : '',
+    date: typeof kept['date'] === 'string' ? kept['date'] : undefined,
+    shaping: kept['shaping'] === 'darts' ? 'darts' : 'princess',
+    preset: kept['preset'] === 'quarterRule' ? 'quarterRule' : 'balanced',
+    entries: Object.fromEntries(
+      fieldKeys.flatMap((field) => keptEntry(field, entries[field], unit)),
+    ),
+  });
+}
+
+/** A kept value is trusted as a number and written anew; text that was never read is read again. */
+function keptEntry(
+  field: FieldKey,
+  entry: unknown,
+  unit: Unit,
+): readonly (readonly [FieldKey, Entries[FieldKey]])[] {
+  if (!isRecord(entry)) return [];
+  const { value, text } = entry;
+  if (typeof value === 'number' && Number.isFinite(value)) {
+    return [[field, { text: writeValue(field, value, unit), value }]];
+  }
+  return typeof text === 'string' ? [[field, readEntry(field, text.slice(0, 40), unit)]] : [];
+}
+
+const isRecord = (value: unknown): value is Readonly<Record<string, unknown>> =>
+  typeof value === 'object' && value !== null;

@@ -1,0 +1,119 @@
+import { coreMeasures, furtherMeasures, type MeasureCard } from '#shared/body/card.ts';
+import type { EdgeRef } from '#shared/drafting/piece.ts';
+import type { Unit } from '#shared/units/said.ts';
+
+import { drawn, nothingDrawn, type Drawn } from './drawn-table.ts';
+import {
+  fieldKeys,
+  readEntry,
+  rewritten,
+  writeValue,
+  type Entries,
+  type FieldKey,
+} from './fields.ts';
+import type { Choices } from './table-inputs.ts';
+
+export type Panel = 'measures' | 'style' | 'steps' | 'proof' | 'pieces';
+
+/** Everything on the drafting table; handles, fields and panels are views of this one state. */
+export type TableState = Choices & {
+  readonly unit: Unit;
+  readonly panel: Panel;
+  readonly step?: string | undefined;
+  readonly seam?: EdgeRef | undefined;
+  readonly drawn: Drawn;
+};
+
+export type TableAction =
+  | { readonly type: 'typed'; readonly field: FieldKey; readonly text: string }
+  | { readonly type: 'settled'; readonly field: FieldKey }
+  | { readonly type: 'moved'; readonly field: FieldKey; readonly value: number }
+  | { readonly type: 'named'; readonly name: string }
+  | { readonly type: 'shaped'; readonly shaping: TableState['shaping'] }
+  | { readonly type: 'ruled'; readonly preset: TableState['preset'] }
+  | { readonly type: 'unit'; readonly unit: Unit }
+  | { readonly type: 'card laid'; readonly card: MeasureCard }
+  | { readonly type: 'cleared' }
+  | { readonly type: 'panel'; readonly panel: Panel }
+  | { readonly type: 'step'; readonly step: string | undefined }
+  | { readonly type: 'seam'; readonly seam: EdgeRef | undefined };
+
+export const emptyTable: TableState = {
+  unit: 'cm',
+  name: '',
+  shaping: 'princess',
+  preset: 'balanced',
+  entries: {},
+  panel: 'measures',
+  drawn: nothingDrawn,
+};
+
+export function tableState(state: TableState, action: TableAction): TableState {
+  switch (action.type) {
+    case 'typed':
+      return redrawn({ ...state, entries: withText(state, action.field, action.text) });
+    case 'settled': {
+      const entry = state.entries[action.field];
+      if (entry === undefined) return state;
+      const entries = {
+        ...state.entries,
+        [action.field]: rewritten(action.field, entry, state.unit),
+      };
+      return { ...state, entries };
+    }
+    case 'moved': {
+      const text = writeValue(action.field, action.value, state.unit);
+      const entries = { ...state.entries, [action.field]: { text, value: action.value } };
+      return redrawn({ ...state, entries });
+    }
+    case 'named':
+      return redrawn({ ...state, name: action.name });
+    case 'shaped':
+      return redrawn({ ...state, shaping: action.shaping });
+    case 'ruled':
+      return redrawn({ ...state, preset: action.preset });
+    case 'unit':
+      return { ...state, unit: action.unit, entries: inUnit(state.entries, action.unit) };
+    case 'card laid':
+      return redrawn(withCard(state, action.card));
+    case 'cleared':
+      return { ...emptyTable, unit: state.unit };
+    case 'panel':
+      return { ...state, panel: action.panel };
+    case 'step':
+      return { ...state, step: action.step };
+    case 'seam':
+      return { ...state, seam: action.seam };
+  }
+}
+
+/** The state with its drawing made anew. */
+export const redrawn = (state: TableState): TableState => ({
+  ...state,
+  drawn: drawn(state, state.drawn),
+});
+
+function withText(state: TableState, field: FieldKey, text: string): Entries {
+  const { [field]: _, ...others } = state.entries;
+  return text.trim() === '' ? others : { ...others, [field]: readEntry(field, text, state.unit) };
+}
+
+const inUnit = (entries: Entries, unit: Unit): Entries =>
+  Object.fromEntries(
+    fieldKeys.flatMap((field) => {
+      const entry = entries[field];
+      return entry === undefined ? [] : [[field, rewritten(field, entry, unit)] as const];
+    }),
+  );
+
+function withCard(state: TableState, card: MeasureCard): TableState {
+  const entries = Object.fromEntries(
+    [...coreMeasures, ...furtherMeasures].flatMap((key) => {
+      const value = card[key];
+      if (value === undefined) return [];
+      const field = `card.${key}` as const;
+      return [[field, { text: writeValue(field, value, state.unit), value }] as const];
+    }),
+  );
+  return { ...emptyTable, unit: state.unit, name: card.name ?? '', date: card.date, entries };
+}

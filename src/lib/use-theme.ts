@@ -1,0 +1,17 @@
+import { useSyncExternalStore } from 'react';
+
+import { shownTheme, type Theme } from './theme.ts';
+
+/** The theme on screen, followed as the system or the reader changes it. */
+export const useTheme = (): Theme => useSyncExternalStore(follow, shownTheme);
+
+function follow(changed: () => void): () => void {
+  const system = matchMedia('(prefers-color-scheme: dark)');
+  system.addEventListener('change', changed);
+  const observer = new MutationObserver(changed);
+  observer.observe(document.documentElement, { attributeFilter: ['data-theme'] });
+  return () => {
+    system.removeEventListener('change', changed);
+    observer.disconnect();
+  };
+}

@@ -1,0 +1,55 @@
+import type { KeyboardEvent } from 'react';
+
+import type { Wiring } from './field.tsx';
+
+type LengthInputProps = {
+  readonly wiring: Wiring;
+  readonly text: string;
+  /** Shown while the field is empty: what holds then. */
+  readonly placeholder?: string | undefined;
+  readonly name: string;
+  readonly onType: (text: string) => void;
+  readonly onStart?: () => void;
+  readonly onDone: () => void;
+};
+
+/** A figure typed the way it is read off the tape; what it means is decided elsewhere. */
+export function LengthInput(props: LengthInputProps) {
+  const key = (event: KeyboardEvent<HTMLInputElement>) => {
+    if (event.key !== 'Enter') return;
+    event.preventDefault();
+    focusNext(event.currentTarget);
+  };
+  return (
+    <input
+      {...props.wiring}
+      name={props.name}
+      type="text"
+      inputMode="text"
+      enterKeyHint="next"
+      autoComplete="off"
+      spellCheck={false}
+      maxLength={24}
+      value={props.text}
+      placeholder={props.placeholder}
+      onChange={(event) => props.onType(event.currentTarget.value)}
+      onFocus={(event) => {
+        event.currentTarget.select();
+        props.onStart?.();
+      }}
+      onBlur={props.onDone}
+      onKeyDown={key}
+      className="figures h-9 w-26 shrink-0 rounded-one border border-rule bg-paper px-2 text-right aria-invalid:border-madder aria-invalid:text-madder"
+    />
+  );
+}
+
+/** Enter goes to the next figure of the same card. */
+function focusNext(from: HTMLInputElement): void {
+  const card = from.closest('form');
+  if (card === null) return;
+  const inputs = [...card.querySelectorAll<HTMLInputElement>('input[inputmode]')];
+  const next = inputs[inputs.indexOf(from) + 1];
+  if (next === undefined) from.blur();
+  else next.focus();
+}
