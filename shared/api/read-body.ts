@@ -38,7 +38,11 @@ const found = (value: unknown, path: readonly PropertyKey[]): unknown =>
 
 const wrongType = (field: string, expected: string, missing: boolean): Said => {
   const name = called(field);
-  if (missing) return said`${name} is missing: measure it and give it as “${field}”.`;
+  if (missing) {
+    return field.startsWith('card.')
+      ? said`${name} is missing: measure it and give it as “${field}”.`
+      : said`${name} is missing: give it as “${field}”.`;
+  }
   if (expected === 'object') {
     return said`${name} must be an object of keys and values, such as {"bustGirth": 920}.`;
   }

@@ -22,7 +22,7 @@ const far = 10_000;
 export const agreements: readonly Agreement[] = [
   { larger: 'bustGirth', smaller: 'underbustGirth', possible: [10, 350], usual: [50, 280] },
   { larger: 'bustGirth', smaller: 'bustSpan', half: true, possible: [60, far] },
-  { larger: 'bustGirth', smaller: 'waistGirth', possible: [-120, 300], usual: [-62, 228] },
+  { larger: 'bustGirth', smaller: 'waistGirth', possible: [-120, 340], usual: [-62, 228] },
   { larger: 'hipGirth', smaller: 'waistGirth', possible: [-90, 450], usual: [-43, 418] },
   { larger: 'hipGirth', smaller: 'bustGirth', possible: [-180, 420], usual: [-115, 350] },
   { larger: 'bustGirth', smaller: 'upperChestGirth', possible: [-40, 160], usual: [-25, 120] },

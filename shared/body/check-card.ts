@@ -2,13 +2,8 @@ import { readingGrace } from '../units/format-length.ts';
 import { deg, mm, said, type SaidAngle, type SaidLength } from '../units/said.ts';
 import { error, warning, type Problem } from '../units/problem.ts';
 import { agreements, type Agreement } from './agreements.ts';
-import {
-  coreMeasures,
-  furtherMeasures,
-  type Body,
-  type MeasureCard,
-  type MeasureKey,
-} from './card.ts';
+import { coreMeasures, furtherMeasures } from './card.ts';
+import type { Body, CoreMeasure, MeasureCard, MeasureKey } from './card.ts';
 import { completeCard } from './complete-card.ts';
 import { girthWarnings } from './girth-warnings.ts';
 import { measureGuide } from './measure-guide.ts';
@@ -44,6 +39,23 @@ export function checkMeasure(key: MeasureKey, value: number | undefined): readon
     }),
   ];
 }
+
+const checkCore = (key: CoreMeasure, value: number | undefined): readonly Problem[] =>
+  value === undefined
+    ? [
+        error({
+          code: 'missing',
+          field: `card.${key}`,
+          said: said`${measureGuide[key].label} is missing: every gown needs it. ${measureGuide[key].how}`,
+        }),
+      ]
+    : checkMeasure(key, value);
+
+/** A card as far as it has been filled in. */
+export type CardInProgress = { readonly [K in MeasureKey]?: number | undefined };
+
+/** Every core measure is there: `checkCore` has looked. */
+const fullCard = (taken: CardInProgress): MeasureCard => taken as MeasureCard;
 
 /** The measure as the sentence names it, an estimate marked as one. */
 const named = (body: Body, key: MeasureKey): string =>
@@ -102,11 +114,13 @@ const oncePerPair = (problems: readonly Problem[]): readonly Problem[] => {
  * What is wrong (errors) or unlikely (warnings) on a measure card, in the order of the card. Agreements are looked at
  * only when every measure lies within its own bounds; a card without errors can be completed and has levels in order.
  */
-export function checkCard(card: MeasureCard): readonly Problem[] {
-  const alone = [...coreMeasures, ...furtherMeasures].flatMap((key) =>
-    checkMeasure(key, card[key]),
-  );
+export function checkCard(taken: CardInProgress): readonly Problem[] {
+  const alone = [
+    ...coreMeasures.flatMap((key) => checkCore(key, taken[key])),
+    ...furtherMeasures.flatMap((key) => checkMeasure(key, taken[key])),
+  ];
   if (alone.length > 0) return alone;
+  const card = fullCard(taken);
   const body = completeCard(card);
   return oncePerPair([
     ...agreements.flatMap((agreement) => checkAgreement(body, agreement)),

@@ -22,7 +22,7 @@ export const coreMeasureGuide: { readonly [K in CoreMeasure]: Measure } = {
     term: 'Under-bust girth',
     isoNumberFromMemory: '5.3.6',
     how: 'Level and snug round the ribs directly under the breasts; this is where a strapless bodice holds.',
-    min: 560,
+    min: 540,
     max: 1260,
     tolerance: 10,
     kind: 'length',

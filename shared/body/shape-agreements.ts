@@ -44,9 +44,80 @@ function underarm(body: Body): readonly Problem[] {
   ];
 }
 
-/** Agreements among three measures, errors only. */
+/** A core measure expected from the bust: a line, and how far from it a body can be and still be drawn. */
+type Proportion = {
+  readonly of: 'bustSpan' | 'sideNeckToBustPoint';
+  readonly slope: number;
+  readonly start: number;
+  readonly within: number;
+};
+
+/** Lines: fits to ASTM D5585-95 (from memory), within 3 mm of its rows; the distances are our rule. */
+const proportions: readonly Proportion[] = [
+  { of: 'bustSpan', slope: 0.2045, start: 13.7, within: 75 },
+  { of: 'sideNeckToBustPoint', slope: 0.2494, start: 32.2, within: 115 },
+];
+
+function proportion(body: Body, { of, slope, start, within }: Proportion): readonly Problem[] {
+  const { bustGirth } = body.measures;
+  const value = body.measures[of];
+  const expected = start + slope * bustGirth;
+  if (Math.abs(value - expected) <= within) return [];
+  return [
+    error({
+      code: 'disagree',
+      field: `card.${of}`,
+      with: ['card.bustGirth'],
+      said: said`${measureGuide[of].label} ${mm(value)} does not go with bust ${mm(bustGirth)}: beside it, it must lie between ${mm(expected - within)} and ${mm(expected + within)}. Measure both again.`,
+    }),
+  ];
+}
+
+/** A girth that falls to the next within a height: steeper than `steepest` a front cannot be drawn (our rule). */
+type Fall = {
+  readonly upper: 'bustGirth' | 'underbustGirth';
+  readonly lower: 'underbustGirth' | 'waistGirth';
+  readonly from: 'sideNeckToBustPoint' | 'sideNeckToUnderbust';
+  readonly to: 'sideNeckToUnderbust' | 'frontWaistLength';
+  readonly steepest: number;
+};
+
+const falls: readonly Fall[] = [
+  {
+    upper: 'bustGirth',
+    lower: 'underbustGirth',
+    from: 'sideNeckToBustPoint',
+    to: 'sideNeckToUnderbust',
+    steepest: 3.5,
+  },
+  {
+    upper: 'underbustGirth',
+    lower: 'waistGirth',
+    from: 'sideNeckToUnderbust',
+    to: 'frontWaistLength',
+    steepest: 2.4,
+  },
+];
+
+function fall(body: Body, { upper, lower, from, to, steepest }: Fall): readonly Problem[] {
+  const apart = body.measures[upper] - body.measures[lower];
+  const height = body.measures[to] - body.measures[from];
+  if (apart <= steepest * height) return [];
+  return [
+    error({
+      code: 'too-steep',
+      field: `card.${lower}`,
+      with: [`card.${upper}`, `card.${from}`, `card.${to}`],
+      said: said`${measureGuide[lower].label} ${mm(body.measures[lower])} is ${mm(apart)} less than ${label(upper)} ${mm(body.measures[upper])} within a height of ${mm(height)} (${label(to)} less ${label(from)}): over that height it may be at most ${mm(steepest * height)} less. Measure both girths and both lengths again.`,
+    }),
+  ];
+}
+
+/** Agreements that hang on more than a difference of two measures, errors only. */
 export const shapeProblems = (body: Body): readonly Problem[] => [
   ...between(body, 'waistSeamGirth', 'underbustGirth', 'waistGirth'),
   ...between(body, 'topHipGirth', 'waistGirth', 'hipGirth'),
   ...underarm(body),
+  ...proportions.flatMap((each) => proportion(body, each)),
+  ...falls.flatMap((each) => fall(body, each)),
 ];

@@ -1,0 +1,78 @@
+import fc from 'fast-check';
+import type { Body } from '#shared/body/card.ts';
+import type { BodyLevels } from '#shared/body/levels.ts';
+import { dartsReach } from '#shared/drafts/gown/darts-reach.ts';
+import { resolveStyle } from '#shared/drafts/gown/resolve-style.ts';
+import { checkStyle } from '#shared/drafts/gown/style-check.ts';
+import { easeLevels, styleLengths } from '#shared/drafts/gown/style-card.ts';
+import type { EaseLevel, StyleCard, StyleLength } from '#shared/drafts/gown/style-card.ts';
+import {
+  styleKeys,
+  styleLimits,
+  type Limit,
+  type StyleKey,
+  type StyleLimits,
+} from '#shared/drafts/gown/style-limits.ts';
+
+type Draw = { readonly at: number; readonly open: boolean };
+
+/** One draw a choice, made before the body is known. */
+export type StyleDraws = {
+  readonly shaping: 'princess' | 'darts' | undefined;
+  readonly choices: Readonly<Record<string, Draw>>;
+};
+
+const draw = fc.record({
+  at: fc.double({ min: 0, max: 1, noNaN: true }),
+  open: fc.boolean(),
+});
+
+/** Draws for a style on a body not yet known; `styleOn` puts them between that body's limits. */
+export const styleDraws: fc.Arbitrary<StyleDraws> = fc.record({
+  shaping: fc.constantFrom('princess', 'darts', undefined),
+  choices: fc.record(Object.fromEntries(styleKeys.map((key) => [key, draw]))),
+});
+
+/** Bounds of these hang on none of the others, or only on those before them. */
+const order: readonly StyleLength[] = [
+  'heelHeight',
+  'kneeLevel',
+  'topDrop',
+  ...styleLengths.filter((key) => !['heelHeight', 'kneeLevel', 'topDrop'].includes(key)),
+];
+
+const placed = ({ min, max }: Limit, at: number): number => min + (max - min) * at;
+
+/**
+ * The style card these draws give on a body: every choice within its limits or left open. Ease that would turn the
+ * bust is left open too, and darts that would not reach become a princess seam.
+ */
+export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): StyleCard {
+  const given = (key: StyleKey): Draw | undefined =>
+    draws.choices[key]?.open === false ? draws.choices[key] : undefined;
+  const eased = easeOf(styleLimits(body, levels), given);
+  const fits = (style: StyleCard): boolean =>
+    checkStyle(style, body, levels).every(({ severity }) => severity === 'warning');
+  let style: StyleCard = fits(eased) ? eased : {};
+  for (const key of order) {
+    const choice = given(key);
+    if (choice === undefined) continue;
+    style = { ...style, [key]: placed(styleLimits(body, levels, style)[key], choice.at) };
+  }
+  const reaches = dartsReach(body, levels, resolveStyle(style, body, levels));
+  const shaping = draws.shaping === 'darts' && !reaches ? 'princess' : draws.shaping;
+  return shaping === undefined ? style : { ...style, shaping };
+}
+
+function easeOf(limits: StyleLimits, given: (key: StyleKey) => Draw | undefined): StyleCard {
+  const ease: { [L in EaseLevel]?: number } = {};
+  for (const level of easeLevels) {
+    const choice = given(`ease.${level}`);
+    if (choice !== undefined) ease[level] = placed(limits[`ease.${level}`], choice.at);
+  }
+  return { ease };
+}
+
+/** A style card within this body's limits, each choice open half of the time. */
+export const styleArbitrary = (body: Body, levels: BodyLevels): fc.Arbitrary<StyleCard> =>
+  styleDraws.map((draws) => styleOn(draws, body, levels));
