@@ -10,8 +10,9 @@ import {
   turnRight,
   unit,
 } from '../geometry/point.ts';
-import type { FinishedPiece, LevelLine, LevelName } from '../drafting/piece.ts';
+import type { FinishedPiece, LevelLine } from '../drafting/piece.ts';
 import type { Drawing, Mark } from './drawing.ts';
+import { levelTitles } from './level-titles.ts';
 import { area, chainOf, outline, pens, stroke, strokes, words } from './marks.ts';
 
 /** Lengths of the small marks on a piece, mm. */
@@ -71,18 +72,6 @@ function foldMarks(path: Path): readonly Mark[] {
     lettersAlong('place on fold', innerA, innerB, 4, -5),
   ];
 }
-
-const levelTitles: { readonly [L in LevelName]: string } = {
-  chest: 'chest',
-  bust: 'bust',
-  underbust: 'under-bust',
-  'waist-seam': 'waist seam',
-  waist: 'waist',
-  'top-hip': 'top hip',
-  hip: 'hip',
-  'knee-seam': 'knee seam',
-  hem: 'hem',
-};
 
 /** Ticks at the two ends of a level, its name beside the outer one. */
 function levelMarks({ level, from, to }: LevelLine): readonly Mark[] {

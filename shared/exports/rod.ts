@@ -6,15 +6,16 @@ import { box, pens, stroke, strokes, words } from './marks.ts';
 const high = 5;
 
 /**
- * A measuring rod along the top of a page, true to scale in the maker's unit: centimetres with every
- * fifth longer, or inches with their halves.
+ * A measuring rod along the top of a page in the maker's unit: centimetres with every fifth longer, or
+ * inches with their halves. On a sheet drawn smaller, by `scale`, it reads full size.
  */
-export function rod(x: number, y: number, width: number, unit: Unit): readonly Mark[] {
-  const step = unit === 'cm' ? 10 : 12.7;
-  const every = unit === 'cm' ? 5 : 2;
+export function rod(x: number, y: number, width: number, unit: Unit, scale = 1): readonly Mark[] {
+  const step = (unit === 'cm' ? 10 : scale < 1 ? 25.4 : 12.7) * scale;
+  const every = unit === 'cm' ? 5 : scale < 1 ? 6 : 2;
+  const value = (i: number): number => (unit === 'cm' || scale < 1 ? i : i / 2);
   const count = Math.floor((width + 1e-9) / step);
   const ticks = Array.from({ length: count + 1 }, (_, i) => i);
-  const named = ticks.filter((i) => i > 0 && i % every === 0 && i * step < width - 4);
+  const named = ticks.filter((i) => i > 0 && i % every === 0 && i * step < width - 8);
   return [
     box(pens.frame, x, y, width, high),
     strokes(
@@ -24,7 +25,7 @@ export function rod(x: number, y: number, width: number, unit: Unit): readonly M
       ),
     ),
     ...named.map((i) =>
-      words(String(unit === 'cm' ? i : i / 2), x + i * step + 0.8, y + high - 0.9, 2.4, {
+      words(String(value(i)), x + i * step + 0.8, y + high - 0.9, 2.4, {
         grey: 0.3,
       }),
     ),

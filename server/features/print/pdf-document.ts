@@ -5,7 +5,6 @@ import {
   PDFContext,
   PDFHeader,
   PDFHexString,
-  PDFName,
   PDFRawStream,
   type PDFRef,
   PDFStreamWriter,
