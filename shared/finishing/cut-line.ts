@@ -12,13 +12,26 @@ import {
 import { endTangent, startTangent } from '../geometry/curve.ts';
 import { parallel } from '../geometry/offset.ts';
 import { type Path, type Segment, line } from '../geometry/path.ts';
-import { type Point, add, cross, dot, scale, subtract, turnLeft, unit } from '../geometry/point.ts';
+import {
+  type Point,
+  add,
+  cross,
+  distance,
+  dot,
+  scale,
+  subtract,
+  turnLeft,
+  unit,
+} from '../geometry/point.ts';
 import { allowanceOf, pressedOpen } from './allowance.ts';
 import { dartCap } from './dart-cap.ts';
 
 /** Inner angles wider than 98 and narrower than 140 degrees have their allowance end mirrored. */
 const leastMirrored = (40 * Math.PI) / 180;
 const mostMirrored = (82 * Math.PI) / 180;
+
+/** Ends no farther apart than this are one point: a tenth of a hair, mm. */
+const joint = 0.01;
 
 type Corner = { readonly a: Run; readonly b: Run; readonly at: Point };
 
@@ -99,12 +112,12 @@ function closed(parts: readonly Path[]): Path {
   const outline: Segment[] = [];
   for (const segment of parts.flat()) {
     const last = outline.at(-1)?.to ?? segment.from;
-    for (const bridge of lines([last, segment.from])) append(outline, bridge);
+    if (distance(last, segment.from) > joint) append(outline, line(last, segment.from));
     append(outline, { ...segment, from: outline.at(-1)?.to ?? segment.from });
   }
   const [start, end] = [outline[0]?.from, outline.at(-1)];
   if (start && end) {
-    for (const bridge of lines([end.to, start])) append(outline, bridge);
+    if (distance(end.to, start) > joint) append(outline, line(end.to, start));
     const last = outline.length - 1;
     const closing = outline[last];
     if (closing) outline[last] = { ...closing, to: start };

@@ -148,32 +148,35 @@ const widest = (spans: readonly Span[]): Span | undefined =>
     undefined,
   );
 
-/** The widest stretch free over a whole block of rows. */
-function freeOver(rows: FreeRows['rows'], start: number, count: number): Span | undefined {
+/** The widest stretch free over a whole block of rows, if it is wider than `least`. */
+function freeOver(
+  rows: FreeRows['rows'],
+  start: number,
+  count: number,
+  least: number,
+): Span | undefined {
   let spans = rows[start] ?? [];
-  for (let row = start + 1; row < start + count && spans.length > 0; row += 1) {
-    spans = overlap(spans, rows[row] ?? []);
+  for (let row = start; row < start + count; row += 1) {
+    if (row > start) spans = overlap(spans, rows[row] ?? []);
+    if (!spans.some((span) => span.right - span.left >= least)) return undefined;
   }
   return widest(spans);
 }
 
 /**
  * The free place for a block of the given width and height, mm, nearest to two fifths of the way
- * down the piece; where it fits nowhere, the widest of its height; none on a piece too low for it.
+ * down the piece; no answer where it fits nowhere.
  */
 export function freePlace(free: FreeRows, width: number, height: number): FreePlace | undefined {
   const window = Math.ceil(height / free.spacing) + 1;
   const last = free.rows.length - window;
   const aim = Math.max(0, Math.min(last, Math.round(0.4 * free.rows.length - window / 2)));
-  let best: FreePlace | undefined;
   for (let away = 0; away <= last; away += 1) {
     for (const start of away === 0 ? [aim] : [aim - away, aim + away]) {
       if (start < 0 || start > last) continue;
-      const span = freeOver(free.rows, start, window);
-      if (!span || (best && span.right - span.left <= best.right - best.left)) continue;
-      best = { ...span, top: free.top + (start + 0.5) * free.spacing };
-      if (span.right - span.left >= width) return best;
+      const span = freeOver(free.rows, start, window, width);
+      if (span) return { ...span, top: free.top + (start + 0.5) * free.spacing };
     }
   }
-  return best;
+  return undefined;
 }

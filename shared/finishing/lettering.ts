@@ -28,20 +28,27 @@ const longestName = 40;
 /** Height of a line over the size of its letters. */
 const leading = 1.35;
 
-const narrow = new Set(" .,:;'’!|ijl·()");
-const broad = new Set('mwMW%@…');
+const narrow = " .,:;'’!|ijl·()";
+const broad = 'mwMW%@…';
 
-/** Width of a letter over its height, on the safe side of the sans-serif faces it may be drawn in. */
 function letterWidth(letter: string): number {
-  if (narrow.has(letter)) return 0.36;
-  if (broad.has(letter) || letter >= '\u2e80') return 1;
+  if (narrow.includes(letter)) return 0.36;
+  if (broad.includes(letter) || letter >= '\u2e80') return 1;
   return (letter >= 'A' && letter <= 'Z') || letter >= '\u00c0' ? 0.72 : 0.6;
 }
+
+/** Width over height of the letters below this code, reckoned once. */
+const common = 0x250;
+
+/** On the safe side of the sans-serif faces a label may be drawn in. */
+const widths = Float64Array.from({ length: common }, (_, code) =>
+  letterWidth(String.fromCharCode(code)),
+);
 
 /** Width of a text, mm. */
 function textWidth(text: string, size: number): number {
   let ems = 0;
-  for (const letter of text) ems += letterWidth(letter);
+  for (let i = 0; i < text.length; i += 1) ems += widths[text.charCodeAt(i)] ?? 1;
   return ems * size;
 }
 
@@ -72,19 +79,25 @@ function fitted(text: string, size: number, width: number): string {
 
 /** A line broken between words so that no part is wider than `width` mm. */
 function wrapped(line: Line, width: number): readonly Line[] {
-  if (textWidth(line.text, line.size) <= width) return [line];
+  const { text, size } = line;
+  if (textWidth(text, size) <= width) return [line];
   const parts: string[] = [];
-  for (const word of line.text.split(' ')) {
-    const last = parts.at(-1);
-    const longer = last === undefined ? word : `${last} ${word}`;
-    if (last !== undefined && textWidth(longer, line.size) <= width)
-      parts[parts.length - 1] = longer;
-    else parts.push(word);
+  let part = '';
+  let room = width;
+  for (const word of text.split(' ')) {
+    const own = textWidth(word, size);
+    const space = textWidth(' ', size);
+    if (part !== '' && own + space <= room) {
+      part += ` ${word}`;
+      room -= own + space;
+    } else {
+      if (part !== '') parts.push(part);
+      part = word === '·' ? '' : word;
+      room = width - (part === '' ? 0 : own);
+    }
   }
-  return parts
-    .map((part) => part.replace(/ ·$|^· /, ''))
-    .filter((part) => part !== '' && part !== '·')
-    .map((part) => ({ text: fitted(part, line.size, width), size: line.size }));
+  if (part !== '') parts.push(part);
+  return parts.map((each) => ({ text: fitted(each.replace(/ ·$/, ''), size, width), size }));
 }
 
 function label(piece: Piece, facts: LabelFacts, sizes: (typeof layouts)[number]): readonly Line[] {
@@ -125,19 +138,18 @@ export function lettering(piece: Piece, facts: LabelFacts): readonly Lettering[]
     const width = Math.max(...lines.map((line) => textWidth(line.text, line.size)));
     const height = lines.reduce((sum, line) => sum + line.size * leading, 0);
     const place = freePlace(free, width, height);
-    if (place && place.right - place.left >= width) return set(lines, place, width);
+    if (place) return set(lines, place, width);
   }
   for (let count = lines.length - 1; count > 0; count -= 1) {
-    const kept = lines.slice(0, count);
-    const place = freePlace(free, 38, count * 4 * leading);
-    if (!place || place.right - place.left < 16) continue;
-    const run = place.right - place.left;
-    const short = kept.map((line) => ({ ...line, text: fitted(line.text, line.size, run) }));
-    return set(
-      short,
-      place,
-      Math.min(run, Math.max(...short.map((each) => textWidth(each.text, 4)))),
-    );
+    for (const least of [36, 26, 16]) {
+      const place = freePlace(free, least, count * 4 * leading);
+      if (!place) continue;
+      const run = place.right - place.left;
+      const short = lines
+        .slice(0, count)
+        .map(({ text, size }) => ({ text: fitted(text, size, run), size }));
+      return set(short, place, Math.max(...short.map((line) => textWidth(line.text, line.size))));
+    }
   }
   return [];
 }
