@@ -36,15 +36,27 @@ const found = (value: unknown, path: readonly PropertyKey[]): unknown =>
     value,
   );
 
+/** What an object of the contract looks like. */
+const objects: Readonly<Record<string, string>> = {
+  '': '{"card": {"bustGirth": 920}}',
+  card: '{"bustGirth": 920}',
+  style: '{"kneeLevel": 100}',
+  rules: '{"preset": "balanced"}',
+  'rules.allowance': '{"seam": 15}',
+};
+
 const wrongType = (field: string, expected: string, missing: boolean): Said => {
   const name = called(field);
+  if (missing && field === '') {
+    return said`The request is missing: give it as JSON with a “card” in it.`;
+  }
   if (missing) {
     return field.startsWith('card.')
       ? said`${name} is missing: measure it and give it as “${field}”.`
       : said`${name} is missing: give it as “${field}”.`;
   }
   if (expected === 'object') {
-    return said`${name} must be an object of keys and values, such as {"bustGirth": 920}.`;
+    return said`${name} must be an object of keys and values, such as ${objects[field] ?? '{"bust": 10}'}.`;
   }
   if (expected !== 'number') return said`${name} must be text in quotes.`;
   const unit = field.endsWith('shoulderSlope') ? 'of degrees' : 'of millimetres';

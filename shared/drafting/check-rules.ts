@@ -1,7 +1,7 @@
 import { readingGrace } from '../units/format-length.ts';
 import { error, type Problem } from '../units/problem.ts';
 import { mm, said, type Said } from '../units/said.ts';
-import { balanceLevels, type HouseRules } from './house-rules.ts';
+import { balanceLevels, type BalanceLevel, type HouseRules } from './house-rules.ts';
 
 /** One house rule: its key in the contract, its name, bounds (both allowed), and how to read it. */
 type Rule = {
@@ -14,11 +14,21 @@ type Rule = {
   readonly value: (rules: HouseRules) => number;
 };
 
+const levelWords: { readonly [L in BalanceLevel]: string } = {
+  chest: 'chest',
+  bust: 'bust',
+  underbust: 'under-bust',
+  waist: 'waist',
+  topHip: 'top hip',
+  hip: 'hip',
+  knee: 'knee',
+};
+
 /** Bounds: common practice, no source; a let-out allowance may be wide, an enclosed edge may not. */
 const limits: readonly Rule[] = [
   ...balanceLevels.map((level): Rule => ({
     key: `balance.${level}`,
-    label: `Balance at level ${level}`,
+    label: `Balance at the ${levelWords[level]}`,
     min: -30,
     max: 30,
     value: (rules) => rules.balance[level],
@@ -84,14 +94,25 @@ const holds = ({ min, max, share }: Rule, value: number): boolean => {
   return value >= min - grace && value <= max + grace;
 };
 
+function problemOf(rule: Rule, value: number): Problem {
+  const field = `rules.${rule.key}`;
+  if (!Number.isFinite(value)) {
+    return error({
+      code: 'not-a-number',
+      field,
+      said: said`${rule.label} is not a number: type it again in the house rules.`,
+    });
+  }
+  return error({
+    code: 'out-of-range',
+    field,
+    said: said`${rule.label} ${worded(rule, value)} must lie between ${worded(rule, rule.min)} and ${worded(rule, rule.max)}: change it in the house rules.`,
+  });
+}
+
 /** What is wrong in a workroom's house rules: every value outside its bounds, with both of them. */
 export const checkRules = (rules: HouseRules): readonly Problem[] =>
   limits
-    .filter((rule) => !holds(rule, rule.value(rules)))
-    .map((rule) =>
-      error({
-        code: 'out-of-range',
-        field: `rules.${rule.key}`,
-        said: said`${rule.label} ${worded(rule, rule.value(rules))} must lie between ${worded(rule, rule.min)} and ${worded(rule, rule.max)}: change it in the house rules.`,
-      }),
-    );
+    .map((rule) => ({ rule, value: rule.value(rules) }))
+    .filter(({ rule, value }) => !holds(rule, value))
+    .map(({ rule, value }) => problemOf(rule, value));
