@@ -1,10 +1,28 @@
 import type { Edge, FinishedPiece } from '../drafting/piece.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
-import { crossingsOfLine, pointAt, tangentAt } from '../geometry/curve.ts';
+import {
+  crossingsOfLine,
+  endOf,
+  endTangent,
+  pointAt,
+  startOf,
+  startTangent,
+  tangentAt,
+} from '../geometry/curve.ts';
 import type { Segment } from '../geometry/path.ts';
-import { type Point, add, distance, dot, scale, subtract, turnLeft } from '../geometry/point.ts';
+import {
+  type Point,
+  add,
+  cross,
+  distance,
+  dot,
+  scale,
+  subtract,
+  turnLeft,
+} from '../geometry/point.ts';
 import { boxOf } from './crossing-itself.ts';
 import { cornerBetween } from './joined-edges.ts';
+import { nearestPlace } from './nearest-place.ts';
 
 /** Shares of a stretch at which its clearance is taken. */
 const lookOut = {
@@ -35,6 +53,20 @@ type Boxed = { readonly segment: Segment; readonly box: ReturnType<typeof boxOf>
 export const boxedCut = (piece: FinishedPiece): readonly Boxed[] =>
   piece.cutLine.map((segment) => ({ segment, box: boxOf(segment) }));
 
+/** A stretch that comes this near the line of sight may touch it, mm. */
+const grazing = 1e-6;
+
+/** Whether a stretch and its handles lie wholly on one side of the endless line through `at`. */
+function besideLine(segment: Segment, at: Point, along: Point): boolean {
+  const height = (p: Point): number => along.x * (p.y - at.y) - along.y * (p.x - at.x);
+  const first = height(segment.from);
+  if (Math.abs(first) < grazing) return false;
+  const side = Math.sign(first);
+  const beside = (p: Point): boolean => side * height(p) > grazing;
+  if (!beside(segment.to)) return false;
+  return segment.kind === 'line' || (beside(segment.c1) && beside(segment.c2));
+}
+
 /** Distance from a place to the cutting line along an outward direction; no answer within reach. */
 export function reachCut(
   cut: readonly Boxed[],
@@ -42,8 +74,8 @@ export function reachCut(
   out: Point,
   reach: number,
 ): number | undefined {
-  const start = add(at, scale(out, -inside));
   const end = add(at, scale(out, reach));
+  const start = add(at, scale(out, -inside));
   const left = Math.min(start.x, end.x);
   const right = Math.max(start.x, end.x);
   const top = Math.min(start.y, end.y);
@@ -51,6 +83,7 @@ export function reachCut(
   let nearest: number | undefined;
   for (const { segment, box } of cut) {
     if (box.right < left || box.left > right || box.bottom < top || box.top > bottom) continue;
+    if (besideLine(segment, at, out)) continue;
     for (const t of crossingsOfLine(segment, at, end)) {
       const away = dot(subtract(pointAt(segment, t), at), out);
       if (away < -inside || away > reach) continue;
@@ -83,7 +116,7 @@ type EdgeSpan = {
 function spanOf(
   piece: FinishedPiece,
   index: number,
-  wanted: readonly number[],
+  wanted: readonly (number | undefined)[],
 ): EdgeSpan | undefined {
   const count = piece.edges.length;
   const edge = piece.edges[index];
@@ -103,12 +136,56 @@ function spanOf(
   };
 }
 
-/** For each edge that has an allowance, the place where the cutting line is farthest from it. */
+/** As near as the proof asks, mm. */
+export const clearBound = 0.2;
+
+/** Everything a look from an edge to the cutting line needs of the piece. */
+type Sight = {
+  readonly piece: FinishedPiece;
+  readonly cut: readonly Boxed[];
+  readonly allowances: readonly (number | undefined)[];
+};
+
+/** Whether a place lies at the allowance from an edge, or from an end of it carried on to a corner. */
+function follows({ path }: Edge, wanted: number | undefined, at: Point): boolean {
+  if (wanted === undefined) return false;
+  const off = nearestPlace(path, at)?.off ?? Infinity;
+  if (Math.abs(off - wanted) <= clearBound) return true;
+  const beyond = (end: Point | undefined, away: Point): boolean => {
+    const out = end && subtract(at, end);
+    return (
+      out !== undefined &&
+      dot(out, away) > 0 &&
+      Math.abs(Math.abs(cross(away, out)) - wanted) <= clearBound
+    );
+  };
+  return (
+    beyond(startOf(path), scale(startTangent(path), -1)) || beyond(endOf(path), endTangent(path))
+  );
+}
+
+/**
+ * How far the cutting line stands off at one place. Where the seam line bends inwards more tightly
+ * than the allowance is wide, no parallel can follow it: there the cutting line found farther out is
+ * rightly placed when it lies at the allowance from the nearest seam line.
+ */
+function standOff({ piece, cut, allowances }: Sight, index: number, at: Point, out: Point): number {
+  const wanted = allowances[index] ?? 0;
+  const away = reachCut(cut, at, out, 2 * wanted + 20);
+  if (away === undefined) return -inside;
+  if (away <= wanted + clearBound) return away;
+  const hit = add(at, scale(out, away));
+  const followed = piece.edges.some((edge, k) => follows(edge, allowances[k], hit));
+  const own = nearestPlace(piece.edges[index]?.path ?? [], hit)?.off ?? 0;
+  return own >= wanted - clearBound && followed ? wanted : away;
+}
+
+/** For each edge that has an allowance, the place where the cutting line stands off least rightly. */
 export function worstClearances(piece: FinishedPiece, rules: HouseRules): readonly Clearance[] {
-  const cut = boxedCut(piece);
-  const allowances = piece.edges.map((edge) => allowanceOf(edge, rules) ?? 0);
+  const allowances = piece.edges.map((edge) => allowanceOf(edge, rules));
+  const sight = { piece, cut: boxedCut(piece), allowances };
   return piece.edges.flatMap((edge, index) => {
-    const wanted = allowanceOf(edge, rules);
+    const wanted = allowances[index];
     const span = spanOf(piece, index, allowances);
     if (wanted === undefined || !span) return [];
     let worst: Clearance | undefined;
@@ -116,8 +193,7 @@ export function worstClearances(piece: FinishedPiece, rules: HouseRules): readon
       for (const t of lookOut[segment.kind]) {
         const at = pointAt(segment, t);
         if (distance(at, span.from) < span.head || distance(at, span.to) < span.tail) continue;
-        const out = turnLeft(tangentAt(segment, t));
-        const found = reachCut(cut, at, out, wanted + 2 * inside) ?? -inside;
+        const found = standOff(sight, index, at, turnLeft(tangentAt(segment, t)));
         if (worst && Math.abs(found - wanted) <= Math.abs(worst.found - wanted)) continue;
         worst = { edge, wanted, found, at };
       }

@@ -4,14 +4,13 @@ import type { Path } from '../geometry/path.ts';
 import { distance } from '../geometry/point.ts';
 import type { Said } from '../units/said.ts';
 import { worstCaps } from './caps.ts';
-import { worstClearances } from './clearance.ts';
+import { clearBound, worstClearances } from './clearance.ts';
 import { areaInside, crossesItself } from './crossing-itself.ts';
 import { finding, proofLine } from './finding.ts';
 import { spoken } from './joined-edges.ts';
 import type { Finding, ProofLine } from './proof.ts';
 
 const closedBound = 0.001;
-const clearBound = 0.2;
 
 /** Widest gap between the end of one stretch and the start of the next, all the way round. */
 function widestGap(outline: Path): number {

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { testSquares } from '#shared/exports/cover.ts';
 import { isoA, papers, toPoints } from '#shared/sheets/papers.ts';
-import { printedArea, tilesAlong } from '#shared/sheets/tile-plan.ts';
+import { tileGrid } from '#shared/sheets/tile-grid.ts';
 import { millimetresPerInch } from '#shared/units/format-length.ts';
 import { parseLength } from '#shared/units/parse-length.ts';
 
@@ -52,10 +52,8 @@ describe('paper', () => {
 describe('tiling', () => {
   // Derived from ceil((side - overlap) / (printed - overlap)); common practice of home printing.
   test('a drawing of 100 by 160 cm on A4, margins and overlap 10 mm, takes 6 by 6 = 36 sheets', () => {
-    const use = printedArea(papers.A4);
+    const { use, rows, columns } = tileGrid({ width: 1000, height: 1600 }, papers.A4);
     expect(use).toEqual({ width: 190, height: 277 });
-    const across = tilesAlong(1000, use.width);
-    const down = tilesAlong(1600, use.height);
-    expect([across, down, across * down]).toEqual([6, 6, 36]);
+    expect([columns, rows, columns * rows]).toEqual([6, 6, 36]);
   });
 });
