@@ -6,6 +6,8 @@ import type { Intake } from './intakes.ts';
 const openingShare = 0.6;
 /** The side leans in above the bust by at most this, 8 degrees. */
 const leanIn = Math.tan((8 * Math.PI) / 180);
+/** Where the upper chest is the larger, each side leans out by this, 3 degrees, before the other helps. */
+const leanOut = Math.tan((3 * Math.PI) / 180);
 /** Above the bust point the opening widens by a square over this height, then straight. */
 const rounding = 30;
 /** The opening reaches its amount at least this high above the bust point. */
@@ -32,11 +34,12 @@ export function contours(
   backOpens: boolean,
 ): { readonly front: Contour; readonly back: Contour; readonly moved: number } {
   const backR = back.bust - back.chest;
-  const backLean = Math.min(backR, rise * leanIn);
+  const backLean = Math.max(-rise * leanOut, Math.min(backR, rise * leanIn));
   const left = backR - backLean;
   const backOpening = backOpens && left >= narrowestOpening ? left : 0;
   const moved = left - backOpening;
   const frontR = front.bust - front.chest + moved;
+  if (frontR < -rise * leanOut) return bothLeanOut(frontR, backR - moved, moved);
   const frontLean =
     frontR * openingShare < narrowestOpening
       ? frontR
@@ -46,6 +49,13 @@ export function contours(
     back: { reduction: backR - moved, lean: backLean, opening: backOpening },
     moved,
   };
+}
+
+/** An upper chest larger than both can hold at 3 degrees: the sides lean out alike. */
+function bothLeanOut(frontR: number, backR: number, moved: number): ReturnType<typeof contours> {
+  const each = (frontR + backR) / 2;
+  const half = { reduction: each, lean: each, opening: 0 };
+  return { front: half, back: half, moved: moved + each - frontR };
 }
 
 /** The straight upper parts of two legs: they would meet at the pivot, each this far off upright. */

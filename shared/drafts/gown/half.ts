@@ -1,7 +1,9 @@
+import { DraftingError } from '../../drafting/drafting-error.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
 import type { Cubic } from '../../geometry/path.ts';
 import { type Profile, profileLength, slopeAt, xAt } from '../../geometry/profile.ts';
+import { said } from '../../units/said.ts';
 import { bustToHip, narrowestDart, shareSuppression, sideLine } from './side-line.ts';
 import type { SideHeights, SideWidths, Suppression } from './side-line.ts';
 import { closedSeam, fallFor } from './waist-seam.ts';
@@ -87,7 +89,11 @@ type Round = {
 /** The darts of the middle: shares of the intake and heights of the tips. */
 type DartPlan = { readonly shares: readonly number[]; readonly tips: readonly number[] };
 
-const roundsAtMost = 60;
+const roundsAtMost = 80;
+/** A height moves by at most this in a round, so that a crooked start cannot run away. */
+const farthestMove = 6;
+/** From this round on it moves half way only, which settles the few bodies that swing. */
+const dampedFrom = 20;
 
 /**
  * Draws a half: side seam, waist seam and intakes, so that every level holds its quarter. The back
@@ -109,17 +115,20 @@ export function drawHalf(inputs: HalfInputs): Half {
     foot: levels.hip,
   }));
   let round = firstRound(inputs, darts, suppression.side);
-  for (let count = 0; count < roundsAtMost; count += 1) {
-    const next = nextRound(inputs, darts, suppression.side, round);
+  let settled = false;
+  for (let count = 0; count < roundsAtMost && !settled; count += 1) {
+    const next = nextRound(inputs, darts, suppression.side, round, count < dampedFrom ? 1 : 0.5);
     const change = Math.max(
       Math.abs(next.gap.seam - round.gap.seam),
       ...sideLevels.map((level) => Math.abs(next.heights[level] - round.heights[level])),
     );
-    const settled =
-      next.held.underbust === round.held.underbust && next.held.seam === round.held.seam;
+    settled =
+      change < 1e-7 &&
+      next.held.underbust === round.held.underbust &&
+      next.held.seam === round.held.seam;
     round = next;
-    if (change < 1e-8 && settled) break;
   }
+  if (!settled) throw cannotBeDrawn();
   return {
     side: inputs.side,
     levels,
@@ -173,7 +182,13 @@ function firstRound(inputs: HalfInputs, darts: DartPlan, waist: number): Round {
   };
 }
 
-function nextRound(inputs: HalfInputs, darts: DartPlan, waist: number, last: Round): Round {
+function nextRound(
+  inputs: HalfInputs,
+  darts: DartPlan,
+  waist: number,
+  last: Round,
+  share: number,
+): Round {
   const { levels, quarters } = inputs;
   const widths: SideWidths = {
     ...widthsAt(inputs, darts, waist, (k) =>
@@ -198,7 +213,7 @@ function nextRound(inputs: HalfInputs, darts: DartPlan, waist: number, last: Rou
   };
   return {
     heights: inputs.trueTo
-      ? truedHeights(line, last.heights, inputs.trueTo)
+      ? towards(last.heights, truedHeights(line, last.heights, inputs.trueTo), share)
       : { ...levels, seam: levels.seam + fall },
     axes: dartAxes(inputs.axis, gap.seam, darts.shares, line, last.heights),
     line,
@@ -222,18 +237,48 @@ function dartAxes(
   return [first, (first + side) / 2];
 }
 
-/** Moves each height so that its length along the line from the waist becomes the front's. */
+/** Moves heights a share of the way, each by so much at most. */
+function towards(from: SideHeights, to: SideHeights, share: number): SideHeights {
+  const step = (level: keyof SideHeights): number =>
+    from[level] +
+    Math.max(-farthestMove, Math.min(farthestMove, share * (to[level] - from[level])));
+  return {
+    underarm: step('underarm'),
+    bust: step('bust'),
+    underbust: step('underbust'),
+    seam: step('seam'),
+    waist: to.waist,
+    topHip: step('topHip'),
+    hip: step('hip'),
+    knee: step('knee'),
+  };
+}
+
+/** Girths so far apart over so little height that no side seam of equal length joins front and back. */
+export const cannotBeDrawn = (): DraftingError =>
+  new DraftingError([
+    {
+      code: 'sides-do-not-meet',
+      severity: 'error',
+      field: 'card.waistGirth',
+      with: ['card.underbustGirth', 'card.hipGirth', 'card.waistToHip'],
+      said: said`These girths change so much over so little height that the back's side seam cannot be made as long as the front's. Measure under-bust, waist, hip and waist to hip again.`,
+    },
+  ]);
+
+/** Scales each height's distance from the waist so that its length along the line becomes the front's. */
 function truedHeights(line: Profile, heights: SideHeights, arcs: SideArcs): SideHeights {
+  const { waist } = heights;
   const above = (level: keyof SideArcs): number =>
-    heights[level] + profileLength(line, heights[level], heights.waist) - arcs[level];
+    waist - ((waist - heights[level]) * arcs[level]) / profileLength(line, heights[level], waist);
   const below = (level: keyof SideArcs): number =>
-    heights[level] - profileLength(line, heights.waist, heights[level]) + arcs[level];
+    waist + ((heights[level] - waist) * arcs[level]) / profileLength(line, waist, heights[level]);
   return {
     underarm: above('underarm'),
     bust: above('bust'),
     underbust: above('underbust'),
     seam: above('seam'),
-    waist: heights.waist,
+    waist,
     topHip: below('topHip'),
     hip: below('hip'),
     knee: below('knee'),
@@ -263,7 +308,7 @@ export function heightAtArc(half: Half, arc: number): number {
   let y = half.heights.waist - arc;
   for (let i = 0; i < 40; i += 1) {
     const off = profileLength(half.line, y, half.heights.waist) - arc;
-    y += off;
+    y += off / Math.hypot(1, slopeAt(half.line, y));
     if (Math.abs(off) < 1e-9) break;
   }
   return y;

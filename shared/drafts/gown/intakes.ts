@@ -1,3 +1,4 @@
+import { DraftingError } from '../../drafting/drafting-error.ts';
 import { splitSegment } from '../../geometry/curve.ts';
 import { shift, movedPath } from '../../geometry/motion.ts';
 import type { Path, Segment } from '../../geometry/path.ts';
@@ -8,7 +9,9 @@ import {
   positiveSpline,
   profilePath,
   straightProfile,
+  xAt,
 } from '../../geometry/profile.ts';
+import { mm, said } from '../../units/said.ts';
 import { type Half, dartShares, heightOn } from './half.ts';
 import { seamAt } from './waist-seam.ts';
 
@@ -40,6 +43,42 @@ export const mouthsOnSeam = (half: Half): readonly number[] => {
     return at;
   });
 };
+
+/** Cloth left between an intake and its neighbour, the centre line or the side. */
+const clothBetween = 8;
+
+/**
+ * Refuses a half whose intakes leave no cloth between each other, the centre line and the side.
+ * @throws DraftingError naming the girths to measure again.
+ */
+export function refuseCrowdedIntakes(half: Half): void {
+  const widest = Math.max(half.gap.underbust, half.gap.seam, half.gap.waist);
+  const bounds = dartShares(half.dartCount).flatMap((share, k) => {
+    const axis = half.dartAxes[k] ?? half.axis;
+    return [axis - (share * widest) / 2, axis + (share * widest) / 2];
+  });
+  const side = Math.min(
+    xAt(half.line, half.heights.underbust),
+    xAt(half.line, half.heights.seam),
+    xAt(half.line, half.heights.waist),
+  );
+  // A princess seam takes the whole intake about its own axis.
+  const places = [0, Math.min(half.axis - widest / 2, bounds[0] ?? 0), ...bounds.slice(1), side];
+  const crowded = places.some(
+    (x, i) => i > 0 && i % 2 === 1 && x - (places[i - 1] ?? 0) < clothBetween,
+  );
+  const overlong = half.axis + widest / 2 > side - clothBetween;
+  if (!crowded && !overlong) return;
+  throw new DraftingError([
+    {
+      code: 'intake-too-wide',
+      severity: 'error',
+      field: 'card.waistGirth',
+      with: ['card.bustGirth', 'card.underbustGirth', 'card.hipGirth', 'card.waistSeamGirth'],
+      said: said`The ${half.side} would have to take in ${mm(widest)} in a half and no cloth is left beside the darts. Measure bust, under-bust, waist and hip again, or reduce the ease taken off.`,
+    },
+  ]);
+}
 
 /** The waist seam in stretches between mouths, each shifted out by the openings before it. */
 export function seamStretches(half: Half, openings: readonly number[]): readonly Path[] {

@@ -1,7 +1,15 @@
 import type { HouseRules } from '../../drafting/house-rules.ts';
-import { slopeAt, xAt } from '../../geometry/profile.ts';
+import { slopeAt } from '../../geometry/profile.ts';
 import { type Contour, contours } from './contour.ts';
-import { type Half, type HalfInputs, type QuarterWidths, drawHalf, sideArcs } from './half.ts';
+import {
+  type Half,
+  type HalfInputs,
+  type QuarterWidths,
+  cannotBeDrawn,
+  drawHalf,
+  sideArcs,
+} from './half.ts';
+import { refuseCrowdedIntakes } from './intakes.ts';
 import type { Quarters } from './quarters.ts';
 import type { SideHeights } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
@@ -18,7 +26,9 @@ const aboveHip = 25;
 const backLonger = 20;
 /** The back opens above the bust only where its edge stands at least this far over bust level. */
 const backEdgeOver = 30;
-const roundsAtMost = 8;
+const roundsAtMost = 24;
+/** From this round on the slope moves half way only, which settles the few bodies that swing. */
+const dampedFrom = 4;
 
 const widthsOf = (quarters: Quarters): QuarterWidths => ({
   bust: quarters.bust.value,
@@ -93,7 +103,8 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
   let back = drawHalf({ ...backInputs, trueTo: sideArcs(front) });
   const counts = { front: dartCount(front, inputs), back: dartCount(back, inputs) };
   let slope = meanSlope(front, back);
-  for (let round = 0; round < roundsAtMost; round += 1) {
+  let settled = false;
+  for (let round = 0; round < roundsAtMost && !settled; round += 1) {
     front = drawHalf({ ...frontInputs, dartCount: counts.front, seamSlope: slope });
     back = drawHalf({
       ...backInputs,
@@ -103,10 +114,13 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
     });
     const next = meanSlope(front, back);
     const change = Math.abs(next - slope);
-    slope = next;
+    slope = round < dampedFrom ? next : (slope + next) / 2;
     // A hundredth of a degree: the corners of the seam are proven to two degrees.
-    if (change < 1.7e-4) break;
+    settled = change < 1.7e-4;
   }
+  if (!settled) throw cannotBeDrawn();
+  refuseCrowdedIntakes(front);
+  refuseCrowdedIntakes(back);
   return { front, back, contour };
 }
 
@@ -114,9 +128,7 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
 function backOpens({ levels, style }: PairInputs, widths: QuarterWidths): boolean {
   const centre = levels.waist - style.backDepth;
   const share = widths.underbust / 2 / widths.bust;
-  const edge = centre + (style.sideDepth - centre) * share;
+  // It sets out level, so it rises about as the square of the way to the side.
+  const edge = centre + (style.sideDepth - centre) * share * share;
   return levels.bust - edge >= backEdgeOver;
 }
-
-/** Width of a half along its side seam line at a height. */
-export const widthAt = (half: Half, y: number): number => xAt(half.line, y);
