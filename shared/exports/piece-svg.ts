@@ -16,6 +16,9 @@ const pen = (width: number, stroke = ink, dash?: string): Record<string, string 
   'stroke-dasharray': dash,
 });
 
+/** Keeps lettering legible where a level runs under it. */
+const halo = { stroke: '#FFFFFF', 'stroke-width': '1', 'paint-order': 'stroke' };
+
 const chain = (...points: readonly Point[]): Path =>
   points.slice(1).map((to, index) => line(points[index] ?? to, to));
 
@@ -111,7 +114,7 @@ export function pieceSvg(piece: FinishedPiece, translate: Point): string {
     ),
     ...piece.drills.map(drillPoint),
     ...piece.lettering.map(({ text, at, size }) =>
-      element('text', { x: at.x, y: at.y, 'font-size': size, fill: ink }, escapeXml(text)),
+      element('text', { x: at.x, y: at.y, 'font-size': size, fill: ink, ...halo }, escapeXml(text)),
     ),
   ];
   return element(

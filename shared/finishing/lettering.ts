@@ -19,6 +19,7 @@ const layouts = [
   { title: 7, text: 5, note: 4, width: 130 },
   { title: 6, text: 4.5, note: 4, width: 80 },
   { title: 5, text: 4, note: 4, width: 54 },
+  { title: 4.5, text: 4, note: 4, width: 46 },
   { title: 4, text: 4, note: 4, width: 38 },
 ] as const;
 
@@ -77,27 +78,33 @@ function fitted(text: string, size: number, width: number): string {
   return shown;
 }
 
-/** A line broken between words so that no part is wider than `width` mm. */
-function wrapped(line: Line, width: number): readonly Line[] {
-  const { text, size } = line;
-  if (textWidth(text, size) <= width) return [line];
-  const parts: string[] = [];
-  let part = '';
-  let room = width;
-  for (const word of text.split(' ')) {
-    const own = textWidth(word, size);
-    const space = textWidth(' ', size);
-    if (part !== '' && own + space <= room) {
-      part += ` ${word}`;
-      room -= own + space;
+/** Parts put together again, with `joint` between them, as many to a line as `width` mm hold. */
+function gathered(parts: readonly string[], joint: string, size: number, width: number): string[] {
+  const lines: string[] = [];
+  let room = 0;
+  for (const part of parts) {
+    const own = textWidth(part, size);
+    const more = textWidth(joint, size) + own;
+    const last = lines.at(-1);
+    if (last !== undefined && more <= room) {
+      lines[lines.length - 1] = last + joint + part;
+      room -= more;
     } else {
-      if (part !== '') parts.push(part);
-      part = word === '·' ? '' : word;
-      room = width - (part === '' ? 0 : own);
+      lines.push(part);
+      room = width - own;
     }
   }
-  if (part !== '') parts.push(part);
-  return parts.map((each) => ({ text: fitted(each.replace(/ ·$/, ''), size, width), size }));
+  return lines;
+}
+
+/** A line broken at its dots, else between words, so that no part is wider than `width` mm. */
+function wrapped({ text, size }: Line, width: number): readonly Line[] {
+  if (textWidth(text, size) <= width) return [{ text, size }];
+  return gathered(text.split(' · '), ' · ', size, width)
+    .flatMap((part) =>
+      textWidth(part, size) <= width ? [part] : gathered(part.split(' '), ' ', size, width),
+    )
+    .map((part) => ({ text: fitted(part, size, width), size }));
 }
 
 function label(piece: Piece, facts: LabelFacts, sizes: (typeof layouts)[number]): readonly Line[] {
