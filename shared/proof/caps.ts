@@ -11,7 +11,7 @@ import {
   subtract,
   unit,
 } from '../geometry/point.ts';
-import { type Clearance, allowanceOf, boxedCut, reachCut } from './clearance.ts';
+import { type Clearance, allowanceOf, boxedCut, follows, reachCut } from './clearance.ts';
 import { nearestPlace } from './nearest-place.ts';
 
 /** Shares of the mouth at which the cap is folded down and measured. */
@@ -69,8 +69,8 @@ export function worstCaps(piece: FinishedPiece, rules: HouseRules): readonly Cle
       const away = reachCut(cut, from, out, reach);
       const on = away === undefined ? from : add(from, scale(out, away));
       const folded = mirrored(share > 0.5 ? mirrored(on, middle) : on, near);
-      const place = nearestPlace(beneath.path, folded);
-      const found = away === undefined || !place ? 0 : place.off;
+      const off = nearestPlace(beneath.path, folded)?.off ?? 0;
+      const found = away === undefined ? 0 : follows(beneath, wanted, folded) ? wanted : off;
       if (worst && Math.abs(found - wanted) <= Math.abs(worst.found - wanted)) continue;
       worst = { edge: mouth, wanted, found, at: from };
     }

@@ -30,6 +30,9 @@ const lookOut = {
   cubic: [0.02, 0.125, 0.25, 0.375, 0.5, 0.625, 0.75, 0.875, 0.98],
 } as const;
 
+/** As near as the proof asks, mm. */
+export const clearBound = 0.2;
+
 /** How far inside the seam line a cutting line that has slipped would still be found, mm. */
 const inside = 5;
 
@@ -95,14 +98,22 @@ export function reachCut(
 
 /** Corners blunter than this may have the end of an allowance folded back over the seam, degrees. */
 const blunt = 98;
+const deg = Math.PI / 180;
+
+/** How much of an edge's end a corner takes that is shaped for pressing, as a share of the allowance. */
+const foldedBack = (degrees: number): number => (degrees > blunt ? 1 / Math.tan(40 * deg) : 0);
 
 /**
- * How much of an edge's end, as a share of its allowance, lies under a corner that is shaped for
- * pressing: folded back at a blunt corner (up to 140 degrees), or turned over with a dart.
+ * The same beside a dart: its leg, carried on outwards, leans over the edge where the two meet at
+ * more than a square corner, and the cap begins there.
  */
-function shaped(edge: Edge, neighbour: Edge, degrees: number): number {
-  if (edge.open === true || neighbour.open === true) return Math.tan(Math.PI / 6);
-  return degrees > blunt ? 1 / Math.tan((40 * Math.PI) / 180) : 0;
+function underCap(piece: FinishedPiece, mouth: Edge, end: Point, along: Point): number {
+  const dart = piece.darts.find((each) => each.mouth === mouth.name);
+  const legs = dart ? [dart.centreLeg, dart.sideLeg] : [];
+  const leg = legs.find((each) => distance(startOf(each) ?? end, end) < clearBound);
+  if (!leg) return 0;
+  const lean = -dot(startTangent(leg), along);
+  return lean <= 0 ? 0 : lean / Math.sqrt(Math.max(1e-6, 1 - lean * lean));
 }
 
 type EdgeSpan = {
@@ -128,16 +139,19 @@ function spanOf(
   const own = wanted[index] ?? 0;
   const last = wanted.at(index - 1) ?? 0;
   const next = wanted[(index + 1) % count] ?? 0;
+  const head = before.open
+    ? underCap(piece, before, from, startTangent(edge.path))
+    : foldedBack(cornerBetween(before, edge));
+  const tail = after.open
+    ? underCap(piece, after, to, scale(endTangent(edge.path), -1))
+    : foldedBack(cornerBetween(edge, after));
   return {
     from,
     to,
-    head: Math.max(own, last) * shaped(edge, before, cornerBetween(before, edge)),
-    tail: Math.max(own, next) * shaped(edge, after, cornerBetween(edge, after)),
+    head: 1.1 * Math.max(own, last) * head,
+    tail: 1.1 * Math.max(own, next) * tail,
   };
 }
-
-/** As near as the proof asks, mm. */
-export const clearBound = 0.2;
 
 /** Everything a look from an edge to the cutting line needs of the piece. */
 type Sight = {
@@ -146,8 +160,8 @@ type Sight = {
   readonly allowances: readonly (number | undefined)[];
 };
 
-/** Whether a place lies at the allowance from an edge, or from an end of it carried on to a corner. */
-function follows({ path }: Edge, wanted: number | undefined, at: Point): boolean {
+/** Whether a place lies at the allowance from an edge, or from an end of it carried on straight. */
+export function follows({ path }: Edge, wanted: number | undefined, at: Point): boolean {
   if (wanted === undefined) return false;
   const off = nearestPlace(path, at)?.off ?? Infinity;
   if (Math.abs(off - wanted) <= clearBound) return true;
