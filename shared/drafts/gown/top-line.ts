@@ -56,16 +56,17 @@ export function topLine(points: TopLinePoints, legs: StraightLegs): TopLine {
   };
 }
 
+/** Tightest bend of the dip at the centre, so that an enclosed allowance still lies flat outside it. */
+const tightestDip = 16;
+
 /** Centre to peak: square at the centre, level at the peak, rounder at the peak than in the dip. */
 const rise = (centre: Point, peak: Point): Path => {
   const width = peak.x - centre.x;
+  // Radius at the centre of a cubic level at both ends is 3/2 handle^2 over the height it climbs.
+  const handle = Math.sqrt((tightestDip * Math.abs(centre.y - peak.y)) / 1.5);
+  const reach = Math.max(0.4 * width, Math.min(0.85 * width, handle));
   return [
-    cubic(
-      centre,
-      point(centre.x + 0.4 * width, centre.y),
-      point(peak.x - 0.55 * width, peak.y),
-      peak,
-    ),
+    cubic(centre, point(centre.x + reach, centre.y), point(peak.x - 0.55 * width, peak.y), peak),
   ];
 };
 
