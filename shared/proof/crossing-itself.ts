@@ -53,8 +53,17 @@ function crossing(
   return undefined;
 }
 
+/** A stretch shorter than this is a point of the outline, mm. */
+const shortest = 1e-6;
+
+const hasLength = (segment: Segment): boolean => {
+  const { left, right, top, bottom } = boxOf(segment);
+  return right - left > shortest || bottom - top > shortest;
+};
+
 /** Where a closed outline crosses itself, near enough to point at; no answer where it never does. */
-export function crossesItself(outline: Path): Point | undefined {
+export function crossesItself(closed: Path): Point | undefined {
+  const outline = closed.filter(hasLength);
   const boxes = outline.map(boxOf);
   const chains: (readonly Point[] | undefined)[] = [];
   const chainOf = (index: number): readonly Point[] => {
