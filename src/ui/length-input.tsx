@@ -39,7 +39,7 @@ export function LengthInput(props: LengthInputProps) {
       }}
       onBlur={props.onDone}
       onKeyDown={key}
-      className="figures h-9 w-26 shrink-0 rounded-one border border-rule bg-paper px-2 text-right aria-invalid:border-madder aria-invalid:text-madder"
+      className="figures h-9 scroll-mt-48 scroll-mb-4 w-26 shrink-0 rounded-one border border-rule bg-paper px-2 text-right aria-invalid:border-madder aria-invalid:text-madder"
     />
   );
 }

@@ -3,7 +3,9 @@ import type { HouseRules } from '#shared/drafting/house-rules.ts';
 import { houseRulePresets, type HouseRulePreset } from '#shared/drafting/house-rule-presets.ts';
 import { easeLevels, styleLengths, type StyleCard } from '#shared/drafts/gown/style-card.ts';
 
-import { valueOf, type Entries } from './fields.ts';
+import { valueOf, type Entries, type FieldKey } from './fields.ts';
+
+const measures = [...coreMeasures, ...furtherMeasures];
 
 /** The card as far as it has been filled in. */
 export type PartCard = Partial<MeasureCard>;
@@ -18,14 +20,14 @@ export type Choices = {
 
 /** The measure card standing in the fields; what is empty or cannot be read is left out. */
 export function cardOf(choices: Choices): PartCard {
-  const measures = [...coreMeasures, ...furtherMeasures].flatMap((key) => {
+  const taken = measures.flatMap((key) => {
     const value = valueOf(choices.entries[`card.${key}`]);
     return value === undefined ? [] : [[key, value] as const];
   });
   return {
     ...(choices.name.trim() === '' ? {} : { name: choices.name.trim() }),
     ...(choices.date === undefined ? {} : { date: choices.date }),
-    ...Object.fromEntries(measures),
+    ...Object.fromEntries(taken),
   };
 }
 
@@ -50,3 +52,24 @@ export const rulesOf = (choices: Choices): HouseRules => houseRulePresets[choice
 
 export const hasCoreMeasures = (card: PartCard): card is MeasureCard =>
   coreMeasures.every((key) => card[key] !== undefined);
+
+/** A gown to lay out on the table: a sample, or one from elsewhere. */
+export type LaidGown = {
+  readonly card: MeasureCard;
+  readonly style: StyleCard;
+  readonly rules: HouseRules;
+};
+
+/** What a gown's cards give for a field, if anything. */
+export function givenFor(field: FieldKey, card: MeasureCard, style: StyleCard): number | undefined {
+  const measure = measures.find((key) => field === `card.${key}`);
+  if (measure !== undefined) return card[measure];
+  const length = styleLengths.find((key) => field === `style.${key}`);
+  if (length !== undefined) return style[length];
+  const level = easeLevels.find((key) => field === `style.ease.${key}`);
+  return level === undefined ? undefined : style.ease?.[level];
+}
+
+/** The preset a gown's rules came from; rules of a workroom's own are not yet kept here. */
+export const presetOf = ({ balance }: HouseRules): HouseRulePreset =>
+  Object.values(balance).every((each) => each === 0) ? 'quarterRule' : 'balanced';

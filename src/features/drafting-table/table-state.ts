@@ -1,4 +1,3 @@
-import { coreMeasures, furtherMeasures, type MeasureCard } from '#shared/body/card.ts';
 import type { EdgeRef } from '#shared/drafting/piece.ts';
 import type { Unit } from '#shared/units/said.ts';
 
@@ -11,7 +10,7 @@ import {
   type Entries,
   type FieldKey,
 } from './fields.ts';
-import type { Choices } from './table-inputs.ts';
+import { givenFor, presetOf, type Choices, type LaidGown } from './table-inputs.ts';
 
 export type Panel = 'measures' | 'style' | 'steps' | 'proof' | 'pieces';
 
@@ -32,7 +31,7 @@ export type TableAction =
   | { readonly type: 'shaped'; readonly shaping: TableState['shaping'] }
   | { readonly type: 'ruled'; readonly preset: TableState['preset'] }
   | { readonly type: 'unit'; readonly unit: Unit }
-  | { readonly type: 'card laid'; readonly card: MeasureCard }
+  | { readonly type: 'gown laid'; readonly gown: LaidGown }
   | { readonly type: 'cleared' }
   | { readonly type: 'panel'; readonly panel: Panel }
   | { readonly type: 'step'; readonly step: string | undefined }
@@ -74,8 +73,8 @@ export function tableState(state: TableState, action: TableAction): TableState {
       return redrawn({ ...state, preset: action.preset });
     case 'unit':
       return { ...state, unit: action.unit, entries: inUnit(state.entries, action.unit) };
-    case 'card laid':
-      return redrawn(withCard(state, action.card));
+    case 'gown laid':
+      return redrawn(withGown(state, action.gown));
     case 'cleared':
       return { ...emptyTable, unit: state.unit };
     case 'panel':
@@ -106,14 +105,21 @@ const inUnit = (entries: Entries, unit: Unit): Entries =>
     }),
   );
 
-function withCard(state: TableState, card: MeasureCard): TableState {
+/** A gown laid out is a fresh start: only the reader's unit stays. */
+function withGown({ unit }: TableState, { card, style, rules }: LaidGown): TableState {
   const entries = Object.fromEntries(
-    [...coreMeasures, ...furtherMeasures].flatMap((key) => {
-      const value = card[key];
-      if (value === undefined) return [];
-      const field = `card.${key}` as const;
-      return [[field, { text: writeValue(field, value, state.unit), value }] as const];
+    fieldKeys.flatMap((field) => {
+      const value = givenFor(field, card, style);
+      return value === undefined ? [] : [[field, { text: writeValue(field, value, unit), value }]];
     }),
   );
-  return { ...emptyTable, unit: state.unit, name: card.name ?? '', date: card.date, entries };
+  return {
+    ...emptyTable,
+    unit,
+    entries,
+    name: card.name ?? '',
+    date: card.date,
+    shaping: style.shaping ?? emptyTable.shaping,
+    preset: presetOf(rules),
+  };
 }

@@ -1,4 +1,13 @@
-const tokens = ['ground', 'paper', 'ink', 'slate', 'brass', 'madder', 'verdigris', 'level'] as const;
+const tokens = [
+  'ground',
+  'paper',
+  'ink',
+  'slate',
+  'brass',
+  'madder',
+  'verdigris',
+  'level',
+] as const;
 type Token = (typeof tokens)[number];
 
 export type Colours = Readonly<Record<Token, string>>;

@@ -23,6 +23,9 @@ export type Layout = {
 /** Room between the frames of front, back and flare, mm. */
 const gap = 90;
 
+/** Room between flares, mm. */
+const apart = 40;
+
 /** The pieces as they were drafted: each side in one frame, front, back and flare side by side. */
 export function asDrafted(pieces: readonly FinishedPiece[]): Layout {
   const groups = [
@@ -45,11 +48,33 @@ export function asDrafted(pieces: readonly FinishedPiece[]): Layout {
   });
 }
 
-/** The pieces cut apart, as they lie in the SVG too. */
+/** The pieces cut apart, as they lie in the SVG too, but with the flares so stacked that a screen shows all large. */
 export function asCut(pieces: readonly FinishedPiece[]): Layout {
   const placed = spread(pieces).placed.map(({ piece, translate }) => place(piece, translate));
+  const bodies = placed.filter(({ piece }) => piece.part !== 'flare');
+  const flares = placed.filter(({ piece }) => piece.part === 'flare');
   const origin = point(0, 0);
-  return laid(placed, { front: origin, back: origin, flare: origin });
+  const frames = { front: origin, back: origin, flare: origin };
+  return flares
+    .map((_, index) => laid([...bodies, ...inColumns(flares, index + 1)], frames))
+    .reduce((best, each) => (side(each.box) < side(best.box) ? each : best), laid(placed, frames));
+}
+
+/** Side of the square a box fits in. */
+const side = (box: Box): number => Math.max(box.right - box.left, box.bottom - box.top);
+
+/** Pieces from the first one's place on, so many under each other, then a further column. */
+function inColumns(pieces: readonly Placed[], rows: number): Placed[] {
+  let [x, y] = [pieces[0]?.box.left ?? 0, pieces[0]?.box.top ?? 0];
+  const top = y;
+  let right = x;
+  return pieces.map(({ piece, at, box }, index) => {
+    if (index > 0 && index % rows === 0) [x, y] = [right + apart, top];
+    const placed = place(piece, add(at, point(x - box.left, y - box.top)));
+    y += box.bottom - box.top + apart;
+    right = Math.max(right, placed.box.right);
+    return placed;
+  });
 }
 
 const place = (piece: FinishedPiece, at: Point): Placed => ({

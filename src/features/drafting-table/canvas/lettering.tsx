@@ -1,7 +1,7 @@
 import type { Draft } from '#shared/engine/draft.ts';
 
 import type { Layout, Placed } from './layout.ts';
-import { levelTitles } from './level-names.ts';
+import { levelTitles } from '#shared/exports/level-titles.ts';
 import { rodWidth } from './rod.tsx';
 import { toScreen, type Size, type View } from './view.ts';
 
@@ -10,10 +10,12 @@ type LetteringProps = {
   readonly layout: Layout;
   readonly view: View;
   readonly size: Size;
+  /** Pieces lying one over the other, as they were drafted, are not named. */
+  readonly named: boolean;
 };
 
 /** Names of levels and pieces, upright and the same size at every zoom. */
-export const Lettering = ({ draft, layout, view, size }: LetteringProps) => (
+export const Lettering = ({ draft, layout, view, size, named }: LetteringProps) => (
   <g aria-hidden="true">
     <g className="fill-brass text-[0.75rem]">
       {spaced(layout.levels.map((level) => ({ ...level, y: level.y * view.scale + view.y }))).map(
@@ -26,14 +28,15 @@ export const Lettering = ({ draft, layout, view, size }: LetteringProps) => (
           ),
       )}
     </g>
-    {layout.placed.map((placed) => (
-      <PieceName
-        key={placed.piece.name}
-        placed={placed}
-        view={view}
-        fault={faultOn(draft, placed.piece.name)}
-      />
-    ))}
+    {named &&
+      layout.placed.map((placed) => (
+        <PieceName
+          key={placed.piece.name}
+          placed={placed}
+          view={view}
+          fault={faultOn(draft, placed.piece.name)}
+        />
+      ))}
   </g>
 );
 
@@ -45,10 +48,10 @@ type PieceNameProps = {
 
 const PieceName = ({ placed: { piece, box }, view, fault }: PieceNameProps) => {
   const width = (box.right - box.left) * view.scale;
-  if (width < 56) return null;
+  if (width < 80) return null;
   const at = toScreen(view, {
     x: (box.left + box.right) / 2,
-    y: box.top + (box.bottom - box.top) * (piece.part === 'middle' ? 0.62 : 0.5),
+    y: box.top + (box.bottom - box.top) * (piece.part === 'middle' ? 0.45 : 0.5),
   });
   return (
     <text className="halo text-[0.8125rem]" textAnchor="middle" x={at.x} y={at.y}>

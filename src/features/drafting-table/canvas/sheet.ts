@@ -5,7 +5,7 @@ import type { Mark, Pen } from '#shared/exports/drawing.ts';
 import { chainOf, pens } from '#shared/exports/marks.ts';
 import { drawPiece } from '#shared/exports/piece-drawing.ts';
 import type { Path } from '#shared/geometry/path.ts';
-import type { Point } from '#shared/geometry/point.ts';
+import { add, scale, subtract, type Point } from '#shared/geometry/point.ts';
 
 import type { Colours } from './colours.ts';
 import type { Layout } from './layout.ts';
@@ -60,12 +60,15 @@ export function laySheet(canvas: HTMLCanvasElement): Sheet {
   };
 
   /** The trade's marks inside a piece; its outlines are drawn here, so that they can be pointed at. */
-  const drawMark = (mark: Mark, at: Point, colours: Colours): void => {
+  const drawMark = (mark: Mark, at: Point, colours: Colours, allowances: boolean): void => {
     if (mark.kind === 'area') {
-      const path = chainOf(mark.corners);
+      const corners = enlarged(mark.corners);
+      const path = chainOf([...corners, ...corners.slice(0, 1)]);
       pieces.addChild(new scope.Path({ ...traced(path, at, true), fillColor: colours.ink }));
     }
     if (mark.kind !== 'strokes' || mark.pen === pens.cut || mark.pen === pens.seam) return;
+    // Notches start at the cutting line: without it they would stand beside the piece.
+    if (!allowances && mark.pen === pens.notch) return;
     const lines = mark.paths.map((each) => traced(each, at, mark.closed === true));
     stroke(pieces, lines, {
       ...shown(mark.pen, colours),
@@ -105,7 +108,7 @@ export function laySheet(canvas: HTMLCanvasElement): Sheet {
             }),
           );
         }
-        for (const mark of drawPiece(piece).marks) drawMark(mark, at, colours);
+        for (const mark of drawPiece(piece).marks) drawMark(mark, at, colours, allowances);
       }
     },
 
@@ -179,6 +182,13 @@ const straight = (from: Point, to: Point): Line => ({
   segments: [[[from.x, from.y]], [[to.x, to.y]]],
   closed: false,
 });
+
+/** An arrowhead grown about its tip: 5 mm is plain to see on paper and lost on a screen. */
+function enlarged(corners: readonly Point[]): readonly Point[] {
+  const tip = corners[0];
+  if (tip === undefined) return corners;
+  return corners.map((each) => add(tip, scale(subtract(each, tip), 2.4)));
+}
 
 /** A printing pen on screen: its greys become the page's colours, its dashes pixels. */
 const shown = (pen: Pen, colours: Colours) => ({

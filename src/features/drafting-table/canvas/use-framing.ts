@@ -2,23 +2,24 @@ import { useState } from 'react';
 
 import type { Point } from '#shared/geometry/point.ts';
 
-import { fitted, panned, zoomed, type Box, type Size, type View } from './view.ts';
+import { fitted, panned, zoomed, type Box, type Place, type Size, type View } from './view.ts';
 
-type Framing =
-  { readonly key: string; readonly box: Box } | { readonly key: string; readonly view: View };
+type Framing = { readonly key: string } & (
+  { readonly box: Box; readonly place: Place } | { readonly view: View }
+);
 
 /**
  * How the drawing is looked at: a box that stays fitted as the window changes, until the reader moves
  * or zooms by hand. A new set of pieces, or pieces of quite another size, is fitted again.
  */
 export function useFraming(key: string, box: Box, size: Size, still: boolean) {
-  const [framing, setFraming] = useState<Framing>({ key, box });
-  const outgrown = 'box' in framing && still && outgrows(box, framing.box);
-  if (framing.key !== key || outgrown) setFraming({ key, box });
-  const view = 'view' in framing ? framing.view : fitted(framing.box, size);
+  const [framing, setFraming] = useState<Framing>({ key, box, place: 'corner' });
+  const outgrown =
+    'place' in framing && framing.place === 'corner' && still && outgrows(box, framing.box);
+  if (framing.key !== key || outgrown) setFraming({ key, box, place: 'corner' });
   return {
-    view,
-    fit: (to: Box) => setFraming({ key, box: to }),
+    view: seen(framing, size),
+    fit: (to: Box, place: Place) => setFraming({ key, box: to, place }),
     pan: (by: Point) => setFraming((now) => ({ key, view: panned(seen(now, size), by) })),
     zoom: (by: number, at: Point) =>
       setFraming((now) => ({ key, view: zoomed(seen(now, size), by, at) })),
@@ -26,7 +27,7 @@ export function useFraming(key: string, box: Box, size: Size, still: boolean) {
 }
 
 const seen = (framing: Framing, size: Size): View =>
-  'view' in framing ? framing.view : fitted(framing.box, size);
+  'view' in framing ? framing.view : fitted(framing.box, size, framing.place);
 
 /** Whether pieces have grown or shrunk so far that the fitted box no longer frames them. */
 function outgrows(now: Box, framed: Box): boolean {

@@ -12,8 +12,13 @@ export type Box = {
   readonly bottom: number;
 };
 
-/** Room the rod and the foot keep free of pieces when the drawing is fitted. */
-const inset = { left: 44, top: 44, right: 24, bottom: 24 };
+/** Room the rod, the names of the levels and the tools keep free of pieces when the drawing is fitted. */
+const insetOf = ({ width }: Size) => ({
+  left: 40,
+  top: 40,
+  right: width > 560 ? 76 : 16,
+  bottom: width > 560 ? 24 : 56,
+});
 
 const leastScale = 0.02;
 const mostScale = 8;
@@ -28,8 +33,13 @@ export const toPaper = (view: View, at: Point): Point => ({
   y: (at.y - view.y) / view.scale,
 });
 
+/** Where a box that does not fill the canvas lies: under the rod's corner, or in the middle. */
+export type Place = 'corner' | 'middle';
+
 /** The view in which a box on the paper just fills the canvas. */
-export function fitted(box: Box, size: Size): View {
+export function fitted(box: Box, size: Size, place: Place): View {
+  const inset = insetOf(size);
+  const spare = place === 'corner' ? 0 : 0.5;
   const width = Math.max(40, size.width - inset.left - inset.right);
   const height = Math.max(40, size.height - inset.top - inset.bottom);
   const scale = held(
@@ -37,8 +47,8 @@ export function fitted(box: Box, size: Size): View {
   );
   return {
     scale,
-    x: inset.left + (width - (box.right - box.left) * scale) / 2 - box.left * scale,
-    y: inset.top + (height - (box.bottom - box.top) * scale) / 2 - box.top * scale,
+    x: inset.left + (width - (box.right - box.left) * scale) * spare - box.left * scale,
+    y: inset.top + (height - (box.bottom - box.top) * scale) * spare - box.top * scale,
   };
 }
 

@@ -121,13 +121,13 @@ export const BodyFigure = ({ tape, label }: BodyFigureProps) => (
         : `Body figure from the ${tape.view}, with the tape at: ${label}`
     }
   >
-    <path d={figure} className="fill-none stroke-slate" strokeWidth={2} />
-    <path d={otherLeg} className="fill-none stroke-slate" strokeWidth={2} />
+    <path d={figure} className="fill-none stroke-slate" strokeWidth={3.5} />
+    <path d={otherLeg} className="fill-none stroke-slate" strokeWidth={3.5} />
     {tape !== undefined && (
       <path
         d={tapePath(tape)}
         className="fill-none stroke-brass"
-        strokeWidth={6}
+        strokeWidth={7}
         strokeLinecap="round"
       />
     )}

@@ -3,7 +3,6 @@ import { useDeferredValue, useEffect, useReducer, useRef, useState } from 'react
 import { useMedia } from '../../../lib/use-media.ts';
 import { Tabs, type Tab } from '../../../ui/tabs.tsx';
 import { keepTable, keptTable } from '../saved-table.ts';
-import { litSeam } from '../seams.ts';
 import { tableState, type Panel } from '../table-state.ts';
 import { Drawing } from './drawing.tsx';
 import { EmptyTable } from './empty-table.tsx';
@@ -30,7 +29,6 @@ export const DraftingTable = () => {
   // The drawing follows at once; tables and sentences may come a moment later.
   const told = useDeferredValue(draft);
   const waiting = <p className="text-slate">Here as soon as the ten measures are in.</p>;
-  const lit = draft === undefined ? undefined : litSeam(draft, state.seam, state.unit)?.title;
 
   const measures: Tab<Panel> = {
     value: 'measures',
@@ -60,7 +58,7 @@ export const DraftingTable = () => {
         told === undefined ? (
           waiting
         ) : (
-          <ProofPanel draft={told} lit={lit} unit={state.unit} dispatch={dispatch} />
+          <ProofPanel draft={told} lit={state.seam} unit={state.unit} dispatch={dispatch} />
         ),
     },
     {

@@ -1,9 +1,9 @@
 import type { Layout } from '../canvas/layout.ts';
-import type { Box } from '../canvas/view.ts';
+import type { Box, Place } from '../canvas/view.ts';
 
 type DrawingToolsProps = {
   readonly layout: Layout;
-  readonly onFit: (box: Box) => void;
+  readonly onFit: (box: Box, place: Place) => void;
   readonly onZoom: (by: number) => void;
   readonly onSeam: (by: number) => void;
 };
@@ -17,7 +17,7 @@ export const DrawingTools = ({ layout, onFit, onZoom, onSeam }: DrawingToolsProp
     aria-label="Look about"
     className="absolute right-2 bottom-2 flex items-center rounded-one border border-rule bg-ground text-sm"
   >
-    <button type="button" className={tool} onClick={() => onFit(layout.box)}>
+    <button type="button" className={tool} onClick={() => onFit(layout.box, 'corner')}>
       Fit
     </button>
     <button type="button" className={tool} aria-label="Further" onClick={() => onZoom(0.8)}>
@@ -32,7 +32,7 @@ export const DrawingTools = ({ layout, onFit, onZoom, onSeam }: DrawingToolsProp
       value=""
       onChange={(event) => {
         const chosen = layout.placed.find(({ piece }) => piece.name === event.currentTarget.value);
-        if (chosen !== undefined) onFit(chosen.box);
+        if (chosen !== undefined) onFit(chosen.box, 'middle');
       }}
     >
       <option value="">Piece…</option>

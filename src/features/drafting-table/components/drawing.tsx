@@ -87,7 +87,7 @@ export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
     '+': () => framing.zoom(1.25, middle),
     '=': () => framing.zoom(1.25, middle),
     '-': () => framing.zoom(0.8, middle),
-    '0': () => framing.fit(layout.box),
+    '0': () => framing.fit(layout.box, 'corner'),
     n: () => walkSeams(1),
     p: () => walkSeams(-1),
     Escape: () => dispatch({ type: 'seam', seam: undefined }),
@@ -127,7 +127,7 @@ export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
       >
         <canvas ref={canvas} className="absolute inset-0 h-full w-full" aria-hidden="true" />
         <svg className="pointer-events-none absolute inset-0 h-full w-full">
-          <Lettering draft={draft} layout={layout} view={view} size={size} />
+          <Lettering draft={draft} layout={layout} view={view} size={size} named={!drafting} />
           {step !== undefined && <StepPoints step={step} layout={layout} view={view} />}
           {!drafting && (
             <Handles

@@ -29,10 +29,11 @@ export const EmptyTable = ({ state, dispatch, onType }: EmptyTableProps) => {
             The pieces of a strapless gown appear here, proven to sew together, and follow every
             figure you change. Or lay out a sample body and look round first.
           </p>
+          <Button kind="primary" onClick={onType}>
+            Type ten measures
+          </Button>
+          <h2 className="heading pt-4">Sample bodies</h2>
           <div className="flex flex-wrap items-center gap-3">
-            <Button kind="primary" onClick={onType}>
-              Type ten measures
-            </Button>
             <Samples dispatch={dispatch} />
           </div>
         </>

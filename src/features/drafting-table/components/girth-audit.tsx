@@ -2,7 +2,7 @@ import { formatLength } from '#shared/units/format-length.ts';
 import type { GirthRow } from '#shared/proof/proof.ts';
 import type { Unit } from '#shared/units/said.ts';
 
-import { levelTitles } from '../canvas/level-names.ts';
+import { levelTitles } from '#shared/exports/level-titles.ts';
 
 type GirthAuditProps = { readonly rows: readonly GirthRow[]; readonly unit: Unit };
 
@@ -29,7 +29,9 @@ export const GirthAudit = ({ rows, unit }: GirthAuditProps) => (
             </th>
             <td className="py-1 text-right">
               {row.body === undefined ? '—' : formatLength(row.body, unit)}
-              {row.estimated && <span className="text-sm text-slate"> est.</span>}
+              {row.estimated && row.body !== undefined && (
+                <span className="text-sm text-slate"> est.</span>
+              )}
             </td>
             <td className="py-1 text-right">
               {row.ease === undefined ? '' : signed(row.ease, unit)}

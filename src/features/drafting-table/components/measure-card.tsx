@@ -41,7 +41,7 @@ export const MeasureCard = ({ state, dispatch }: MeasureCardProps) => {
       <h2 id="measure-card" className="heading">
         Measure card
       </h2>
-      <div className="sticky -top-4 z-10 -mx-1 flex h-40 gap-3 border-b border-rule bg-cloth px-1 py-2 lg:h-44">
+      <div className="sticky -top-4 z-10 -mx-1 flex h-34 gap-3 border-b border-rule bg-cloth px-1 py-2 lg:h-44">
         <BodyFigure tape={guide?.tape} label={guide?.label ?? ''} />
         <p id="how-taken" className="text-sm leading-snug">
           {guide === undefined ? (

@@ -1,23 +1,28 @@
 import type { Dispatch } from 'react';
 
+import type { EdgeRef } from '#shared/drafting/piece.ts';
 import type { Draft } from '#shared/engine/draft.ts';
 import type { ProofLine, SeamRow } from '#shared/proof/proof.ts';
 import { formatLength, formatWithUnit } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 
+import { seamIndex, seamPieces, seamWord } from '../seams.ts';
 import type { TableAction } from '../table-state.ts';
 import { GirthAudit } from './girth-audit.tsx';
 
 type ProofPanelProps = {
   readonly draft: Draft;
-  readonly lit: string | undefined;
+  /** The edge whose seam is lit. */
+  readonly lit: EdgeRef | undefined;
   readonly unit: Unit;
   readonly dispatch: Dispatch<TableAction>;
 };
 
 /** The verdict first; the numbers it rests on under it. */
-export const ProofPanel = ({ draft: { proof }, lit, unit, dispatch }: ProofPanelProps) => {
+export const ProofPanel = ({ draft, lit, unit, dispatch }: ProofPanelProps) => {
+  const { proof } = draft;
+  const litRow = seamIndex(draft, lit);
   const [verdict, ...rest] = sentences(speak(proof.verdict, unit));
   const holding = proof.lines.filter((line) => line.holds).length;
   return (
@@ -46,19 +51,22 @@ export const ProofPanel = ({ draft: { proof }, lit, unit, dispatch }: ProofPanel
             </tr>
           </thead>
           <tbody>
-            {proof.seams.map((row) => (
+            {proof.seams.map((row, index) => (
               <tr key={`${row.first.piece} ${row.first.edge}`} className="border-b border-rule">
                 <th scope="row" className="py-1 text-left font-normal">
                   <button
                     type="button"
                     className="text-left underline decoration-rule underline-offset-4 aria-pressed:font-semibold"
-                    aria-pressed={row.title === lit}
+                    aria-pressed={index === litRow}
                     onClick={() =>
-                      dispatch({ type: 'seam', seam: row.title === lit ? undefined : row.first })
+                      dispatch({ type: 'seam', seam: index === litRow ? undefined : row.first })
                     }
                   >
-                    {row.title}
+                    {seamWord(row)}
                   </button>
+                  <span className="block text-sm leading-snug text-slate">
+                    {seamPieces(row, draft)}
+                  </span>
                 </th>
                 <td className="py-1 text-right align-top whitespace-nowrap">
                   {formatLength(row.first.length, unit)}

@@ -20,8 +20,8 @@ export const Samples = ({ dispatch }: { dispatch: Dispatch<TableAction> }) => {
     );
   }
   return samples.data.samples.map((sample) => (
-    <Button key={sample.id} onClick={() => dispatch({ type: 'card laid', card: sample.card })}>
-      {`Lay out ${sample.card.name ?? 'a sample body'}`}
+    <Button key={sample.id} onClick={() => dispatch({ type: 'gown laid', gown: sample })}>
+      {sample.title}
     </Button>
   ));
 };

@@ -26,7 +26,9 @@ export const TableHeader = ({ state, kept, dispatch, onPrint }: TableHeaderProps
     <p className={`hidden shrink-0 text-sm lg:block ${kept ? 'text-verdigris' : 'text-madder'}`}>
       {kept ? '✓ kept in this browser' : 'This browser keeps nothing: print before you leave'}
     </p>
-    <ThemeToggle className="hidden px-2 sm:inline-flex" />
+    <span className="hidden sm:block">
+      <ThemeToggle className="px-2" />
+    </span>
     <span className="ml-auto md:ml-0">
       <Segmented
         legend="Unit"

@@ -1,0 +1,93 @@
+import { draftGown } from '../../../shared/engine/draft-gown.ts';
+import { houseRulePresets } from '../../../shared/drafting/house-rule-presets.ts';
+import { levelTitles } from '../../../shared/exports/level-titles.ts';
+import { pathData } from '../../../shared/exports/path-data.ts';
+import { spread, type SpreadPiece } from '../../../shared/exports/spread.ts';
+
+/** The body of the drawing on the front page; invented. */
+const card = {
+  bustGirth: 920,
+  underbustGirth: 780,
+  waistGirth: 738,
+  hipGirth: 990,
+  bustSpan: 190,
+  sideNeckToBustPoint: 275,
+  sideNeckToUnderbust: 345,
+  frontWaistLength: 440,
+  waistToHip: 205,
+  waistToFloor: 1050,
+};
+
+/** Room above and beside the pieces for the rod, mm. */
+const margin = 46;
+
+/** Room on the right for the names of the levels, mm. */
+const forNames = 130;
+
+/**
+ * The front page's drawing as an SVG of one symbol, `gown`, that takes its colours from the page that
+ * uses it. Made when the screens are built, so that it is never older than the engine.
+ */
+export function demoGown(): string {
+  const { pieces } = draftGown({ card, style: {}, rules: houseRulePresets.balanced });
+  const shown = pieces.filter((piece) => piece.part !== 'flare' || piece.side === 'front');
+  const { placed, width, height } = spread(shown);
+  const [w, h] = [Math.ceil(width + margin + forNames), Math.ceil(height + margin)];
+  return [
+    '<svg xmlns="http://www.w3.org/2000/svg">',
+    `<symbol id="gown" viewBox="0 0 ${w} ${h}">`,
+    levels(placed, w),
+    `<g transform="translate(${margin} ${margin})" stroke-linejoin="round">`,
+    ...placed.map(drawn),
+    '</g>',
+    `<path fill="none" stroke="var(--brass)" stroke-width="2" d="${rod(w, h)}"/>`,
+    '</symbol></svg>\n',
+  ].join('\n');
+}
+
+function drawn({ piece, translate }: SpreadPiece): string {
+  const seams = piece.edges.map((edge) => pathData(edge.path)).join('');
+  const darts = piece.darts.flatMap((dart) => [dart.centreLeg, dart.sideLeg]);
+  return [
+    `<g transform="translate(${translate.x.toFixed(1)} ${translate.y.toFixed(1)})" fill="none" stroke="currentColor">`,
+    `<path fill="var(--paper)" stroke-width="2.6" d="${pathData(piece.cutLine, true)}"/>`,
+    `<path stroke-width="1.6" stroke-dasharray="9 6" d="${seams}"/>`,
+    `<path stroke-width="1.2" d="${darts.map((leg) => pathData(leg)).join('')}"/>`,
+    `<path stroke-width="1.2" d="${pathData([{ kind: 'line', ...piece.grain }])}"/>`,
+    '</g>',
+  ].join('');
+}
+
+/** The body's levels hang from the rod as hairlines with their names. */
+function levels(placed: readonly SpreadPiece[], width: number): string {
+  const seen = new Map<string, number>();
+  for (const { piece, translate } of placed) {
+    if (piece.part === 'flare') continue;
+    for (const { level, from } of piece.levels) {
+      if (!seen.has(levelTitles[level])) {
+        seen.set(levelTitles[level], from.y + translate.y + margin);
+      }
+    }
+  }
+  return [...seen]
+    .map(
+      ([name, y]) =>
+        `<path stroke="var(--level)" stroke-width="1.6" d="M${margin} ${y.toFixed(1)}H${width}"/>` +
+        `<text fill="var(--brass)" font-size="26" text-anchor="end" x="${width - 8}" y="${(y - 7).toFixed(1)}">${name}</text>`,
+    )
+    .join('');
+}
+
+/** Marks every inch along the top and left, every fourth longer. */
+function rod(width: number, height: number): string {
+  const inch = 25.4;
+  const marks = (length: number): number[] =>
+    Array.from({ length: Math.floor((length - margin) / inch) + 1 }, (_, count) => count);
+  const long = (count: number): number => (count % 4 === 0 ? 24 : 12);
+  const place = (count: number): string => (margin + count * inch).toFixed(1);
+  return [
+    `M${width} 1H1V${height}`,
+    ...marks(width).map((count) => `M${place(count)} 1V${long(count)}`),
+    ...marks(height).map((count) => `M1 ${place(count)}H${long(count)}`),
+  ].join('');
+}
