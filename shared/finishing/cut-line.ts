@@ -10,7 +10,7 @@ import {
   startAtLine,
 } from '../geometry/corner.ts';
 import { endTangent, startTangent } from '../geometry/curve.ts';
-import { parallel } from '../geometry/offset.ts';
+import { parallel, withoutSpecks } from '../geometry/offset.ts';
 import { type Path, type Segment, line } from '../geometry/path.ts';
 import {
   type Point,
@@ -138,13 +138,14 @@ export function cutLine(piece: Piece, rules: HouseRules): Path {
       ? Math.max(own[(index + count - 1) % count] ?? 0, own[(index + 1) % count] ?? 0)
       : (own[index] ?? 0),
   );
-  const sides = piece.edges.map((edge, index) => parallel(edge.path, reach[index] ?? 0));
+  const seams = piece.edges.map((edge) => withoutSpecks(edge.path));
+  const sides = seams.map((seam, index) => parallel(seam, reach[index] ?? 0));
   const runs = sides.map((side) => side.path);
   const bridges: Path[] = piece.edges.map(() => []);
   const runAt = (index: number, end: 'start' | 'end'): Run => ({
     path: runs[index] ?? [],
     distance: reach[index] ?? 0,
-    along: (end === 'start' ? startTangent : endTangent)(piece.edges[index]?.path ?? []),
+    along: (end === 'start' ? startTangent : endTangent)(seams[index] ?? []),
   });
 
   const capped = new Set<number>();

@@ -64,6 +64,21 @@ function offsetCubic(segment: Cubic, distance: number, depth: number, into: Segm
   return folded;
 }
 
+/** A stretch smaller than this is a speck: its direction means nothing, mm. */
+const speck = 0.02;
+
+const small = ({ x, y }: Point): boolean => Math.abs(x) < speck && Math.abs(y) < speck;
+
+function isSpeck(segment: Segment): boolean {
+  if (!small(subtract(segment.to, segment.from))) return false;
+  if (segment.kind === 'line') return true;
+  return small(subtract(segment.c1, segment.from)) && small(subtract(segment.c2, segment.from));
+}
+
+/** The path without the specks that cutting curves at their very ends leaves behind. */
+export const withoutSpecks = (path: Path): Path =>
+  path.some(isSpeck) && !path.every(isSpeck) ? path.filter((each) => !isSpeck(each)) : path;
+
 function offsetLine(segment: Line, distance: number): Line {
   return line(beside(segment, 0, distance), beside(segment, 1, distance));
 }

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { pointAt, tangentAt } from '#shared/geometry/curve.ts';
-import { parallel } from '#shared/geometry/offset.ts';
+import { parallel, withoutSpecks } from '#shared/geometry/offset.ts';
 import { type Path, cubic, line } from '#shared/geometry/path.ts';
 import { type Point, distance, point } from '#shared/geometry/point.ts';
 import { arc } from '../support/sample-pieces.ts';
@@ -95,6 +95,13 @@ describe('the parallel of a seam', () => {
     expect(outside.some(({ to }) => distance(to, point(110, -10)) < 1e-9)).toBe(true);
     const inside = parallel(corner, -10).path;
     expect(inside.map(({ to }) => to)).toEqual([point(90, 10), point(90, 100)]);
+  });
+
+  it('leaves out specks, whose direction means nothing', () => {
+    const side = line(point(0, 0), point(0, 100));
+    const [end, near] = [point(0, 100), point(0.001, 99.999)];
+    expect(withoutSpecks([side, cubic(end, near, near, end)])).toEqual([side]);
+    expect(withoutSpecks([side])).toEqual([side]);
   });
 
   it('says that it folds where the seam bends more tightly than the allowance', () => {
