@@ -1,29 +1,27 @@
 import { defineConfig } from '@playwright/test';
 
-const report = process.env['PLAYWRIGHT_REPORT'];
+/** `npm run e2e` starts the server and says where it is. */
+const address = process.env['E2E_URL'] ?? process.env['BASE_URL'];
 
-/** Chromium's sandbox needs an ordinary user. */
-const forRoot = process.getuid?.() === 0 ? ['--no-sandbox'] : [];
+const root = process.getuid?.() === 0;
 
 export default defineConfig({
-  testDir: 'e2e',
-  testMatch: '**/*.spec.ts',
-  outputDir: 'test-results',
-  workers: 2,
+  testDir: 'e2e/journeys',
+  outputDir: 'test-results/journeys',
   fullyParallel: true,
-  forbidOnly: true,
+  workers: 2,
+  retries: 0,
   timeout: 60_000,
-  reporter: [['list'], ...(report === undefined ? [] : [jsonReport(report)])],
+  reporter: [['list']],
   use: {
-    baseURL: process.env['BASE_URL'] ?? 'http://127.0.0.1:4173',
+    ...(address === undefined ? {} : { baseURL: address }),
+    browserName: 'chromium',
+    locale: 'en-GB',
     trace: 'retain-on-failure',
     launchOptions: {
-      executablePath: process.env['CHROMIUM'] ?? '/usr/bin/chromium',
-      args: forRoot,
+      // Debian's own browser; its sandbox does not start as root.
+      executablePath: '/usr/bin/chromium',
+      args: root ? ['--no-sandbox'] : [],
     },
   },
 });
-
-function jsonReport(outputFile: string): ['json', { outputFile: string }] {
-  return ['json', { outputFile }];
-}
