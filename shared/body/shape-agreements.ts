@@ -44,71 +44,88 @@ function underarm(body: Body): readonly Problem[] {
   ];
 }
 
-/** A core measure expected from the bust: a line, and how far from it a body can be and still be drawn. */
-type Proportion = {
-  readonly of: 'bustSpan' | 'sideNeckToBustPoint';
-  readonly slope: number;
-  readonly start: number;
-  readonly within: number;
+/** A core measure that must stand in proportion to the bust: its bounds beside a bust girth, millimetres. */
+export type Proportion = {
+  readonly of: 'bustSpan' | 'sideNeckToBustPoint' | 'underbustGirth';
+  readonly bounds: (bustGirth: number) => readonly [least: number, most: number];
 };
 
-/** Lines: fits to ASTM D5585-95 (from memory), within 3 mm of its rows; the distances are our rule. */
-const proportions: readonly Proportion[] = [
-  { of: 'bustSpan', slope: 0.2045, start: 13.7, within: 75 },
-  { of: 'sideNeckToBustPoint', slope: 0.2494, start: 32.2, within: 115 },
+/**
+ * The lines of bust span and neck to bust point are fits to ASTM D5585-95 (from memory), within 3 mm of its rows; how far
+ * from them a body may lie, and the fullest cup a front can shape (0.68), is our rule.
+ */
+export const proportions: readonly Proportion[] = [
+  { of: 'bustSpan', bounds: (bust) => around(13.7 + 0.2045 * bust, 60) },
+  { of: 'sideNeckToBustPoint', bounds: (bust) => around(32.2 + 0.2494 * bust, 90) },
+  { of: 'underbustGirth', bounds: (bust) => [0.68 * bust, bust - 10] },
 ];
 
-function proportion(body: Body, { of, slope, start, within }: Proportion): readonly Problem[] {
+const around = (middle: number, within: number) => [middle - within, middle + within] as const;
+
+function proportion(body: Body, { of, bounds }: Proportion): readonly Problem[] {
   const { bustGirth } = body.measures;
   const value = body.measures[of];
-  const expected = start + slope * bustGirth;
-  if (Math.abs(value - expected) <= within) return [];
+  const [least, most] = bounds(bustGirth);
+  if (value >= least && value <= most) return [];
   return [
     error({
       code: 'disagree',
       field: `card.${of}`,
       with: ['card.bustGirth'],
-      said: said`${measureGuide[of].label} ${mm(value)} does not go with bust ${mm(bustGirth)}: beside it, it must lie between ${mm(expected - within)} and ${mm(expected + within)}. Measure both again.`,
+      said: said`${measureGuide[of].label} ${mm(value)} does not go with bust ${mm(bustGirth)}: beside it, it must lie between ${mm(least)} and ${mm(most)}. Measure both again.`,
     }),
   ];
 }
 
-/** A girth that falls to the next within a height: steeper than `steepest` a front cannot be drawn (our rule). */
-type Fall = {
-  readonly upper: 'bustGirth' | 'underbustGirth';
-  readonly lower: 'underbustGirth' | 'waistGirth';
-  readonly from: 'sideNeckToBustPoint' | 'sideNeckToUnderbust';
-  readonly to: 'sideNeckToUnderbust' | 'frontWaistLength';
+/** A girth that changes to another within a height: by more than `steepest` of it no piece can be drawn (our rule). */
+export type Slope = {
+  readonly larger: 'bustGirth' | 'underbustGirth' | 'hipGirth';
+  readonly smaller: 'underbustGirth' | 'waistGirth';
   readonly steepest: number;
+  /** The lengths the height comes from, and how it is called. */
+  readonly along: readonly MeasureKey[];
+  readonly called: string;
+  readonly height: (measures: Body['measures']) => number;
 };
 
-const falls: readonly Fall[] = [
+export const slopes: readonly Slope[] = [
   {
-    upper: 'bustGirth',
-    lower: 'underbustGirth',
-    from: 'sideNeckToBustPoint',
-    to: 'sideNeckToUnderbust',
+    larger: 'bustGirth',
+    smaller: 'underbustGirth',
     steepest: 3.5,
+    along: ['sideNeckToBustPoint', 'sideNeckToUnderbust'],
+    called: 'side neck to under-bust less side neck to bust point',
+    height: (measures) => measures.sideNeckToUnderbust - measures.sideNeckToBustPoint,
   },
   {
-    upper: 'underbustGirth',
-    lower: 'waistGirth',
-    from: 'sideNeckToUnderbust',
-    to: 'frontWaistLength',
-    steepest: 2.4,
+    larger: 'underbustGirth',
+    smaller: 'waistGirth',
+    steepest: 2.2,
+    along: ['sideNeckToUnderbust', 'frontWaistLength'],
+    called: 'front waist length less side neck to under-bust',
+    height: (measures) => measures.frontWaistLength - measures.sideNeckToUnderbust,
+  },
+  {
+    larger: 'hipGirth',
+    smaller: 'waistGirth',
+    steepest: 2.6,
+    along: ['waistToHip'],
+    called: 'waist to hip',
+    height: (measures) => measures.waistToHip,
   },
 ];
 
-function fall(body: Body, { upper, lower, from, to, steepest }: Fall): readonly Problem[] {
-  const apart = body.measures[upper] - body.measures[lower];
-  const height = body.measures[to] - body.measures[from];
+function slope(body: Body, rule: Slope): readonly Problem[] {
+  const { larger, smaller, steepest, along, called } = rule;
+  const apart = body.measures[larger] - body.measures[smaller];
+  const height = rule.height(body.measures);
   if (apart <= steepest * height) return [];
   return [
     error({
       code: 'too-steep',
-      field: `card.${lower}`,
-      with: [`card.${upper}`, `card.${from}`, `card.${to}`],
-      said: said`${measureGuide[lower].label} ${mm(body.measures[lower])} is ${mm(apart)} less than ${label(upper)} ${mm(body.measures[upper])} within a height of ${mm(height)} (${label(to)} less ${label(from)}): over that height it may be at most ${mm(steepest * height)} less. Measure both girths and both lengths again.`,
+      field: `card.${smaller}`,
+      with: [larger, ...along].map((key) => `card.${key}`),
+      said: said`${measureGuide[smaller].label} ${mm(body.measures[smaller])} is ${mm(apart)} less than ${label(larger)} ${mm(body.measures[larger])} within a height of ${mm(height)} (${called}): over that height it may be at most ${mm(steepest * height)} less. Measure them all again.`,
     }),
   ];
 }
@@ -119,5 +136,5 @@ export const shapeProblems = (body: Body): readonly Problem[] => [
   ...between(body, 'topHipGirth', 'waistGirth', 'hipGirth'),
   ...underarm(body),
   ...proportions.flatMap((each) => proportion(body, each)),
-  ...falls.flatMap((each) => fall(body, each)),
+  ...slopes.flatMap((each) => slope(body, each)),
 ];

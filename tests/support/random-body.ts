@@ -4,6 +4,7 @@ import type { MeasureCard, MeasureKey } from '#shared/body/card.ts';
 import { furtherMeasures } from '#shared/body/card.ts';
 import { checkCard } from '#shared/body/check-card.ts';
 import { completeCard } from '#shared/body/complete-card.ts';
+import { proportions, slopes } from '#shared/body/shape-agreements.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
 
 /** Part of the women who had a further measure taken. */
@@ -73,36 +74,44 @@ function cardFrom(draws: ReadonlyMap<MeasureKey, Draw>): MeasureCard {
 type Bounds = readonly [least: number, most: number];
 type Of = (measure: MeasureKey) => number;
 
-/** The bounds that hang on more than one other measure: those of shape-agreements.ts. */
+/** The bounds that hang on more than one other measure, beside proportions and slopes. */
 const closer: { readonly [K in MeasureKey]?: (of: Of) => Bounds } = {
-  bustSpan: (of) => about(13.7 + 0.2045 * of('bustGirth'), 75),
-  sideNeckToBustPoint: (of) => about(32.2 + 0.2494 * of('bustGirth'), 115),
   sideNeckToUnderbust: (of) => [
-    of('sideNeckToBustPoint') + (of('bustGirth') - of('underbustGirth')) / 3.5,
+    of('sideNeckToBustPoint') + (of('bustGirth') - of('underbustGirth')) / steepest('bustGirth'),
     Infinity,
   ],
   frontWaistLength: (of) => [
-    of('sideNeckToUnderbust') + (of('underbustGirth') - of('waistGirth')) / 2.4,
+    of('sideNeckToUnderbust') +
+      (of('underbustGirth') - of('waistGirth')) / steepest('underbustGirth'),
     Infinity,
   ],
-  waistToHip: (of) => [0, of('waistToFloor') * 0.5625 - 200],
+  waistToHip: (of) => [
+    (of('hipGirth') - of('waistGirth')) / steepest('hipGirth'),
+    of('waistToFloor') * 0.5625 - 200,
+  ],
   waistSeamGirth: (of) => beside(of('underbustGirth'), of('waistGirth')),
   topHipGirth: (of) => beside(of('waistGirth'), of('hipGirth')),
   underarmToWaist: (of) => [0, of('frontWaistLength') - of('sideNeckToBustPoint') + 160],
 };
 
-const about = (middle: number, within: number): Bounds => [middle - within, middle + within];
+const steepest = (larger: MeasureKey): number =>
+  slopes.find((slope) => slope.larger === larger)?.steepest ?? Number.NaN;
 
 /** A girth between two others, at most 60 outside both. */
 const beside = (a: number, b: number): Bounds => [Math.min(a, b) - 60, Math.max(a, b) + 60];
 
+function proportioned(key: MeasureKey, bustGirth: number | undefined): Bounds {
+  const rule = proportions.find(({ of }) => of === key);
+  return rule === undefined || bustGirth === undefined ? [0, Infinity] : rule.bounds(bustGirth);
+}
+
 function narrowed(key: MeasureKey, drawn: ReadonlyMap<MeasureKey, number>): Bounds {
-  const [least, most] = bounds(key, drawn);
-  const [closerLeast, closerMost] = closer[key]?.((other) => drawn.get(other) ?? Number.NaN) ?? [
-    least,
-    most,
+  const all: readonly Bounds[] = [
+    bounds(key, drawn),
+    proportioned(key, drawn.get('bustGirth')),
+    closer[key]?.((other) => drawn.get(other) ?? Number.NaN) ?? [0, Infinity],
   ];
-  return [Math.max(least, closerLeast), Math.min(most, closerMost)];
+  return [Math.max(...all.map(([least]) => least)), Math.min(...all.map(([, most]) => most))];
 }
 
 /** Every core measure is drawn first, or `checkCard` says which is missing. */
@@ -113,9 +122,12 @@ function asCard(drawn: ReadonlyMap<MeasureKey, number>): MeasureCard {
 const partCard = (drawn: ReadonlyMap<MeasureKey, number>): Partial<MeasureCard> =>
   Object.fromEntries(drawn);
 
+/** From 0 to 1, evenly: `fc.double` would draw nearly everything next to nothing. */
+const share = fc.integer({ min: 0, max: 10_000 }).map((part) => part / 10_000);
+
 const draw = fc.record({
-  at: fc.double({ min: 0, max: 1, noNaN: true }),
-  taken: fc.double({ min: 0, max: 1, noNaN: true }),
+  at: share,
+  taken: share,
 });
 
 const draws = fc.record(
