@@ -1,5 +1,13 @@
 /** The levels at which the side seam may stand off the plain quarter. */
-export const balanceLevels = ['chest', 'bust', 'underbust', 'waist', 'topHip', 'hip', 'knee'] as const;
+export const balanceLevels = [
+  'chest',
+  'bust',
+  'underbust',
+  'waist',
+  'topHip',
+  'hip',
+  'knee',
+] as const;
 export type BalanceLevel = (typeof balanceLevels)[number];
 
 /** What the edge of a piece becomes, which decides its allowance. */

@@ -1,8 +1,8 @@
-import { pathCrossings, stationAtLength, type Station } from '../geometry/curve.ts';
+import { endOf, pathCrossings, stationAtLength, type Station } from '../geometry/curve.ts';
 import { type Path, line } from '../geometry/path.ts';
 import { type Point, point, turnLeft } from '../geometry/point.ts';
 import type { EdgeKind } from './house-rules.ts';
-import type { Edge, EdgeRef, LevelLine, LevelName, Notch } from './piece.ts';
+import type { Dart, Edge, EdgeRef, LevelLine, LevelName, Notch } from './piece.ts';
 
 /** Where an edge goes: the piece and edge it is sewn to. */
 export const to = (piece: string, edge: string): EdgeRef => ({ piece, edge });
@@ -47,6 +47,17 @@ export function notchAtLength(
   const station = stationAtLength(on.path, length);
   return station ? [notchAt(name, on.name, strokes, station)] : [];
 }
+
+/** Drill points stand this far inside a dart tip (common practice, no source: 10 to 15). */
+const drillInside = 12;
+
+/** Where to drill for each dart: on its axis, short of the tip. */
+export const drillPoints = (darts: readonly Dart[]): readonly Point[] =>
+  darts.flatMap((dart) => {
+    const tip = endOf(dart.centreLeg);
+    const inwards = dart.tip === 'above' ? drillInside : -drillInside;
+    return tip ? [point(tip.x, tip.y + inwards)] : [];
+  });
 
 /** A level across a piece. */
 export const levelLine = (level: LevelName, from: Point, until: Point): LevelLine => ({

@@ -5,6 +5,8 @@ import { type Said, mm, said } from '../units/said.ts';
 export type Quantity = {
   readonly value: number;
   readonly how: Said;
+  /** Whether the words already end with what it comes to. */
+  readonly stated?: boolean;
   readonly measures: readonly MeasureKey[];
 };
 
@@ -22,6 +24,7 @@ export const taken = (
 /** The same length with a named amount added; a taken-off amount is negative. */
 export const plus = (quantity: Quantity, name: string, amount: number): Quantity => ({
   value: quantity.value + amount,
+  stated: amount === 0 && quantity.stated === true,
   how:
     amount === 0
       ? quantity.how
@@ -33,8 +36,10 @@ export const plus = (quantity: Quantity, name: string, amount: number): Quantity
 export const quarterOf = (girth: Quantity): Quantity => ({
   value: girth.value / 4,
   how: said`a quarter of (${girth.how}) = ${mm(girth.value / 4)}`,
+  stated: true,
   measures: girth.measures,
 });
 
 /** The whole sum: how it was worked out, and what it comes to. */
-export const worked = (quantity: Quantity): Said => said`${quantity.how} = ${mm(quantity.value)}`;
+export const worked = (quantity: Quantity): Said =>
+  quantity.stated === true ? quantity.how : said`${quantity.how} = ${mm(quantity.value)}`;

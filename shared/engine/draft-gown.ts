@@ -2,7 +2,8 @@ import { checkCard } from '../body/check-card.ts';
 import { completeCard } from '../body/complete-card.ts';
 import { checkRules } from '../drafting/check-rules.ts';
 import { DraftingError } from '../drafting/drafting-error.ts';
-import { openTable } from '../drafting/drafting-table.ts';
+import { type DraftingTable, openTable } from '../drafting/drafting-table.ts';
+import type { HouseRules } from '../drafting/house-rules.ts';
 import { drawGown } from '../drafts/gown/draw-gown.ts';
 import { gownLevels } from '../drafts/gown/levels.ts';
 import { resolveStyle } from '../drafts/gown/resolve-style.ts';
@@ -10,6 +11,7 @@ import { checkStyle } from '../drafts/gown/style-check.ts';
 import { finishPiece } from '../finishing/finish-piece.ts';
 import { prove } from '../proof/prove.ts';
 import type { Problem } from '../units/problem.ts';
+import { mm, said } from '../units/said.ts';
 import type { Draft, DraftInputs } from './draft.ts';
 import { draftNumber } from './draft-number.ts';
 
@@ -22,6 +24,18 @@ const errorsOf = (problems: readonly Problem[]): readonly Problem[] =>
 function refuse(problems: readonly Problem[]): void {
   const errors = errorsOf(problems);
   if (errors.length > 0) throw new DraftingError(errors);
+}
+
+function narrateFinishing(table: DraftingTable, { allowance }: HouseRules): void {
+  table
+    .part('Finishing', 'both')
+    .draw(
+      'Allowances',
+      said`Added outside the seam line, last of all: seams ${mm(allowance.seam)}, side seams ${mm(allowance.side)}, centre back for the zip ${mm(allowance.zip)}, enclosed top edge ${mm(allowance.top)}, hem ${mm(allowance.hem)}; a fold has none.`,
+      {
+        why: said`Every girth and seam was drawn and proven on the seam line, so an allowance can never be counted twice.`,
+      },
+    );
 }
 
 /**
@@ -41,6 +55,7 @@ export function draftGown(inputs: DraftInputs): Draft {
   const resolved = resolveStyle(style, body, levels);
   const drawn = drawGown(table, body, levels, resolved, rules);
   const number = draftNumber(JSON.stringify([engineVersion, card, style, rules]));
+  narrateFinishing(table, rules);
   const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'cloth' };
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {

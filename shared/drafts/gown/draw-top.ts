@@ -7,8 +7,10 @@ import { point } from '../../geometry/point.ts';
 import { profileLength, slopeAt, xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
 import { princessAbove, topDart } from './contour.ts';
-import { type Half, heightAtArc, heightOn } from './half.ts';
+import { intakeEdge, princessBelow, topDarts } from './intakes.ts';
+import { type Half, heightOn } from './half.ts';
 import type { GownStyle } from './style-card.ts';
+import { heightAtArc } from './truing.ts';
 import { dartedTop, princessPanels } from './top.ts';
 import { type TopLine, type TopLinePoints, topLine } from './top-line.ts';
 
@@ -34,6 +36,7 @@ export function drawTop(
     const above = princessAbove(axis, bust, opening, peak);
     const top = topLine(points, above.legs);
     narrateTop(table, paper, half, points, top);
+    narratePrincess(paper, half, opening, above.height);
     return {
       pieces: princessPanels({
         half,
@@ -54,6 +57,7 @@ export function drawTop(
   const dart = topDart(axis, bust, opening, peak, rules.dartClearance);
   const top = topLine(points, dart.legs);
   narrateTop(table, paper, half, points, top);
+  narrateDarts(paper, half, opening, rules.dartClearance);
   const on = { piece: `${side}-top`, edge: 'top-mouth' };
   return {
     pieces: dartedTop({
@@ -116,4 +120,34 @@ function narrateTop(
       said: said`The top line passes ${mm(bust - top.crossing)} above the bust point; under ${mm(overBust)} it may not hold. Raise the top line or the side.`,
     });
   }
+}
+
+function narratePrincess(paper: PartTable, half: Half, opening: number, height: number): void {
+  const below = princessBelow(half);
+  const above =
+    opening > 0
+      ? said`opens to ${mm(opening)} at ${mm(below.top - height)} above it`
+      : said`stays closed above it`;
+  paper.draw(
+    'Princess seam',
+    said`${mm(half.axis)} out from the centre both panels pass the bust point upright. Below it the gap is ${mm(half.gap.underbust)} at the under-bust and ${mm(half.gap.seam)} at the waist seam, half on each side; the seam ${above}.`,
+    {
+      why: said`The edges swell outside the straight legs and never cut the corner at the bust point, which would cost girth there.`,
+      points: { 'bust-point': point(half.axis, below.top) },
+      lines: [intakeEdge(below, 'centre'), intakeEdge(below, 'side')],
+    },
+  );
+}
+
+function narrateDarts(paper: PartTable, half: Half, opening: number, clearance: number): void {
+  const darts = topDarts(half, clearance);
+  const above = opening > 0 ? said`; one from the top line takes ${mm(opening)}` : said``;
+  paper.draw(
+    'Bust darts',
+    said`${darts.length === 1 ? 'One dart' : 'Two darts'} from the waist seam, ending ${mm(clearance)} short of the bust point: ${mm(half.gap.underbust)} at the under-bust, ${mm(half.gap.seam)} at the waist seam${above}.`,
+    {
+      why: said`A dart that ran into the bust point would stand up there; stopped short it melts into the curve.`,
+      lines: darts.flatMap((dart) => [intakeEdge(dart, 'centre'), intakeEdge(dart, 'side')]),
+    },
+  );
 }

@@ -2,10 +2,11 @@ import { DraftingError } from '../../drafting/drafting-error.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
 import type { Cubic } from '../../geometry/path.ts';
-import { type Profile, profileLength, slopeAt, xAt } from '../../geometry/profile.ts';
+import { type Profile, slopeAt, xAt } from '../../geometry/profile.ts';
 import { said } from '../../units/said.ts';
 import { bustToHip, narrowestDart, shareSuppression, sideLine } from './side-line.ts';
 import type { SideHeights, SideWidths, Suppression } from './side-line.ts';
+import { type SideArcs, towards, truedHeights } from './truing.ts';
 import { closedSeam, fallFor } from './waist-seam.ts';
 
 const sideLevels = ['underarm', 'bust', 'underbust', 'seam', 'topHip', 'hip', 'knee'] as const;
@@ -33,9 +34,6 @@ export type HalfInputs = {
   /** Lengths along the front's side seam from the waist: the back is trued to them. */
   readonly trueTo?: SideArcs;
 };
-
-/** Lengths along the side seam from the waist up (bust, …) or down (hip, …), all positive. */
-export type SideArcs = Omit<SideHeights, 'waist'>;
 
 /** Shares of the intake by dart. */
 export const dartShares = (count: 1 | 2): readonly number[] => (count === 1 ? [1] : [0.6, 0.4]);
@@ -90,8 +88,6 @@ type Round = {
 type DartPlan = { readonly shares: readonly number[]; readonly tips: readonly number[] };
 
 const roundsAtMost = 80;
-/** A height moves by at most this in a round, so that a crooked start cannot run away. */
-const farthestMove = 6;
 /** From this round on it moves half way only, which settles the few bodies that swing. */
 const dampedFrom = 20;
 
@@ -237,23 +233,6 @@ function dartAxes(
   return [first, (first + side) / 2];
 }
 
-/** Moves heights a share of the way, each by so much at most. */
-function towards(from: SideHeights, to: SideHeights, share: number): SideHeights {
-  const step = (level: keyof SideHeights): number =>
-    from[level] +
-    Math.max(-farthestMove, Math.min(farthestMove, share * (to[level] - from[level])));
-  return {
-    underarm: step('underarm'),
-    bust: step('bust'),
-    underbust: step('underbust'),
-    seam: step('seam'),
-    waist: to.waist,
-    topHip: step('topHip'),
-    hip: step('hip'),
-    knee: step('knee'),
-  };
-}
-
 /** Girths so far apart over so little height that no side seam of equal length joins front and back. */
 export const cannotBeDrawn = (): DraftingError =>
   new DraftingError([
@@ -265,51 +244,3 @@ export const cannotBeDrawn = (): DraftingError =>
       said: said`These girths change so much over so little height that the back's side seam cannot be made as long as the front's. Measure under-bust, waist, hip and waist to hip again.`,
     },
   ]);
-
-/** Scales each height's distance from the waist so that its length along the line becomes the front's. */
-function truedHeights(line: Profile, heights: SideHeights, arcs: SideArcs): SideHeights {
-  const { waist } = heights;
-  const above = (level: keyof SideArcs): number =>
-    waist - ((waist - heights[level]) * arcs[level]) / profileLength(line, heights[level], waist);
-  const below = (level: keyof SideArcs): number =>
-    waist + ((heights[level] - waist) * arcs[level]) / profileLength(line, waist, heights[level]);
-  return {
-    underarm: above('underarm'),
-    bust: above('bust'),
-    underbust: above('underbust'),
-    seam: above('seam'),
-    waist,
-    topHip: below('topHip'),
-    hip: below('hip'),
-    knee: below('knee'),
-  };
-}
-
-/** Lengths along a half's side seam from the waist to every level. */
-export function sideArcs(half: Half): SideArcs {
-  const { line, heights } = half;
-  const above = (level: keyof SideArcs): number =>
-    profileLength(line, heights[level], heights.waist);
-  const below = (level: keyof SideArcs): number =>
-    profileLength(line, heights.waist, heights[level]);
-  return {
-    underarm: above('underarm'),
-    bust: above('bust'),
-    underbust: above('underbust'),
-    seam: above('seam'),
-    topHip: below('topHip'),
-    hip: below('hip'),
-    knee: below('knee'),
-  };
-}
-
-/** Height on a half's side seam at a length from the waist upwards. */
-export function heightAtArc(half: Half, arc: number): number {
-  let y = half.heights.waist - arc;
-  for (let i = 0; i < 40; i += 1) {
-    const off = profileLength(half.line, y, half.heights.waist) - arc;
-    y += off / Math.hypot(1, slopeAt(half.line, y));
-    if (Math.abs(off) < 1e-9) break;
-  }
-  return y;
-}

@@ -1,5 +1,6 @@
 import type { PartTable } from '../../drafting/drafting-table.ts';
 import {
+  drillPoints,
   edge,
   levelLine,
   mouth,
@@ -19,9 +20,6 @@ import { intakeEdge, middleDarts, seamStretches } from './intakes.ts';
 
 /** The zip ends this far above the hip at the highest. */
 const zipAboveHip = 20;
-/** Drill points stand this far inside a dart tip (common practice, no source: 10 to 15). */
-const drillInside = 12;
-
 const letters = ['a', 'b', 'c'];
 
 /** Names of the stretches of the waist seam, from the centre out. */
@@ -73,6 +71,7 @@ export function middlePiece(
     side === 'front' ? undefined : 'self',
   );
   const knees = kneeEdges(side, flare, heights.knee);
+  narrateDarts(paper, half, sewn);
   paper.draw(
     'Middle',
     said`From the waist seam to the knee seam the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the knee seam.`,
@@ -118,8 +117,28 @@ export function middlePiece(
         : []),
     ],
     grain: grainIn(half),
-    drills: sewn.flatMap(drillOf),
+    drills: drillPoints(sewn),
   };
+}
+
+function narrateDarts(paper: PartTable, half: Half, darts: readonly Dart[]): void {
+  if (darts.length === 0) return;
+  const tips = half.dartTips.map((tip) => tip - half.levels.waist);
+  const [first = 0, second] = tips;
+  const reach =
+    half.gap.waist === 0
+      ? said`running out at the waist`
+      : second === undefined
+        ? said`ending ${mm(first)} below it`
+        : said`ending ${mm(first)} and ${mm(second)} below it`;
+  paper.draw(
+    'Waist darts',
+    said`${darts.length === 1 ? 'One dart' : 'Two darts, 60 to 40,'} upright at the waist seam with ${mm(half.gap.seam)}, ${mm(half.gap.waist)} at the waist, ${reach}.`,
+    {
+      why: said`The legs cross the waist seam upright, so sewing the dart only shifts the seam and leaves no kink.`,
+      lines: darts.flatMap((dart) => [dart.centreLeg, dart.sideLeg]),
+    },
+  );
 }
 
 /** The knee seam from the side to the centre, in a stretch for each gore of the flare. */
@@ -134,11 +153,6 @@ function kneeEdges(side: Piece['side'], flare: FlarePlan, y: number): readonly E
     })
     .reverse();
 }
-
-const drillOf = (dart: Dart): readonly Point[] => {
-  const tip = endOf(dart.centreLeg);
-  return tip ? [point(tip.x, tip.y - drillInside)] : [];
-};
 
 /** Beside the darts, between hip and knee. */
 const grainIn = (half: Half): { readonly from: Point; readonly to: Point } => {

@@ -56,7 +56,11 @@ function narrateSuppression(table: DraftingTable, paper: PartTable, half: Half):
         : said`two darts take ${mm(suppression.dart * (shares[0] ?? 1))} and ${mm(suppression.dart * (shares[1] ?? 0))}`;
   paper.draw(
     'Waist suppression',
-    said`Mean of bust and hip quarters ${mm(mean)} less the waist quarter ${mm(quarters.waist)} leaves ${mm(suppression.whole)} to take in. The side seam takes ${mm(inwards)}; ${darts}.`,
+    said`Mean of bust and hip quarters ${mm(mean)} less the waist quarter ${mm(quarters.waist)} ${
+      suppression.whole > 0
+        ? said`leaves ${mm(suppression.whole)} to take in. The side seam ${inwards >= 0 ? 'takes' : 'stands out by'} ${mm(Math.abs(inwards))}; ${darts}`
+        : said`leaves nothing to take in: the side seam passes through the waist quarter, no dart`
+    }.`,
     {
       why: said`The side seam stays inside the bust and leans at most 25°, so that it hangs without a hollow.`,
       measures: ['bustGirth', 'hipGirth', 'waistGirth'],

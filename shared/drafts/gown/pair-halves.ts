@@ -1,16 +1,10 @@
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import { slopeAt } from '../../geometry/profile.ts';
 import { type Contour, contours } from './contour.ts';
-import {
-  type Half,
-  type HalfInputs,
-  type QuarterWidths,
-  cannotBeDrawn,
-  drawHalf,
-  sideArcs,
-} from './half.ts';
+import { type Half, type HalfInputs, type QuarterWidths, cannotBeDrawn, drawHalf } from './half.ts';
 import { refuseCrowdedIntakes } from './intakes.ts';
 import type { Quarters } from './quarters.ts';
+import { sideArcs } from './truing.ts';
 import type { SideHeights } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
 

@@ -1,11 +1,11 @@
-import { edge, levelLine, notchAtHeight, to } from '../../drafting/outline.ts';
+import { drillPoints, edge, levelLine, notchAtHeight, to } from '../../drafting/outline.ts';
 import type { Dart, Edge, LevelLine, Piece, Side } from '../../drafting/piece.ts';
 import { endOf, reverse, startOf } from '../../geometry/curve.ts';
 import { type Path, line } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { profilePath, xAt } from '../../geometry/profile.ts';
 import type { Intake } from './intakes.ts';
-import { intakeEdge, mouthsOnSeam, princessBelow, seamStretches, topDarts } from './intakes.ts';
+import { intakeEdge, princessBelow, seamStretches, topDarts } from './intakes.ts';
 import { type Half, dartShares, heightOn } from './half.ts';
 import { waistEdges, waistStretch } from './middle.ts';
 import type { TopLine } from './top-line.ts';
@@ -138,9 +138,6 @@ const grainBetween = (x: number, bust: number, foot: number, top: number): Piece
   to: point(x, foot - 0.18 * (foot - bust)),
 });
 
-/** Drill points stand this far inside a dart tip (common practice, no source: 10 to 15). */
-const drillInside = 12;
-
 /** One piece shaped by darts: from the waist seam up to the bust, and from the top line down to it. */
 export function dartedTop(parts: TopParts): readonly Piece[] {
   const { half, top, topDartTip } = parts;
@@ -170,11 +167,6 @@ export function dartedTop(parts: TopParts): readonly Piece[] {
   }));
   const seamCentre = point(0, half.levels.seam);
   const topCentre = startOf(top.centre) ?? point(0, 0);
-  const drills = [...waistDarts, ...topDart].flatMap((dart): readonly Point[] => {
-    const tip = endOf(dart.centreLeg);
-    const down = dart.tip === 'above' ? 1 : -1;
-    return tip ? [point(tip.x, tip.y + down * drillInside)] : [];
-  });
   return [
     {
       name,
@@ -195,7 +187,7 @@ export function dartedTop(parts: TopParts): readonly Piece[] {
       ),
       notches: notchAtHeight('bust', own, half.heights.bust, strokes),
       grain: grainBetween(half.axis * 0.35, half.levels.bust, half.levels.seam, topCentre.y),
-      drills,
+      drills: drillPoints([...waistDarts, ...topDart]),
     },
   ];
 }
@@ -227,6 +219,3 @@ function topEdges(top: TopLine, dart: readonly Dart[]): readonly Edge[] {
     edge('top-b', 'top', top.outer),
   ];
 }
-
-/** Where the first dart or princess seam of a half meets its waist seam, closed. */
-export const firstMouth = (half: Half): number => mouthsOnSeam(half)[0] ?? half.axis;
