@@ -11,7 +11,8 @@ import {
   subtract,
   unit,
 } from '../geometry/point.ts';
-import { type Clearance, allowanceOf, boxedCut, follows, reachCut } from './clearance.ts';
+import { type Clearance, allowanceOf, follows } from './clearance.ts';
+import { boxedCut, reachCut } from './look-out.ts';
 import { nearestPlace } from './nearest-place.ts';
 
 /** Shares of the mouth at which the cap is folded down and measured. */
