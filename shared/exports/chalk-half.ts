@@ -13,6 +13,14 @@ export const quarter = 0.25;
 const numberSize = 2.3;
 const numberOff = 2.4;
 
+type DrawnHalf = {
+  readonly title: string;
+  readonly pieces: readonly Piece[];
+  readonly points: readonly ChalkPoint[];
+  /** Where the centre line stands on the page. */
+  readonly x: number;
+};
+
 /** Letters that stand for the levels, on the drawing and in the table. */
 export const levelLetters: { readonly [L in LevelName]: string } = {
   chest: 'C',
@@ -26,14 +34,8 @@ export const levelLetters: { readonly [L in LevelName]: string } = {
   hem: 'E',
 };
 
-/** One half of the gown, its centre line at `x` and the body's height 0 at `y` on the page. */
-export function drawHalf(
-  title: string,
-  pieces: readonly Piece[],
-  points: readonly ChalkPoint[],
-  x: number,
-  y: number,
-): readonly Mark[] {
+/** One half of the gown, with the body's height 0 at `y` on the page. */
+export function drawHalf({ title, pieces, points, x }: DrawnHalf, y: number): readonly Mark[] {
   const small = (path: Path): Path => shrink(path, quarter, { x, y });
   const seams = pieces.map((each) => each.edges.flatMap((edge) => edge.path));
   const top = Math.min(...points.map((each) => each.at.y));

@@ -1,11 +1,11 @@
-import type { Piece, Side } from '../drafting/piece.ts';
 import type { Draft } from '../engine/draft.ts';
 import { type Paper, type PaperName, papers } from '../sheets/papers.ts';
 import { printerMargin } from '../sheets/tile-grid.ts';
 import type { Unit } from '../units/said.ts';
 import { cuttingCautions } from './cautions.ts';
 import { drawHalf, levelLetters, quarter } from './chalk-half.ts';
-import { type ChalkPoint, chalkPoints, struckLevels } from './chalk-points.ts';
+import { type ChalkLayout, type Half, layChalkSheet } from './chalk-layout.ts';
+import { struckLevels } from './chalk-points.ts';
 import {
   type Row,
   allowanceRows,
@@ -24,130 +24,108 @@ import { shorten, wrap } from './type-width.ts';
 
 export type ChalkChoice = { readonly paper: PaperName; readonly unit: Unit };
 
-/** Where the drawings begin, and the white between columns, mm. */
-const drawingsTop = 46;
-const gutter = 4.5;
-const columnWidth = 43;
 const cautionSize = 2.4;
 
-/** Line steps tried, mm, from easy to read down to the smallest print that still reads (6 pt). */
-const steps = [3.5, 3.3, 3.1, 2.9, 2.7, 2.6, 2.5, 2.4, 2.3, 2.2, 2.1, 2];
+/** Smallest line step at which a half's table is kept whole inside it rather than set larger and parted, mm. */
+const wholeDownTo = 2.5;
 
-type Half = {
-  readonly title: string;
-  readonly pieces: readonly Piece[];
-  readonly points: readonly ChalkPoint[];
+/** Line steps tried, mm, from easy to read down to small print (5 pt) on the widest, tallest bodies. */
+const steps = [3.4, 3.2, 3, 2.9, 2.8, 2.7, 2.6, 2.5, 2.4, 2.3, 2.2, 2.1, 2, 1.9];
+
+/** Levels as ticks at both edges of a half, and their letters before the front. */
+function levelTicks(draft: Draft, { front, back, yOf }: ChalkLayout): readonly Mark[] {
+  return struckLevels.flatMap((level) => {
+    const y = yOf(draft.levels[level]);
+    const ticks = [front, back].flatMap(({ x, right }) => [
+      stroke(x, y, x + 2.5, y),
+      stroke(right - 12, y, right, y),
+    ]);
+    return [
+      strokes(pens.hairline, ...ticks),
+      words(levelLetters[level], front.x - 0.8, y + 0.9, 2.6, { anchor: 'end', heavy: true }),
+    ];
+  });
+}
+
+/** The first of some steps, largest first, at which everything fits. */
+const largest = <T>(
+  tried: readonly number[],
+  set: (step: number) => T | undefined,
+): T | undefined => tried.reduce<T | undefined>((found, step) => found ?? set(step), undefined);
+
+const whole = (rows: readonly Row[], columns: readonly Column[]) => (step: number) => {
+  const flow = flowRows(rows, columns, step);
+  return flow.rest.length === 0 ? flow.marks : undefined;
 };
 
-function halfOf(draft: Draft, side: Side, first: number): Half {
-  const pieces = draft.pieces.filter((each) => each.side === side && each.part !== 'flare');
-  return {
-    title: side === 'front' ? 'Front, from the fold' : 'Back, from centre back',
-    pieces,
-    points: chalkPoints(pieces, draft.levels, first),
-  };
+/** Each half's points whole inside it, the other figures beside and below; none where that is too small. */
+function tablesInside(
+  halves: readonly Half[],
+  columns: readonly Column[],
+  facts: readonly Row[],
+  unit: Unit,
+) {
+  const readable = steps.filter((each) => each >= wholeDownTo);
+  const own = largest(readable, (step) => {
+    const set = halves.map((half) =>
+      whole(pointRows(half.title, half.points, unit), half.inside)(step),
+    );
+    return set.some((each) => !each) ? undefined : set.flatMap((each) => each ?? []);
+  });
+  const others = largest(readable, whole(facts, columns));
+  return own && others ? [...own, ...others] : undefined;
 }
 
-const widthOf = ({ points }: Half): number =>
-  Math.max(0, ...points.map((each) => each.at.x)) * quarter;
-
-/** The columns that the drawings leave free: beside them where there is room, and below them. */
-function columnsBeside(
-  paper: Paper,
-  right: number,
-  drawingsBottom: number,
-  bottom: number,
-): readonly Column[] {
-  const left = printerMargin;
-  const edge = paper.width - printerMargin;
-  const fit = (from: number): number => Math.floor((edge - from + gutter) / (columnWidth + gutter));
-  const columns = (from: number, y: number, until: number): readonly Column[] => {
-    const count = fit(from);
-    const width = (edge - from - (count - 1) * gutter) / count;
-    return Array.from({ length: count }, (_, i) => ({
-      x: from + i * (width + gutter),
-      y,
-      width,
-      bottom: until,
-    }));
+/** Points inside the halves as far as they go, the rest wherever the page is free. */
+const tablesParted =
+  (halves: readonly Half[], columns: readonly Column[], facts: readonly Row[], unit: Unit) =>
+  (step: number): readonly Mark[] | undefined => {
+    const own = halves.map((half) =>
+      flowRows(pointRows(half.title, half.points, unit), half.inside, step),
+    );
+    const over = own.flatMap((each) => each.rest);
+    const continued: readonly Row[] =
+      over.length === 0 ? [] : [{ kind: 'heading', text: `Points continued, ${unit}` }, ...over];
+    const room = [...columns, ...own.flatMap((each) => each.room)];
+    const free = whole([...facts, ...continued], room)(step);
+    return free && [...own.flatMap((each) => each.marks), ...free];
   };
-  const beside = fit(right + 6);
-  const besideColumns = Array.from({ length: beside }, (_, i) => ({
-    x: edge - (beside - i) * columnWidth - (beside - i - 1) * gutter,
-    y: drawingsTop - 8,
-    width: columnWidth,
-    bottom: drawingsBottom,
-  }));
-  return [...besideColumns, ...columns(left, drawingsBottom + 4, bottom)];
-}
 
-function levelLines(
-  draft: Draft,
-  x: number,
-  until: number,
-  yOf: (y: number) => number,
-): readonly Mark[] {
-  return [
-    strokes(
-      pens.hairline,
-      ...struckLevels.map((each) =>
-        stroke(x, yOf(draft.levels[each]), until, yOf(draft.levels[each])),
-      ),
-    ),
-    ...struckLevels.map((each) =>
-      words(levelLetters[each], x - 0.8, yOf(draft.levels[each]) + 0.9, 2.6, {
-        anchor: 'end',
-        heavy: true,
-      }),
-    ),
-  ];
+/** All tables in the largest print that fits; on the largest bodies without what the pieces repeat. */
+function tables(draft: Draft, { front, back, columns }: ChalkLayout, unit: Unit): readonly Mark[] {
+  const halves = [front, back];
+  const flare = draft.pieces.filter((each) => each.part === 'flare');
+  const needed = [...levelRows(draft, unit), ...flareRows(flare, unit)];
+  const facts = [...needed, ...pieceRows(draft.pieces), ...allowanceRows(draft, unit)];
+  const marks =
+    tablesInside(halves, columns, facts, unit) ??
+    largest(steps, tablesParted(halves, columns, facts, unit)) ??
+    largest(steps, tablesParted(halves, columns, needed, unit));
+  if (!marks) throw new Error('The chalk sheet has more figures than one page holds.');
+  return marks;
 }
 
 function sheet(draft: Draft, paper: Paper, unit: Unit): readonly Mark[] {
   const left = printerMargin;
   const width = paper.width - 2 * printerMargin;
-  const front = halfOf(draft, 'front', 1);
-  const back = halfOf(draft, 'back', front.points.length + 1);
-  const heights = [...front.points, ...back.points].map((each) => each.at.y);
-  const top = Math.min(...heights);
-  const yOf = (y: number): number => drawingsTop + (y - top) * quarter;
-  const frontX = left + 5;
-  const backX = frontX + widthOf(front) + 9;
-  const right = backX + widthOf(back);
   const cautions = wrap(cuttingCautions, cautionSize, width).length * cautionSize * 1.32;
   const bottom = paper.height - printerMargin - cautions - 2;
-  const columns = columnsBeside(paper, right, yOf(Math.max(...heights)), bottom);
-  const rows: readonly Row[] = [
-    ...levelRows(draft, unit),
-    ...pieceRows(draft.pieces),
-    ...allowanceRows(draft, unit),
-    ...flareRows(
-      draft.pieces.filter((each) => each.part === 'flare'),
-      unit,
-    ),
-    ...pointRows(front.title, front.points, unit),
-    ...pointRows(back.title, back.points, unit),
-  ];
-  const table = steps.reduce<readonly Mark[] | undefined>(
-    (found, step) => found ?? flowRows(rows, columns, step),
-    undefined,
-  );
+  const layout = layChalkSheet(draft, paper, bottom);
   return [
     ...rod(left, printerMargin, width, unit, quarter),
-    words('Chalk sheet', left, 25, 9, { heavy: true }),
-    words('Ellwand', left + width, 25, 6, { anchor: 'end', heavy: true, grey: 0.3 }),
-    words(shorten(draftLine(draft), 3.6, width), left, 30.5, 3.6),
-    words('Quarter scale, do not cut.', left, 35.6, 4, { heavy: true }),
+    words('Chalk sheet', left, 23, 7.5, { heavy: true }),
+    words(shorten(draftLine(draft), 3.6, width - 75), left + 42, 23, 3.6),
+    words('Ellwand', left + width, 23, 6, { anchor: 'end', heavy: true, grey: 0.3 }),
+    words('Quarter scale, do not cut.', left, 29, 4, { heavy: true }),
     words(
       'Figures are full size: out from the centre line, then up ↑ or down ↓ from the level.',
       left + 48,
-      35.6,
+      29,
       3.4,
     ),
-    ...levelLines(draft, frontX, right, yOf),
-    ...drawHalf(front.title, front.pieces, front.points, frontX, yOf(0)),
-    ...drawHalf(back.title, back.pieces, back.points, backX, yOf(0)),
-    ...(table ?? []),
+    ...levelTicks(draft, layout),
+    ...[layout.front, layout.back].flatMap((half) => drawHalf(half, layout.yOf(0))),
+    ...tables(draft, layout, unit),
     ...paragraph(cuttingCautions, left, bottom + 2, width, cautionSize).marks,
   ];
 }

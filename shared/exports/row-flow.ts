@@ -48,28 +48,30 @@ function drawRow(row: Row, x: number, y: number, width: number, step: number): r
   }
 }
 
-/** Sets rows down the columns one after another with this line step; no answer where they do not fit. */
-export function flowRows(
-  rows: readonly Row[],
-  columns: readonly Column[],
-  step: number,
-): readonly Mark[] | undefined {
+/** Rows set in columns, those that found no room, and the room left below the last of them. */
+export type Flow = {
+  readonly marks: readonly Mark[];
+  readonly rest: readonly Row[];
+  readonly room: readonly Column[];
+};
+
+/** Sets rows down the columns one after another with this line step; a heading keeps two rows with it. */
+export function flowRows(rows: readonly Row[], columns: readonly Column[], step: number): Flow {
   const marks: Mark[] = [];
   let index = 0;
   let column = columns[0];
   let y = column?.y ?? 0;
   for (const [i, row] of rows.entries()) {
-    const next = rows[i + 1];
     const own = heightOf(row) * step;
-    const need = row.kind === 'heading' && next ? own + 2 * step : own;
+    const need = row.kind === 'heading' ? own + 2 * step : own;
     while (column && y + need > column.bottom) {
       index += 1;
       column = columns[index];
       y = column?.y ?? 0;
     }
-    if (!column) return undefined;
+    if (!column) return { marks, rest: rows.slice(i), room: [] };
     marks.push(...drawRow(row, column.x, y, column.width, step));
     y += own;
   }
-  return marks;
+  return { marks, rest: [], room: column ? [{ ...column, y }, ...columns.slice(index + 1)] : [] };
 }
