@@ -1,4 +1,3 @@
-import type { MeasureKey } from '../body/card.ts';
 import type { Path } from '../geometry/path.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Problem } from '../units/problem.ts';
@@ -11,13 +10,13 @@ export type Drawn = {
   readonly why?: Said;
   readonly points?: Readonly<Record<string, Point>>;
   readonly lines?: readonly Path[];
-  readonly measures?: readonly MeasureKey[];
+  readonly measures?: readonly string[];
 };
 
 /** The table set up for one part of the draft: each verb computes, draws and is remembered. */
 export type PartTable = {
   /** Hangs a level below the side neck point and gives its height. */
-  readonly level: (name: string, how: Said, y: number, measures: readonly MeasureKey[]) => number;
+  readonly level: (name: string, how: Said, y: number, measures: readonly string[]) => number;
   /** Squares a width out from the centre line at a height and gives its end point. */
   readonly squareAcross: (name: string, y: number, width: Quantity, why?: Said) => Point;
   /** Draws what the sentence says. */

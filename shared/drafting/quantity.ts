@@ -1,23 +1,18 @@
-import type { MeasureKey } from '../body/card.ts';
 import { type Said, mm, said } from '../units/said.ts';
 
-/** A length together with the arithmetic that led to it, and the measures it rests on. */
+/** A length together with the arithmetic that led to it, and the keys of the measures it rests on. */
 export type Quantity = {
   readonly value: number;
   readonly how: Said;
   /** Whether the words already end with what it comes to. */
   readonly stated?: boolean;
-  readonly measures: readonly MeasureKey[];
+  readonly measures: readonly string[];
 };
 
-/** A measure of the body, as the card gives it; an estimate says so wherever it is spoken. */
-export const taken = (
-  name: string,
-  key: MeasureKey,
-  body: { readonly measures: Readonly<Record<MeasureKey, number>>; readonly estimated: object },
-): Quantity => ({
-  value: body.measures[key],
-  how: said`${name} ${mm(body.measures[key])}${key in body.estimated ? ' (estimated)' : ''}`,
+/** A measure of the body as its card gives it; an estimate says so wherever it is spoken. */
+export const taken = (name: string, key: string, value: number, estimated: boolean): Quantity => ({
+  value,
+  how: said`${name} ${mm(value)}${estimated ? ' (estimated)' : ''}`,
   measures: [key],
 });
 

@@ -1,7 +1,10 @@
 import fc from 'fast-check';
 import type { Body } from '#shared/body/card.ts';
 import type { BodyLevels } from '#shared/body/levels.ts';
-import { dartsReach } from '#shared/drafts/gown/darts-reach.ts';
+import { DraftingError } from '#shared/drafting/drafting-error.ts';
+import { openTable } from '#shared/drafting/drafting-table.ts';
+import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
+import { drawGown } from '#shared/drafts/gown/draw-gown.ts';
 import { resolveStyle } from '#shared/drafts/gown/resolve-style.ts';
 import { checkStyle } from '#shared/drafts/gown/style-check.ts';
 import { easeLevels, styleLengths } from '#shared/drafts/gown/style-card.ts';
@@ -62,9 +65,23 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
     if (choice === undefined) continue;
     style = { ...style, [key]: placed(styleLimits(body, levels, style)[key], choice.at) };
   }
-  const reaches = dartsReach(body, levels, resolveStyle(style, body, levels));
+  const reaches = draws.shaping === 'darts' && dartsReach(style, body, levels);
   const shaping = draws.shaping === 'darts' && !reaches ? 'princess' : draws.shaping;
   return shaping === undefined ? style : { ...style, shaping };
+}
+
+/** Whether darts can shape this bust under either preset: what the draft refuses is not a style to draw. */
+function dartsReach(style: StyleCard, body: Body, levels: BodyLevels): boolean {
+  const darted = resolveStyle({ ...style, shaping: 'darts' }, body, levels);
+  return Object.values(houseRulePresets).every((rules) => {
+    try {
+      drawGown(openTable(), body, levels, darted, rules);
+      return true;
+    } catch (error) {
+      if (!(error instanceof DraftingError)) throw error;
+      return !error.problems.some(({ code }) => code === 'darts-too-wide');
+    }
+  });
 }
 
 function easeOf(limits: StyleLimits, given: (key: StyleKey) => Draw | undefined): StyleCard {

@@ -1,28 +1,47 @@
-import type { Body } from '../../body/card.ts';
-import type { BodyLevels } from '../../body/levels.ts';
-import type { GownStyle } from './style-card.ts';
+import { DraftingError } from '../../drafting/drafting-error.ts';
+import { deg, mm, said } from '../../units/said.ts';
+import type { Half } from './half.ts';
+import { dartShares, heightOn } from './half.ts';
+import type { Intake } from './intakes.ts';
 
-/** Widest tip of a dart, degrees (method section 6). */
-export const widestTip = 30;
+/** Widest tip of a straight dart, degrees (method section 6). */
+const widestTip = 30;
+/**
+ * A dart that opens at 30 degrees may swell on to this much between tip and under-bust, degrees
+ * [our rule]: its legs curve outwards, which sews flat over a small bust only.
+ */
+const widestSwell = 40;
 
-/** Part of the front's shaping under the bust that is sewn into the larger of two darts, the side seam having its share. */
-const largestDart = 0.6 * 0.55;
-
-/** Darts stop this short of the bust point. */
-const clearance = 25;
+const degrees = (half: number, height: number): number =>
+  (2 * Math.atan(half / height) * 180) / Math.PI;
 
 /**
- * Tip angle (degrees) of the larger front dart, were this body shaped by darts: its intake at the under-bust
- * over the height from there to the tip.
+ * Refuses darts that would stand up in a cone instead of melting into the bust.
+ * @throws DraftingError on `style.shaping`, naming the princess seam as the remedy.
  */
-export function frontDartTip(body: Body, levels: BodyLevels, style: GownStyle): number {
-  const { bustGirth, underbustGirth } = body.measures;
-  const intake =
-    (largestDart * (bustGirth + style.ease.bust - underbustGirth - style.ease.underbust)) / 4;
-  const height = Math.max(1, levels.underbust - levels.bust - clearance);
-  return (2 * Math.atan(intake / 2 / height) * 180) / Math.PI;
+export function refuseBluntDarts(half: Half, darts: readonly Intake[], topTip: number): void {
+  const below = darts.map((dart, k) => {
+    const share = dartShares(half.dartCount)[k] ?? 1;
+    const underbust = heightOn(half, 'underbust', dart.axis);
+    return half.gap.underbust === 0
+      ? 0
+      : degrees((share * half.gap.underbust) / 2, Math.max(1, underbust - dart.top));
+  });
+  const blunt = Math.max(
+    topTip > widestTip ? topTip : 0,
+    ...below.filter((tip) => tip > widestSwell),
+  );
+  if (blunt === 0) return;
+  throw new DraftingError([
+    {
+      code: 'darts-too-wide',
+      severity: 'error',
+      field: 'style.shaping',
+      with: ['card.bustGirth', 'card.underbustGirth', 'card.upperChestGirth'],
+      said: said`On the ${half.side} a dart would open at ${deg(blunt)} to take in ${mm(half.gap.underbust)} under the bust; a dart takes at most ${deg(widestTip)} at its tip. Choose the princess seam.`,
+    },
+  ]);
 }
 
-/** Whether darts can shape this bust without a tip wider than 30 degrees; else it takes a princess seam. */
-export const dartsReach = (body: Body, levels: BodyLevels, style: GownStyle): boolean =>
-  frontDartTip(body, levels, style) <= widestTip;
+/** Tip angle of a dart with straight legs, degrees. */
+export const tipOf = (halfAngle: number): number => (2 * halfAngle * 180) / Math.PI;

@@ -8,6 +8,7 @@ import { profileLength, slopeAt, xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
 import { princessAbove, topDart } from './contour.ts';
 import { intakeEdge, princessBelow, topDarts } from './intakes.ts';
+import { refuseBluntDarts, tipOf } from './darts-reach.ts';
 import { type Half, heightOn } from './half.ts';
 import type { GownStyle } from './style-card.ts';
 import { heightAtArc } from './truing.ts';
@@ -55,6 +56,11 @@ export function drawTop(
     };
   }
   const dart = topDart(axis, bust, opening, peak, rules.dartClearance);
+  refuseBluntDarts(
+    half,
+    topDarts(half, rules.dartClearance),
+    opening > 0 ? tipOf(dart.legs.angle) : 0,
+  );
   const top = topLine(points, dart.legs);
   narrateTop(table, paper, half, points, top);
   narrateDarts(paper, half, opening, rules.dartClearance);

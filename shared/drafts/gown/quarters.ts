@@ -21,6 +21,9 @@ const levels: readonly Level[] = [
   { key: 'hip', name: 'hip', girth: 'hipGirth' },
 ];
 
+const measured = (name: string, key: MeasureKey, body: Body): Quantity =>
+  taken(name, key, body.measures[key], key in body.estimated);
+
 /** Ease at a level; the knee girth is given finished. */
 const easeAt = (style: GownStyle, key: BalanceLevel): number =>
   key === 'knee' ? 0 : style.ease[key];
@@ -45,7 +48,8 @@ export function finishedQuarters(
   const sign = side === 'front' ? 1 : -1;
   const quarter = (key: BalanceLevel, girth: Quantity): Quantity =>
     plus(quarterOf(plus(girth, 'ease', easeAt(style, key))), 'balance', sign * rules.balance[key]);
-  const at = (level: Level): Quantity => quarter(level.key, taken(level.name, level.girth, body));
+  const at = (level: Level): Quantity =>
+    quarter(level.key, measured(level.name, level.girth, body));
   const [chest, bust, underbust, waist, topHip, hip] = levels.map(at);
   if (!chest || !bust || !underbust || !waist || !topHip || !hip)
     throw new Error('levels are listed above');
@@ -76,7 +80,7 @@ export function finishedQuarters(
       : plus(
           quarterOf(
             plus(
-              taken('waist seam', 'waistSeamGirth', body),
+              measured('waist seam', 'waistSeamGirth', body),
               'ease',
               eased('underbust') + share * (eased('waist') - eased('underbust')),
             ),

@@ -2,8 +2,7 @@ import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
 import { readingGrace } from '../../units/format-length.ts';
 import { error, warning, type Problem } from '../../units/problem.ts';
-import { deg, mm, said, type Said } from '../../units/said.ts';
-import { dartsReach, frontDartTip, widestTip } from './darts-reach.ts';
+import { mm, said, type Said } from '../../units/said.ts';
 import { resolveStyle } from './resolve-style.ts';
 import type { EaseLevel, GownStyle, StyleCard } from './style-card.ts';
 import { styleLabels } from './style-labels.ts';
@@ -109,18 +108,6 @@ function checkChest(body: Body, style: GownStyle): readonly Problem[] {
   ];
 }
 
-function checkShaping(body: Body, levels: BodyLevels, style: GownStyle): readonly Problem[] {
-  if (style.shaping === 'princess' || dartsReach(body, levels, style)) return [];
-  return [
-    error({
-      code: 'darts-too-wide',
-      field: 'style.shaping',
-      with: ['card.bustGirth', 'card.underbustGirth'],
-      said: said`Bust ${mm(body.measures.bustGirth)} over under-bust ${mm(body.measures.underbustGirth)} would need a dart of ${deg(frontDartTip(body, levels, style))}, and a dart takes at most ${deg(widestTip)}: choose the princess seam.`,
-    }),
-  ];
-}
-
 function unlikely(style: GownStyle, given: StyleCard): readonly Problem[] {
   const notes: Problem[] = [];
   if (style.kneeFinished < 600) {
@@ -170,7 +157,6 @@ export function checkStyle(style: StyleCard, body: Body, levels: BodyLevels): re
   return [
     ...checkEase(body, resolved),
     ...checkChest(body, resolved),
-    ...checkShaping(body, levels, resolved),
     ...unlikely(resolved, style),
   ];
 }

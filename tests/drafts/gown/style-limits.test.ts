@@ -130,13 +130,6 @@ describe('a style that cannot be drawn', () => {
     expect(problem).toMatchObject({ code: 'ease-turns-bust', severity: 'error' });
   });
 
-  it('is refused with darts on a bust they cannot reach, and the princess seam is named', () => {
-    const full = completeCard({ ...middleBody, underbustGirth: 780, sideNeckToUnderbust: 305 });
-    const [problem] = checkStyle({ shaping: 'darts' }, full, plainLevels(full));
-    expect(problem?.code).toBe('darts-too-wide');
-    expect(speak(problem?.said ?? [], 'cm')).toMatch(/choose the princess seam\.$/);
-  });
-
   it('is refused for a value that is no number', () => {
     expect(heard({ dartLength: Number.NaN })[0]).toMatch(
       /^error style.dartLength: Dart length is not a number/,
