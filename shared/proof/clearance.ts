@@ -1,6 +1,14 @@
 import type { Edge, FinishedPiece } from '../drafting/piece.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
-import { endOf, endTangent, pointAt, startOf, startTangent, tangentAt } from '../geometry/curve.ts';
+import {
+  endOf,
+  endTangent,
+  pathCrossings,
+  pointAt,
+  startOf,
+  startTangent,
+  tangentAt,
+} from '../geometry/curve.ts';
 import {
   type Point,
   add,
@@ -63,17 +71,29 @@ export function follows({ path }: Edge, wanted: number | undefined, at: Point): 
   );
 }
 
+/** Whether a look outwards comes back to the seam line within a distance: the hollow is too narrow. */
+const meetsSeam = (piece: FinishedPiece, { at, out }: Look, within: number): boolean =>
+  piece.edges.some(({ path }) =>
+    pathCrossings(path, at, add(at, out)).some((place) => {
+      const away = dot(subtract(place.at, at), out);
+      return away > clearBound && away < within;
+    }),
+  );
+
 /**
  * How far the cutting line stands off at one place. Where the seam line bends inwards more tightly
  * than the allowance is wide, no parallel can follow it: there the cutting line found farther out is
- * rightly placed when it lies at the allowance from the nearest seam line.
+ * rightly placed when it lies at the allowance from the nearest seam line, and none is needed where
+ * the allowances of both sides of a hollow fill it.
  */
-function standOff({ piece, cut, allowances }: Sight, index: number, at: Point, out: Point): number {
+function standOff({ piece, cut, allowances }: Sight, index: number, look: Look): number {
   const wanted = allowances[index] ?? 0;
-  const away = reachCut(cut, at, out, 2 * wanted + 20);
+  const reach = 2 * wanted + 20;
+  const away = reachCut(cut, look.at, look.out, reach);
+  if (away !== undefined && away <= wanted + clearBound) return away;
+  if (meetsSeam(piece, look, Math.min(away ?? reach, 2 * wanted + clearBound))) return wanted;
   if (away === undefined) return -inside;
-  if (away <= wanted + clearBound) return away;
-  const hit = add(at, scale(out, away));
+  const hit = add(look.at, scale(look.out, away));
   const followed = piece.edges.some((edge, k) => follows(edge, allowances[k], hit));
   const own = nearestPlace(piece.edges[index]?.path ?? [], hit)?.off ?? 0;
   return own >= wanted - clearBound && followed ? wanted : away;
@@ -99,10 +119,10 @@ export function worstClearances(piece: FinishedPiece, rules: HouseRules): readon
     const wanted = allowances[index];
     if (wanted === undefined) return [];
     let worst: Clearance | undefined;
-    for (const { at, out } of looksAlong(edge, edgeEnds(piece, index, allowances))) {
-      const found = standOff(sight, index, at, out);
+    for (const look of looksAlong(edge, edgeEnds(piece, index, allowances))) {
+      const found = standOff(sight, index, look);
       if (worst && Math.abs(found - wanted) <= Math.abs(worst.found - wanted)) continue;
-      worst = { edge, wanted, found, at };
+      worst = { edge, wanted, found, at: look.at };
     }
     return worst ? [worst] : [];
   });
