@@ -3,6 +3,7 @@ import type { Logger } from 'pino';
 import type { Database } from './database/client.ts';
 import { ping } from './database/client.ts';
 import { draftsRouter } from './features/drafts/router.ts';
+import type { Printer } from './features/print/printer.ts';
 import { printRouter } from './features/print/router.ts';
 import { samplesRouter } from './features/samples/router.ts';
 import { errorReply } from './http/error-reply.ts';
@@ -16,6 +17,7 @@ export type Parts = {
   readonly database: Database;
   readonly log: Logger;
   readonly limits: Limits;
+  readonly printer: Printer;
   readonly overHttps: boolean;
   readonly trustedProxies: number;
   /** What answers outside the API: the built screens, or Vite in development. */
@@ -34,17 +36,21 @@ export function buildApp(parts: Parts): Express {
   app.use(requestLog(parts.log));
   app.use(securityHeaders({ overHttps: parts.overHttps, strict: parts.strictHeaders }));
   app.get('/api/health', async (_request, response) => {
+    response.locals['quiet'] = true;
     await ping(parts.database);
     response.setHeader('Cache-Control', 'no-store').json({ name: 'ellwand', database: 'answers' });
   });
   app.use('/api', express.json({ limit: bodyLimit }));
   app.use(samplesRouter(parts.database));
   app.use(draftsRouter(parts.limits));
-  app.use(printRouter(parts.limits));
-  app.use('/api', (_request, _response, next) => {
-    next(new RefusalError('not-found', 'The API has nothing at this address.'));
-  });
+  app.use(printRouter(parts.limits, parts.printer));
+  app.use('/api', nothingHere);
   app.use(parts.screens);
+  app.use(nothingHere);
   app.use(errorReply(parts.log));
   return app;
 }
+
+const nothingHere: express.RequestHandler = (_request, _response, next) => {
+  next(new RefusalError('not-found', 'There is nothing at this address.'));
+};

@@ -4,6 +4,7 @@ import { buildApp } from './app.ts';
 import { connect } from './database/client.ts';
 import { migrate } from './database/migrate.ts';
 import { seedSamples } from './database/sample-seed.ts';
+import { openPrinter } from './features/print/printer.ts';
 import { listen } from './listen.ts';
 import { places, readSettings } from './settings.ts';
 
@@ -21,8 +22,10 @@ export async function runServer(screens: {
   await migrate(database, places.migrations);
   await seedSamples(database);
   const { limits, overHttps, trustedProxies } = settings;
+  const printer = openPrinter(limits.printsWaiting);
   const app = buildApp({
     database,
+    printer,
     log,
     limits,
     overHttps,
@@ -35,8 +38,13 @@ export async function runServer(screens: {
   const stop = async () => {
     await stopListening();
     await screens.close?.();
+    await printer.close();
     await close();
     log.info('closed');
   };
-  for (const signal of ['SIGINT', 'SIGTERM'] as const) process.once(signal, () => void stop());
+  // Ctrl-C reaches every process of the terminal, and the parent's own word follows it.
+  let stopping: Promise<void> | undefined;
+  for (const signal of ['SIGINT', 'SIGTERM'] as const) {
+    process.on(signal, () => void (stopping ??= stop()));
+  }
 }

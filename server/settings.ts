@@ -62,3 +62,8 @@ export const places = {
   migrations: isBundled ? join(here, 'migrations') : join(here, 'database', 'migrations'),
   client: isBundled ? join(here, '..', 'client') : join(here, '..', 'dist', 'client'),
 };
+
+/** The printing thread's program. */
+export const printWorkerPath = isBundled
+  ? join(here, 'print-worker.js')
+  : join(here, 'features', 'print', 'print-worker-unbuilt.mjs');

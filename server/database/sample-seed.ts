@@ -61,7 +61,7 @@ export const sampleSeed: readonly SampleRow[] = [
       date: '2026-11-02',
       bustGirth: 1084,
       underbustGirth: 866,
-      waistGirth: 858,
+      waistGirth: 904,
       hipGirth: 1082,
       bustSpan: 216,
       sideNeckToBustPoint: 309,

@@ -16,8 +16,8 @@ export function clientFiles(folder: string): Router {
     '/assets',
     express.static(join(folder, 'assets'), { immutable: true, maxAge: '1y', index: false }),
   );
-  router.use('/assets', (_request, _response, next) => {
-    next(notThere());
+  router.use('/assets', () => {
+    throw notThere();
   });
   router.use(
     express.static(folder, {
@@ -25,11 +25,8 @@ export function clientFiles(folder: string): Router {
       setHeaders: (response) => response.setHeader('Cache-Control', 'no-cache'),
     }),
   );
-  router.get('/{*splat}', (request, response, next) => {
-    if (extname(request.path) !== '' || !existsSync(join(folder, 'index.html'))) {
-      next(notThere());
-      return;
-    }
+  router.get('/{*splat}', (request, response) => {
+    if (extname(request.path) !== '' || !existsSync(join(folder, 'index.html'))) throw notThere();
     response.setHeader('Cache-Control', 'no-cache');
     response.sendFile('index.html', { root: folder });
   });

@@ -27,7 +27,8 @@ export const requestLog =
     const id = randomUUID();
     response.setHeader('X-Request-Id', id);
     response.on('close', () => {
-      log.info(
+      const level = response.locals['quiet'] === true ? 'debug' : 'info';
+      log[level](
         {
           id,
           method: request.method,

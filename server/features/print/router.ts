@@ -1,35 +1,46 @@
-import { Router } from 'express';
+import { Router, type Request } from 'express';
 import { printChalkSheet, printPieces, printTiles } from '#shared/api/drafts.ts';
 import type { PrintRequest } from '#shared/api/requests.ts';
 import { addressLimit } from '../../http/address-limit.ts';
 import { attachment, fileName } from '../../http/file-name.ts';
-import { firstComeQueue } from '../../http/first-come-queue.ts';
-import { serve } from '../../http/serve.ts';
+import { type Download, serve } from '../../http/serve.ts';
 import type { Limits } from '../../settings.ts';
-import { chalkSheetOf, piecesOf, tilesOf } from './service.ts';
+import type { PrintOrder } from './print-order.ts';
+import type { Printer } from './printer.ts';
 
 /** Prints share one limit per address and one line to wait in, whatever is printed. */
-export function printRouter(limits: Limits): Router {
+export function printRouter(limits: Limits, printer: Printer): Router {
   const router = Router();
-  const queue = firstComeQueue(limits.printsWaiting);
   router.use('/api/prints', addressLimit(limits.printsPerMinute));
 
   const download = async (
-    wanted: PrintRequest,
-    words: readonly string[],
-    extension: string,
-    make: (wanted: PrintRequest) => Promise<Uint8Array>,
-  ) => ({
-    bytes: await queue(() => make(wanted)),
-    disposition: attachment(fileName([wanted.card.name, ...words], extension)),
+    order: PrintOrder,
+    request: Request,
+    name: string,
+  ): Promise<Download> => ({
+    bytes: await printer.print(order, () => !request.socket.destroyed),
+    disposition: attachment(name),
   });
 
-  serve(router, printTiles, (wanted) =>
-    download(wanted, [wanted.pieces, wanted.paper], 'pdf', tilesOf),
+  const named = ({ card }: PrintRequest, words: readonly string[], extension: string) =>
+    fileName([card.name, ...words], extension);
+
+  serve(router, printTiles, (wanted, request) =>
+    download(
+      { what: 'tiles', wanted },
+      request,
+      named(wanted, [wanted.pieces, wanted.paper], 'pdf'),
+    ),
   );
-  serve(router, printChalkSheet, (wanted) =>
-    download(wanted, ['chalk-sheet', wanted.paper], 'pdf', chalkSheetOf),
+  serve(router, printChalkSheet, (wanted, request) =>
+    download(
+      { what: 'chalk-sheet', wanted },
+      request,
+      named(wanted, ['chalk-sheet', wanted.paper], 'pdf'),
+    ),
   );
-  serve(router, printPieces, (wanted) => download(wanted, [wanted.pieces], 'svg', piecesOf));
+  serve(router, printPieces, (wanted, request) =>
+    download({ what: 'pieces', wanted }, request, named(wanted, [wanted.pieces], 'svg')),
+  );
   return router;
 }

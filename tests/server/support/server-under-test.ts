@@ -5,6 +5,7 @@ import { pino } from 'pino';
 import { inject } from 'vitest';
 import { buildApp } from '#server/app.ts';
 import { connect } from '#server/database/client.ts';
+import { openPrinter } from '#server/features/print/printer.ts';
 import { listen } from '#server/listen.ts';
 import type { Limits } from '#server/settings.ts';
 import { freePort } from '#server/ops/free-port.mjs';
@@ -40,10 +41,13 @@ export async function startServer(
   const databaseUrl = inject('clusterUrl').replace(/postgres$/, name);
   const { database, close } = connect(databaseUrl, () => undefined);
   const lines: string[] = [];
+  const limits = { ...roomy, ...options.limits };
+  const printer = openPrinter(limits.printsWaiting);
   const app = buildApp({
     database,
+    printer,
     log: pino({ base: null }, { write: (line) => void lines.push(line) }),
-    limits: { ...roomy, ...options.limits },
+    limits,
     overHttps: options.overHttps ?? false,
     trustedProxies: 0,
     screens: options.screens ?? ((_request, _response, next) => next()),
@@ -57,6 +61,7 @@ export async function startServer(
     databaseUrl,
     close: async () => {
       await stopListening();
+      await printer.close();
       await close();
       await asAdmin(`drop database if exists ${name} with (force)`);
     },
