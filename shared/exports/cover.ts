@@ -17,8 +17,8 @@ import { shorten } from './type-width.ts';
 
 /** Where the two squares stand on the cover, mm: the print tests measure them there. */
 export const testSquares = {
-  metric: { x: 10, y: 38, side: 100 },
-  inch: { x: 10, y: 142, side: 101.6 },
+  metric: { x: 10, y: 40, side: 100 },
+  inch: { x: 10, y: 144, side: 101.6 },
 } as const;
 
 export const selectionTitles: { readonly [S in Selection]: string } = {

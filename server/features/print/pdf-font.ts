@@ -1,3 +1,4 @@
+/// <reference path="./fontkit.d.ts" />
 import { deflateSync } from 'node:zlib';
 import fontkit, { type Font, type Glyph } from 'fontkit';
 import { type PDFContext, PDFHexString, PDFRawStream, type PDFRef } from 'pdf-lib';
