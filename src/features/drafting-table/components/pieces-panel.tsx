@@ -12,7 +12,8 @@ export const PiecesPanel = ({ draft, unit }: PiecesPanelProps) => {
   const { placed } = asDrafted(draft.pieces);
   const cloth = draft.pieces.reduce((sum, piece) => sum + piece.copies, 0);
   return (
-    <section aria-label="Pieces">
+    <section>
+      <h2 className="sr-only">Pieces</h2>
       <p>
         {`Draft ${draft.number}: ${draft.pieces.length} pieces, ${cloth} to cut. Sizes in ${unit} with allowances.`}
       </p>

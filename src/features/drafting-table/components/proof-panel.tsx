@@ -26,7 +26,8 @@ export const ProofPanel = ({ draft, lit, unit, dispatch }: ProofPanelProps) => {
   const [verdict, ...rest] = sentences(speak(proof.verdict, unit));
   const holding = proof.lines.filter((line) => line.holds).length;
   return (
-    <section aria-label="Proof" className="space-y-6">
+    <section className="space-y-6">
+      <h2 className="sr-only">Proof</h2>
       <div className="flex items-start gap-3">
         <VerdictMark holds={proof.holds} />
         <div>

@@ -18,7 +18,8 @@ export const StepsPanel = ({ draft, chosen, unit, dispatch }: StepsPanelProps) =
   const parts = [...new Set(draft.steps.map((step) => step.part))];
   const choose = (id: string | undefined) => dispatch({ type: 'step', step: id });
   return (
-    <section aria-label="Steps" className="space-y-6">
+    <section className="space-y-6">
+      <h2 className="sr-only">Steps</h2>
       {parts.map((part) => (
         <div key={part}>
           <h3 className="heading">{part}</h3>
