@@ -1,14 +1,6 @@
 import type { Edge, FinishedPiece } from '../drafting/piece.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
-import {
-  endOf,
-  endTangent,
-  pathCrossings,
-  pointAt,
-  startOf,
-  startTangent,
-  tangentAt,
-} from '../geometry/curve.ts';
+import { endOf, endTangent, pointAt, startOf, startTangent, tangentAt } from '../geometry/curve.ts';
 import {
   type Point,
   add,
@@ -71,27 +63,37 @@ export function follows({ path }: Edge, wanted: number | undefined, at: Point): 
   );
 }
 
-/** Whether a look outwards comes back to the seam line within a distance: the hollow is too narrow. */
-const meetsSeam = (piece: FinishedPiece, { at, out }: Look, within: number): boolean =>
-  piece.edges.some(({ path }) =>
-    pathCrossings(path, at, add(at, out)).some((place) => {
-      const away = dot(subtract(place.at, at), out);
-      return away > clearBound && away < within;
-    }),
-  );
+/** Places asked about between the allowance and the cutting line found beyond it. */
+const asked = [0.1, 0.3, 0.5, 0.7, 0.9, 1];
+
+/** Whether all that a look passes between two distances lies within the allowance of some seam line. */
+const filled = (
+  { piece, allowances }: Sight,
+  { at, out }: Look,
+  from: number,
+  until: number,
+): boolean =>
+  asked.every((share) => {
+    const here = add(at, scale(out, from + share * (until - from)));
+    return piece.edges.some(
+      ({ path }, k) =>
+        (nearestPlace(path, here)?.off ?? Infinity) <= (allowances[k] ?? 0) + clearBound,
+    );
+  });
 
 /**
  * How far the cutting line stands off at one place. Where the seam line bends inwards more tightly
- * than the allowance is wide, no parallel can follow it: there the cutting line found farther out is
- * rightly placed when it lies at the allowance from the nearest seam line, and none is needed where
- * the allowances of both sides of a hollow fill it.
+ * than the allowance is wide, no parallel can follow it: there the cutting line is rightly farther
+ * out where allowances of the seam lines beside fill all that lies between, and at the end of an
+ * edge where it belongs to the mitre.
  */
-function standOff({ piece, cut, allowances }: Sight, index: number, look: Look): number {
+function standOff(sight: Sight, index: number, look: Look): number {
+  const { piece, cut, allowances } = sight;
   const wanted = allowances[index] ?? 0;
   const reach = 2 * wanted + 20;
   const away = reachCut(cut, look.at, look.out, reach);
   if (away !== undefined && away <= wanted + clearBound) return away;
-  if (meetsSeam(piece, look, Math.min(away ?? reach, 2 * wanted + clearBound))) return wanted;
+  if (filled(sight, look, wanted, away ?? reach)) return wanted;
   if (away === undefined) return -inside;
   const hit = add(look.at, scale(look.out, away));
   const followed = piece.edges.some((edge, k) => follows(edge, allowances[k], hit));
