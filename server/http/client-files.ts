@@ -1,6 +1,6 @@
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
-import { extname } from 'node:path/posix';
+import { basename } from 'node:path/posix';
 import express, { Router } from 'express';
 import { RefusalError } from './refusal.ts';
 
@@ -26,7 +26,8 @@ export function clientFiles(folder: string): Router {
     }),
   );
   router.get('/{*splat}', (request, response) => {
-    if (extname(request.path) !== '' || !existsSync(join(folder, 'index.html'))) throw notThere();
+    if (basename(request.path).includes('.') || !existsSync(join(folder, 'index.html')))
+      throw notThere();
     response.setHeader('Cache-Control', 'no-cache');
     response.sendFile('index.html', { root: folder });
   });

@@ -36,6 +36,8 @@ async function buildServer(folder) {
 
 /** Builds beside the old build and swaps at the end, so that a running server is never half new. */
 await command(async () => {
+  // What is served is always the production build, also where the tests start it.
+  process.env['NODE_ENV'] = 'production';
   const fresh = join(keep, `build-${process.pid}`);
   const built = join(root, 'dist');
   try {

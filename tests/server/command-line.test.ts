@@ -1,0 +1,135 @@
+import { execFile } from 'node:child_process';
+import { mkdtemp, readFile, readdir, rm, writeFile } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { draftSchema } from '#shared/api/draft-reply.ts';
+import { refusal } from '#shared/api/problem-codes.ts';
+import { card, post } from './support/request-bodies.ts';
+import { type ServerUnderTest, startServer } from './support/server-under-test.ts';
+
+let folder: string;
+let server: ServerUnderTest;
+beforeAll(async () => {
+  folder = await mkdtemp(join(tmpdir(), 'draft-'));
+  server = await startServer();
+});
+afterAll(async () => {
+  await server.close();
+  await rm(folder, { recursive: true, force: true });
+});
+
+type Ended = { readonly code: number; readonly said: string; readonly told: string };
+
+function draft(...args: string[]): Promise<Ended> {
+  return new Promise((resolve) => {
+    const child = execFile(
+      'npm',
+      ['run', '--silent', 'draft', '--', ...args],
+      (_error, out, err) => {
+        resolve({ code: child.exitCode ?? -1, said: out, told: err });
+      },
+    );
+  });
+}
+
+async function file(name: string, content: unknown): Promise<string> {
+  const path = join(folder, name);
+  await writeFile(path, typeof content === 'string' ? content : JSON.stringify(content));
+  return path;
+}
+
+const order = async (measures: unknown, style: unknown = {}) => [
+  ...['--measures', await file('card.json', measures)],
+  ...['--style', await file('style.json', style)],
+  ...['--out', join(folder, 'out')],
+];
+
+describe('bad input ends with 2, and stderr names the field', () => {
+  it('nothing at all', async () => {
+    const { code, told } = await draft();
+    expect(code).toBe(2);
+    expect(told).toContain('--measures is missing');
+  });
+
+  it('a file that is not there, or is no JSON', async () => {
+    const absent = await draft('--measures', '/no/card.json', '--style', 's', '--out', folder);
+    expect(absent).toMatchObject({ code: 2, said: '' });
+    expect(absent.told).toContain('--measures: the file /no/card.json cannot be read');
+    const args = await order('{"bustGirth": 9');
+    expect((await draft(...args)).told).toMatch(/^--measures: the file .*card\.json is not JSON/);
+  });
+
+  it('an option or a paper nobody knows', async () => {
+    expect(await draft('--colour', 'red')).toMatchObject({ code: 2 });
+    const { code, told } = await draft(...(await order(card)), '--paper', 'A9');
+    expect(code).toBe(2);
+    expect(told).toContain('--paper must be A4 or Letter');
+  });
+
+  it.each([
+    ['a measure out of range', { ...card, bustGirth: 92 }, {}],
+    ['a missing measure', { ...card, hipGirth: undefined }, {}],
+    ['an unknown field', card, { sleeves: 2 }],
+    ['two measures that do not go together', { ...card, underbustGirth: 1000, bustGirth: 800 }, {}],
+    ['a style out of range', card, { kneeFinished: 200 }],
+  ])('%s, in the words the server uses', async (_case, measures, style) => {
+    const { code, told } = await draft(...(await order(measures, style)));
+    expect(code).toBe(2);
+    const reply = await post(`${server.address}/api/drafts`, { card: measures, style });
+    const { message, problems = [] } = refusal.parse(await reply.json());
+    expect(problems.length).toBeGreaterThan(0);
+    const lines = told.trim().split('\n');
+    expect(lines.map((line) => line.slice(0, line.indexOf(': ')))).toEqual(
+      problems.map((each) => each.field),
+    );
+    expect(lines.map((line) => line.slice(line.indexOf(': ') + 2)).join(' ')).toBe(message);
+  });
+
+  it('in inches for whoever asks for inches', async () => {
+    const { told } = await draft(...(await order({ ...card, bustGirth: 92 })), '--unit', 'in');
+    expect(told).toMatch(/between .* in and .* in/);
+  });
+
+  it('a folder that cannot be made', async () => {
+    const blocked = await file('blocked', '');
+    const args = await order(card);
+    const { code, told } = await draft(...args.slice(0, -1), join(blocked, 'out'));
+    expect(code).toBe(2);
+    expect(told).toContain('--out: the folder');
+  });
+});
+
+describe('a gown whose every proof line holds ends with 0', () => {
+  it('and leaves the four files of the contract', async () => {
+    const { code, said } = await draft(...(await order(card)), '--paper', 'Letter');
+    expect(code).toBe(0);
+    expect(said.trim()).not.toBe('');
+    const out = join(folder, 'out');
+    expect((await readdir(out)).sort()).toEqual([
+      'draft.json',
+      'pieces.svg',
+      'proof.json',
+      'tiles.pdf',
+    ]);
+    const drawn = draftSchema.parse(JSON.parse(await readFile(join(out, 'draft.json'), 'utf8')));
+    expect(JSON.parse(await readFile(join(out, 'proof.json'), 'utf8'))).toEqual(drawn.proof);
+    expect((await readFile(join(out, 'tiles.pdf'))).subarray(0, 5).toString()).toBe('%PDF-');
+  });
+});
+
+describe('the schema of each file can be asked for', () => {
+  it.each([
+    ['card', 'bustGirth'],
+    ['style', 'topDrop'],
+    ['rules', 'sideShare'],
+  ])('%s has %s', async (name, key) => {
+    const { code, said } = await draft('--schema', name);
+    expect(code).toBe(0);
+    expect(JSON.parse(said)).toHaveProperty(['properties', key]);
+  });
+
+  it('and another is refused', async () => {
+    expect(await draft('--schema', 'gown')).toMatchObject({ code: 2, said: '' });
+  });
+});
