@@ -78,7 +78,7 @@ export function tableState(state: TableState, action: TableAction): TableState {
     case 'cleared':
       return { ...emptyTable, unit: state.unit };
     case 'panel':
-      return { ...state, panel: action.panel };
+      return { ...state, panel: action.panel, seam: undefined };
     case 'step':
       return { ...state, step: action.step };
     case 'seam':

@@ -1,5 +1,6 @@
 import { draftGown } from '../../../shared/engine/draft-gown.ts';
 import { houseRulePresets } from '../../../shared/drafting/house-rule-presets.ts';
+import type { FinishedPiece } from '../../../shared/drafting/piece.ts';
 import { levelTitles } from '../../../shared/exports/level-titles.ts';
 import { pathData } from '../../../shared/exports/path-data.ts';
 import { spread, type SpreadPiece } from '../../../shared/exports/spread.ts';
@@ -21,27 +22,42 @@ const card = {
 /** Room above and beside the pieces for the rod, mm. */
 const margin = 46;
 
-/** Room on the right for the names of the levels, mm. */
-const forNames = 130;
+/** A drawing for a width of page: which pieces it shows, and how large its letters are in mm. */
+type Sheet = { readonly id: string; readonly flare: boolean; readonly letters: number };
+
+const sheets: readonly Sheet[] = [
+  { id: 'gown', flare: true, letters: 26 },
+  { id: 'gown-narrow', flare: false, letters: 34 },
+];
 
 /**
- * The front page's drawing as an SVG of one symbol, `gown`, that takes its colours from the page that
- * uses it. Made when the screens are built, so that it is never older than the engine.
+ * The front page's drawings as an SVG of symbols that take their colours from the page that uses them.
+ * Made when the screens are built, so that they are never older than the engine.
  */
 export function demoGown(): string {
   const { pieces } = draftGown({ card, style: {}, rules: houseRulePresets.balanced });
-  const shown = pieces.filter((piece) => piece.part !== 'flare' || piece.side === 'front');
-  const { placed, width, height } = spread(shown);
-  const [w, h] = [Math.ceil(width + margin + forNames), Math.ceil(height + margin)];
   return [
     '<svg xmlns="http://www.w3.org/2000/svg">',
-    `<symbol id="gown" viewBox="0 0 ${w} ${h}">`,
-    levels(placed, w),
+    ...sheets.map((sheet) => symbol(pieces, sheet)),
+    '</svg>\n',
+  ].join('\n');
+}
+
+function symbol(pieces: readonly FinishedPiece[], { id, flare, letters }: Sheet): string {
+  const { placed, width, height } = spread(
+    pieces.filter((piece) => piece.part !== 'flare' || (flare && piece.side === 'front')),
+  );
+  // Names of the levels stand to the right of the pieces.
+  const [w, h] = [Math.ceil(width + margin + letters * 5), Math.ceil(height + margin)];
+  return [
+    `<symbol id="${id}" viewBox="0 0 ${w} ${h}">`,
+    levels(placed, w, letters),
     `<g transform="translate(${margin} ${margin})" stroke-linejoin="round">`,
     ...placed.map(drawn),
+    ...litSides(placed),
     '</g>',
     `<path fill="none" stroke="var(--brass)" stroke-width="2" d="${rod(w, h)}"/>`,
-    '</symbol></svg>\n',
+    '</symbol>',
   ].join('\n');
 }
 
@@ -58,8 +74,21 @@ function drawn({ piece, translate }: SpreadPiece): string {
   ].join('');
 }
 
+/** The side seams of front and back lit as one: what the proof is about. */
+const litSides = (placed: readonly SpreadPiece[]): string[] =>
+  placed
+    .filter(({ piece }) => piece.part === 'middle')
+    .flatMap(({ piece, translate }) =>
+      piece.edges
+        .filter((edge) => edge.name === 'side')
+        .map(
+          (edge) =>
+            `<path fill="none" stroke="var(--verdigris)" stroke-width="6" transform="translate(${translate.x.toFixed(1)} ${translate.y.toFixed(1)})" d="${pathData(edge.path)}"/>`,
+        ),
+    );
+
 /** The body's levels hang from the rod as hairlines with their names. */
-function levels(placed: readonly SpreadPiece[], width: number): string {
+function levels(placed: readonly SpreadPiece[], width: number, letters: number): string {
   const seen = new Map<string, number>();
   for (const { piece, translate } of placed) {
     if (piece.part === 'flare') continue;
@@ -73,7 +102,7 @@ function levels(placed: readonly SpreadPiece[], width: number): string {
     .map(
       ([name, y]) =>
         `<path stroke="var(--level)" stroke-width="1.6" d="M${margin} ${y.toFixed(1)}H${width}"/>` +
-        `<text fill="var(--brass)" font-size="26" text-anchor="end" x="${width - 8}" y="${(y - 7).toFixed(1)}">${name}</text>`,
+        `<text fill="var(--brass)" font-size="${letters}" text-anchor="end" x="${width - 8}" y="${(y - 7).toFixed(1)}">${name}</text>`,
     )
     .join('');
 }

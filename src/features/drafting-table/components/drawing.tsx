@@ -145,7 +145,7 @@ export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
         </svg>
         <p
           id="drawing-keys"
-          className="absolute top-8 left-9 hidden rounded-one bg-cloth px-2 text-sm text-slate group-focus-visible:block"
+          className="absolute bottom-12 left-9 hidden rounded-one bg-cloth px-2 text-sm text-slate sm:group-focus-visible:block"
         >
           Arrow keys move, + and − zoom, 0 fits, N and P walk the seams, Tab reaches the handles
         </p>

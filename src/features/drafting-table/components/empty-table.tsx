@@ -2,6 +2,7 @@ import type { Dispatch } from 'react';
 
 import { coreMeasures } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
+import { speak } from '#shared/units/speak.ts';
 
 import { Button } from '../../../ui/button.tsx';
 import { valueOf } from '../fields.ts';
@@ -17,13 +18,25 @@ type EmptyTableProps = {
 /** Before there is a drawing: the rod fills with the measures as they are typed. */
 export const EmptyTable = ({ state, dispatch, onType }: EmptyTableProps) => {
   const taken = coreMeasures.filter((key) => valueOf(state.entries[`card.${key}`]) !== undefined);
+  const open = coreMeasures.filter((key) => !taken.includes(key));
+  const faults = state.drawn.problems.filter((problem) => problem.severity === 'error');
   return (
     <div className="flex min-h-0 grow flex-col items-start gap-4 overflow-y-auto p-4 sm:p-10">
       <MeasureRod taken={taken} />
       <p className="text-xl font-semibold sm:text-2xl">
-        {taken.length === 0 ? 'Type ten measures' : `${taken.length} of ten measures`}
+        {taken.length === 0 ? 'Type ten measures' : `${taken.length} of 10 measures`}
       </p>
-      {taken.length === 0 ? (
+      {taken.length > 0 && open.length > 0 && (
+        <p className="max-w-prose">
+          {`Still open: ${open.map((key) => measureGuide[key].label.toLowerCase()).join(', ')}.`}
+        </p>
+      )}
+      {faults.map((problem) => (
+        <p key={`${problem.field} ${problem.code}`} className="figures max-w-prose text-madder">
+          {speak(problem.said, state.unit)}
+        </p>
+      ))}
+      {taken.length === 0 && (
         <>
           <p className="max-w-prose">
             The pieces of a strapless gown appear here, proven to sew together, and follow every
@@ -37,13 +50,6 @@ export const EmptyTable = ({ state, dispatch, onType }: EmptyTableProps) => {
             <Samples dispatch={dispatch} />
           </div>
         </>
-      ) : (
-        <p className="max-w-prose">
-          {`Still open: ${coreMeasures
-            .filter((key) => !taken.includes(key))
-            .map((key) => measureGuide[key].label.toLowerCase())
-            .join(', ')}.`}
-        </p>
       )}
     </div>
   );

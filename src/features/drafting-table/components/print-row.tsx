@@ -15,9 +15,9 @@ export const PrintRow = ({ title, note, sheets, order }: PrintRowProps) => {
   const print = usePrint();
   return (
     <section aria-label={title} className="border-b border-rule py-3">
-      <div className="flex items-center justify-between gap-4">
-        <p className="text-sm text-slate">{note}</p>
-        <p className="figures flex shrink-0 items-center gap-3">
+      <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1 sm:flex-nowrap">
+        <p className="basis-full text-sm text-slate sm:basis-auto">{note}</p>
+        <p className="figures ml-auto flex shrink-0 items-center gap-3">
           <span>{sheets === 1 ? '1 sheet' : `${sheets} sheets`}</span>
           <Button
             kind="primary"

@@ -1,5 +1,4 @@
-import { add } from '#shared/geometry/point.ts';
-import { pathLength, stationAtLength } from '#shared/geometry/curve.ts';
+import { add, type Point } from '#shared/geometry/point.ts';
 
 import type { Layout } from '../canvas/layout.ts';
 import { toScreen, type Size, type View } from '../canvas/view.ts';
@@ -12,17 +11,14 @@ type SeamCalloutProps = {
   readonly size: Size;
 };
 
-/** Both lengths of the lit seam, beside the middle of its first edge. */
+/** Both lengths of the lit seam, under its two edges so that it hides neither. */
 export const SeamCallout = ({ seam, layout, view, size }: SeamCalloutProps) => {
-  const first = seam.edges[0];
-  const placed = layout.placed.find(({ piece }) => piece.name === first?.piece);
-  const edge = placed?.piece.edges.find(({ name }) => name === first?.edge);
-  if (placed === undefined || edge === undefined) return null;
-  const middle = stationAtLength(edge.path, pathLength(edge.path) / 2);
-  if (middle === undefined) return null;
-  const at = toScreen(view, add(middle.at, placed.at));
-  const left = Math.min(Math.max(at.x + 14, 34), Math.max(34, size.width - 250));
-  const top = Math.min(Math.max(at.y - 24, 34), Math.max(34, size.height - 110));
+  const ends = seam.edges.flatMap((ref) => endsOf(ref, layout)).map((at) => toScreen(view, at));
+  if (ends.length === 0) return null;
+  const middle = ends.reduce((sum, { x }) => sum + x, 0) / ends.length;
+  const low = Math.max(...ends.map(({ y }) => y)) + 14;
+  const left = Math.min(Math.max(middle - 120, 34), Math.max(34, size.width - 250));
+  const top = Math.min(Math.max(low, 34), Math.max(34, size.height - 120));
   return (
     <div
       aria-hidden="true"
@@ -36,3 +32,10 @@ export const SeamCallout = ({ seam, layout, view, size }: SeamCalloutProps) => {
     </div>
   );
 };
+
+function endsOf(ref: LitSeam['edges'][number], layout: Layout): Point[] {
+  const placed = layout.placed.find(({ piece }) => piece.name === ref.piece);
+  const edge = placed?.piece.edges.find(({ name }) => name === ref.edge);
+  if (placed === undefined || edge === undefined) return [];
+  return edge.path.flatMap(({ from, to }) => [add(from, placed.at), add(to, placed.at)]);
+}

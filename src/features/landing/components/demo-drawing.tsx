@@ -6,14 +6,23 @@ export const DemoDrawing = () => (
   <figure>
     <svg
       viewBox="0 0 1600 975"
-      className="h-auto w-full text-ink"
+      className="hidden h-auto w-full text-ink sm:block"
       role="img"
       aria-label="Front, back and flare of a gown as drafted, hanging from a measuring rod"
     >
       <use href="/demo-gown.svg#gown" />
     </svg>
+    <svg
+      viewBox="0 0 1000 960"
+      className="h-auto w-full text-ink sm:hidden"
+      role="img"
+      aria-label="Front and back of a gown as drafted, hanging from a measuring rod"
+    >
+      <use href="/demo-gown.svg#gown-narrow" />
+    </svg>
     <figcaption className="pt-2 text-sm text-slate">
-      Drawn by Ellwand for a sample body: cutting lines solid, seam lines dashed, marks every inch.
+      Drawn by Ellwand for a sample body, marks every inch. The two green seams are sewn together,
+      and are of one length.
     </figcaption>
   </figure>
 );
