@@ -31,7 +31,7 @@ const packageHomes = {
   zod: '^(shared/api/|src/lib/|server/)',
   pg: '^(server/database/|tests/)',
   'drizzle-orm': '^(server/database/|server/features/[^/]+/repository\\.ts$|tests/)',
-  express: '^(server/(app|dev)\\.ts$|server/http/|server/features/[^/]+/router\\.ts$|tests/)',
+  express: '^(server/[^/]+\\.ts$|server/http/|server/features/[^/]+/router\\.ts$|tests/)',
   'pdf-lib': '^(server/features/print/|tests/)',
   fontkit: '^(server/features/print/|tests/)',
   react: '^(src/|tests/)',
