@@ -12,3 +12,8 @@ export const assembly = [
   'Trim each sheet along its left and top lines where they name a neighbour.',
   'Lay it on that neighbour’s glue strip, lozenge on lozenge: first along the rows, then row to row.',
 ] as const;
+
+/** The same in two lines, for a page whose room belongs to the figures. */
+export const chalkCautions =
+  'Shears, pins and irons hurt: mind them, and bind boning ends. Net and tulle burn fast; a narrow hem ' +
+  'trips on stairs. Local rules and a licensed practitioner’s word come before this sheet.';

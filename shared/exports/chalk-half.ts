@@ -1,10 +1,9 @@
 import type { LevelName, Piece } from '../drafting/piece.ts';
-import { movedPath, shift } from '../geometry/motion.ts';
-import type { Path } from '../geometry/path.ts';
+import { type Path, cubic, line } from '../geometry/path.ts';
+import { type Point, point } from '../geometry/point.ts';
 import type { ChalkPoint } from './chalk-points.ts';
 import type { Mark } from './drawing.ts';
 import { outline, pens, stroke, strokes, words } from './marks.ts';
-import { shrink } from './page-plan.ts';
 
 /** One quarter: four millimetres of body are one of paper. */
 export const quarter = 0.25;
@@ -13,13 +12,23 @@ export const quarter = 0.25;
 const numberSize = 2.3;
 const numberOff = 2.4;
 
+/** Where a place of the half-body frame stands on the page. */
+export type OnPage = (at: Point) => Point;
+
 type DrawnHalf = {
   readonly title: string;
   readonly pieces: readonly Piece[];
   readonly points: readonly ChalkPoint[];
-  /** Where the centre line stands on the page. */
-  readonly x: number;
+  readonly onPage: OnPage;
 };
+
+/** A path with each of its points, handles too, put on the page. */
+const pathOnPage = (path: Path, onPage: OnPage): Path =>
+  path.map((each) =>
+    each.kind === 'line'
+      ? line(onPage(each.from), onPage(each.to))
+      : cubic(onPage(each.from), onPage(each.c1), onPage(each.c2), onPage(each.to)),
+  );
 
 /** Letters that stand for the levels, on the drawing and in the table. */
 export const levelLetters: { readonly [L in LevelName]: string } = {
@@ -34,11 +43,12 @@ export const levelLetters: { readonly [L in LevelName]: string } = {
   hem: 'E',
 };
 
-/** One half of the gown, with the body's height 0 at `y` on the page. */
-export function drawHalf({ title, pieces, points, x }: DrawnHalf, y: number): readonly Mark[] {
-  const small = (path: Path): Path => shrink(path, quarter, { x, y });
+/** One half of the gown at quarter scale, its points dotted and numbered. */
+export function drawHalf({ title, pieces, points, onPage }: DrawnHalf): readonly Mark[] {
+  const small = (path: Path): Path => pathOnPage(path, onPage);
   const seams = pieces.map((each) => each.edges.flatMap((edge) => edge.path));
   const top = Math.min(...points.map((each) => each.at.y));
+  const corner = onPage(point(0, top));
   return [
     ...seams.map((each) => outline({ width: 0.35 }, small(each))),
     strokes(
@@ -47,21 +57,23 @@ export function drawHalf({ title, pieces, points, x }: DrawnHalf, y: number): re
         each.darts.flatMap((dart) => [small(dart.centreLeg), small(dart.sideLeg)]),
       ),
     ),
-    words(title, x, y + top * quarter - 4, 3.6, { heavy: true }),
+    words(title, corner.x, corner.y - 4, 3.6, { heavy: true }),
     strokes(
       { width: 0.9 },
-      ...points.map(({ at }) =>
-        movedPath(stroke(-0.45, 0, 0.45, 0), shift(x + at.x * quarter, y + at.y * quarter)),
-      ),
+      ...points.map((each) => {
+        const { x, y } = onPage(each.at);
+        return stroke(x - 0.45, y, x + 0.45, y);
+      }),
     ),
-    ...points.map(({ number, at, aside }) =>
-      words(
+    ...points.map(({ number, at, aside }) => {
+      const { x, y } = onPage(at);
+      return words(
         String(number),
-        x + at.x * quarter + aside.x * numberOff,
-        y + at.y * quarter + aside.y * numberOff + numberSize * 0.33,
+        x + aside.x * numberOff,
+        y + aside.y * numberOff + numberSize * 0.33,
         numberSize,
         { anchor: 'middle' },
-      ),
-    ),
+      );
+    }),
   ];
 }

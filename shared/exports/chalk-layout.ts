@@ -3,7 +3,7 @@ import type { Piece, Side } from '../drafting/piece.ts';
 import type { Draft } from '../engine/draft.ts';
 import type { Paper } from '../sheets/papers.ts';
 import { printerMargin } from '../sheets/tile-grid.ts';
-import { quarter } from './chalk-half.ts';
+import { type OnPage, quarter } from './chalk-half.ts';
 import { type ChalkPoint, chalkPoints } from './chalk-points.ts';
 import type { Column } from './row-flow.ts';
 
@@ -24,6 +24,7 @@ export type Half = {
   readonly points: readonly ChalkPoint[];
   readonly x: number;
   readonly right: number;
+  readonly onPage: OnPage;
   /** The blank cloth between hip and knee, where its own table stands; none where it is too narrow. */
   readonly inside: readonly Column[];
 };
@@ -31,8 +32,10 @@ export type Half = {
 export type ChalkLayout = {
   readonly front: Half;
   readonly back: Half;
-  /** Height of the body's 0 on the page, and of a level. */
+  /** Where a height of the body stands on the page. */
   readonly yOf: (y: number) => number;
+  /** Whether the stretch below the hip is drawn shorter than a quarter, to fit the page. */
+  readonly shortened: boolean;
   readonly columns: readonly Column[];
 };
 
@@ -97,31 +100,54 @@ function columnsBetween(from: number, to: number, y: number, bottom: number): re
 }
 
 /**
- * Where the two halves, and the columns of figures, stand on the page, down to `bottom`. On the widest
- * bodies the halves run into one another at the hip, for the scale stays a quarter.
+ * Where the two halves, and the columns of figures, stand on the page, down to `bottom`, with
+ * `reserve` mm kept free of drawing above it. On the widest
+ * bodies the halves run into one another at the hip, and on the tallest the plain stretch from hip to
+ * knee is drawn shorter; the figures stay.
  */
-export function layChalkSheet(draft: Draft, paper: Paper, bottom: number): ChalkLayout {
+export function layChalkSheet(
+  draft: Draft,
+  paper: Paper,
+  bottom: number,
+  reserve: number,
+): ChalkLayout {
   const left = printerMargin;
   const edge = paper.width - printerMargin;
   const front = halfOf(draft, 'front', 1);
   const back = halfOf(draft, 'back', front.points.length + 1);
   const heights = [...front.points, ...back.points].map((each) => each.at.y);
   const top = Math.min(...heights);
-  const yOf = (y: number): number => drawingsTop + (y - top) * quarter;
+  const { hip } = draft.levels;
+  const lowest = Math.max(...heights);
+  const plain = (y: number): number => drawingsTop + (y - top) * quarter;
+  const below = Math.min(1, (bottom - reserve - plain(hip)) / (plain(lowest) - plain(hip)));
+  const yOf = (y: number): number =>
+    y <= hip ? plain(y) : plain(hip) + (y - hip) * quarter * below;
+  const onPageFrom =
+    (x: number): OnPage =>
+    (at) => ({ x: x + at.x * quarter, y: yOf(at.y) });
   const room = edge - left - lettersRoom - widthOf(front) - widthOf(back);
   const frontX = left + lettersRoom;
   const backX = frontX + widthOf(front) + Math.min(between, room);
   const right = backX + widthOf(back);
-  const drawingsBottom = yOf(Math.max(...heights));
+  const drawingsBottom = yOf(lowest);
   return {
     front: {
       ...front,
       x: frontX,
       right: frontX + widthOf(front),
+      onPage: onPageFrom(frontX),
       inside: insideOf(front, draft, frontX, yOf),
     },
-    back: { ...back, x: backX, right, inside: insideOf(back, draft, backX, yOf) },
+    back: {
+      ...back,
+      x: backX,
+      right,
+      onPage: onPageFrom(backX),
+      inside: insideOf(back, draft, backX, yOf),
+    },
     yOf,
+    shortened: below < 1,
     columns: [
       ...columnsBetween(right + 6, edge, drawingsTop - 8, drawingsBottom),
       ...columnsBetween(left, edge, drawingsBottom + 4, bottom),

@@ -56,34 +56,70 @@ export const pointRows = (
   }),
 ];
 
-/** The flare as it is struck: two arcs from one point, and how far along them it goes. */
+type Sector = {
+  readonly title: string;
+  readonly inner: number;
+  readonly outer: number;
+  readonly knee: number;
+  readonly hem: number;
+  readonly chord: number;
+};
+
+/** A flare piece as it is struck with chalk on a string; no answer for a piece without knee and hem. */
+function sectorOf(piece: Piece): readonly Sector[] {
+  const hem = piece.edges.find((each) => each.kind === 'hem');
+  const knee = piece.edges.find((each) => each.name.startsWith('knee'));
+  const [from, to] = hem ? [startOf(hem.path), endOf(hem.path)] : [];
+  const start = knee ? startOf(knee.path) : undefined;
+  if (!hem || !knee || !from || !to || !start) return [];
+  const apex = point(0, 0);
+  return [
+    {
+      title: piece.title,
+      inner: distance(apex, start),
+      outer: distance(apex, from),
+      knee: pathLength(knee.path),
+      hem: pathLength(hem.path),
+      chord: distance(from, to),
+    },
+  ];
+}
+
+/** The flare: two arcs struck from one point, then how far along them each piece goes. */
 export function flareRows(pieces: readonly Piece[], unit: Unit): readonly Row[] {
-  return pieces.flatMap((piece): readonly Row[] => {
-    const hem = piece.edges.find((each) => each.kind === 'hem');
-    const knee = piece.edges.find((each) => each.name.startsWith('knee'));
-    const from = hem ? startOf(hem.path) : undefined;
-    const to = hem ? endOf(hem.path) : undefined;
-    const inner = knee ? startOf(knee.path) : undefined;
-    if (!hem || !knee || !from || !to || !inner) return [];
-    const apex = point(0, 0);
-    const [near, far] = [distance(apex, inner), distance(apex, from)];
-    const pair = (name: string, mm: number): Row => ({
-      kind: 'pair',
-      name,
-      value: chalked(mm, unit),
-    });
+  const pair = (name: string, mm: number): Row => ({
+    kind: 'pair',
+    name,
+    value: chalked(mm, unit),
+  });
+  const sectors = pieces.flatMap(sectorOf);
+  const near = (a: Sector, b: Sector): boolean =>
+    Math.abs(a.hem - b.hem) < 0.1 && Math.abs(a.inner - b.inner) < 0.1;
+  const different = sectors.filter(
+    (each, i) => sectors.findIndex((other) => near(each, other)) === i,
+  );
+  return different.flatMap((sector, i): readonly Row[] => {
+    const before = different[i - 1];
+    const same = sectors
+      .filter((each) => near(each, sector))
+      .map((each) => each.title.replace('Flare, ', ''));
+    const struck: readonly Row[] =
+      before &&
+      Math.abs(before.inner - sector.inner) < 0.1 &&
+      Math.abs(before.outer - sector.outer) < 0.1
+        ? []
+        : [
+            { kind: 'heading', text: `Flare, struck from one point, ${unit}` },
+            pair('radius to the knee seam', sector.inner),
+            pair('length, knee to hem', sector.outer - sector.inner),
+            pair('radius to the hem', sector.outer),
+          ];
     return [
-      { kind: 'heading', text: `${piece.title}, ${unit}` },
-      {
-        kind: 'note',
-        text: piece.cut.includes('fold') ? `${piece.cut}, from the fold` : piece.cut,
-      },
-      pair('radius to the knee seam', near),
-      pair('length, knee to hem', far - near),
-      pair('radius to the hem', far),
-      pair('along the knee seam', pathLength(knee.path)),
-      pair('along the hem', pathLength(hem.path)),
-      pair('straight across the hem', distance(from, to)),
+      ...struck,
+      { kind: 'note', text: same.join('; ') },
+      pair('along the knee seam', sector.knee),
+      pair('along the hem', sector.hem),
+      pair('straight across the hem', sector.chord),
     ];
   });
 }

@@ -2,7 +2,7 @@ import type { Draft } from '../engine/draft.ts';
 import { type Paper, type PaperName, papers } from '../sheets/papers.ts';
 import { printerMargin } from '../sheets/tile-grid.ts';
 import type { Unit } from '../units/said.ts';
-import { cuttingCautions } from './cautions.ts';
+import { chalkCautions } from './cautions.ts';
 import { drawHalf, levelLetters, quarter } from './chalk-half.ts';
 import { type ChalkLayout, type Half, layChalkSheet } from './chalk-layout.ts';
 import { struckLevels } from './chalk-points.ts';
@@ -91,26 +91,42 @@ const tablesParted =
     return free && [...own.flatMap((each) => each.marks), ...free];
   };
 
-/** All tables in the largest print that fits; on the largest bodies without what the pieces repeat. */
-function tables(draft: Draft, { front, back, columns }: ChalkLayout, unit: Unit): readonly Mark[] {
-  const halves = [front, back];
+/** Room kept free for figures below the drawings, mm: none first, then more on bodies with many. */
+const reserves = [0, 30, 60, 90];
+
+type Laid = { readonly layout: ChalkLayout; readonly marks: readonly Mark[] };
+
+/** Drawings and tables with the largest print that fits; on the largest bodies without what the pieces repeat. */
+function layOut(draft: Draft, paper: Paper, bottom: number, unit: Unit): Laid {
   const flare = draft.pieces.filter((each) => each.part === 'flare');
   const needed = [...levelRows(draft, unit), ...flareRows(flare, unit)];
   const facts = [...needed, ...pieceRows(draft.pieces), ...allowanceRows(draft, unit)];
-  const marks =
-    tablesInside(halves, columns, facts, unit) ??
-    largest(steps, tablesParted(halves, columns, facts, unit)) ??
-    largest(steps, tablesParted(halves, columns, needed, unit));
-  if (!marks) throw new Error('The chalk sheet has more figures than one page holds.');
-  return marks;
+  const layouts = reserves.map((reserve) => layChalkSheet(draft, paper, bottom, reserve));
+  const first = (set: (layout: ChalkLayout) => readonly Mark[] | undefined): Laid | undefined => {
+    for (const layout of layouts) {
+      const marks = set(layout);
+      if (marks) return { layout, marks };
+    }
+    return undefined;
+  };
+  const parted = (rows: readonly Row[]): Laid | undefined =>
+    largest(steps, (step) =>
+      first(({ front, back, columns }) => tablesParted([front, back], columns, rows, unit)(step)),
+    );
+  const laid =
+    first(({ front, back, columns }) => tablesInside([front, back], columns, facts, unit)) ??
+    parted(facts) ??
+    parted(needed);
+  if (!laid) throw new Error('The chalk sheet has more figures than one page holds.');
+  return laid;
 }
 
 function sheet(draft: Draft, paper: Paper, unit: Unit): readonly Mark[] {
   const left = printerMargin;
   const width = paper.width - 2 * printerMargin;
-  const cautions = wrap(cuttingCautions, cautionSize, width).length * cautionSize * 1.32;
+  const cautions = wrap(chalkCautions, cautionSize, width).length * cautionSize * 1.32;
   const bottom = paper.height - printerMargin - cautions - 2;
-  const layout = layChalkSheet(draft, paper, bottom);
+  const { layout, marks } = layOut(draft, paper, bottom, unit);
   return [
     ...rod(left, printerMargin, width, unit, quarter),
     words('Chalk sheet', left, 23, 7.5, { heavy: true }),
@@ -118,15 +134,17 @@ function sheet(draft: Draft, paper: Paper, unit: Unit): readonly Mark[] {
     words('Ellwand', left + width, 23, 6, { anchor: 'end', heavy: true, grey: 0.3 }),
     words('Quarter scale, do not cut.', left, 29, 4, { heavy: true }),
     words(
-      'Figures are full size: out from the centre line, then up ↑ or down ↓ from the level.',
+      layout.shortened
+        ? 'Drawn shorter below the hip. Figures are full size: out from the centre line, ↑ or ↓ from the level.'
+        : 'Figures are full size: out from the centre line, then up ↑ or down ↓ from the level.',
       left + 48,
       29,
       3.4,
     ),
     ...levelTicks(draft, layout),
-    ...[layout.front, layout.back].flatMap((half) => drawHalf(half, layout.yOf(0))),
-    ...tables(draft, layout, unit),
-    ...paragraph(cuttingCautions, left, bottom + 2, width, cautionSize).marks,
+    ...[layout.front, layout.back].flatMap(drawHalf),
+    ...marks,
+    ...paragraph(chalkCautions, left, bottom + 2, width, cautionSize).marks,
   ];
 }
 
