@@ -7,12 +7,12 @@ import type { LevelName, Piece, Side } from '../../drafting/piece.ts';
 import { xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
 import { type FlarePlan, flarePieces, flareRadius, planFlare } from './flare.ts';
-import { drawTop } from './draw-top.ts';
+import { backEdgeIsHigh, drawTop } from './draw-top.ts';
 import { gownHandles } from './handles.ts';
 import type { Half } from './half.ts';
 import { middlePiece } from './middle.ts';
 import { narrateHalf, warnOfShift } from './narrate-halves.ts';
-import { pairHalves } from './pair-halves.ts';
+import { type PairInputs, type PairedHalves, pairHalves } from './pair-halves.ts';
 import { finishedQuarters, wantedGirths } from './quarters.ts';
 import type { SideHeights } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
@@ -68,7 +68,7 @@ export function drawGown(
     front: finishedQuarters('front', body, style, rules, bodyLevels, seam),
     back: finishedQuarters('back', body, style, rules, bodyLevels, seam),
   };
-  const pair = pairHalves({ quarters, levels, style, rules, frontAxis: bodyLevels.bustPointX });
+  const pair = pairOpened({ quarters, levels, style, rules, frontAxis: bodyLevels.bustPointX });
   const depth = style.flareLength;
   const inner = flareRadius(style.kneeFinished, style.flareFraction);
   const flare = {
@@ -106,10 +106,18 @@ export function drawGown(
   };
 }
 
+/** Opens the back above the bust where the top line then crosses high enough; else the front takes it. */
+function pairOpened(inputs: Omit<PairInputs, 'backOpens'>): PairedHalves {
+  const opened = pairHalves({ ...inputs, backOpens: true });
+  const { opening } = opened.contour.back;
+  if (opening === 0 || backEdgeIsHigh(opened, opening, inputs.style, inputs.rules)) return opened;
+  return pairHalves({ ...inputs, backOpens: false });
+}
+
 const chestSide = (half: Half): number => xAt(half.line, half.heights.underarm);
 
 type Shared = {
-  readonly pair: ReturnType<typeof pairHalves>;
+  readonly pair: PairedHalves;
   readonly quarters: {
     readonly front: ReturnType<typeof finishedQuarters>;
     readonly back: ReturnType<typeof finishedQuarters>;

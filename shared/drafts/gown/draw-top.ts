@@ -77,6 +77,26 @@ export function drawTop(
   };
 }
 
+/** The back opens above the bust only where its edge stands at least this far over bust level. */
+const backEdgeOver = 30;
+
+/** Whether the back's top line, drawn with its opening, crosses it high enough over bust level. */
+export function backEdgeIsHigh(
+  { front, back }: { readonly front: Half; readonly back: Half },
+  opening: number,
+  style: GownStyle,
+  rules: HouseRules,
+): boolean {
+  const points = topLinePoints(back, front, style);
+  const bust = heightOn(back, 'bust', back.axis);
+  const peak = Math.min(points.centre.y, points.side.y);
+  const { legs } =
+    style.shaping === 'princess'
+      ? princessAbove(back.axis, bust, opening, peak)
+      : topDart(back.axis, bust, opening, peak, rules.dartClearance);
+  return bust - topLine(points, legs).crossing >= backEdgeOver;
+}
+
 const openingOf = (
   half: Half,
   wanted: number,

@@ -18,8 +18,6 @@ export type PairedHalves = {
 /** The dart of the middle ends at least this far above the hip; the back's is longer by `backLonger`. */
 const aboveHip = 25;
 const backLonger = 20;
-/** The back opens above the bust only where its edge stands at least this far over bust level. */
-const backEdgeOver = 30;
 const roundsAtMost = 24;
 /** From this round on the slope moves half way only, which settles the few bodies that swing. */
 const dampedFrom = 4;
@@ -42,6 +40,8 @@ export type PairInputs = {
   readonly rules: HouseRules;
   /** Distance of the front's princess or dart from the centre: half the bust span. */
   readonly frontAxis: number;
+  /** Whether the back may open above the bust: only where its edge stands high enough over bust level. */
+  readonly backOpens: boolean;
 };
 
 /** One dart, or two where one would be wider than the house sews (or, in a top, too blunt at its tip). */
@@ -72,7 +72,7 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
     { bust: quarters.front.bust.value, chest: quarters.front.chest.value },
     { bust: quarters.back.bust.value, chest: quarters.back.chest.value },
     levels.bust - levels.underarm,
-    backOpens(inputs, widths.back),
+    inputs.backOpens,
   );
   const tip = (longer: number): number =>
     Math.min(levels.waist + style.dartLength + longer, levels.hip - aboveHip);
@@ -116,13 +116,4 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
   refuseCrowdedIntakes(front);
   refuseCrowdedIntakes(back);
   return { front, back, contour };
-}
-
-/** Whether the back's top edge stands high enough over bust level, at its princess, to be opened. */
-function backOpens({ levels, style }: PairInputs, widths: QuarterWidths): boolean {
-  const centre = levels.waist - style.backDepth;
-  const share = widths.underbust / 2 / widths.bust;
-  // It sets out level, so it rises about as the square of the way to the side.
-  const edge = centre + (style.sideDepth - centre) * share * share;
-  return levels.bust - edge >= backEdgeOver;
 }
