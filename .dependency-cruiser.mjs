@@ -21,7 +21,8 @@ const sharedArrows = {
     'body',
     'units',
   ],
-  api: ['engine', 'sheets', 'proof', 'drafts', 'drafting', 'geometry', 'body', 'units'],
+  compare: ['drafting', 'geometry', 'units'],
+  api: ['engine', 'sheets', 'compare', 'proof', 'drafts', 'drafting', 'geometry', 'body', 'units'],
 };
 
 /** Packages that only some folders may name. */

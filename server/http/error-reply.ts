@@ -58,7 +58,7 @@ export const errorReply =
     if (known === undefined) log.error({ id, ...traceOf(error) }, 'fault');
     const refused =
       known ?? new RefusalError('internal', 'Something went wrong here; it is noted.');
-    const { problems, retryAfterSeconds, allow } = refused.details;
+    const { problems, retryAfterSeconds, allow, current } = refused.details;
     if (retryAfterSeconds !== undefined) response.setHeader('Retry-After', retryAfterSeconds);
     if (allow !== undefined) response.setHeader('Allow', allow);
     response.setHeader('Cache-Control', 'no-store');
@@ -66,6 +66,7 @@ export const errorReply =
       code: refused.code,
       message: refused.message,
       ...(problems === undefined ? {} : { problems: problems.map(asSent) }),
+      ...(current === undefined ? {} : { current }),
     };
     response.status(statusOf[refused.code]).json(body);
   };

@@ -6,8 +6,13 @@ import type { Unit } from '#shared/units/said.ts';
 /** The one place that knows HTTP statuses. */
 export const statusOf: { readonly [C in RefusalCode]: number } = {
   'not-json': 400,
+  'not-signed-in': 401,
+  'wrong-sign-in': 401,
+  'wrong-origin': 403,
   'not-found': 404,
   'method-not-allowed': 405,
+  conflict: 409,
+  'engine-changed': 409,
   'too-large': 413,
   'wrong-media-type': 415,
   'bad-input': 422,
@@ -15,6 +20,7 @@ export const statusOf: { readonly [C in RefusalCode]: number } = {
   'too-many-requests': 429,
   internal: 500,
   busy: 503,
+  unavailable: 503,
 };
 
 /** What goes with a refusal, where it has any. */
@@ -24,6 +30,8 @@ type Details = {
   readonly retryAfterSeconds?: number;
   /** Methods the address does answer. */
   readonly allow?: string;
+  /** The record as it stands, where somebody else saved it meanwhile. */
+  readonly current?: unknown;
 };
 
 /** A refusal a person can act on. */

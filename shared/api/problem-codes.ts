@@ -9,12 +9,24 @@ export const refusalCodes = [
   'bad-input',
   /** Within all bounds, and the gown still cannot be drawn: see `problems`. */
   'not-drawable',
+  /** Nobody is signed in, or the session has ended. */
+  'not-signed-in',
+  /** E-mail and password do not belong together; whether there is such an account is not said. */
+  'wrong-sign-in',
+  /** The request was sent from a page of somebody else's. */
+  'wrong-origin',
   'not-found',
+  /** Saved meanwhile from somewhere else: `current` is how it now stands. */
+  'conflict',
+  /** This page and the server draw by different rules: open the page again. */
+  'engine-changed',
   'method-not-allowed',
   'wrong-media-type',
   'too-large',
   'too-many-requests',
   'busy',
+  /** The database does not answer for the moment: send the same again. */
+  'unavailable',
   /** A bug: logged with its request number, no detail sent. */
   'internal',
 ] as const;
@@ -25,5 +37,7 @@ export const refusal = z.object({
   code: z.enum(refusalCodes),
   message: z.string(),
   problems: z.array(problemSchema).optional(),
+  /** With `conflict`: the record as the server has it, in the shape its reading endpoint replies. */
+  current: z.unknown().optional(),
 });
 export type Refusal = z.output<typeof refusal>;

@@ -1,0 +1,145 @@
+import { z } from 'zod';
+import { measureCard } from './card.ts';
+import { endpoint } from './endpoint.ts';
+import { givenName, keptText } from './kept-text.ts';
+import { pieceSchema } from './piece-reply.ts';
+import { redrawing } from './redrawing.ts';
+import { houseRules } from './rules.ts';
+import { baseVersion, done, lastSave, saved, saveId, typed } from './saving.ts';
+import { styleCard } from './style.ts';
+
+/** A measure card as far as it has been filled in. */
+export const partCard = measureCard.partial().extend({ name: keptText(80).optional() });
+
+/**
+ * What a maker has put on the table: the letters in the fields, and what they mean where they can be
+ * read. It may be incomplete or impossible; it is kept all the same.
+ */
+export const gownContent = z.strictObject({
+  typed,
+  inputs: z.strictObject({ card: partCard, style: styleCard, rules: houseRules }),
+});
+export type GownContent = z.output<typeof gownContent>;
+
+/** A gown as it is put on the server for the first time. */
+export const gownCreation = z.strictObject({ saveId, title: givenName, content: gownContent });
+
+/** Outlines of the pieces as one SVG path in a box from 0, 0; whole numbers, a few hundred letters. */
+const picture = z.object({ width: z.number(), height: z.number(), path: z.string() });
+
+const summary = {
+  id: z.uuid(),
+  title: z.string(),
+  version: z.int(),
+  archived: z.boolean(),
+  createdAt: z.iso.datetime(),
+  savedAt: z.iso.datetime(),
+  /** Engine that drew the pieces; null where nothing could be drawn yet. */
+  drawnBy: z.string().nullable(),
+  /** Whether the pieces are those of the inputs as they stand; else they are the last good ones. */
+  fresh: z.boolean(),
+};
+
+/** The pieces a gown keeps, and what they were drawn from. */
+export const drawnPieces = z.object({
+  engine: z.string(),
+  /** Number printed on every piece. */
+  number: z.string(),
+  inputs: z.object({ card: measureCard, style: styleCard, rules: houseRules }),
+  pieces: z.array(pieceSchema),
+});
+
+/** A gown in full; also what a `conflict` carries as `current`. */
+export const gownSchema = z.object({
+  ...summary,
+  content: gownContent,
+  drawn: drawnPieces.nullable(),
+  lastSave,
+  /** Where an older engine drew it: what the current one would draw otherwise. Null where there is nothing to decide. */
+  redrawing: redrawing.nullable(),
+});
+export type Gown = z.output<typeof gownSchema>;
+
+const params = z.object({ gownId: z.uuid() });
+const doneReply = { kind: 'json', schema: done } as const;
+
+/** Every gown of the account, archived ones too, last saved first. */
+export const listGowns = endpoint({
+  method: 'GET',
+  path: '/api/gowns',
+  body: undefined,
+  reply: {
+    kind: 'json',
+    schema: z.object({
+      gowns: z.array(z.object({ ...summary, picture: picture.nullable() })),
+    }),
+  },
+});
+
+export const createGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns',
+  body: gownCreation,
+  reply: { kind: 'json', schema: z.object({ id: z.uuid(), ...saved.shape }) },
+});
+
+export const readGown = endpoint({
+  method: 'GET',
+  path: '/api/gowns/:gownId',
+  params,
+  body: undefined,
+  reply: { kind: 'json', schema: gownSchema },
+});
+
+/**
+ * Saves what is on the table. `engine` is the one the gown is to be drawn by: the current one draws
+ * the pieces anew where the inputs allow it; the one that drew the gown keeps its pieces as they are.
+ * `keepReplaced` keeps what is overwritten as a revision (the maker chose hers in a conflict).
+ */
+export const saveGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/save',
+  params,
+  body: z.strictObject({
+    saveId,
+    baseVersion,
+    engine: z.string().max(20),
+    content: gownContent,
+    keepReplaced: z.boolean().default(false),
+  }),
+  reply: { kind: 'json', schema: saved },
+});
+
+/** The title alone; it is no part of what versions guard, the last one given stands. */
+export const renameGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/rename',
+  params,
+  body: z.strictObject({ title: givenName }),
+  reply: doneReply,
+});
+
+/** A gown of its own with the same content and pieces; revisions stay with the first. */
+export const duplicateGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/duplicate',
+  params,
+  body: z.strictObject({ saveId, title: givenName }),
+  reply: { kind: 'json', schema: z.object({ id: z.uuid(), ...saved.shape }) },
+});
+
+export const archiveGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/archive',
+  params,
+  body: undefined,
+  reply: doneReply,
+});
+
+export const unarchiveGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/unarchive',
+  params,
+  body: undefined,
+  reply: doneReply,
+});

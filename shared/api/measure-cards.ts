@@ -1,0 +1,94 @@
+import { z } from 'zod';
+import { endpoint } from './endpoint.ts';
+import { partCard } from './gowns.ts';
+import { givenName } from './kept-text.ts';
+import { baseVersion, done, lastSave, saved, saveId, typed } from './saving.ts';
+
+/** A measure card as a maker has filled it in: the letters in the fields, and what can be read of them. */
+export const cardContent = z.strictObject({ typed, card: partCard });
+export type CardContent = z.output<typeof cardContent>;
+
+const summary = {
+  id: z.uuid(),
+  /** Of the card in the list; whose measures they are stands in the card itself. */
+  name: z.string(),
+  version: z.int(),
+  archived: z.boolean(),
+  createdAt: z.iso.datetime(),
+  savedAt: z.iso.datetime(),
+  /** Measures taken so far, of the core ones and of all. */
+  taken: z.object({ core: z.int(), all: z.int() }),
+};
+
+/** A measure card in full; also what a `conflict` carries as `current`. */
+export const keptCardSchema = z.object({ ...summary, content: cardContent, lastSave });
+export type KeptCard = z.output<typeof keptCardSchema>;
+
+const params = z.object({ cardId: z.uuid() });
+const created = { kind: 'json', schema: z.object({ id: z.uuid(), ...saved.shape }) } as const;
+const doneReply = { kind: 'json', schema: done } as const;
+
+/** Every measure card of the account, archived ones too, last saved first. */
+export const listMeasureCards = endpoint({
+  method: 'GET',
+  path: '/api/measure-cards',
+  body: undefined,
+  reply: { kind: 'json', schema: z.object({ cards: z.array(z.object(summary)) }) },
+});
+
+export const createMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards',
+  body: z.strictObject({ saveId, name: givenName, content: cardContent }),
+  reply: created,
+});
+
+export const readMeasureCard = endpoint({
+  method: 'GET',
+  path: '/api/measure-cards/:cardId',
+  params,
+  body: undefined,
+  reply: { kind: 'json', schema: keptCardSchema },
+});
+
+/** Saves a card; gowns already drawn keep the measures they were drawn from. */
+export const saveMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/save',
+  params,
+  body: z.strictObject({ saveId, baseVersion, content: cardContent }),
+  reply: { kind: 'json', schema: saved },
+});
+
+/** The name alone; it is no part of what versions guard, the last one given stands. */
+export const renameMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/rename',
+  params,
+  body: z.strictObject({ name: givenName }),
+  reply: doneReply,
+});
+
+export const duplicateMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/duplicate',
+  params,
+  body: z.strictObject({ saveId, name: givenName }),
+  reply: created,
+});
+
+export const archiveMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/archive',
+  params,
+  body: undefined,
+  reply: doneReply,
+});
+
+export const unarchiveMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/unarchive',
+  params,
+  body: undefined,
+  reply: doneReply,
+});
