@@ -1,0 +1,98 @@
+import fc from 'fast-check';
+import { describe, expect, test } from 'vitest';
+import { DraftingError } from '#shared/drafting/drafting-error.ts';
+import type { Draft } from '#shared/engine/draft.ts';
+import { piecesSvg } from '#shared/exports/svg.ts';
+import { speak } from '#shared/units/speak.ts';
+import { remeasure } from '../exports/remeasure.ts';
+import { lawParameters, lawRuns } from './law-runs.ts';
+import { bothShapings, draftOrRefusal, reasonOf } from './random-gown.ts';
+
+/** Tries a law on every draft that is not refused. */
+function onEveryDraft(law: string, holds: (draft: Draft) => void): void {
+  fc.assert(
+    fc.property(bothShapings, (gowns) => {
+      for (const inputs of gowns) {
+        const draft = draftOrRefusal(inputs);
+        if (!(draft instanceof DraftingError)) holds(draft);
+      }
+    }),
+    lawParameters(law),
+  );
+}
+
+/** What a draft's proof finds wrong, in its own words. */
+const faults = (draft: Draft): readonly string[] =>
+  draft.proof.lines.flatMap((line) =>
+    line.findings
+      .filter((each) => !each.holds)
+      .map((each) => `line ${line.number}: ${speak(each.said, 'cm')} (${each.value})`),
+  );
+
+/** Paths to numbers that are no numbers. */
+function lostNumbers(value: unknown, path = ''): readonly string[] {
+  if (typeof value === 'number') return Number.isFinite(value) ? [] : [path];
+  if (typeof value !== 'object' || value === null) return [];
+  return Object.entries(value).flatMap(([key, inner]) => lostNumbers(inner, `${path}.${key}`));
+}
+
+describe('on any body within the limits, in any style within its limits', () => {
+  test('every line of the proof holds', () => {
+    onEveryDraft('every line holds', (draft) => {
+      expect(faults(draft)).toEqual([]);
+      expect(draft.proof.lines.map((line) => line.number)).toEqual([1, 2, 3, 4, 5, 8]);
+      expect(draft.proof.holds).toBe(true);
+    });
+  });
+
+  test('at most one gown in twenty is refused, each for a reason that names its fields', () => {
+    const reasons = new Map<string, number>();
+    let asked = 0;
+    let refused = 0;
+    fc.assert(
+      fc.property(bothShapings, (gowns) => {
+        for (const inputs of gowns) {
+          asked += 1;
+          const refusal = draftOrRefusal(inputs);
+          if (!(refusal instanceof DraftingError)) continue;
+          refused += 1;
+          reasons.set(reasonOf(refusal), (reasons.get(reasonOf(refusal)) ?? 0) + 1);
+          expect(refusal.problems.length).toBeGreaterThan(0);
+          for (const { field, said } of refusal.problems) {
+            expect(field).toMatch(/^(card|style|rules)\.\w+/);
+            expect(speak(said, 'in').length).toBeGreaterThan(20);
+          }
+        }
+      }),
+      // A share needs many cases, even in a quick check.
+      lawParameters('few are refused', Math.max(400, lawRuns)),
+    );
+    const share = refused / asked;
+    process.stdout.write(`refused ${refused} of ${asked} gowns (${(100 * share).toFixed(1)} %)\n`);
+    for (const [reason, count] of reasons) process.stdout.write(`  ${count} x ${reason}\n`);
+    expect(share).toBeLessThanOrEqual(0.05);
+  });
+
+  test('the same card and style give the same draft, byte for byte, and no number is lost', () => {
+    onEveryDraft('same input, same bytes', (draft) => {
+      const again = draftOrRefusal(structuredClone(draft.inputs));
+      expect(JSON.stringify(again) === JSON.stringify(draft)).toBe(true);
+      expect(lostNumbers(draft)).toEqual([]);
+    });
+  });
+
+  test('edges and girths measured anew from the exported SVG agree within half a millimetre', () => {
+    onEveryDraft('measured anew from the SVG', (draft) => {
+      const { edges, girths } = remeasure(piecesSvg(draft, 'cm'));
+      expect(edges.length).toBeGreaterThan(9);
+      expect(edges.filter((each) => !(Math.abs(each.difference) <= 0.5))).toEqual([]);
+      for (const { level, wanted } of draft.construction.wanted) {
+        if (level === 'chest') continue;
+        const name = level === 'waist-seam' ? 'waist edges' : level;
+        const found = girths.filter((each) => each.level === name);
+        expect(found.length, level).toBeGreaterThan(0);
+        for (const { girth } of found) expect(Math.abs(girth - wanted)).toBeLessThanOrEqual(0.5);
+      }
+    });
+  });
+});
