@@ -39,7 +39,8 @@ export type ChalkLayout = {
   readonly columns: readonly Column[];
 };
 
-type Bare = Pick<Half, 'title' | 'pieces' | 'points'>;
+/** A half before it has a place on the page. */
+export type Bare = Pick<Half, 'title' | 'pieces' | 'points'>;
 
 function halfOf(draft: Draft, side: Side, first: number): Bare {
   const pieces = draft.pieces.filter((each) => each.side === side && each.part !== 'flare');
@@ -99,6 +100,12 @@ function columnsBetween(from: number, to: number, y: number, bottom: number): re
   }));
 }
 
+/** Front and back with their points, numbered on from one to the other. */
+export function chalkHalves(draft: Draft): readonly [front: Bare, back: Bare] {
+  const front = halfOf(draft, 'front', 1);
+  return [front, halfOf(draft, 'back', front.points.length + 1)];
+}
+
 /**
  * Where the two halves, and the columns of figures, stand on the page, down to `bottom`, with
  * `reserve` mm kept free of drawing above it. On the widest
@@ -107,14 +114,13 @@ function columnsBetween(from: number, to: number, y: number, bottom: number): re
  */
 export function layChalkSheet(
   draft: Draft,
+  [front, back]: readonly [Bare, Bare],
   paper: Paper,
   bottom: number,
   reserve: number,
 ): ChalkLayout {
   const left = printerMargin;
   const edge = paper.width - printerMargin;
-  const front = halfOf(draft, 'front', 1);
-  const back = halfOf(draft, 'back', front.points.length + 1);
   const heights = [...front.points, ...back.points].map((each) => each.at.y);
   const top = Math.min(...heights);
   const { hip } = draft.levels;

@@ -48,16 +48,18 @@ function drawRow(row: Row, x: number, y: number, width: number, step: number): r
   }
 }
 
+type Set = { readonly row: Row; readonly x: number; readonly y: number; readonly width: number };
+
 /** Rows set in columns, those that found no room, and the room left below the last of them. */
 export type Flow = {
-  readonly marks: readonly Mark[];
+  readonly sets: readonly Set[];
   readonly rest: readonly Row[];
   readonly room: readonly Column[];
 };
 
 /** Sets rows down the columns one after another with this line step; a heading keeps two rows with it. */
 export function flowRows(rows: readonly Row[], columns: readonly Column[], step: number): Flow {
-  const marks: Mark[] = [];
+  const sets: Set[] = [];
   let index = 0;
   let column = columns[0];
   let y = column?.y ?? 0;
@@ -69,9 +71,13 @@ export function flowRows(rows: readonly Row[], columns: readonly Column[], step:
       column = columns[index];
       y = column?.y ?? 0;
     }
-    if (!column) return { marks, rest: rows.slice(i), room: [] };
-    marks.push(...drawRow(row, column.x, y, column.width, step));
+    if (!column) return { sets, rest: rows.slice(i), room: [] };
+    sets.push({ row, x: column.x, y, width: column.width });
     y += own;
   }
-  return { marks, rest: [], room: column ? [{ ...column, y }, ...columns.slice(index + 1)] : [] };
+  return { sets, rest: [], room: column ? [{ ...column, y }, ...columns.slice(index + 1)] : [] };
 }
+
+/** The marks of rows that were set with this line step. */
+export const drawRows = ({ sets }: Flow, step: number): readonly Mark[] =>
+  sets.flatMap(({ row, x, y, width }) => drawRow(row, x, y, width, step));
