@@ -5,7 +5,7 @@ import { givenName, keptText } from './kept-text.ts';
 import { pieceSchema } from './piece-reply.ts';
 import { redrawing } from './redrawing.ts';
 import { houseRules } from './rules.ts';
-import { baseVersion, done, lastSave, saved, saveId, typed } from './saving.ts';
+import { baseVersion, done, lastSave, fieldKey, saved, saveId, typed } from './saving.ts';
 import { styleCard } from './style.ts';
 
 /** A measure card as far as it has been filled in. */
@@ -13,10 +13,12 @@ export const partCard = measureCard.partial().extend({ name: keptText(80).option
 
 /**
  * What a maker has put on the table: the letters in the fields, and what they mean where they can be
- * read. It may be incomplete or impossible; it is kept all the same.
+ * read. It may be incomplete or impossible; it is kept all the same. While a field is `unread` nothing
+ * is drawn, as its default would stand for what she is typing.
  */
 export const gownContent = z.strictObject({
   typed,
+  unread: z.array(fieldKey).max(120),
   inputs: z.strictObject({ card: partCard, style: styleCard, rules: houseRules }),
 });
 export type GownContent = z.output<typeof gownContent>;
@@ -26,6 +28,7 @@ export const gownCreation = z.strictObject({ saveId, title: givenName, content: 
 
 /** Outlines of the pieces as one SVG path in a box from 0, 0; whole numbers, a few hundred letters. */
 const picture = z.object({ width: z.number(), height: z.number(), path: z.string() });
+export type Picture = z.output<typeof picture>;
 
 const summary = {
   id: z.uuid(),
@@ -48,6 +51,7 @@ export const drawnPieces = z.object({
   inputs: z.object({ card: measureCard, style: styleCard, rules: houseRules }),
   pieces: z.array(pieceSchema),
 });
+export type DrawnPieces = z.output<typeof drawnPieces>;
 
 /** A gown in full; also what a `conflict` carries as `current`. */
 export const gownSchema = z.object({

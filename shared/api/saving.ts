@@ -10,12 +10,13 @@ export const saveId = z.uuid().describe('A random UUID, kept until the save is a
 /** The version a save was made from; where the server has another, the save is refused as a `conflict`. */
 export const baseVersion = z.int().min(1);
 
+/** Dotted key of a field, as problems name it: `card.bustGirth`, `style.ease.waist`. */
+export const fieldKey = z.string().regex(/^[A-Za-z][A-Za-z.-]{0,47}$/);
+
 /** What the fields of the table hold letter for letter, so that what cannot be read yet is kept as well. */
 export const typed = z.strictObject({
   unit: z.enum(['cm', 'in']),
-  fields: z
-    .record(z.string().regex(/^[A-Za-z][A-Za-z.-]{0,47}$/), keptText(200))
-    .refine((fields) => Object.keys(fields).length <= 120),
+  fields: z.record(fieldKey, keptText(200)).refine((fields) => Object.keys(fields).length <= 120),
 });
 
 /** An acknowledged save. */

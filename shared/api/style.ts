@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { easeLevels, styleLengths } from '../drafts/gown/style-card.ts';
+import { easeLevels, styleLengths, topLineShapes } from '../drafts/gown/style-card.ts';
 import type { EaseLevel, GownStyle, StyleCard, StyleLength } from '../drafts/gown/style-card.ts';
 import { styleHints, styleLabels } from '../drafts/gown/style-labels.ts';
 import type { StyleKey } from '../drafts/gown/style-limits.ts';
@@ -20,17 +20,19 @@ const lengths = () =>
 const eases = () =>
   Object.fromEntries(easeLevels.map((level) => [level, described(`ease.${level}`)])) as Eases;
 
+const topLine = z.enum(topLineShapes);
 const shaping = z.enum(['princess', 'darts']);
 const ease = z.strictObject(eases());
 
 /** A style with every choice made, as a draft tells it. */
 export const gownStyle = z.strictObject({
   ...lengths(),
+  topLine,
   shaping,
   ease,
 }) satisfies z.ZodType<GownStyle>;
 
 /** Shape of a style card: what is left out takes its default; bounds are `checkStyle`'s to say. */
 export const styleCard = z
-  .strictObject({ ...lengths(), shaping, ease: ease.partial() })
+  .strictObject({ ...lengths(), topLine, shaping, ease: ease.partial() })
   .partial() satisfies z.ZodType<StyleCard>;

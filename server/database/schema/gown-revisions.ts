@@ -1,0 +1,22 @@
+import { boolean, index, integer, pgTable, text, timestamp, uuid } from 'drizzle-orm/pg-core';
+import { gownColumns } from './gown-columns.ts';
+import { gowns } from './gowns.ts';
+
+/** Copies of a gown that are never written again. */
+export const gownRevisions = pgTable(
+  'gown_revisions',
+  {
+    id: uuid('id').primaryKey(),
+    gownId: uuid('gown_id')
+      .notNull()
+      .references(() => gowns.id, { onDelete: 'cascade' }),
+    name: text('name').notNull(),
+    automatic: boolean('automatic').notNull(),
+    /** Version of the gown it copies. */
+    version: integer('version').notNull(),
+    parentId: uuid('parent_id'),
+    createdAt: timestamp('created_at', { withTimezone: true }).notNull(),
+    ...gownColumns(),
+  },
+  (table) => [index('gown_revisions_of_gown').on(table.gownId, table.createdAt)],
+);
