@@ -47,14 +47,14 @@ function chordsCross(a: readonly Point[], b: readonly Point[]): boolean {
   return false;
 }
 
-/** Whether stretches of a closed path that do not follow each other cross, by chords of an eighth. */
+/** Whether stretches of a closed path cross, by chords of an eighth; neighbours only touch at their joint. */
 export function crossesItself(path: Path): boolean {
   const boxes = path.map(hull);
   for (let i = 0; i < path.length; i += 1) {
     const [a, one] = [boxes[i], path[i]];
-    for (let j = i + 2; j < path.length; j += 1) {
+    for (let j = i + 1; j < path.length; j += 1) {
       const [b, other] = [boxes[j], path[j]];
-      if (!a || !b || !one || !other || (i === 0 && j === path.length - 1)) continue;
+      if (!a || !b || !one || !other) continue;
       if (a.left >= b.right || b.left >= a.right || a.top >= b.foot || b.top >= a.foot) continue;
       if (chordsCross(chords(one), chords(other))) return true;
     }

@@ -43,6 +43,7 @@ export const paperDraft = (
     floor: 1483,
   },
   style: {
+    topLine: 'sweetheart',
     topDrop: 185,
     neckDepth: 220,
     neckWidth: 76,

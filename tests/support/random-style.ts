@@ -7,8 +7,13 @@ import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
 import { drawGown } from '#shared/drafts/gown/draw-gown.ts';
 import { resolveStyle } from '#shared/drafts/gown/resolve-style.ts';
 import { checkStyle } from '#shared/drafts/gown/style-check.ts';
-import { easeLevels, styleLengths } from '#shared/drafts/gown/style-card.ts';
-import type { EaseLevel, StyleCard, StyleLength } from '#shared/drafts/gown/style-card.ts';
+import { easeLevels, styleLengths, topLineShapes } from '#shared/drafts/gown/style-card.ts';
+import type {
+  EaseLevel,
+  StyleCard,
+  StyleLength,
+  TopLineShape,
+} from '#shared/drafts/gown/style-card.ts';
 import {
   styleKeys,
   styleLimits,
@@ -22,6 +27,7 @@ type Draw = { readonly at: number; readonly open: boolean };
 /** One draw a choice, made before the body is known. */
 export type StyleDraws = {
   readonly shaping: 'princess' | 'darts' | undefined;
+  readonly topLine: TopLineShape | undefined;
   readonly choices: Readonly<Record<string, Draw>>;
 };
 
@@ -36,6 +42,7 @@ const draw = fc.record({
 /** Draws for a style on a body not yet known; `styleOn` puts them between that body's limits. */
 export const styleDraws: fc.Arbitrary<StyleDraws> = fc.record({
   shaping: fc.constantFrom('princess', 'darts', undefined),
+  topLine: fc.constantFrom(...topLineShapes, undefined),
   choices: fc.record(Object.fromEntries(styleKeys.map((key) => [key, draw]))),
 });
 
@@ -59,7 +66,10 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   const eased = easeOf(styleLimits(body, levels), given);
   const fits = (style: StyleCard): boolean =>
     checkStyle(style, body, levels).every(({ severity }) => severity === 'warning');
-  let style: StyleCard = fits(eased) ? eased : {};
+  let style: StyleCard = {
+    ...(fits(eased) ? eased : {}),
+    ...(draws.topLine === undefined ? {} : { topLine: draws.topLine }),
+  };
   for (const key of order) {
     const choice = given(key);
     if (choice === undefined) continue;

@@ -13,7 +13,7 @@ import { type Half, heightOn } from './half.ts';
 import type { GownStyle } from './style-card.ts';
 import { heightAtArc } from './truing.ts';
 import { dartedTop, princessPanels } from './top.ts';
-import { type TopLine, type TopLinePoints, topLine } from './top-line.ts';
+import { type TopLine, type TopLinePoints, notchCorner, topLine } from './top-line.ts';
 
 /** The top line stays at least this far above the bust point. */
 const overBust = 30;
@@ -33,6 +33,7 @@ export function drawTop(
   const bust = heightOn(half, 'bust', axis);
   const peak = side === 'front' ? style.topDrop : Math.min(points.centre.y, points.side.y);
   const sideTop = points.side.y;
+  const corner = side === 'front' && style.topLine === 'notched' ? { topCorner: notchCorner } : {};
   if (style.shaping === 'princess') {
     const above = princessAbove(axis, bust, opening, peak);
     const top = topLine(points, above.legs);
@@ -45,6 +46,7 @@ export function drawTop(
         above: above.intake,
         sideTop,
         dartClearance: rules.dartClearance,
+        ...corner,
       }),
       openings: openingOf(
         half,
@@ -71,6 +73,7 @@ export function drawTop(
       top,
       sideTop,
       dartClearance: rules.dartClearance,
+      ...corner,
       ...(opening > 0 ? { topDartTip: dart.legs.pivot } : {}),
     }),
     openings: openingOf(half, opening, dart.height, on, on),
@@ -112,8 +115,21 @@ function topLinePoints(half: Half, front: Half, style: GownStyle): TopLinePoints
   const y = half.side === 'front' ? style.sideDepth : heightAtArc(half, arc);
   const end = { side: point(xAt(half.line, y), y), sideLean: slopeAt(half.line, y) };
   return half.side === 'front'
-    ? { centre: point(0, style.neckDepth), peak: point(style.neckWidth, style.topDrop), ...end }
+    ? frontTopLine(style, end)
     : { centre: point(0, half.levels.waist - style.backDepth), ...end };
+}
+
+function frontTopLine(
+  style: GownStyle,
+  end: Pick<TopLinePoints, 'side' | 'sideLean'>,
+): TopLinePoints {
+  if (style.topLine === 'straight') return { centre: point(0, style.topDrop), ...end };
+  return {
+    centre: point(0, style.neckDepth),
+    peak: point(style.neckWidth, style.topDrop),
+    shape: style.topLine,
+    ...end,
+  };
 }
 
 function narrateTop(

@@ -15,7 +15,9 @@ export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonl
   const handles: Handle[] = [];
   const first = topEdges[0];
   const centre = first ? startOf(first.edge.path) : undefined;
-  if (first && centre) {
+  // A straight top line has neither dip nor peak to move.
+  const dips = style.topLine !== 'straight';
+  if (dips && first && centre) {
     handles.push({
       key: 'neckDepth',
       piece: first.piece.name,
@@ -32,7 +34,7 @@ export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonl
     (best, each) => (best && distance(best.at, peak) <= distance(each.at, peak) ? best : each),
     undefined,
   );
-  if (nearest) {
+  if (dips && nearest) {
     handles.push({
       key: 'neckWidth',
       piece: nearest.piece,

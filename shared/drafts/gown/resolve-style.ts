@@ -13,6 +13,7 @@ export function resolveStyle(style: StyleCard, body: Body, levels: BodyLevels): 
   const ease = (level: EaseLevel): number => style.ease?.[level] ?? limits[`ease.${level}`].initial;
   const flareLength = length('flareLength');
   return {
+    topLine: style.topLine ?? 'sweetheart',
     topDrop: length('topDrop'),
     neckDepth: length('neckDepth'),
     neckWidth: length('neckWidth'),

@@ -2,11 +2,16 @@
 export const easeLevels = ['chest', 'bust', 'underbust', 'waist', 'topHip', 'hip'] as const;
 export type EaseLevel = (typeof easeLevels)[number];
 
+/** Shapes of the front's top line. */
+export const topLineShapes = ['sweetheart', 'straight', 'scooped', 'notched'] as const;
+export type TopLineShape = (typeof topLineShapes)[number];
+
 /**
  * Style card of a gown (method section 6), millimetres. What is left out takes its default, which
  * may hang on the body (`resolveStyle`).
  */
 export type StyleCard = {
+  readonly topLine?: TopLineShape | undefined;
   readonly topDrop?: number | undefined;
   readonly neckDepth?: number | undefined;
   readonly neckWidth?: number | undefined;
@@ -48,6 +53,7 @@ export type StyleLength = (typeof styleLengths)[number];
 
 /** A style card with every choice made. */
 export type GownStyle = { readonly [K in StyleLength]: number } & {
+  readonly topLine: TopLineShape;
   readonly shaping: 'princess' | 'darts';
   readonly ease: { readonly [L in EaseLevel]: number };
 };

@@ -1,7 +1,7 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
 import { easeLevels, styleLengths } from './style-card.ts';
-import type { EaseLevel, StyleCard, StyleLength } from './style-card.ts';
+import type { EaseLevel, StyleCard, StyleLength, TopLineShape } from './style-card.ts';
 
 /** Bounds of one style choice and what it is when left open, millimetres (`flareFraction`: part of a circle). */
 export type Limit = { readonly min: number; readonly max: number; readonly initial: number };
@@ -58,6 +58,25 @@ const easeLimits: { readonly [K in `ease.${EaseLevel}`]: Limit } = {
   'ease.hip': limit(-20, 120, 20),
 };
 
+/** Centre and peak of the top line: a straight one lies level with its peak, a scooped one is wide and deep. */
+function neck(
+  shape: TopLineShape,
+  peak: number,
+  bust: number,
+  bustSpan: number,
+): { readonly neckDepth: Limit; readonly neckWidth: Limit } {
+  const widest = bustSpan / 2 + 40;
+  if (shape === 'straight') {
+    return { neckDepth: limit(peak, peak, peak), neckWidth: limit(40, widest, 76) };
+  }
+  const scooped = shape === 'scooped';
+  return {
+    // A notch needs some depth to be one.
+    neckDepth: limit(shape === 'notched' ? peak + 15 : peak, bust - 20, peak + (scooped ? 50 : 35)),
+    neckWidth: limit(40, widest, scooped ? bustSpan / 2 : 76),
+  };
+}
+
 /**
  * Bounds and initial value of every style choice on this body, millimetres (method section 6 and, where it is silent,
  * our own rules named above). Bounds that hang on another choice take it from `style`, or its own initial value.
@@ -77,8 +96,7 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
   const floorClearance = limit(0, seamToFloor - shortestFlare, 20);
   return {
     topDrop,
-    neckDepth: limit(peak, levels.bust - 20, peak + 35),
-    neckWidth: limit(40, bustSpan / 2 + 40, 76),
+    ...neck(style.topLine ?? 'sweetheart', peak, levels.bust, bustSpan),
     sideDepth: limit(
       Math.max(peak, Math.min(levels.underarm, levels.bust - 15)),
       levels.bust - 10,

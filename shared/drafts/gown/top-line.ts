@@ -3,6 +3,7 @@ import { moved, movedPath, turnAbout, undo } from '../../geometry/motion.ts';
 import { type Path, cubic } from '../../geometry/path.ts';
 import { type Point, distance, point, unit } from '../../geometry/point.ts';
 import type { StraightLegs } from './contour.ts';
+import type { TopLineShape } from './style-card.ts';
 
 /** A top line cut at the princess seam or dart, laid flat again. */
 export type TopLine = {
@@ -19,8 +20,10 @@ export type TopLine = {
 /** Where a top line sets out, peaks and ends. */
 export type TopLinePoints = {
   readonly centre: Point;
-  /** Absent in the back. */
+  /** Absent in the back, and where the line is straight. */
   readonly peak?: Point;
+  /** How it climbs from the centre to the peak. */
+  readonly shape?: TopLineShape;
   readonly side: Point;
   /** Lean (dx/dy) of the side seam there: the line arrives square to it. */
   readonly sideLean: number;
@@ -39,9 +42,9 @@ export function topLine(points: TopLinePoints, legs: StraightLegs): TopLine {
     x: closing.cos * outward.x - closing.sin * outward.y,
     y: closing.sin * outward.x + closing.cos * outward.y,
   };
-  const { centre, peak } = points;
+  const { centre, peak, shape = 'sweetheart' } = points;
   const drawn: Path = peak
-    ? [...rise(centre, peak), ...fall(peak, side, arrive)]
+    ? [...rise(centre, peak, shape), ...fall(peak, side, arrive)]
     : fall(centre, side, arrive);
   const leg = point(-Math.sin(legs.angle), -Math.cos(legs.angle));
   const beyond = { x: legs.pivot.x + leg.x, y: legs.pivot.y + leg.y };
@@ -59,15 +62,35 @@ export function topLine(points: TopLinePoints, legs: StraightLegs): TopLine {
 /** Tightest bend of the dip at the centre, so that an enclosed allowance still lies flat outside it. */
 const tightestDip = 16;
 
-/** Centre to peak: square at the centre, level at the peak, rounder at the peak than in the dip. */
-const rise = (centre: Point, peak: Point): Path => {
+/** A notched line leaves the centre at this angle from level, degrees. */
+const notchClimb = 45;
+
+/** Corner between a notched top line and the centre, degrees. */
+export const notchCorner = 90 + notchClimb;
+
+/**
+ * Centre to peak, level at the peak. A sweetheart is square at the centre and rounder at the peak than
+ * in the dip; a scoop is rounder in the dip; a notch leaves the centre at an angle.
+ */
+const rise = (centre: Point, peak: Point, shape: TopLineShape): Path => {
   const width = peak.x - centre.x;
   // Radius at the centre of a cubic level at both ends is 3/2 handle^2 over the height it climbs.
   const handle = Math.sqrt((tightestDip * Math.abs(centre.y - peak.y)) / 1.5);
-  const reach = Math.max(0.4 * width, Math.min(0.85 * width, handle));
-  return [
-    cubic(centre, point(centre.x + reach, centre.y), point(peak.x - 0.55 * width, peak.y), peak),
-  ];
+  const least = shape === 'scooped' ? 0.72 * width : 0.4 * width;
+  const reach = Math.max(least, Math.min(0.85 * width, handle));
+  const soft = shape === 'scooped' ? 0.3 * width : 0.55 * width;
+  if (shape === 'notched') {
+    const climb = Math.min(0.4 * width, 0.6 * Math.abs(centre.y - peak.y));
+    return [
+      cubic(
+        centre,
+        point(centre.x + climb, centre.y - climb * Math.tan((notchClimb * Math.PI) / 180)),
+        point(peak.x - soft, peak.y),
+        peak,
+      ),
+    ];
+  }
+  return [cubic(centre, point(centre.x + reach, centre.y), point(peak.x - soft, peak.y), peak)];
 };
 
 /** On to the side: level where it sets out, square to the side seam where it arrives. */

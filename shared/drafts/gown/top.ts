@@ -21,6 +21,8 @@ export type TopParts = {
   /** Height on the side seam at which the top line ends. */
   readonly sideTop: number;
   readonly dartClearance: number;
+  /** Degrees between the centre and the top line where it is meant not to be square. */
+  readonly topCorner?: number;
 };
 
 const other = (side: Side): Side => (side === 'front' ? 'back' : 'front');
@@ -95,7 +97,7 @@ export function princessPanels(parts: TopParts & { readonly above: Intake }): re
       cut: side === 'front' ? 'cut 1 on fold' : 'cut 2 (a pair)',
       copies: side === 'front' ? 1 : 2,
       edges: [
-        edge('top', 'top', top.centre),
+        notched(edge('top', 'top', top.centre), parts.topCorner),
         centrePrincess,
         toMiddle(first, 0),
         centreEdge(side, seamCentre, topCentre),
@@ -176,7 +178,7 @@ export function dartedTop(parts: TopParts): readonly Piece[] {
       cut: side === 'front' ? 'cut 1 on fold' : 'cut 2 (a pair)',
       copies: side === 'front' ? 1 : 2,
       edges: [
-        ...topEdges(top, topDart),
+        ...topEdges(top, topDart, parts.topCorner),
         own,
         ...[...waist].reverse(),
         centreEdge(side, seamCentre, topCentre),
@@ -208,13 +210,20 @@ function topDartOf(top: TopLine, tip: Point | undefined): readonly Dart[] {
   ];
 }
 
-function topEdges(top: TopLine, dart: readonly Dart[]): readonly Edge[] {
+const notched = (top: Edge, corner: number | undefined): Edge =>
+  corner === undefined ? top : { ...top, corner };
+
+function topEdges(
+  top: TopLine,
+  dart: readonly Dart[],
+  corner: number | undefined,
+): readonly Edge[] {
   const from = endOf(top.centre);
   const until = startOf(top.outer);
   if (dart.length === 0 || !from || !until)
-    return [edge('top', 'top', [...top.centre, ...top.outer])];
+    return [notched(edge('top', 'top', [...top.centre, ...top.outer]), corner)];
   return [
-    edge('top-a', 'top', top.centre),
+    notched(edge('top-a', 'top', top.centre), corner),
     { name: 'top-mouth', kind: 'mouth', path: [line(from, until)], open: true },
     edge('top-b', 'top', top.outer),
   ];

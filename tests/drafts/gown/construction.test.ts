@@ -7,8 +7,10 @@ import { gownLevels } from '#shared/drafts/gown/levels.ts';
 import { kneesTogether, longestStep } from '#shared/drafts/gown/walking.ts';
 import { closedSeam, fallFor } from '#shared/drafts/gown/waist-seam.ts';
 import { planFlare } from '#shared/drafts/gown/flare.ts';
+import { type StyleCard, topLineShapes } from '#shared/drafts/gown/style-card.ts';
+import type { Draft } from '#shared/engine/draft.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
-import { segmentLength, tangentAt } from '#shared/geometry/curve.ts';
+import { segmentLength, startTangent, tangentAt } from '#shared/geometry/curve.ts';
 import { xAt } from '#shared/geometry/profile.ts';
 import { speak } from '#shared/units/speak.ts';
 import { middleBody } from '../../support/middle-body.ts';
@@ -151,5 +153,34 @@ describe('the house presets', () => {
         .x;
     expect(hip('front-middle')).toBeCloseTo((990 + 20) / 4, 6);
     expect(hip('back-middle')).toBeCloseTo((990 + 20) / 4, 6);
+  });
+});
+
+describe('the top line', () => {
+  const drawn = (style: StyleCard): Draft =>
+    draftGown({ card: middleBody, style, rules: balanced });
+
+  it.each(topLineShapes)(
+    '%s: the pieces sew together, with princess seams and with darts',
+    (topLine) => {
+      for (const shaping of ['princess', 'darts'] as const) {
+        expect(speak(drawn({ topLine, shaping }).proof.verdict, 'cm')).toBe(
+          'These pieces sew together.',
+        );
+      }
+    },
+  );
+
+  it('notched leaves the centre at the angle its edge declares', () => {
+    const edge = drawn({ topLine: 'notched' }).pieces[0]?.edges.find(({ kind }) => kind === 'top');
+    expect(edge?.corner).toBe(135);
+    const out = startTangent(edge?.path ?? []);
+    expect(out.y / out.x).toBeCloseTo(-1, 9);
+  });
+
+  it('straight lies level with its peak, and has no dip to move', () => {
+    const { handles, style } = drawn({ topLine: 'straight' });
+    expect(style.neckDepth).toBe(style.topDrop);
+    expect(handles.map(({ key }) => key)).toEqual(['kneeFinished']);
   });
 });
