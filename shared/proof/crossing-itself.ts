@@ -3,7 +3,7 @@ import type { Path, Segment } from '../geometry/path.ts';
 import type { Point } from '../geometry/point.ts';
 
 /** Chords this near the curve show whether two stretches cross. */
-const flatness = 0.1;
+const flatness = 0.2;
 
 type Box = {
   readonly left: number;
@@ -34,20 +34,29 @@ const side = (a: Point, b: Point, p: Point): number =>
 const cross = (a: Point, b: Point, c: Point, d: Point): boolean =>
   side(a, b, c) * side(a, b, d) < 0 && side(c, d, a) * side(c, d, b) < 0;
 
-/** First place at which two chains of chords cross; `skip` leaves out the chords at a shared end. */
+/** A stretch as chords, with the box round it. */
+type Chain = { readonly points: readonly Point[]; readonly box: Box };
+
+const outside = (a: Point, b: Point, { left, right, top, bottom }: Box): boolean =>
+  (a.x < left && b.x < left) ||
+  (a.x > right && b.x > right) ||
+  (a.y < top && b.y < top) ||
+  (a.y > bottom && b.y > bottom);
+
+/** First place at which two chains cross; `skip` leaves out the chords at a shared end. */
 function crossing(
-  one: readonly Point[],
-  other: readonly Point[],
+  one: Chain,
+  other: Chain,
   skip: (i: number, j: number) => boolean,
 ): Point | undefined {
-  for (let i = 1; i < one.length; i += 1) {
-    const a = one[i - 1];
-    const b = one[i];
-    if (!a || !b) continue;
-    for (let j = 1; j < other.length; j += 1) {
-      const c = other[j - 1];
-      const d = other[j];
-      if (c && d && !skip(i, j) && cross(a, b, c, d)) return b;
+  for (let i = 1; i < one.points.length; i += 1) {
+    const a = one.points[i - 1];
+    const b = one.points[i];
+    if (!a || !b || outside(a, b, other.box)) continue;
+    for (let j = 1; j < other.points.length; j += 1) {
+      const c = other.points[j - 1];
+      const d = other.points[j];
+      if (c && d && cross(a, b, c, d) && !skip(i, j)) return b;
     }
   }
   return undefined;
@@ -65,23 +74,22 @@ const hasLength = (segment: Segment): boolean => {
 export function crossesItself(closed: Path): Point | undefined {
   const outline = closed.filter(hasLength);
   const boxes = outline.map(boxOf);
-  const chains: (readonly Point[] | undefined)[] = [];
-  const chainOf = (index: number): readonly Point[] => {
-    const segment = outline[index];
-    return (chains[index] ??= segment ? flatten([segment], flatness) : []);
-  };
+  const chains: (Chain | undefined)[] = [];
+  const chainOf = (index: number, segment: Segment, box: Box): Chain =>
+    (chains[index] ??= { points: flatten([segment], flatness), box });
   const count = outline.length;
   for (let i = 0; i < count; i += 1) {
-    for (let j = i; j < count; j += 1) {
-      const a = boxes[i];
-      const b = boxes[j];
-      if (!a || !b || apart(a, b) || (i === j && outline[i]?.kind === 'line')) continue;
-      const one = chainOf(i);
-      const other = chainOf(j);
+    const [first, a] = [outline[i], boxes[i]];
+    if (!first || !a) continue;
+    for (let j = first.kind === 'line' ? i + 1 : i; j < count; j += 1) {
+      const [second, b] = [outline[j], boxes[j]];
+      if (!second || !b || apart(a, b)) continue;
+      const one = chainOf(i, first, a);
+      const other = chainOf(j, second, b);
       const found = crossing(one, other, (k, l) => {
         if (i === j) return l <= k + 1;
-        const follows = j === i + 1 && k === one.length - 1 && l === 1;
-        const closes = i === 0 && j === count - 1 && k === 1 && l === other.length - 1;
+        const follows = j === i + 1 && k === one.points.length - 1 && l === 1;
+        const closes = i === 0 && j === count - 1 && k === 1 && l === other.points.length - 1;
         return follows || closes;
       });
       if (found) return found;

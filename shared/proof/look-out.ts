@@ -1,7 +1,7 @@
 import type { FinishedPiece } from '../drafting/piece.ts';
 import { crossingsOfLine, pointAt } from '../geometry/curve.ts';
 import type { Segment } from '../geometry/path.ts';
-import { type Point, add, dot, scale, subtract } from '../geometry/point.ts';
+import { type Point, add, dot, subtract } from '../geometry/point.ts';
 import { boxOf } from './crossing-itself.ts';
 
 /** How far inside the seam line a cutting line that has slipped would still be found, mm. */
@@ -34,17 +34,15 @@ export function reachCut(
   out: Point,
   reach: number,
 ): number | undefined {
-  const end = add(at, scale(out, reach));
-  const start = add(at, scale(out, -inside));
-  const left = Math.min(start.x, end.x);
-  const right = Math.max(start.x, end.x);
-  const top = Math.min(start.y, end.y);
-  const bottom = Math.max(start.y, end.y);
+  const left = at.x + Math.min(-inside * out.x, reach * out.x);
+  const right = at.x + Math.max(-inside * out.x, reach * out.x);
+  const top = at.y + Math.min(-inside * out.y, reach * out.y);
+  const bottom = at.y + Math.max(-inside * out.y, reach * out.y);
   let nearest: number | undefined;
   for (const { segment, box } of cut) {
     if (box.right < left || box.left > right || box.bottom < top || box.top > bottom) continue;
     if (besideLine(segment, at, out)) continue;
-    for (const t of crossingsOfLine(segment, at, end)) {
+    for (const t of crossingsOfLine(segment, at, add(at, out))) {
       const away = dot(subtract(pointAt(segment, t), at), out);
       if (away < -inside || away > reach) continue;
       if (nearest === undefined || Math.abs(away) < Math.abs(nearest)) nearest = away;

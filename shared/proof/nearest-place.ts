@@ -1,4 +1,4 @@
-import { pointAt } from '../geometry/curve.ts';
+import { pointAt, velocityAt } from '../geometry/curve.ts';
 import type { Line, Path, Segment } from '../geometry/path.ts';
 import { type Point, distance, dot, subtract } from '../geometry/point.ts';
 
@@ -7,9 +7,10 @@ export type NearestPlace = { readonly index: number; readonly t: number; readonl
 
 /** A curve is first looked at in this many equal shares. */
 const shares = 8;
-/** Then the nearest share is narrowed down this often, each time to less than two thirds. */
-const narrowings = 26;
-const golden = (Math.sqrt(5) - 1) / 2;
+/** Then the place is closed in on at most this often. */
+const roundsAtMost = 40;
+/** Near enough: this share of a stretch. */
+const enough = 1e-10;
 
 const between0and1 = (t: number): number => Math.min(1, Math.max(0, t));
 
@@ -19,24 +20,34 @@ function onLine({ from, to }: Line, at: Point): number {
   return size === 0 ? 0 : between0and1(dot(subtract(at, from), along) / size);
 }
 
-/** Share nearest a point between two shares that hold one nearest place. */
+/** How fast the square of the distance grows at a share: zero at the nearest place. */
+const growth = (segment: Segment, at: Point, t: number): number =>
+  dot(subtract(pointAt(segment, t), at), velocityAt(segment, t));
+
+/** Share nearest a point between two shares that hold one nearest place (regula falsi, Illinois). */
 function narrowed(segment: Segment, at: Point, low: number, high: number): number {
-  const off = (t: number): number => distance(pointAt(segment, t), at);
   let [a, b] = [low, high];
-  let [c, d] = [b - golden * (b - a), a + golden * (b - a)];
-  let [offC, offD] = [off(c), off(d)];
-  for (let i = 0; i < narrowings; i += 1) {
-    if (offC < offD) {
-      [b, d, offD] = [d, c, offC];
-      c = b - golden * (b - a);
-      offC = off(c);
+  let [growthA, growthB] = [growth(segment, at, a), growth(segment, at, b)];
+  if (growthA >= 0) return a;
+  if (growthB <= 0) return b;
+  let side = 0;
+  let t = a;
+  for (let i = 0; i < roundsAtMost && b - a > enough; i += 1) {
+    const last = t;
+    t = (growthB * a - growthA * b) / (growthB - growthA);
+    const here = growth(segment, at, t);
+    if (here === 0 || Math.abs(t - last) < enough) return t;
+    if (here > 0) {
+      [b, growthB] = [t, here];
+      if (side === 1) growthA /= 2;
+      side = 1;
     } else {
-      [a, c, offC] = [c, d, offD];
-      d = a + golden * (b - a);
-      offD = off(d);
+      [a, growthA] = [t, here];
+      if (side === -1) growthB /= 2;
+      side = -1;
     }
   }
-  return (a + b) / 2;
+  return t;
 }
 
 /** Shares of a curve between which a place nearer than `best` may lie. */
