@@ -1,20 +1,13 @@
-import { addressFromEnvironment } from './address.mjs';
-import { startCluster } from './cluster.mjs';
+import { addressFromEnvironment, isOpenAlready } from './address.mjs';
 import { ensureDebianPackages, ensureNpmPackages } from './install.mjs';
-import { command, run } from './shell.mjs';
+import { serveUntilStopped } from './serve-until-stopped.mjs';
+import { command } from './shell.mjs';
 
 /** One process serves the API and, through Vite as its middleware, the screens as they are edited. */
 await command(async () => {
   const address = addressFromEnvironment();
+  if (await isOpenAlready(address)) return 0;
   await ensureNpmPackages();
   await ensureDebianPackages('serve');
-  const cluster = await startCluster('cluster', { durable: true });
-  for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, () => undefined);
-  try {
-    return await run(process.execPath, ['--import', 'tsx', 'server/dev.ts'], {
-      env: { DATABASE_URL: cluster.url, HOST: address.host, PORT: String(address.port) },
-    });
-  } finally {
-    if (cluster.started) cluster.stop();
-  }
+  return serveUntilStopped(['--import', 'tsx', 'server/dev.ts'], address);
 });
