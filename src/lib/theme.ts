@@ -2,6 +2,9 @@ export type Theme = 'light' | 'dark';
 
 const key = 'ellwand.theme';
 
+/** Asked for once: it is looked at on every rendering. */
+export const systemIsDark = matchMedia('(prefers-color-scheme: dark)');
+
 /** The theme chosen on this device; undefined follows the system. */
 export function storedTheme(): Theme | undefined {
   try {
@@ -16,7 +19,7 @@ export function storedTheme(): Theme | undefined {
 export function shownTheme(): Theme {
   const chosen = document.documentElement.dataset['theme'];
   if (chosen === 'light' || chosen === 'dark') return chosen;
-  return matchMedia('(prefers-color-scheme: dark)').matches ? 'dark' : 'light';
+  return systemIsDark.matches ? 'dark' : 'light';
 }
 
 /** Puts a theme on the page; undefined lets the system decide. */

@@ -1,14 +1,17 @@
-import { useCallback, useSyncExternalStore } from 'react';
+import { useMemo, useSyncExternalStore } from 'react';
 
 /** Whether a media query holds now. */
 export function useMedia(query: string): boolean {
-  const follow = useCallback(
-    (changed: () => void) => {
-      const media = matchMedia(query);
-      media.addEventListener('change', changed);
-      return () => media.removeEventListener('change', changed);
-    },
-    [query],
-  );
-  return useSyncExternalStore(follow, () => matchMedia(query).matches);
+  // Asked for once: a query made anew at every rendering costs more than the rendering.
+  const media = useMemo(() => {
+    const list = matchMedia(query);
+    return {
+      follow: (changed: () => void) => {
+        list.addEventListener('change', changed);
+        return () => list.removeEventListener('change', changed);
+      },
+      holds: () => list.matches,
+    };
+  }, [query]);
+  return useSyncExternalStore(media.follow, media.holds);
 }

@@ -1,17 +1,16 @@
 import { useSyncExternalStore } from 'react';
 
-import { shownTheme, type Theme } from './theme.ts';
+import { shownTheme, systemIsDark, type Theme } from './theme.ts';
 
 /** The theme on screen, followed as the system or the reader changes it. */
 export const useTheme = (): Theme => useSyncExternalStore(follow, shownTheme);
 
 function follow(changed: () => void): () => void {
-  const system = matchMedia('(prefers-color-scheme: dark)');
-  system.addEventListener('change', changed);
+  systemIsDark.addEventListener('change', changed);
   const observer = new MutationObserver(changed);
   observer.observe(document.documentElement, { attributeFilter: ['data-theme'] });
   return () => {
-    system.removeEventListener('change', changed);
+    systemIsDark.removeEventListener('change', changed);
     observer.disconnect();
   };
 }

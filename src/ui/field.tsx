@@ -10,14 +10,13 @@ export type Wiring = {
 type FieldProps = {
   readonly label: ReactNode;
   readonly message?: string | undefined;
-  readonly tone?: 'error' | 'warning';
   readonly hint?: string | undefined;
   readonly describedBy?: string | undefined;
   readonly children: (wiring: Wiring) => ReactNode;
 };
 
 /** A label, its control on the right, and under both a message when something needs doing. */
-export function Field({ label, message, tone = 'error', ...rest }: FieldProps) {
+export function Field({ label, message, ...rest }: FieldProps) {
   const id = useId();
   const messageId = message === undefined ? undefined : `${id}-message`;
   const hintId = rest.hint === undefined ? undefined : `${id}-hint`;
@@ -32,7 +31,7 @@ export function Field({ label, message, tone = 'error', ...rest }: FieldProps) {
         </label>
         {rest.children({
           id,
-          'aria-invalid': message !== undefined && tone === 'error',
+          'aria-invalid': message !== undefined,
           'aria-describedby': described === '' ? undefined : described,
         })}
       </div>
@@ -42,10 +41,7 @@ export function Field({ label, message, tone = 'error', ...rest }: FieldProps) {
         </p>
       )}
       {message !== undefined && (
-        <p
-          id={messageId}
-          className={`pt-1 pb-1 text-sm leading-snug ${tone === 'error' ? 'text-madder' : 'text-slate'}`}
-        >
+        <p id={messageId} className="py-1 text-sm leading-snug text-madder">
           {message}
         </p>
       )}

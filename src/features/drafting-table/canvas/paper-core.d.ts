@@ -6,36 +6,29 @@ declare module 'paper/dist/paper-core.js' {
   export type Pair = readonly [number, number];
   export type SegmentParts = readonly [Pair, Pair?, Pair?];
 
-  export type Style = {
-    strokeColor?: string | null;
-    fillColor?: string | null;
-    strokeWidth?: number;
-    strokeScaling?: boolean;
-    dashArray?: readonly number[];
-    strokeCap?: 'round' | 'butt';
-    strokeJoin?: 'round' | 'miter';
-    opacity?: number;
-    data?: unknown;
-    locked?: boolean;
+  export type Item = {
+    data: unknown;
+    closed: boolean;
+    strokeColor: string;
+    fillColor: string;
+    strokeWidth: number;
+    strokeScaling: boolean;
+    strokeJoin: 'round' | 'miter';
+    dashArray: readonly number[];
   };
-
-  export type Item = { readonly data: unknown; remove(): void };
   export type Layer = Item & { addChild(item: Item): void; removeChildren(): void };
   export type HitResult = { readonly item: Item };
   export type HitOptions = {
     stroke?: boolean;
-    fill?: boolean;
     tolerance?: number;
     match?: (hit: HitResult) => boolean;
   };
 
-  export type Matrix = object;
   export type View = {
     autoUpdate: boolean;
     viewSize: object;
     matrix: { set(a: number, b: number, c: number, d: number, tx: number, ty: number): void };
     update(): boolean;
-    requestUpdate(): void;
     remove(): void;
   };
   export type Project = {
@@ -48,13 +41,8 @@ declare module 'paper/dist/paper-core.js' {
     view: View;
     project: Project;
     setup(canvas: HTMLCanvasElement): void;
-    activate(): void;
-    Path: new (parts: Style & { segments: readonly SegmentParts[]; closed?: boolean }) => Item;
-    CompoundPath: new (
-      parts: Style & {
-        children: readonly Item[];
-      },
-    ) => Item;
+    Path: new (segments: readonly SegmentParts[]) => Item;
+    CompoundPath: new (children: readonly Item[]) => Item;
     Layer: new () => Layer;
     Size: new (width: number, height: number) => object;
   }

@@ -1,3 +1,5 @@
+import { memo } from 'react';
+
 import type { Unit } from '#shared/units/said.ts';
 
 import { rodMarks, type RodMark } from './rod-marks.ts';
@@ -9,7 +11,7 @@ export const rodWidth = 26;
 type RodProps = { readonly view: View; readonly size: Size; readonly unit: Unit };
 
 /** The brass measuring rod along the top and left edge, in the reader's unit. */
-export const Rod = ({ view, size, unit }: RodProps) => {
+export const Rod = memo(function Rod({ view, size, unit }: RodProps) {
   const across = rodMarks(unit, view.scale, view.x, size.width).filter(inside);
   const down = rodMarks(unit, view.scale, view.y, size.height).filter(inside);
   return (
@@ -45,7 +47,7 @@ export const Rod = ({ view, size, unit }: RodProps) => {
       </g>
     </g>
   );
-};
+});
 
 /** The corner belongs to the unit's name. */
 const inside = ({ at }: RodMark): boolean => at >= rodWidth;

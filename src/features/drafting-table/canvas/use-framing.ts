@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 
 import type { Point } from '#shared/geometry/point.ts';
 
@@ -17,8 +17,9 @@ export function useFraming(key: string, box: Box, size: Size, still: boolean) {
   const outgrown =
     'place' in framing && framing.place === 'corner' && still && outgrows(box, framing.box);
   if (framing.key !== key || outgrown) setFraming({ key, box, place: 'corner' });
+  const view = useMemo(() => seen(framing, size), [framing, size]);
   return {
-    view: seen(framing, size),
+    view,
     fit: (to: Box, place: Place) => setFraming({ key, box: to, place }),
     pan: (by: Point) => setFraming((now) => ({ key, view: panned(seen(now, size), by) })),
     zoom: (by: number, at: Point) =>

@@ -1,4 +1,6 @@
-import { useState, type Dispatch } from 'react';
+import { memo, useState, type Dispatch } from 'react';
+
+import type { Unit } from '#shared/units/said.ts';
 
 import { Field } from '../../../ui/field.tsx';
 import { LengthInput } from '../../../ui/length-input.tsx';
@@ -9,39 +11,52 @@ import type { TableAction, TableState } from '../table-state.ts';
 type FigureFieldProps = {
   readonly field: FieldKey;
   readonly label: string;
-  readonly state: TableState;
-  readonly dispatch: Dispatch<TableAction>;
-  /** What holds while the field is empty: an estimate or a default. */
-  readonly open: { readonly value: number; readonly mark?: string } | undefined;
+  readonly text: string;
+  /** What is wrong with it, if anything. */
+  readonly fault: string | undefined;
+  readonly unit: Unit;
+  /** What holds while the field is empty: a default, or an estimate marked as one. */
+  readonly open: number | undefined;
+  readonly mark?: string | undefined;
   /** What the figure means, shown while it is typed. */
   readonly hint?: string;
   readonly describedBy?: string;
-  readonly onStart?: () => void;
+  readonly dispatch: Dispatch<TableAction>;
+  readonly onStart?: (field: FieldKey) => void;
 };
 
-/** One figure of a card. Its message waits until the maker has finished typing. */
-export const FigureField = ({ field, label, state, dispatch, open, ...rest }: FigureFieldProps) => {
+/** What the state says of one field. */
+export const fieldProps = (field: FieldKey, state: TableState) => ({
+  field,
+  text: state.entries[field]?.text ?? '',
+  fault: messageFor(field, state.drawn.problems, state.unit),
+  unit: state.unit,
+});
+
+/**
+ * One figure of a card. Its message waits until the maker has finished typing. Remembered: thirty of them
+ * stand on the table, and one is typed at a time.
+ */
+export const FigureField = memo(function FigureField(props: FigureFieldProps) {
+  const { field, dispatch, onStart, open, unit } = props;
   const [typing, setTyping] = useState(false);
   const [here, setHere] = useState(false);
-  const message = typing ? undefined : messageFor(field, state.drawn.problems, state.unit);
-  const { onStart } = rest;
   return (
     <Field
-      label={label}
-      message={message?.text}
-      tone={message?.tone ?? 'error'}
-      hint={here ? rest.hint : undefined}
-      describedBy={rest.describedBy}
+      label={props.label}
+      message={typing ? undefined : props.fault}
+      hint={here ? props.hint : undefined}
+      describedBy={props.describedBy}
     >
       {(wiring) => (
         <LengthInput
           wiring={wiring}
           name={field}
-          text={state.entries[field]?.text ?? ''}
+          text={props.text}
           placeholder={
             open === undefined
               ? undefined
-              : [writeValue(field, open.value, state.unit), open.mark].filter(Boolean).join(' ')
+              : [writeValue(field, open, unit), props.mark].filter(Boolean).join(' ')
           }
           onType={(text) => {
             setTyping(true);
@@ -49,7 +64,7 @@ export const FigureField = ({ field, label, state, dispatch, open, ...rest }: Fi
           }}
           onStart={() => {
             setHere(true);
-            onStart?.();
+            onStart?.(field);
           }}
           onDone={() => {
             setTyping(false);
@@ -60,4 +75,4 @@ export const FigureField = ({ field, label, state, dispatch, open, ...rest }: Fi
       )}
     </Field>
   );
-};
+});

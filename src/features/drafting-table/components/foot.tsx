@@ -9,7 +9,7 @@ type FootProps = { readonly draft: Draft; readonly state: TableState };
 export const Foot = ({ draft, state: { drawn, unit } }: FootProps) => {
   const faults = drawn.problems.filter((problem) => problem.severity === 'error');
   return (
-    <div className="figures max-h-28 shrink-0 space-y-1 overflow-y-auto border-t border-rule px-4 py-2 text-sm sm:pl-10">
+    <div className="figures max-h-28 min-h-15 shrink-0 space-y-1 overflow-y-auto border-t border-rule px-4 py-2 text-sm sm:pl-10">
       <div role="status">
         {!drawn.fresh && (
           <p className="font-semibold text-madder">

@@ -3,36 +3,36 @@ import { useState, type Dispatch } from 'react';
 import { coreMeasures, furtherMeasures, type MeasureKey } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
 
+import type { FieldKey } from '../fields.ts';
 import type { TableAction, TableState } from '../table-state.ts';
 import { BodyFigure } from './body-figure.tsx';
-import { FigureField } from './figure-field.tsx';
+import { FigureField, fieldProps } from './figure-field.tsx';
 
 type MeasureCardProps = {
   readonly state: TableState;
   readonly dispatch: Dispatch<TableAction>;
 };
 
+const everyMeasure = [...coreMeasures, ...furtherMeasures];
+
 /** The list of measures beside a body figure on which the current measure's tape is lit. */
 export const MeasureCard = ({ state, dispatch }: MeasureCardProps) => {
-  const [current, setCurrent] = useState<MeasureKey>();
+  const [current, setCurrent] = useState<FieldKey>();
   const [all, setAll] = useState(false);
-  const guide = current === undefined ? undefined : measureGuide[current];
-  const estimates = state.drawn.draft?.body;
+  const key = everyMeasure.find((each) => current === `card.${each}`);
+  const guide = key === undefined ? undefined : measureGuide[key];
+  const body = state.drawn.draft?.body;
 
-  const row = (key: MeasureKey) => (
+  const row = (measure: MeasureKey) => (
     <FigureField
-      key={key}
-      field={`card.${key}`}
-      label={measureGuide[key].label}
-      state={state}
-      dispatch={dispatch}
+      key={measure}
+      {...fieldProps(`card.${measure}`, state)}
+      label={measureGuide[measure].label}
+      open={body !== undefined && measure in body.estimated ? body.measures[measure] : undefined}
+      mark="est."
       describedBy="how-taken"
-      onStart={() => setCurrent(key)}
-      open={
-        estimates !== undefined && key in estimates.estimated
-          ? { value: estimates.measures[key], mark: 'est.' }
-          : undefined
-      }
+      dispatch={dispatch}
+      onStart={setCurrent}
     />
   );
 
@@ -76,9 +76,7 @@ export const MeasureCard = ({ state, dispatch }: MeasureCardProps) => {
           className="min-h-10 font-semibold text-brass"
           onClick={() => setAll(!all)}
         >
-          {all
-            ? 'Only the ten measures'
-            : `All measures (${coreMeasures.length + furtherMeasures.length})`}
+          {all ? 'Only the ten measures' : `All measures (${everyMeasure.length})`}
         </button>
         {all && (
           <>

@@ -5,7 +5,7 @@ import { styleHints, styleLabels } from '#shared/drafts/gown/style-labels.ts';
 
 import { Segmented } from '../../../ui/segmented.tsx';
 import type { TableAction, TableState } from '../table-state.ts';
-import { FigureField } from './figure-field.tsx';
+import { FigureField, fieldProps } from './figure-field.tsx';
 
 type StyleCardProps = {
   readonly state: TableState;
@@ -29,12 +29,11 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
   const row = (key: StyleLength) => (
     <FigureField
       key={key}
-      field={`style.${key}`}
+      {...fieldProps(`style.${key}`, state)}
       label={styleLabels[key]}
       hint={styleHints[key]}
-      state={state}
+      open={style?.[key]}
       dispatch={dispatch}
-      open={style === undefined ? undefined : { value: style[key] }}
     />
   );
   const flare = state.entries['style.flareFraction']?.text ?? '0.5';
@@ -84,12 +83,11 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
         {easeLevels.map((level) => (
           <FigureField
             key={level}
-            field={`style.ease.${level}`}
+            {...fieldProps(`style.ease.${level}`, state)}
             label={styleLabels[`ease.${level}`]}
             hint={styleHints[`ease.${level}`]}
-            state={state}
+            open={style?.ease[level]}
             dispatch={dispatch}
-            open={style === undefined ? undefined : { value: style.ease[level] }}
           />
         ))}
       </form>
