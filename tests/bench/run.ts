@@ -1,0 +1,23 @@
+import { bundle } from '../support/bundle.ts';
+import { benchBrowser } from './browser.ts';
+import { benchPdf } from './pdf.ts';
+import type { Measured } from './redraw.ts';
+
+/*
+ * `npm run bench`: one JSON object a line. What runs in Node alone is bundled first, as it ships: run
+ * from its sources through tsx it would carry tsx's wrappers.
+ */
+
+type RedrawBench = { readonly benchRedraw: () => Promise<readonly Measured[]> };
+
+/** The bundle exports what its source does. */
+const asRedrawBench = (loaded: unknown): RedrawBench => loaded as RedrawBench;
+
+const write = (lines: readonly object[]): void => {
+  for (const line of lines) process.stdout.write(`${JSON.stringify(line)}\n`);
+};
+
+const redraw = asRedrawBench(await import(await bundle(new URL('redraw.ts', import.meta.url))));
+write(await redraw.benchRedraw());
+write(await benchPdf());
+write([await benchBrowser()]);
