@@ -2,14 +2,21 @@ import express, { type Express } from 'express';
 import type { Logger } from 'pino';
 import type { Database } from './database/client.ts';
 import { ping } from './database/client.ts';
+import { accountRouter } from './features/account/router.ts';
 import { draftsRouter } from './features/drafts/router.ts';
+import { gownsRouter } from './features/gowns/router.ts';
+import { createGown } from './features/gowns/service.ts';
+import { measureCardsRouter } from './features/measure-cards/router.ts';
 import type { Printer } from './features/print/printer.ts';
 import { printRouter } from './features/print/router.ts';
 import { samplesRouter } from './features/samples/router.ts';
 import { errorReply } from './http/error-reply.ts';
-import { RefusalError } from './http/refusal.ts';
+import { nothingHere } from './http/nothing-here.ts';
+import { originCheck } from './http/origin-check.ts';
 import { requestLog } from './http/request-log.ts';
 import { securityHeaders } from './http/security-headers.ts';
+import type { Own } from './http/serve-own.ts';
+import { openSessions } from './http/session.ts';
 import type { Limits } from './settings.ts';
 
 /** All an application is built from; nothing in it is global. */
@@ -19,6 +26,8 @@ export type Parts = {
   readonly limits: Limits;
   readonly printer: Printer;
   readonly overHttps: boolean;
+  /** Addresses our own pages are opened under. */
+  readonly origins: readonly string[];
   readonly trustedProxies: number;
   /** What answers outside the API: the built screens, or Vite in development. */
   readonly screens: express.RequestHandler;
@@ -40,17 +49,17 @@ export function buildApp(parts: Parts): Express {
     await ping(parts.database);
     response.setHeader('Cache-Control', 'no-store').json({ name: 'ellwand', database: 'answers' });
   });
-  app.use('/api', express.json({ limit: bodyLimit }));
+  app.use('/api', originCheck(parts.origins), express.json({ limit: bodyLimit }));
   app.use(samplesRouter(parts.database));
   app.use(draftsRouter(parts.limits));
   app.use(printRouter(parts.limits, parts.printer));
+  const own: Own = { ...parts, sessions: openSessions(parts.database, parts.overHttps) };
+  app.use(accountRouter(own, createGown));
+  app.use(gownsRouter(own));
+  app.use(measureCardsRouter(own));
   app.use('/api', nothingHere);
   app.use(parts.screens);
   app.use(nothingHere);
   app.use(errorReply(parts.log));
   return app;
 }
-
-const nothingHere: express.RequestHandler = (_request, _response, next) => {
-  next(new RefusalError('not-found', 'There is nothing at this address.'));
-};

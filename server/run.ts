@@ -2,9 +2,11 @@ import type { RequestHandler } from 'express';
 import { pino } from 'pino';
 import { buildApp } from './app.ts';
 import { connect } from './database/client.ts';
+import { settleDemoAccount } from './database/demo-account.ts';
 import { migrate } from './database/migrate.ts';
 import { seedSamples } from './database/sample-seed.ts';
 import { openPrinter } from './features/print/printer.ts';
+import { isOnThisMachineAlone, ownOrigins } from './http/own-origins.ts';
 import { listen } from './listen.ts';
 import { places, readSettings } from './settings.ts';
 
@@ -21,6 +23,7 @@ export async function runServer(screens: {
   });
   await migrate(database, places.migrations);
   await seedSamples(database);
+  await settleDemoAccount(database, isOnThisMachineAlone(settings));
   const { limits, overHttps, trustedProxies } = settings;
   const printer = openPrinter(limits.printsWaiting);
   const app = buildApp({
@@ -29,6 +32,7 @@ export async function runServer(screens: {
     log,
     limits,
     overHttps,
+    origins: ownOrigins(settings),
     trustedProxies,
     screens: screens.handler,
     strictHeaders: screens.strictHeaders,

@@ -6,6 +6,8 @@ export type Settings = {
   readonly databaseUrl: string;
   readonly host: string;
   readonly port: number;
+  /** Address people open, where it is another than host and port say. */
+  readonly publicUrl: string | undefined;
   /** Whether people reach it over https, so that browsers are told to stay there. */
   readonly overHttps: boolean;
   /** How many proxies stand before it and are believed about addresses. */
@@ -17,6 +19,10 @@ export type Settings = {
 /** How much one address, and all together, may ask for. */
 export type Limits = {
   readonly draftsPerMinute: number;
+  /** Requests for gowns and measure cards of one's own; a save drafts as well. */
+  readonly savesPerMinute: number;
+  /** Sign-ins and sign-ups, whether they succeed or not. */
+  readonly signInsPerMinute: number;
   readonly printsPerMinute: number;
   /** Prints that may wait for their turn; further ones are sent away for a moment. */
   readonly printsWaiting: number;
@@ -32,21 +38,32 @@ function wholeNumber(env: NodeJS.ProcessEnv, name: string, otherwise: number): n
   return value;
 }
 
+function publicAddress(env: NodeJS.ProcessEnv): string | undefined {
+  const text = env['PUBLIC_URL'];
+  if (text === undefined || text === '') return undefined;
+  if (URL.canParse(text) && /^https?:/.test(text)) return text;
+  throw new Error(`PUBLIC_URL must be an address such as https://gowns.example; it is "${text}".`);
+}
+
 /** Reads the settings from the environment; throws a plain sentence where one cannot be right. */
 export function readSettings(env: NodeJS.ProcessEnv): Settings {
   const databaseUrl = env['DATABASE_URL'];
   if (databaseUrl === undefined || databaseUrl === '') {
     throw new Error('DATABASE_URL must name a PostgreSQL database; npm start sets it by itself.');
   }
+  const publicUrl = publicAddress(env);
   return {
     databaseUrl,
     host: env['HOST'] ?? '127.0.0.1',
     port: wholeNumber(env, 'PORT', 4173),
-    overHttps: env['PUBLIC_URL']?.startsWith('https:') ?? false,
+    publicUrl,
+    overHttps: publicUrl?.startsWith('https:') ?? false,
     trustedProxies: wholeNumber(env, 'TRUST_PROXY', 0),
     logLevel: env['LOG_LEVEL'] ?? 'info',
     limits: {
       draftsPerMinute: wholeNumber(env, 'DRAFTS_PER_MINUTE', 240),
+      savesPerMinute: wholeNumber(env, 'SAVES_PER_MINUTE', 300),
+      signInsPerMinute: wholeNumber(env, 'SIGN_INS_PER_MINUTE', 60),
       printsPerMinute: wholeNumber(env, 'PRINTS_PER_MINUTE', 30),
       printsWaiting: wholeNumber(env, 'PRINTS_WAITING', 24),
     },

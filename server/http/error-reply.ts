@@ -3,6 +3,7 @@ import type { Logger } from 'pino';
 import { problemSchema } from '#shared/api/problem.ts';
 import type { Refusal } from '#shared/api/problem-codes.ts';
 import type { Problem } from '#shared/units/problem.ts';
+import { isLostConnection } from '../database/lost-connection.ts';
 import { RefusalError, statusOf } from './refusal.ts';
 import { requestIdOf } from './request-log.ts';
 
@@ -12,7 +13,9 @@ import { requestIdOf } from './request-log.ts';
  */
 function traceOf(error: unknown): { kind: string; code?: unknown; frames: string[] } {
   if (!(error instanceof Error)) return { kind: typeof error, frames: [] };
+  // A message may itself hold lines that look like frames.
   const frames = (error.stack ?? '')
+    .replace(error.message, () => '')
     .split('\n')
     .filter((line) => line.trimStart().startsWith('at '));
   const cause = error.cause instanceof Error ? error.cause : error;
@@ -45,6 +48,17 @@ function fromPath(error: unknown): RefusalError | undefined {
     : undefined;
 }
 
+/** A database that is away for a moment: nothing is lost by asking again. */
+function fromDatabase(error: unknown): RefusalError | undefined {
+  return isLostConnection(error)
+    ? new RefusalError(
+        'unavailable',
+        'The database does not answer for the moment. Send the same again.',
+        { retryAfterSeconds: 1 },
+      )
+    : undefined;
+}
+
 /** Turns every failure into one shape of reply; only bugs are logged, with the request's id. */
 export const errorReply =
   (log: Logger): ErrorRequestHandler =>
@@ -53,7 +67,10 @@ export const errorReply =
       next(error);
       return;
     }
-    const known = error instanceof RefusalError ? error : (fromParser(error) ?? fromPath(error));
+    const known =
+      error instanceof RefusalError
+        ? error
+        : (fromParser(error) ?? fromPath(error) ?? fromDatabase(error));
     const id = requestIdOf(response);
     if (known === undefined) log.error({ id, ...traceOf(error) }, 'fault');
     const refused =

@@ -1,6 +1,7 @@
 import type { Request, Response, Router } from 'express';
-import type { Answer, Endpoint, Received } from '#shared/api/endpoint.ts';
+import type { Answer, Endpoint, Params, Received } from '#shared/api/endpoint.ts';
 import { readBody } from '#shared/api/read-body.ts';
+import { offer } from './nothing-here.ts';
 import { RefusalError, refusalFor } from './refusal.ts';
 import { unitAsked } from './unit-asked.ts';
 
@@ -15,22 +16,58 @@ type Frozen<T> = T extends readonly (infer Item)[]
     : T;
 
 /** What a handler gives: the contract's own answer or, for a file, its bytes with a name. */
-type Given<E extends Endpoint> = E['reply'] extends { kind: 'file' } ? Download : Frozen<Answer<E>>;
+export type Given<E extends Endpoint> = E['reply'] extends { kind: 'file' }
+  ? Download
+  : Frozen<Answer<E>>;
+
+/** What a handler is given beside the body. */
+export type Asked<E extends Endpoint, C = undefined> = {
+  readonly request: Request;
+  readonly response: Response;
+  readonly params: Params<E>;
+  readonly caller: C;
+};
 
 type Handler<E extends Endpoint> = (received: Received<E>, request: Request) => Promise<Given<E>>;
 
 /** Answers one line of the contract: reads the body by its schema, and writes the reply by its schema. */
 export function serve<E extends Endpoint>(router: Router, contract: E, handler: Handler<E>): void {
+  serveTo(
+    router,
+    () => Promise.resolve(undefined),
+    contract,
+    (received, { request }) => handler(received, request),
+  );
+}
+
+/** The same to somebody in particular: who it is is settled before anything of the request is read. */
+export function serveTo<E extends Endpoint, C>(
+  router: Router,
+  whoAsks: (request: Request, response: Response) => Promise<C>,
+  contract: E,
+  handler: (received: Received<E>, asked: Asked<E, C>) => Promise<Given<E>>,
+): void {
   const method = contract.method === 'GET' ? 'get' : 'post';
   router[method](contract.path, async (request, response) => {
-    const given = await handler(received(contract, request), request);
     response.setHeader('Cache-Control', 'no-store');
-    send(contract, response, given);
+    const caller = await whoAsks(request, response);
+    const params = paramsOf(contract, request);
+    const body = received(contract, request);
+    send(contract, response, await handler(body, { request, response, params, caller }));
   });
-  router.all(contract.path, () => {
-    const allow = contract.method === 'GET' ? 'GET, HEAD' : contract.method;
-    throw new RefusalError('method-not-allowed', `This address answers ${allow}.`, { allow });
-  });
+  router.all(contract.path, offer(contract.method === 'GET' ? ['GET', 'HEAD'] : ['POST']));
+}
+
+function paramsOf<E extends Endpoint>(contract: E, request: Request): Params<E> {
+  if (contract.params === undefined) return paramsAs(undefined);
+  const parsed = contract.params.safeParse(request.params);
+  if (!parsed.success) throw new RefusalError('not-found', 'There is nothing at this address.');
+  return paramsAs(parsed.data);
+}
+
+/** The value was read by the contract's own schema, which its type is made of. */
+function paramsAs<E extends Endpoint>(value: unknown): Params<E> {
+  return value as Params<E>;
 }
 
 function received<E extends Endpoint>(contract: E, request: Request): Received<E> {

@@ -20,9 +20,18 @@ const names = new Map<string, string>([
   ['style', 'The style card'],
   ['rules', 'The house rules'],
   ['', 'The request'],
+  ['email', 'The e-mail address'],
+  ['password', 'The password'],
+  ['newPassword', 'The new password'],
+  ['title', 'The title'],
+  ['name', 'The name'],
 ]);
 
-const called = (field: string): string => names.get(field) ?? `“${field}”`;
+/** A gown's cards lie deeper in some requests than in others. */
+const within = /^(gown\.)?(content\.)?(inputs\.)?/;
+
+const called = (field: string): string =>
+  names.get(field) ?? names.get(field.replace(within, '')) ?? `“${field}”`;
 
 const short = (text: string): string => (text.length > 60 ? `${text.slice(0, 60)}…` : text);
 
@@ -55,9 +64,12 @@ const wrongType = (field: string, expected: string, missing: boolean): Said => {
       ? said`${name} is missing: measure it and give it as “${field}”.`
       : said`${name} is missing: give it as “${field}”.`;
   }
-  if (expected === 'object') {
+  if (expected === 'object' || expected === 'record') {
     return said`${name} must be an object of keys and values, such as ${objects[field] ?? '{"bust": 10}'}.`;
   }
+  if (expected === 'array') return said`${name} must be a list.`;
+  if (expected === 'boolean') return said`${name} must be true or false.`;
+  if (expected === 'int') return said`${name} must be a whole number.`;
   if (expected !== 'number') return said`${name} must be text in quotes.`;
   const unit = field.endsWith('shoulderSlope') ? 'of degrees' : 'of millimetres';
   return field === 'style.flareFraction' || field === 'rules.sideShare'
@@ -71,7 +83,18 @@ function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
   if (issue.code === 'too_big') {
     return said`${name} is too long: keep it to ${Number(issue.maximum)} letters.`;
   }
-  if (issue.code === 'invalid_format') {
+  if (issue.code === 'too_small') {
+    return issue.origin === 'string'
+      ? said`${name} is too short: give at least ${counted(Number(issue.minimum))}.`
+      : said`${name} must be at least ${Number(issue.minimum)}.`;
+  }
+  if (issue.code === 'invalid_format' && issue.format === 'email') {
+    return said`${name} must be a whole address, such as name@example.org.`;
+  }
+  if (issue.code === 'invalid_format' && issue.format === 'uuid') {
+    return said`${name} must be a UUID, such as crypto.randomUUID() gives.`;
+  }
+  if (issue.code === 'invalid_format' && issue.format === 'date') {
     return said`${name} must be a day written as year, month, day, such as 2026-11-14.`;
   }
   if (issue.code === 'invalid_value') {
@@ -80,6 +103,8 @@ function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
   }
   return said`${name} cannot be read: look up its form in the README.`;
 }
+
+const counted = (letters: number): string => (letters === 1 ? '1 letter' : `${letters} letters`);
 
 const fieldOf = (path: readonly PropertyKey[]): string => short(path.map(String).join('.'));
 

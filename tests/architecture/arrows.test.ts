@@ -71,6 +71,17 @@ describe('an import against an arrow is found', () => {
     ]);
   });
 
+  it('when anything but the two modules for it signs people in by its own means', async () => {
+    const oslo = 'export const verify = () => true;\n';
+    const found = await build({
+      'node_modules/oslo/package.json': '{"name":"oslo","exports":{"./request":"./request.js"}}',
+      'node_modules/oslo/request.js': oslo,
+      'server/http/session.ts': "import { verify } from 'oslo/request';\nverify();\n",
+      'server/app.ts': "import { verify } from 'oslo/request';\nverify();\n",
+    });
+    expect(found).toEqual(['home-of-oslo: server/app.ts -> node_modules/oslo/request.js']);
+  });
+
   it('when shared code reads the disk', async () => {
     const found = await build({
       'shared/body/card.ts': "import { readFileSync } from 'node:fs';\nreadFileSync('/');\n",

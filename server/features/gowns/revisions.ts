@@ -1,0 +1,98 @@
+import type { Answer, Received } from '#shared/api/endpoint.ts';
+import type {
+  listRevisions as listing,
+  nameRevision as naming,
+  readRevision as reading,
+  returnToRevision as returning,
+} from '#shared/api/revisions.ts';
+import type { Database } from '../../database/client.ts';
+import { acknowledge, acknowledgedSave } from '../../database/saves.ts';
+import { conflict, notFound, sameRecord } from '../../http/conflict.ts';
+import { drawnPiecesOf } from './drawing.ts';
+import { contentOf, gownView } from './gown-view.ts';
+import { copyOf, keepAsRevision } from './keep-as-revision.ts';
+import { findGown, holdGown } from './repository.ts';
+import {
+  findRevision,
+  insertRevision,
+  type ListedRevisionRow,
+  listRevisionRows,
+} from './revision-repository.ts';
+import { changeGown, type Maker, type Saved } from './service.ts';
+
+type Listed = Answer<typeof listing>['revisions'][number];
+
+const listed = (row: ListedRevisionRow): Listed => ({
+  id: row.id,
+  name: row.name,
+  automatic: row.automatic,
+  version: row.version,
+  parentId: row.parentId,
+  createdAt: row.createdAt.toISOString(),
+  drawnBy: row.engine,
+});
+
+export async function listRevisions(
+  database: Database,
+  { accountId }: Maker,
+  gownId: string,
+): Promise<Listed[]> {
+  if ((await findGown(database, accountId, gownId)) === undefined) throw notFound('gown');
+  return (await listRevisionRows(database, accountId, gownId)).map(listed);
+}
+
+export async function readRevision(
+  database: Database,
+  { accountId }: Maker,
+  gownId: string,
+  revisionId: string,
+): Promise<Answer<typeof reading>> {
+  const row = await findRevision(database, accountId, gownId, revisionId);
+  if (row === undefined) throw notFound('revision');
+  return { ...listed(row), content: contentOf(row), drawn: drawnPiecesOf(row) };
+}
+
+/** Names a gown as it was last saved. */
+export async function nameRevision(
+  database: Database,
+  maker: Maker,
+  gownId: string,
+  { saveId, baseVersion, name }: Received<typeof naming>,
+): Promise<Listed> {
+  const { accountId } = maker;
+  return database.transaction(async (turn) => {
+    const row = await holdGown(turn, accountId, gownId);
+    if (row === undefined) throw notFound('gown');
+    const before = await acknowledgedSave(turn, accountId, saveId);
+    if (before !== undefined) {
+      const made = await findRevision(turn, accountId, gownId, before.record);
+      sameRecord(before, made?.id ?? '');
+      if (made !== undefined) return listed(made);
+    }
+    if (row.version !== baseVersion) throw conflict(row, gownView(row, maker));
+    const revision = copyOf(row, name, false);
+    await insertRevision(turn, revision);
+    const { id: record, version, createdAt: savedAt } = revision;
+    await acknowledge(turn, { accountId, saveId, record, version, savedAt });
+    return listed(revision);
+  });
+}
+
+/** Makes a revision the gown again; what stood there is kept. */
+export const returnToRevision = (
+  database: Database,
+  maker: Maker,
+  { gownId, revisionId }: { readonly gownId: string; readonly revisionId: string },
+  save: Received<typeof returning>,
+): Promise<Saved> =>
+  changeGown(database, maker, gownId, save, async (turn, row) => {
+    const revision = await findRevision(turn, maker.accountId, gownId, revisionId);
+    if (revision === undefined) throw notFound('revision');
+    await keepAsRevision(turn, row, `Before returning to ${revision.name}`);
+    const { engine, draftNumber, drawnFrom, pieces, picture, fresh } = revision;
+    return {
+      content: contentOf(revision),
+      drawing: { engine, draftNumber, drawnFrom, pieces, picture, fresh },
+      parentId: revisionId,
+    };
+  });

@@ -1,0 +1,68 @@
+import { Router } from 'express';
+import {
+  archiveGown,
+  createGown,
+  duplicateGown,
+  listGowns,
+  readGown,
+  renameGown,
+  saveGown,
+  unarchiveGown,
+} from '#shared/api/gowns.ts';
+import {
+  listRevisions,
+  nameRevision,
+  readRevision,
+  returnToRevision,
+} from '#shared/api/revisions.ts';
+import { addressLimit } from '../../http/address-limit.ts';
+import { doneTo } from '../../http/conflict.ts';
+import { type Own, serveOwn } from '../../http/serve-own.ts';
+import { listedGown } from './gown-view.ts';
+import { listGownRows, setGownArchived, setGownTitle } from './repository.ts';
+import * as revisions from './revisions.ts';
+import * as service from './service.ts';
+
+export function gownsRouter({ database, sessions, limits }: Own): Router {
+  const router = Router();
+  router.use('/api/gowns', addressLimit(limits.savesPerMinute));
+
+  serveOwn(router, sessions, listGowns, async (_body, { caller }) => ({
+    gowns: (await listGownRows(database, caller.accountId)).map(listedGown),
+  }));
+  serveOwn(router, sessions, createGown, (body, { caller }) =>
+    service.createGown(database, caller, body),
+  );
+  serveOwn(router, sessions, readGown, (_body, { caller, params }) =>
+    service.readGown(database, caller, params.gownId),
+  );
+  serveOwn(router, sessions, saveGown, (body, { caller, params }) =>
+    service.saveGown(database, caller, params.gownId, body),
+  );
+  serveOwn(router, sessions, duplicateGown, (body, { caller, params }) =>
+    service.duplicateGown(database, caller, params.gownId, body),
+  );
+  serveOwn(router, sessions, renameGown, async ({ title }, { caller, params }) =>
+    doneTo('gown', await setGownTitle(database, caller.accountId, params.gownId, title)),
+  );
+  serveOwn(router, sessions, archiveGown, async (_body, { caller, params }) =>
+    doneTo('gown', await setGownArchived(database, caller.accountId, params.gownId, new Date())),
+  );
+  serveOwn(router, sessions, unarchiveGown, async (_body, { caller, params }) =>
+    doneTo('gown', await setGownArchived(database, caller.accountId, params.gownId, null)),
+  );
+
+  serveOwn(router, sessions, listRevisions, async (_body, { caller, params }) => ({
+    revisions: await revisions.listRevisions(database, caller, params.gownId),
+  }));
+  serveOwn(router, sessions, nameRevision, (body, { caller, params }) =>
+    revisions.nameRevision(database, caller, params.gownId, body),
+  );
+  serveOwn(router, sessions, readRevision, (_body, { caller, params }) =>
+    revisions.readRevision(database, caller, params.gownId, params.revisionId),
+  );
+  serveOwn(router, sessions, returnToRevision, (body, { caller, params }) =>
+    revisions.returnToRevision(database, caller, params, body),
+  );
+  return router;
+}
