@@ -125,7 +125,11 @@ export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
         }}
         {...gestures}
       >
-        <canvas ref={canvas} className="absolute inset-0 h-full w-full" aria-hidden="true" />
+        <canvas
+          ref={canvas}
+          className={`absolute inset-0 h-full w-full ${state.drawn.fresh ? '' : 'opacity-50'}`}
+          aria-hidden="true"
+        />
         <svg className="pointer-events-none absolute inset-0 h-full w-full">
           <Lettering draft={draft} layout={layout} view={view} size={size} named={!drafting} />
           {step !== undefined && <StepPoints step={step} layout={layout} view={view} />}
