@@ -81,10 +81,12 @@ describe('lettering on paper, looked at in pixels', () => {
     expect(blank).toEqual([]);
   }, 60_000);
 
-  it('builds inches as fractions: 36 15⁄16 is narrower than its figures side by side', async () => {
+  it('builds inches as fractions, whatever was printed before', async () => {
+    // Embedding ½ once made fontkit forget the figures it is composed of.
+    await printed('½ ⅛ 1234567890⁄');
     const built = breadth(await picture('15⁄16'));
     const plain = breadth(await picture('15/16'));
-    expect(built).toBeLessThan(plain * 0.9);
+    expect(built).toBeLessThan(plain * 0.8);
     expect(inkIn(await picture('15⁄16'))).toBeGreaterThan(300);
   });
 

@@ -54,13 +54,14 @@ export async function withFile<T>(
 export const renderPart = (pdf: Uint8Array, page: number, part: Part): Promise<Picture> =>
   withFile(pdf, async (file) => {
     const pixels = (mm: number): string => String(Math.round(mm * 10));
-    await run('pdftoppm', [
+    const { stderr } = await run('pdftoppm', [
       ...['-r', '254', '-gray', '-singlefile', '-f', String(page), '-l', String(page)],
       ...['-x', pixels(part.x), '-y', pixels(part.y)],
       ...['-W', pixels(part.width), '-H', pixels(part.height)],
       file,
       `${file}.page`,
     ]);
+    if (stderr !== '') throw new Error(`poppler complains: ${stderr}`);
     return readPgm(await readFile(`${file}.page.pgm`));
   });
 

@@ -1,6 +1,5 @@
 import { readFileSync } from 'node:fs';
 import { deflateSync } from 'node:zlib';
-import type { Font } from 'fontkit';
 import {
   PDFContext,
   PDFHeader,
@@ -13,15 +12,15 @@ import {
 import type { Drawing, Mark, PrintJob } from '#shared/exports/drawing.ts';
 import { toPoints } from '#shared/sheets/papers.ts';
 import { contentOf, type Fonts } from './page-content.ts';
-import { readFont, useFont } from './pdf-font.ts';
+import { type Typeface, readFont, useFont } from './pdf-font.ts';
 
-const read = (file: string): Font =>
+const read = (file: string): Typeface =>
   readFont(readFileSync(new URL(`./fonts/${file}`, import.meta.url)));
 
-let typeface: { readonly regular: Font; readonly heavy: Font } | undefined;
+let typeface: { readonly regular: Typeface; readonly heavy: Typeface } | undefined;
 
 /** Read once a process: half a megabyte each, the same for every document. */
-const typefaces = (): { readonly regular: Font; readonly heavy: Font } =>
+const typefaces = (): { readonly regular: Typeface; readonly heavy: Typeface } =>
   (typeface ??= {
     regular: read('SourceSans3-Regular.ttf'),
     heavy: read('SourceSans3-Semibold.ttf'),

@@ -1,7 +1,7 @@
 /// <reference path="./fontkit.d.ts" />
 import { deflateSync } from 'node:zlib';
 import fontkit, { type Font, type Glyph } from 'fontkit';
-import { type PDFContext, PDFHexString, PDFRawStream, type PDFRef } from 'pdf-lib';
+import { type PDFContext, PDFRawStream, type PDFRef, PDFString } from 'pdf-lib';
 
 /** A typeface being used in one document: it remembers which letters, and embeds only those. */
 export type PdfFont = {
@@ -9,6 +9,15 @@ export type PdfFont = {
   set(text: string): { readonly glyphs: string; readonly width: number };
   embed(context: PDFContext): Promise<PDFRef>;
 };
+
+/** A font that has been read, with the small figures of its built fractions. */
+export type Typeface = {
+  readonly font: Font;
+  readonly numerators: ReadonlyMap<string, Glyph>;
+  readonly denominators: ReadonlyMap<string, Glyph>;
+};
+
+const slash = '\u2044';
 
 /** Stands where the typeface has no letter for a character. */
 const missing = 0x25a1;
@@ -63,10 +72,10 @@ const packed = (
 };
 
 /** Begins using a typeface in a document; `tag` keeps the subsets of one document apart. */
-export function useFont(font: Font, tag: string): PdfFont {
+export function useFont(typeface: Typeface, tag: string): PdfFont {
+  const { font } = typeface;
   const subset = font.createSubset();
   const letters = new Map<number, Letter>();
-  const fractions = new Map<string, readonly Letter[]>();
   const characters: [string, number][] = [];
   const widths: number[] = [font.glyphForCodePoint(missing).advanceWidth];
 
@@ -93,12 +102,13 @@ export function useFont(font: Font, tag: string): PdfFont {
 
   /** Figures round a fraction slash, as the small figures of a built fraction. */
   const fraction = (text: string): readonly Letter[] => {
-    const known = fractions.get(text);
-    if (known) return known;
-    const { glyphs } = font.layout(text, ['frac']);
-    const built = glyphs.map((glyph, i) => take(glyph, text.codePointAt(i) ?? missing));
-    fractions.set(text, built);
-    return built;
+    let small = typeface.numerators;
+    return Array.from(text, (each) => {
+      if (each === slash) small = typeface.denominators;
+      const codePoint = each.codePointAt(0) ?? missing;
+      const glyph = small.get(each);
+      return glyph ? take(glyph, codePoint) : letterFor(codePoint);
+    });
   };
 
   return {
@@ -141,8 +151,8 @@ export function useFont(font: Font, tag: string): PdfFont {
           BaseFont: name,
           CIDToGIDMap: 'Identity',
           CIDSystemInfo: {
-            Registry: PDFHexString.fromText('Adobe'),
-            Ordering: PDFHexString.fromText('Identity'),
+            Registry: PDFString.of('Adobe'),
+            Ordering: PDFString.of('Identity'),
             Supplement: 0,
           },
           FontDescriptor: descriptor,
@@ -163,5 +173,22 @@ export function useFont(font: Font, tag: string): PdfFont {
   };
 }
 
-/** Reads a TrueType font; its letters can then be used in any number of documents. */
-export const readFont = (bytes: Uint8Array): Font => fontkit.create(bytes);
+const figures = Array.from('0123456789');
+
+/**
+ * Reads a TrueType font; its letters can then be used in any number of documents. The small figures are
+ * looked up here, once: fontkit forgets what a glyph stands for when it embeds composites, and no
+ * longer builds fractions after that.
+ */
+export function readFont(bytes: Uint8Array): Typeface {
+  const font = fontkit.create(bytes);
+  const small = figures.map((each) => font.layout(`${each}${slash}${each}`, ['frac']).glyphs);
+  const pick = (place: number): ReadonlyMap<string, Glyph> =>
+    new Map(
+      small.flatMap((glyphs, i) => {
+        const [figure, glyph] = [figures[i], glyphs[place]];
+        return figure !== undefined && glyph ? [[figure, glyph] as const] : [];
+      }),
+    );
+  return { font, numerators: pick(0), denominators: pick(2) };
+}
