@@ -48,8 +48,8 @@ type Sight = {
 /** Whether a place lies at the allowance from an edge, or from an end of it carried on straight. */
 export function follows({ path }: Edge, wanted: number | undefined, at: Point): boolean {
   if (wanted === undefined) return false;
-  const off = nearestPlace(path, at)?.off ?? Infinity;
-  if (Math.abs(off - wanted) <= clearBound) return true;
+  const off = nearestPlace(path, at, wanted + clearBound)?.off;
+  if (off !== undefined && off >= wanted - clearBound) return true;
   const beyond = (end: Point | undefined, away: Point): boolean => {
     const out = end && subtract(at, end);
     return (
@@ -76,8 +76,7 @@ const filled = (
   asked.every((share) => {
     const here = add(at, scale(out, from + share * (until - from)));
     return piece.edges.some(
-      ({ path }, k) =>
-        (nearestPlace(path, here)?.off ?? Infinity) <= (allowances[k] ?? 0) + clearBound,
+      ({ path }, k) => nearestPlace(path, here, (allowances[k] ?? 0) + clearBound) !== undefined,
     );
   });
 
@@ -97,20 +96,20 @@ function standOff(sight: Sight, index: number, look: Look): number {
   if (away === undefined) return -inside;
   const hit = add(look.at, scale(look.out, away));
   const followed = piece.edges.some((edge, k) => follows(edge, allowances[k], hit));
-  const own = nearestPlace(piece.edges[index]?.path ?? [], hit)?.off ?? 0;
-  return own >= wanted - clearBound && followed ? wanted : away;
+  const own = nearestPlace(piece.edges[index]?.path ?? [], hit, wanted - clearBound);
+  return own === undefined && followed ? wanted : away;
 }
 
-/** Places along an edge to look from, leaving out what belongs to its corners. */
-function looksAlong(edge: Edge, ends: readonly EdgeEnd[]): readonly Look[] {
-  const along = edge.path.flatMap((segment) =>
-    lookOut[segment.kind].map((t) => ({
-      at: pointAt(segment, t),
-      out: turnLeft(tangentAt(segment, t)),
-    })),
-  );
-  const free = along.filter(({ at }) => ends.every((end) => distance(at, end.at) >= end.left));
-  return [...free, ...ends.flatMap(({ mitre }) => mitre ?? [])];
+/** Looks from places along an edge, leaving out what belongs to its corners, and past its mitres. */
+function lookAlong(edge: Edge, ends: readonly EdgeEnd[], look: (from: Look) => void): void {
+  for (const segment of edge.path) {
+    for (const t of lookOut[segment.kind]) {
+      const at = pointAt(segment, t);
+      if (ends.some((end) => end.left > 0 && distance(at, end.at) < end.left)) continue;
+      look({ at, out: turnLeft(tangentAt(segment, t)) });
+    }
+  }
+  for (const { mitre } of ends) if (mitre) look(mitre);
 }
 
 /** For each edge that has an allowance, the place where the cutting line stands off least rightly. */
@@ -121,11 +120,11 @@ export function worstClearances(piece: FinishedPiece, rules: HouseRules): readon
     const wanted = allowances[index];
     if (wanted === undefined) return [];
     let worst: Clearance | undefined;
-    for (const look of looksAlong(edge, edgeEnds(piece, index, allowances))) {
+    lookAlong(edge, edgeEnds(piece, index, allowances), (look) => {
       const found = standOff(sight, index, look);
-      if (worst && Math.abs(found - wanted) <= Math.abs(worst.found - wanted)) continue;
+      if (worst && Math.abs(found - wanted) <= Math.abs(worst.found - wanted)) return;
       worst = { edge, wanted, found, at: look.at };
-    }
+    });
     return worst ? [worst] : [];
   });
 }

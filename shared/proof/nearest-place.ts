@@ -1,6 +1,7 @@
 import { pointAt, velocityAt } from '../geometry/curve.ts';
 import type { Line, Path, Segment } from '../geometry/path.ts';
 import { type Point, distance, dot, subtract } from '../geometry/point.ts';
+import { boxOf } from './crossing-itself.ts';
 
 /** A place on a path by stretch and share, and how far from it the point asked about lies, mm. */
 export type NearestPlace = { readonly index: number; readonly t: number; readonly off: number };
@@ -50,40 +51,47 @@ function narrowed(segment: Segment, at: Point, low: number, high: number): numbe
   return t;
 }
 
-/** Shares of a curve between which a place nearer than `best` may lie. */
-function candidates(
-  segment: Segment,
-  at: Point,
-  best: number,
-): readonly (readonly [number, number])[] {
-  const looks = Array.from({ length: shares + 1 }, (_, i) => pointAt(segment, i / shares));
-  const offs = looks.map((each) => distance(each, at));
-  return looks.flatMap((here, i) => {
-    const own = offs[i] ?? Infinity;
-    const [before, after] = [looks[i - 1] ?? here, looks[i + 1] ?? here];
-    if (own > (offs[i - 1] ?? Infinity) || own > (offs[i + 1] ?? Infinity)) return [];
-    if (own - Math.max(distance(here, before), distance(here, after)) > best) return [];
-    return [[between0and1((i - 1) / shares), between0and1((i + 1) / shares)] as const];
-  });
+/** How far a point lies from the box round a stretch, and so at least from the stretch. */
+function fromBox(segment: Segment, at: Point): number {
+  const { left, right, top, bottom } = boxOf(segment);
+  const across = Math.max(left - at.x, 0, at.x - right);
+  const down = Math.max(top - at.y, 0, at.y - bottom);
+  return Math.hypot(across, down);
 }
 
-/** The place on a path nearest a point; no answer for an empty path. */
-export function nearestPlace(path: Path, at: Point): NearestPlace | undefined {
+/**
+ * The place on a path nearest a point; no answer where none lies within the distance asked about.
+ */
+export function nearestPlace(path: Path, at: Point, within = Infinity): NearestPlace | undefined {
   let best: NearestPlace | undefined;
+  let least = within;
   const consider = (segment: Segment, index: number, t: number): void => {
     const off = distance(pointAt(segment, t), at);
-    if (best === undefined || off < best.off) best = { index, t, off };
+    if (off > least || (best && off >= least)) return;
+    best = { index, t, off };
+    least = off;
   };
-  path.forEach((segment, index) => {
+  for (const [index, segment] of path.entries()) {
+    if (fromBox(segment, at) > least) continue;
     if (segment.kind === 'line') {
       consider(segment, index, onLine(segment, at));
-      return;
+      continue;
     }
-    for (const [low, high] of candidates(segment, at, best?.off ?? Infinity)) {
-      consider(segment, index, narrowed(segment, at, low, high));
+    let before = segment.from;
+    let here = segment.from;
+    for (let i = 0; i <= shares; i += 1) {
+      const after = i < shares ? pointAt(segment, (i + 1) / shares) : here;
+      const off = distance(here, at);
+      const step = Math.max(distance(before, here), distance(here, after));
+      if (off <= distance(before, at) && off <= distance(after, at) && off - step <= least) {
+        const [low, high] = [between0and1((i - 1) / shares), between0and1((i + 1) / shares)];
+        consider(segment, index, narrowed(segment, at, low, high));
+      }
+      before = here;
+      here = after;
     }
     consider(segment, index, 0);
     consider(segment, index, 1);
-  });
+  }
   return best;
 }

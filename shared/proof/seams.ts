@@ -11,8 +11,8 @@ const farthest = 0.1;
 
 /** Length of edge before a notch; no answer where the notch is off its edge. */
 function arcOfNotch(edge: Edge, notch: Notch): number | undefined {
-  const place = nearestPlace(edge.path, notch.at);
-  return place === undefined || place.off > farthest ? undefined : lengthBefore(edge.path, place);
+  const place = nearestPlace(edge.path, notch.at, farthest);
+  return place && lengthBefore(edge.path, place);
 }
 
 const notchesOf = (piece: Piece, edge: Edge): readonly Notch[] =>
