@@ -5,11 +5,14 @@ type JsonReply<R extends z.ZodType> = { readonly kind: 'json'; readonly schema: 
 type FileReply = { readonly kind: 'file'; readonly mediaType: 'application/pdf' | 'image/svg+xml' };
 export type Reply = JsonReply<z.ZodType> | FileReply;
 
+/** What fills the places of a path. */
+type PathParams = z.ZodType<Readonly<Record<string, string>>>;
+
 /** One line of the contract, read alike by the server and by the browser. */
 export type Endpoint<
   B extends z.ZodType | undefined = z.ZodType | undefined,
   R extends Reply = Reply,
-  P extends z.ZodType | undefined = z.ZodType | undefined,
+  P extends PathParams | undefined = PathParams | undefined,
 > = {
   readonly method: 'GET' | 'POST';
   /** What stands for a parameter is written `:gownId`. */
@@ -25,7 +28,7 @@ export type Endpoint<
 export const endpoint = <
   B extends z.ZodType | undefined,
   const R extends Reply,
-  P extends z.ZodType | undefined = undefined,
+  P extends PathParams | undefined = undefined,
 >(
   contract: Endpoint<B, R, P>,
 ): Endpoint<B, R, P> => contract;

@@ -6,6 +6,7 @@ import { inject } from 'vitest';
 import { buildApp } from '#server/app.ts';
 import { connect } from '#server/database/client.ts';
 import { openPrinter } from '#server/features/print/printer.ts';
+import { ownOrigins } from '#server/http/own-origins.ts';
 import { listen } from '#server/listen.ts';
 import type { Limits } from '#server/settings.ts';
 import { freePort } from '#server/ops/free-port.mjs';
@@ -19,7 +20,13 @@ export type ServerUnderTest = {
   readonly close: () => Promise<void>;
 };
 
-const roomy: Limits = { draftsPerMinute: 10_000, printsPerMinute: 10_000, printsWaiting: 100 };
+const roomy: Limits = {
+  draftsPerMinute: 10_000,
+  savesPerMinute: 10_000,
+  signInsPerMinute: 10_000,
+  printsPerMinute: 10_000,
+  printsWaiting: 100,
+};
 
 async function asAdmin(sentence: string): Promise<void> {
   const admin = new Client({ connectionString: inject('clusterUrl') });
@@ -28,32 +35,36 @@ async function asAdmin(sentence: string): Promise<void> {
   await admin.end();
 }
 
-/** A real server on a real database of its own, cloned from the template. */
+/** A real server on a real database of its own, cloned from the template, or on one that is there. */
 export async function startServer(
   options: {
     readonly limits?: Partial<Limits>;
     readonly screens?: RequestHandler;
     readonly overHttps?: boolean;
+    readonly publicUrl?: string;
+    readonly databaseUrl?: string;
   } = {},
 ): Promise<ServerUnderTest> {
   const name = `clone_${randomBytes(6).toString('hex')}`;
-  await asAdmin(`create database ${name} template ${template}`);
-  const databaseUrl = inject('clusterUrl').replace(/postgres$/, name);
+  if (options.databaseUrl === undefined)
+    await asAdmin(`create database ${name} template ${template}`);
+  const databaseUrl = options.databaseUrl ?? inject('clusterUrl').replace(/postgres$/, name);
   const { database, close } = connect(databaseUrl, () => undefined);
   const lines: string[] = [];
   const limits = { ...roomy, ...options.limits };
   const printer = openPrinter(limits.printsWaiting);
+  const port = await freePort();
   const app = buildApp({
     database,
     printer,
     log: pino({ base: null }, { write: (line) => void lines.push(line) }),
     limits,
     overHttps: options.overHttps ?? false,
+    origins: ownOrigins({ publicUrl: options.publicUrl, host: '127.0.0.1', port }),
     trustedProxies: 0,
     screens: options.screens ?? ((_request, _response, next) => next()),
     strictHeaders: true,
   });
-  const port = await freePort();
   const stopListening = await listen(app, port, '127.0.0.1');
   return {
     address: `http://127.0.0.1:${port}`,
