@@ -1,9 +1,9 @@
-import { draftGown } from '../../../shared/engine/draft-gown.ts';
-import { houseRulePresets } from '../../../shared/drafting/house-rule-presets.ts';
-import type { FinishedPiece } from '../../../shared/drafting/piece.ts';
-import { levelTitles } from '../../../shared/exports/level-titles.ts';
-import { pathData } from '../../../shared/exports/path-data.ts';
-import { spread, type SpreadPiece } from '../../../shared/exports/spread.ts';
+import { draftGown } from '#shared/engine/draft-gown.ts';
+import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
+import type { FinishedPiece } from '#shared/drafting/piece.ts';
+import { levelTitles } from '#shared/exports/level-titles.ts';
+import { pathData } from '#shared/exports/path-data.ts';
+import { spread, type SpreadPiece } from '#shared/exports/spread.ts';
 
 /** The body of the drawing on the front page; invented. */
 const card = {
