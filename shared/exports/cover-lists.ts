@@ -9,8 +9,8 @@ import { pens, stroke, strokes, words } from './marks.ts';
 import type { Block } from './text-block.ts';
 import { shorten } from './type-width.ts';
 
-const rowSize = 3;
-const rowStep = 4.3;
+const rowSize = 3.1;
+const rowStep = 4.6;
 
 /** A heading with a hairline under it. */
 export const heading = (text: string, x: number, y: number, width: number): Block => ({
@@ -51,18 +51,23 @@ const valueOf = (draft: Draft, key: MeasureKey, unit: Unit): string =>
     ? formatAngle(draft.body.measures[key])
     : formatLength(draft.body.measures[key], unit);
 
-/** The measures used, in two columns; an estimate is marked `est.` before its value. */
-export function measureList(draft: Draft, unit: Unit, x: number, y: number, width: number): Block {
+/** The measures used, in one column or two; an estimate is marked `est.` before its value. */
+export function measureList(
+  draft: Draft,
+  unit: Unit,
+  columns: 1 | 2,
+  { x, y, width }: { readonly x: number; readonly y: number; readonly width: number },
+): Block {
   const keys = measuresUsed(draft);
-  const rows = Math.ceil(keys.length / 2);
+  const rows = Math.ceil(keys.length / columns);
   const estimated: Readonly<Record<string, string | undefined>> = draft.body.estimated;
-  const column = (width - 5) / 2;
+  const column = columns === 2 ? (width - 5) / 2 : width;
   const marks = keys.flatMap((key, i): Mark[] => {
     const at = x + (i < rows ? 0 : column + 5);
     const line = y + rowStep * (i % rows) + rowSize;
     const value = `${estimated[key] === undefined ? '' : 'est. '}${valueOf(draft, key, unit)}`;
     return [
-      words(shorten(measureGuide[key].label, rowSize, column - 15), at, line, rowSize),
+      words(shorten(measureGuide[key].label, rowSize, column - 18), at, line, rowSize),
       words(value, at + column, line, rowSize, { anchor: 'end' }),
     ];
   });

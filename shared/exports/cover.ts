@@ -12,7 +12,7 @@ import type { Mark } from './drawing.ts';
 import { box, pens, words } from './marks.ts';
 import { pagePlan } from './page-plan.ts';
 import { rod } from './rod.ts';
-import { paragraph, stack } from './text-block.ts';
+import { type Block, paragraph, stack } from './text-block.ts';
 import { shorten } from './type-width.ts';
 
 /** Where the two squares stand on the cover, mm: the print tests measure them there. */
@@ -26,7 +26,7 @@ export const selectionTitles: { readonly [S in Selection]: string } = {
   'whole-gown': 'Whole gown',
 };
 
-const body = 3.2;
+const body = 3.4;
 
 /** Whose draft this is, in one line. */
 export const draftLine = (draft: Draft): string =>
@@ -79,6 +79,38 @@ function squares(draft: Draft, unit: Unit, sheets: SheetPlan, pieces: readonly F
   ];
 }
 
+/** What to cut, from which measures, and what the maker was warned of; between two heights where it fits. */
+function listsBeside(
+  draft: Draft,
+  pieces: readonly FinishedPiece[],
+  unit: Unit,
+  { x, width }: { readonly x: number; readonly width: number },
+): readonly Mark[] {
+  const { metric, inch } = testSquares;
+  const note = 'est. = estimated, not taken on the body: measure it when you can.';
+  const lists = (columns: 1 | 2): Block =>
+    stack(
+      [
+        (y) => heading('Pieces', x, y, width),
+        (y) => pieceList(pieces, x, y, width),
+        (y) => heading(`Measures, ${unit}`, x, y + 3, width),
+        (y) => measureList(draft, unit, columns, { x, y, width }),
+        (y) => paragraph(note, x, y, width, 2.8, { grey: 0.3 }),
+        ...draft.warnings.map(
+          (each) => (y: number) => paragraph(speak(each.said, unit), x, y, width, 2.8),
+        ),
+      ],
+      metric.y,
+      1.2,
+    );
+  const foot = inch.y + inch.side;
+  const roomy = lists(1);
+  return roomy.next <= foot ? roomy.marks : lists(2).marks.filter((each) => reaches(each, foot));
+}
+
+/** Whether lettering stands above a height; many warnings may run on, and the table shows them all. */
+const reaches = (mark: Mark, foot: number): boolean => mark.kind !== 'words' || mark.at.y <= foot;
+
 /** The first sheet: what this is, whether it was printed true, which sheets follow and what to mind. */
 export function coverPage(
   draft: Draft,
@@ -86,14 +118,12 @@ export function coverPage(
   pieces: readonly FinishedPiece[],
   { selection, unit }: { readonly selection: Selection; readonly unit: Unit },
 ): readonly Mark[] {
+  const { paper, tiles } = sheets.plan;
   const left = printerMargin;
-  const { plan } = sheets;
-  const { paper } = plan;
   const width = paper.width - 2 * printerMargin;
   const { inch } = testSquares;
   const aside = inch.x + inch.side + 6;
-  const asideWidth = left + width - aside;
-  const count = `${plan.tiles.length + 1} sheets of ${paper.name}, this one counted`;
+  const count = `${tiles.length + 1} sheets of ${paper.name}, this one counted`;
   return [
     ...rod(left, printerMargin, width, unit),
     words(selectionTitles[selection], left, 25, 9, { heavy: true }),
@@ -102,28 +132,7 @@ export function coverPage(
     words('Print at 100 %, no fit to page.', left, 35.6, 4, { heavy: true }),
     words(count, left + width, 35.6, 3.6, { anchor: 'end' }),
     ...squares(draft, unit, sheets, pieces),
-    ...stack(
-      [
-        (y) => heading('Pieces', aside, y, asideWidth),
-        (y) => pieceList(pieces, aside, y, asideWidth),
-        (y) => heading(`Measures, ${unit}`, aside, y + 3, asideWidth),
-        (y) => measureList(draft, unit, aside, y, asideWidth),
-        (y) =>
-          paragraph(
-            'est. = estimated, not taken on the body: measure it when you can.',
-            aside,
-            y,
-            asideWidth,
-            2.8,
-            { grey: 0.3 },
-          ),
-        ...draft.warnings.map(
-          (each) => (y: number) => paragraph(speak(each.said, unit), aside, y, asideWidth, 2.8),
-        ),
-      ],
-      testSquares.metric.y,
-      1.2,
-    ).marks,
-    ...paragraph(cuttingCautions, left, inch.y + inch.side + 4, width, 3).marks,
+    ...listsBeside(draft, pieces, unit, { x: aside, width: left + width - aside }),
+    ...paragraph(cuttingCautions, left, inch.y + inch.side + 4, width, 3.2).marks,
   ];
 }
