@@ -1,5 +1,6 @@
 import type { Dart, Piece } from '../drafting/piece.ts';
 import { endTangent, pathLength, startTangent } from '../geometry/curve.ts';
+import { fine } from '../units/said.ts';
 import { finding, missing, proofLine } from './finding.ts';
 import { type JoinedPair, isPanelSeam, spoken, turnBetween } from './joined-edges.ts';
 import type { Finding, ProofLine } from './proof.ts';
@@ -17,7 +18,7 @@ function legsEqual(piece: Piece, dart: Dart): Finding {
     side,
     centre,
     legBound,
-    [`${nameOf(piece, dart)}: legs `, { mm: centre }, ' and ', { mm: side }, '.'],
+    [`${nameOf(piece, dart)}: legs `, fine(centre), ' and ', fine(side), '.'],
     [
       {
         piece: piece.name,

@@ -3,7 +3,7 @@ import type { Dart, Edge, LevelLine, LevelName, Piece } from '../drafting/piece.
 import { crossingsOfLine, pathLength, pointAt } from '../geometry/curve.ts';
 import type { Path } from '../geometry/path.ts';
 import { type Point, cross, distance, subtract, unit } from '../geometry/point.ts';
-import type { Said } from '../units/said.ts';
+import { type Said, fine } from '../units/said.ts';
 import { finding, missing, proofLine } from './finding.ts';
 import type { Finding, GirthRow, ProofLine } from './proof.ts';
 import { measureOpenings } from './top-openings.ts';
@@ -136,19 +136,19 @@ function girthFinding(wanted: WantedGirth, { girth, where, of }: Look): Finding 
   if (girth === undefined) return missing([`${title}: not found on the ${of}.`], where);
   const asked: Said =
     wanted.body === undefined
-      ? [`${title}: asked `, { mm: wanted.wanted }]
+      ? [`${title}: asked `, fine(wanted.wanted)]
       : [
           `${title}: body `,
           { mm: wanted.body },
           ...(wanted.ease === undefined ? [] : [' with ease ', { mm: wanted.ease }]),
           ' makes ',
-          { mm: wanted.wanted },
+          fine(wanted.wanted),
         ];
   return finding(
     girth,
     wanted.wanted,
     bound,
-    [...asked, `; the ${of} measure `, { mm: girth }, '.'],
+    [...asked, `; the ${of} measure `, fine(girth), '.'],
     where,
   );
 }

@@ -2,7 +2,7 @@ import type { FinishedPiece } from '../drafting/piece.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
 import type { Path } from '../geometry/path.ts';
 import { distance } from '../geometry/point.ts';
-import type { Said } from '../units/said.ts';
+import { type Said, fine } from '../units/said.ts';
 import { worstCaps } from './caps.ts';
 import { clearBound, worstClearances } from './clearance.ts';
 import { areaInside, crossesItself } from './crossing-itself.ts';
@@ -28,7 +28,7 @@ function outlineFindings(piece: FinishedPiece, which: string, outline: Path): re
   const title = `${piece.title}, ${which}`;
   if (!(gap <= closedBound)) {
     const open = Number.isFinite(gap) ? gap : 1;
-    const said: Said = [`${title}: is not closed, a gap of `, { mm: open }, ' is left.'];
+    const said: Said = [`${title}: is not closed, a gap of `, fine(open), ' is left.'];
     return [finding(open, 0, closedBound, said, where)];
   }
   const crossed = crossesItself(outline);
@@ -60,9 +60,9 @@ function clearanceFindings(piece: FinishedPiece, rules: HouseRules): readonly Fi
         clearBound,
         [
           `${piece.title}, ${spoken(edge.name)}: the cutting line lies `,
-          { mm: found },
+          fine(found),
           ' outside the seam line, ',
-          { mm: wanted },
+          fine(wanted),
           ' asked.',
         ],
         [{ piece: piece.name, edge: edge.name, at }],

@@ -1,5 +1,6 @@
 import type { Edge, Notch, Piece } from '../drafting/piece.ts';
 import { lengthBefore, pathLength } from '../geometry/curve.ts';
+import { fine } from '../units/said.ts';
 import { finding, missing, proofLine } from './finding.ts';
 import { type JoinedPair, type Placed, type PlacedEdge, keyOf, spoken } from './joined-edges.ts';
 import { nearestPlace } from './nearest-place.ts';
@@ -65,9 +66,9 @@ function notchFindings(pair: JoinedPair): readonly Finding[] {
         bound,
         [
           `${titleOf(pair)}: the notches “${spoken(notch.name)}” lie `,
-          { mm: one },
+          fine(one),
           ' and ',
-          { mm: other },
+          fine(other),
           ' along.',
         ],
         where,
@@ -91,7 +92,7 @@ function walk(pair: JoinedPair): { readonly row: SeamRow; readonly findings: rea
     one,
     other,
     bound,
-    [`${titleOf(pair)}: `, { mm: one }, ' and ', { mm: other }, `${eased}.`],
+    [`${titleOf(pair)}: `, fine(one), ' and ', fine(other), `${eased}.`],
     where,
   );
   const findings = [seam, ...notchFindings(pair)];
@@ -111,7 +112,7 @@ function walkSelf({ piece, edge }: PlacedEdge): { row: SeamRow; findings: readon
   const length = pathLength(edge.path);
   const side = { piece: piece.name, edge: edge.name, length };
   const title = `${piece.title}, ${spoken(edge.name)}, left to right`;
-  const said = [`${title}: `, { mm: length }, ' on both, cut as a pair.'];
+  const said = [`${title}: `, fine(length), ' on both, cut as a pair.'];
   const where = [{ piece: piece.name, edge: edge.name }];
   return {
     row: { title, first: side, second: side, ease: 0, holds: true },

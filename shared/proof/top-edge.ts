@@ -1,6 +1,7 @@
 import type { Construction } from '../drafting/construction.ts';
 import type { Piece } from '../drafting/piece.ts';
 import { pathLength } from '../geometry/curve.ts';
+import { fine } from '../units/said.ts';
 import { finding, missing, proofLine } from './finding.ts';
 import type { Finding, ProofLine } from './proof.ts';
 import { type MeasuredOpening, measureOpenings } from './top-openings.ts';
@@ -17,13 +18,7 @@ function openingFinding({ asked, width }: MeasuredOpening): Finding {
     width,
     asked.wanted,
     bound,
-    [
-      `${side} opening above the bust: `,
-      { mm: width },
-      ' taken of ',
-      { mm: asked.wanted },
-      ' asked.',
-    ],
+    [`${side} opening above the bust: `, fine(width), ' taken of ', fine(asked.wanted), ' asked.'],
     where,
   );
 }
@@ -37,7 +32,7 @@ function edgeFinding(pieces: readonly Piece[]): Finding {
   const where = tops.map(({ piece, edge }) => ({ piece, edge: edge.name }));
   return tops.length === 0
     ? missing(['No top edge is drawn.'], [])
-    : finding(length, length, bound, ['The closed top edge is ', { mm: length }, ' long.'], where);
+    : finding(length, length, bound, ['The closed top edge is ', fine(length), ' long.'], where);
 }
 
 /** Proof line 8: the edge above the bust has had its share taken out, so it cannot gape. */
