@@ -2,6 +2,7 @@ import { readFileSync } from 'node:fs';
 import { parseArgs } from 'node:util';
 import { readInputs } from '#shared/api/read-body.ts';
 import type { DraftInputs } from '#shared/engine/draft.ts';
+import type { Proof } from '#shared/proof/proof.ts';
 import { type PaperName, papers } from '#shared/sheets/papers.ts';
 import type { Problem } from '#shared/units/problem.ts';
 import type { Unit } from '#shared/units/said.ts';
@@ -10,6 +11,12 @@ import { speak } from '#shared/units/speak.ts';
 export const usage = `Use: npm run --silent draft -- --measures card.json --style style.json
        [--rules rules.json] [--paper A4|Letter] [--unit cm|in] --out DIR
      npm run --silent draft -- --schema card|style|rules`;
+
+/** What the command ends with: every proof line holds, drawn but a line fails, or bad input. */
+export const ends = { proven: 0, unproven: 1, refused: 2 } as const;
+
+/** A gown that is drawn but not proven is written all the same, and the exit code says so. */
+export const endOf = (proof: Proof): number => (proof.holds ? ends.proven : ends.unproven);
 
 /** Bad input on the command line; its message is for stderr and names the field or the option. */
 export class RefusedError extends Error {

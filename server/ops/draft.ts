@@ -12,14 +12,13 @@ import { tilesPdf } from '../features/print/tiles-pdf.ts';
 import {
   type Order,
   RefusedError,
+  endOf,
+  ends,
   readOptions,
   readOrder,
   refuse,
   refuseProblems,
 } from './draft-order.ts';
-
-/** What the command ends with: every proof line holds, drawn but a line fails, or bad input. */
-const ends = { proven: 0, unproven: 1, refused: 2 } as const;
 
 async function draw({ inputs, paper, unit }: Order): Promise<{ draft: Draft; tiles: Uint8Array }> {
   try {
@@ -66,7 +65,7 @@ async function main(args: readonly string[]): Promise<number> {
     console.error(`${each.field}: ${speak(each.said, order.unit)}`);
   }
   console.log(speak(draft.proof.verdict, order.unit));
-  return draft.proof.holds ? ends.proven : ends.unproven;
+  return endOf(draft.proof);
 }
 
 try {

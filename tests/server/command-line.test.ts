@@ -5,6 +5,10 @@ import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { draftSchema } from '#shared/api/draft-reply.ts';
 import { refusal } from '#shared/api/problem-codes.ts';
+import { prove } from '#shared/proof/prove.ts';
+import { point } from '#shared/geometry/point.ts';
+import { endOf } from '#server/ops/draft-order.ts';
+import { moveSeamPoint, withPiece } from '../support/tamper.ts';
 import { card, post } from './support/request-bodies.ts';
 import { type ServerUnderTest, startServer } from './support/server-under-test.ts';
 
@@ -21,17 +25,17 @@ afterAll(async () => {
 
 type Ended = { readonly code: number; readonly said: string; readonly told: string };
 
-function draft(...args: string[]): Promise<Ended> {
+function ended(program: string, args: readonly string[]): Promise<Ended> {
   return new Promise((resolve) => {
-    const child = execFile(
-      'npm',
-      ['run', '--silent', 'draft', '--', ...args],
-      (_error, out, err) => {
-        resolve({ code: child.exitCode ?? -1, said: out, told: err });
-      },
-    );
+    const child = execFile(program, args, (_error, said, told) => {
+      resolve({ code: child.exitCode ?? -1, said, told });
+    });
   });
 }
+
+/** The command as npm runs it, without the second npm takes. */
+const draft = (...args: string[]) =>
+  ended(process.execPath, ['--import', 'tsx', 'server/ops/draft.ts', ...args]);
 
 async function file(name: string, content: unknown): Promise<string> {
   const path = join(folder, name);
@@ -46,8 +50,8 @@ const order = async (measures: unknown, style: unknown = {}) => [
 ];
 
 describe('bad input ends with 2, and stderr names the field', () => {
-  it('nothing at all', async () => {
-    const { code, told } = await draft();
+  it('nothing at all, asked for as the README says', async () => {
+    const { code, told } = await ended('npm', ['run', '--silent', 'draft']);
     expect(code).toBe(2);
     expect(told).toContain('--measures is missing');
   });
@@ -115,6 +119,22 @@ describe('a gown whose every proof line holds ends with 0', () => {
     const drawn = draftSchema.parse(JSON.parse(await readFile(join(out, 'draft.json'), 'utf8')));
     expect(JSON.parse(await readFile(join(out, 'proof.json'), 'utf8'))).toEqual(drawn.proof);
     expect((await readFile(join(out, 'tiles.pdf'))).subarray(0, 5).toString()).toBe('%PDF-');
+  });
+});
+
+describe('a gown that is drawn with a failed line', () => {
+  it('ends with 1, however many other lines hold', async () => {
+    const args = await order(card);
+    await draft(...args);
+    const drawn = draftSchema.parse(
+      JSON.parse(await readFile(join(folder, 'out', 'draft.json'), 'utf8')),
+    );
+    const slipped = withPiece(drawn.pieces, drawn.pieces[0]?.name ?? '', (piece) =>
+      moveSeamPoint(piece, piece.edges[0]?.path[0]?.from ?? point(0, 0), point(0, 5)),
+    );
+    const { construction, inputs } = drawn;
+    expect(endOf(drawn.proof)).toBe(0);
+    expect(endOf(prove({ pieces: slipped, construction, rules: inputs.rules }))).toBe(1);
   });
 });
 
