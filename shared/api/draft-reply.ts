@@ -5,6 +5,7 @@ import {
   type FurtherMeasure,
   type MeasureKey,
 } from '../body/card.ts';
+import { handleKeys } from '../drafting/construction.ts';
 import { levelNames, type LevelName } from '../drafting/piece.ts';
 import type { Draft } from '../engine/draft.ts';
 import { measureCard } from './card.ts';
@@ -80,7 +81,7 @@ const construction = z.object({
 });
 
 const handle = z.object({
-  key: z.enum(['neckDepth', 'neckWidth', 'kneeFinished']),
+  key: z.enum(handleKeys),
   piece: z.string(),
   at: pointSchema,
   along: pointSchema,

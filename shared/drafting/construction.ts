@@ -1,9 +1,22 @@
 import type { Point } from '../geometry/point.ts';
 import type { LevelName } from './piece.ts';
 
+/** Style-card keys of the points a maker may move by hand, from the top of the gown down. */
+export const handleKeys = [
+  'neckDepth',
+  'neckWidth',
+  'topDrop',
+  'sideDepth',
+  'backDepth',
+  'dartLength',
+  'kneeLevel',
+  'kneeFinished',
+  'flareLength',
+] as const;
+
 /** A point a maker may move by hand, and the style-card key it stands for. */
 export type Handle = {
-  readonly key: 'neckDepth' | 'neckWidth' | 'kneeFinished';
+  readonly key: (typeof handleKeys)[number];
   readonly piece: string;
   readonly at: Point;
   /** Unit direction in which the value grows. */

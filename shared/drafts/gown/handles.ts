@@ -1,60 +1,105 @@
 import type { Handle } from '../../drafting/construction.ts';
 import type { Edge, Piece } from '../../drafting/piece.ts';
-import { endOf, startOf } from '../../geometry/curve.ts';
+import { endOf, endTangent, startOf } from '../../geometry/curve.ts';
 import { type Point, distance, point } from '../../geometry/point.ts';
 import type { GownStyle } from './style-card.ts';
 
-/** The points of the front a maker moves by hand: neck depth, neck width, finished knee. */
+type Held = { readonly piece: Piece; readonly edge: Edge };
+
+const down = point(0, 1);
+const up = point(0, -1);
+const out = point(1, 0);
+
+/**
+ * The points a maker moves by hand, each where it lies on a piece: neck depth, neck width and top drop
+ * at the peak, side and back depth, dart length, knee seam and its girth, flare length. A straight top
+ * line has neither dip nor peak: its drop is moved at the centre.
+ */
 export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonly Handle[] {
-  const tops = pieces.filter((piece) => piece.side === 'front' && piece.part === 'top');
-  const topEdges = tops.flatMap((piece) =>
-    piece.edges
-      .filter((edge) => edge.kind === 'top')
-      .map((edge): { readonly piece: Piece; readonly edge: Edge } => ({ piece, edge })),
+  const front = edgesOf(pieces, (piece) => piece.side === 'front' && piece.part === 'top');
+  const back = edgesOf(pieces, (piece) => piece.side === 'back' && piece.part === 'top');
+  const centre = heldAt(front, 'top', startOf);
+  const side = front.find(({ edge }) => edge.kind === 'side');
+  const middle = edgesOf(pieces, (piece) => piece.name === 'front-middle');
+  const tip = dartTip(
+    pieces.find((piece) => piece.name === 'front-middle'),
+    style,
   );
-  const handles: Handle[] = [];
-  const first = topEdges[0];
-  const centre = first ? startOf(first.edge.path) : undefined;
-  // A straight top line has neither dip nor peak to move.
-  const dips = style.topLine !== 'straight';
-  if (dips && first && centre) {
-    handles.push({
-      key: 'neckDepth',
-      piece: first.piece.name,
-      at: centre,
-      along: point(0, 1),
-      perMillimetre: 1,
-    });
-  }
-  const peak = point(style.neckWidth, style.topDrop);
-  const places = topEdges.flatMap(({ piece, edge }) =>
-    edge.path.map((segment) => ({ piece: piece.name, at: segment.to })),
-  );
-  const nearest = places.reduce<{ readonly piece: string; readonly at: Point } | undefined>(
-    (best, each) => (best && distance(best.at, peak) <= distance(each.at, peak) ? best : each),
-    undefined,
-  );
-  if (dips && nearest) {
-    handles.push({
-      key: 'neckWidth',
-      piece: nearest.piece,
-      at: nearest.at,
-      along: point(1, 0),
-      perMillimetre: 1,
-    });
-  }
-  const middle = pieces.find((piece) => piece.name === 'front-middle');
-  const side = middle?.edges.find((edge) => edge.name === 'side');
-  const knee = side ? endOf(side.path) : undefined;
-  if (middle && knee) {
+  const flare = edgesOf(pieces, (piece) => piece.name === 'flare-front');
+  return [
+    ...(style.topLine === 'straight'
+      ? move('topDrop', centre, down)
+      : [...move('neckDepth', centre, down), ...peakHandles(front, style)]),
+    ...move('sideDepth', side && placed(side, startOf), down),
+    ...move('backDepth', heldAt(back, 'top', startOf), up),
+    ...move('dartLength', tip, down),
+    ...move('kneeLevel', heldAt(middle, 'fold', startOf), up),
     // A millimetre out at one of the four quarters of the knee seam is four round it.
-    handles.push({
-      key: 'kneeFinished',
-      piece: middle.name,
-      at: knee,
-      along: point(1, 0),
-      perMillimetre: 4,
-    });
-  }
-  return handles;
+    ...move('kneeFinished', heldAt(middle, 'side', endOf), out, 4),
+    ...move('flareLength', heldAt(flare, 'fold', startOf), down),
+  ];
+}
+
+type Placed = { readonly piece: string; readonly at: Point };
+
+const move = (
+  key: Handle['key'],
+  place: Placed | undefined,
+  along: Point,
+  perMillimetre = 1,
+): readonly Handle[] => (place === undefined ? [] : [{ key, ...place, along, perMillimetre }]);
+
+const edgesOf = (pieces: readonly Piece[], take: (piece: Piece) => boolean): readonly Held[] =>
+  pieces.filter(take).flatMap((piece) => piece.edges.map((edge) => ({ piece, edge })));
+
+function placed({ piece, edge }: Held, end: typeof startOf): Placed | undefined {
+  const at = end(edge.path);
+  return at && { piece: piece.name, at };
+}
+
+/** An end of the first edge of a kind. */
+function heldAt(
+  edges: readonly Held[],
+  kind: Edge['kind'],
+  end: typeof startOf,
+): Placed | undefined {
+  const held = edges.find(({ edge }) => edge.kind === kind);
+  return held && placed(held, end);
+}
+
+/** The tip of the front dart; none where there is no dart, or one too small to reach its length. */
+function dartTip(middle: Piece | undefined, { dartLength }: GownStyle): Placed | undefined {
+  const at = endOf(middle?.darts[0]?.centreLeg ?? []);
+  const waist = middle?.levels.find(({ level }) => level === 'waist')?.from.y;
+  if (!middle || !at || waist === undefined) return undefined;
+  return Math.abs(at.y - waist - dartLength) < 1e-6 ? { piece: middle.name, at } : undefined;
+}
+
+/**
+ * Where the peak came to lie once the opening above the bust was laid flat: out along the top line it
+ * widens the neck, across it the line drops. The line climbs to the peak in one curve and falls in
+ * another, so the peak is where two curves meet within an edge; failing that, where the line is cut.
+ */
+function peakHandles(front: readonly Held[], style: GownStyle): readonly Handle[] {
+  const peak = point(style.neckWidth, style.topDrop);
+  const places = front
+    .filter(({ edge }) => edge.kind === 'top')
+    .flatMap(({ piece, edge: { path } }) =>
+      path.map((segment, index) => ({
+        piece: piece.name,
+        at: segment.to,
+        along: endTangent([segment]),
+        joint: index < path.length - 1,
+      })),
+    );
+  const joints = places.filter(({ joint }) => joint);
+  const found = (joints.length > 0 ? joints : places.slice(0, 1)).toSorted(
+    (a, b) => distance(a.at, peak) - distance(b.at, peak),
+  )[0];
+  if (!found) return [];
+  const { piece, at, along } = found;
+  return [
+    ...move('neckWidth', { piece, at }, along),
+    ...move('topDrop', { piece, at }, point(-along.y, along.x)),
+  ];
 }
