@@ -1,4 +1,10 @@
-import type { Answer, Endpoint, Sent } from '#shared/api/endpoint.ts';
+import {
+  addressOf,
+  type Answer,
+  type Endpoint,
+  type Params,
+  type Sent,
+} from '#shared/api/endpoint.ts';
 import { refusal, type RefusalCode } from '#shared/api/problem-codes.ts';
 import type { Problem } from '#shared/units/problem.ts';
 
@@ -8,6 +14,8 @@ export class CallFailed extends Error {
     readonly code: RefusalCode | 'offline' | 'unreadable',
     message: string,
     readonly problems: readonly Problem[] = [],
+    /** With `conflict`: the record as the server has it, not yet read by its schema. */
+    readonly current?: unknown,
   ) {
     super(message);
     this.name = 'CallFailed';
@@ -18,14 +26,29 @@ export class CallFailed extends Error {
 export type SentFile = { readonly blob: Blob; readonly name: string | undefined };
 
 /** Calls one line of the contract and gives its JSON, checked against the reply's schema. */
-export async function call<E extends Endpoint>(
+export const call = <E extends Endpoint>(
   endpoint: E,
   body: Sent<E>,
   signal?: AbortSignal,
+): Promise<Answer<E>> => answerFrom(addressOf(endpoint), endpoint, body, signal);
+
+/** The same for a line of the contract whose address names a record. */
+export const callOf = <E extends Endpoint>(
+  endpoint: E,
+  params: Params<E>,
+  body: Sent<E>,
+  signal?: AbortSignal,
+): Promise<Answer<E>> => answerFrom(addressOf(endpoint, params), endpoint, body, signal);
+
+async function answerFrom<E extends Endpoint>(
+  address: string,
+  endpoint: E,
+  body: Sent<E>,
+  signal: AbortSignal | undefined,
 ): Promise<Answer<E>> {
   const { reply } = endpoint;
   if (reply.kind !== 'json') throw new Error(`${endpoint.path} answers a file: use callForFile`);
-  const response = await answered(endpoint, body, signal);
+  const response = await answered(address, endpoint, body, signal);
   const parsed = reply.schema.safeParse(await jsonOf(response));
   if (!parsed.success) throw unreadable();
   return asAnswer<E>(parsed.data);
@@ -37,7 +60,7 @@ export async function callForFile<E extends Endpoint>(
   body: Sent<E>,
   signal?: AbortSignal,
 ): Promise<SentFile> {
-  const response = await answered(endpoint, body, signal);
+  const response = await answered(endpoint.path, endpoint, body, signal);
   const disposition = response.headers.get('content-disposition') ?? '';
   const named = /filename\*=UTF-8''([^;]+)/i.exec(disposition)?.[1];
   return { blob: await response.blob(), name: named && decodeURIComponent(named) };
@@ -49,11 +72,12 @@ function asAnswer<E extends Endpoint>(data: unknown): Answer<E> {
 }
 
 async function answered(
+  address: string,
   endpoint: Endpoint,
   body: unknown,
   signal: AbortSignal | undefined,
 ): Promise<Response> {
-  const response = await fetch(endpoint.path, {
+  const response = await fetch(address, {
     method: endpoint.method,
     ...(body === undefined
       ? {}
@@ -69,7 +93,8 @@ async function answered(
   if (response.ok) return response;
   const refused = refusal.safeParse(await jsonOf(response));
   if (!refused.success) throw unreadable();
-  throw new CallFailed(refused.data.code, refused.data.message, refused.data.problems);
+  const { code, message, problems, current } = refused.data;
+  throw new CallFailed(code, message, problems, current);
 }
 
 const jsonOf = (response: Response): Promise<unknown> =>
