@@ -7,7 +7,8 @@ import type { Unit } from '../units/said.ts';
 import { coverPage, selectionTitles } from './cover.ts';
 import type { PrintJob } from './drawing.ts';
 import { drawPiece } from './piece-drawing.ts';
-import { drawTiles, tileFurniture } from './tile-pages.ts';
+import { tileFurniture } from './tile-furniture.ts';
+import { drawTiles } from './tile-pages.ts';
 
 export type TileChoice = {
   readonly paper: PaperName;
