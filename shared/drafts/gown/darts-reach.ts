@@ -1,7 +1,8 @@
 import { DraftingError } from '../../drafting/drafting-error.ts';
+import { xAt } from '../../geometry/profile.ts';
 import { deg, mm, said } from '../../units/said.ts';
 import type { Half } from './half.ts';
-import { dartShares, heightOn } from './half.ts';
+import { heightOn } from './half.ts';
 import type { Intake } from './intakes.ts';
 
 /** Widest tip of a straight dart, degrees (method section 6). */
@@ -20,12 +21,11 @@ const degrees = (half: number, height: number): number =>
  * @throws DraftingError on `style.shaping`, naming the princess seam as the remedy.
  */
 export function refuseBluntDarts(half: Half, darts: readonly Intake[], topTip: number): void {
-  const below = darts.map((dart, k) => {
-    const share = dartShares(half.dartCount)[k] ?? 1;
+  const below = darts.map((dart) => {
     const underbust = heightOn(half, 'underbust', dart.axis);
     return half.gap.underbust === 0
       ? 0
-      : degrees((share * half.gap.underbust) / 2, Math.max(1, underbust - dart.top));
+      : degrees(xAt(dart.gap, underbust) / 2, underbust - dart.top);
   });
   const blunt = Math.max(
     topTip > widestTip ? topTip : 0,

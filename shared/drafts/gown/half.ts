@@ -1,9 +1,7 @@
-import { DraftingError } from '../../drafting/drafting-error.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
 import type { Cubic } from '../../geometry/path.ts';
 import { type Profile, slopeAt, xAt } from '../../geometry/profile.ts';
-import { said } from '../../units/said.ts';
 import { bustToHip, narrowestDart, shareSuppression, sideLine } from './side-line.ts';
 import type { SideHeights, SideWidths, Suppression } from './side-line.ts';
 import { type SideArcs, towards, truedHeights } from './truing.ts';
@@ -29,6 +27,8 @@ export type HalfInputs = {
   readonly dartTip: number;
   /** Where the dart plan is given: one dart or two. */
   readonly dartCount: 1 | 2;
+  /** Where darts shape the top, the side seam helps them under the bust by its share. */
+  readonly sideHelps: boolean;
   /** Slope (dy/dx) at which the waist seam arrives at the side; the half's own square where absent. */
   readonly seamSlope?: number;
   /** Lengths along the front's side seam from the waist: the back is trued to them. */
@@ -93,9 +93,10 @@ const dampedFrom = 20;
 
 /**
  * Draws a half: side seam, waist seam and intakes, so that every level holds its quarter. The back
- * is trued: its heights at the side are moved until its lengths from the waist are the front's.
+ * is trued: its heights at the side are moved until its lengths from the waist are the front's. No
+ * answer where the girths change so fast that they do not settle.
  */
-export function drawHalf(inputs: HalfInputs): Half {
+export function drawHalf(inputs: HalfInputs): Half | undefined {
   const { quarters, levels, rules } = inputs;
   const shares = dartShares(inputs.dartCount);
   const darts: DartPlan = {
@@ -124,7 +125,7 @@ export function drawHalf(inputs: HalfInputs): Half {
       next.held.seam === round.held.seam;
     round = next;
   }
-  if (!settled) throw cannotBeDrawn();
+  if (!settled) return undefined;
   return {
     side: inputs.side,
     levels,
@@ -193,7 +194,7 @@ function nextRound(
     ...(last.held.underbust ? { underbust: quarters.underbust } : {}),
     ...(last.held.seam ? { seam: last.seam.to.x } : {}),
   };
-  const line = sideLine(last.heights, widths);
+  const line = sideLine(last.heights, helped(inputs, widths, last.heights));
   const slope = inputs.seamSlope ?? -slopeAt(line, last.heights.seam);
   const fall = inputs.trueTo ? last.heights.seam - levels.seam : fallFor(slope, quarters.seam);
   const seam = closedSeam(quarters.seam, levels.seam, fall, slope);
@@ -219,6 +220,21 @@ function nextRound(
   };
 }
 
+/** Leanest the side is pulled in between bust and under-bust to help the darts, 14 degrees [our rule]. */
+const helpingLean = Math.tan((14 * Math.PI) / 180);
+
+/** The side pulled in at the under-bust by its share of what must go there, where it lies farther out. */
+function helped(inputs: HalfInputs, widths: SideWidths, heights: SideHeights): SideWidths {
+  const { bust, underbust } = inputs.quarters;
+  if (!inputs.sideHelps || widths.underbust !== undefined) return widths;
+  const pulled = Math.max(
+    bust - inputs.rules.sideShare * (bust - underbust),
+    bust - helpingLean * (heights.underbust - heights.bust),
+  );
+  const free = xAt(sideLine(heights, widths), heights.underbust);
+  return free > pulled ? { ...widths, underbust: pulled } : widths;
+}
+
 /** The first dart's centre leg continues the princess seam above; a second stands midway to the side. */
 function dartAxes(
   axis: number,
@@ -232,15 +248,3 @@ function dartAxes(
   const side = Math.min(xAt(line, heights.seam), xAt(line, heights.waist));
   return [first, (first + side) / 2];
 }
-
-/** Girths so far apart over so little height that no side seam of equal length joins front and back. */
-export const cannotBeDrawn = (): DraftingError =>
-  new DraftingError([
-    {
-      code: 'sides-do-not-meet',
-      severity: 'error',
-      field: 'card.waistGirth',
-      with: ['card.underbustGirth', 'card.hipGirth', 'card.waistToHip'],
-      said: said`These girths change so much over so little height that the back's side seam cannot be made as long as the front's. Measure under-bust, waist, hip and waist to hip again.`,
-    },
-  ]);

@@ -119,30 +119,50 @@ export function princessBelow(half: Half): Intake {
   };
 }
 
-/** Dart tips in the top end this far above the under-bust at the lowest. */
-const tipAboveUnderbust = 10;
+/** A second dart of the top is shorter by this, or by this part of the first where that is short. */
+const shorterBy = 20;
+const shorterPart = 0.3;
 
-/** The darts of a top from short of the bust point down to the waist seam. */
+/**
+ * The darts of a top from short of the bust point down to the waist seam. At the under-bust each takes
+ * by its height, so that their tips open alike.
+ */
 export function topDarts(half: Half, clearance: number): readonly Intake[] {
   const mouths = mouthsOnSeam(half);
-  return dartShares(half.dartCount).map((share, k) => {
+  const shares = dartShares(half.dartCount);
+  const places = shares.map((_, k) => {
     const axis = half.dartAxes[k] ?? half.axis;
     const underbust = heightOn(half, 'underbust', axis);
+    const first = Math.max(1, underbust - heightOn(half, 'bust', axis) - clearance);
+    return { axis, underbust, height: first - k * Math.min(shorterBy, shorterPart * first) };
+  });
+  const heights = places.reduce((sum, { height }) => sum + height, 0);
+  return places.map(({ axis, underbust, height }, k) => {
     const seam = seamAt(half.seam, mouths[k] ?? axis).y;
-    const wished = heightOn(half, 'bust', axis) + clearance + 20 * k;
-    const held = share * half.gap.underbust;
-    const tip = held === 0 ? underbust : Math.min(wished, underbust - tipAboveUnderbust);
-    const knots = [
-      { y: tip, x: 0 },
-      ...(held === 0 ? [] : [{ y: underbust, x: held }]),
-      { y: seam, x: share * half.gap.seam },
-    ];
-    const chord = held === 0 ? (share * half.gap.seam) / (seam - tip) : held / (underbust - tip);
+    const atSeam = { y: seam, x: (shares[k] ?? 1) * half.gap.seam };
+    const held = (half.gap.underbust * height) / heights;
+    if (held === 0) {
+      return {
+        axis,
+        top: underbust,
+        foot: seam,
+        gap: positiveSpline(
+          [{ y: underbust, x: 0 }, atSeam],
+          Math.min(atSeam.x / (seam - underbust), widestTip),
+          0,
+        ),
+      };
+    }
+    const tip = { y: underbust - height, x: 0 };
     return {
       axis,
-      top: tip,
+      top: tip.y,
       foot: seam,
-      gap: positiveSpline(knots, Math.min(chord, widestTip), 0),
+      gap: positiveSpline(
+        [tip, { y: underbust, x: held }, atSeam],
+        Math.min(held / height, widestTip),
+        0,
+      ),
     };
   });
 }

@@ -1,7 +1,9 @@
+import { DraftingError } from '../../drafting/drafting-error.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import { slopeAt } from '../../geometry/profile.ts';
+import { said } from '../../units/said.ts';
 import { type Contour, contours } from './contour.ts';
-import { type Half, type HalfInputs, type QuarterWidths, cannotBeDrawn, drawHalf } from './half.ts';
+import { type Half, type HalfInputs, type QuarterWidths, drawHalf } from './half.ts';
 import { refuseCrowdedIntakes } from './intakes.ts';
 import type { Quarters } from './quarters.ts';
 import { sideArcs } from './truing.ts';
@@ -56,7 +58,7 @@ function dartCount(half: Half, inputs: PairInputs): 1 | 2 {
 }
 
 /** The slope (dy/dx) at which both ends of the waist seam arrive: the mean of their squares. */
-const meanSlope = (front: Half, back: Half): number =>
+const meanSlope = ({ front, back }: Drawn): number =>
   Math.tan(
     -(
       Math.atan(slopeAt(front.line, front.heights.seam)) +
@@ -64,8 +66,36 @@ const meanSlope = (front: Half, back: Half): number =>
     ) / 2,
   );
 
-/** Draws front and back together: the front's side seam is master, their waist seams share a slope. */
+/** Girths so far apart over so little height that no side seam of equal length joins front and back. */
+const cannotBeDrawn = (): DraftingError =>
+  new DraftingError([
+    {
+      code: 'sides-do-not-meet',
+      severity: 'error',
+      field: 'card.waistGirth',
+      with: ['card.underbustGirth', 'card.hipGirth', 'card.waistToHip'],
+      said: said`These girths change so much over so little height that the back's side seam cannot be made as long as the front's. Measure under-bust, waist, hip and waist to hip again.`,
+    },
+  ]);
+
+/**
+ * Draws front and back together: the front's side seam is master, their waist seams share a slope.
+ * @throws DraftingError where no side seams of equal length join them, or intakes leave no cloth.
+ */
 export function pairHalves(inputs: PairInputs): PairedHalves {
+  // Where the side cannot help the darts and still be trued, the darts take all of it.
+  const darted = inputs.style.shaping === 'darts';
+  const pair = (darted ? pairWith(inputs, true) : undefined) ?? pairWith(inputs, false);
+  if (!pair) throw cannotBeDrawn();
+  refuseCrowdedIntakes(pair.front);
+  refuseCrowdedIntakes(pair.back);
+  return pair;
+}
+
+type DartCounts = { readonly front: 1 | 2; readonly back: 1 | 2 };
+type Drawn = { readonly front: Half; readonly back: Half };
+
+function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefined {
   const { levels, style, rules, quarters } = inputs;
   const widths = { front: widthsOf(quarters.front), back: widthsOf(quarters.back) };
   const contour = contours(
@@ -76,7 +106,7 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
   );
   const tip = (longer: number): number =>
     Math.min(levels.waist + style.dartLength + longer, levels.hip - aboveHip);
-  const base = { levels, rules, dartCount: 1 } as const;
+  const base = { levels, rules, dartCount: 1, sideHelps } as const;
   const frontInputs: HalfInputs = {
     ...base,
     side: 'front',
@@ -93,27 +123,25 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
     axis: widths.back.underbust / 2,
     dartTip: tip(backLonger),
   };
-  let front = drawHalf(frontInputs);
-  let back = drawHalf({ ...backInputs, trueTo: sideArcs(front) });
-  const counts = { front: dartCount(front, inputs), back: dartCount(back, inputs) };
-  let slope = meanSlope(front, back);
-  let settled = false;
-  for (let round = 0; round < roundsAtMost && !settled; round += 1) {
-    front = drawHalf({ ...frontInputs, dartCount: counts.front, seamSlope: slope });
-    back = drawHalf({
-      ...backInputs,
-      dartCount: counts.back,
-      seamSlope: slope,
-      trueTo: sideArcs(front),
-    });
-    const next = meanSlope(front, back);
-    const change = Math.abs(next - slope);
-    slope = round < dampedFrom ? next : (slope + next) / 2;
+  const draw = (count: DartCounts, seamSlope?: number): Drawn | undefined => {
+    const slope = seamSlope === undefined ? {} : { seamSlope };
+    const front = drawHalf({ ...frontInputs, dartCount: count.front, ...slope });
+    const back =
+      front &&
+      drawHalf({ ...backInputs, dartCount: count.back, ...slope, trueTo: sideArcs(front) });
+    return front && back ? { front, back } : undefined;
+  };
+  const first = draw({ front: 1, back: 1 });
+  if (!first) return undefined;
+  const count = { front: dartCount(first.front, inputs), back: dartCount(first.back, inputs) };
+  let slope = meanSlope(first);
+  for (let round = 0; round < roundsAtMost; round += 1) {
+    const drawn = draw(count, slope);
+    if (!drawn) return undefined;
+    const next = meanSlope(drawn);
     // A hundredth of a degree: the corners of the seam are proven to two degrees.
-    settled = change < 1.7e-4;
+    if (Math.abs(next - slope) < 1.7e-4) return { ...drawn, contour };
+    slope = round < dampedFrom ? next : (slope + next) / 2;
   }
-  if (!settled) throw cannotBeDrawn();
-  refuseCrowdedIntakes(front);
-  refuseCrowdedIntakes(back);
-  return { front, back, contour };
+  return undefined;
 }
