@@ -8,11 +8,22 @@ export default defineConfig({
     projects: [
       {
         extends: true,
-        test: { name: 'unit', include: ['tests/**/*.test.ts'], exclude: apart },
+        // A law may take its time on a busy machine: what is slow is for the benchmarks to say.
+        test: {
+          name: 'unit',
+          include: ['tests/**/*.test.ts'],
+          exclude: apart,
+          testTimeout: 120_000,
+        },
       },
       {
         extends: true,
-        test: { name: 'screens', include: ['tests/**/*.test.tsx'], environment: 'happy-dom' },
+        test: {
+          name: 'screens',
+          include: ['tests/**/*.test.tsx'],
+          environment: 'happy-dom',
+          testTimeout: 60_000,
+        },
       },
       {
         extends: true,

@@ -28,6 +28,8 @@ const decimal = (value: number, digits: number): string => {
  */
 export function formatInches(lengthMm: number, denominator: 8 | 16 = 16): string {
   const parts = Math.round((Math.abs(lengthMm) / millimetresPerInch) * denominator);
+  // Nobody reads a fraction of a length beyond all bodies; it only has to be shown in a refusal.
+  if (parts > Number.MAX_SAFE_INTEGER) return decimal(lengthMm / millimetresPerInch, 0);
   const whole = Math.floor(parts / denominator);
   let numerator = parts % denominator;
   let divisor: number = denominator;

@@ -70,11 +70,13 @@ describe('a gown drafted', () => {
     }
   });
 
-  it('gives the three handles, each where its value lies', () => {
-    const { handles, style } = draftGown(inputs);
-    expect(handles.map(({ key }) => key)).toEqual(['neckDepth', 'neckWidth', 'kneeFinished']);
-    expect(handles[0]?.at).toEqual({ x: 0, y: style.neckDepth });
-    expect(handles[1]?.at.x).toBeCloseTo(style.neckWidth, 6);
+  it('gives handles for neck depth, neck width and finished knee, each where its value lies', () => {
+    const { handles, style, pieces } = draftGown(inputs);
+    const at = (key: string) => handles.find((handle) => handle.key === key)?.at;
+    expect(at('neckDepth')).toEqual({ x: 0, y: style.neckDepth });
+    expect(at('neckWidth')?.x).toBeCloseTo(style.neckWidth, 6);
+    const knee = pieces.find(({ name }) => name === 'front-middle')?.levels.at(-1)?.to;
+    expect(at('kneeFinished')).toEqual(knee);
   });
 
   it('is refused with every field at fault named', () => {

@@ -43,7 +43,7 @@ const levelAfterDot = (key: StyleKey): EaseLevel => key.slice('ease.'.length) as
 const lengthKey = (key: StyleKey) => key as Exclude<StyleKey, `ease.${EaseLevel}`>;
 
 const worded = (key: StyleKey, value: number): Said =>
-  key === 'flareFraction' ? [String(Math.round(value * 1000) / 1000)] : [mm(value)];
+  key === 'flareFraction' ? [String(Number(value.toPrecision(4)))] : [mm(value)];
 
 function checkLimit(
   key: StyleKey,

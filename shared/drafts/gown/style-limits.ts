@@ -84,14 +84,17 @@ function neck(
 export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {}): StyleLimits {
   const { bustSpan, waistToHip } = body.measures;
   const topDrop = limit(levels.bust - 110, levels.bust - 60, levels.bust - 85);
-  const peak = style.topDrop ?? topDrop.initial;
+  // A choice out of its own bounds must not bend the bounds of those that hang on it.
+  const chosen = (value: number | undefined, { min, max, initial }: Limit): number =>
+    value === undefined || Number.isNaN(value) ? initial : Math.min(max, Math.max(min, value));
+  const peak = chosen(style.topDrop, topDrop);
   const longestDart = Math.min(150, waistToHip - 45);
   const highestKnee = Math.min(250, levels.knee - levels.hip - leastHipToKneeSeam);
   const kneeLevel = limit(0, highestKnee, 100);
-  const seamAboveKnee = style.kneeLevel ?? kneeLevel.initial;
+  const seamAboveKnee = chosen(style.kneeLevel, kneeLevel);
   const heelHeight = limit(0, 150, 50);
   const seamToFloor =
-    levels.floor - levels.knee + seamAboveKnee + (style.heelHeight ?? heelHeight.initial);
+    levels.floor - levels.knee + seamAboveKnee + chosen(style.heelHeight, heelHeight);
   const shortestFlare = 150;
   const floorClearance = limit(0, seamToFloor - shortestFlare, 20);
   return {
@@ -109,13 +112,13 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
       body,
       levels,
       seamAboveKnee,
-      style.ease?.hip ?? easeLimits['ease.hip'].initial,
+      chosen(style.ease?.hip, easeLimits['ease.hip']),
     ),
     flareFraction: limit(0.25, 1, 0.5),
     flareLength: limit(
       shortestFlare,
       seamToFloor,
-      seamToFloor - (style.floorClearance ?? floorClearance.initial),
+      seamToFloor - chosen(style.floorClearance, floorClearance),
     ),
     floorClearance,
     heelHeight,
