@@ -1,3 +1,4 @@
+import { topLineShapes } from '#shared/drafts/gown/style-card.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { fieldKeys, readEntry, writeValue, type Entries, type FieldKey } from './fields.ts';
@@ -6,13 +7,17 @@ import { emptyTable, redrawn, type TableState } from './table-state.ts';
 const key = 'ellwand.table';
 const version = 1;
 
-/** The table as this browser kept it; an empty one where nothing was kept or it cannot be trusted. */
-export function keptTable(storage: Storage | undefined = browserStorage()): TableState {
+/**
+ * The table as this browser kept it; an empty one in the reader's unit where nothing was kept or it
+ * cannot be trusted.
+ */
+export function keptTable(unit: Unit, storage: Storage | undefined = browserStorage()): TableState {
+  const empty = { ...emptyTable, unit };
   try {
-    const text = storage?.getItem(key);
-    return text === null || text === undefined ? emptyTable : fromKept(JSON.parse(text));
+    const text = storage?.getItem(key) ?? 'null';
+    return fromKept(JSON.parse(text)) ?? empty;
   } catch {
-    return emptyTable;
+    return empty;
   }
 }
 
@@ -21,10 +26,13 @@ export function keepTable(
   state: TableState,
   storage: Storage | undefined = browserStorage(),
 ): boolean {
-  const { unit, name, date, shaping, preset, entries } = state;
+  const { unit, name, date, topLine, shaping, preset, entries } = state;
   try {
     if (storage === undefined) return false;
-    storage.setItem(key, JSON.stringify({ version, unit, name, date, shaping, preset, entries }));
+    storage.setItem(
+      key,
+      JSON.stringify({ version, unit, name, date, topLine, shaping, preset, entries }),
+    );
     return true;
   } catch {
     return false;
@@ -40,8 +48,8 @@ function browserStorage(): Storage | undefined {
   }
 }
 
-function fromKept(kept: unknown): TableState {
-  if (!isRecord(kept) || kept['version'] !== version) return emptyTable;
+function fromKept(kept: unknown): TableState | undefined {
+  if (!isRecord(kept) || kept['version'] !== version) return undefined;
   const unit: Unit = kept['unit'] === 'in' ? 'in' : 'cm';
   const entries = isRecord(kept['entries']) ? kept['entries'] : {};
   return redrawn({
@@ -49,6 +57,7 @@ function fromKept(kept: unknown): TableState {
     unit,
     name: typeof kept['name'] === 'string' ? kept['name'].slice(0, 60) : '',
     date: typeof kept['date'] === 'string' ? kept['date'] : undefined,
+    topLine: topLineShapes.find((each) => each === kept['topLine']) ?? emptyTable.topLine,
     shaping: kept['shaping'] === 'darts' ? 'darts' : 'princess',
     preset: kept['preset'] === 'quarterRule' ? 'quarterRule' : 'balanced',
     entries: Object.fromEntries(

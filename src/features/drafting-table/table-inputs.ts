@@ -1,7 +1,12 @@
 import { coreMeasures, furtherMeasures, type MeasureCard } from '#shared/body/card.ts';
 import type { HouseRules } from '#shared/drafting/house-rules.ts';
 import { houseRulePresets, type HouseRulePreset } from '#shared/drafting/house-rule-presets.ts';
-import { easeLevels, styleLengths, type StyleCard } from '#shared/drafts/gown/style-card.ts';
+import {
+  easeLevels,
+  styleLengths,
+  type StyleCard,
+  type TopLineShape,
+} from '#shared/drafts/gown/style-card.ts';
 
 import { valueOf, type Entries, type FieldKey } from './fields.ts';
 
@@ -13,6 +18,7 @@ export type PartCard = Partial<MeasureCard>;
 export type Choices = {
   readonly name: string;
   readonly date?: string | undefined;
+  readonly topLine: TopLineShape;
   readonly shaping: 'princess' | 'darts';
   readonly preset: HouseRulePreset;
   readonly entries: Entries;
@@ -43,6 +49,7 @@ export function styleOf(choices: Choices): StyleCard {
   });
   return {
     ...Object.fromEntries(lengths),
+    topLine: choices.topLine,
     shaping: choices.shaping,
     ...(ease.length === 0 ? {} : { ease: Object.fromEntries(ease) }),
   };

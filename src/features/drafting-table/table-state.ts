@@ -23,13 +23,15 @@ export type TableState = Choices & {
   readonly drawn: Drawn;
 };
 
+/** A choice that is not a figure. */
+type Choice = Partial<Pick<Choices, 'topLine' | 'shaping' | 'preset'>>;
+
 export type TableAction =
   | { readonly type: 'typed'; readonly field: FieldKey; readonly text: string }
   | { readonly type: 'settled'; readonly field: FieldKey }
   | { readonly type: 'moved'; readonly field: FieldKey; readonly value: number }
   | { readonly type: 'named'; readonly name: string }
-  | { readonly type: 'shaped'; readonly shaping: TableState['shaping'] }
-  | { readonly type: 'ruled'; readonly preset: TableState['preset'] }
+  | { readonly type: 'chosen'; readonly choice: Choice }
   | { readonly type: 'unit'; readonly unit: Unit }
   | { readonly type: 'gown laid'; readonly gown: LaidGown }
   | { readonly type: 'cleared' }
@@ -40,6 +42,7 @@ export type TableAction =
 export const emptyTable: TableState = {
   unit: 'cm',
   name: '',
+  topLine: 'sweetheart',
   shaping: 'princess',
   preset: 'balanced',
   entries: {},
@@ -67,10 +70,8 @@ export function tableState(state: TableState, action: TableAction): TableState {
     }
     case 'named':
       return redrawn({ ...state, name: action.name });
-    case 'shaped':
-      return redrawn({ ...state, shaping: action.shaping });
-    case 'ruled':
-      return redrawn({ ...state, preset: action.preset });
+    case 'chosen':
+      return redrawn({ ...state, ...action.choice });
     case 'unit':
       return { ...state, unit: action.unit, entries: inUnit(state.entries, action.unit) };
     case 'gown laid':
@@ -119,6 +120,7 @@ function withGown({ unit }: TableState, { card, style, rules }: LaidGown): Table
     entries,
     name: card.name ?? '',
     date: card.date,
+    topLine: style.topLine ?? emptyTable.topLine,
     shaping: style.shaping ?? emptyTable.shaping,
     preset: presetOf(rules),
   };

@@ -4,7 +4,7 @@ import type { Handle } from '#shared/drafting/construction.ts';
 import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
 import { styleLimits, type Limit } from '#shared/drafts/gown/style-limits.ts';
 import type { Draft } from '#shared/engine/draft.ts';
-import { dot, subtract } from '#shared/geometry/point.ts';
+import { add, distance, dot, scale, subtract } from '#shared/geometry/point.ts';
 import { formatLength, formatWithUnit } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
 
@@ -29,10 +29,11 @@ type HandlesProps = {
 /** Brass lozenges at the points a maker moves by hand; drag them, or step them with the arrow keys. */
 export const Handles = ({ draft, ...rest }: HandlesProps) => {
   const limits = styleLimits(draft.body, draft.bodyLevels, draft.inputs.style);
-  return draft.handles.map((handle) => (
+  return draft.handles.map((handle, index) => (
     <Lozenge
       key={handle.key}
       handle={handle}
+      aside={draft.handles.slice(0, index).some((other) => together(other, handle))}
       value={draft.style[handle.key]}
       limit={limits[handle.key]}
       {...rest}
@@ -40,20 +41,35 @@ export const Handles = ({ draft, ...rest }: HandlesProps) => {
   ));
 };
 
+const together = (a: Handle, b: Handle): boolean => a.piece === b.piece && distance(a.at, b.at) < 1;
+
 type LozengeProps = Omit<HandlesProps, 'draft'> & {
   readonly handle: Handle;
+  /** Set a little along its way, where another handle holds the same point. */
+  readonly aside: boolean;
   readonly value: number;
   readonly limit: Limit;
 };
 
-const Lozenge = ({ handle, value, limit, layout, view, unit, onMove, onHold }: LozengeProps) => {
+const Lozenge = ({
+  handle,
+  aside,
+  value,
+  limit,
+  layout,
+  view,
+  unit,
+  onMove,
+  onHold,
+}: LozengeProps) => {
   const [near, setNear] = useState(false);
   const from = useRef<{ readonly x: number; readonly y: number; readonly value: number }>(
     undefined,
   );
   const placed = layout.placed.find(({ piece }) => piece.name === handle.piece);
   if (placed === undefined) return null;
-  const at = toScreen(view, { x: handle.at.x + placed.at.x, y: handle.at.y + placed.at.y });
+  const point = toScreen(view, add(handle.at, placed.at));
+  const at = aside ? add(point, scale(handle.along, 26)) : point;
   const { small, large } = nudges[unit];
   const move = (to: number) => onMove(handle.key, Math.min(limit.max, Math.max(limit.min, to)));
 
@@ -63,7 +79,8 @@ const Lozenge = ({ handle, value, limit, layout, view, unit, onMove, onHold }: L
     event.preventDefault();
     event.stopPropagation();
     // A depth grows downwards, so the arrow that points down deepens it.
-    const grows = Math.abs(handle.along.y) > 0.7 && event.key.match(/Up|Down/) ? -1 : 1;
+    const upright = Math.abs(handle.along.y) > 0.7 && /Up|Down/.test(event.key);
+    const grows = upright && handle.along.y > 0 ? -1 : 1;
     move(value + way * grows * (event.shiftKey ? large : small));
   };
   const grab = (event: PointerEvent<SVGGElement>) => {
@@ -107,7 +124,7 @@ const Lozenge = ({ handle, value, limit, layout, view, unit, onMove, onHold }: L
       onFocus={() => setNear(true)}
       onBlur={() => setNear(false)}
     >
-      <circle r={22} className="fill-transparent" />
+      <circle r={13} className="fill-transparent" />
       <path
         d="M0 -13L13 0L0 13L-13 0Z"
         className="ring fill-none stroke-brass opacity-0"

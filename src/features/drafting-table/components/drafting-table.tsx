@@ -1,5 +1,6 @@
 import { useDeferredValue, useEffect, useReducer, useRef, useState } from 'react';
 
+import { measuresInInches } from '../../../lib/reader.ts';
 import { useMedia } from '../../../lib/use-media.ts';
 import { Tabs, type Tab } from '../../../ui/tabs.tsx';
 import { keepTable, keptTable } from '../saved-table.ts';
@@ -17,7 +18,9 @@ import { TableHeader } from './table-header.tsx';
 
 /** The drafting table: cards, drawing and panels, all of one state. */
 export const DraftingTable = () => {
-  const [state, dispatch] = useReducer(tableState, undefined, () => keptTable());
+  const [state, dispatch] = useReducer(tableState, undefined, () =>
+    keptTable(measuresInInches() ? 'in' : 'cm'),
+  );
   const [kept, setKept] = useState(true);
   const [printing, setPrinting] = useState(false);
   const cards = useRef<HTMLDivElement>(null);

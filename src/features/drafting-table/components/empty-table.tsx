@@ -46,9 +46,7 @@ export const EmptyTable = ({ state, dispatch, onType }: EmptyTableProps) => {
             Type ten measures
           </Button>
           <h2 className="heading pt-4">Sample bodies</h2>
-          <div className="flex flex-wrap items-center gap-3">
-            <Samples dispatch={dispatch} />
-          </div>
+          <Samples dispatch={dispatch} />
         </>
       )}
     </div>

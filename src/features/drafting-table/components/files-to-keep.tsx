@@ -1,3 +1,5 @@
+import { draftJson } from '#shared/exports/json.ts';
+
 import { saveFile } from '../../../lib/save-file.ts';
 import { Button } from '../../../ui/button.tsx';
 import type { PrintOrder } from '../queries.ts';
@@ -18,7 +20,7 @@ export const FilesToKeep = ({ order }: FilesToKeepProps) => {
       <Button
         onClick={() =>
           saveFile(
-            new Blob([JSON.stringify(draft, null, 2)], { type: 'application/json' }),
+            new Blob([draftJson(draft)], { type: 'application/json' }),
             `ellwand-${draft.number}.json`,
           )
         }

@@ -6,6 +6,7 @@ import { measureGuide } from '#shared/body/measure-guide.ts';
 import type { FieldKey } from '../fields.ts';
 import type { TableAction, TableState } from '../table-state.ts';
 import { BodyFigure } from './body-figure.tsx';
+import { ClearCard } from './clear-card.tsx';
 import { FigureField, fieldProps } from './figure-field.tsx';
 
 type MeasureCardProps = {
@@ -78,6 +79,7 @@ export const MeasureCard = ({ state, dispatch }: MeasureCardProps) => {
         >
           {all ? 'Only the ten measures' : `All measures (${everyMeasure.length})`}
         </button>
+        <ClearCard dispatch={dispatch} />
         {all && (
           <>
             <p className="pb-2 text-sm text-slate">

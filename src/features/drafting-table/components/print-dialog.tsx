@@ -5,6 +5,7 @@ import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import type { PaperName } from '#shared/sheets/papers.ts';
 import type { Unit } from '#shared/units/said.ts';
 
+import { printsOnLetter } from '../../../lib/reader.ts';
 import { Dialog } from '../../../ui/dialog.tsx';
 import { Segmented } from '../../../ui/segmented.tsx';
 import { FilesToKeep } from './files-to-keep.tsx';
@@ -26,7 +27,7 @@ export const PrintDialog = ({ open, onClose, ...rest }: PrintDialogProps) => (
 );
 
 const PrintChoices = ({ draft, fresh, unit }: Omit<PrintDialogProps, 'open' | 'onClose'>) => {
-  const [paper, setPaper] = useState<PaperName>(unit === 'in' ? 'Letter' : 'A4');
+  const [paper, setPaper] = useState<PaperName>(() => (printsOnLetter() ? 'Letter' : 'A4'));
   const sheets = useMemo(
     () => ({
       toile: planSheets(draft.pieces, { paper, selection: 'bodice-toile' }).sheets,

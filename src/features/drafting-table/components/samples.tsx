@@ -19,9 +19,22 @@ export const Samples = ({ dispatch }: { dispatch: Dispatch<TableAction> }) => {
       </p>
     );
   }
-  return samples.data.samples.map((sample) => (
-    <Button key={sample.id} onClick={() => dispatch({ type: 'gown laid', gown: sample })}>
-      {sample.title}
-    </Button>
-  ));
+  return (
+    <ul className="w-full max-w-2xl">
+      {samples.data.samples.map((sample) => (
+        <li
+          key={sample.id}
+          className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b border-rule py-2 sm:flex-nowrap"
+        >
+          <Button
+            className="w-56 shrink-0"
+            onClick={() => dispatch({ type: 'gown laid', gown: sample })}
+          >
+            {sample.title}
+          </Button>
+          <span className="text-sm text-slate">{sample.note}</span>
+        </li>
+      ))}
+    </ul>
+  );
 };

@@ -1,6 +1,6 @@
 import type { Dispatch } from 'react';
 
-import { easeLevels, type StyleLength } from '#shared/drafts/gown/style-card.ts';
+import { easeLevels, topLineShapes, type StyleLength } from '#shared/drafts/gown/style-card.ts';
 import { styleHints, styleLabels } from '#shared/drafts/gown/style-labels.ts';
 
 import { Segmented } from '../../../ui/segmented.tsx';
@@ -44,6 +44,22 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
       </h2>
       <p className="pt-1 text-sm text-slate">Grey figures are the defaults for this body.</p>
       <form onSubmit={(event) => event.preventDefault()}>
+        <label className="flex items-center justify-between gap-3 border-b border-rule py-1">
+          <span>Top line</span>
+          <select
+            name="style.topLine"
+            className="h-9 rounded-one border border-rule bg-paper px-2"
+            value={state.topLine}
+            onChange={(event) => {
+              const topLine = topLineShapes.find((each) => each === event.currentTarget.value);
+              if (topLine !== undefined) dispatch({ type: 'chosen', choice: { topLine } });
+            }}
+          >
+            {topLineShapes.map((shape) => (
+              <option key={shape}>{shape}</option>
+            ))}
+          </select>
+        </label>
         <div className="flex items-center justify-between gap-3 border-b border-rule py-1">
           <span>Shaping</span>
           <Segmented
@@ -53,7 +69,7 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
               { value: 'darts', label: 'darts' },
             ]}
             value={state.shaping}
-            onChoose={(shaping) => dispatch({ type: 'shaped', shaping })}
+            onChoose={(shaping) => dispatch({ type: 'chosen', choice: { shaping } })}
           />
         </div>
         {topKeys.map(row)}
@@ -103,7 +119,7 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
           { value: 'quarterRule', label: 'quarter rule' },
         ]}
         value={state.preset}
-        onChoose={(preset) => dispatch({ type: 'ruled', preset })}
+        onChoose={(preset) => dispatch({ type: 'chosen', choice: { preset } })}
       />
     </section>
   );
