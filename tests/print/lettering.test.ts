@@ -2,13 +2,25 @@ import { readFile } from 'node:fs/promises';
 import { PDFDocument } from 'pdf-lib';
 import { describe, expect, it } from 'vitest';
 import { pdfBytes } from '#server/features/print/pdf-document.ts';
+import { readFont } from '#server/features/print/pdf-font.ts';
+import { balanced } from '#shared/drafting/house-rule-presets.ts';
+import { draftGown } from '#shared/engine/draft-gown.ts';
+import { chalkSheetJob } from '#shared/exports/chalk-sheet.ts';
+import type { Mark } from '#shared/exports/drawing.ts';
 import { words } from '#shared/exports/marks.ts';
+import { tilesJob } from '#shared/exports/tiles.ts';
 import { papers, toPoints } from '#shared/sheets/papers.ts';
 import { fontkitForPdfLib } from '../support/fontkit-for-pdf-lib.ts';
+import { middleBody } from '../support/middle-body.ts';
 import { type Picture, inkIn, inspect, renderPart } from '../support/pgm.ts';
 
 const size = 9;
 const strip = { x: 15, y: 20, width: 180, height: 16 };
+
+const fontFile = new URL(
+  '../../server/features/print/fonts/SourceSans3-Regular.ttf',
+  import.meta.url,
+);
 
 /** One line of lettering as Ellwand prints it. */
 const printed = (text: string): Promise<Uint8Array> =>
@@ -21,13 +33,9 @@ const printed = (text: string): Promise<Uint8Array> =>
 
 /** The same line by another route: pdf-lib's own writer with the whole typeface embedded. */
 async function byAnotherRoute(text: string): Promise<Uint8Array> {
-  const file = new URL(
-    '../../server/features/print/fonts/SourceSans3-Regular.ttf',
-    import.meta.url,
-  );
   const pdf = await PDFDocument.create();
   pdf.registerFontkit(fontkitForPdfLib());
-  const font = await pdf.embedFont(await readFile(file), {
+  const font = await pdf.embedFont(await readFile(fontFile), {
     features: { kern: false, liga: false, clig: false, ccmp: false },
   });
   const page = pdf.addPage([toPoints(papers.A4.width), toPoints(papers.A4.height)]);
@@ -94,6 +102,29 @@ describe('lettering on paper, looked at in pixels', () => {
     const [unknown, box] = [await picture('中'), await picture('□')];
     expect(apart(unknown, box)).toBeLessThan(0.001);
     expect(inkIn(unknown)).toBeGreaterThan(100);
+  });
+
+  it('has a letter in the typeface for everything Ellwand itself writes', async () => {
+    const draft = draftGown({ card: middleBody, style: {}, rules: balanced });
+    const jobs = (['cm', 'in'] as const).flatMap((unit) => [
+      tilesJob(draft, { paper: 'A4', selection: 'whole-gown', unit }),
+      chalkSheetJob(draft, { paper: 'Letter', unit }),
+    ]);
+    const texts = (marks: readonly Mark[]): readonly string[] =>
+      marks.flatMap((mark) =>
+        mark.kind === 'words' ? [mark.text] : mark.kind === 'window' ? texts(mark.marks) : [],
+      );
+    const written = new Set(
+      jobs
+        .flatMap((job) => [...job.pages, ...job.drawings.map((each) => each.marks)].flatMap(texts))
+        .join(''),
+    );
+    const { font } = readFont(await readFile(fontFile));
+    const lacking = [...written].filter(
+      (each) => !font.hasGlyphForCodePoint(each.codePointAt(0) ?? 0),
+    );
+    expect(written.size).toBeGreaterThan(50);
+    expect(lacking).toEqual([]);
   });
 
   it('can still be searched: fractions and letters come back as text', async () => {

@@ -1,4 +1,5 @@
 import { PDFDocument } from 'pdf-lib';
+import { getDocument } from 'pdfjs-dist/legacy/build/pdf.mjs';
 import { describe, expect, it } from 'vitest';
 import { chalkSheetPdf } from '#server/features/print/chalk-sheet-pdf.ts';
 import { tilesPdf } from '#server/features/print/tiles-pdf.ts';
@@ -47,6 +48,19 @@ describe.each(['A4', 'Letter'] as const)('the tiles as a PDF on %s', (paper) => 
       expect(each).toMatch(/SourceSans3-\w+ +CID TrueType +Identity-H +yes yes yes/u);
   });
 
+  it('are read by the viewer that browsers use: its sheets, and what is lettered on them', async () => {
+    const task = getDocument({ data: await print(), verbosity: 0 });
+    const pdf = await task.promise;
+    const { sheets, plan } = planSheets(pieces, { ...gown, paper });
+    expect(pdf.numPages).toBe(sheets);
+    for (const [i, tile] of plan.tiles.entries()) {
+      const page = await pdf.getPage(i + 2);
+      const { items } = await page.getTextContent();
+      expect(items.map((each) => ('str' in each ? each.str : ''))).toContain(tile.name);
+    }
+    await task.destroy();
+  });
+
   it('are the same bytes for the same draft', async () => {
     expect(Buffer.compare(await print(), await print())).toBe(0);
   });
@@ -77,6 +91,20 @@ describe('a name on the card', () => {
       }
     },
   );
+});
+
+describe('a date on the card', () => {
+  it.each(['2026-11-14', 'soon) /Evil (', ''])('cannot write into the file: %j', async (date) => {
+    const pdf = await tilesPdf(paperDraft(pieces, { ...paperCard, date }), {
+      ...gown,
+      paper: 'A4',
+    });
+    expect(await inspect(pdf, 'qpdf', ['--check'])).toContain(
+      'No syntax or stream encoding errors',
+    );
+    const info = await inspect(pdf, 'pdfinfo');
+    expect(info.includes('CreationDate')).toBe(date === '2026-11-14');
+  });
 });
 
 describe('a drawing too large for home paper', () => {

@@ -70,8 +70,11 @@ function form(context: PDFContext, drawing: Drawing, fonts: Fonts, lettering: PD
   });
 }
 
-/** `2026-11-14` as a PDF date. */
-const pdfDate = (day: string): string => `D:${day.replaceAll('-', '')}000000Z`;
+/** `2026-11-14` as a PDF date; a date written otherwise is left out, for nothing else may enter the file unescaped. */
+const createdOn = (day: string | undefined): Record<string, PDFString> =>
+  day !== undefined && /^\d{4}-\d{2}-\d{2}$/u.test(day)
+    ? { CreationDate: PDFString.of(`D:${day.replaceAll('-', '')}000000Z`) }
+    : {};
 
 /**
  * The bytes of a print job: vector, fonts embedded, drawings once as form objects, told to print at
@@ -129,7 +132,7 @@ export async function pdfBytes(job: PrintJob): Promise<Uint8Array> {
     context.obj({
       Title: PDFHexString.fromText(job.title),
       Producer: PDFString.of('Ellwand'),
-      ...(job.date === undefined ? {} : { CreationDate: PDFString.of(pdfDate(job.date)) }),
+      ...createdOn(job.date),
     }),
   );
   return PDFStreamWriter.forContext(context, Infinity, true, 500).serializeToBuffer();
