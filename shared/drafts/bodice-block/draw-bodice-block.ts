@@ -1,0 +1,166 @@
+import type { Body } from '../../body/card.ts';
+import type { BodyLevels } from '../../body/levels.ts';
+import type { DraftingTable } from '../../drafting/drafting-table.ts';
+import type { HouseRules } from '../../drafting/house-rules.ts';
+import type { Side } from '../../drafting/piece.ts';
+import { pathLength } from '../../geometry/curve.ts';
+import { type Point, point } from '../../geometry/point.ts';
+import { blockQuarter } from '../block-quarter.ts';
+import type { DrawnBlock } from '../drawn-block.ts';
+import { warnOfEstimates } from '../lean-on.ts';
+import { type BustDartAngle, bustDartAngle } from './bust-dart.ts';
+import { blockUnderarm, narrateHalf, narratePlace } from './narrate.ts';
+import { backWidthEase, pairArmholes } from './pair-armholes.ts';
+import { type BodiceHalf, type BodiceQuarters, backPiece, frontPiece } from './pieces.ts';
+import { backToMatch, placeBustDart } from './place-dart.ts';
+import { type BlockHeights, type HalfFigures, planHalves } from './plan-halves.ts';
+import { backNeckRise, backShoulder, frontShoulder, openShoulder } from './shoulder.ts';
+import type { BodiceBlockStyle } from './style-card.ts';
+
+const leansOn = [
+  'neckGirth',
+  'shoulderLength',
+  'shoulderSlope',
+  'acrossFront',
+  'acrossBack',
+  'backWaistLength',
+  'underarmToWaist',
+] as const;
+
+/** The back waist dart ends this far under the armhole, and no higher than the bust line (common practice, no source). */
+const underArmhole = 20;
+/** A second waist dart ends this much lower (method section 6); in front it stops short of the bust as well. */
+const secondLower = 20;
+
+function quartersOf(
+  side: Side,
+  body: Body,
+  style: BodiceBlockStyle,
+  rules: HouseRules,
+): BodiceQuarters {
+  return {
+    bust: blockQuarter(side, body, rules, {
+      name: 'bust',
+      girth: 'bustGirth',
+      ease: style.ease.bust,
+      balance: 'bust',
+    }),
+    waist: blockQuarter(side, body, rules, {
+      name: 'waist',
+      girth: 'waistGirth',
+      ease: style.ease.waist,
+      balance: 'waist',
+    }),
+  };
+}
+
+/** What each half is planned from: in front the darts stand under the bust point, behind at half the back width. */
+function figuresOf(
+  { front, back }: { readonly front: BodiceQuarters; readonly back: BodiceQuarters },
+  body: Body,
+  bustPoint: Point,
+  heights: BlockHeights,
+  rules: HouseRules,
+): { readonly front: HalfFigures; readonly back: HalfFigures } {
+  const backTip = Math.max(heights.bust, heights.underarm + underArmhole);
+  return {
+    front: {
+      bust: front.bust.value,
+      waist: front.waist.value,
+      axis: bustPoint.x,
+      tip: bustPoint.y,
+      secondTip: bustPoint.y + rules.dartClearance + secondLower,
+    },
+    back: {
+      bust: back.bust.value,
+      waist: back.waist.value,
+      axis: (body.measures.acrossBack / 2 + backWidthEase) / 2,
+      tip: backTip,
+      secondTip: backTip + secondLower,
+    },
+  };
+}
+
+/**
+ * Draws the bodice block on the table (method section 5): quarters, side seam and waist darts, neck and
+ * shoulder, the bust dart opened outwards at the shoulder, armholes; last, the dart is turned to its seam.
+ */
+export function drawBodiceBlock(
+  table: DraftingTable,
+  body: Body,
+  levels: BodyLevels,
+  style: BodiceBlockStyle,
+  rules: HouseRules,
+): DrawnBlock {
+  warnOfEstimates(table, body, 'bodice block', leansOn);
+  const heights: BlockHeights = {
+    bust: levels.bust,
+    waist: levels.waist,
+    nape: levels.nape,
+    underarm: blockUnderarm(table, levels, style.armholeDrop),
+  };
+  const bustPoint = point(levels.bustPointX, levels.bust);
+  const quarters = {
+    front: quartersOf('front', body, style, rules),
+    back: quartersOf('back', body, style, rules),
+  };
+  const plans = planHalves(figuresOf(quarters, body, bustPoint, heights, rules), heights, rules);
+  const angle: BustDartAngle = bustDartAngle(style.bustDartRule, body, levels, {
+    backRise: backNeckRise(body.measures.neckGirth),
+    bustQuarter: quarters.front.bust.value,
+  });
+  const shoulders = {
+    front: frontShoulder(body, levels),
+    back: backShoulder(body, levels, style.shoulderEase),
+  };
+  const opened = openShoulder(shoulders.front, bustPoint, angle.angle);
+  const armholes = pairArmholes(
+    body,
+    levels.underarm,
+    { plan: plans.front, shoulder: shoulders.front, opened },
+    { plan: plans.back, shoulder: shoulders.back },
+  );
+  const bustNotch = (heights.bust - heights.underarm) * Math.hypot(1, plans.front.lean);
+  const half = (side: Side): BodiceHalf => ({
+    plan: plans[side],
+    shoulder: shoulders[side],
+    armhole: armholes[side],
+    heights,
+    rules,
+    bustNotch,
+  });
+  const asDrawn = frontPiece(half('front'), opened);
+  const papers = {
+    front: narrateHalf(table, body, half('front'), quarters.front, { opened, angle }),
+    back: narrateHalf(table, body, half('back'), quarters.back, {
+      shoulderEase: style.shoulderEase,
+    }),
+  };
+  const front = placeBustDart(asDrawn, style.bustDart, {
+    upright: pathLength(armholes.front.path.slice(0, 1)),
+    bustNotch,
+    bustPoint,
+  });
+  narratePlace(papers.front, front, style.bustDart, angle.angle, bustPoint);
+  return {
+    pieces: [front, backToMatch(backPiece(half('back'), style.shoulderEase), front)],
+    levels: { chest: heights.underarm, bust: heights.bust, waist: heights.waist },
+    wanted: [
+      {
+        level: 'bust',
+        body: body.measures.bustGirth,
+        ease: style.ease.bust,
+        wanted: body.measures.bustGirth + style.ease.bust,
+        estimated: false,
+      },
+      {
+        level: 'waist',
+        body: body.measures.waistGirth,
+        ease: style.ease.waist,
+        wanted: body.measures.waistGirth + style.ease.waist,
+        estimated: false,
+      },
+    ],
+    bustPoint,
+  };
+}

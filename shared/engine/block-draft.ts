@@ -1,0 +1,119 @@
+import type { Body, MeasureCard } from '../body/card.ts';
+import type { BodyLevels } from '../body/levels.ts';
+import { checkCard } from '../body/check-card.ts';
+import { completeCard } from '../body/complete-card.ts';
+import { checkRules } from '../drafting/check-rules.ts';
+import type { WantedGirth } from '../drafting/construction.ts';
+import { DraftingError } from '../drafting/drafting-error.ts';
+import { type DraftingTable, openTable } from '../drafting/drafting-table.ts';
+import type { HouseRules } from '../drafting/house-rules.ts';
+import type { FinishedPiece, LevelName } from '../drafting/piece.ts';
+import type { Step } from '../drafting/step.ts';
+import type { DrawnBlock } from '../drafts/drawn-block.ts';
+import { gownLevels } from '../drafts/gown/levels.ts';
+import { finishPiece } from '../finishing/finish-piece.ts';
+import type { Point } from '../geometry/point.ts';
+import { proveBlock } from '../proof/prove-block.ts';
+import type { Proof } from '../proof/proof.ts';
+import type { Problem } from '../units/problem.ts';
+import { mm, said } from '../units/said.ts';
+import { draftNumber } from './draft-number.ts';
+
+/** Version of the rules of the blocks: a change of any shape raises it. */
+const blockVersion = '1.0.0';
+
+/** The three inputs of a block. */
+export type BlockInputs<Card> = {
+  readonly card: MeasureCard;
+  readonly style: Card;
+  readonly rules: HouseRules;
+};
+
+/** A block drafted, finished and proven: of a gown's draft all that applies. */
+export type BlockDraft<Card, Style> = {
+  readonly engine: string;
+  /** Short number printed on every piece, the same for the same inputs. */
+  readonly number: string;
+  readonly inputs: BlockInputs<Card>;
+  readonly body: Body;
+  readonly bodyLevels: BodyLevels;
+  readonly style: Style;
+  /** y of the levels the block has, mm below the side neck point. */
+  readonly levels: { readonly [L in LevelName]?: number };
+  readonly pieces: readonly FinishedPiece[];
+  readonly steps: readonly Step[];
+  readonly wanted: readonly WantedGirth[];
+  /** Where the bust dart turns, for a screen that moves it; absent on a skirt. */
+  readonly bustPoint?: Point;
+  readonly warnings: readonly Problem[];
+  readonly proof: Proof;
+};
+
+/** How one kind of block is made; each of its own kind of style card. */
+export type BlockKind<Card, Style> = {
+  readonly name: string;
+  readonly check: (card: Card, body: Body, levels: BodyLevels) => readonly Problem[];
+  readonly resolve: (card: Card, body: Body, levels: BodyLevels) => Style;
+  readonly draw: (
+    table: DraftingTable,
+    body: Body,
+    levels: BodyLevels,
+    style: Style,
+    rules: HouseRules,
+  ) => DrawnBlock;
+};
+
+function refuse(problems: readonly Problem[]): void {
+  const errors = problems.filter((problem) => problem.severity === 'error');
+  if (errors.length > 0) throw new DraftingError(errors);
+}
+
+function narrateFinishing(table: DraftingTable, { allowance }: HouseRules): void {
+  table
+    .part('Finishing', 'both')
+    .draw(
+      'Allowances',
+      said`Added outside the seam line, last of all: seams ${mm(allowance.seam)}, side seams ${mm(allowance.side)}, centre back ${mm(allowance.zip)}, neck and armhole ${mm(allowance.top)}, hem ${mm(allowance.hem)}; a fold has none.`,
+      { why: said`A block is kept as its seam line: trace that to design from it.` },
+    );
+}
+
+/**
+ * Drafts a block: checks the three inputs, draws on a clean table, finishes the pieces and proves them.
+ * Pure: the same inputs give the same draft, byte for byte.
+ * @throws DraftingError where the inputs are outside their limits; its problems name the fields.
+ */
+export function draftBlock<Card, Style>(
+  kind: BlockKind<Card, Style>,
+  inputs: BlockInputs<Card>,
+): BlockDraft<Card, Style> {
+  const { card, style, rules } = inputs;
+  const aboutCard = checkCard(card);
+  refuse([...aboutCard, ...checkRules(rules)]);
+  const body = completeCard(card);
+  const table = openTable();
+  const bodyLevels = gownLevels(table, body);
+  const aboutStyle = kind.check(style, body, bodyLevels);
+  refuse(aboutStyle);
+  const resolved = kind.resolve(style, body, bodyLevels);
+  const drawn = kind.draw(table, body, bodyLevels, resolved, rules);
+  const number = draftNumber(JSON.stringify([kind.name, blockVersion, card, style, rules]));
+  narrateFinishing(table, rules);
+  const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'block' };
+  const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
+  return {
+    engine: blockVersion,
+    number,
+    inputs,
+    body,
+    bodyLevels,
+    style: resolved,
+    levels: drawn.levels,
+    pieces,
+    steps: table.steps,
+    wanted: drawn.wanted,
+    ...(drawn.bustPoint && { bustPoint: drawn.bustPoint }),
+    warnings: [...aboutCard, ...aboutStyle, ...table.warnings],
+    proof: proveBlock({ pieces, wanted: drawn.wanted, rules }),
+  };
+}
