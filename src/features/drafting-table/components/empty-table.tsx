@@ -55,7 +55,7 @@ export const EmptyTable = ({ state, dispatch, onType }: EmptyTableProps) => {
 
 /** A rod of ten marks; each measure taken fills one stretch with brass. */
 const MeasureRod = ({ taken }: { taken: readonly string[] }) => (
-  <svg viewBox="0 0 402 26" className="h-auto w-full max-w-xl" aria-hidden="true">
+  <svg viewBox="0 0 402 26" className="h-auto w-full max-w-xl shrink-0" aria-hidden="true">
     {coreMeasures.map((key, index) => (
       <rect
         key={key}
