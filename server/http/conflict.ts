@@ -12,9 +12,16 @@ export const conflict = (row: { readonly savedDevice: string }, current: unknown
 export const notFound = (what: string): RefusalError =>
   new RefusalError('not-found', `There is no such ${what} among yours.`);
 
-/** A number belongs to one save of one record; under another it is not answered as if it had been done. */
-export function sameRecord(acknowledged: Acknowledged, record: string): Acknowledged {
-  if (acknowledged.record === record) return acknowledged;
+/**
+ * A number belongs to one save of one record, made from one version; under another it is not answered
+ * as if it had been done.
+ */
+export function sameSave(
+  acknowledged: Acknowledged,
+  record: string | undefined,
+  version: number,
+): Acknowledged {
+  if (acknowledged.record === record && acknowledged.version === version) return acknowledged;
   throw new RefusalError(
     'bad-input',
     'The number of this save was used for another one before: give each save a number of its own.',

@@ -48,7 +48,7 @@ describe('what cannot be read is refused before it is looked at', () => {
   });
 
   it('an address the API does not have, and a method an address does not take', async () => {
-    const nowhere = await fetch(`${server.address}/api/gowns/17`);
+    const nowhere = await fetch(`${server.address}/api/nowhere/17`);
     expect((await refused(nowhere, 404)).code).toBe('not-found');
     const wrong = await fetch(`${server.address}/api/drafts`);
     expect(wrong.headers.get('allow')).toBe('POST');

@@ -13,6 +13,12 @@ describe('settings that cannot be right are refused in plain words', () => {
       `PORT must be a whole number, 0 or more; it is "${port}"`,
     );
   });
+
+  it.each(['gowns.example', 'ftp://gowns.example'])('a public address of %s', (publicUrl) => {
+    expect(() => readSettings({ ...database, PUBLIC_URL: publicUrl })).toThrow(
+      'PUBLIC_URL must be an address such as https://gowns.example',
+    );
+  });
 });
 
 describe('settings have plain defaults', () => {

@@ -7,7 +7,7 @@ import type {
 } from '#shared/api/revisions.ts';
 import type { Database } from '../../database/client.ts';
 import { acknowledge, acknowledgedSave } from '../../database/saves.ts';
-import { conflict, notFound, sameRecord } from '../../http/conflict.ts';
+import { conflict, notFound, sameSave } from '../../http/conflict.ts';
 import { drawnPiecesOf } from './drawing.ts';
 import { contentOf, gownView } from './gown-view.ts';
 import { copyOf, keepAsRevision } from './keep-as-revision.ts';
@@ -66,7 +66,7 @@ export async function nameRevision(
     const before = await acknowledgedSave(turn, accountId, saveId);
     if (before !== undefined) {
       const made = await findRevision(turn, accountId, gownId, before.record);
-      sameRecord(before, made?.id ?? '');
+      sameSave(before, made?.id, baseVersion);
       if (made !== undefined) return listed(made);
     }
     if (row.version !== baseVersion) throw conflict(row, gownView(row, maker));

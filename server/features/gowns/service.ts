@@ -10,7 +10,7 @@ import type {
 import { engineVersion } from '#shared/engine/draft-gown.ts';
 import type { Database } from '../../database/client.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
-import { conflict, notFound, sameRecord } from '../../http/conflict.ts';
+import { conflict, notFound, sameSave } from '../../http/conflict.ts';
 import { RefusalError } from '../../http/refusal.ts';
 import type { Caller } from '../../http/session.ts';
 import { type Drawing, drawn, kept, nothingDrawn } from './drawing.ts';
@@ -51,7 +51,7 @@ async function putGown(
     if (!(await acknowledge(turn, save))) {
       const before = await acknowledgedSave(turn, accountId, saveId);
       const gown = before && (await findGown(turn, accountId, before.record));
-      return savedAs(sameRecord(before ?? save, gown?.id ?? ''));
+      return savedAs(sameSave(before ?? save, gown?.id, 1));
     }
     await insertGown(turn, {
       id: save.record,
@@ -114,7 +114,7 @@ export async function changeGown(
     const row = await holdGown(turn, accountId, id);
     if (row === undefined) throw notFound('gown');
     const before = await acknowledgedSave(turn, accountId, saveId);
-    if (before !== undefined) return savedAs(sameRecord(before, id));
+    if (before !== undefined) return savedAs(sameSave(before, id, baseVersion + 1));
     if (row.version !== baseVersion) throw conflict(row, gownView(row, maker));
     const { content, drawing, ...parent } = await change(turn, row);
     const savedAt = new Date();

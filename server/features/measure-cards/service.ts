@@ -8,7 +8,7 @@ import type {
 } from '#shared/api/measure-cards.ts';
 import type { Database } from '../../database/client.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
-import { conflict, notFound, sameRecord } from '../../http/conflict.ts';
+import { conflict, notFound, sameSave } from '../../http/conflict.ts';
 import type { Caller } from '../../http/session.ts';
 import { cardView } from './card-view.ts';
 import { findCard, holdCard, insertCard, replaceCard } from './repository.ts';
@@ -41,7 +41,7 @@ export async function createCard(
     if (!(await acknowledge(turn, save))) {
       const before = await acknowledgedSave(turn, accountId, saveId);
       const card = before && (await findCard(turn, accountId, before.record));
-      return savedAs(sameRecord(before ?? save, card?.id ?? ''));
+      return savedAs(sameSave(before ?? save, card?.id, 1));
     }
     await insertCard(turn, {
       id: save.record,
@@ -83,7 +83,7 @@ export async function saveCard(
     const row = await holdCard(turn, accountId, id);
     if (row === undefined) throw notFound('measure card');
     const before = await acknowledgedSave(turn, accountId, saveId);
-    if (before !== undefined) return savedAs(sameRecord(before, id));
+    if (before !== undefined) return savedAs(sameSave(before, id, baseVersion + 1));
     if (row.version !== baseVersion) throw conflict(row, cardView(row, caller));
     const savedAt = new Date();
     const version = await replaceCard(turn, row, {

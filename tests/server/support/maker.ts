@@ -14,8 +14,8 @@ import { card } from './request-bodies.ts';
 /** One browser: it keeps its cookie, and says where its page is from. */
 export type Browser = {
   /** Sends a line of the contract as it is and gives the bare reply. */
-  readonly send: <E extends Endpoint>(
-    line: E,
+  readonly send: (
+    line: Endpoint,
     body?: unknown,
     params?: Readonly<Record<string, string>>,
     headers?: Record<string, string>,
@@ -27,9 +27,9 @@ export type Browser = {
     ...params: Params<E> extends undefined ? [] : [Params<E>]
   ) => Promise<Answer<E>>;
   /** Sends what must be refused with a status. */
-  readonly refused: <E extends Endpoint>(
+  readonly refused: (
     status: number,
-    line: E,
+    line: Endpoint,
     body?: unknown,
     params?: Readonly<Record<string, string>>,
   ) => Promise<Refusal>;
