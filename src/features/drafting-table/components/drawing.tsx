@@ -1,4 +1,4 @@
-import { useLayoutEffect, useMemo, useRef, useState, type Dispatch } from 'react';
+import { memo, useLayoutEffect, useMemo, useRef, useState, type Dispatch } from 'react';
 
 import type { Draft } from '#shared/engine/draft.ts';
 
@@ -30,7 +30,7 @@ type DrawingProps = {
 const reach = { pointer: 7, touch: 18 };
 
 /** The pieces on the canvas under the rod, with what is pointed at, handled or explained on top. */
-export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
+export const Drawing = memo(function Drawing({ draft, state, dispatch }: DrawingProps) {
   const frame = useRef<HTMLDivElement>(null);
   const canvas = useRef<HTMLCanvasElement>(null);
   const sheet = useRef<Sheet>(undefined);
@@ -45,8 +45,11 @@ export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
   const { view } = framing;
 
   const step = drafting ? draft.steps.find((each) => each.id === state.step) : undefined;
-  const seam = litSeam(draft, state.seam, state.unit);
-  const lit = litLines(draft, layout, seam, step);
+  const seam = useMemo(
+    () => litSeam(draft, state.seam, state.unit),
+    [draft, state.seam, state.unit],
+  );
+  const lit = useMemo(() => litLines(draft, layout, seam, step), [draft, layout, seam, step]);
 
   const colours = useRef<Colours>(undefined);
   useLayoutEffect(() => {
@@ -69,7 +72,7 @@ export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
     if (colours.current === undefined) return;
     sheet.current?.light(layout, lit, colours.current);
     sheet.current?.look(view);
-  });
+  }, [layout, lit, view, size, drafting, theme]);
 
   const walkSeams = (by: number) => {
     const count = draft.proof.seams.length;
@@ -166,4 +169,4 @@ export const Drawing = ({ draft, state, dispatch }: DrawingProps) => {
       />
     </div>
   );
-};
+});
