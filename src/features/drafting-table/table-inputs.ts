@@ -68,7 +68,11 @@ export type LaidGown = {
 };
 
 /** What a gown's cards give for a field, if anything. */
-export function givenFor(field: FieldKey, card: MeasureCard, style: StyleCard): number | undefined {
+export function givenFor(
+  field: FieldKey,
+  card: { readonly [K in keyof MeasureCard]?: MeasureCard[K] | undefined },
+  style: StyleCard,
+): number | undefined {
   const measure = measures.find((key) => field === `card.${key}`);
   if (measure !== undefined) return card[measure];
   const length = styleLengths.find((key) => field === `style.${key}`);

@@ -1,0 +1,82 @@
+import { topLineShapes } from '#shared/drafts/gown/style-card.ts';
+
+import { fieldKeys, readEntry, rewritten, type Entry, type FieldKey } from './fields.ts';
+import type { Unit } from '#shared/units/said.ts';
+import type { Choices } from './table-inputs.ts';
+
+const choiceKeys = ['name', 'date', 'topLine', 'shaping', 'preset'] as const;
+type ChoiceKey = (typeof choiceKeys)[number];
+export type PartKey = FieldKey | ChoiceKey;
+
+/** One part of what lies on the table: a figure's entry or a choice's word; null where it is left open. */
+export type Part = Entry | string | null;
+
+/** Some of the parts of a table, each under its key. */
+export type Parts = { readonly [K in PartKey]?: Part };
+
+export const partKeys: readonly PartKey[] = [...choiceKeys, ...fieldKeys];
+
+const isChoice = (key: PartKey): key is ChoiceKey => choiceKeys.some((each) => each === key);
+
+export const partOf = (choices: Choices, key: PartKey): Part =>
+  (isChoice(key) ? choices[key] : choices.entries[key]) ?? null;
+
+/** Everything on the table, part by part; what is left open is not mentioned. */
+export const partsOf = (choices: Choices): Parts =>
+  Object.fromEntries(
+    partKeys.flatMap((key) => {
+      const part = partOf(choices, key);
+      return part === null ? [] : [[key, part]];
+    }),
+  );
+
+/** Whether two parts mean the same; how a figure was written does not matter where it could be read. */
+export function samePart(a: Part, b: Part): boolean {
+  if (a === b) return true;
+  if (a === null || b === null || typeof a === 'string' || typeof b === 'string') return false;
+  return 'value' in a && 'value' in b ? a.value === b.value : !('value' in a) && a.text === b.text;
+}
+
+/** The keys of the parts in which two tables differ, in the order of the cards. */
+export const differingParts = (a: Choices, b: Choices): readonly PartKey[] =>
+  a === b ? [] : partKeys.filter((key) => !samePart(partOf(a, key), partOf(b, key)));
+
+/** The table with some parts put in place; figures are written in the reader's unit. */
+export function withParts(choices: Choices, parts: Parts, unit: Unit): Choices {
+  const word = (key: ChoiceKey): string | undefined => {
+    const part = key in parts ? (parts[key] ?? null) : partOf(choices, key);
+    return typeof part === 'string' ? part : undefined;
+  };
+  const entries = fieldKeys.flatMap((field) => {
+    const part = field in parts ? parts[field] : choices.entries[field];
+    if (part === undefined || part === null || typeof part === 'string') return [];
+    return [[field, field in parts ? rewritten(field, part, unit) : part] as const];
+  });
+  return {
+    name: word('name') ?? '',
+    date: word('date'),
+    topLine: topLineShapes.find((each) => each === word('topLine')) ?? 'sweetheart',
+    shaping: word('shaping') === 'darts' ? 'darts' : 'princess',
+    preset: word('preset') === 'quarterRule' ? 'quarterRule' : 'balanced',
+    entries: Object.fromEntries(entries),
+  };
+}
+
+/** Parts as a browser kept them: a value is trusted as a number, other text is read again. */
+export function keptParts(kept: unknown, unit: Unit): Parts {
+  if (!isRecord(kept)) return {};
+  return Object.fromEntries(
+    partKeys.flatMap((key): (readonly [PartKey, Part])[] => {
+      const part = kept[key];
+      if (part === null) return [[key, null]];
+      if (isChoice(key)) return typeof part === 'string' ? [[key, part]] : [];
+      if (!isRecord(part) || typeof part['text'] !== 'string') return [];
+      const { text, value } = part;
+      const isValue = typeof value === 'number' && Number.isFinite(value);
+      return [[key, isValue ? { text, value } : readEntry(key, text, unit)]];
+    }),
+  );
+}
+
+export const isRecord = (value: unknown): value is Readonly<Record<string, unknown>> =>
+  typeof value === 'object' && value !== null;
