@@ -65,7 +65,8 @@ function crossing(
 /** A stretch shorter than this is a point of the outline, mm. */
 const shortest = 1e-6;
 
-const hasLength = (segment: Segment): boolean => {
+/** Whether a stretch is more than a point. */
+export const hasLength = (segment: Segment): boolean => {
   const { left, right, top, bottom } = boxOf(segment);
   return right - left > shortest || bottom - top > shortest;
 };

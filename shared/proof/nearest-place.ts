@@ -77,18 +77,14 @@ export function nearestPlace(path: Path, at: Point, within = Infinity): NearestP
       consider(segment, index, onLine(segment, at));
       continue;
     }
-    let before = segment.from;
-    let here = segment.from;
-    for (let i = 0; i <= shares; i += 1) {
-      const after = i < shares ? pointAt(segment, (i + 1) / shares) : here;
-      const off = distance(here, at);
-      const step = Math.max(distance(before, here), distance(here, after));
-      if (off <= distance(before, at) && off <= distance(after, at) && off - step <= least) {
-        const [low, high] = [between0and1((i - 1) / shares), between0and1((i + 1) / shares)];
-        consider(segment, index, narrowed(segment, at, low, high));
+    let before = growth(segment, at, 0);
+    for (let i = 1; i <= shares; i += 1) {
+      const after = growth(segment, at, i / shares);
+      // The distance falls and then grows: a nearest place lies between.
+      if (before < 0 && after >= 0) {
+        consider(segment, index, narrowed(segment, at, (i - 1) / shares, i / shares));
       }
-      before = here;
-      here = after;
+      before = after;
     }
     consider(segment, index, 0);
     consider(segment, index, 1);

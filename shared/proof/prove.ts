@@ -5,6 +5,7 @@ import type { Said } from '../units/said.ts';
 import { proveCorners } from './corners.ts';
 import { proveDarts } from './darts.ts';
 import { proveGirths } from './girths.ts';
+import { hasLength } from './crossing-itself.ts';
 import { joinedPairs, placeEdges } from './joined-edges.ts';
 import { proveOutlines } from './outlines.ts';
 import type { Proof, ProofLine } from './proof.ts';
@@ -29,8 +30,17 @@ function verdictOf(lines: readonly ProofLine[]): Said {
   return ['These pieces do not sew together yet. ', ...first.said, more];
 }
 
+/** A piece whose edges are rid of stretches without length, which have no direction to be measured. */
+const measurable = (piece: FinishedPiece): FinishedPiece => ({
+  ...piece,
+  edges: piece.edges.map((edge) =>
+    edge.path.every(hasLength) ? edge : { ...edge, path: edge.path.filter(hasLength) },
+  ),
+});
+
 /** The proof of a gown (method section 8, lines 1 to 5 and 8), measured from the pieces themselves. */
-export function prove({ pieces, construction, rules }: ProofInput): Proof {
+export function prove({ pieces: drawn, construction, rules }: ProofInput): Proof {
+  const pieces = drawn.map(measurable);
   const placed = placeEdges(pieces);
   const pairs = joinedPairs(placed);
   const girths = proveGirths(pieces, construction);
