@@ -66,25 +66,43 @@ export function follows({ path }: Edge, wanted: number | undefined, at: Point): 
 /** Places asked about between the allowance and the cutting line found beyond it. */
 const asked = [0.1, 0.3, 0.5, 0.7, 0.9, 1];
 
-/** Whether all that a look passes between two distances lies within the allowance of some seam line. */
-const filled = (
-  { piece, allowances }: Sight,
-  { at, out }: Look,
-  from: number,
-  until: number,
-): boolean =>
+/** Whether a place lies beyond an edge's end, no farther aside of the edge carried on than allowed. */
+function carriedOn(corner: Point, away: Point, out: Point, allowance: number, at: Point): boolean {
+  const from = subtract(at, corner);
+  return dot(from, away) >= 0 && dot(from, out) <= allowance + clearBound;
+}
+
+/** Whether a place lies where two allowances meet beyond a corner. */
+const inCorner = ({ piece, allowances }: Sight, at: Point): boolean =>
+  piece.edges.some((edge, index) => {
+    const next = (index + 1) % piece.edges.length;
+    const corner = endOf(edge.path);
+    const follower = piece.edges[next];
+    if (!corner || !follower) return false;
+    const arriving = endTangent(edge.path);
+    const leaving = startTangent(follower.path);
+    return (
+      carriedOn(corner, arriving, turnLeft(arriving), allowances[index] ?? 0, at) &&
+      carriedOn(corner, scale(leaving, -1), turnLeft(leaving), allowances[next] ?? 0, at)
+    );
+  });
+
+/** Whether all that a look passes between two distances belongs to the allowances of seam lines. */
+const filled = (sight: Sight, { at, out }: Look, from: number, until: number): boolean =>
   asked.every((share) => {
     const here = add(at, scale(out, from + share * (until - from)));
-    return piece.edges.some(
-      ({ path }, k) => nearestPlace(path, here, (allowances[k] ?? 0) + clearBound) !== undefined,
+    const within = sight.piece.edges.some(
+      ({ path }, k) =>
+        nearestPlace(path, here, (sight.allowances[k] ?? 0) + clearBound) !== undefined,
     );
+    return within || inCorner(sight, here);
   });
 
 /**
  * How far the cutting line stands off at one place. Where the seam line bends inwards more tightly
  * than the allowance is wide, no parallel can follow it: there the cutting line is rightly farther
- * out where allowances of the seam lines beside fill all that lies between, and at the end of an
- * edge where it belongs to the mitre.
+ * out where allowances of the seam lines beside, and of corners between them, fill all that lies
+ * between, and where it runs along the end of another edge that is carried on.
  */
 function standOff(sight: Sight, index: number, look: Look): number {
   const { piece, cut, allowances } = sight;
@@ -95,8 +113,8 @@ function standOff(sight: Sight, index: number, look: Look): number {
   if (filled(sight, look, wanted, away ?? reach)) return wanted;
   if (away === undefined) return -inside;
   const hit = add(look.at, scale(look.out, away));
-  const followed = piece.edges.some((edge, k) => follows(edge, allowances[k], hit));
   const own = nearestPlace(piece.edges[index]?.path ?? [], hit, wanted - clearBound);
+  const followed = piece.edges.some((edge, k) => follows(edge, allowances[k], hit));
   return own === undefined && followed ? wanted : away;
 }
 
