@@ -38,12 +38,23 @@ function sewnArc({ piece, edge }: PlacedEdge, arc: number): number {
 const titleOf = ({ first, second }: JoinedPair): string =>
   `${first.piece.title}, ${spoken(first.edge.name)}, to ${second.piece.title}, ${spoken(second.edge.name)}`;
 
+/** A notch on a seam whose other side has none of that name. */
+const loneNotch = ({ piece, edge }: PlacedEdge, notch: Notch): Finding =>
+  missing(
+    [
+      `${piece.title}, ${spoken(edge.name)}: the notch “${spoken(notch.name)}” has no partner to meet.`,
+    ],
+    [{ piece: piece.name, edge: edge.name, at: notch.at }],
+  );
+
 function notchFindings(pair: JoinedPair): readonly Finding[] {
   const { first, second, opposite } = pair;
+  const notches = notchesOf(first.piece, first.edge);
   const partners = notchesOf(second.piece, second.edge);
-  return notchesOf(first.piece, first.edge).flatMap((notch) => {
+  const lone = partners.filter((each) => !notches.some((notch) => notch.name === each.name));
+  const meeting = notches.flatMap((notch) => {
     const partner = partners.find((each) => each.name === notch.name);
-    if (partner === undefined) return [];
+    if (partner === undefined) return [loneNotch(first, notch)];
     const where = [
       { piece: first.piece.name, edge: first.edge.name, at: notch.at },
       { piece: second.piece.name, edge: second.edge.name, at: partner.at },
@@ -75,6 +86,7 @@ function notchFindings(pair: JoinedPair): readonly Finding[] {
       ),
     ];
   });
+  return [...meeting, ...lone.map((notch) => loneNotch(second, notch))];
 }
 
 function walk(pair: JoinedPair): { readonly row: SeamRow; readonly findings: readonly Finding[] } {

@@ -105,6 +105,13 @@ describe('one point of the band moved by a millimetre', () => {
     expect(failed(proofOf(withNotchAt(point(231, 150))))).toEqual([2]);
   });
 
+  test('a notch without a partner on the other side of its seam is found', () => {
+    for (const name of ['front-top', 'back-top']) {
+      const lone = withPiece(bandPieces, name, (piece) => ({ ...piece, notches: [] }));
+      expect(failed(proofOf(lone))).toEqual([2]);
+    }
+  });
+
   test('a dart tip moved aside makes its legs unequal', () => {
     const steep = withPiece(bandPieces, 'front-top', (piece) => ({
       ...piece,
