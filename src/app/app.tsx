@@ -24,6 +24,51 @@ const router = createBrowserRouter([
         }),
       },
       {
+        path: paths.gown,
+        lazy: async () => ({ Component: (await import('./gown-place.tsx')).GownPlace }),
+      },
+      {
+        path: paths.card,
+        lazy: async () => ({ Component: (await import('./card-place.tsx')).CardPlace }),
+      },
+      {
+        lazy: async () => ({ Component: (await import('./places-frame.tsx')).PlacesFrame }),
+        children: [
+          {
+            path: paths.signIn,
+            lazy: async () => ({ Component: (await import('./sign-in-place.tsx')).SignInPlace }),
+          },
+          {
+            path: paths.signUp,
+            lazy: async () => ({ Component: (await import('./sign-up-place.tsx')).SignUpPlace }),
+          },
+          {
+            lazy: async () => ({ Component: (await import('./own-places.tsx')).OwnPlaces }),
+            children: [
+              {
+                path: paths.gowns,
+                lazy: async () => ({
+                  Component: (await import('../features/gowns/routes/gowns-page.tsx')).GownsPage,
+                }),
+              },
+              {
+                path: paths.cards,
+                lazy: async () => ({
+                  Component: (await import('../features/gowns/routes/measure-cards-page.tsx'))
+                    .MeasureCardsPage,
+                }),
+              },
+              {
+                path: paths.account,
+                lazy: async () => ({
+                  Component: (await import('./account-place.tsx')).AccountPlace,
+                }),
+              },
+            ],
+          },
+        ],
+      },
+      {
         path: '*',
         lazy: async () => ({ Component: (await import('./no-such-place.tsx')).NoSuchPlace }),
       },

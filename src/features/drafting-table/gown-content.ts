@@ -1,7 +1,14 @@
 import type { GownContent } from '#shared/api/gowns.ts';
 import type { Unit } from '#shared/units/said.ts';
 
-import { fieldKeys, readEntry, writeValue, type Entry, type FieldKey } from './fields.ts';
+import {
+  fieldKeys,
+  readEntry,
+  rewritten,
+  writeValue,
+  type Entry,
+  type FieldKey,
+} from './fields.ts';
 import { cardOf, givenFor, presetOf, rulesOf, styleOf, type Choices } from './table-inputs.ts';
 
 /** The key the name of a card goes under in the letters typed. */
@@ -58,3 +65,25 @@ export function choicesOf({ typed, inputs }: GownContent): {
     },
   };
 }
+
+/** What a gown keeps, with its figures written in the reader's unit. */
+export function choicesIn(content: GownContent, unit: Unit): Choices {
+  const { choices } = choicesOf(content);
+  const entries = fieldKeys.flatMap((field) => {
+    const entry = choices.entries[field];
+    return entry === undefined ? [] : [[field, rewritten(field, entry, unit)] as const];
+  });
+  return { ...choices, entries: Object.fromEntries(entries) };
+}
+
+/** Whether two contents are one gown, however its figures were written. */
+export const sameWork = (a: GownContent, b: GownContent): boolean =>
+  a.unread.length + b.unread.length === 0 && sorted(a.inputs) === sorted(b.inputs);
+
+/** JSON with keys in one order: the server's own order says nothing. */
+const sorted = (value: unknown): string =>
+  JSON.stringify(value, (_key, each: unknown) =>
+    typeof each === 'object' && each !== null && !Array.isArray(each)
+      ? Object.fromEntries(Object.entries(each).sort(([a], [b]) => (a < b ? -1 : 1)))
+      : each,
+  );

@@ -1,17 +1,24 @@
 import { topLineShapes } from '#shared/drafts/gown/style-card.ts';
 import type { Unit } from '#shared/units/said.ts';
 
+import { browserStorage } from '../../lib/browser-storage.ts';
 import { fieldKeys, readEntry, writeValue, type Entries, type FieldKey } from './fields.ts';
+import { keptHistory, noHistory, type History } from './history.ts';
+import { isRecord } from './parts.ts';
 import { emptyTable, redrawn, type TableState } from './table-state.ts';
 
 const key = 'ellwand.table';
+const historyKey = 'ellwand.table.history';
 const version = 1;
 
 /**
  * The table as this browser kept it; an empty one in the reader's unit where nothing was kept or it
  * cannot be trusted.
  */
-export function keptTable(unit: Unit, storage: Storage | undefined = browserStorage()): TableState {
+export function keptTable(
+  unit: Unit,
+  storage: Storage | undefined = browserStorage('local'),
+): TableState {
   const empty = { ...emptyTable, unit };
   try {
     const text = storage?.getItem(key) ?? 'null';
@@ -24,7 +31,7 @@ export function keptTable(unit: Unit, storage: Storage | undefined = browserStor
 /** Keeps the table in this browser; false where the browser does not allow it. */
 export function keepTable(
   state: TableState,
-  storage: Storage | undefined = browserStorage(),
+  storage: Storage | undefined = browserStorage('local'),
 ): boolean {
   const { unit, name, date, topLine, shaping, preset, entries } = state;
   try {
@@ -39,12 +46,32 @@ export function keepTable(
   }
 }
 
-/** Some browsers refuse even to name their storage. */
-function browserStorage(): Storage | undefined {
+/** Forgets the table and how it came about: its gown is kept elsewhere now. */
+export function clearKeptTable(): void {
   try {
-    return globalThis.localStorage;
+    browserStorage('local')?.removeItem(key);
+    browserStorage('local')?.removeItem(historyKey);
   } catch {
-    return undefined;
+    // A browser that keeps nothing has nothing to forget.
+  }
+}
+
+/** The changes that led to the kept table, as far as they still fit it. */
+export function keptTableHistory(table: TableState): History {
+  try {
+    const text = browserStorage('local')?.getItem(historyKey) ?? 'null';
+    return keptHistory(JSON.parse(text), table, table.unit);
+  } catch {
+    return noHistory;
+  }
+}
+
+/** Keeps the changes beside the table; without room for them the table itself matters more. */
+export function keepTableHistory({ past, future }: History): void {
+  try {
+    browserStorage('local')?.setItem(historyKey, JSON.stringify({ past, future }));
+  } catch {
+    // The way back ends with this page then.
   }
 }
 
@@ -79,6 +106,3 @@ function keptEntry(
   }
   return typeof text === 'string' ? [[field, readEntry(field, text.slice(0, 40), unit)]] : [];
 }
-
-const isRecord = (value: unknown): value is Readonly<Record<string, unknown>> =>
-  typeof value === 'object' && value !== null;

@@ -1,14 +1,12 @@
-import { gownSchema, type Gown, type GownContent } from '#shared/api/gowns.ts';
-
 import { CallFailed } from '../../lib/call.ts';
 import { newId } from '../../lib/new-id.ts';
 
 /** A save on its way: sent again with the same number until the server has acknowledged it. */
-export type Unsent = {
+export type Unsent<C> = {
   readonly saveId: string;
   readonly baseVersion: number;
   readonly engine: string;
-  readonly content: GownContent;
+  readonly content: C;
   readonly keepReplaced: boolean;
 };
 
@@ -25,18 +23,18 @@ export type Standing =
   /** Refused for a reason that trying again does not mend; `message` says it. */
   | 'refused';
 
-export type Saving = {
+export type Saving<C, R> = {
   readonly standing: Standing;
   /** Version on the server that the table goes on from. */
   readonly base: number;
-  readonly unsent: Unsent | undefined;
+  readonly unsent: Unsent<C> | undefined;
   readonly message?: string | undefined;
-  /** With `conflict`: how the gown was saved from elsewhere. */
-  readonly current?: Gown | undefined;
+  /** With `conflict`: how it was saved from elsewhere. */
+  readonly current?: R | undefined;
 };
 
-export type Saver = {
-  readonly now: () => Saving;
+export type Saver<C, R> = {
+  readonly now: () => Saving<C, R>;
   readonly subscribe: (changed: () => void) => () => void;
   /** Something on the table has changed. */
   readonly edited: () => void;
@@ -45,18 +43,24 @@ export type Saver = {
   /** In a conflict: saves what lies here over the other, which the server keeps as a revision. */
   readonly keepMine: () => void;
   /** What lies on the table is now this version of the server's. */
-  readonly adopt: (version: number, content: GownContent) => void;
+  readonly adopt: (version: number, content: C) => void;
+  /** Sends what was left unsent when the table was opened. */
+  readonly start: () => void;
   readonly close: () => void;
 };
 
-type SaverParts = {
+export type SaverParts<C, R> = {
   readonly base: number;
-  readonly unsent: Unsent | undefined;
+  readonly unsent: Unsent<C> | undefined;
   /** Whether the table holds work the server has not got. */
   readonly changed: boolean;
   readonly engine: string;
-  readonly content: () => GownContent;
-  readonly send: (save: Unsent) => Promise<{ readonly version: number }>;
+  readonly content: () => C;
+  readonly send: (save: Unsent<C>) => Promise<{ readonly version: number }>;
+  /** Reads what a conflict carries; no answer where it cannot be read. */
+  readonly readCurrent: (current: unknown) => R | undefined;
+  /** Whether two contents are the same work, however its figures were written. */
+  readonly same: (a: C, b: C) => boolean;
 };
 
 /** The hand rests this long before a save, and a save waits at most this long, ms. */
@@ -75,12 +79,15 @@ const passing: readonly CallFailed['code'][] = [
   'internal',
 ];
 
-/** Keeps a gown on the server as it is drawn: one save at a time, each from the version before. */
-export function openSaver({ engine, content, send, ...start }: SaverParts): Saver {
+/** Keeps a record on the server as it is worked on: one save at a time, each from the version before. */
+export function openSaver<C, R extends { readonly version: number; readonly content: C }>(
+  parts: SaverParts<C, R>,
+): Saver<C, R> {
+  const { engine, content, send, readCurrent, same, ...start } = parts;
   const listeners = new Set<() => void>();
   let changed = start.changed;
   let acknowledged = changed ? undefined : JSON.stringify(content());
-  let saving: Saving = {
+  let saving: Saving<C, R> = {
     standing: changed || start.unsent !== undefined ? 'waiting' : 'saved',
     base: start.base,
     unsent: start.unsent,
@@ -90,7 +97,7 @@ export function openSaver({ engine, content, send, ...start }: SaverParts): Save
   let failures = 0;
   let running: Promise<void> | undefined;
 
-  const tell = (next: Partial<Saving>) => {
+  const tell = (next: Partial<Saving<C, R>>) => {
     saving = { ...saving, message: undefined, current: undefined, ...next };
     for (const listener of listeners) listener();
   };
@@ -128,7 +135,7 @@ export function openSaver({ engine, content, send, ...start }: SaverParts): Save
   }
 
   /** A save of what lies on the table; none where the server has it already. */
-  function unsentNow(keepReplaced: boolean): Unsent | undefined {
+  function unsentNow(keepReplaced: boolean): Unsent<C> | undefined {
     const now = content();
     changed = false;
     waitingSince = undefined;
@@ -136,7 +143,7 @@ export function openSaver({ engine, content, send, ...start }: SaverParts): Save
     return { saveId: newId(), baseVersion: saving.base, engine, content: now, keepReplaced };
   }
 
-  function refused(error: unknown, unsent: Unsent): void {
+  function refused(error: unknown, unsent: Unsent<C>): void {
     if (!(error instanceof CallFailed)) throw error;
     if (passing.includes(error.code)) {
       tell({ standing: 'offline', message: error.message });
@@ -148,9 +155,8 @@ export function openSaver({ engine, content, send, ...start }: SaverParts): Save
       tell({ standing: 'signed-out' });
       return;
     }
-    const current =
-      error.code === 'conflict' ? gownSchema.safeParse(error.current).data : undefined;
-    if (current !== undefined && sameWork(current.content, content())) {
+    const current = error.code === 'conflict' ? readCurrent(error.current) : undefined;
+    if (current !== undefined && same(current.content, content())) {
       changed = false;
       acknowledged = JSON.stringify(content());
       tell({ standing: 'saved', base: current.version, unsent: undefined });
@@ -164,8 +170,6 @@ export function openSaver({ engine, content, send, ...start }: SaverParts): Save
     changed = true;
     tell({ standing: 'refused', message: error.message, unsent: undefined });
   }
-
-  if (saving.standing === 'waiting') sendIn(0);
 
   return {
     now: () => saving,
@@ -193,18 +197,9 @@ export function openSaver({ engine, content, send, ...start }: SaverParts): Save
       acknowledged = JSON.stringify(adopted);
       tell({ standing: 'saved', base: version, unsent: undefined });
     },
+    start: () => {
+      if (saving.standing === 'waiting') void flush();
+    },
     close: () => clearTimeout(timer),
   };
 }
-
-/** Whether two contents are one gown, however its figures were written. */
-const sameWork = (a: GownContent, b: GownContent): boolean =>
-  a.unread.length + b.unread.length === 0 && sorted(a.inputs) === sorted(b.inputs);
-
-/** JSON with keys in one order: the server's own order says nothing. */
-const sorted = (value: unknown): string =>
-  JSON.stringify(value, (_key, each: unknown) =>
-    typeof each === 'object' && each !== null && !Array.isArray(each)
-      ? Object.fromEntries(Object.entries(each).sort(([a], [b]) => (a < b ? -1 : 1)))
-      : each,
-  );

@@ -24,6 +24,8 @@ type HandlesProps = {
   readonly unit: Unit;
   readonly onMove: (key: Handle['key'], value: number) => void;
   readonly onHold: (held: boolean) => void;
+  /** The hand leaves a handle: what comes next is another change. */
+  readonly onRelease: () => void;
 };
 
 /** Brass lozenges at the points a maker moves by hand; drag them, or step them with the arrow keys. */
@@ -61,6 +63,7 @@ const Lozenge = ({
   unit,
   onMove,
   onHold,
+  onRelease,
 }: LozengeProps) => {
   const [near, setNear] = useState(false);
   const from = useRef<{ readonly x: number; readonly y: number; readonly value: number }>(
@@ -100,6 +103,7 @@ const Lozenge = ({
   const drop = () => {
     from.current = undefined;
     onHold(false);
+    onRelease();
   };
 
   return (
@@ -115,6 +119,7 @@ const Lozenge = ({
       transform={`translate(${at.x} ${at.y})`}
       className="pointer-events-auto cursor-grab touch-none outline-none focus-visible:[&_.ring]:opacity-100"
       onKeyDown={press}
+      onKeyUp={(event) => event.key.startsWith('Arrow') && onRelease()}
       onPointerDown={grab}
       onPointerMove={drag}
       onPointerUp={drop}

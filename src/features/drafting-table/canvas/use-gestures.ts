@@ -3,10 +3,14 @@ import { useEffect, useRef, type PointerEvent, type RefObject } from 'react';
 import { between, distance, subtract, type Point } from '#shared/geometry/point.ts';
 
 type Gestures = {
+  /** The pointer or a finger is put down. */
+  readonly press?: (at: Point) => void;
   readonly pan: (by: Point) => void;
   readonly zoom: (by: number, at: Point) => void;
   /** The pointer rests on, or a finger taps, a place; pixels in the element. */
   readonly point: (at: Point, touch: boolean) => void;
+  /** Put down and lifted at one place; where it is absent, as if the pointer rested there. */
+  readonly tap?: ((at: Point, touch: boolean) => void) | undefined;
   readonly leave: () => void;
 };
 
@@ -37,8 +41,10 @@ export function useGestures(element: RefObject<HTMLElement | null>, gestures: Ge
     onPointerDown: (event: PointerEvent<HTMLElement>) => {
       if (event.button !== 0) return;
       event.currentTarget.setPointerCapture(event.pointerId);
-      held.current.set(event.pointerId, placeIn(event.currentTarget, event));
+      const at = placeIn(event.currentTarget, event);
+      held.current.set(event.pointerId, at);
       travelled.current = 0;
+      gestures.press?.(at);
     },
     onPointerMove: (event: PointerEvent<HTMLElement>) => {
       const to = placeIn(event.currentTarget, event);
@@ -59,7 +65,8 @@ export function useGestures(element: RefObject<HTMLElement | null>, gestures: Ge
     },
     onPointerUp: (event: PointerEvent<HTMLElement>) => {
       if (!held.current.delete(event.pointerId) || travelled.current > 6) return;
-      gestures.point(placeIn(event.currentTarget, event), event.pointerType === 'touch');
+      const tap = gestures.tap ?? gestures.point;
+      tap(placeIn(event.currentTarget, event), event.pointerType === 'touch');
     },
     onPointerCancel: (event: PointerEvent<HTMLElement>) => {
       held.current.delete(event.pointerId);

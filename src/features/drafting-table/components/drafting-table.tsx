@@ -1,10 +1,10 @@
-import { useDeferredValue, useEffect, useReducer, useRef, useState } from 'react';
+import { useDeferredValue, useRef, useState, type Dispatch, type ReactNode } from 'react';
 
-import { measuresInInches } from '../../../lib/reader.ts';
 import { useMedia } from '../../../lib/use-media.ts';
 import { Tabs, type Tab } from '../../../ui/tabs.tsx';
-import { keepTable, keptTable } from '../saved-table.ts';
-import { tableState, type Panel } from '../table-state.ts';
+import type { Bench, BenchAction } from '../bench.ts';
+import type { Panel } from '../table-state.ts';
+import { useUndoKeys } from '../use-undo-keys.ts';
 import { Drawing } from './drawing.tsx';
 import { EmptyTable } from './empty-table.tsx';
 import { Foot } from './foot.tsx';
@@ -16,17 +16,27 @@ import { StepsPanel } from './steps-panel.tsx';
 import { StyleCard } from './style-card.tsx';
 import { TableHeader } from './table-header.tsx';
 
+type DraftingTableProps = {
+  readonly bench: Bench;
+  readonly dispatch: Dispatch<BenchAction>;
+  /** Under what the places of moved pieces are kept in this browser. */
+  readonly place: string;
+  /** Which gown lies here and how it is kept, for the header. */
+  readonly heading: ReactNode;
+  /** Something that needs doing before all else. */
+  readonly notice?: ReactNode;
+  /** What else can be done with the measure card. */
+  readonly cardTools?: ReactNode;
+};
+
 /** The drafting table: cards, drawing and panels, all of one state. */
-export const DraftingTable = () => {
-  const [state, dispatch] = useReducer(tableState, undefined, () =>
-    keptTable(measuresInInches() ? 'in' : 'cm'),
-  );
-  const [kept, setKept] = useState(true);
+export const DraftingTable = (props: DraftingTableProps) => {
+  const { bench, dispatch, place, heading, notice, cardTools } = props;
+  const { table: state } = bench;
   const [printing, setPrinting] = useState(false);
   const cards = useRef<HTMLDivElement>(null);
   const wide = useMedia('(min-width: 1100px)');
-
-  useEffect(() => setKept(keepTable(state)), [state]);
+  useUndoKeys(dispatch);
 
   const { draft } = state.drawn;
   // The drawing follows at once; tables and sentences may come a moment later.
@@ -36,7 +46,7 @@ export const DraftingTable = () => {
   const measures: Tab<Panel> = {
     value: 'measures',
     label: 'Measures',
-    render: () => <MeasureCard state={state} dispatch={dispatch} />,
+    render: () => <MeasureCard state={state} dispatch={dispatch} tools={cardTools} />,
   };
   const style: Tab<Panel> = {
     value: 'style',
@@ -88,7 +98,7 @@ export const DraftingTable = () => {
         />
       ) : (
         <>
-          <Drawing draft={draft} state={state} dispatch={dispatch} />
+          <Drawing draft={draft} state={state} place={place} dispatch={dispatch} />
           <Foot draft={draft} state={state} />
         </>
       )}
@@ -97,19 +107,17 @@ export const DraftingTable = () => {
 
   return (
     <div className="flex h-dvh flex-col overflow-hidden">
-      <TableHeader
-        state={state}
-        kept={kept}
-        dispatch={dispatch}
-        onPrint={() => setPrinting(true)}
-      />
+      <TableHeader bench={bench} dispatch={dispatch} onPrint={() => setPrinting(true)}>
+        {heading}
+      </TableHeader>
+      {notice}
       {wide ? (
         <main className="flex min-h-0 grow">
           <div
             ref={cards}
             className="w-[19rem] shrink-0 space-y-8 overflow-y-auto border-r border-rule bg-cloth px-4 py-4"
           >
-            <MeasureCard state={state} dispatch={dispatch} />
+            <MeasureCard state={state} dispatch={dispatch} tools={cardTools} />
             <StyleCard state={state} dispatch={dispatch} />
           </div>
           {drawing}

@@ -1,48 +1,66 @@
-import { memo, useLayoutEffect, useMemo, useRef, useState, type Dispatch } from 'react';
+import { memo, useMemo, useRef, useState, type Dispatch } from 'react';
 
 import type { Draft } from '#shared/engine/draft.ts';
+import { scale, type Point } from '#shared/geometry/point.ts';
 
 import { useSize } from '../../../lib/use-size.ts';
 import { useTheme } from '../../../lib/use-theme.ts';
-import { readColours, type Colours } from '../canvas/colours.ts';
+import type { BenchAction } from '../bench.ts';
 import { Handles } from '../canvas/handles.tsx';
 import { asCut, asDrafted } from '../canvas/layout.ts';
 import { Lettering } from '../canvas/lettering.tsx';
 import { litLines } from '../canvas/lit-lines.ts';
+import { pieceAt } from '../canvas/moved-pieces.ts';
 import { Rod } from '../canvas/rod.tsx';
-import { laySheet, type Sheet } from '../canvas/sheet.ts';
 import { StepPoints } from '../canvas/step-points.tsx';
+import { TapeLine } from '../canvas/tape-line.tsx';
 import { useFraming } from '../canvas/use-framing.ts';
 import { useGestures } from '../canvas/use-gestures.ts';
+import { useMovedPieces } from '../canvas/use-moved-pieces.ts';
+import { useSheet } from '../canvas/use-sheet.ts';
+import { readingWords, useTape } from '../canvas/use-tape.ts';
 import { toPaper } from '../canvas/view.ts';
+import { drawingKey, keyWords } from '../drawing-keys.ts';
 import { litSeam, seamIndex } from '../seams.ts';
-import type { TableAction, TableState } from '../table-state.ts';
+import type { TableState } from '../table-state.ts';
 import { DrawingTools } from './drawing-tools.tsx';
+import { HeldPiece } from './held-piece.tsx';
 import { SeamCallout } from './seam-callout.tsx';
+import { TableTools, type Tool } from './table-tools.tsx';
 
 type DrawingProps = {
   readonly draft: Draft;
   readonly state: TableState;
-  readonly dispatch: Dispatch<TableAction>;
+  readonly place: string;
+  readonly dispatch: Dispatch<BenchAction>;
 };
 
 /** Pixels within which a line counts as pointed at: a finger is broader than a pointer. */
 const reach = { pointer: 7, touch: 18 };
 
+/** A piece or the tape's crosshair is stepped by so many millimetres, with shift by ten times as many. */
+const stride = 10;
+
 /** The pieces on the canvas under the rod, with what is pointed at, handled or explained on top. */
-export const Drawing = memo(function Drawing({ draft, state, dispatch }: DrawingProps) {
+export const Drawing = memo(function Drawing({ draft, state, place, dispatch }: DrawingProps) {
   const frame = useRef<HTMLDivElement>(null);
   const canvas = useRef<HTMLCanvasElement>(null);
-  const sheet = useRef<Sheet>(undefined);
   const [held, setHeld] = useState(false);
+  const [chosenTool, setTool] = useState<Tool>('look');
+  const [piece, setPiece] = useState<string>();
   const size = useSize(frame);
   const theme = useTheme();
   const drafting = state.panel === 'steps';
+  const tool = drafting ? 'look' : chosenTool;
   const { pieces } = draft;
-  const layout = useMemo(() => (drafting ? asDrafted(pieces) : asCut(pieces)), [drafting, pieces]);
+  const asLaid = useMemo(() => (drafting ? asDrafted(pieces) : asCut(pieces)), [drafting, pieces]);
+  const moved = useMovedPieces(place, asLaid, !drafting);
+  const { layout } = moved;
   const key = `${String(drafting)} ${pieces.map((each) => each.name).join()}`;
-  const framing = useFraming(key, layout.box, size, !held);
+  // Framed by where the pieces lay: one that is carried off does not carry the view along.
+  const framing = useFraming(key, asLaid.box, size, !held);
   const { view } = framing;
+  const tape = useTape(layout);
 
   const step = drafting ? draft.steps.find((each) => each.id === state.step) : undefined;
   const seam = useMemo(
@@ -50,29 +68,7 @@ export const Drawing = memo(function Drawing({ draft, state, dispatch }: Drawing
     [draft, state.seam, state.unit],
   );
   const lit = useMemo(() => litLines(draft, layout, seam, step), [draft, layout, seam, step]);
-
-  const colours = useRef<Colours>(undefined);
-  useLayoutEffect(() => {
-    if (canvas.current === null) return;
-    const laid = laySheet(canvas.current);
-    sheet.current = laid;
-    return () => laid.close();
-  }, []);
-  useLayoutEffect(() => {
-    if (frame.current !== null) colours.current = readColours(frame.current);
-  }, [theme]);
-  useLayoutEffect(() => {
-    if (size.width > 0) sheet.current?.resize(size);
-  }, [size]);
-  useLayoutEffect(() => {
-    if (colours.current === undefined) return;
-    sheet.current?.draw(layout, { colours: colours.current, allowances: !drafting });
-  }, [layout, drafting, theme]);
-  useLayoutEffect(() => {
-    if (colours.current === undefined) return;
-    sheet.current?.light(layout, lit, colours.current);
-    sheet.current?.look(view);
-  }, [layout, lit, view, size, drafting, theme]);
+  const sheet = useSheet(canvas, { layout, lit, view, size, allowances: !drafting, theme });
 
   const walkSeams = (by: number) => {
     const count = draft.proof.seams.length;
@@ -81,35 +77,70 @@ export const Drawing = memo(function Drawing({ draft, state, dispatch }: Drawing
     const next = now < 0 && by < 0 ? count - 1 : (now + by + count) % count;
     dispatch({ type: 'seam', seam: draft.proof.seams[next]?.first });
   };
-  const middle = { x: size.width / 2, y: size.height / 2 };
-  const press: Record<string, () => void> = {
-    ArrowLeft: () => framing.pan({ x: 60, y: 0 }),
-    ArrowRight: () => framing.pan({ x: -60, y: 0 }),
-    ArrowUp: () => framing.pan({ x: 0, y: 60 }),
-    ArrowDown: () => framing.pan({ x: 0, y: -60 }),
-    '+': () => framing.zoom(1.25, middle),
-    '=': () => framing.zoom(1.25, middle),
-    '-': () => framing.zoom(0.8, middle),
-    '0': () => framing.fit(layout.box, 'corner'),
-    n: () => walkSeams(1),
-    p: () => walkSeams(-1),
-    Escape: () => dispatch({ type: 'seam', seam: undefined }),
+  const noSeam = () => state.seam !== undefined && dispatch({ type: 'seam', seam: undefined });
+  const choose = (next: Tool) => {
+    tape.clear();
+    setPiece(undefined);
+    noSeam();
+    setTool(next);
+    frame.current?.focus();
   };
-
-  const gestures = useGestures(frame, {
+  const walkPieces = (by: number) => {
+    const names = layout.placed.map((each) => each.piece.name);
+    const now = names.indexOf(piece ?? '');
+    setPiece(names[(Math.max(now, by < 0 ? 0 : -1) + by + names.length) % names.length]);
+  };
+  const middle = { x: size.width / 2, y: size.height / 2 };
+  const lookKeys = {
     pan: framing.pan,
+    zoom: (by: number) => framing.zoom(by, middle),
+    fit: () => framing.fit(layout.box, 'corner'),
+    walkSeams,
+    letGo: noSeam,
+  };
+  const far = (by: Point, farther: boolean) => scale(by, farther ? stride * 10 : stride);
+  const toolKeys = {
+    look: undefined,
+    move: {
+      step: (by: Point, farther: boolean) =>
+        piece !== undefined && moved.move(piece, far(by, farther)),
+      walk: walkPieces,
+      act: () => piece !== undefined && moved.snapBack(piece),
+      letGo: () => choose('look'),
+    },
+    tape: {
+      step: (by: Point, farther: boolean) =>
+        tape.step(far(by, farther), reach.pointer / 2 / view.scale),
+      walk: tape.walk,
+      act: tape.holdHere,
+      letGo: () => (tape.ends.length > 0 ? tape.clear() : choose('look')),
+    },
+  }[tool];
+
+  const within = (touch: boolean) => (touch ? reach.touch : reach.pointer) / view.scale;
+  const grabbed = useRef<string>(undefined);
+  const gestures = useGestures(frame, {
+    press: (at) => {
+      grabbed.current = tool === 'move' ? pieceAt(layout, toPaper(view, at)) : undefined;
+      if (tool === 'move') setPiece(grabbed.current);
+    },
+    pan: (by) =>
+      grabbed.current === undefined
+        ? framing.pan(by)
+        : moved.move(grabbed.current, scale(by, 1 / view.scale)),
     zoom: framing.zoom,
     point: (at, touch) => {
-      const edge = sheet.current?.seamAt(
-        toPaper(view, at),
-        (touch ? reach.touch : reach.pointer) / view.scale,
-      );
+      if (tool === 'tape') return tape.follow(toPaper(view, at), within(touch));
+      if (tool === 'move') return;
+      const edge = sheet.current?.seamAt(toPaper(view, at), within(touch));
       if (edge?.piece !== state.seam?.piece || edge?.edge !== state.seam?.edge) {
         dispatch({ type: 'seam', seam: edge });
       }
     },
-    leave: () => state.seam !== undefined && dispatch({ type: 'seam', seam: undefined }),
+    tap: tool === 'tape' ? (at, touch) => tape.hold(toPaper(view, at), within(touch)) : undefined,
+    leave: noSeam,
   });
+  const toolWords = tool === 'tape' ? tapeWords(tape, state.unit) : titleOf(draft, piece);
 
   return (
     <div className="relative min-h-0 grow overflow-hidden">
@@ -121,7 +152,8 @@ export const Drawing = memo(function Drawing({ draft, state, dispatch }: Drawing
         aria-describedby="drawing-keys"
         className="group absolute inset-0 touch-none -outline-offset-2"
         onKeyDown={(event) => {
-          const act = event.metaKey || event.ctrlKey || event.altKey ? undefined : press[event.key];
+          if (event.metaKey || event.ctrlKey || event.altKey) return;
+          const act = drawingKey(event, lookKeys, toolKeys);
           if (act === undefined) return;
           event.preventDefault();
           act();
@@ -136,7 +168,7 @@ export const Drawing = memo(function Drawing({ draft, state, dispatch }: Drawing
         <svg className="pointer-events-none absolute inset-0 h-full w-full">
           <Lettering draft={draft} layout={layout} view={view} size={size} named={!drafting} />
           {step !== undefined && <StepPoints step={step} layout={layout} view={view} />}
-          {!drafting && (
+          {tool === 'look' && !drafting && (
             <Handles
               draft={draft}
               layout={layout}
@@ -146,21 +178,40 @@ export const Drawing = memo(function Drawing({ draft, state, dispatch }: Drawing
                 dispatch({ type: 'moved', field: `style.${handle}`, value })
               }
               onHold={setHeld}
+              onRelease={() => dispatch({ type: 'released' })}
             />
           )}
+          {tool === 'tape' && (
+            <TapeLine ends={tape.ends} cursor={tape.cursor} view={view} unit={state.unit} />
+          )}
+          {tool === 'move' && <HeldPiece piece={piece} layout={layout} view={view} />}
           <Rod view={view} size={size} unit={state.unit} />
         </svg>
         <p
           id="drawing-keys"
           className="absolute bottom-12 left-9 hidden rounded-one bg-cloth px-2 text-sm text-slate sm:group-focus-visible:block"
         >
-          Arrow keys move, + and − zoom, 0 fits, N and P walk the seams, Tab reaches the handles
+          {keyWords[tool]}
         </p>
       </div>
       {seam !== undefined && <SeamCallout seam={seam} layout={layout} view={view} size={size} />}
       <p role="status" className="sr-only">
         {seam !== undefined && `${seam.title}. ${seam.lines.join('; ')} ${state.unit}`}
       </p>
+      <p role="status" className="sr-only">
+        {toolWords}
+      </p>
+      {!drafting && (
+        <TableTools
+          tool={tool}
+          moved={moved.any}
+          onTool={choose}
+          onSnapBack={() => {
+            moved.snapBack();
+            frame.current?.focus();
+          }}
+        />
+      )}
       <DrawingTools
         layout={layout}
         onFit={framing.fit}
@@ -170,3 +221,15 @@ export const Drawing = memo(function Drawing({ draft, state, dispatch }: Drawing
     </div>
   );
 });
+
+const titleOf = (draft: Draft, piece: string | undefined): string =>
+  draft.pieces.find(({ name }) => name === piece)?.title ?? '';
+
+/** Where the tape is held and what it reads, for who does not see it. */
+function tapeWords({ ends, cursor }: ReturnType<typeof useTape>, unit: TableState['unit']): string {
+  const [first, second] = ends;
+  if (first !== undefined && second !== undefined) return readingWords(first, second, unit);
+  const at = cursor?.words ?? (cursor === undefined ? '' : 'on the bare paper');
+  if (first === undefined || cursor === undefined) return at;
+  return `${at}: ${readingWords(first, cursor, unit)}`;
+}

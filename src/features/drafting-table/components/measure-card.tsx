@@ -1,4 +1,4 @@
-import { useState, type Dispatch } from 'react';
+import { useState, type Dispatch, type ReactNode } from 'react';
 
 import { coreMeasures, furtherMeasures, type MeasureKey } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
@@ -12,12 +12,14 @@ import { FigureField, fieldProps } from './figure-field.tsx';
 type MeasureCardProps = {
   readonly state: TableState;
   readonly dispatch: Dispatch<TableAction>;
+  /** What else can be done with the card. */
+  readonly tools?: ReactNode;
 };
 
 const everyMeasure = [...coreMeasures, ...furtherMeasures];
 
 /** The list of measures beside a body figure on which the current measure's tape is lit. */
-export const MeasureCard = ({ state, dispatch }: MeasureCardProps) => {
+export const MeasureCard = ({ state, dispatch, tools }: MeasureCardProps) => {
   const [current, setCurrent] = useState<FieldKey>();
   const [all, setAll] = useState(false);
   const key = everyMeasure.find((each) => current === `card.${each}`);
@@ -80,6 +82,7 @@ export const MeasureCard = ({ state, dispatch }: MeasureCardProps) => {
           {all ? 'Only the ten measures' : `All measures (${everyMeasure.length})`}
         </button>
         <ClearCard dispatch={dispatch} />
+        {tools}
         {all && (
           <>
             <p className="pb-2 text-sm text-slate">

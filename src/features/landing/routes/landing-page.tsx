@@ -1,5 +1,6 @@
 import { Link } from 'react-router-dom';
 
+import { signedInHint } from '../../../lib/signed-in-hint.ts';
 import { ThemeToggle } from '../../../ui/theme-toggle.tsx';
 import { Wordmark } from '../../../ui/wordmark.tsx';
 import { DemoDrawing } from '../components/demo-drawing.tsx';
@@ -28,7 +29,18 @@ export const LandingPage = () => (
     <title>Ellwand · gowns to measure</title>
     <header className="flex items-center justify-between border-b border-rule px-4 py-2 sm:px-8">
       <Wordmark />
-      <ThemeToggle className="-mr-4" />
+      <span className="flex items-center gap-2">
+        {signedInHint() ? (
+          <Link to="/gowns" className="px-2 font-semibold text-brass">
+            Gowns
+          </Link>
+        ) : (
+          <Link to="/sign-in" className="px-2 text-brass">
+            Sign in
+          </Link>
+        )}
+        <ThemeToggle className="-mr-4" />
+      </span>
     </header>
     <main id="content" className="mx-auto w-full max-w-[86rem] grow px-4 sm:px-8">
       <div className="grid items-center gap-8 py-8 md:grid-cols-[minmax(0,5fr)_minmax(0,7fr)] md:gap-12 md:py-16">
@@ -48,7 +60,9 @@ export const LandingPage = () => (
             >
               Try it
             </Link>
-            <span className="text-slate">No account. Your figures stay in this browser.</span>
+            <span className="text-slate">
+              No account needed. Your figures stay in this browser until you keep them.
+            </span>
           </p>
         </div>
         <DemoDrawing />

@@ -1,51 +1,74 @@
 import { z } from 'zod';
 
-import { gownContent } from '#shared/api/gowns.ts';
 import { browserStorage } from '../../lib/browser-storage.ts';
 import { newId } from '../../lib/new-id.ts';
+import type { Unsent } from './saver.ts';
 
-/** What a browser keeps of a gown beside the server: each open tab keeps its own. */
-const keptDraft = z.object({
-  version: z.literal(1),
-  keptAt: z.number(),
-  title: z.string(),
-  base: z.int(),
+/** What a browser keeps of a record beside the server: each open tab keeps its own. */
+export type KeptDraft<C> = {
+  readonly keptAt: number;
+  readonly title: string;
+  readonly base: number;
   /** Whether it holds work the server has not acknowledged. */
-  changed: z.boolean(),
-  unsent: z
-    .object({
-      saveId: z.uuid(),
-      baseVersion: z.int(),
-      engine: z.string(),
-      content: gownContent,
-      keepReplaced: z.boolean(),
-    })
-    .optional(),
-  content: gownContent,
-  history: z.unknown(),
-});
-export type KeptDraft = z.output<typeof keptDraft>;
+  readonly changed: boolean;
+  readonly unsent?: Unsent<C> | undefined;
+  readonly content: C;
+  readonly history?: unknown;
+};
+
+const version = 1;
+
+const draftSchema = <C>(content: z.ZodType<C>) =>
+  asDraftSchema<C>(
+    z.object({
+      version: z.literal(version),
+      keptAt: z.number(),
+      title: z.string(),
+      base: z.int(),
+      changed: z.boolean(),
+      unsent: z
+        .object({
+          saveId: z.uuid(),
+          baseVersion: z.int(),
+          engine: z.string(),
+          content,
+          keepReplaced: z.boolean(),
+        })
+        .optional(),
+      content,
+      history: z.unknown(),
+    }),
+  );
+
+/** Zod loses sight of the content's type inside an object of it. */
+function asDraftSchema<C>(schema: z.ZodType): z.ZodType<KeptDraft<C>> {
+  return schema as z.ZodType<KeptDraft<C>>;
+}
 
 /** A place in this browser for one tab's work on a gown, held until the tab lets go of it. */
-export type DraftPlace = {
-  readonly found: KeptDraft | undefined;
+export type DraftPlace<C> = {
+  readonly found: KeptDraft<C> | undefined;
   /** False where the browser does not allow it. */
-  readonly keep: (draft: Omit<KeptDraft, 'version' | 'keptAt'>) => boolean;
+  readonly keep: (draft: Omit<KeptDraft<C>, 'keptAt'>) => boolean;
   readonly letGo: () => void;
 };
 
-const prefixOf = (gownId: string): string => `ellwand.gown.${gownId}.`;
-
 /**
- * Takes this tab's place for a gown: the one it had before a reload, else one that a closed tab left
+ * Takes this tab's place for a record: the one it had before a reload, else one that a closed tab left
  * behind (with unsent work first), else a new one. Two tabs never share a place.
  */
-export async function takeDraftPlace(gownId: string): Promise<DraftPlace> {
+export async function takeDraftPlace<C>(
+  kind: 'gown' | 'card',
+  id: string,
+  content: z.ZodType<C>,
+): Promise<DraftPlace<C>> {
   const storage = browserStorage('local');
   const session = browserStorage('session');
-  const prefix = prefixOf(gownId);
+  const prefix = `ellwand.${kind}.${id}.`;
+  const schema = draftSchema(content);
+  const read = (key: string) => readDraft(storage, key, schema);
   const own = session?.getItem(prefix);
-  const left = storage === undefined ? [] : placesLeft(storage, prefix);
+  const left = storage === undefined ? [] : placesLeft(storage, prefix, read);
   const candidates = [
     ...(own === null || own === undefined ? [] : [own]),
     ...left,
@@ -60,11 +83,11 @@ export async function takeDraftPlace(gownId: string): Promise<DraftPlace> {
       // Without it a reload looks for a place as a new tab does.
     }
     return {
-      found: readDraft(storage, place),
+      found: read(place),
       keep: (draft) => {
         try {
           if (storage === undefined) return false;
-          storage.setItem(place, JSON.stringify({ ...draft, version: 1, keptAt: Date.now() }));
+          storage.setItem(place, JSON.stringify({ ...draft, version, keptAt: Date.now() }));
           return true;
         } catch {
           return false;
@@ -76,13 +99,17 @@ export async function takeDraftPlace(gownId: string): Promise<DraftPlace> {
   return { found: undefined, keep: () => false, letGo: () => undefined };
 }
 
-/** Places kept for a gown, those with unsent work first, then the newest. */
-function placesLeft(storage: Storage, prefix: string): string[] {
+/** Places kept for a record, those with unsent work first, then the newest. */
+function placesLeft(
+  storage: Storage,
+  prefix: string,
+  read: (key: string) => { readonly changed: boolean; readonly keptAt: number } | undefined,
+): string[] {
   const keys = Array.from({ length: storage.length }, (_, index) => storage.key(index) ?? '');
   return keys
     .filter((key) => key.startsWith(prefix))
     .flatMap((key) => {
-      const draft = readDraft(storage, key);
+      const draft = read(key);
       return draft === undefined ? [] : [{ key, draft }];
     })
     .toSorted(
@@ -91,11 +118,15 @@ function placesLeft(storage: Storage, prefix: string): string[] {
     .map(({ key }) => key);
 }
 
-function readDraft(storage: Storage | undefined, key: string): KeptDraft | undefined {
+function readDraft<D>(
+  storage: Storage | undefined,
+  key: string,
+  schema: z.ZodType<D>,
+): D | undefined {
   try {
     const text = storage?.getItem(key);
     if (text === null || text === undefined) return undefined;
-    return keptDraft.safeParse(JSON.parse(text)).data;
+    return schema.safeParse(JSON.parse(text)).data;
   } catch {
     return undefined;
   }

@@ -1,0 +1,42 @@
+export type Tool = 'look' | 'move' | 'tape';
+
+type TableToolsProps = {
+  readonly tool: Tool;
+  readonly moved: boolean;
+  readonly onTool: (tool: Tool) => void;
+  readonly onSnapBack: () => void;
+};
+
+const look =
+  'min-h-9 rounded-one px-2 hover:bg-cloth aria-pressed:bg-brass aria-pressed:font-semibold aria-pressed:text-on-brass';
+
+/** What the hand holds: nothing, a piece to move it, or the measuring tape. */
+export const TableTools = ({ tool, moved, onTool, onSnapBack }: TableToolsProps) => (
+  <div
+    role="toolbar"
+    aria-label="Tools"
+    className="absolute top-8 right-2 flex items-center rounded-one border border-rule bg-ground text-sm"
+  >
+    {moved && (
+      <button type="button" className={look} onClick={onSnapBack}>
+        Snap back
+      </button>
+    )}
+    <button
+      type="button"
+      className={look}
+      aria-pressed={tool === 'move'}
+      onClick={() => onTool(tool === 'move' ? 'look' : 'move')}
+    >
+      Move pieces
+    </button>
+    <button
+      type="button"
+      className={look}
+      aria-pressed={tool === 'tape'}
+      onClick={() => onTool(tool === 'tape' ? 'look' : 'tape')}
+    >
+      Tape
+    </button>
+  </div>
+);
