@@ -96,6 +96,7 @@ async function autosaveUnderFire(): Promise<Ledger> {
   while (!isOver()) {
     await pause(300 + 2200 * chance());
     if (isOver()) break;
+    if (server?.exitCode !== null) await openServer();
     if (acknowledged < saves / 2) {
       await killServer();
       await pause(500 * chance());
