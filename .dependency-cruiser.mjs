@@ -29,7 +29,7 @@ const sharedArrows = {
 const packageHomes = {
   paper: '^(shared/geometry/|src/.*/canvas/|tests/)',
   'clipper2-ts': '^(shared/geometry/|tests/)',
-  zod: '^(shared/api/|src/lib/|server/)',
+  zod: '^(shared/api/|src/|server/|tests/)',
   pg: '^(server/database/|tests/)',
   'drizzle-orm': '^(server/database/|server/features/[^/]+/[a-z-]*repository\\.ts$|tests/)',
   lucia: '^server/http/session\\.ts$',
