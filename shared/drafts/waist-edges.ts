@@ -35,3 +35,13 @@ export const waistDarts = (waist: WaistLine, tips: readonly number[]): readonly 
       pressed: 'centre',
     };
   });
+
+/** Cloth left between a dart and its neighbour, the centre line or the side, mm. */
+const clothBeside = 8;
+
+/** Whether the darts of a waist line leave no cloth between each other, the centre line and the side. */
+export const isCrowded = ({ stretches }: WaistLine): boolean =>
+  stretches.some((stretch) => {
+    const from = stretch[0]?.from.x ?? 0;
+    return (stretch.at(-1)?.to.x ?? 0) - from < clothBeside;
+  });

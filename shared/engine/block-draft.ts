@@ -7,7 +7,7 @@ import type { WantedGirth } from '../drafting/construction.ts';
 import { DraftingError } from '../drafting/drafting-error.ts';
 import { type DraftingTable, openTable } from '../drafting/drafting-table.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
-import type { FinishedPiece, LevelName } from '../drafting/piece.ts';
+import type { FinishedPiece, LevelName, Piece } from '../drafting/piece.ts';
 import type { Step } from '../drafting/step.ts';
 import type { DrawnBlock } from '../drafts/drawn-block.ts';
 import { gownLevels } from '../drafts/gown/levels.ts';
@@ -68,13 +68,27 @@ function refuse(problems: readonly Problem[]): void {
   if (errors.length > 0) throw new DraftingError(errors);
 }
 
-function narrateFinishing(table: DraftingTable, { allowance }: HouseRules): void {
+const allowanceWords = [
+  ['seam', 'seams'],
+  ['side', 'side seams'],
+  ['zip', 'centre back'],
+  ['top', 'neck and armhole'],
+  ['hem', 'hem'],
+] as const;
+
+function narrateFinishing(table: DraftingTable, pieces: readonly Piece[], rules: HouseRules): void {
+  const used = new Set(pieces.flatMap((piece) => piece.edges.map((edge) => edge.kind)));
+  const allowances = allowanceWords
+    .filter(([kind]) => used.has(kind))
+    .map(([kind, words]) => said`, ${words} ${mm(rules.allowance[kind])}`);
   table
     .part('Finishing', 'both')
     .draw(
       'Allowances',
-      said`Added outside the seam line, last of all: seams ${mm(allowance.seam)}, side seams ${mm(allowance.side)}, centre back ${mm(allowance.zip)}, neck and armhole ${mm(allowance.top)}, hem ${mm(allowance.hem)}; a fold has none.`,
-      { why: said`A block is kept as its seam line: trace that to design from it.` },
+      said`Added outside the seam line, last of all${allowances.flat()}; a fold has none.`,
+      {
+        why: said`A block is kept as its seam line: trace that to design from it.`,
+      },
     );
 }
 
@@ -98,7 +112,7 @@ export function draftBlock<Card, Style>(
   const resolved = kind.resolve(style, body, bodyLevels);
   const drawn = kind.draw(table, body, bodyLevels, resolved, rules);
   const number = draftNumber(JSON.stringify([kind.name, blockVersion, card, style, rules]));
-  narrateFinishing(table, rules);
+  narrateFinishing(table, drawn.pieces, rules);
   const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'block' };
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {

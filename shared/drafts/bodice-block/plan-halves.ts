@@ -14,6 +14,8 @@ import {
 } from '../../drafting/waist-line.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { mm, said } from '../../units/said.ts';
+import { withEvenSides } from '../even-sides.ts';
+import { isCrowded } from '../waist-edges.ts';
 
 /** Heights of a bodice block, mm below the side neck point in front. */
 export type BlockHeights = Pick<BodyLevels, 'bust' | 'waist' | 'nape'> & {
@@ -46,8 +48,6 @@ export type HalfPlan = {
 
 /** Steepest side seam, as a lean: 25 degrees (method section 6). */
 const steepestSide = Math.tan((25 * Math.PI) / 180);
-/** Cloth left beside a dart, mm. */
-const clothBeside = 8;
 
 type Round = { readonly intake: QuarterIntake; readonly length: number };
 
@@ -121,10 +121,8 @@ function shape(
   };
 }
 
-function refuseCrowded({ side, waist, waistEnd }: HalfPlan): void {
-  const edges = [0, ...waist.mouths.flatMap((mouth) => [mouth.centre.x, mouth.side.x]), waistEnd.x];
-  const crowded = edges.some((x, i) => i % 2 === 1 && x - (edges[i - 1] ?? 0) < clothBeside);
-  if (!crowded) return;
+function refuseCrowded({ side, waist }: HalfPlan): void {
+  if (!isCrowded(waist)) return;
   const taken = waist.mouths.reduce((sum, mouth) => sum + mouth.side.x - mouth.centre.x, 0);
   throw new DraftingError([
     {
@@ -137,8 +135,6 @@ function refuseCrowded({ side, waist, waistEnd }: HalfPlan): void {
   ]);
 }
 
-const roundsAtMost = 60;
-
 /**
  * Front and back below the arm. Both side seams are equally long, as long as lets both waist lines bend
  * evenly on the mean.
@@ -147,7 +143,7 @@ export function planHalves(
   figures: { readonly front: HalfFigures; readonly back: HalfFigures },
   heights: BlockHeights,
   rules: HouseRules,
-): { readonly front: HalfPlan; readonly back: HalfPlan; readonly sideLength: number } {
+): { readonly front: HalfPlan; readonly back: HalfPlan } {
   const { front, back } = figures;
   const shares = shareIntake(
     front.bust - front.waist,
@@ -155,20 +151,13 @@ export function planHalves(
     rules.sideShare,
     steepestSide * (heights.waist - heights.bust),
   );
-  let length = heights.waist - heights.underarm;
-  const draw = () => ({
-    front: shape('front', front, heights, { intake: shares.front, length }, rules.dartWidest),
-    back: shape('back', back, heights, { intake: shares.back, length }, rules.dartWidest),
-  });
-  let halves = draw();
-  for (let round = 0; round < roundsAtMost; round += 1) {
-    const next = (halves.front.wish + halves.back.wish) / 2;
-    const change = Math.abs(next - length);
-    length = (length + next) / 2;
-    halves = draw();
-    if (change < 1e-7) break;
-  }
+  const draw = (side: Side, length: number): Shape =>
+    shape(side, figures[side], heights, { intake: shares[side], length }, rules.dartWidest);
+  const halves = withEvenSides(heights.waist - heights.underarm, (length) => ({
+    front: draw('front', length),
+    back: draw('back', length),
+  }));
   refuseCrowded(halves.front);
   refuseCrowded(halves.back);
-  return { ...halves, sideLength: length };
+  return halves;
 }
