@@ -93,8 +93,8 @@ function sewnUp(ring: readonly Stretch[]): readonly Stretch[] {
   return [mergeStretches(last, first), ...ring.slice(1, -1)];
 }
 
-/** Seams sewn down the body: a dart in one of them is pressed down. */
-const downTheBody = new Set(['side', 'armhole']);
+/** Seams in which a dart lies level and is pressed down; every other dart is pressed to the centre. */
+const downTheBody = new Set(['side']);
 
 function dartIn(
   name: string,

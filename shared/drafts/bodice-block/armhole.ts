@@ -1,7 +1,8 @@
-import { type Path, cubic } from '../../geometry/path.ts';
+import { pointAt, tangentAt } from '../../geometry/curve.ts';
+import { type Cubic, type Path, cubic } from '../../geometry/path.ts';
 import { type Point, between, point } from '../../geometry/point.ts';
 
-/** What an armhole is drawn between: the shoulder, the underarm, and how far out it may come between them. */
+/** What an armhole is drawn between: the shoulder, the underarm, and how far in it comes between them. */
 export type ArmholeFrame = {
   readonly shoulder: Point;
   /** Slope of the shoulder line, radians below level; the armhole leaves square to it. */
@@ -9,50 +10,75 @@ export type ArmholeFrame = {
   readonly underarm: Point;
   /** How far the side seam runs in for each millimetre down; the armhole arrives square to it. */
   readonly sideLean: number;
-  /** Distance from the centre line at which the armhole stands upright. */
+  /** Distance from the centre line at which the armhole should stand upright. */
   readonly guide: number;
 };
 
-/** The upright place lies this part of the way down; lower where the shoulder leans far over, at most to `lowest`. */
+/** An armhole, and the place where it stands upright. */
+export type Armhole = { readonly path: Path; readonly upright: Point };
+
+/** Fullness of a sweep: how far its handles reach to the corner of its two end directions. */
+const leastFull = 0.5;
+const fullest = 0.75;
+
+/** Place where a sweep stands upright: it leaves the shoulder inwards and arrives outwards. */
+function uprightOf(curve: Cubic): Point {
+  let low = 0;
+  let high = 1;
+  for (let i = 0; i < 50; i += 1) {
+    const t = (low + high) / 2;
+    if (tangentAt(curve, t).x < 0) low = t;
+    else high = t;
+  }
+  return pointAt(curve, low);
+}
+
+/** The armhole in one sweep that comes in to the guide, as nearly as its fullness allows. */
+function sweep({ shoulder, shoulderSlope, underarm, sideLean, guide }: ArmholeFrame): {
+  readonly curve: Cubic;
+  readonly full: number;
+} {
+  // The corner: down from the shoulder square to it, and in from the underarm square to the side.
+  const lean = Math.tan(shoulderSlope);
+  const down =
+    (underarm.y - shoulder.y + sideLean * (shoulder.x - underarm.x)) / (1 + sideLean * lean);
+  const corner = point(shoulder.x - lean * down, shoulder.y + down);
+  const drawn = (full: number): Cubic =>
+    cubic(shoulder, between(shoulder, corner, full), between(underarm, corner, full), underarm);
+  let low = 0.2;
+  let high = 0.95;
+  for (let i = 0; i < 40; i += 1) {
+    const full = (low + high) / 2;
+    if (uprightOf(drawn(full)).x > guide) low = full;
+    else high = full;
+  }
+  const full = Math.min(fullest, Math.max(leastFull, low));
+  return { curve: drawn(full), full: low };
+}
+
+/** The upright lies this part of the way down, or lower where the shoulder leans far over. */
 const usual = 0.58;
-const lowest = 0.74;
-/** Part of the height that the turn into the upright keeps below the shoulder's own direction. */
-const turning = 0.24;
+/** Part of the height in which the curve turns upright below the shoulder's own direction. */
+const turning = 0.2;
+/** Handles of the hollow, as parts of the way to its corner: a little fuller than a quarter of an ellipse. */
+const hollow = 0.6;
 /** The guide keeps inside the shoulder point, and the hollow keeps some depth, mm. */
 const insideShoulder = 5;
 const leastHollow = 28;
 
-/** Guide that this frame can be drawn with, nearest to the one asked for, mm. */
-export function reachableGuide({ shoulder, shoulderSlope, underarm, guide }: ArmholeFrame): number {
+/** The armhole in two curves, upright where they meet on the guide. */
+function twoCurves({ shoulder, shoulderSlope, underarm, sideLean, guide }: ArmholeFrame): Armhole {
   const height = underarm.y - shoulder.y;
-  const leastX = shoulder.x - Math.tan(shoulderSlope) * (lowest - turning) * height;
-  const mostX = Math.min(shoulder.x - insideShoulder, underarm.x - leastHollow);
-  return Math.max(leastX, Math.min(mostX, guide));
-}
-
-/** Handles of the hollow, as parts of the way to its corner: a little fuller than a quarter of an ellipse. */
-const hollow = 0.6;
-
-/**
- * The armhole from the shoulder point down to the underarm: it leaves square to the shoulder, stands
- * upright at the guide and arrives square to the side seam, bending one way all along. Each half lies
- * within the triangle of its end directions; where they meet, their bends agree as nearly as that allows.
- */
-export function armhole(frame: ArmholeFrame): { readonly path: Path; readonly upright: Point } {
-  const { shoulder, shoulderSlope, underarm, sideLean } = frame;
-  const x = reachableGuide(frame);
-  const height = underarm.y - shoulder.y;
+  const x = Math.min(guide, shoulder.x - insideShoulder, underarm.x - leastHollow);
   const upper = point(x, shoulder.y + (shoulder.x - x) / Math.tan(shoulderSlope));
-  const y = Math.min(
-    shoulder.y + lowest * height,
-    Math.max(shoulder.y + usual * height, upper.y + turning * height),
-  );
-  const upright = point(x, y);
+  const share = Math.max(usual, (upper.y - shoulder.y) / height + turning);
+  const upright = point(x, shoulder.y + share * height);
   const lower = point(x, underarm.y - (underarm.x - x) * sideLean);
-  const bend = ((2 / 3) * ((1 - hollow) * (underarm.x - x))) / (hollow * (lower.y - y)) ** 2;
+  const bend = ((2 / 3) * (1 - hollow) * (underarm.x - x)) / (hollow * (lower.y - upright.y)) ** 2;
+  // The bend of the upper curve where the two meet is the lower one's, as nearly as its handle allows.
   const near = 0.5;
-  const reach = Math.sqrt(((2 / 3) * (1 - near) * (shoulder.x - x)) / bend) / (y - upper.y);
-  const far = Math.max(0.4, Math.min(0.85, reach));
+  const reach = Math.sqrt(((2 / 3) * (1 - near) * (shoulder.x - x)) / bend);
+  const far = Math.max(0.4, Math.min(0.85, reach / (upright.y - upper.y)));
   return {
     upright,
     path: [
@@ -60,4 +86,15 @@ export function armhole(frame: ArmholeFrame): { readonly path: Path; readonly up
       cubic(upright, between(upright, lower, hollow), between(underarm, lower, hollow), underarm),
     ],
   };
+}
+
+/**
+ * The armhole from the shoulder point down to the underarm: it leaves square to the shoulder, comes in to
+ * the guide and arrives square to the side seam, bending one way all along. One sweep where that reaches
+ * the guide; a straighter one, as most backs are, is drawn in two curves that meet upright on it.
+ */
+export function armhole(frame: ArmholeFrame): Armhole {
+  const { curve, full } = sweep(frame);
+  if (full < leastFull) return twoCurves(frame);
+  return { path: [curve], upright: uprightOf(curve) };
 }

@@ -3,7 +3,6 @@ import type { BodyLevels } from '../../body/levels.ts';
 import type { DraftingTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
-import { pathLength } from '../../geometry/curve.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { blockQuarter } from '../block-quarter.ts';
 import type { DrawnBlock } from '../drawn-block.ts';
@@ -137,9 +136,9 @@ export function drawBodiceBlock(
     }),
   };
   const front = placeBustDart(asDrawn, style.bustDart, {
-    upright: pathLength(armholes.front.path.slice(0, 1)),
     bustNotch,
     bustPoint,
+    allowance: rules.allowance.top,
   });
   narratePlace(papers.front, front, style.bustDart, angle.angle, bustPoint);
   return {

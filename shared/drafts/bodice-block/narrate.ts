@@ -155,14 +155,14 @@ function narrateDart(paper: PartTable, opened: OpenedShoulder, angle: BustDartAn
 function narrateArmhole(paper: PartTable, body: Body, { plan, armhole }: BodiceHalf): void {
   const key = plan.side === 'front' ? 'acrossFront' : 'acrossBack';
   const name = plan.side === 'front' ? 'across front' : 'across back';
-  const shift = armhole.guide - armhole.asked;
+  const shift = armhole.upright.x - armhole.asked;
   const note: Said =
     Math.abs(shift) < 0.5
       ? said``
-      : said` Its guide stands ${mm(Math.abs(shift))} farther ${shift < 0 ? 'in' : 'out'} than half the ${name} asks, so that the arm has room and the curve bends one way.`;
+      : said` It stands ${mm(Math.abs(shift))} farther ${shift < 0 ? 'in' : 'out'} than half the ${name} asks, so that the arm has room and the curve bends one way.`;
   paper.draw(
     'Armhole',
-    said`From the shoulder down past a guide ${mm(armhole.guide)} from the centre, from half the ${name} ${mm(body.measures[key])}${estimate(body, key)}, to the underarm: ${mm(pathLength(armhole.path))} long.${note}`,
+    said`From the shoulder down past an upright ${mm(armhole.upright.x)} from the centre, from half the ${name} ${mm(body.measures[key])}${estimate(body, key)}, to the underarm: ${mm(pathLength(armhole.path))} long.${note}`,
     {
       why: said`It is square to the shoulder and to the side seam, so that front and back run on as one curve when they are sewn.`,
       points: { upright: armhole.upright },

@@ -1,21 +1,14 @@
 import type { Body } from '../../body/card.ts';
 import { DraftingError } from '../../drafting/drafting-error.ts';
 import { moved } from '../../geometry/motion.ts';
-import type { Path } from '../../geometry/path.ts';
-import { type Point, point } from '../../geometry/point.ts';
+import { point } from '../../geometry/point.ts';
 import { mm, said } from '../../units/said.ts';
-import { type ArmholeFrame, armhole, reachableGuide } from './armhole.ts';
+import { type Armhole, type ArmholeFrame, armhole } from './armhole.ts';
 import type { HalfPlan } from './plan-halves.ts';
 import type { OpenedShoulder, Shoulder } from './shoulder.ts';
 
-/** An armhole and where its guide came to stand. */
-export type DrawnArmhole = {
-  readonly path: Path;
-  readonly upright: Point;
-  /** Distance from the centre line the measures ask for, and the one drawn. */
-  readonly asked: number;
-  readonly guide: number;
-};
+/** An armhole, and the distance from the centre line at which the measures ask it to stand upright. */
+export type DrawnArmhole = Armhole & { readonly asked: number };
 
 /** Ease of half the back width at the arm (Aldrich, from memory). */
 export const backWidthEase = 5;
@@ -24,7 +17,7 @@ export const backWidthEase = 5;
 export const leastArmholeWidth = (bust: number): number => bust / 8 - 15;
 
 /** An armhole less deep than this from the shoulder point leaves no room for the arm (our rule). */
-const leastDepth = 90;
+const leastDepth = 65;
 
 type Frames = { readonly front: ArmholeFrame; readonly back: ArmholeFrame };
 
@@ -43,6 +36,25 @@ function refuseShallow({ front, back }: Frames): void {
         'style.bustDartRule',
       ],
       said: said`The armhole would be only ${mm(depth)} deep from the shoulder point; an arm needs at least ${mm(leastDepth)}. Measure underarm to waist, side neck to bust point and the shoulder slope again, or choose another rule for the bust dart.`,
+    },
+  ]);
+}
+
+/** Between the shoulder point, the upright and the underarm there must be some hollow, mm (our rule). */
+const leastHollow = 12;
+
+function refuseNarrow({ shoulder, underarm }: ArmholeFrame, { path, upright }: Armhole): void {
+  const last = path.at(-1);
+  const arrives = last?.kind === 'cubic' ? underarm.x - last.c2.x : 0;
+  const hollow = Math.min(underarm.x - upright.x, arrives);
+  if (hollow >= leastHollow && shoulder.x > upright.x) return;
+  throw new DraftingError([
+    {
+      code: 'armhole-too-narrow',
+      severity: 'error',
+      field: 'card.sideNeckToBustPoint',
+      with: ['card.bustGirth', 'card.underbustGirth', 'card.shoulderLength', 'style.bustDartRule'],
+      said: said`The shoulder point lies ${mm(shoulder.x)} from the centre and the underarm ${mm(underarm.x)}: no armhole fits between them. Measure side neck to bust point, bust, under-bust and shoulder length again, or choose another rule for the bust dart.`,
     },
   ]);
 }
@@ -84,8 +96,9 @@ export function pairArmholes(
   const width = frames.front.underarm.x - asked.front + frames.back.underarm.x - asked.back;
   const lack = Math.max(0, leastArmholeWidth(bustGirth) - width) / 2;
   const draw = (frame: ArmholeFrame): DrawnArmhole => {
-    const own = { ...frame, guide: frame.guide - lack };
-    return { ...armhole(own), asked: frame.guide, guide: reachableGuide(own) };
+    const drawn = armhole({ ...frame, guide: frame.guide - lack });
+    refuseNarrow(frame, drawn);
+    return { ...drawn, asked: frame.guide };
   };
   return { front: draw(frames.front), back: draw(frames.back) };
 }
