@@ -60,18 +60,27 @@ function sweep({ shoulder, shoulderSlope, underarm, sideLean, guide }: ArmholeFr
 const usual = 0.58;
 /** Part of the height in which the curve turns upright below the shoulder's own direction. */
 const turning = 0.2;
+/** An upright lower than this part of the way leaves no room for the hollow. */
+const lowest = 0.85;
 /** Handles of the hollow, as parts of the way to its corner: a little fuller than a quarter of an ellipse. */
 const hollow = 0.6;
 /** The guide keeps inside the shoulder point, and the hollow keeps some depth, mm. */
 const insideShoulder = 5;
 const leastHollow = 28;
 
-/** The armhole in two curves, upright where they meet on the guide. */
-function twoCurves({ shoulder, shoulderSlope, underarm, sideLean, guide }: ArmholeFrame): Armhole {
+/** The armhole in two curves, upright where they meet on the guide; no answer where that lies too low. */
+function twoCurves({
+  shoulder,
+  shoulderSlope,
+  underarm,
+  sideLean,
+  guide,
+}: ArmholeFrame): Armhole | undefined {
   const height = underarm.y - shoulder.y;
   const x = Math.min(guide, shoulder.x - insideShoulder, underarm.x - leastHollow);
   const upper = point(x, shoulder.y + (shoulder.x - x) / Math.tan(shoulderSlope));
   const share = Math.max(usual, (upper.y - shoulder.y) / height + turning);
+  if (share > lowest) return undefined;
   const upright = point(x, shoulder.y + share * height);
   const lower = point(x, underarm.y - (underarm.x - x) * sideLean);
   const bend = ((2 / 3) * (1 - hollow) * (underarm.x - x)) / (hollow * (lower.y - upright.y)) ** 2;
@@ -95,6 +104,6 @@ function twoCurves({ shoulder, shoulderSlope, underarm, sideLean, guide }: Armho
  */
 export function armhole(frame: ArmholeFrame): Armhole {
   const { curve, full } = sweep(frame);
-  if (full < leastFull) return twoCurves(frame);
-  return { path: [curve], upright: uprightOf(curve) };
+  const straighter = full < leastFull ? twoCurves(frame) : undefined;
+  return straighter ?? { path: [curve], upright: uprightOf(curve) };
 }
