@@ -120,16 +120,28 @@ export function positiveSpline(
   slopeFoot: number,
 ): Profile {
   const smooth = clampedSpline(knots, slopeTop, slopeFoot);
-  const dips = smooth.some((piece) => {
-    const h = piece.to - piece.from;
-    return [0.1, 0.25, 0.5, 0.75, 0.9].some((t) => {
-      const u = t * h;
-      return piece.a + u * (piece.b + u * (piece.c + u * piece.d)) < -1e-6;
-    });
-  });
+  const dips = smooth.some((piece) => leastWidth(piece) < -1e-6);
   if (!dips) return smooth;
   const inner = monotoneSlopes(knots);
   return pieces(knots, [slopeTop, ...inner.slice(1, -1), slopeFoot]);
+}
+
+/** Least width of one cubic between its ends. */
+function leastWidth(piece: ProfilePiece): number {
+  const { a, b, c, d } = piece;
+  const height = piece.to - piece.from;
+  const width = (u: number): number => a + u * (b + u * (c + u * d));
+  // Its turning points are where b + 2 c u + 3 d u^2 is zero.
+  const under = c * c - 3 * b * d;
+  const turns =
+    d === 0
+      ? c === 0
+        ? []
+        : [-b / (2 * c)]
+      : under < 0
+        ? []
+        : [(-c - Math.sqrt(under)) / (3 * d), (-c + Math.sqrt(under)) / (3 * d)];
+  return Math.min(...[0, height, ...turns.filter((u) => u > 0 && u < height)].map(width));
 }
 
 const endSlope = (near: number, next: number): number => {
@@ -202,14 +214,17 @@ export function profileLength(profile: Profile, top: number, foot: number): numb
   return sum;
 }
 
+/** A knot this near to an end of a path is that end: a stretch of no length has no direction. */
+const speck = 1e-5;
+
 /** The line between two heights as a path travelled downwards. */
 export function profilePath(profile: Profile, top: number, foot: number): Path {
   const path: Segment[] = [];
   const last = profile.length - 1;
   profile.forEach((piece, i) => {
-    const from = i === 0 ? top : Math.max(top, piece.from);
-    const to = i === last ? foot : Math.min(foot, piece.to);
-    if (to - from <= 1e-9) return;
+    const from = i === 0 || piece.from < top + speck ? top : piece.from;
+    const to = i === last || piece.to > foot - speck ? foot : piece.to;
+    if (to - from <= speck) return;
     const at = (y: number): Point => {
       const u = y - piece.from;
       return point(piece.a + u * (piece.b + u * (piece.c + u * piece.d)), y);

@@ -87,9 +87,9 @@ type Round = {
 /** The darts of the middle: shares of the intake and heights of the tips. */
 type DartPlan = { readonly shares: readonly number[]; readonly tips: readonly number[] };
 
-const roundsAtMost = 80;
+const roundsAtMost = 48;
 /** From this round on it moves half way only, which settles the few bodies that swing. */
-const dampedFrom = 20;
+const dampedFrom = 14;
 
 /**
  * Draws a half: side seam, waist seam and intakes, so that every level holds its quarter. The back

@@ -20,7 +20,7 @@ export type PairedHalves = {
 /** The dart of the middle ends at least this far above the hip; the back's is longer by `backLonger`. */
 const aboveHip = 25;
 const backLonger = 20;
-const roundsAtMost = 24;
+const roundsAtMost = 12;
 /** From this round on the slope moves half way only, which settles the few bodies that swing. */
 const dampedFrom = 4;
 
@@ -86,11 +86,20 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
   // Where the side cannot help the darts and still be trued, the darts take all of it.
   const darted = inputs.style.shaping === 'darts';
   const pair = (darted ? pairWith(inputs, true) : undefined) ?? pairWith(inputs, false);
-  if (!pair) throw cannotBeDrawn();
+  if (!pair || cornersAtSeam(pair) > crookedCorner) throw cannotBeDrawn();
   refuseCrowdedIntakes(pair.front);
   refuseCrowdedIntakes(pair.back);
   return pair;
 }
+
+/** A waist seam may meet a side seam this far from square, degrees: more, and the corner cannot be sewn fair. */
+const crookedCorner = 25;
+
+/** How far from square the waist seam meets the side seams: half the angle between front and back there. */
+const cornersAtSeam = ({ front, back }: Drawn): number => {
+  const leanOf = (half: Half): number => Math.atan(slopeAt(half.line, half.heights.seam));
+  return (Math.abs(leanOf(front) - leanOf(back)) / 2) * (180 / Math.PI);
+};
 
 type DartCounts = { readonly front: 1 | 2; readonly back: 1 | 2 };
 type Drawn = { readonly front: Half; readonly back: Half };
