@@ -15,7 +15,7 @@ export const DrawingTools = ({ layout, onFit, onZoom, onSeam }: DrawingToolsProp
   <div
     role="toolbar"
     aria-label="Look about"
-    className="absolute right-2 bottom-2 flex items-center rounded-one border border-rule bg-ground text-sm"
+    className="ml-auto flex items-center rounded-one border border-rule bg-ground text-sm"
   >
     <button type="button" className={tool} onClick={() => onFit(layout.box, 'corner')}>
       Fit

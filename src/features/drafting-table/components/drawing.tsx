@@ -189,7 +189,7 @@ export const Drawing = memo(function Drawing({ draft, state, place, dispatch }: 
         </svg>
         <p
           id="drawing-keys"
-          className="absolute bottom-12 left-9 hidden rounded-one bg-cloth px-2 text-sm text-slate sm:group-focus-visible:block"
+          className="absolute bottom-13 left-9 hidden rounded-one bg-cloth px-2 text-sm text-slate sm:group-focus-visible:block"
         >
           {keyWords[tool]}
         </p>
@@ -201,23 +201,25 @@ export const Drawing = memo(function Drawing({ draft, state, place, dispatch }: 
       <p role="status" className="sr-only">
         {toolWords}
       </p>
-      {!drafting && (
-        <TableTools
-          tool={tool}
-          moved={moved.any}
-          onTool={choose}
-          onSnapBack={() => {
-            moved.snapBack();
-            frame.current?.focus();
-          }}
+      <div className="pointer-events-none absolute right-2 bottom-2 left-9 flex flex-wrap-reverse items-end justify-end gap-2 *:pointer-events-auto sm:justify-between">
+        {!drafting && (
+          <TableTools
+            tool={tool}
+            moved={moved.any}
+            onTool={choose}
+            onSnapBack={() => {
+              moved.snapBack();
+              frame.current?.focus();
+            }}
+          />
+        )}
+        <DrawingTools
+          layout={layout}
+          onFit={framing.fit}
+          onZoom={(by) => framing.zoom(by, middle)}
+          onSeam={walkSeams}
         />
-      )}
-      <DrawingTools
-        layout={layout}
-        onFit={framing.fit}
-        onZoom={(by) => framing.zoom(by, middle)}
-        onSeam={walkSeams}
-      />
+      </div>
     </div>
   );
 });

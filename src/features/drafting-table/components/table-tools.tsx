@@ -15,7 +15,7 @@ export const TableTools = ({ tool, moved, onTool, onSnapBack }: TableToolsProps)
   <div
     role="toolbar"
     aria-label="Tools"
-    className="absolute top-8 right-2 flex items-center rounded-one border border-rule bg-ground text-sm"
+    className="flex items-center rounded-one border border-rule bg-ground text-sm"
   >
     {moved && (
       <button type="button" className={look} onClick={onSnapBack}>
