@@ -133,7 +133,9 @@ try {
     seconds: Math.round(seconds),
   });
   for (const each of ledger.refused) console.log(each);
-  const enough = ledger.acknowledged.length >= saves && figures.databaseStops > 0;
+  const harmed = figures.serverKills > 0 && figures.databaseStops > 0;
+  const heardLate = saves < 1000 || ledger.unheard > 0;
+  const enough = ledger.acknowledged.length >= saves && harmed && heardLate;
   const holds = lost === 0 && doubled === 0 && figures.serverFell === 0 && enough;
   console.log(holds ? 'Every acknowledged save is there, none twice.' : 'NOT durable: see above.');
   process.exitCode = holds ? 0 : 1;

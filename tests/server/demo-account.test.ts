@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, it } from 'vitest';
 import { listSessions, signIn } from '#shared/api/accounts.ts';
 import { connect, type Connection } from '#server/database/client.ts';
 import { demoAccount, settleDemoAccount } from '#server/database/demo-account.ts';
