@@ -31,7 +31,7 @@ export const furtherGirthGuide: {
   waistSeamGirth: {
     label: 'Waist seam girth',
     term: 'Girth at the raised waist seam',
-    how: 'Level round the ribs three inches (7.6 cm) above the waist cord.',
+    how: 'Level round the ribs where the seam will lie: three inches (7.6 cm) above the waist cord, lower if that comes nearly to the under-bust.',
     min: 540,
     max: 1400,
     tolerance: 10,

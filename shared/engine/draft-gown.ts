@@ -1,6 +1,8 @@
 import { checkCard } from '../body/check-card.ts';
+import type { Body } from '../body/card.ts';
 import { completeCard } from '../body/complete-card.ts';
 import { checkRules } from '../drafting/check-rules.ts';
+import type { Construction } from '../drafting/construction.ts';
 import { DraftingError } from '../drafting/drafting-error.ts';
 import { type DraftingTable, openTable } from '../drafting/drafting-table.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
@@ -24,6 +26,13 @@ const errorsOf = (problems: readonly Problem[]): readonly Problem[] =>
 function refuse(problems: readonly Problem[]): void {
   const errors = errorsOf(problems);
   if (errors.length > 0) throw new DraftingError(errors);
+}
+
+/** The body as drawn: where nobody measured the waist seam, its girth is the one the draft came to. */
+function withDrawnSeam(body: Body, { wanted }: Construction): Body {
+  const seam = wanted.find(({ level }) => level === 'waist-seam')?.body;
+  if (seam === undefined || !('waistSeamGirth' in body.estimated)) return body;
+  return { ...body, measures: { ...body.measures, waistSeamGirth: seam } };
 }
 
 function narrateFinishing(table: DraftingTable, { allowance }: HouseRules): void {
@@ -62,7 +71,7 @@ export function draftGown(inputs: DraftInputs): Draft {
     engine: engineVersion,
     number,
     inputs,
-    body,
+    body: withDrawnSeam(body, drawn.construction),
     bodyLevels: levels,
     style: resolved,
     levels: drawn.levels,

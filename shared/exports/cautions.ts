@@ -3,8 +3,8 @@ export const cuttingCautions =
   'Shears, rotary blades and seam rippers cut; count pins and needles before a fitting. Irons and ' +
   'steam burn: let pressed seams cool. Cap or bind every boning end. Net, tulle and organza burn ' +
   'fast: keep them from candles and stoves. A narrow or trained hem trips on stairs and ' +
-  'escalators: try it in the shoes. Local rules on cloth, labels and fire come first, and a licensed ' +
-  'practitioner’s word before this sheet.';
+  'escalators: try it in the shoes. Local rules on cloth, labels and fire ' +
+  'come first, and the advice of a qualified person before this sheet.';
 
 /** How sheets become a pattern, in three sentences. */
 export const assembly = [
@@ -16,4 +16,4 @@ export const assembly = [
 /** The same in two lines, for a page whose room belongs to the figures. */
 export const chalkCautions =
   'Shears, pins and irons hurt: mind them, and bind boning ends. Net and tulle burn fast; a narrow hem ' +
-  'trips on stairs. Local rules and a licensed practitioner’s word come before this sheet.';
+  'trips on stairs. Local rules and the advice of a qualified person come before this sheet.';

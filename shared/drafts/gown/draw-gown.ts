@@ -94,7 +94,13 @@ export function drawGown(
       hem: knee + depth,
     },
     construction: {
-      wanted: wantedGirths(body, style, 2 * (quarters.front.seam.value + quarters.back.seam.value)),
+      wanted: wantedGirths(
+        body,
+        style,
+        bodyLevels,
+        seam,
+        2 * (quarters.front.seam.value + quarters.back.seam.value),
+      ),
       chestSide: { front: chestSide(front), back: chestSide(back) },
       topOpenings: sides.flatMap((each) => each.openings),
     },

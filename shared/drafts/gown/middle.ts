@@ -73,8 +73,8 @@ export function middlePiece(
   const knees = kneeEdges(side, flare, heights.knee);
   narrateDarts(paper, half, sewn);
   paper.draw(
-    'Middle',
-    said`From the waist seam to the knee seam the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the knee seam.`,
+    'Skirt',
+    said`From the raised waist seam to the knee seam the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the knee seam.`,
     {
       lines: [
         sideEdge.path,
@@ -86,7 +86,7 @@ export function middlePiece(
   );
   return {
     name,
-    title: side === 'front' ? 'Front, waist to knee' : 'Back, waist to knee',
+    title: side === 'front' ? 'Front skirt' : 'Back skirt',
     side,
     part: 'middle',
     cut: side === 'front' ? 'cut 1 on fold' : 'cut 2 (a pair)',

@@ -21,6 +21,10 @@ const levels: readonly Level[] = [
   { key: 'hip', name: 'hip', girth: 'hipGirth' },
 ];
 
+/** Ease at the waist seam: between under-bust and waist by height. */
+const seamEase = (style: GownStyle, share: number): number =>
+  style.ease.underbust + share * (style.ease.waist - style.ease.underbust);
+
 const measured = (name: string, key: MeasureKey, body: Body): Quantity =>
   taken(name, key, body.measures[key], key in body.estimated);
 
@@ -59,7 +63,6 @@ export function finishedQuarters(
     measures: [],
   });
   const share = seamShare(heights, seam);
-  const eased = (key: 'underbust' | 'waist'): number => style.ease[key];
   const seamQuarter: Quantity =
     'waistSeamGirth' in body.estimated
       ? {
@@ -79,11 +82,7 @@ export function finishedQuarters(
         }
       : plus(
           quarterOf(
-            plus(
-              measured('waist seam', 'waistSeamGirth', body),
-              'ease',
-              eased('underbust') + share * (eased('waist') - eased('underbust')),
-            ),
+            plus(measured('waist seam', 'waistSeamGirth', body), 'ease', seamEase(style, share)),
           ),
           'balance',
           sign *
@@ -106,6 +105,8 @@ const levelName: { readonly [K in BalanceLevel]: LevelName } = {
 export function wantedGirths(
   body: Body,
   style: GownStyle,
+  heights: BodyLevels,
+  seamLevel: number,
   seamGirth: number,
 ): readonly WantedGirth[] {
   const rows: WantedGirth[] = levels.map(({ key, girth }) => ({
@@ -115,16 +116,14 @@ export function wantedGirths(
     wanted: body.measures[girth] + easeAt(style, key),
     estimated: girth in body.estimated,
   }));
-  const seam: WantedGirth =
-    'waistSeamGirth' in body.estimated
-      ? { level: 'waist-seam', wanted: seamGirth, estimated: true }
-      : {
-          level: 'waist-seam',
-          body: body.measures.waistSeamGirth,
-          ease: seamGirth - body.measures.waistSeamGirth,
-          wanted: seamGirth,
-          estimated: false,
-        };
+  const ease = seamEase(style, seamShare(heights, seamLevel));
+  const seam: WantedGirth = {
+    level: 'waist-seam',
+    body: seamGirth - ease,
+    ease,
+    wanted: seamGirth,
+    estimated: 'waistSeamGirth' in body.estimated,
+  };
   return [
     ...rows.slice(0, 3),
     seam,

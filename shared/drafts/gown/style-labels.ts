@@ -2,11 +2,11 @@ import type { StyleKey } from './style-limits.ts';
 
 /** The trade's word for each style choice, as the style card and every message show it. */
 export const styleLabels: { readonly [K in StyleKey]: string } = {
-  topDrop: 'Top drop',
+  topDrop: 'Peak depth',
   neckDepth: 'Neck depth',
   neckWidth: 'Neck width',
   sideDepth: 'Side depth',
-  backDepth: 'Back depth',
+  backDepth: 'Back height',
   dartLength: 'Dart length',
   kneeLevel: 'Knee seam above the knee',
   kneeFinished: 'Finished knee',
