@@ -16,6 +16,8 @@ for (const width of [390, 1280]) {
       await page.getByRole('link', { name: 'Gowns' }).click();
       await expect(page.getByRole('heading', { level: 1, name: 'Gowns' })).toBeVisible();
       await page.getByRole('link', { name: 'Evening gown' }).click();
+      // The last pieces that could be drawn lie there, although a figure cannot be read.
+      await expect(gown.stale).toBeVisible();
       await gown.showStyle();
       await expect(gown.field('style.neckWidth')).toHaveValue('8.1');
       await expect(gown.field('style.heelHeight')).toHaveValue('high');

@@ -9,12 +9,19 @@ export function gownTable(page: Page) {
   const table = draftingTable(page);
   const conflict = page.getByRole('dialog', { name: 'This gown was saved elsewhere meanwhile' });
   const revisions = page.getByRole('dialog', { name: 'Revisions' });
+  const title = page.getByRole('textbox', { name: 'Name of the gown' });
+  /** On a phone the cards lie behind tabs. */
+  const showCard = async (name: 'Style' | 'Measures') => {
+    await title.waitFor();
+    const tab = table.tab(name);
+    if ((await tab.count()) > 0) await tab.click();
+  };
   return {
     ...table,
     openGown: async (gownId: string) => {
       await page.goto(`/gowns/${gownId}`);
     },
-    title: page.getByRole('textbox', { name: 'Name of the gown' }),
+    title,
     standing: (name: string): Locator => page.locator(`[data-standing="${name}"]`),
     undo: page.getByRole('button', { name: /^Undo/ }),
     redo: page.getByRole('button', { name: /^Redo/ }),
@@ -24,19 +31,11 @@ export function gownTable(page: Page) {
     openRevisions: page.getByRole('button', { name: 'Revisions' }),
     revisions,
     signIn: page.getByRole('dialog', { name: 'Sign in again' }),
-    /** The style card, which on a phone lies behind a tab. */
-    showStyle: async () => {
-      const tab = table.tab('Style');
-      if ((await tab.count()) > 0) await tab.click();
-    },
-    showMeasures: async () => {
-      const tab = table.tab('Measures');
-      if ((await tab.count()) > 0) await tab.click();
-    },
+    showStyle: () => showCard('Style'),
+    showMeasures: () => showCard('Measures'),
     /** Types a figure of the style card and leaves the field. */
     setStyle: async (key: string, text: string) => {
-      const tab = table.tab('Style');
-      if ((await tab.count()) > 0) await tab.click();
+      await showCard('Style');
       await table.field(`style.${key}`).fill(text);
       await table.field(`style.${key}`).blur();
     },

@@ -2,11 +2,18 @@ import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
 import { checkMeasure } from '#shared/body/check-card.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Draft, DraftInputs } from '#shared/engine/draft.ts';
 import type { Problem } from '#shared/units/problem.ts';
 
 import { fieldKeys } from './fields.ts';
-import { cardOf, hasCoreMeasures, rulesOf, styleOf, type Choices } from './table-inputs.ts';
+import {
+  applies,
+  cardOf,
+  hasCoreMeasures,
+  rulesOf,
+  styleOf,
+  type Choices,
+} from './table-inputs.ts';
 
 /** What lies on the table: the last draft that could be drawn, and what stands in the way of the next. */
 export type Drawn = {
@@ -26,7 +33,7 @@ export function drawn(choices: Choices, last: Drawn): Drawn {
 
   const unread = fieldKeys.flatMap((field): Problem[] => {
     const entry = choices.entries[field];
-    if (entry === undefined || !('unread' in entry)) return [];
+    if (entry === undefined || !('unread' in entry) || !applies(field, choices)) return [];
     return [{ code: 'not-read', severity: 'error', field, said: entry.unread }];
   });
   if (unread.length > 0) return stale(unread);
@@ -38,6 +45,16 @@ export function drawn(choices: Choices, last: Drawn): Drawn {
     return { draft, fresh: true, problems: draft.warnings };
   } catch (error) {
     if (error instanceof DraftingError) return stale(error.problems);
+    throw error;
+  }
+}
+
+/** What lay on the table last, drawn anew from the inputs it was drawn from; nothing where it no longer can be. */
+export function lastDrawing(inputs: DraftInputs): Drawn {
+  try {
+    return { draft: draftGown(inputs), fresh: false, problems: [] };
+  } catch (error) {
+    if (error instanceof DraftingError) return nothingDrawn;
     throw error;
   }
 }

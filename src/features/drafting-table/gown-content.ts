@@ -9,7 +9,15 @@ import {
   type Entry,
   type FieldKey,
 } from './fields.ts';
-import { cardOf, givenFor, presetOf, rulesOf, styleOf, type Choices } from './table-inputs.ts';
+import {
+  applies,
+  cardOf,
+  givenFor,
+  presetOf,
+  rulesOf,
+  styleOf,
+  type Choices,
+} from './table-inputs.ts';
 
 /** The key the name of a card goes under in the letters typed. */
 const nameKey = 'card.name';
@@ -30,7 +38,7 @@ export function contentOf(choices: Choices, unit: Unit): GownContent {
     },
     unread: fieldKeys.filter((field) => {
       const entry = choices.entries[field];
-      return entry !== undefined && 'unread' in entry;
+      return entry !== undefined && 'unread' in entry && applies(field, choices);
     }),
     inputs: { card: cardOf(choices), style: styleOf(choices), rules: rulesOf(choices) },
   };

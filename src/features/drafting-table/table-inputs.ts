@@ -37,11 +37,19 @@ export function cardOf(choices: Choices): PartCard {
   };
 }
 
+/**
+ * Whether a figure has a meaning beside the choices made: a straight top line has neither dip nor peak.
+ * One that has none stays as it was typed until it has one again.
+ */
+export const applies = (field: FieldKey, { topLine }: Pick<Choices, 'topLine'>): boolean =>
+  topLine !== 'straight' || (field !== 'style.neckDepth' && field !== 'style.neckWidth');
+
 /** The style card standing in the fields; what is left empty takes the draft's default. */
 export function styleOf(choices: Choices): StyleCard {
   const lengths = styleLengths.flatMap((key) => {
     const value = valueOf(choices.entries[`style.${key}`]);
-    return value === undefined ? [] : [[key, value] as const];
+    const given = value !== undefined && applies(`style.${key}`, choices);
+    return given ? [[key, value] as const] : [];
   });
   const ease = easeLevels.flatMap((level) => {
     const value = valueOf(choices.entries[`style.ease.${level}`]);

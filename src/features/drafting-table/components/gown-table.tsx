@@ -10,7 +10,8 @@ import { Notice } from '../../../ui/notice.tsx';
 import { bench, type Bench } from '../bench.ts';
 import { choicesIn, choicesOf, contentOf, sameWork } from '../gown-content.ts';
 import { readCurrentGown, sendGown } from '../gown-queries.ts';
-import { closed } from '../history.ts';
+import { lastDrawing, nothingDrawn } from '../drawn-table.ts';
+import { closed, noHistory } from '../history.ts';
 import type { DraftPlace } from '../kept-drafts.ts';
 import type { Unsent } from '../saver.ts';
 import { emptyTable, redrawn } from '../table-state.ts';
@@ -146,11 +147,12 @@ export const GownTable = ({ gownId, start: opening, place, signIn }: GownTablePr
   );
 };
 
-/** A table to open on the content of a gown. */
-export const benchOf = (content: GownContent): Bench => {
+/** A table to open on the content of a gown, over the last pieces that could be drawn of it. */
+export const benchOf = (content: GownContent, drawn: Gown['drawn'] | undefined): Bench => {
   const { choices, unit } = choicesOf(content);
+  const last = drawn ? lastDrawing(drawn.inputs) : nothingDrawn;
   return {
-    table: redrawn({ ...emptyTable, ...choices, unit }),
-    history: { past: [], future: [] },
+    table: redrawn({ ...emptyTable, ...choices, unit, drawn: last }),
+    history: noHistory,
   };
 };

@@ -1,11 +1,13 @@
 import type { Dispatch } from 'react';
 
-import { easeLevels, topLineShapes, type StyleLength } from '#shared/drafts/gown/style-card.ts';
+import { easeLevels, type StyleLength } from '#shared/drafts/gown/style-card.ts';
 import { styleHints, styleLabels } from '#shared/drafts/gown/style-labels.ts';
 
 import { Segmented } from '../../../ui/segmented.tsx';
+import { applies } from '../table-inputs.ts';
 import type { TableAction, TableState } from '../table-state.ts';
 import { FigureField, fieldProps } from './figure-field.tsx';
+import { TopLineChoice } from './top-line-choice.tsx';
 
 type StyleCardProps = {
   readonly state: TableState;
@@ -44,22 +46,10 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
       </h2>
       <p className="pt-1 text-sm text-slate">Grey figures are the defaults for this body.</p>
       <form onSubmit={(event) => event.preventDefault()}>
-        <label className="flex items-center justify-between gap-3 border-b border-rule py-1">
-          <span>Top line</span>
-          <select
-            name="style.topLine"
-            className="h-9 rounded-one border border-rule bg-paper px-2"
-            value={state.topLine}
-            onChange={(event) => {
-              const topLine = topLineShapes.find((each) => each === event.currentTarget.value);
-              if (topLine !== undefined) dispatch({ type: 'chosen', choice: { topLine } });
-            }}
-          >
-            {topLineShapes.map((shape) => (
-              <option key={shape}>{shape}</option>
-            ))}
-          </select>
-        </label>
+        <TopLineChoice
+          value={state.topLine}
+          onChoose={(topLine) => dispatch({ type: 'chosen', choice: { topLine } })}
+        />
         <div className="flex items-center justify-between gap-3 border-b border-rule py-1">
           <span>Shaping</span>
           <Segmented
@@ -72,7 +62,7 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
             onChoose={(shaping) => dispatch({ type: 'chosen', choice: { shaping } })}
           />
         </div>
-        {topKeys.map(row)}
+        {topKeys.filter((key) => applies(`style.${key}`, state)).map(row)}
         {middleKeys.map(row)}
         <label className="flex items-center justify-between gap-3 border-b border-rule py-1">
           <span>{styleLabels.flareFraction}</span>

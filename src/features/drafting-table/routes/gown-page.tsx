@@ -9,7 +9,7 @@ import { benchOf, GownTable, type GownStart } from '../components/gown-table.tsx
 import { mayOpenKept, OpeningFailed } from '../components/opening-failed.tsx';
 import { RedrawingSheet } from '../components/redrawing-sheet.tsx';
 import { gownQuery } from '../gown-queries.ts';
-import { keptHistory, noHistory } from '../history.ts';
+import { keptHistory } from '../history.ts';
 import type { DraftPlace } from '../kept-drafts.ts';
 import { useDraftPlace } from '../use-draft-place.ts';
 
@@ -84,7 +84,7 @@ function startOf(
   redraw: boolean,
 ): GownStart {
   if (found !== undefined && (gown === undefined || found.changed || found.base === gown.version)) {
-    const opened = benchOf(found.content);
+    const opened = benchOf(found.content, gown?.drawn);
     const { table } = opened;
     return {
       bench: { table, history: keptHistory(found.history, table, table.unit) },
@@ -96,7 +96,7 @@ function startOf(
   }
   if (gown === undefined) throw new Error('there is neither a gown nor a draft of one');
   return {
-    bench: { ...benchOf(gown.content), history: noHistory },
+    bench: benchOf(gown.content, gown.drawn),
     title: gown.title,
     base: gown.version,
     changed: redraw,

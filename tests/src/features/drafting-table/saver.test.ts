@@ -1,8 +1,9 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 
-import type { Gown, GownContent } from '#shared/api/gowns.ts';
+import { gownSchema, type Gown, type GownContent } from '#shared/api/gowns.ts';
 import { balanced } from '#shared/drafting/house-rule-presets.ts';
 
+import { sameWork } from '../../../../src/features/drafting-table/gown-content.ts';
 import { openSaver, type Unsent } from '../../../../src/features/drafting-table/saver.ts';
 import { CallFailed } from '../../../../src/lib/call.ts';
 
@@ -33,13 +34,15 @@ afterEach(() => vi.useRealTimers());
 /** A table with a saver, and a server that answers as told, one answer a save. */
 function workroom(answers: readonly (number | CallFailed)[], start: Partial<Gown> = {}) {
   const table = { name: 'as opened' };
-  const sent: Unsent[] = [];
+  const sent: Unsent<GownContent>[] = [];
   const waiting = [...answers];
   const saver = openSaver({
     base: start.version ?? 1,
     unsent: undefined,
     changed: false,
     engine: '1.0.0',
+    readCurrent: (current) => gownSchema.safeParse(current).data,
+    same: sameWork,
     content: () => contentAs(table.name),
     send: (save) => {
       sent.push(save);
