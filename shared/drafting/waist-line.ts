@@ -31,14 +31,26 @@ export type WaistLine = { readonly stretches: readonly Path[]; readonly mouths: 
 
 type Way = { readonly at: Point; readonly slope: number };
 
+/**
+ * Part of the way that the last handle of a curve reaches: a third, or less where the curve sets out level
+ * and ends lower than an even bend would, so that it never turns back on itself.
+ */
+function lastHandle({ at, slope }: Way, until: Way): number {
+  const even = (until.at.x - at.x) * until.slope;
+  if (slope !== 0 || even === 0) return 1 / 3;
+  return Math.max(0.15, Math.min(1 / 3, ((2 / 3) * (until.at.y - at.y)) / even));
+}
+
 /** A curve from one place to another with given slopes (dy/dx) at its ends. */
 function swept(from: Way, until: Way): Path {
-  const third = (until.at.x - from.at.x) / 3;
+  const width = until.at.x - from.at.x;
+  const near = width / 3;
+  const far = width * lastHandle(from, until);
   return [
     cubic(
       from.at,
-      point(from.at.x + third, from.at.y + third * from.slope),
-      point(until.at.x - third, until.at.y - third * until.slope),
+      point(from.at.x + near, from.at.y + near * from.slope),
+      point(until.at.x - far, until.at.y - far * until.slope),
       until.at,
     ),
   ];
@@ -89,9 +101,14 @@ export const waistLine = (plan: PlannedWaist, intake: number): WaistLine => draw
 export const waistLength = (waist: WaistLine): number =>
   waist.stretches.reduce((sum, stretch) => sum + pathLength(stretch), 0);
 
-/** Height at which the waist line would reach the side bending evenly: half the rise of its two slopes. */
-export const evenSideHeight = (plan: PlannedWaist, intake: number): number =>
-  evenlyTo(drawn(plan, intake).last, plan.side.x, plan.sideSlope);
+/** The waist line rises or falls to the side by at most this, mm (our rule; the trade's skirts rise by about 12). */
+const mostRise = 20;
+
+/** Height at which the waist line would reach the side bending evenly: half the rise of its two slopes, within 20 mm. */
+export function evenSideHeight(plan: PlannedWaist, intake: number): number {
+  const rise = evenlyTo(drawn(plan, intake).last, plan.side.x, plan.sideSlope) - plan.centre;
+  return plan.centre + Math.max(-mostRise, Math.min(mostRise, rise));
+}
 
 const roundsAtMost = 30;
 

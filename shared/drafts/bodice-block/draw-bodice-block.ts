@@ -9,7 +9,7 @@ import type { DrawnBlock } from '../drawn-block.ts';
 import { warnOfEstimates } from '../lean-on.ts';
 import { type BustDartAngle, bustDartAngle } from './bust-dart.ts';
 import { blockUnderarm, narrateHalf, narratePlace } from './narrate.ts';
-import { backWidthEase, pairArmholes } from './pair-armholes.ts';
+import { backWidthEase, pairArmholes, warnOfTightArmhole } from './pair-armholes.ts';
 import { type BodiceHalf, type BodiceQuarters, backPiece, frontPiece } from './pieces.ts';
 import { backToMatch, placeBustDart } from './place-dart.ts';
 import { type BlockHeights, type HalfFigures, planHalves } from './plan-halves.ts';
@@ -119,6 +119,7 @@ export function drawBodiceBlock(
     { plan: plans.front, shoulder: shoulders.front, opened },
     { plan: plans.back, shoulder: shoulders.back },
   );
+  warnOfTightArmhole(table, body, armholes);
   const bustNotch = (heights.bust - heights.underarm) * Math.hypot(1, plans.front.lean);
   const half = (side: Side): BodiceHalf => ({
     plan: plans[side],

@@ -1,7 +1,10 @@
 import type { Body } from '../../body/card.ts';
 import { DraftingError } from '../../drafting/drafting-error.ts';
+import type { DraftingTable } from '../../drafting/drafting-table.ts';
+import { pathLength } from '../../geometry/curve.ts';
 import { moved } from '../../geometry/motion.ts';
 import { point } from '../../geometry/point.ts';
+import { warning } from '../../units/problem.ts';
 import { mm, said } from '../../units/said.ts';
 import { type Armhole, type ArmholeFrame, armhole } from './armhole.ts';
 import type { HalfPlan } from './plan-halves.ts';
@@ -101,4 +104,27 @@ export function pairArmholes(
     return { ...drawn, asked: frame.guide };
   };
   return { front: draw(frames.front), back: draw(frames.back) };
+}
+
+/** An armhole is at least this much longer than the upper arm is round (common practice, no source; usually 100 or more). */
+const overArm = 60;
+
+/** Warns where the sewn armhole lies too near to the upper arm. */
+export function warnOfTightArmhole(
+  table: DraftingTable,
+  body: Body,
+  { front, back }: { readonly front: Armhole; readonly back: Armhole },
+): void {
+  const length = pathLength(front.path) + pathLength(back.path);
+  const arm = body.measures.upperArmGirth;
+  if (length >= arm + overArm) return;
+  const guessed = 'upperArmGirth' in body.estimated ? ' (estimated)' : '';
+  table.warn(
+    warning({
+      code: 'armhole-tight',
+      field: 'card.upperArmGirth',
+      with: ['style.armholeDrop', 'card.underarmToWaist'],
+      said: said`The armhole is ${mm(length)} round and the upper arm ${mm(arm)}${guessed}: lower the armhole, or measure underarm to waist and upper arm again.`,
+    }),
+  );
 }
