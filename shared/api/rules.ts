@@ -26,6 +26,9 @@ const allowance = z.strictObject({
 /** House rules with every value, as a draft tells them. */
 export const houseRules = z.strictObject({
   balance,
+  cupShare: z
+    .number()
+    .describe("Part of the bust's fullness beyond a middle cup that the front gains, 0 to 0.5."),
   sideShare: z.number().describe('Part of the waist suppression that the side seam takes, 0 to 1.'),
   dartWidest: z.number().describe('Widest intake sewn in one dart, mm.'),
   dartClearance: z.number().describe('Darts stop this short of the bust point, mm.'),
@@ -45,6 +48,7 @@ export function fillRules(card: z.output<typeof rulesCard>): HouseRules {
   const base = houseRulePresets[card.preset ?? 'balanced'];
   return {
     balance: merged(base.balance, card.balance),
+    cupShare: card.cupShare ?? base.cupShare,
     sideShare: card.sideShare ?? base.sideShare,
     dartWidest: card.dartWidest ?? base.dartWidest,
     dartClearance: card.dartClearance ?? base.dartClearance,

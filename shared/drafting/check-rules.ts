@@ -34,6 +34,14 @@ const limits: readonly Rule[] = [
     value: (rules) => rules.balance[level],
   })),
   {
+    key: 'cupShare',
+    label: 'Share of a full cup',
+    min: 0,
+    max: 0.5,
+    share: true,
+    value: (rules) => rules.cupShare,
+  },
+  {
     key: 'sideShare',
     label: 'Share of the side seam',
     min: 0,

@@ -10,12 +10,14 @@ const shared = {
 /** The default: the side seam stands a little behind the plain quarter at the bust, before it at the under-bust (method section 4). */
 export const balanced: HouseRules = {
   balance: { chest: 6, bust: 10, underbust: -5, waist: 5, topHip: 2, hip: 0, knee: -5 },
+  cupShare: 0.15,
   ...shared,
 };
 
 /** The plain direct draft many dressmakers use: front and back quarters alike at every level. */
 export const quarterRule: HouseRules = {
   balance: { chest: 0, bust: 0, underbust: 0, waist: 0, topHip: 0, hip: 0, knee: 0 },
+  cupShare: 0,
   ...shared,
 };
 

@@ -18,6 +18,8 @@ export type EdgeKind = (typeof edgeKinds)[number];
 export type HouseRules = {
   /** Added to the front quarter and taken from the back one, by level. */
   readonly balance: { readonly [L in BalanceLevel]: number };
+  /** Part of the bust's fullness beyond a middle cup that the front gains over the back, 0 to 0.5. */
+  readonly cupShare: number;
   /** Part of the waist suppression that the side seam takes, 0 to 1. */
   readonly sideShare: number;
   /** Widest intake sewn in one dart. */

@@ -14,6 +14,7 @@ const allowance = { seam: 15, side: 25, zip: 25, top: 10, hem: 40 };
 
 export const plainRules: HouseRules = {
   balance: { chest: 0, bust: 0, underbust: 0, waist: 0, topHip: 0, hip: 0, knee: 0 },
+  cupShare: 0,
   sideShare: 0.45,
   dartWidest: 40,
   dartClearance: 25,

@@ -7,6 +7,7 @@ import { type Point, point } from '#shared/geometry/point.ts';
 /** House rules with the allowances of method section 7. */
 export const sampleRules: HouseRules = {
   balance: { chest: 6, bust: 10, underbust: -5, waist: 5, topHip: 2, hip: 0, knee: -5 },
+  cupShare: 0,
   sideShare: 0.45,
   dartWidest: 40,
   dartClearance: 25,

@@ -115,15 +115,19 @@ function topLinePoints(half: Half, front: Half, style: GownStyle): TopLinePoints
   const y = half.side === 'front' ? style.sideDepth : heightAtArc(half, arc);
   const end = { side: point(xAt(half.line, y), y), sideLean: slopeAt(half.line, y) };
   return half.side === 'front'
-    ? frontTopLine(style, end)
+    ? frontTopLine(style, half.axis, end)
     : { centre: point(0, half.levels.waist - style.backDepth), ...end };
 }
 
 function frontTopLine(
   style: GownStyle,
+  axis: number,
   end: Pick<TopLinePoints, 'side' | 'sideLean'>,
 ): TopLinePoints {
-  if (style.topLine === 'straight') return { centre: point(0, style.topDrop), ...end };
+  if (style.topLine === 'straight') {
+    // Level from the centre to the princess line or dart, falling only from there to the side.
+    return { centre: point(0, style.topDrop), peak: point(axis, style.topDrop), ...end };
+  }
   return {
     centre: point(0, style.neckDepth),
     peak: point(style.neckWidth, style.topDrop),
@@ -172,9 +176,9 @@ function narratePrincess(paper: PartTable, half: Half, opening: number, height: 
       : said`stays closed above it`;
   paper.draw(
     'Princess seam',
-    said`${mm(half.axis)} out from the centre both panels pass the bust point upright. Below it the gap is ${mm(half.gap.underbust)} at the under-bust and ${mm(half.gap.seam)} at the waist seam, half on each side; the seam ${above}.`,
+    said`${mm(half.axis)} out from the centre both panels pass ${half.side === 'front' ? 'the bust point' : 'bust level'} upright. Below it the gap is ${mm(half.gap.underbust)} at the under-bust and ${mm(half.gap.seam)} at the waist seam, half on each side; the seam ${above}.`,
     {
-      why: said`The edges swell outside the straight legs and never cut the corner at the bust point, which would cost girth there.`,
+      why: said`The edges swell outside the straight legs and never cut the corner at bust level, which would cost girth there.`,
       points: { 'bust-point': point(half.axis, below.top) },
       lines: [intakeEdge(below, 'centre'), intakeEdge(below, 'side')],
     },
@@ -186,9 +190,9 @@ function narrateDarts(paper: PartTable, half: Half, opening: number, clearance: 
   const above = opening > 0 ? said`; one from the top line takes ${mm(opening)}` : said``;
   paper.draw(
     'Bust darts',
-    said`${darts.length === 1 ? 'One dart' : 'Two darts'} from the waist seam, ending ${mm(clearance)} short of the bust point: ${mm(half.gap.underbust)} at the under-bust, ${mm(half.gap.seam)} at the waist seam${above}.`,
+    said`${darts.length === 1 ? 'One dart' : 'Two darts'} from the waist seam, ending ${mm(clearance)} short of ${half.side === 'front' ? 'the bust point' : 'bust level'}: ${mm(half.gap.underbust)} at the under-bust, ${mm(half.gap.seam)} at the waist seam${above}.`,
     {
-      why: said`A dart that ran into the bust point would stand up there; stopped short it melts into the curve.`,
+      why: said`A dart that ran all the way would stand up in a point; stopped short it melts into the curve.`,
       lines: darts.flatMap((dart) => [intakeEdge(dart, 'centre'), intakeEdge(dart, 'side')]),
     },
   );

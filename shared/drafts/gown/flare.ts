@@ -106,6 +106,8 @@ function gore(side: Side, plan: FlarePlan, k: number, otherGores: number): Piece
     ? edge('centre', 'fold', inwards)
     : edge(`gore-${k}`, 'seam', inwards, to(goreName(side, k - 1), `gore-${k}`));
   const width = inner * (halfGore - from);
+  const depth = outer - inner;
+  const markAt = (seam: number): number => (depth * seam) / (gores + 1);
   return {
     name: goreName(side, k),
     title: `Flare, ${side}${gores > 1 ? (onFold ? ', centre gore' : `, gore ${k + 1}`) : ''}`,
@@ -116,11 +118,20 @@ function gore(side: Side, plan: FlarePlan, k: number, otherGores: number): Piece
     edges: [knee, far, hem, near],
     darts: [],
     levels: [],
-    notches: gores === 1 ? notchAtLength('knee-half', knee, width / 2, strokes) : [],
+    notches: [
+      ...notchAtLength(`${knee.name}-half`, knee, width / 2, strokes),
+      // The seam nearer the centre is travelled upwards, from the hem.
+      ...goreMark(near, depth - markAt(k), strokes),
+      ...goreMark(far, markAt(k + 1), strokes),
+    ],
     grain: grainOf(inner, outer, onFold ? halfGore * 0.3 : 0),
     drills: [],
   };
 }
+
+/** A mark on a gore seam, at a height of its own so that gores cannot be exchanged. */
+const goreMark = (seam: Edge, along: number, strokes: 1 | 2): Piece['notches'] =>
+  seam.name.startsWith('gore-') ? notchAtLength(seam.name, seam, along, strokes) : [];
 
 const grainOf = (
   inner: number,

@@ -104,11 +104,12 @@ export function middlePiece(
       levelLine('knee-seam', kneeCentre, kneeSide),
     ],
     notches: [
+      ...secondDartMark(stretches, topPartner, strokes),
       ...notchAtHeight('waist', sideEdge, heights.waist, strokes),
       ...notchAtHeight('hip', sideEdge, heights.hip, strokes),
-      ...(knees.length === 1
-        ? knees.flatMap((knee) => notchAtLength('knee-half', knee, kneeSide.x / 2, strokes))
-        : []),
+      ...knees.flatMap((knee) =>
+        notchAtLength(`${knee.name}-half`, knee, pathLength(knee.path) / 2, strokes),
+      ),
       ...(side === 'back'
         ? [
             ...notchAtHeight('waist', centre, levels.waist, strokes),
@@ -139,6 +140,18 @@ function narrateDarts(paper: PartTable, half: Half, darts: readonly Dart[]): voi
       lines: darts.flatMap((dart) => [dart.centreLeg, dart.sideLeg]),
     },
   );
+}
+
+/** Marks the second dart against the side panel of the top, which has no dart there. */
+function secondDartMark(
+  stretches: readonly Path[],
+  partner: TopPartner,
+  strokes: 1 | 2,
+): Piece['notches'] {
+  const [, before, after] = stretches;
+  if (!before || !after || partner(1) !== partner(2) || partner(0) === partner(1)) return [];
+  const own = edge(waistStretch(1), 'seam', before);
+  return notchAtLength('second-dart', own, pathLength(before), strokes);
 }
 
 /** The knee seam from the side to the centre, in a stretch for each gore of the flare. */

@@ -21,6 +21,27 @@ const levels: readonly Level[] = [
   { key: 'hip', name: 'hip', girth: 'hipGirth' },
 ];
 
+/** Bust less under-bust of a middle cup: the balance itself is made for it. */
+const middleCup = 140;
+/** The front gains by its cup at most this. */
+const mostCup = 30;
+/** The upper chest follows the bust's cup by this part: the fullness begins above the bust. */
+const cupAbove = 0.8;
+
+/**
+ * What the front quarter gains, and the back gives, for a cup fuller than the middle one [our rule]:
+ * the bust grows in front, a back hardly changes between under-bust and bust.
+ */
+function cupAt(key: BalanceLevel, body: Body, rules: HouseRules): number {
+  if (key !== 'bust' && key !== 'chest') return 0;
+  const { bustGirth, underbustGirth } = body.measures;
+  const cup = Math.min(
+    mostCup,
+    rules.cupShare * Math.max(0, bustGirth - underbustGirth - middleCup),
+  );
+  return key === 'bust' ? cup : cupAbove * cup;
+}
+
 /** Ease at the waist seam: between under-bust and waist by height. */
 const seamEase = (style: GownStyle, share: number): number =>
   style.ease.underbust + share * (style.ease.waist - style.ease.underbust);
@@ -51,7 +72,15 @@ export function finishedQuarters(
 ): Quarters {
   const sign = side === 'front' ? 1 : -1;
   const quarter = (key: BalanceLevel, girth: Quantity): Quantity =>
-    plus(quarterOf(plus(girth, 'ease', easeAt(style, key))), 'balance', sign * rules.balance[key]);
+    plus(
+      plus(
+        quarterOf(plus(girth, 'ease', easeAt(style, key))),
+        'balance',
+        sign * rules.balance[key],
+      ),
+      'cup',
+      sign * cupAt(key, body, rules),
+    );
   const at = (level: Level): Quantity =>
     quarter(level.key, measured(level.name, level.girth, body));
   const [chest, bust, underbust, waist, topHip, hip] = levels.map(at);

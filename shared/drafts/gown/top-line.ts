@@ -13,8 +13,6 @@ export type TopLine = {
   readonly outer: Path;
   /** Height at which it meets both legs. */
   readonly crossing: number;
-  /** Whether the peak stands on the outer panel. */
-  readonly peakOutside: boolean;
 };
 
 /** Where a top line sets out, peaks and ends. */
@@ -55,7 +53,6 @@ export function topLine(points: TopLinePoints, legs: StraightLegs): TopLine {
     centre: inner,
     outer: movedPath(outerClosed, undo(closing)),
     crossing: at.at.y,
-    peakOutside: peak !== undefined && at.index === 0,
   };
 }
 
@@ -78,7 +75,7 @@ const rise = (centre: Point, peak: Point, shape: TopLineShape): Path => {
   const handle = Math.sqrt((tightestDip * Math.abs(centre.y - peak.y)) / 1.5);
   const least = shape === 'scooped' ? 0.72 * width : 0.4 * width;
   const reach = Math.max(least, Math.min(0.85 * width, handle));
-  const soft = shape === 'scooped' ? 0.3 * width : 0.55 * width;
+  const soft = shape === 'scooped' ? 0.45 * width : 0.55 * width;
   if (shape === 'notched') {
     const climb = Math.min(0.4 * width, 0.6 * Math.abs(centre.y - peak.y));
     return [

@@ -1,4 +1,11 @@
-import { drillPoints, edge, levelLine, notchAtHeight, to } from '../../drafting/outline.ts';
+import {
+  drillPoints,
+  edge,
+  levelLine,
+  notchAtHeight,
+  notchAtLength,
+  to,
+} from '../../drafting/outline.ts';
 import type { Dart, Edge, LevelLine, Piece, Side } from '../../drafting/piece.ts';
 import { endOf, reverse, startOf } from '../../geometry/curve.ts';
 import { type Path, line } from '../../geometry/path.ts';
@@ -123,7 +130,14 @@ export function princessPanels(parts: TopParts & { readonly above: Intake }): re
       ],
       darts: [],
       levels: [acrossSide('bust'), acrossSide('underbust')],
-      notches: [...notchAtHeight('bust', own, half.heights.bust, strokes), ...marks(sidePrincess)],
+      notches: [
+        ...notchAtHeight('bust', own, half.heights.bust, strokes),
+        ...marks(sidePrincess),
+        ...secondDartMark(
+          rest.map((path, k) => toMiddle(path, k + 1)),
+          strokes,
+        ),
+      ],
       grain: grainBetween(
         (half.axis + xAt(half.line, half.heights.bust)) / 2,
         below.top,
@@ -134,6 +148,10 @@ export function princessPanels(parts: TopParts & { readonly above: Intake }): re
     },
   ];
 }
+
+/** Where the second dart of the middle meets the side panel: the end of the stretch before it. */
+const secondDartMark = ([before, after]: readonly Edge[], strokes: 1 | 2): Piece['notches'] =>
+  before && after ? notchAtLength('second-dart', before, 0, strokes) : [];
 
 const grainBetween = (x: number, bust: number, foot: number, top: number): Piece['grain'] => ({
   from: point(x, Math.min(bust, top + 0.25 * (foot - top))),

@@ -73,8 +73,8 @@ describe('the handles of a gown', () => {
             // A peak that steps over the princess seam goes on from the other panel.
             if (next?.piece !== handle.piece) continue;
             const travel = dot(subtract(next.at, handle.at), handle.along);
-            // The opening above the bust turns a little as the peak moves, and the outer panel with it.
-            const bound = handle.key === 'neckWidth' || handle.key === 'topDrop' ? 0.25 : 1e-6;
+            // The opening above the bust turns as the peak moves, and the outer panel with it: the more, the fuller the cup.
+            const bound = handle.key === 'neckWidth' || handle.key === 'topDrop' ? 0.4 : 1e-6;
             expect(Math.abs(travel * handle.perMillimetre - 1), handle.key).toBeLessThan(bound);
             seen.set(handle.key, (seen.get(handle.key) ?? 0) + 1);
           }
