@@ -1,3 +1,5 @@
+import type { Unit } from '../units/said.ts';
+
 /** What can hurt at the cutting table and at the party; printed wherever somebody is about to cut. */
 export const cuttingCautions =
   'Shears, rotary blades and seam rippers cut; count pins and needles before a fitting. Irons and ' +
@@ -13,7 +15,9 @@ export const assembly = [
   'Lay it on that neighbour’s glue strip, lozenge on lozenge: first along the rows, then row to row.',
 ] as const;
 
-/** The same in two lines, for a page whose room belongs to the figures. */
-export const chalkCautions =
+/** The same in few lines, for a page whose room belongs to the figures, and how to chalk from it. */
+export const chalkCautions = (unit: Unit): string =>
+  'Chalk each piece by itself, with room for the allowances of both between neighbours. Figures are to the ' +
+  `nearest ${unit === 'in' ? '1⁄8 in' : '0.1 cm'}. ` +
   'Shears, pins and irons hurt: mind them, and bind boning ends. Net and tulle burn fast; a narrow hem ' +
   'trips on stairs. Local rules and the advice of a qualified person come before this sheet.';

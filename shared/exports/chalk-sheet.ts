@@ -36,7 +36,7 @@ function levelTicks(draft: Draft, { front, back, yOf }: ChalkLayout): readonly M
 function sheet(draft: Draft, paper: Paper, unit: Unit): readonly Mark[] {
   const left = printerMargin;
   const width = paper.width - 2 * printerMargin;
-  const cautions = wrap(chalkCautions, cautionSize, width).length * cautionSize * 1.32;
+  const cautions = wrap(chalkCautions(unit), cautionSize, width).length * cautionSize * 1.32;
   const bottom = paper.height - printerMargin - cautions - 2;
   const { layout, marks } = layChalkTables(draft, paper, bottom, unit);
   return [
@@ -56,7 +56,7 @@ function sheet(draft: Draft, paper: Paper, unit: Unit): readonly Mark[] {
     ...levelTicks(draft, layout),
     ...[layout.front, layout.back].flatMap(drawHalf),
     ...marks,
-    ...paragraph(chalkCautions, left, bottom + 2, width, cautionSize).marks,
+    ...paragraph(chalkCautions(unit), left, bottom + 2, width, cautionSize).marks,
   ];
 }
 

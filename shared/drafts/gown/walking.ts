@@ -42,7 +42,7 @@ export function walking(
     caution ? ' Stairs, kerbs and getting into a car need care: try it at the fitting.' : ''
   }`;
   paper.draw('Walking', sentence, {
-    why: said`The knees open as the foot goes forward, and the seam must reach round both. An unhurried step is about ${mm(650)}.`,
+    why: said`The knees open as the foot goes forward, and the seam must reach round both. An unhurried step is about ${mm(650)}. Between hip and knee seam the side falls in: tape round both thighs together there, seated and standing, against the toile.`,
     measures: ['kneeGirth', 'waistToHip', 'waistToFloor'],
   });
   return { step, caution, said: sentence };
