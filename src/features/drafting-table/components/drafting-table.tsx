@@ -71,7 +71,13 @@ export const DraftingTable = (props: DraftingTableProps) => {
         told === undefined ? (
           waiting
         ) : (
-          <ProofPanel draft={told} lit={state.seam} unit={state.unit} dispatch={dispatch} />
+          <ProofPanel
+            draft={told}
+            fresh={state.drawn.fresh}
+            lit={state.seam}
+            unit={state.unit}
+            dispatch={dispatch}
+          />
         ),
     },
     {
@@ -144,8 +150,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
       {draft !== undefined && (
         <PrintDialog
           draft={draft}
-          fresh={state.drawn.fresh}
-          unit={state.unit}
+          state={state}
           open={printing}
           onClose={() => setPrinting(false)}
         />

@@ -3,18 +3,18 @@ import { useMemo, useState } from 'react';
 import type { Draft } from '#shared/engine/draft.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import type { PaperName } from '#shared/sheets/papers.ts';
-import type { Unit } from '#shared/units/said.ts';
 
 import { printsOnLetter } from '../../../lib/reader.ts';
 import { Dialog } from '../../../ui/dialog.tsx';
 import { Segmented } from '../../../ui/segmented.tsx';
+import { lastGoodFigures } from '../last-good-figures.ts';
+import type { TableState } from '../table-state.ts';
 import { FilesToKeep } from './files-to-keep.tsx';
 import { PrintRow } from './print-row.tsx';
 
 type PrintDialogProps = {
   readonly draft: Draft;
-  readonly fresh: boolean;
-  readonly unit: Unit;
+  readonly state: TableState;
   readonly open: boolean;
   readonly onClose: () => void;
 };
@@ -26,7 +26,7 @@ export const PrintDialog = ({ open, onClose, ...rest }: PrintDialogProps) => (
   </Dialog>
 );
 
-const PrintChoices = ({ draft, fresh, unit }: Omit<PrintDialogProps, 'open' | 'onClose'>) => {
+const PrintChoices = ({ draft, state }: Omit<PrintDialogProps, 'open' | 'onClose'>) => {
   const [paper, setPaper] = useState<PaperName>(() => (printsOnLetter() ? 'Letter' : 'A4'));
   const sheets = useMemo(
     () => ({
@@ -35,13 +35,19 @@ const PrintChoices = ({ draft, fresh, unit }: Omit<PrintDialogProps, 'open' | 'o
     }),
     [draft, paper],
   );
+  const { unit, drawn } = state;
   const order = { draft, unit, paper };
   return (
     <>
-      {!fresh && (
-        <p className="mt-3 font-semibold text-madder">
-          A figure is being corrected: this prints the last drawing that held.
-        </p>
+      {!drawn.fresh && (
+        <div className="mt-3 text-madder">
+          <p className="font-semibold">This prints the last good draft:</p>
+          <ul className="figures">
+            {lastGoodFigures(state, draft).map((line) => (
+              <li key={line}>{line}</li>
+            ))}
+          </ul>
+        </div>
       )}
       {!draft.proof.holds && (
         <p className="mt-3 font-semibold text-madder">

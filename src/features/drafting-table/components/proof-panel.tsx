@@ -13,6 +13,8 @@ import { GirthAudit } from './girth-audit.tsx';
 
 type ProofPanelProps = {
   readonly draft: Draft;
+  /** Whether the draft is that of the figures now in the fields. */
+  readonly fresh: boolean;
   /** The edge whose seam is lit. */
   readonly lit: EdgeRef | undefined;
   readonly unit: Unit;
@@ -20,7 +22,7 @@ type ProofPanelProps = {
 };
 
 /** The verdict first; the numbers it rests on under it. */
-export const ProofPanel = ({ draft, lit, unit, dispatch }: ProofPanelProps) => {
+export const ProofPanel = ({ draft, fresh, lit, unit, dispatch }: ProofPanelProps) => {
   const { proof } = draft;
   const litRow = seamIndex(draft, lit);
   const [verdict, ...rest] = sentences(speak(proof.verdict, unit));
@@ -29,11 +31,19 @@ export const ProofPanel = ({ draft, lit, unit, dispatch }: ProofPanelProps) => {
     <section className="space-y-6">
       <h2 className="sr-only">Proof</h2>
       <div className="flex items-start gap-3">
-        <VerdictMark holds={proof.holds} />
+        <VerdictMark holds={proof.holds} fresh={fresh} />
         <div>
-          <p className={`text-xl leading-tight font-semibold ${proof.holds ? '' : 'text-madder'}`}>
+          {!fresh && <p className="font-semibold text-madder">Of the last good draft</p>}
+          <p
+            className={`text-xl leading-tight font-semibold ${fresh ? (proof.holds ? '' : 'text-madder') : 'text-slate'}`}
+          >
             {verdict}
           </p>
+          {!fresh && (
+            <p className="text-slate">
+              The figures now in the cards are not drawn, and not proven.
+            </p>
+          )}
           {rest.length > 0 && <p className="figures text-madder">{rest.join(' ')}</p>}
           <p className="text-slate">
             {`${holding} of ${proof.lines.length} checks hold, ${proof.seams.length} seams walked`}
@@ -124,19 +134,14 @@ const Check = ({ line, unit }: { line: ProofLine; unit: Unit }) => {
   );
 };
 
-const VerdictMark = ({ holds }: { holds: boolean }) => (
-  <svg viewBox="0 0 40 40" className="h-10 w-10 shrink-0" aria-hidden="true">
-    <circle
-      cx={20}
-      cy={20}
-      r={18}
-      strokeWidth={2}
-      className={`fill-none ${holds ? 'stroke-verdigris' : 'stroke-madder'}`}
-    />
-    <path
-      d={holds ? 'M12 20L18 26L29 14' : 'M20 10V23M20 27V30'}
-      strokeWidth={3}
-      className={`fill-none ${holds ? 'stroke-verdigris' : 'stroke-madder'}`}
-    />
-  </svg>
-);
+/** A tick where it holds, a mark of exclamation where not; neither speaks for figures that are not drawn. */
+const VerdictMark = ({ holds, fresh }: { holds: boolean; fresh: boolean }) => {
+  const stroke = fresh ? (holds ? 'stroke-verdigris' : 'stroke-madder') : 'stroke-slate';
+  const sign = holds ? 'M12 20L18 26L29 14' : 'M20 10V23M20 27V30';
+  return (
+    <svg viewBox="0 0 40 40" className="h-10 w-10 shrink-0" aria-hidden="true">
+      <circle cx={20} cy={20} r={18} strokeWidth={2} className={`fill-none ${stroke}`} />
+      <path d={fresh ? sign : 'M12 20H28'} strokeWidth={3} className={`fill-none ${stroke}`} />
+    </svg>
+  );
+};

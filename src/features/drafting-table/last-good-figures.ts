@@ -1,0 +1,44 @@
+import type { Draft } from '#shared/engine/draft.ts';
+import { formatWithUnit } from '#shared/units/format-length.ts';
+
+import { fieldKeys, valueOf, writeValue, type FieldKey } from './fields.ts';
+import { partLabel, partWords } from './part-words.ts';
+import { applies, givenFor, presetOf } from './table-inputs.ts';
+import type { TableState } from './table-state.ts';
+
+/** Nearer than this two figures are one: a field may hold what reading rounded, mm. */
+const same = 0.01;
+
+/**
+ * While the last good draft stands, what it was drawn with wherever the fields now say something else:
+ * `Waist: prints with 28 1⁄2 in, the last good figure`.
+ */
+export function lastGoodFigures(state: TableState, draft: Draft): readonly string[] {
+  const { card, style } = draft.inputs;
+  const figures = fieldKeys.flatMap((field) => {
+    const was = givenFor(field, card, style);
+    const now = valueOf(state.entries[field]);
+    const unchanged = was === undefined ? state.entries[field] === undefined : near(was, now);
+    if (unchanged || !applies(field, state)) return [];
+    return [
+      `${partLabel(field)}: prints ${was === undefined ? 'as left open' : `with ${worded(field, was, state)}`}, the last good figure`,
+    ];
+  });
+  const chosen = { ...draft.style, preset: presetOf(draft.inputs.rules) };
+  const choices = (['topLine', 'shaping', 'preset'] as const).flatMap((key) => {
+    const was = chosen[key];
+    if (was === state[key]) return [];
+    return [`${partLabel(key)}: prints ${partWords(key, was, state.unit)}, the last that held`];
+  });
+  return [...figures, ...choices];
+}
+
+const near = (was: number, now: number | undefined): boolean =>
+  now !== undefined && Math.abs(was - now) < same;
+
+const worded = (field: FieldKey, value: number, { unit }: TableState): string => {
+  if (field === 'style.flareFraction') return writeValue(field, value, unit);
+  return field === 'card.shoulderSlope'
+    ? `${writeValue(field, value, unit)}°`
+    : formatWithUnit(value, unit);
+};
