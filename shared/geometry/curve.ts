@@ -92,6 +92,10 @@ export function segmentLength(segment: Segment): number {
   return adaptive(segment, 0, 1, gauss(segment, 0, 1), 12);
 }
 
+/** Length of a gentle stretch in two halves, mm: within 1e-7 where it turns by less than 60 degrees. */
+export const gentleLength = (segment: Cubic): number =>
+  gauss(segment, 0, 0.5) + gauss(segment, 0.5, 1);
+
 /** Length of a path, mm. */
 export const pathLength = (path: Path): number =>
   path.reduce((sum, segment) => sum + segmentLength(segment), 0);
@@ -239,6 +243,8 @@ export function crossingsOfLine(segment: Segment, from: Point, to: Point): reado
   if (segment.kind === 'line') return rootsInUnit(0, 0, h3 - h0, h0);
   const h1 = height(segment.c1);
   const h2 = height(segment.c2);
+  // A curve lies within its handles: all on one side, it crosses nowhere.
+  if (Math.min(h0, h1, h2, h3) > 0 || Math.max(h0, h1, h2, h3) < 0) return [];
   return rootsInUnit(h3 - 3 * h2 + 3 * h1 - h0, 3 * (h2 - 2 * h1 + h0), 3 * (h1 - h0), h0);
 }
 

@@ -31,6 +31,8 @@ export type HalfInputs = {
   readonly sideHelps: boolean;
   /** Slope (dy/dx) at which the waist seam arrives at the side; the half's own square where absent. */
   readonly seamSlope?: number;
+  /** An earlier drawing of the same half to start from. */
+  readonly from?: Half;
   /** Lengths along the front's side seam from the waist: the back is trued to them. */
   readonly trueTo?: SideArcs;
 };
@@ -56,6 +58,7 @@ export type Half = {
   /** Axes of the darts of the middle, from the centre out, and the heights of their tips. */
   readonly dartAxes: readonly number[];
   readonly dartTips: readonly number[];
+  readonly held: Round['held'];
 };
 
 /** Height of a slanting level at a distance from the centre line. */
@@ -117,6 +120,8 @@ export function drawHalf(inputs: HalfInputs): Half | undefined {
     const next = nextRound(inputs, darts, suppression.side, round, count < dampedFrom ? 1 : 0.5);
     const change = Math.max(
       Math.abs(next.gap.seam - round.gap.seam),
+      Math.abs(next.seam.to.x - round.seam.to.x),
+      Math.abs(next.seam.to.y - round.seam.to.y),
       ...sideLevels.map((level) => Math.abs(next.heights[level] - round.heights[level])),
     );
     settled =
@@ -139,6 +144,7 @@ export function drawHalf(inputs: HalfInputs): Half | undefined {
     dartCount: inputs.dartCount,
     dartAxes: round.axes,
     dartTips: darts.tips,
+    held: round.held,
   };
 }
 
@@ -165,7 +171,11 @@ function widthsAt(
 }
 
 function firstRound(inputs: HalfInputs, darts: DartPlan, waist: number): Round {
-  const { levels, quarters } = inputs;
+  const { levels, quarters, from } = inputs;
+  if (from && from.dartCount === inputs.dartCount) {
+    const { heights, dartAxes: axes, line, seam, gap, held } = from;
+    return { heights, axes, line, seam, gap, held };
+  }
   return {
     heights: levels,
     axes: darts.shares.map(() => inputs.axis),

@@ -132,21 +132,35 @@ function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefi
     axis: widths.back.underbust / 2,
     dartTip: tip(backLonger),
   };
-  const draw = (count: DartCounts, seamSlope?: number): Drawn | undefined => {
+  const draw = (count: DartCounts, last?: Drawn, seamSlope?: number): Drawn | undefined => {
     const slope = seamSlope === undefined ? {} : { seamSlope };
-    const front = drawHalf({ ...frontInputs, dartCount: count.front, ...slope });
+    const from = (half: Half | undefined): Pick<HalfInputs, 'from'> => (half ? { from: half } : {});
+    const front = drawHalf({
+      ...frontInputs,
+      dartCount: count.front,
+      ...slope,
+      ...from(last?.front),
+    });
     const back =
       front &&
-      drawHalf({ ...backInputs, dartCount: count.back, ...slope, trueTo: sideArcs(front) });
+      drawHalf({
+        ...backInputs,
+        dartCount: count.back,
+        ...slope,
+        ...from(last?.back),
+        trueTo: sideArcs(front),
+      });
     return front && back ? { front, back } : undefined;
   };
   const first = draw({ front: 1, back: 1 });
   if (!first) return undefined;
   const count = { front: dartCount(first.front, inputs), back: dartCount(first.back, inputs) };
   let slope = meanSlope(first);
+  let last = first;
   for (let round = 0; round < roundsAtMost; round += 1) {
-    const drawn = draw(count, slope);
+    const drawn = draw(count, last, slope);
     if (!drawn) return undefined;
+    last = drawn;
     const next = meanSlope(drawn);
     // A hundredth of a degree: the corners of the seam are proven to two degrees.
     if (Math.abs(next - slope) < 1.7e-4) return { ...drawn, contour };

@@ -22,13 +22,22 @@ const hangsOn: { readonly [K in StyleKey]?: readonly string[] } = {
   floorClearance: ['style.kneeLevel', 'style.heelHeight', 'card.waistToFloor'],
 };
 
-/** Why the bounds are where they are, for those where a number alone does not say it. */
-const because: { readonly [K in StyleKey]?: string } = {
-  neckDepth: ' The centre may not lie above the peak, and stays above the bust point.',
-  kneeFinished:
-    ' Less would not close round both knees, or would cut in too steeply under the hip: raise it, or raise the knee seam’s girth by moving the seam.',
-  flareLength: ' A longer flare would lie on the floor: shorten it, or set higher heels.',
-  dartLength: ' The back dart is longer and must end above the hip.',
+/** Why a bound is where it is, below and above, for those where a number alone does not say it. */
+const because: {
+  readonly [K in StyleKey]?: { readonly less?: string; readonly more?: string };
+} = {
+  neckDepth: {
+    less: ' The centre may not lie above the peak.',
+    more: ' The centre stays above the bust point.',
+  },
+  kneeFinished: {
+    less: ' Less would not close round both knees, or would cut in too steeply under the hip: widen it, or move the knee seam.',
+    more: ' More would be wider than the hip, and the flare would hardly show: narrow it.',
+  },
+  flareLength: {
+    more: ' A longer flare would lie on the floor: shorten it, or set higher heels.',
+  },
+  dartLength: { more: ' The back dart is longer and must end above the hip.' },
 };
 
 const valueOf = (style: StyleCard, key: StyleKey): number | undefined => {
@@ -68,7 +77,7 @@ function checkLimit(
     error({
       code: 'out-of-range',
       ...parts,
-      said: said`${label} ${worded(key, value)} must lie between ${worded(key, min)} and ${worded(key, max)} on this body: change it, or leave it open.${because[key] ?? ''}`,
+      said: said`${label} ${worded(key, value)} must lie between ${worded(key, min)} and ${worded(key, max)} on this body: change it, or leave it open.${because[key]?.[value < min ? 'less' : 'more'] ?? ''}`,
     }),
   ];
 }

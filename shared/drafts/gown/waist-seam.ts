@@ -1,4 +1,4 @@
-import { crossingsOfLine, pointAt, segmentLength } from '../../geometry/curve.ts';
+import { crossingsOfLine, gentleLength, pointAt } from '../../geometry/curve.ts';
 import { type Cubic, cubic } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
 
@@ -27,7 +27,7 @@ export function closedSeam(length: number, y: number, fall: number, slope: numbe
   };
   let width = length;
   for (let i = 0; i < 8; i += 1) {
-    const short = length - segmentLength(drawn(width));
+    const short = length - gentleLength(drawn(width));
     width += short;
     if (Math.abs(short) < 1e-9) break;
   }
