@@ -121,10 +121,58 @@ export function checkCard(taken: CardInProgress): readonly Problem[] {
   ];
   if (alone.length > 0) return alone;
   const card = fullCard(taken);
+  const found = together(card);
+  if (!found.some(isError)) return found;
+  const wrongWayRound = exchanged(card);
+  return wrongWayRound === undefined ? blamed(found, card) : [wrongWayRound];
+}
+
+/** What is wrong or unlikely between the measures of a card that are right by themselves, errors first. */
+function together(card: MeasureCard): readonly Problem[] {
   const body = completeCard(card);
   return oncePerPair([
     ...agreements.flatMap((agreement) => checkAgreement(body, agreement)),
     ...shapeProblems(body),
     ...girthWarnings(card),
-  ]).toSorted((a, b) => Number(a.severity === 'warning') - Number(b.severity === 'warning'));
+  ]).toSorted((a, b) => Number(isError(b)) - Number(isError(a)));
+}
+
+const isError = ({ severity }: Problem): boolean => severity === 'error';
+
+/** Two measures typed in each other's fields: exchanged, nothing on the card is even unusual. */
+function exchanged(card: MeasureCard): Problem | undefined {
+  for (const { larger, smaller, half } of agreements) {
+    const [more, less] = [card[larger], card[smaller]];
+    if (half === true || more === undefined || less === undefined || more >= less) continue;
+    const other = { ...card, [larger]: less, [smaller]: more };
+    if ([larger, smaller].some((key) => checkMeasure(key, other[key]).length > 0)) continue;
+    if (together(other).length > 0) continue;
+    return error({
+      code: 'disagree',
+      field: `card.${smaller}`,
+      with: [`card.${larger}`],
+      said: said`${measureGuide[smaller].label} ${mm(less)} is more than ${measureGuide[larger].label.toLowerCase()} ${mm(more)}: are the two the wrong way round? If not, measure both again.`,
+    });
+  }
+  return undefined;
+}
+
+/** The message stands by the measure that most of the disagreements have in common: it is the likely slip. */
+function blamed(problems: readonly Problem[], card: MeasureCard): readonly Problem[] {
+  const fieldsOf = ({ field, with: others }: Problem): readonly string[] => [
+    field,
+    ...(others ?? []),
+  ];
+  const named = problems.filter(isError).flatMap(fieldsOf);
+  const times = (field: string): number => named.filter((each) => each === field).length;
+  const wasTaken = new Set(Object.keys(card).map((key) => `card.${key}`));
+  return problems.map((problem) => {
+    if (!isError(problem)) return problem;
+    const fields = fieldsOf(problem);
+    const likeliest = fields
+      .filter((field) => wasTaken.has(field))
+      .reduce((best, field) => (times(field) > times(best) ? field : best), problem.field);
+    if (likeliest === problem.field) return problem;
+    return { ...problem, field: likeliest, with: fields.filter((field) => field !== likeliest) };
+  });
 }

@@ -60,6 +60,10 @@ const hasThousands = (text: string): boolean =>
 
 const example = (unit: Unit): string => (unit === 'in' ? '36 1/2' : '92.7');
 
+/** An o for a nought or an l for a one slips in easily; the maker is shown what was read. */
+const lettersIn = (text: string, unit: Unit): Said =>
+  said`Letters in the figure: “${text.slice(0, 24)}”. Type it in figures only, such as ${example(unit)}, with in, cm or mm after it if you like.`;
+
 const fractionNumber = /^(-?)(?:(\d{1,9})[ -])?(\d{1,9})\/(\d{1,9})$/u;
 const decimalNumber = /^-?(?:\d{1,9}(?:[.,]\d{0,9})?|[.,]\d{1,9})$/u;
 
@@ -86,6 +90,7 @@ function readNumber(
     return { value: (sign === '-' ? -1 : 1) * (Number(whole ?? 0) + part) };
   }
   if (decimalNumber.test(text)) return { value: Number(text.replace(',', '.')) };
+  if (/\d/u.test(text) && /\p{L}/u.test(text)) return { said: lettersIn(text, unit) };
   return {
     said: said`This is not a length: type a number such as ${example(unit)}, with in, cm or mm after it if you like.`,
   };
@@ -108,6 +113,8 @@ export function parseLength(typed: string, unit: Unit): ParsedLength {
   const suffix = parts?.[2]?.replace(/\.$/u, '') ?? unit;
   const factor = millimetresPer[suffix];
   if (factor === undefined) {
+    // No unit is so short and set so close: `39o` was meant as a figure throughout.
+    if (/\d[a-z]{1,2}$/u.test(text) && suffix.length < 3) return refuse(lettersIn(text, unit));
     return refuse(
       said`“${suffix.slice(0, 12)}” is not a unit known here: use in, cm or mm, such as ${example(unit)} ${unit}.`,
     );

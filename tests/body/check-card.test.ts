@@ -136,6 +136,33 @@ describe('measures that must agree', () => {
     );
   });
 
+  it.each<[string, CardInProgress, string]>([
+    [
+      'bust and under-bust',
+      { bustGirth: 770, underbustGirth: 920 },
+      'error card.underbustGirth: Under-bust 92.0 cm is more than bust 77.0 cm: are the two the wrong way round? If not, measure both again.',
+    ],
+    [
+      'waist and hip',
+      { waistGirth: 990, hipGirth: 800 },
+      'error card.waistGirth: Waist 99.0 cm is more than hip 80.0 cm: are the two the wrong way round? If not, measure both again.',
+    ],
+    [
+      'the lengths to bust point and under-bust',
+      { sideNeckToBustPoint: 345, sideNeckToUnderbust: 265 },
+      'error card.sideNeckToBustPoint: Side neck to bust point 34.5 cm is more than side neck to under-bust 26.5 cm: are the two the wrong way round? If not, measure both again.',
+    ],
+  ])('ask once whether %s were exchanged', (_case, change, said) => {
+    expect(heard({ ...middleBody, ...change })).toEqual([said]);
+  });
+
+  it('blame the measure that disagrees with most of the others', () => {
+    const hip = errors({ ...middleBody, hipGirth: 1400 });
+    expect(hip.length).toBeGreaterThan(1);
+    expect(new Set(hip.map((each) => each.field))).toEqual(new Set(['card.hipGirth']));
+    expect(speak(hip[0]?.said ?? [], 'cm')).toContain('hip 140.0 cm');
+  });
+
   it('name the measure that was taken where the other is an estimate', () => {
     const [problem] = errors({ ...middleBody, waistToFloor: 850, waistToHip: 290 });
     expect(problem?.field).toBe('card.waistToHip');

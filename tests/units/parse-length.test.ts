@@ -62,7 +62,10 @@ describe('a length as people type it', () => {
     ['cm', 'cm', /not a length/],
     ['--3', 'cm', /not a length/],
     ['9'.repeat(40), 'cm', /not a length/],
-    ['1e5', 'cm', /not a length/],
+    ['1e5', 'cm', /Letters in the figure: “1e5”/],
+    ['39o', 'in', /Letters in the figure: “39o”.*36 1\/2/],
+    ['36 l/2', 'in', /Letters in the figure/],
+    ['o.5', 'cm', /Letters in the figure/],
     ['NaN', 'cm', /not a unit/],
   ])('%j is refused with the remedy', (typed, unit, message) => {
     expect(read(typed, unit)).toMatch(message);

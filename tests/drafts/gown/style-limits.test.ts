@@ -120,6 +120,14 @@ describe('a style that cannot be drawn', () => {
     expect(heard({ kneeFinished: 600 })[0]).toMatch(/^error style.kneeFinished: .*both knees/);
   });
 
+  it('says only why it is too much, or why it is too little', () => {
+    expect(heard({ kneeFinished: 600 })[0]).not.toMatch(/More/);
+    expect(heard({ kneeFinished: 1600 })[0]).toMatch(/More would be wider than the hip/);
+    expect(heard({ kneeFinished: 1600 })[0]).not.toMatch(/Less/);
+    expect(heard({ neckDepth: 100 })[0]).toMatch(/above the peak/);
+    expect(heard({ neckDepth: 100 })[0]).not.toMatch(/bust point/);
+  });
+
   it('is refused where ease would make the under-bust the larger', () => {
     const slight = completeCard({ ...middleBody, underbustGirth: 890 });
     const [problem] = checkStyle(
