@@ -86,7 +86,7 @@ function adaptive(segment: Cubic, t0: number, t1: number, whole: number, depth: 
   return adaptive(segment, t0, mid, left, depth - 1) + adaptive(segment, mid, t1, right, depth - 1);
 }
 
-/** Length of a stretch, mm, within 1e-6: eight-point Gauss-Legendre, halved until two depths agree. */
+/** Length of a stretch, mm, within 1e-6 where it has no cusp: eight-point Gauss-Legendre, halved until two depths agree. */
 export function segmentLength(segment: Segment): number {
   if (segment.kind === 'line') return distance(segment.from, segment.to);
   return adaptive(segment, 0, 1, gauss(segment, 0, 1), 12);

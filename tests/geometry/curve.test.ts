@@ -58,7 +58,7 @@ describe('the length of a seam line', () => {
       fc.property(curve, fc.double({ min: 0.01, max: 0.99, noNaN: true }), (segment, t) => {
         const [before, after] = splitSegment(segment, t);
         const parts = segmentLength(before) + segmentLength(after);
-        expect(Math.abs(parts - segmentLength(segment))).toBeLessThan(1e-4);
+        expect(Math.abs(parts - segmentLength(segment))).toBeLessThan(1e-3);
       }),
     );
   });
