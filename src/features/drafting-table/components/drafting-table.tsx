@@ -1,5 +1,6 @@
 import { useDeferredValue, useRef, useState, type Dispatch, type ReactNode } from 'react';
 
+import { useCalm } from '../../../lib/use-calm.ts';
 import { useMedia } from '../../../lib/use-media.ts';
 import { Tabs, type Tab } from '../../../ui/tabs.tsx';
 import type { Bench, BenchAction } from '../bench.ts';
@@ -39,19 +40,21 @@ export const DraftingTable = (props: DraftingTableProps) => {
   useUndoKeys(dispatch);
 
   const { draft } = state.drawn;
-  // The drawing follows at once; tables and sentences may come a moment later.
-  const told = useDeferredValue(draft);
+  // The drawing follows at once; cards, tables and sentences follow when the hand on a handle rests.
+  const dragging = bench.history.open?.gesture.startsWith('moved') === true;
+  const calm = useCalm(state, dragging);
+  const told = useDeferredValue(calm.drawn.draft);
   const waiting = <p className="text-slate">Here as soon as the ten measures are in.</p>;
 
   const measures: Tab<Panel> = {
     value: 'measures',
     label: 'Measures',
-    render: () => <MeasureCard state={state} dispatch={dispatch} tools={cardTools} />,
+    render: () => <MeasureCard state={calm} dispatch={dispatch} tools={cardTools} />,
   };
   const style: Tab<Panel> = {
     value: 'style',
     label: 'Style',
-    render: () => <StyleCard state={state} dispatch={dispatch} />,
+    render: () => <StyleCard state={calm} dispatch={dispatch} />,
   };
   const panels: readonly Tab<Panel>[] = [
     {
@@ -61,7 +64,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
         told === undefined ? (
           waiting
         ) : (
-          <StepsPanel draft={told} chosen={state.step} unit={state.unit} dispatch={dispatch} />
+          <StepsPanel draft={told} chosen={calm.step} unit={calm.unit} dispatch={dispatch} />
         ),
     },
     {
@@ -83,7 +86,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
     {
       value: 'pieces',
       label: 'Pieces',
-      render: () => (told === undefined ? waiting : <PiecesPanel draft={told} unit={state.unit} />),
+      render: () => (told === undefined ? waiting : <PiecesPanel draft={told} unit={calm.unit} />),
     },
   ];
   const besides = panels.some(({ value }) => value === state.panel) ? state.panel : 'proof';
@@ -105,7 +108,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
       ) : (
         <>
           <Drawing draft={draft} state={state} place={place} dispatch={dispatch} />
-          <Foot draft={draft} state={state} />
+          <Foot draft={calm.drawn.draft ?? draft} state={calm} />
         </>
       )}
     </div>
@@ -123,8 +126,8 @@ export const DraftingTable = (props: DraftingTableProps) => {
             ref={cards}
             className="w-[19rem] shrink-0 space-y-8 overflow-y-auto border-r border-rule bg-cloth px-4 py-4"
           >
-            <MeasureCard state={state} dispatch={dispatch} tools={cardTools} />
-            <StyleCard state={state} dispatch={dispatch} />
+            <MeasureCard state={calm} dispatch={dispatch} tools={cardTools} />
+            <StyleCard state={calm} dispatch={dispatch} />
           </div>
           {drawing}
           <div className="w-[21rem] shrink-0 border-l border-rule bg-cloth px-4 pt-4">

@@ -1,3 +1,5 @@
+import { memo } from 'react';
+
 import type { Draft } from '#shared/engine/draft.ts';
 import { speak } from '#shared/units/speak.ts';
 
@@ -6,7 +8,7 @@ import type { TableState } from '../table-state.ts';
 type FootProps = { readonly draft: Draft; readonly state: TableState };
 
 /** Under the drawing: whether it is that of the figures typed, what the knee allows, and each warning once. */
-export const Foot = ({ draft, state: { drawn, unit } }: FootProps) => {
+export const Foot = memo(function Foot({ draft, state: { drawn, unit } }: FootProps) {
   const faults = drawn.problems.filter((problem) => problem.severity === 'error');
   return (
     <div className="figures max-h-28 min-h-15 shrink-0 space-y-1 overflow-y-auto border-t border-rule px-4 py-2 text-sm sm:pl-10">
@@ -26,4 +28,4 @@ export const Foot = ({ draft, state: { drawn, unit } }: FootProps) => {
       <p className={draft.walking.caution ? '' : 'text-slate'}>{speak(draft.walking.said, unit)}</p>
     </div>
   );
-};
+});

@@ -1,9 +1,10 @@
-import { useReducer, useState, type ReactNode } from 'react';
+import { useMemo, useReducer, useState, type ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 
 import type { Gown, GownContent } from '#shared/api/gowns.ts';
 import { engineVersion } from '#shared/engine/draft-gown.ts';
 
+import { useCalm } from '../../../lib/use-calm.ts';
 import { Button } from '../../../ui/button.tsx';
 import { Dialog } from '../../../ui/dialog.tsx';
 import { Notice } from '../../../ui/notice.tsx';
@@ -71,6 +72,9 @@ export const GownTable = ({ gownId, start: opening, place, signIn }: GownTablePr
     await saver.flush();
     return saver.now().base;
   };
+  // Made anew where the work changed and not with every frame: it stands inside the measure card.
+  const calm = useCalm(table, history.open?.gesture.startsWith('moved') === true);
+  const cardTools = useMemo(() => <CardTools table={calm} dispatch={dispatch} />, [calm]);
   const { standing, message, current } = saving;
   const signedOut = standing === 'signed-out';
   return (
@@ -80,7 +84,7 @@ export const GownTable = ({ gownId, start: opening, place, signIn }: GownTablePr
         bench={state}
         dispatch={dispatch}
         place={gownId}
-        cardTools={<CardTools table={table} dispatch={dispatch} />}
+        cardTools={cardTools}
         heading={
           <>
             <nav aria-label="Places">

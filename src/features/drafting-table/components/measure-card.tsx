@@ -1,4 +1,4 @@
-import { useState, type Dispatch, type ReactNode } from 'react';
+import { memo, useState, type Dispatch, type ReactNode } from 'react';
 
 import { coreMeasures, furtherMeasures, type MeasureKey } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
@@ -19,7 +19,7 @@ type MeasureCardProps = {
 const everyMeasure = [...coreMeasures, ...furtherMeasures];
 
 /** The list of measures beside a body figure on which the current measure's tape is lit. */
-export const MeasureCard = ({ state, dispatch, tools }: MeasureCardProps) => {
+export const MeasureCard = memo(function MeasureCard({ state, dispatch, tools }: MeasureCardProps) {
   const [current, setCurrent] = useState<FieldKey>();
   const [all, setAll] = useState(false);
   const key = everyMeasure.find((each) => current === `card.${each}`);
@@ -94,4 +94,4 @@ export const MeasureCard = ({ state, dispatch, tools }: MeasureCardProps) => {
       </form>
     </section>
   );
-};
+});

@@ -1,3 +1,5 @@
+import { memo } from 'react';
+
 import type { Draft } from '#shared/engine/draft.ts';
 import { cuttingCautions } from '#shared/exports/cautions.ts';
 import { formatLength } from '#shared/units/format-length.ts';
@@ -8,7 +10,7 @@ import { asDrafted } from '../canvas/layout.ts';
 type PiecesPanelProps = { readonly draft: Draft; readonly unit: Unit };
 
 /** The pieces in words and figures: what the drawing shows, for those who do not see it. */
-export const PiecesPanel = ({ draft, unit }: PiecesPanelProps) => {
+export const PiecesPanel = memo(function PiecesPanel({ draft, unit }: PiecesPanelProps) {
   const { placed } = asDrafted(draft.pieces);
   const cloth = draft.pieces.reduce((sum, piece) => sum + piece.copies, 0);
   return (
@@ -33,7 +35,7 @@ export const PiecesPanel = ({ draft, unit }: PiecesPanelProps) => {
       <p className="pt-3 text-sm text-slate">{cuttingCautions}</p>
     </section>
   );
-};
+});
 
 function joins(piece: Draft['pieces'][number], draft: Draft): string[] {
   const partners = piece.edges.flatMap(({ joins: to }) =>

@@ -1,4 +1,4 @@
-import type { Dispatch } from 'react';
+import { memo, type Dispatch } from 'react';
 
 import type { EdgeRef } from '#shared/drafting/piece.ts';
 import type { Draft } from '#shared/engine/draft.ts';
@@ -22,7 +22,13 @@ type ProofPanelProps = {
 };
 
 /** The verdict first; the numbers it rests on under it. */
-export const ProofPanel = ({ draft, fresh, lit, unit, dispatch }: ProofPanelProps) => {
+export const ProofPanel = memo(function ProofPanel({
+  draft,
+  fresh,
+  lit,
+  unit,
+  dispatch,
+}: ProofPanelProps) {
   const { proof } = draft;
   const litRow = seamIndex(draft, lit);
   const [verdict, ...rest] = sentences(speak(proof.verdict, unit));
@@ -100,7 +106,7 @@ export const ProofPanel = ({ draft, fresh, lit, unit, dispatch }: ProofPanelProp
       </div>
     </section>
   );
-};
+});
 
 const sentences = (text: string): string[] => text.split(/(?<=\.) /);
 

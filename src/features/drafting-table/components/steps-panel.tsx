@@ -1,4 +1,4 @@
-import type { Dispatch } from 'react';
+import { memo, type Dispatch } from 'react';
 
 import type { Draft } from '#shared/engine/draft.ts';
 import type { Unit } from '#shared/units/said.ts';
@@ -14,7 +14,12 @@ type StepsPanelProps = {
 };
 
 /** How the draft came about, step by step; a chosen step shows what it drew. */
-export const StepsPanel = ({ draft, chosen, unit, dispatch }: StepsPanelProps) => {
+export const StepsPanel = memo(function StepsPanel({
+  draft,
+  chosen,
+  unit,
+  dispatch,
+}: StepsPanelProps) {
   const parts = [...new Set(draft.steps.map((step) => step.part))];
   const choose = (id: string | undefined) => dispatch({ type: 'step', step: id });
   return (
@@ -47,4 +52,4 @@ export const StepsPanel = ({ draft, chosen, unit, dispatch }: StepsPanelProps) =
       ))}
     </section>
   );
-};
+});

@@ -1,4 +1,4 @@
-import type { Dispatch } from 'react';
+import { memo, type Dispatch } from 'react';
 
 import { easeLevels, type StyleLength } from '#shared/drafts/gown/style-card.ts';
 import { styleHints, styleLabels } from '#shared/drafts/gown/style-labels.ts';
@@ -26,7 +26,7 @@ const circles = [
 ] as const;
 
 /** What the gown shall be; a figure left open takes the default that stands there in grey. */
-export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
+export const StyleCard = memo(function StyleCard({ state, dispatch }: StyleCardProps) {
   const style = state.drawn.draft?.style;
   const row = (key: StyleLength) => (
     <FigureField
@@ -113,4 +113,4 @@ export const StyleCard = ({ state, dispatch }: StyleCardProps) => {
       />
     </section>
   );
-};
+});

@@ -1,0 +1,106 @@
+import { chromium, type CDPSession, type Page } from '@playwright/test';
+import { z } from 'zod';
+
+/*
+ * Frame times while a handle is dragged for five seconds with the processor slowed down four times, read
+ * from a trace of the browser: BENCH_URL=http://127.0.0.1:4173 npx tsx tests/bench/drag.ts
+ */
+
+const address = process.env['BENCH_URL'] ?? 'http://127.0.0.1:4173';
+const slowdown = 4;
+const seconds = 5;
+
+const traceEvent = z.object({
+  name: z.string(),
+  ph: z.string(),
+  pid: z.number(),
+  tid: z.number(),
+  ts: z.number(),
+  dur: z.number().optional(),
+  tdur: z.number().optional(),
+  args: z.unknown(),
+});
+type TraceEvent = z.output<typeof traceEvent>;
+
+async function traced(devtools: CDPSession, act: () => Promise<void>): Promise<TraceEvent[]> {
+  const events: TraceEvent[] = [];
+  devtools.on('Tracing.dataCollected', ({ value }) => {
+    events.push(...value.flatMap((each) => traceEvent.safeParse(each).data ?? []));
+  });
+  const categories = 'toplevel,devtools.timeline,disabled-by-default-devtools.timeline';
+  await devtools.send('Tracing.start', { categories, transferMode: 'ReportEvents' });
+  await act();
+  const complete = new Promise((done) => devtools.once('Tracing.tracingComplete', done));
+  await devtools.send('Tracing.end');
+  await complete;
+  return events;
+}
+
+/** Swings a handle to and fro about where it lay, a move every sixtieth of a second. */
+async function drag(page: Page, name: string): Promise<number> {
+  const box = await page.getByRole('slider', { name }).boundingBox();
+  if (box === null) throw new Error(`There is no handle “${name}”.`);
+  const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+  await page.mouse.move(x, y);
+  await page.mouse.down();
+  const until = performance.now() + seconds * 1000;
+  let moves = 0;
+  while (performance.now() < until) {
+    await page.mouse.move(x + 14 * Math.sin(moves / 9), y);
+    moves += 1;
+    await new Promise((done) => setTimeout(done, 1000 / 60));
+  }
+  await page.mouse.up();
+  return moves;
+}
+
+/** Milliseconds the page's main thread worked for each frame it handed on. */
+function frameTimes(events: readonly TraceEvent[]): number[] {
+  const commits = events.filter(({ name }) => name === 'Commit').sort((a, b) => a.ts - b.ts);
+  const main = commits[0];
+  if (main === undefined) throw new Error('The trace holds no frame.');
+  const tasks = events.filter(
+    ({ name, pid, tid }) => name === 'RunTask' && pid === main.pid && tid === main.tid,
+  );
+  return commits.slice(1).map((commit, index) => {
+    const from = commits[index]?.ts ?? 0;
+    // A task counts for the frame it ends in: the one that commits is still running then.
+    const work = tasks.filter(({ ts, dur = 0 }) => {
+      const end = ts + dur;
+      return end > from + 1 && ts < commit.ts && (end <= commit.ts || ts >= from);
+    });
+    return work.reduce((sum, { tdur, dur = 0 }) => sum + (tdur ?? dur), 0) / 1000;
+  });
+}
+
+const browser = await chromium.launch({
+  executablePath: '/usr/bin/chromium',
+  args: process.getuid?.() === 0 ? ['--no-sandbox'] : [],
+});
+const page = await browser.newPage({ viewport: { width: 1280, height: 800 }, baseURL: address });
+await page.goto('/try');
+await page.getByRole('button', { name: 'Judith' }).click();
+await page.getByRole('group', { name: 'Drawing of the pieces' }).waitFor();
+await page.waitForLoadState('networkidle');
+const devtools = await page.context().newCDPSession(page);
+await devtools.send('Emulation.setCPUThrottlingRate', { rate: slowdown });
+let moves = 0;
+const events = await traced(devtools, async () => {
+  moves = await drag(page, 'Finished knee');
+});
+const times = frameTimes(events).sort((a, b) => a - b);
+const at = (share: number): number =>
+  Math.round((times[Math.floor((times.length - 1) * share)] ?? 0) * 100) / 100;
+process.stdout.write(
+  `${JSON.stringify({
+    name: `main thread a frame while a handle is dragged ${seconds} s at ${slowdown}x CPU slowdown`,
+    frames: times.length,
+    moves,
+    median: at(0.5),
+    p95: at(0.95),
+    most: at(1),
+    unit: 'ms',
+    against: 'one frame at 60 Hz, 16.67 ms',
+  })}\n`,
+);
+await browser.close();
