@@ -102,7 +102,3 @@ function easeOf(limits: StyleLimits, given: (key: StyleKey) => Draw | undefined)
   }
   return { ease };
 }
-
-/** A style card within this body's limits, each choice open half of the time. */
-export const styleArbitrary = (body: Body, levels: BodyLevels): fc.Arbitrary<StyleCard> =>
-  styleDraws.map((draws) => styleOn(draws, body, levels));
