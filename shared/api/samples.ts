@@ -13,7 +13,6 @@ export const sampleGown = z.object({
   style: styleCard,
   rules: houseRules,
 });
-export type SampleGown = z.output<typeof sampleGown>;
 
 export const listSamples = endpoint({
   method: 'GET',
