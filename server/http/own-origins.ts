@@ -11,16 +11,23 @@ type Address = {
   readonly port: number;
 };
 
-/** Whether nobody but people at this machine can reach a server. */
-export const isOnThisMachineAlone = ({ publicUrl, host }: Address): boolean =>
-  isLoopback(host) && (publicUrl === undefined || isLoopback(new URL(publicUrl).hostname));
+/** Whether nobody but people at this machine can reach a server: a proxy may stand on loopback for others. */
+export const isOnThisMachineAlone = ({
+  publicUrl,
+  host,
+  trustedProxies,
+}: Omit<Address, 'port'> & { readonly trustedProxies: number }): boolean =>
+  trustedProxies === 0 &&
+  isLoopback(host) &&
+  (publicUrl === undefined || isLoopback(new URL(publicUrl).hostname));
 
 /**
- * Addresses our own pages are opened under. On loopback all its names will do; else only what
+ * Addresses our own pages are opened under, as browsers write an origin: scheme, name and port. On loopback all its names will do; else only what
  * `PUBLIC_URL` says or, without it, the host itself.
  */
 export function ownOrigins(at: Address): readonly string[] {
-  const loopbacks = (port: string) => loopbackHosts.map((host) => `http://${host}${port}`);
+  const loopbacks = (port: string) =>
+    loopbackHosts.map((host) => new URL(`http://${host}${port}`).origin);
   if (at.publicUrl !== undefined) {
     const { origin, hostname, protocol, port } = new URL(at.publicUrl);
     const alsoLoopback = protocol === 'http:' && isLoopback(hostname);
@@ -29,6 +36,6 @@ export function ownOrigins(at: Address): readonly string[] {
   const named = at.host.includes(':') ? `[${at.host}]` : at.host;
   return [
     ...loopbacks(`:${at.port}`),
-    ...(isLoopback(at.host) ? [] : [`http://${named}:${at.port}`]),
+    ...(isLoopback(at.host) ? [] : [new URL(`http://${named}:${at.port}`).origin]),
   ];
 }

@@ -2,7 +2,6 @@ import { createHash } from 'node:crypto';
 import { DrizzlePostgreSQLAdapter } from '@lucia-auth/adapter-drizzle';
 import type { Request, Response } from 'express';
 import { generateIdFromEntropySize, Lucia } from 'lucia';
-import { verifyRequestOrigin } from 'oslo/request';
 import type { Database } from '../database/client.ts';
 import { accounts } from '../database/schema/accounts.ts';
 import { sessions } from '../database/schema/sessions.ts';
@@ -120,7 +119,3 @@ export function openSessions(database: Database, overHttps: boolean): Sessions {
       })),
   };
 }
-
-/** Whether a page of one of our own addresses sent a request. */
-export const isOwnOrigin = (origin: string, own: readonly string[]): boolean =>
-  verifyRequestOrigin(origin, [...own]);

@@ -74,6 +74,13 @@ describe('a page of somebody else’s', () => {
     },
   );
 
+  it('may not by another scheme at our own name', async () => {
+    for (const scheme of ['ftp:', 'https:']) {
+      const origin = server.address.replace('http:', scheme);
+      expect((await browser().send(signIn, wanted, {}, { origin })).status).toBe(403);
+    }
+  });
+
   it('nor may a cookie come without its page being told', async () => {
     const maker = await openMaker(server.address);
     const reply = await fetch(`${server.address}${signOut.path}`, {

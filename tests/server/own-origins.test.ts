@@ -20,7 +20,22 @@ describe('pages that are ours', () => {
   });
 });
 
+describe('a page at the port every browser leaves out', () => {
+  it('is told as browsers tell it', () => {
+    expect(ownOrigins({ ...at('workroom'), port: 80 })).toContain('http://workroom');
+    expect(ownOrigins({ ...at('127.0.0.1'), port: 80 })).toContain('http://localhost');
+    expect(ownOrigins(at('127.0.0.1', 'https://Gowns.example:443/'))).toEqual([
+      'https://gowns.example',
+    ]);
+  });
+});
+
 describe('the demo account', () => {
+  it('is closed where a proxy on this machine may let others in', () => {
+    const behind = { ...at('127.0.0.1'), trustedProxies: 1 };
+    expect(isOnThisMachineAlone(behind)).toBe(false);
+  });
+
   it.each([
     [at('127.0.0.1'), true],
     [at('localhost', 'http://127.0.0.1:4173'), true],
@@ -28,6 +43,6 @@ describe('the demo account', () => {
     [at('127.0.0.1', 'https://gowns.example'), false],
     [at('127.0.0.1.elsewhere.example'), false],
   ])('%o: only where nobody else can come by (%s)', (address, alone) => {
-    expect(isOnThisMachineAlone(address)).toBe(alone);
+    expect(isOnThisMachineAlone({ ...address, trustedProxies: 0 })).toBe(alone);
   });
 });
