@@ -49,7 +49,7 @@ export function buildApp(parts: Parts): Express {
     await ping(parts.database);
     response.setHeader('Cache-Control', 'no-store').json({ name: 'ellwand', database: 'answers' });
   });
-  app.use('/api', originCheck(parts.origins), express.json({ limit: bodyLimit }));
+  app.use('/api', originCheck(parts.origins), express.json({ limit: bodyLimit, strict: false }));
   app.use(samplesRouter(parts.database));
   app.use(draftsRouter(parts.limits));
   app.use(printRouter(parts.limits, parts.printer));

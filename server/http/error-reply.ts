@@ -41,6 +41,40 @@ function fromParser(error: unknown): RefusalError | undefined {
   return undefined;
 }
 
+/** What the file server and the body parser set for the reply that did not come about. */
+const ofAnotherReply = [
+  'Content-Type',
+  'Content-Length',
+  'Content-Encoding',
+  'Content-Disposition',
+  'Accept-Ranges',
+  'ETag',
+  'Last-Modified',
+];
+
+const property = (error: unknown, key: string): unknown =>
+  typeof error === 'object' && error !== null && Object.hasOwn(error, key)
+    ? Reflect.get(error, key)
+    : undefined;
+
+/** Headers of a request that do not fit what they came with, as Express and its parts tell it by a status. */
+function fromHeaders(error: unknown): RefusalError | undefined {
+  const status = property(error, 'status') ?? property(error, 'statusCode');
+  const code = property(error, 'code');
+  if (typeof code === 'string' && /^(Z_|ERR_?_?(BROTLI|ZSTD))/.test(code)) {
+    return new RefusalError('not-json', 'The request is not packed as it says it is.');
+  }
+  if (typeof status !== 'number' || status < 400 || status > 499) return undefined;
+  if (status === 416) {
+    return new RefusalError('no-such-range', 'The file has no such range: ask for less of it.');
+  }
+  if (status === 412) {
+    return new RefusalError('precondition-failed', 'The file is another than the request expects.');
+  }
+  if (status === 404) return new RefusalError('not-found', 'There is nothing at this address.');
+  return new RefusalError('not-json', 'The request cannot be read.');
+}
+
 /** A path that cannot be decoded is a stranger's mistake, not a bug. */
 function fromPath(error: unknown): RefusalError | undefined {
   return error instanceof URIError
@@ -70,7 +104,7 @@ export const errorReply =
     const known =
       error instanceof RefusalError
         ? error
-        : (fromParser(error) ?? fromPath(error) ?? fromDatabase(error));
+        : (fromParser(error) ?? fromPath(error) ?? fromDatabase(error) ?? fromHeaders(error));
     const id = requestIdOf(response);
     if (known === undefined) log.error({ id, ...traceOf(error) }, 'fault');
     const refused =
@@ -78,6 +112,7 @@ export const errorReply =
     const { problems, retryAfterSeconds, allow, current } = refused.details;
     if (retryAfterSeconds !== undefined) response.setHeader('Retry-After', retryAfterSeconds);
     if (allow !== undefined) response.setHeader('Allow', allow);
+    for (const each of ofAnotherReply) response.removeHeader(each);
     response.setHeader('Cache-Control', 'no-store');
     const body: Refusal = {
       code: refused.code,

@@ -22,13 +22,26 @@ const contentSecurityPolicy = {
   },
 };
 
+/** Nothing here looks, listens, pays or asks where somebody is. */
+const permissionsPolicy = [
+  ...['accelerometer', 'bluetooth', 'camera', 'display-capture', 'geolocation', 'gyroscope'],
+  ...['hid', 'magnetometer', 'microphone', 'midi', 'payment', 'serial', 'usb'],
+]
+  .map((feature) => `${feature}=()`)
+  .join(', ');
+
 export const securityHeaders = (options: {
   readonly overHttps: boolean;
   readonly strict: boolean;
-}): RequestHandler =>
-  helmet({
+}): RequestHandler => {
+  const others = helmet({
     contentSecurityPolicy: options.strict ? contentSecurityPolicy : false,
     strictTransportSecurity: options.overHttps,
     referrerPolicy: { policy: 'no-referrer' },
     xFrameOptions: { action: 'deny' },
   });
+  return (request, response, next) => {
+    response.setHeader('Permissions-Policy', permissionsPolicy);
+    others(request, response, next);
+  };
+};

@@ -10,7 +10,13 @@ export const keptText = (most: number) =>
     .max(most)
     .transform((text) => text.replace(unkeepable, '\ufffd'));
 
-/** A title or name in a list: at most 80 letters, and at least one. */
+/** Characters that would break a line, or turn round what stands beside a name in a list. */
+const unruly = /[\p{Cc}\p{Bidi_Control}]+/gu;
+/** A character with something to see. */
+const seen = /[^\p{C}\p{Z}\p{Default_Ignorable_Code_Point}]/u;
+
+/** A title or name in a list: at most 80 letters, and at least one that can be seen. */
 export const givenName = keptText(80)
-  .transform((text) => text.trim())
+  .transform((text) => text.replace(unruly, ' ').trim())
+  .transform((text) => (seen.test(text) ? text : ''))
   .pipe(z.string().min(1));

@@ -23,6 +23,9 @@ export const refusalCodes = [
   'method-not-allowed',
   'wrong-media-type',
   'too-large',
+  /** A file was asked for in a range, or on a condition, that it does not meet. */
+  'no-such-range',
+  'precondition-failed',
   'too-many-requests',
   'busy',
   /** The database does not answer for the moment: send the same again. */

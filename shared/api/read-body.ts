@@ -80,6 +80,11 @@ const wrongType = (field: string, expected: string, missing: boolean): Said => {
 function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
   const name = called(field);
   if (issue.code === 'invalid_type') return wrongType(field, issue.expected, value === undefined);
+  if (issue.code === 'too_big' && issue.origin !== 'string') {
+    return issue.origin === 'array'
+      ? said`${name} has too many entries: keep it to ${Number(issue.maximum)}.`
+      : said`${name} must be at most ${Number(issue.maximum)}.`;
+  }
   if (issue.code === 'too_big') {
     return said`${name} is too long: keep it to ${Number(issue.maximum)} letters.`;
   }

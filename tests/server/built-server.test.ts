@@ -76,6 +76,20 @@ describe('the built server, with production packages alone, from another working
     },
   );
 
+  it.each([
+    [416, 'range', 'bytes=99999999-'],
+    [412, 'if-match', '"another"'],
+    [412, 'if-unmodified-since', 'Thu, 01 Jan 1970 00:00:00 GMT'],
+  ])('says %i where the file does not meet %s', async (status, header, value) => {
+    const [asset] = await readdir(join(folder, 'dist/client/assets'));
+    for (const path of [`/assets/${asset ?? ''}`, '/']) {
+      const reply = await fetch(`${address}${path}`, { headers: { [header]: value } });
+      expect(reply.status).toBe(status);
+      expect(reply.headers.get('content-type')).toContain('json');
+      expect(reply.headers.get('cache-control')).toBe('no-store');
+    }
+  });
+
   it('reads its samples from the database', async () => {
     const reply = await fetch(`${address}/api/samples`);
     expect(await reply.text()).toContain('tamsin');

@@ -29,6 +29,7 @@ describe('what cannot be saved is refused by field', () => {
 
   it.each([
     ['no title', { title: '  ' }, 'title', /too short: give at least 1 letter\./],
+    ['a title nobody sees', { title: '\u200b\u2060\u115f ' }, 'title', /at least 1 letter\./],
     ['an endless title', { title: 'x'.repeat(81) }, 'title', /80 letters/],
     ['no number of its own', { saveId: 'first' }, 'saveId', /UUID/],
     ['nothing on the table', { content: undefined }, 'content', /missing/],
@@ -38,6 +39,23 @@ describe('what cannot be saved is refused by field', () => {
     expect(code).toBe('bad-input');
     expect(problems?.[0]?.field).toBe(field);
     expect(message).toMatch(words);
+  });
+
+  it('a version no number counts to, as a number', async () => {
+    const gown = await newGown(maker);
+    const { message } = await maker.refused(422, saveGown, save(1e300), gown);
+    expect(message).toMatch(/“baseVersion” must be at most \d+\./);
+  });
+
+  it('a title that would turn its list round is kept without what turns it', async () => {
+    const title = 'Gala\u202e gown\n\u2066of\u2069 Judith';
+    const { id } = await maker.call(createGown, {
+      saveId: randomUUID(),
+      title,
+      content: content(),
+    });
+    const { gowns } = await maker.call(listGowns, undefined);
+    expect(gowns.find((each) => each.id === id)?.title).toBe('Gala  gown of  Judith');
   });
 
   it('a measure that is no number, by the measure’s own name', async () => {

@@ -18,6 +18,7 @@ describe('every reply tells the browser what it may not do', () => {
     expect(policy).toContain("frame-ancestors 'none'");
     expect(headers.get('x-content-type-options')).toBe('nosniff');
     expect(headers.get('referrer-policy')).toBe('no-referrer');
+    expect(headers.get('permissions-policy')).toMatch(/camera=\(\).*geolocation=\(\)/);
     expect(headers.get('x-powered-by')).toBeNull();
     expect(headers.get('x-request-id')).toMatch(/^[0-9a-f-]{36}$/);
   });

@@ -1,3 +1,4 @@
+import { brotliCompressSync, gzipSync } from 'node:zlib';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { refusal } from '#shared/api/problem-codes.ts';
 import { speak } from '#shared/units/speak.ts';
@@ -26,8 +27,26 @@ describe('what cannot be read is refused before it is looked at', () => {
     expect(message).not.toContain('Secret');
   });
 
-  it('a body that is only a number', async () => {
-    expect((await refused(await draft('17'), 400)).code).toBe('not-json');
+  it.each(['null', '17', '"card"', '[]'])('a body that is only %s, as what it is', async (body) => {
+    const { code, message } = await refused(await draft(body), 422);
+    expect(code).toBe('bad-input');
+    expect(message).toMatch(/^The request must be an object/);
+  });
+
+  it.each([
+    ['gzip', '{"card": {}}'],
+    ['br', '{"card": {}}'],
+    ['deflate', '{"card": {}}'],
+    ['gzip', gzipSync('{"card": {}}').subarray(0, 20)],
+    ['br', brotliCompressSync('{"card": {}}').subarray(0, 6)],
+    ['zip', '{}'],
+  ])('a body that is not the %s it says it is', async (encoding, body) => {
+    const reply = await fetch(`${server.address}/api/drafts`, {
+      method: 'POST',
+      headers: { 'content-type': 'application/json', 'content-encoding': encoding },
+      body,
+    });
+    expect((await refused(reply, 400)).code).toBe('not-json');
   });
 
   it('a body over 64 kB', async () => {
