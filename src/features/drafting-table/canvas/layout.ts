@@ -17,6 +17,8 @@ export type Layout = {
   readonly placed: readonly Placed[];
   readonly frames: Readonly<Record<Side | 'flare', Point>>;
   readonly levels: readonly { readonly name: LevelName; readonly y: number }[];
+  /** Where the lines of the levels stop: a flare lies in a frame of its own, which they say nothing about. */
+  readonly levelsEnd: number;
   readonly box: Box;
 };
 
@@ -25,6 +27,12 @@ const gap = 90;
 
 /** Room between flares, mm. */
 const apart = 40;
+
+/** Further room before the flares, for the names of the levels at the end of their lines, mm. */
+const nameRoom = 140;
+
+/** The levels stop so far before the flares, mm. */
+const beforeFlares = 20;
 
 /** The pieces as they were drafted: each side in one frame, front, back and flare side by side. */
 export function asDrafted(pieces: readonly FinishedPiece[]): Layout {
@@ -37,27 +45,43 @@ export function asDrafted(pieces: readonly FinishedPiece[]): Layout {
   const [front, back, flare] = groups.map((group) => {
     const box = around(group.map(boxOf));
     const at = point(x - box.left, 0);
-    x += box.right - box.left + gap;
+    x += box.right - box.left + gap + (group === groups[1] ? nameRoom : 0);
     return { at, placed: group.map((piece) => place(piece, at)) };
   });
   const origin = point(0, 0);
-  return laid([...(front?.placed ?? []), ...(back?.placed ?? []), ...(flare?.placed ?? [])], {
+  const frames = {
     front: front?.at ?? origin,
     back: back?.at ?? origin,
     flare: flare?.at ?? origin,
-  });
+  };
+  return withFlares(
+    [...(front?.placed ?? []), ...(back?.placed ?? [])],
+    flare?.placed ?? [],
+    frames,
+  );
 }
 
 /** The pieces cut apart, as they lie in the SVG too, but with the flares so stacked that a screen shows all large. */
 export function asCut(pieces: readonly FinishedPiece[]): Layout {
   const placed = spread(pieces).placed.map(({ piece, translate }) => place(piece, translate));
   const bodies = placed.filter(({ piece }) => piece.part !== 'flare');
-  const flares = placed.filter(({ piece }) => piece.part === 'flare');
+  const flares = placed
+    .filter(({ piece }) => piece.part === 'flare')
+    .map(({ piece, at }) => place(piece, add(at, point(nameRoom, 0))));
   const origin = point(0, 0);
-  const frames = { front: origin, back: origin, flare: origin };
+  return withFlares(bodies, flares, { front: origin, back: origin, flare: origin });
+}
+
+/** Every gore in a place of its own, in so many columns that the whole is nearest to a square. */
+function withFlares(
+  bodies: readonly Placed[],
+  flares: readonly Placed[],
+  frames: Layout['frames'],
+): Layout {
+  const all = laid([...bodies, ...inColumns(flares, 1)], frames);
   return flares
     .map((_, index) => laid([...bodies, ...inColumns(flares, index + 1)], frames))
-    .reduce((best, each) => (side(each.box) < side(best.box) ? each : best), laid(placed, frames));
+    .reduce((best, each) => (side(each.box) < side(best.box) ? each : best), all);
 }
 
 /** Side of the square a box fits in. */
@@ -92,7 +116,9 @@ function laid(placed: readonly Placed[], frames: Layout['frames']): Layout {
     }
     return [];
   });
-  return { placed, frames, levels, box: around(placed.map((each) => each.box)) };
+  const flares = placed.filter(({ piece }) => piece.part === 'flare');
+  const levelsEnd = Math.min(...flares.map(({ box }) => box.left)) - beforeFlares;
+  return { placed, frames, levels, levelsEnd, box: around(placed.map((each) => each.box)) };
 }
 
 const moved = (box: Box, by: Point): Box => ({

@@ -1,7 +1,8 @@
 import type { Draft } from '#shared/engine/draft.ts';
-
-import type { Layout, Placed } from './layout.ts';
 import { levelTitles } from '#shared/exports/level-titles.ts';
+
+import type { Layout } from './layout.ts';
+import { pieceLabels, type PieceLabel } from './piece-labels.ts';
 import { rodWidth } from './rod.tsx';
 import { toScreen, type Size, type View } from './view.ts';
 
@@ -15,71 +16,68 @@ type LetteringProps = {
 };
 
 /** Names of levels and pieces, upright and the same size at every zoom. */
-export const Lettering = ({ draft, layout, view, size, named }: LetteringProps) => (
-  <g aria-hidden="true">
-    <g className="fill-brass text-[0.75rem]">
-      {spaced(layout.levels.map((level) => ({ ...level, y: level.y * view.scale + view.y }))).map(
-        ({ name, y }) =>
-          y > rodWidth + 12 &&
-          y < size.height && (
-            <text key={name} x={size.width - 8} y={y - 4} textAnchor="end" className="halo">
-              {levelTitles[name]}
-            </text>
-          ),
-      )}
+export const Lettering = ({ draft, layout, view, size, named }: LetteringProps) => {
+  const end = Math.min(size.width - 8, toScreen(view, { x: layout.levelsEnd, y: 0 }).x);
+  return (
+    <g aria-hidden="true">
+      <g className="fill-brass text-[0.75rem]">
+        {spaced(layout.levels.map((level) => ({ ...level, y: level.y * view.scale + view.y }))).map(
+          ({ name, y }) =>
+            y > rodWidth + 12 &&
+            y < size.height && (
+              <text key={name} x={end} y={y - 4} textAnchor="end" className="halo">
+                {levelTitles[name]}
+              </text>
+            ),
+        )}
+      </g>
+      {named &&
+        pieceLabels(layout, view, (piece) => faultOn(draft, piece)).map((label) => (
+          <PieceName key={label.piece} label={label} />
+        ))}
     </g>
-    {named &&
-      layout.placed.map((placed) => (
-        <PieceName
-          key={placed.piece.name}
-          placed={placed}
-          view={view}
-          fault={faultOn(draft, placed.piece.name)}
-        />
-      ))}
-  </g>
-);
-
-type PieceNameProps = {
-  readonly placed: Placed;
-  readonly view: View;
-  readonly fault: number | undefined;
+  );
 };
 
-const PieceName = ({ placed: { piece, box }, view, fault }: PieceNameProps) => {
-  const width = (box.right - box.left) * view.scale;
-  if (width < 80) return null;
-  const at = toScreen(view, {
-    x: (box.left + box.right) / 2,
-    y: box.top + (box.bottom - box.top) * (piece.part === 'middle' ? 0.45 : 0.5),
-  });
+const PieceName = ({ label }: { label: PieceLabel }) => {
+  const { title, cut, fault, small, at, hairline } = label;
+  const lines = [
+    ...title.map((text) => ({ text, look: 'fill-ink font-semibold' })),
+    ...(cut === undefined ? [] : [{ text: cut, look: 'fill-slate' }]),
+    ...(fault === undefined ? [] : [{ text: fault, look: 'fill-madder font-semibold' }]),
+  ];
   return (
-    <text className="halo text-[0.8125rem]" textAnchor="middle" x={at.x} y={at.y}>
-      <tspan className="fill-ink font-semibold" x={at.x}>
-        {width < 150 ? shortTitle(piece.title) : piece.title}
-      </tspan>
-      {width >= 90 && (
-        <tspan className="fill-slate" x={at.x} dy="1.3em">
-          {piece.cut}
-        </tspan>
+    <>
+      {hairline !== undefined && (
+        <path
+          d={`M${hairline.map(({ x, y }) => `${x} ${y}`).join('L')}`}
+          className="fill-none stroke-slate"
+          strokeWidth={0.75}
+        />
       )}
-      {fault !== undefined && (
-        <tspan className="fill-madder font-semibold" x={at.x} dy="1.3em">
-          {`proof ${fault} fails`}
-        </tspan>
-      )}
-    </text>
+      <text
+        className={`halo ${small ? 'text-[0.6875rem]' : 'text-[0.8125rem]'}`}
+        textAnchor="middle"
+        x={at.x}
+        y={at.y}
+      >
+        {lines.map(({ text, look }, index) => (
+          <tspan key={text} className={look} x={at.x} dy={index === 0 ? 0 : '1.25em'}>
+            {text}
+          </tspan>
+        ))}
+      </text>
+    </>
   );
 };
 
 /** The first line of the proof that fails on a piece, so that it stands beside the piece and not only in the table. */
-const faultOn = (draft: Draft, piece: string): number | undefined =>
-  draft.proof.lines.find((line) =>
+function faultOn(draft: Draft, piece: string): string | undefined {
+  const failing = draft.proof.lines.find((line) =>
     line.findings.some((each) => !each.holds && each.where.some((at) => at.piece === piece)),
-  )?.number;
-
-/** `Front top, centre panel` on a narrow piece: what follows the comma. */
-const shortTitle = (title: string): string => title.split(', ').at(-1) ?? title;
+  );
+  return failing && `proof ${failing.number} fails`;
+}
 
 /** Of names that would run into each other the upper one is kept. */
 function spaced<T extends { readonly y: number }>(levels: readonly T[]): T[] {

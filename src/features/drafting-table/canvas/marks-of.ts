@@ -1,14 +1,18 @@
 import type { Pen } from '#shared/exports/drawing.ts';
 import { chainOf, pens } from '#shared/exports/marks.ts';
 import { drawPiece } from '#shared/exports/piece-drawing.ts';
+import type { Point } from '#shared/geometry/point.ts';
 
 import type { Colours } from './colours.ts';
 import type { Layout } from './layout.ts';
-import { enlarged, traced, type Line } from './trace.ts';
+import { resized, traced, type Line } from './trace.ts';
+
+/** An arrowhead as it is printed, its tip first, and where its piece lies. */
+export type Arrowhead = { readonly corners: readonly Point[]; readonly at: Point };
 
 type Marks = {
   readonly strokes: ReadonlyMap<Pen, readonly Line[]>;
-  readonly areas: readonly Line[];
+  readonly arrowheads: readonly Arrowhead[];
 };
 
 /**
@@ -17,12 +21,11 @@ type Marks = {
  */
 export function marksOf(layout: Layout, allowances: boolean): Marks {
   const strokes = new Map<Pen, Line[]>();
-  const areas: Line[] = [];
+  const arrowheads: Arrowhead[] = [];
   for (const { piece, at } of layout.placed) {
     for (const mark of drawPiece(piece).marks) {
       if (mark.kind === 'area') {
-        const corners = enlarged(mark.corners);
-        areas.push(traced(chainOf([...corners, ...corners.slice(0, 1)]), at, true));
+        arrowheads.push({ corners: mark.corners, at });
       }
       if (mark.kind !== 'strokes' || mark.pen === pens.cut || mark.pen === pens.seam) continue;
       // Notches start at the cutting line: without it they would stand beside the piece.
@@ -31,7 +34,13 @@ export function marksOf(layout: Layout, allowances: boolean): Marks {
       strokes.set(mark.pen, [...(strokes.get(mark.pen) ?? []), ...lines]);
     }
   }
-  return { strokes, areas };
+  return { strokes, arrowheads };
+}
+
+/** An arrowhead's outline at so many pixels a millimetre. */
+export function headLine({ corners, at }: Arrowhead, scale: number): Line {
+  const sized = resized(corners, scale);
+  return traced(chainOf([...sized, ...sized.slice(0, 1)]), at, true);
 }
 
 /** A printing pen on screen: its greys become the page's colours, its millimetres pixels. */

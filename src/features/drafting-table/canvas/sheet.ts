@@ -6,7 +6,7 @@ import type { Point } from '#shared/geometry/point.ts';
 
 import type { Colours } from './colours.ts';
 import type { Layout } from './layout.ts';
-import { marksOf, shown } from './marks-of.ts';
+import { headLine, marksOf, shown, type Arrowhead } from './marks-of.ts';
 import { straight, traced, type Line } from './trace.ts';
 import type { Size, View } from './view.ts';
 
@@ -40,6 +40,7 @@ export function laySheet(canvas: HTMLCanvasElement): Sheet {
   scope.setup(canvas);
   scope.view.autoUpdate = false;
   const pieces = new scope.Layer();
+  const arrows = new scope.Layer();
   const lights = new scope.Layer();
   // Only now: a layer, unlike the items in it, has to be inserted into its project.
   scope.settings.insertItems = false;
@@ -62,12 +63,27 @@ export function laySheet(canvas: HTMLCanvasElement): Sheet {
     if (lines.length > 0) lay(layer, new scope.CompoundPath(lines.map(pathOf)), stroke);
   };
 
+  let arrowheads: { readonly heads: readonly Arrowhead[]; readonly colour: string } | undefined;
+  let scaled: { readonly of: unknown; readonly scale: number } | undefined;
+  /** Arrowheads are laid anew where the paper is looked at from nearer or further: they keep their size on screen. */
+  const layArrowheads = (scale: number): void => {
+    if (arrowheads === undefined || (scaled?.of === arrowheads && scaled.scale === scale)) return;
+    scaled = { of: arrowheads, scale };
+    arrows.removeChildren();
+    const { heads, colour } = arrowheads;
+    if (heads.length === 0) return;
+    const item = new scope.CompoundPath(heads.map((each) => pathOf(headLine(each, scale))));
+    item.fillColor = colour;
+    arrows.addChild(item);
+  };
+
   return {
     draw(layout, { colours, allowances }) {
       pieces.removeChildren();
+      const { levelsEnd } = layout;
       const { left, right } = layout.box;
       const levels = layout.levels.map(({ y }) =>
-        straight({ x: 2 * left - right, y }, { x: 2 * right - left, y }),
+        straight({ x: 2 * left - right, y }, { x: Math.min(levelsEnd, 2 * right - left), y }),
       );
       layAll(pieces, levels, { colour: colours.level, width: 1 });
       for (const { piece, at } of layout.placed) {
@@ -84,11 +100,7 @@ export function laySheet(canvas: HTMLCanvasElement): Sheet {
       }
       const marks = marksOf(layout, allowances);
       for (const [pen, lines] of marks.strokes) layAll(pieces, lines, shown(pen, colours));
-      if (marks.areas.length > 0) {
-        const heads = new scope.CompoundPath(marks.areas.map(pathOf));
-        heads.fillColor = colours.ink;
-        pieces.addChild(heads);
-      }
+      arrowheads = { heads: marks.arrowheads, colour: colours.ink };
     },
 
     light(layout, lit, colours) {
@@ -108,6 +120,7 @@ export function laySheet(canvas: HTMLCanvasElement): Sheet {
     },
 
     look(view) {
+      layArrowheads(view.scale);
       scope.view.matrix.set(view.scale, 0, 0, view.scale, view.x, view.y);
       scope.view.update();
     },

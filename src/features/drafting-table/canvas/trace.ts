@@ -1,7 +1,7 @@
 import type { Pair, SegmentParts } from 'paper/dist/paper-core.js';
 
 import type { Path } from '#shared/geometry/path.ts';
-import { add, scale, subtract, type Point } from '#shared/geometry/point.ts';
+import { add, distance, scale as times, subtract, type Point } from '#shared/geometry/point.ts';
 
 /** A line as paper takes it. */
 export type Line = { readonly segments: readonly SegmentParts[]; readonly closed: boolean };
@@ -29,9 +29,13 @@ export const straight = (from: Point, to: Point): Line => ({
   closed: false,
 });
 
-/** An arrowhead grown about its tip: 5 mm is plain to see on paper and lost on a screen. */
-export function enlarged(corners: readonly Point[]): readonly Point[] {
-  const tip = corners[0];
-  if (tip === undefined) return corners;
-  return corners.map((each) => add(tip, scale(subtract(each, tip), 2.4)));
+/** Length of an arrowhead on screen, pixels, and the longest it may become on the paper, mm. */
+const head = { shown: 9, longest: 45 };
+
+/** An arrowhead drawn out or in about its tip, so that it is plain to see at every zoom and never large. */
+export function resized(corners: readonly Point[], scale: number): readonly Point[] {
+  const [tip, wing] = corners;
+  if (tip === undefined || wing === undefined) return corners;
+  const long = Math.min(head.shown / scale, head.longest);
+  return corners.map((each) => add(tip, times(subtract(each, tip), long / distance(tip, wing))));
 }

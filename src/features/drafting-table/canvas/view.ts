@@ -12,12 +12,15 @@ export type Box = {
   readonly bottom: number;
 };
 
-/** Room the rod, the names of the levels and the tools keep free of pieces when the drawing is fitted. */
-const insetOf = ({ width }: Size) => ({
+/**
+ * Room the rod and the tools keep free of pieces when the drawing is fitted. A piece by itself stands clear
+ * of the tools, in one row or two; all pieces together may reach between them.
+ */
+const insetOf = ({ width }: Size, place: Place) => ({
   left: 40,
   top: 40,
-  right: width > 560 ? 76 : 16,
-  bottom: width > 560 ? 24 : 56,
+  right: 16,
+  bottom: width > 640 ? (place === 'middle' ? 64 : 24) : place === 'middle' ? 112 : 56,
 });
 
 const leastScale = 0.02;
@@ -38,7 +41,7 @@ export type Place = 'corner' | 'middle';
 
 /** The view in which a box on the paper just fills the canvas. */
 export function fitted(box: Box, size: Size, place: Place): View {
-  const inset = insetOf(size);
+  const inset = insetOf(size, place);
   const spare = place === 'corner' ? 0 : 0.5;
   const width = Math.max(40, size.width - inset.left - inset.right);
   const height = Math.max(40, size.height - inset.top - inset.bottom);

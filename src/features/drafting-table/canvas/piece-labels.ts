@@ -1,0 +1,131 @@
+import type { Point } from '#shared/geometry/point.ts';
+
+import type { Layout, Placed } from './layout.ts';
+import { shortTitle } from './short-title.ts';
+import { toScreen, type Box, type View } from './view.ts';
+
+/** What is lettered on a piece, pixels: middled on `at.x`, the first base line at `at.y`. */
+export type PieceLabel = {
+  readonly piece: string;
+  readonly title: readonly string[];
+  readonly cut?: string;
+  readonly fault?: string;
+  readonly small: boolean;
+  readonly at: Point;
+  /** From the name to its piece, where the name has no room on it. */
+  readonly hairline?: readonly [Point, Point];
+};
+
+type Words = Pick<PieceLabel, 'title' | 'cut' | 'fault' | 'small'>;
+
+/** Sizes of letters and lines, pixels; the width of a letter is a middling one of the typeface. */
+const large = { letter: 6.9, line: 17 };
+const small = { letter: 5.9, line: 14 };
+
+const between = 3;
+
+/** How far outside its piece a name is tried, one place after the other. */
+const away = [14, 28, 42, 56];
+
+/**
+ * A name for every piece at this zoom. First the cut line gives way, then the long title to the short one, then
+ * one line to two; where a piece is too small for any, its name stands beside it at the end of a hairline.
+ */
+export function pieceLabels(
+  layout: Layout,
+  view: View,
+  faultOf: (piece: string) => string | undefined,
+): readonly PieceLabel[] {
+  const boxes = layout.placed.map(({ box }) => onScreen(box, view));
+  const taken: Box[] = [];
+  return layout.placed.map((placed, index): PieceLabel => {
+    const { piece } = placed;
+    const box = boxes[index] ?? onScreen(placed.box, view);
+    const fault = faultOf(piece.name);
+    const within = ways(placed, fault).find((words) => fits(words, box));
+    if (within !== undefined) {
+      const share = piece.part === 'middle' ? 0.45 : 0.5;
+      const height = heightOf(within);
+      const at = {
+        x: (box.left + box.right) / 2,
+        y: box.top + (box.bottom - box.top) * share - height / 2 + lineOf(within) * 0.8,
+      };
+      taken.push(around(within, at));
+      return { piece: piece.name, ...within, at };
+    }
+    const words: Words = { title: [shortTitle(piece)], small: true, ...(fault && { fault }) };
+    const others = [...taken, ...boxes.filter((_, other) => other !== index)];
+    const place = beside(words, box, others);
+    taken.push(around(words, place.at));
+    return { piece: piece.name, ...words, ...place };
+  });
+}
+
+/** From the fullest lettering to the shortest. */
+function ways({ piece }: Placed, fault: string | undefined): readonly Words[] {
+  const brief = shortTitle(piece);
+  const [half = brief, ...rest] = brief.split(' ');
+  const also = fault === undefined ? {} : { fault };
+  return [
+    { title: [piece.title], cut: piece.cut, small: false, ...also },
+    { title: [brief], cut: piece.cut, small: false, ...also },
+    { title: [piece.title], small: false, ...also },
+    { title: [brief], small: false, ...also },
+    { title: [brief], small: true, ...also },
+    { title: [half, rest.join(' ')], small: true, ...also },
+  ];
+}
+
+const sizeOf = (words: Words) => (words.small ? small : large);
+const lineOf = (words: Words): number => sizeOf(words).line;
+
+const linesOf = ({ title, cut, fault }: Words): readonly string[] =>
+  [...title, cut, fault].filter((line) => line !== undefined);
+
+const widthOf = (words: Words): number =>
+  Math.max(...linesOf(words).map((line) => line.length)) * sizeOf(words).letter;
+
+const heightOf = (words: Words): number => linesOf(words).length * lineOf(words);
+
+const fits = (words: Words, box: Box): boolean =>
+  widthOf(words) + between <= box.right - box.left && heightOf(words) <= box.bottom - box.top;
+
+function around(words: Words, at: Point): Box {
+  const half = widthOf(words) / 2;
+  const top = at.y - lineOf(words) * 0.8;
+  return { left: at.x - half, right: at.x + half, top, bottom: top + heightOf(words) };
+}
+
+/** The nearest free place above, under or beside a piece, with a hairline to its middle. */
+function beside(
+  words: Words,
+  box: Box,
+  others: readonly Box[],
+): Pick<PieceLabel, 'at'> & {
+  readonly hairline: readonly [Point, Point];
+} {
+  const middle = { x: (box.left + box.right) / 2, y: (box.top + box.bottom) / 2 };
+  const half = widthOf(words) / 2;
+  const rise = lineOf(words) * 0.4;
+  const places = away.flatMap((off) => [
+    { x: middle.x, y: box.bottom + off },
+    { x: middle.x, y: box.top - off + lineOf(words) * 0.5 },
+    { x: box.right + off + half, y: middle.y },
+    { x: box.left - off - half, y: middle.y },
+  ]);
+  const free = (at: Point): boolean => {
+    const own = around(words, at);
+    return own.left > 28 && own.top > 28 && others.every((each) => apart(own, each));
+  };
+  const at = places.find(free) ?? places[0] ?? middle;
+  return { at, hairline: [{ x: at.x, y: at.y - rise }, middle] };
+}
+
+const apart = (a: Box, b: Box): boolean =>
+  a.right < b.left || b.right < a.left || a.bottom < b.top || b.bottom < a.top;
+
+function onScreen(box: Box, view: View): Box {
+  const from = toScreen(view, { x: box.left, y: box.top });
+  const to = toScreen(view, { x: box.right, y: box.bottom });
+  return { left: from.x, top: from.y, right: to.x, bottom: to.y };
+}

@@ -1,0 +1,20 @@
+import type { Piece } from '#shared/drafting/piece.ts';
+
+type Named = Pick<Piece, 'name' | 'title' | 'side' | 'part'>;
+
+/**
+ * A piece's name where there is little room. Front or back is never dropped: `Front CF`, `Back side`,
+ * `Front skirt`, `Flare B gore 2`.
+ */
+export function shortTitle({ name, title, side, part }: Named): string {
+  const front = side === 'front';
+  if (part === 'flare') {
+    const gore = /-(\d+)$/.exec(name)?.[1];
+    const centre = title.includes('centre gore') ? ' centre' : '';
+    return `Flare ${front ? 'F' : 'B'}${gore === undefined ? centre : ` gore ${gore}`}`;
+  }
+  const half = front ? 'Front' : 'Back';
+  if (part === 'middle') return `${half} skirt`;
+  if (name.endsWith('-centre')) return `${half} ${front ? 'CF' : 'CB'}`;
+  return name.endsWith('-side') ? `${half} side` : `${half} top`;
+}
