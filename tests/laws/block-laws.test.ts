@@ -1,6 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import type { MeasureCard } from '#shared/body/card.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
+import type { HouseRules } from '#shared/drafting/house-rules.ts';
 import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
 import {
   type BodiceBlockCard,
@@ -20,6 +22,14 @@ import { lawParameters, lawRuns } from './law-runs.ts';
 import { reasonOf } from './random-gown.ts';
 
 type Drafted = BodiceBlockDraft | SkirtBlockDraft;
+
+/** A body, a style for either block, and the rules of a workroom. */
+type Given = {
+  readonly card: MeasureCard;
+  readonly bodice: BodiceBlockCard;
+  readonly skirt: SkirtBlockCard;
+  readonly rules: HouseRules;
+};
 
 const between = ({ min, max }: { readonly min: number; readonly max: number }) =>
   fc.integer({ min, max });
@@ -54,12 +64,26 @@ function orRefusal(draw: () => Drafted): Drafted | DraftingError {
   }
 }
 
-const bodices = fc
-  .tuple(bodyArbitrary, bodiceCards, rules)
-  .map(([card, style, house]) => orRefusal(() => draftBodiceBlock({ card, style, rules: house })));
-const skirts = fc
-  .tuple(bodyArbitrary, skirtCards, rules)
-  .map(([card, style, house]) => orRefusal(() => draftSkirtBlock({ card, style, rules: house })));
+const given: fc.Arbitrary<Given> = fc.record({
+  card: bodyArbitrary,
+  bodice: bodiceCards,
+  skirt: skirtCards,
+  rules,
+});
+
+/** Both kinds, and what becomes of what they are drawn from. */
+const kinds = [
+  {
+    name: 'bodice',
+    draw: ({ card, bodice, rules: house }: Given) =>
+      orRefusal(() => draftBodiceBlock({ card, style: bodice, rules: house })),
+  },
+  {
+    name: 'skirt',
+    draw: ({ card, skirt, rules: house }: Given) =>
+      orRefusal(() => draftSkirtBlock({ card, style: skirt, rules: house })),
+  },
+] as const;
 
 const faults = (draft: Drafted): readonly string[] =>
   draft.proof.lines.flatMap((line) =>
@@ -81,13 +105,11 @@ function measuredAnew(draft: Drafted): readonly number[] {
   return remeasure(svg).edges.map((each) => Math.abs(each.difference));
 }
 
-describe.each([
-  ['bodice', bodices],
-  ['skirt', skirts],
-] as const)('a %s block on any body within the limits', (name, blocks) => {
+describe.each(kinds)('a $name block on any body within the limits', ({ name, draw }) => {
   test('every line of the proof holds, no number is lost, and its seams agree when measured anew', () => {
     fc.assert(
-      fc.property(blocks, (draft) => {
+      fc.property(given, (from) => {
+        const draft = draw(from);
         if (draft instanceof DraftingError) return;
         expect(faults(draft)).toEqual([]);
         expect(draft.proof.holds).toBe(true);
@@ -103,7 +125,8 @@ describe.each([
     const reasons = new Map<string, number>();
     let asked = 0;
     fc.assert(
-      fc.property(blocks, (draft) => {
+      fc.property(given, (from) => {
+        const draft = draw(from);
         asked += 1;
         if (!(draft instanceof DraftingError)) return;
         const reason = reasonOf(draft);

@@ -1,6 +1,6 @@
-import { pointAt, tangentAt } from '../../geometry/curve.ts';
+import { pointAt, tangentAt, velocityAt } from '../../geometry/curve.ts';
 import { type Cubic, type Path, cubic } from '../../geometry/path.ts';
-import { type Point, between, point } from '../../geometry/point.ts';
+import { type Point, between, cross, point, unit } from '../../geometry/point.ts';
 
 /** What an armhole is drawn between: the shoulder, the underarm, and how far in it comes between them. */
 export type ArmholeFrame = {
@@ -20,6 +20,29 @@ export type Armhole = { readonly path: Path; readonly upright: Point };
 /** Fullness of a sweep: how far its handles reach to the corner of its two end directions. */
 const leastFull = 0.5;
 const fullest = 0.75;
+/** As flat as a sweep may become where it would otherwise turn too tightly. */
+const flattest = 0.25;
+
+/** An armhole that turns more tightly than this cannot be faced or set into (our rule), mm. */
+export const tightestTurn = 11;
+
+const looks = 48;
+
+/** Smallest radius along a path of curves, mm. */
+export function smallestRadius(path: Path): number {
+  let smallest = Infinity;
+  for (const segment of path) {
+    if (segment.kind === 'line') continue;
+    for (let k = 1; k < looks; k += 1) {
+      const t = k / looks;
+      const speed = velocityAt(segment, t);
+      const [before, after] = [velocityAt(segment, t - 1e-4), velocityAt(segment, t + 1e-4)];
+      const turn = Math.abs(cross(unit(before), unit(after))) / 2e-4;
+      smallest = Math.min(smallest, Math.hypot(speed.x, speed.y) / Math.max(1e-9, turn));
+    }
+  }
+  return smallest;
+}
 
 /** Place where a sweep stands upright: it leaves the shoulder inwards and arrives outwards. */
 function uprightOf(curve: Cubic): Point {
@@ -52,7 +75,8 @@ function sweep({ shoulder, shoulderSlope, underarm, sideLean, guide }: ArmholeFr
     if (uprightOf(drawn(full)).x > guide) low = full;
     else high = full;
   }
-  const full = Math.min(fullest, Math.max(leastFull, low));
+  let full = Math.min(fullest, Math.max(leastFull, low));
+  while (full > flattest && smallestRadius([drawn(full)]) < tightestTurn) full -= 0.02;
   return { curve: drawn(full), full: low };
 }
 
@@ -105,5 +129,6 @@ function twoCurves({
 export function armhole(frame: ArmholeFrame): Armhole {
   const { curve, full } = sweep(frame);
   const straighter = full < leastFull ? twoCurves(frame) : undefined;
-  return straighter ?? { path: [curve], upright: uprightOf(curve) };
+  const turnsEasily = straighter && smallestRadius(straighter.path) >= tightestTurn;
+  return turnsEasily ? straighter : { path: [curve], upright: uprightOf(curve) };
 }

@@ -6,7 +6,13 @@ import { moved } from '../../geometry/motion.ts';
 import { point } from '../../geometry/point.ts';
 import { warning } from '../../units/problem.ts';
 import { mm, said } from '../../units/said.ts';
-import { type Armhole, type ArmholeFrame, armhole } from './armhole.ts';
+import {
+  type Armhole,
+  type ArmholeFrame,
+  armhole,
+  smallestRadius,
+  tightestTurn,
+} from './armhole.ts';
 import type { HalfPlan } from './plan-halves.ts';
 import type { OpenedShoulder, Shoulder } from './shoulder.ts';
 
@@ -43,14 +49,18 @@ function refuseShallow({ front, back }: Frames): void {
   ]);
 }
 
-/** Between the shoulder point, the upright and the underarm there must be some hollow, mm (our rule). */
-const leastHollow = 12;
+/** The hollow between the upright and the underarm is at least this deep, mm (our rule). */
+const leastHollow = 8;
 
 function refuseNarrow({ shoulder, underarm }: ArmholeFrame, { path, upright }: Armhole): void {
   const last = path.at(-1);
   const arrives = last?.kind === 'cubic' ? underarm.x - last.c2.x : 0;
-  const hollow = Math.min(underarm.x - upright.x, arrives);
-  if (hollow >= leastHollow && shoulder.x > upright.x) return;
+  const fits =
+    underarm.x - upright.x >= leastHollow &&
+    arrives >= leastHollow / 2 &&
+    shoulder.x > upright.x &&
+    smallestRadius(path) >= tightestTurn;
+  if (fits) return;
   throw new DraftingError([
     {
       code: 'armhole-too-narrow',

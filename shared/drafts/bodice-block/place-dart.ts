@@ -66,6 +66,9 @@ function endRadius(path: Path, length: number): number {
   return turned === 0 ? Infinity : reach / turned;
 }
 
+/** Share of that reach at which the two are sure to meet, an armhole being no true circle. */
+const sureToMeet = 0.85;
+
 /**
  * Refuses a dart too wide for a round armhole: folded, the armhole's cutting line would bend away from
  * the middle of the dart before it reached it, and no cap could be cut (two circles; derived, our rule).
@@ -78,7 +81,7 @@ function refuseRoundArmhole(front: Piece, pivot: Point, allowance: number): void
   const leg = distance(mouth.from, pivot);
   const radius = endRadius(beside, width / 2);
   if (!Number.isFinite(radius)) return;
-  if (((leg + radius) * width) / (2 * leg) <= radius - allowance) return;
+  if (((leg + radius) * width) / (2 * leg) <= sureToMeet * (radius - allowance)) return;
   throw new DraftingError([
     error({
       code: 'dart-too-wide-for-armhole',
