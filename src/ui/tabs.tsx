@@ -48,7 +48,7 @@ export function Tabs<T extends string>({ label, tabs, value, onChoose }: TabsPro
             aria-selected={tab === front}
             aria-controls={`${id}-sheet`}
             tabIndex={tab === front ? 0 : -1}
-            className="min-h-9 grow rounded-one px-1 text-slate aria-selected:bg-paper aria-selected:font-semibold aria-selected:text-ink"
+            className="min-h-9 grow rounded-one px-1 pointer-coarse:min-h-11 text-slate aria-selected:bg-paper aria-selected:font-semibold aria-selected:text-ink"
             onClick={() => onChoose(tab.value)}
             onKeyDown={walk}
           >
@@ -60,7 +60,7 @@ export function Tabs<T extends string>({ label, tabs, value, onChoose }: TabsPro
         role="tabpanel"
         id={`${id}-sheet`}
         aria-labelledby={`${id}-${front.value}`}
-        className="min-h-0 grow overflow-y-auto overscroll-contain py-4"
+        className="-mx-2 min-h-0 grow overflow-y-auto overscroll-contain px-2 py-4 -outline-offset-2"
         tabIndex={0}
       >
         {front.render()}

@@ -17,6 +17,9 @@ const nudges: Record<Unit, { readonly small: number; readonly large: number }> =
   in: { small: 25.4 / 8, large: 25.4 },
 };
 
+/** The most a figure changes by for one pixel of the hand: a finger shakes more than a pointer, millimetres. */
+const finest = { touch: 2, pointer: 4 };
+
 type HandlesProps = {
   readonly draft: Draft;
   readonly layout: Layout;
@@ -97,7 +100,10 @@ const Lozenge = ({
     event.stopPropagation();
     if (from.current === undefined) return;
     const pixels = subtract({ x: event.clientX, y: event.clientY }, from.current);
-    const grown = (dot(pixels, handle.along) / view.scale) * handle.perMillimetre;
+    const perPixel = handle.perMillimetre / view.scale;
+    // Seen from far off a pixel is a long way: then the lozenge follows slower than the hand.
+    const most = event.pointerType === 'touch' ? finest.touch : finest.pointer;
+    const grown = dot(pixels, handle.along) * Math.min(most, Math.max(-most, perPixel));
     move(Math.round((from.current.value + grown) / small) * small);
   };
   const drop = () => {
@@ -129,7 +135,7 @@ const Lozenge = ({
       onFocus={() => setNear(true)}
       onBlur={() => setNear(false)}
     >
-      <circle r={13} className="fill-transparent" />
+      <circle r={13} className="fill-transparent pointer-coarse:[r:20px]" />
       <path
         d="M0 -13L13 0L0 13L-13 0Z"
         className="ring fill-none stroke-brass opacity-0"
