@@ -9,9 +9,9 @@ const place =
 
 /** The way about between the places that work; those of an account only for who is signed in. */
 export const PlaceHeader = ({ signedIn }: { signedIn: boolean }) => (
-  <header className="flex shrink-0 flex-wrap items-center gap-x-6 gap-y-1 border-b border-rule px-4 py-2 sm:px-8">
+  <header className="flex shrink-0 flex-wrap items-center gap-x-5 gap-y-1 border-b border-rule px-4 py-2 sm:px-8">
     <Link to={paths.landing} aria-label="Ellwand, to the front page">
-      <Wordmark />
+      <Wordmark compact={signedIn} />
     </Link>
     <nav aria-label="Places" className="flex gap-5">
       {signedIn && (
@@ -20,7 +20,7 @@ export const PlaceHeader = ({ signedIn }: { signedIn: boolean }) => (
         </NavLink>
       )}
     </nav>
-    <div className="ml-auto flex items-center gap-5">
+    <div className="ml-auto flex items-center gap-3">
       {signedIn ? (
         <NavLink to={paths.account} className={place}>
           Account
@@ -30,7 +30,7 @@ export const PlaceHeader = ({ signedIn }: { signedIn: boolean }) => (
           Sign in
         </NavLink>
       )}
-      <ThemeToggle className="-mr-3 px-3" />
+      <ThemeToggle />
     </div>
   </header>
 );

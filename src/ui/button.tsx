@@ -8,12 +8,16 @@ const looks: Record<Kind, string> = {
   quiet: 'bg-transparent text-brass border-transparent',
 };
 
-type ButtonProps = ComponentProps<'button'> & { readonly kind?: Kind };
+type ButtonProps = ComponentProps<'button'> & {
+  readonly kind?: Kind;
+  /** Among others in a row, with less room about its word. */
+  readonly slim?: boolean;
+};
 
-export const Button = ({ kind = 'plain', className = '', ...rest }: ButtonProps) => (
+export const Button = ({ kind = 'plain', slim = false, className = '', ...rest }: ButtonProps) => (
   <button
     type="button"
-    className={`inline-flex min-h-10 items-center justify-center gap-2 rounded-one border px-4 disabled:opacity-60 ${looks[kind]} ${className}`}
+    className={`inline-flex items-center justify-center gap-2 rounded-one border disabled:opacity-60 ${slim ? 'min-h-9 px-2' : 'min-h-10 px-4'} ${looks[kind]} ${className}`}
     {...rest}
   />
 );

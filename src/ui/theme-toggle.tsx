@@ -7,7 +7,7 @@ export const ThemeToggle = ({ className = '' }: { className?: string }) => {
   const theme = useTheme();
   const other = theme === 'light' ? 'dark' : 'light';
   return (
-    <Button kind="quiet" className={className} onClick={() => chooseTheme(other)}>
+    <Button kind="quiet" slim className={className} onClick={() => chooseTheme(other)}>
       {other === 'dark' ? 'Dark' : 'Light'}
     </Button>
   );

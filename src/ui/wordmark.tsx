@@ -1,5 +1,5 @@
-/** The rod and the name. */
-export const Wordmark = () => (
+/** The rod and the name; where room is short on a phone, the rod alone. */
+export const Wordmark = ({ compact = false }: { compact?: boolean }) => (
   <span className="flex items-center gap-2">
     <svg viewBox="0 0 44 12" className="h-3 w-11" aria-hidden="true">
       <path
@@ -8,6 +8,8 @@ export const Wordmark = () => (
         strokeWidth={1.2}
       />
     </svg>
-    <span className="font-semibold tracking-[0.14em]">ELLWAND</span>
+    <span className={`font-semibold tracking-[0.14em] ${compact ? 'max-sm:hidden' : ''}`}>
+      ELLWAND
+    </span>
   </span>
 );

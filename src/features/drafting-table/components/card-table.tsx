@@ -64,7 +64,7 @@ export const CardTable = ({ cardId, card, place, signIn }: CardTableProps) => {
         <h1 className="min-w-0 truncate font-semibold">{start.title}</h1>
         <SaveState saving={saving} kept={kept} />
         {standing === 'signed-out' && (
-          <Button kind="quiet" className="min-h-9 px-2" onClick={() => setSigning(true)}>
+          <Button kind="quiet" slim onClick={() => setSigning(true)}>
             Sign in
           </Button>
         )}

@@ -48,7 +48,8 @@ export const CardTools = ({ table, dispatch }: CardToolsProps) => {
     <div className="clear-both flex flex-wrap items-center gap-x-4 border-t border-rule py-1 text-sm">
       <Button
         kind="quiet"
-        className="min-h-9 px-0"
+        slim
+        className="-ml-2"
         aria-expanded={choosing}
         onClick={() => setChoosing(!choosing)}
       >
@@ -56,7 +57,8 @@ export const CardTools = ({ table, dispatch }: CardToolsProps) => {
       </Button>
       <Button
         kind="quiet"
-        className="min-h-9 px-0"
+        slim
+        className="-ml-2"
         disabled={keeping.isPending || Object.keys(table.entries).length === 0}
         onClick={() => keeping.mutate()}
       >
@@ -75,7 +77,8 @@ export const CardTools = ({ table, dispatch }: CardToolsProps) => {
             <li key={card.id}>
               <Button
                 kind="quiet"
-                className="min-h-9 w-full justify-start px-2"
+                slim
+                className="w-full justify-start"
                 disabled={laying.isPending}
                 onClick={() => laying.mutate(card.id)}
               >

@@ -22,7 +22,9 @@ type DraftingTableProps = {
   readonly dispatch: Dispatch<BenchAction>;
   /** Under what the places of moved pieces are kept in this browser. */
   readonly place: string;
-  /** Which gown lies here and how it is kept, for the header. */
+  /** For the header: the other places, the gown's name, and how it is kept. */
+  readonly places?: ReactNode;
+  readonly title?: ReactNode;
   readonly heading: ReactNode;
   /** Something that needs doing before all else. */
   readonly notice?: ReactNode;
@@ -32,7 +34,7 @@ type DraftingTableProps = {
 
 /** The drafting table: cards, drawing and panels, all of one state. */
 export const DraftingTable = (props: DraftingTableProps) => {
-  const { bench, dispatch, place, heading, notice, cardTools } = props;
+  const { bench, dispatch, place, places, title, heading, notice, cardTools } = props;
   const { table: state } = bench;
   const [printing, setPrinting] = useState(false);
   const cards = useRef<HTMLDivElement>(null);
@@ -116,7 +118,13 @@ export const DraftingTable = (props: DraftingTableProps) => {
 
   return (
     <div className="flex h-dvh flex-col overflow-hidden">
-      <TableHeader bench={bench} dispatch={dispatch} onPrint={() => setPrinting(true)}>
+      <TableHeader
+        bench={bench}
+        dispatch={dispatch}
+        places={places}
+        title={title}
+        onPrint={() => setPrinting(true)}
+      >
         {heading}
       </TableHeader>
       {notice}

@@ -8,14 +8,15 @@ type DrawingToolsProps = {
   readonly onSeam: (by: number) => void;
 };
 
-const tool = 'min-h-9 rounded-one px-2 hover:bg-cloth';
+const tool =
+  'min-h-9 rounded-one px-2 max-sm:min-h-11 max-sm:min-w-11 pointer-coarse:min-h-11 pointer-coarse:min-w-11 hover:bg-cloth';
 
 /** Looking about on the drawing: fit, nearer, further, one piece, seam after seam. */
 export const DrawingTools = ({ layout, onFit, onZoom, onSeam }: DrawingToolsProps) => (
   <div
     role="toolbar"
     aria-label="Look about"
-    className="ml-auto flex items-center rounded-one border border-rule bg-ground text-sm"
+    className="ml-auto flex flex-wrap items-center justify-end rounded-one border border-rule bg-ground text-sm"
   >
     <button type="button" className={tool} onClick={() => onFit(layout.box, 'corner')}>
       Fit
@@ -28,7 +29,7 @@ export const DrawingTools = ({ layout, onFit, onZoom, onSeam }: DrawingToolsProp
     </button>
     <select
       aria-label="Zoom to a piece"
-      className={`${tool} max-w-24 bg-ground`}
+      className={`${tool} max-w-18 sm:max-w-24 bg-ground`}
       value=""
       onChange={(event) => {
         const chosen = layout.placed.find(({ piece }) => piece.name === event.currentTarget.value);
@@ -45,7 +46,7 @@ export const DrawingTools = ({ layout, onFit, onZoom, onSeam }: DrawingToolsProp
     <button type="button" className={tool} aria-label="Seam before" onClick={() => onSeam(-1)}>
       ‹
     </button>
-    <span className="text-slate">Seam</span>
+    <span className="text-slate max-sm:hidden">Seam</span>
     <button type="button" className={tool} aria-label="Seam after" onClick={() => onSeam(1)}>
       ›
     </button>

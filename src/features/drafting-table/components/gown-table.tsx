@@ -85,25 +85,21 @@ export const GownTable = ({ gownId, start: opening, place, signIn }: GownTablePr
         dispatch={dispatch}
         place={gownId}
         cardTools={cardTools}
+        places={
+          <Link to="/gowns" className="text-slate hover:text-ink">
+            Gowns
+          </Link>
+        }
+        title={<GownTitle gownId={gownId} title={title} onNamed={setTitle} />}
         heading={
           <>
-            <nav aria-label="Places">
-              <Link to="/gowns" className="text-slate hover:text-ink">
-                Gowns
-              </Link>
-            </nav>
-            <GownTitle gownId={gownId} title={title} onNamed={setTitle} />
             <SaveState saving={saving} kept={kept} />
             {signedOut && (
-              <Button kind="quiet" className="min-h-9 px-2" onClick={() => setOpen('sign-in')}>
+              <Button kind="quiet" slim onClick={() => setOpen('sign-in')}>
                 Sign in
               </Button>
             )}
-            <Button
-              kind="quiet"
-              className="min-h-9 px-2 lg:ml-auto"
-              onClick={() => setOpen('revisions')}
-            >
+            <Button kind="quiet" slim className="ml-auto" onClick={() => setOpen('revisions')}>
               Revisions
             </Button>
           </>

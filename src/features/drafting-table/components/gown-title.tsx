@@ -23,7 +23,7 @@ export const GownTitle = ({ gownId, title, onNamed }: GownTitleProps) => {
     else if (name !== title) naming.mutate(name);
   };
   return (
-    <span className="min-w-0 grow lg:max-w-80 lg:grow-0">
+    <span className="block min-w-0 lg:w-64">
       <input
         aria-label="Name of the gown"
         name="title"

@@ -95,7 +95,7 @@ export const PieceChanges = ({ changes, unit }: PieceChangesProps) =>
   changes.length === 0 ? (
     <p>The pieces are the same.</p>
   ) : (
-    <ul className="figures">
+    <ul className="figures" aria-label="Pieces that differ">
       {changes.map(({ piece, title, change, deviation }) => (
         <li key={piece} className="flex justify-between gap-3 border-b border-rule py-1">
           <span>{title}</span>

@@ -12,42 +12,58 @@ type TableHeaderProps = {
   readonly bench: Bench;
   readonly dispatch: Dispatch<BenchAction>;
   readonly onPrint: () => void;
-  /** Which gown lies here, how it is kept, and what else can be done with it. */
+  /** The way to the other places, where there are any. */
+  readonly places?: ReactNode;
+  /** Which gown lies here, where it has a name of its own. */
+  readonly title?: ReactNode;
+  /** How it is kept, and what else can be done with it. */
   readonly children: ReactNode;
 };
 
 /** Above the table: on a phone in two rows, the gown and its keeping in the second. */
-export const TableHeader = ({ bench, dispatch, onPrint, children }: TableHeaderProps) => (
-  <header className="flex shrink-0 flex-wrap items-center gap-x-2 border-b border-rule px-3 py-2 sm:gap-x-4 sm:px-4 lg:flex-nowrap">
-    <Link to="/" aria-label="Ellwand, to the front page">
-      <Wordmark />
-    </Link>
-    <h1 className="sr-only">Drafting table</h1>
-    <div className="order-last flex min-w-0 basis-full items-center gap-x-3 pt-1 lg:order-none lg:grow lg:basis-0 lg:pt-0">
-      {children}
-      <UndoButtons history={bench.history} dispatch={dispatch} />
-    </div>
-    <span className="ml-auto hidden sm:block">
-      <ThemeToggle className="px-2" />
-    </span>
-    <span className="ml-auto sm:ml-0">
-      <Segmented
-        legend="Unit"
-        choices={[
-          { value: 'in', label: 'inch' },
-          { value: 'cm', label: 'cm' },
-        ]}
-        value={bench.table.unit}
-        onChoose={(unit) => dispatch({ type: 'unit', unit })}
-      />
-    </span>
-    <Button
-      kind="primary"
-      className="px-3 sm:px-4"
-      disabled={bench.table.drawn.draft === undefined}
-      onClick={onPrint}
-    >
-      Print
-    </Button>
-  </header>
-);
+export const TableHeader = (props: TableHeaderProps) => {
+  const { bench, dispatch, onPrint, places, title, children } = props;
+  return (
+    <header className="flex shrink-0 flex-wrap items-center gap-x-2 border-b border-rule px-3 py-2 sm:gap-x-4 sm:px-4 lg:flex-nowrap">
+      <Link to="/" aria-label="Ellwand, to the front page">
+        <Wordmark compact={title !== undefined} />
+      </Link>
+      <h1 className="sr-only">Drafting table</h1>
+      <div className="order-1 mr-auto min-w-0 grow basis-0 lg:order-2 lg:mr-0 lg:grow-0 lg:basis-auto">
+        {title}
+      </div>
+      <span className="order-2 hidden sm:block lg:order-4">
+        <ThemeToggle />
+      </span>
+      <span className="order-2 lg:order-4">
+        <Segmented
+          legend="Unit"
+          choices={[
+            { value: 'in', label: 'inch' },
+            { value: 'cm', label: 'cm' },
+          ]}
+          value={bench.table.unit}
+          onChoose={(unit) => dispatch({ type: 'unit', unit })}
+        />
+      </span>
+      <Button
+        kind="primary"
+        className="order-2 lg:order-4"
+        disabled={bench.table.drawn.draft === undefined}
+        onClick={onPrint}
+      >
+        Print
+      </Button>
+      <span className="order-3 basis-full lg:hidden" />
+      {places !== undefined && (
+        <nav aria-label="Places" className="order-4 lg:order-1">
+          {places}
+        </nav>
+      )}
+      <div className="order-4 flex min-w-0 grow items-center gap-x-2 lg:order-3 lg:gap-x-4">
+        {children}
+        <UndoButtons history={bench.history} dispatch={dispatch} />
+      </div>
+    </header>
+  );
+};

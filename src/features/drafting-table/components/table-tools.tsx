@@ -8,7 +8,7 @@ type TableToolsProps = {
 };
 
 const look =
-  'min-h-9 rounded-one px-2 hover:bg-cloth aria-pressed:bg-brass aria-pressed:font-semibold aria-pressed:text-on-brass';
+  'min-h-9 rounded-one px-2 max-sm:min-h-11 max-sm:min-w-11 pointer-coarse:min-h-11 pointer-coarse:min-w-11 hover:bg-cloth aria-pressed:bg-brass aria-pressed:font-semibold aria-pressed:text-on-brass';
 
 /** What the hand holds: nothing, a piece to move it, or the measuring tape. */
 export const TableTools = ({ tool, moved, onTool, onSnapBack }: TableToolsProps) => (
@@ -26,9 +26,10 @@ export const TableTools = ({ tool, moved, onTool, onSnapBack }: TableToolsProps)
       type="button"
       className={look}
       aria-pressed={tool === 'move'}
+      aria-label="Move pieces"
       onClick={() => onTool(tool === 'move' ? 'look' : 'move')}
     >
-      Move pieces
+      Move<span className="max-sm:hidden">&nbsp;pieces</span>
     </button>
     <button
       type="button"

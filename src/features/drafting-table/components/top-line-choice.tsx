@@ -33,7 +33,7 @@ export const TopLineChoice = ({ value, onChoose }: TopLineChoiceProps) => {
         {topLineShapes.map((shape) => (
           <label
             key={shape}
-            className="relative cursor-pointer rounded-one border border-transparent px-1 py-1 text-center text-sm text-slate has-checked:border-brass has-checked:bg-paper has-checked:font-semibold has-checked:text-ink has-focus-visible:outline-2 has-focus-visible:outline-brass"
+            className="relative cursor-pointer rounded-one border border-transparent py-1 text-center text-xs text-slate has-checked:border-brass has-checked:bg-paper has-checked:font-semibold has-checked:text-ink has-focus-visible:outline-2 has-focus-visible:outline-brass"
           >
             <input
               type="radio"

@@ -41,9 +41,16 @@ export const TryTable = () => {
       bench={state}
       dispatch={dispatch}
       place="try"
+      places={
+        signedInHint() ? (
+          <Link to="/gowns" className="text-slate hover:text-ink">
+            Gowns
+          </Link>
+        ) : undefined
+      }
       heading={
         <>
-          <p className="min-w-0 truncate lg:ml-auto">
+          <p className="min-w-0 truncate">
             {table.name === '' ? 'A gown to try' : `${table.name} · gown`}
           </p>
           <p
@@ -51,7 +58,7 @@ export const TryTable = () => {
           >
             {kept ? '✓ kept in this browser' : 'This browser keeps nothing: print before you leave'}
           </p>
-          <span className="ml-auto shrink-0 lg:ml-0">
+          <span className="ml-auto shrink-0">
             {signedInHint() ? (
               <KeepAsGown
                 onKept={() => {
@@ -91,12 +98,7 @@ const KeepAsGown = ({ prepare, onKept }: KeepAsGownProps) => {
     },
   });
   return (
-    <Button
-      kind="quiet"
-      className="min-h-9 px-2"
-      disabled={keeping.isPending}
-      onClick={() => keeping.mutate()}
-    >
+    <Button kind="quiet" slim disabled={keeping.isPending} onClick={() => keeping.mutate()}>
       {keeping.isError ? 'Not kept: try again' : 'Keep as a gown'}
     </Button>
   );

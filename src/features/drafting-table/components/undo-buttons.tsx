@@ -20,7 +20,7 @@ export const UndoButtons = ({ history, dispatch }: UndoButtonsProps) => {
     <span className="flex" role="group" aria-label="Step back and on">
       <Button
         kind="quiet"
-        className="min-h-9 px-2"
+        slim
         disabled={last === undefined}
         aria-label={words('Undo', last)}
         title={words('Undo', last)}
@@ -30,7 +30,7 @@ export const UndoButtons = ({ history, dispatch }: UndoButtonsProps) => {
       </Button>
       <Button
         kind="quiet"
-        className="min-h-9 px-2"
+        slim
         disabled={next === undefined}
         aria-label={words('Redo', next)}
         title={words('Redo', next)}

@@ -44,7 +44,7 @@ export function ListFrame<T extends Listed>(props: ListFrameProps<T>) {
       <div className="mt-6 mb-4 flex flex-wrap items-center justify-between gap-4 border-b border-rule">
         {props.tabs}
         {(away > 0 || archive) && (
-          <Button kind="quiet" className="px-1" onClick={() => setArchive(!archive)}>
+          <Button kind="quiet" slim onClick={() => setArchive(!archive)}>
             {archive ? 'Back to those in use' : `Archive (${away})`}
           </Button>
         )}
@@ -58,7 +58,7 @@ export function ListFrame<T extends Listed>(props: ListFrameProps<T>) {
       {list.error !== null && (
         <Notice>
           {failureWords(list.error)}{' '}
-          <Button kind="quiet" className="px-1" onClick={() => void list.refetch()}>
+          <Button kind="quiet" slim onClick={() => void list.refetch()}>
             Try again
           </Button>
         </Notice>

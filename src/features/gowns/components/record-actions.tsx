@@ -15,12 +15,12 @@ type RecordActionsProps = {
 export const RecordActions = ({ record, name, label, deed }: RecordActionsProps) => {
   const [renaming, setRenaming] = useState(false);
   const { id, archived } = record;
-  const action = 'px-2 text-sm';
   return (
     <div className="-mx-2 flex flex-wrap">
       <Button
         kind="quiet"
-        className={action}
+        slim
+        className="text-sm"
         aria-label={`Rename ${name}`}
         onClick={() => {
           deed.reset();
@@ -31,7 +31,8 @@ export const RecordActions = ({ record, name, label, deed }: RecordActionsProps)
       </Button>
       <Button
         kind="quiet"
-        className={action}
+        slim
+        className="text-sm"
         aria-label={`Duplicate ${name}`}
         disabled={deed.isPending}
         onClick={() => deed.mutate({ kind: 'duplicate', id, name: `Copy of ${name}`.slice(0, 80) })}
@@ -40,7 +41,8 @@ export const RecordActions = ({ record, name, label, deed }: RecordActionsProps)
       </Button>
       <Button
         kind="quiet"
-        className={action}
+        slim
+        className="text-sm"
         aria-label={`${archived ? 'Take back' : 'Archive'} ${name}`}
         disabled={deed.isPending}
         onClick={() => deed.mutate({ kind: archived ? 'unarchive' : 'archive', id })}

@@ -60,5 +60,5 @@ const newTitle = (): string => `Gown of ${dayOf.format(new Date())}`;
 
 function stateWords({ drawnBy, fresh }: ListedGown): string {
   if (drawnBy === null) return 'not drawn yet';
-  return fresh ? 'drawn' : 'figures open: the picture is the last that could be drawn';
+  return fresh ? '' : 'figures open: the picture is the last that could be drawn';
 }
