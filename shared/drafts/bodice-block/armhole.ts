@@ -12,6 +12,8 @@ export type ArmholeFrame = {
   readonly sideLean: number;
   /** Distance from the centre line at which the armhole should stand upright. */
   readonly guide: number;
+  /** Smallest radius it may turn with: its cutting line lies inside the curve and must follow it. */
+  readonly tightest: number;
 };
 
 /** An armhole, and the place where it stands upright. */
@@ -22,9 +24,6 @@ const leastFull = 0.5;
 const fullest = 0.75;
 /** As flat as a sweep may become where it would otherwise turn too tightly. */
 const flattest = 0.25;
-
-/** An armhole that turns more tightly than this cannot be faced or set into (our rule), mm. */
-export const tightestTurn = 11;
 
 const looks = 48;
 
@@ -57,7 +56,7 @@ function uprightOf(curve: Cubic): Point {
 }
 
 /** The armhole in one sweep that comes in to the guide, as nearly as its fullness allows. */
-function sweep({ shoulder, shoulderSlope, underarm, sideLean, guide }: ArmholeFrame): {
+function sweep({ shoulder, shoulderSlope, underarm, sideLean, guide, tightest }: ArmholeFrame): {
   readonly curve: Cubic;
   readonly full: number;
 } {
@@ -76,7 +75,7 @@ function sweep({ shoulder, shoulderSlope, underarm, sideLean, guide }: ArmholeFr
     else high = full;
   }
   let full = Math.min(fullest, Math.max(leastFull, low));
-  while (full > flattest && smallestRadius([drawn(full)]) < tightestTurn) full -= 0.02;
+  while (full > flattest && smallestRadius([drawn(full)]) < tightest) full -= 0.02;
   return { curve: drawn(full), full: low };
 }
 
@@ -129,6 +128,6 @@ function twoCurves({
 export function armhole(frame: ArmholeFrame): Armhole {
   const { curve, full } = sweep(frame);
   const straighter = full < leastFull ? twoCurves(frame) : undefined;
-  const turnsEasily = straighter && smallestRadius(straighter.path) >= tightestTurn;
+  const turnsEasily = straighter && smallestRadius(straighter.path) >= frame.tightest;
   return turnsEasily ? straighter : { path: [curve], upright: uprightOf(curve) };
 }

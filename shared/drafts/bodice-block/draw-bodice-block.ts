@@ -116,6 +116,7 @@ export function drawBodiceBlock(
   const armholes = pairArmholes(
     body,
     levels.underarm,
+    rules.allowance.top,
     { plan: plans.front, shoulder: shoulders.front, opened },
     { plan: plans.back, shoulder: shoulders.back },
   );

@@ -6,13 +6,7 @@ import { moved } from '../../geometry/motion.ts';
 import { point } from '../../geometry/point.ts';
 import { warning } from '../../units/problem.ts';
 import { mm, said } from '../../units/said.ts';
-import {
-  type Armhole,
-  type ArmholeFrame,
-  armhole,
-  smallestRadius,
-  tightestTurn,
-} from './armhole.ts';
+import { type Armhole, type ArmholeFrame, armhole, smallestRadius } from './armhole.ts';
 import type { HalfPlan } from './plan-halves.ts';
 import type { OpenedShoulder, Shoulder } from './shoulder.ts';
 
@@ -27,6 +21,9 @@ export const leastArmholeWidth = (bust: number): number => bust / 8 - 15;
 
 /** An armhole less deep than this from the shoulder point leaves no room for the arm (our rule). */
 const leastDepth = 65;
+
+/** The armhole turns with a radius this much wider than its allowance, so that the cutting line can follow. */
+const besideAllowance = 1;
 
 type Frames = { readonly front: ArmholeFrame; readonly back: ArmholeFrame };
 
@@ -52,14 +49,17 @@ function refuseShallow({ front, back }: Frames): void {
 /** The hollow between the upright and the underarm is at least this deep, mm (our rule). */
 const leastHollow = 8;
 
-function refuseNarrow({ shoulder, underarm }: ArmholeFrame, { path, upright }: Armhole): void {
+function refuseNarrow(
+  { shoulder, underarm, tightest }: ArmholeFrame,
+  { path, upright }: Armhole,
+): void {
   const last = path.at(-1);
   const arrives = last?.kind === 'cubic' ? underarm.x - last.c2.x : 0;
   const fits =
     underarm.x - upright.x >= leastHollow &&
     arrives >= leastHollow / 2 &&
     shoulder.x > upright.x &&
-    smallestRadius(path) >= tightestTurn;
+    smallestRadius(path) >= tightest;
   if (fits) return;
   throw new DraftingError([
     {
@@ -80,6 +80,7 @@ function refuseNarrow({ shoulder, underarm }: ArmholeFrame, { path, upright }: A
 export function pairArmholes(
   body: Body,
   armpit: number,
+  allowance: number,
   front: { readonly plan: HalfPlan; readonly shoulder: Shoulder; readonly opened: OpenedShoulder },
   back: { readonly plan: HalfPlan; readonly shoulder: Shoulder },
 ): { readonly front: DrawnArmhole; readonly back: DrawnArmhole } {
@@ -89,6 +90,7 @@ export function pairArmholes(
     front: moved(point(acrossFront / 2, halfWay), front.opened.motion).x,
     back: acrossBack / 2 + backWidthEase,
   };
+  const tightest = allowance + besideAllowance;
   const frames: Frames = {
     front: {
       shoulder: front.opened.tip,
@@ -96,6 +98,7 @@ export function pairArmholes(
       underarm: front.plan.underarm,
       sideLean: front.plan.lean,
       guide: asked.front,
+      tightest,
     },
     back: {
       shoulder: back.shoulder.tip,
@@ -103,6 +106,7 @@ export function pairArmholes(
       underarm: back.plan.underarm,
       sideLean: back.plan.lean,
       guide: asked.back,
+      tightest,
     },
   };
   refuseShallow(frames);
