@@ -44,6 +44,10 @@ export function writeValue(field: FieldKey, value: number, unit: Unit): string {
   return formatLength(value, unit);
 }
 
+/** A value with the sign of what it is, where that is no length. */
+export const marked = (field: FieldKey, value: number, unit: Unit): string =>
+  writeValue(field, value, unit) + (degrees.includes(field) ? '°' : '');
+
 export const valueOf = (entry: Entry | undefined): number | undefined =>
   entry !== undefined && 'value' in entry ? entry.value : undefined;
 

@@ -1,7 +1,7 @@
 import type { Draft } from '#shared/engine/draft.ts';
 import { formatWithUnit } from '#shared/units/format-length.ts';
 
-import { fieldKeys, valueOf, writeValue, type FieldKey } from './fields.ts';
+import { fieldKeys, marked, valueOf, type FieldKey } from './fields.ts';
 import { partLabel, partWords } from './part-words.ts';
 import { applies, givenFor, presetOf } from './table-inputs.ts';
 import type { TableState } from './table-state.ts';
@@ -37,8 +37,6 @@ const near = (was: number, now: number | undefined): boolean =>
   now !== undefined && Math.abs(was - now) < same;
 
 const worded = (field: FieldKey, value: number, { unit }: TableState): string => {
-  if (field === 'style.flareFraction') return writeValue(field, value, unit);
-  return field === 'card.shoulderSlope'
-    ? `${writeValue(field, value, unit)}°`
-    : formatWithUnit(value, unit);
+  const plain = field === 'style.flareFraction' || field === 'card.shoulderSlope';
+  return plain ? marked(field, value, unit) : formatWithUnit(value, unit);
 };

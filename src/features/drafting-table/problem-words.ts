@@ -1,15 +1,45 @@
+import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
+import { measureGuide } from '#shared/body/measure-guide.ts';
+import { formatWithUnit } from '#shared/units/format-length.ts';
 import { speak } from '#shared/units/speak.ts';
 import type { Problem } from '#shared/units/problem.ts';
 import type { Unit } from '#shared/units/said.ts';
 
-import type { FieldKey } from './fields.ts';
+import { valueOf, type FieldKey } from './fields.ts';
+import type { TableState } from './table-state.ts';
+
+type Told = Pick<TableState, 'entries' | 'unit'>;
+
+/** A problem in the reader's unit; a figure that would do in the other unit is asked about first. */
+export const problemWords = (problem: Problem, table: Told): string =>
+  [otherUnit(problem, table), speak(problem.said, table.unit)].filter(Boolean).join(' ');
 
 /** What stands under a field; a combination that cannot be is said once, under the one of its fields it names first. */
 export function messageFor(
   field: FieldKey,
   problems: readonly Problem[],
-  unit: Unit,
+  table: Told,
 ): string | undefined {
   const found = problems.find((each) => each.severity === 'error' && each.field === field);
-  return found === undefined ? undefined : speak(found.said, unit);
+  return found === undefined ? undefined : problemWords(found, table);
+}
+
+const measureKeys = [...coreMeasures, ...furtherMeasures];
+
+const perOther: Record<Unit, { readonly unit: Unit; readonly times: number }> = {
+  in: { unit: 'cm', times: 1 / 2.54 },
+  cm: { unit: 'in', times: 2.54 },
+};
+
+/** `Did you mean 72.4 cm = 28 1⁄2 in?` where the same figure lies within its bounds in the other unit. */
+function otherUnit({ code, field }: Problem, { entries, unit }: Told): string | undefined {
+  const key = measureKeys.find((each) => field === `card.${each}`);
+  if (code !== 'out-of-range' || key === undefined) return undefined;
+  const { min, max, kind } = measureGuide[key];
+  const value = valueOf(entries[`card.${key}`]);
+  if (kind === 'angle' || value === undefined) return undefined;
+  const other = perOther[unit];
+  const meant = value * other.times;
+  if (meant < min || meant > max) return undefined;
+  return `Did you mean ${formatWithUnit(meant, other.unit)} = ${formatWithUnit(meant, unit)}?`;
 }

@@ -13,14 +13,32 @@ export type LitSeam = {
 
 const same = (a: EdgeRef, b: EdgeRef): boolean => a.piece === b.piece && a.edge === b.edge;
 
-/** The seam in one trade word: `Princess`, `Side`; both edges' words where they differ. */
-export function seamWord({ first, second }: SeamRow): string {
-  const words = [...new Set([first.edge, second.edge].map(spoken))].join(' to ');
+/** The seam in trade words: `Princess seam`, `Side seam`; a stretch of one by where it lies: `Waist seam, at the side`. */
+export function seamWord({ first, second }: SeamRow, draft: Draft): string {
+  const [, seam = first.edge, letter] = stretch.exec(first.edge) ?? [];
+  const name = `${seam === 'centre' ? 'centre back' : seam.replaceAll('-', ' ')} seam`;
+  const places = Math.max(...[first, second].map((each) => stretchesOf(each.piece, seam, draft)));
+  const words = letter === undefined ? name : `${name}, ${placeWords(letter, places)}`;
   return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
-/** `waist-a` is a stretch of the waist seam, parted by a dart. */
-const spoken = (edge: string): string => edge.replace(/-[a-z]$/, '').replaceAll('-', ' ');
+/** A seam parted by darts or gores is lettered from the centre line out. */
+const stretch = /^(.*)-([a-z])$/;
+
+const stretchesOf = (piece: string, seam: string, draft: Draft): number =>
+  draft.pieces
+    .find(({ name }) => name === piece)
+    ?.edges.filter((edge) => edge.open !== true && stretch.exec(edge.name)?.[1] === seam).length ??
+  0;
+
+const letters = 'abcdefghijkl';
+
+function placeWords(letter: string, places: number): string {
+  const place = letters.indexOf(letter);
+  if (place === 0) return 'at the centre';
+  if (place === places - 1) return 'at the side';
+  return places === 3 ? 'between' : `stretch ${place + 1} from the centre`;
+}
 
 /** The pieces a seam joins, as the maker reads them. */
 export function seamPieces({ first, second }: SeamRow, draft: Draft): string {
@@ -43,7 +61,7 @@ export function litSeam(draft: Draft, edge: EdgeRef | undefined, unit: Unit): Li
   const titleOf = (name: string) => draft.pieces.find((each) => each.name === name)?.title ?? name;
   const alone = same(row.first, row.second);
   return {
-    title: seamWord(row),
+    title: seamWord(row, draft),
     edges: [row.first, row.second],
     lines: (alone ? [row.first] : [row.first, row.second]).map(
       (each) => `${titleOf(each.piece)}: ${formatLength(each.length, unit)}`,

@@ -2,10 +2,10 @@ import type { Dispatch } from 'react';
 
 import { coreMeasures } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
-import { speak } from '#shared/units/speak.ts';
 
 import { Button } from '../../../ui/button.tsx';
 import { valueOf } from '../fields.ts';
+import { problemWords } from '../problem-words.ts';
 import type { TableAction, TableState } from '../table-state.ts';
 import { Samples } from './samples.tsx';
 
@@ -33,7 +33,7 @@ export const EmptyTable = ({ state, dispatch, onType }: EmptyTableProps) => {
       )}
       {faults.map((problem) => (
         <p key={`${problem.field} ${problem.code}`} className="figures max-w-prose text-madder">
-          {speak(problem.said, state.unit)}
+          {problemWords(problem, state)}
         </p>
       ))}
       {taken.length === 0 && (

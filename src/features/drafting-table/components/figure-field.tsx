@@ -4,7 +4,7 @@ import type { Unit } from '#shared/units/said.ts';
 
 import { Field } from '../../../ui/field.tsx';
 import { LengthInput } from '../../../ui/length-input.tsx';
-import { writeValue, type FieldKey } from '../fields.ts';
+import { marked, type FieldKey } from '../fields.ts';
 import { messageFor } from '../problem-words.ts';
 import type { TableAction, TableState } from '../table-state.ts';
 
@@ -29,7 +29,7 @@ type FigureFieldProps = {
 export const fieldProps = (field: FieldKey, state: TableState) => ({
   field,
   text: state.entries[field]?.text ?? '',
-  fault: messageFor(field, state.drawn.problems, state.unit),
+  fault: messageFor(field, state.drawn.problems, state),
   unit: state.unit,
 });
 
@@ -56,7 +56,7 @@ export const FigureField = memo(function FigureField(props: FigureFieldProps) {
           placeholder={
             open === undefined
               ? undefined
-              : [writeValue(field, open, unit), props.mark].filter(Boolean).join(' ')
+              : [marked(field, open, unit), props.mark].filter(Boolean).join(' ')
           }
           onType={(text) => {
             setTyping(true);

@@ -17,7 +17,7 @@ export const PiecesPanel = memo(function PiecesPanel({ draft, unit }: PiecesPane
     <section>
       <h2 className="sr-only">Pieces</h2>
       <p>
-        {`Draft ${draft.number}: ${draft.pieces.length} pieces, ${cloth} to cut. Sizes in ${unit} with allowances.`}
+        {`Draft ${draft.number}: ${draft.pieces.length} pieces, ${cloth} to cut. Sizes in ${unit === 'in' ? 'inches' : 'cm'}, with allowances.`}
       </p>
       <ul>
         {placed.map(({ piece, box }) => (

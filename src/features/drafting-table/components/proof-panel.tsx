@@ -79,7 +79,7 @@ export const ProofPanel = memo(function ProofPanel({
                       dispatch({ type: 'seam', seam: index === litRow ? undefined : row.first })
                     }
                   >
-                    {seamWord(row)}
+                    {seamWord(row, draft)}
                   </button>
                   <span className="block text-sm leading-snug text-slate">
                     {seamPieces(row, draft)}

@@ -1,0 +1,43 @@
+import { expect, test } from 'vitest';
+
+import { checkMeasure } from '#shared/body/check-card.ts';
+import { balanced } from '#shared/drafting/house-rule-presets.ts';
+import { draftGown } from '#shared/engine/draft-gown.ts';
+import type { Unit } from '#shared/units/said.ts';
+
+import { readEntry } from '../../../../src/features/drafting-table/fields.ts';
+import { messageFor } from '../../../../src/features/drafting-table/problem-words.ts';
+import { seamWord } from '../../../../src/features/drafting-table/seams.ts';
+import { middleBody } from '../../../support/middle-body.ts';
+
+const told = (text: string, unit: Unit): string | undefined => {
+  const entry = readEntry('card.waistGirth', text, unit);
+  if (!('value' in entry)) throw new Error(`${text} is a length`);
+  const problems = checkMeasure('waistGirth', entry.value);
+  return messageFor('card.waistGirth', problems, { entries: { 'card.waistGirth': entry }, unit });
+};
+
+test('a figure that would do in the other unit is asked about, both ways', () => {
+  expect(told('72.4', 'in')?.replaceAll('\u00a0', ' ')).toMatch(
+    /^Did you mean 72\.4 cm = 28 1⁄2 in\? Waist 72 3⁄8 in must lie between/,
+  );
+  expect(told('28.5', 'cm')?.replaceAll('\u00a0', ' ')).toMatch(
+    /^Did you mean 28 1⁄2 in = 72\.4 cm\? Waist 28\.5 cm must lie between/,
+  );
+});
+
+test('a figure that would do in neither is only told its bounds', () => {
+  expect(told('980', 'cm')).toMatch(/^Waist/);
+  expect(told('3', 'in')).toMatch(/^Waist/);
+});
+
+test('seams are called by their trade words, their stretches by place', () => {
+  const draft = draftGown({ card: middleBody, style: { shaping: 'darts' }, rules: balanced });
+  const words = draft.proof.seams.map((row) => seamWord(row, draft));
+  expect(words).toContain('Waist seam, at the centre');
+  expect(words).toContain('Waist seam, between');
+  expect(words).toContain('Waist seam, at the side');
+  expect(words).toContain('Side seam');
+  expect(words).toContain('Centre back seam');
+  expect(words.join()).not.toMatch(/ [a-z](?:,|$)/);
+});
