@@ -3,6 +3,7 @@ import type { Logger } from 'pino';
 import type { Database } from './database/client.ts';
 import { ping } from './database/client.ts';
 import { accountRouter } from './features/account/router.ts';
+import type { Drafter } from './drafting/drafter.ts';
 import { draftsRouter } from './features/drafts/router.ts';
 import { gownsRouter } from './features/gowns/router.ts';
 import { createGown } from './features/gowns/service.ts';
@@ -24,6 +25,7 @@ export type Parts = {
   readonly database: Database;
   readonly log: Logger;
   readonly limits: Limits;
+  readonly drafter: Drafter;
   readonly printer: Printer;
   readonly overHttps: boolean;
   /** Addresses our own pages are opened under. */
@@ -51,10 +53,10 @@ export function buildApp(parts: Parts): Express {
   });
   app.use('/api', originCheck(parts.origins), express.json({ limit: bodyLimit, strict: false }));
   app.use(samplesRouter(parts.database));
-  app.use(draftsRouter(parts.limits));
+  app.use(draftsRouter(parts.limits, parts.drafter));
   app.use(printRouter(parts.limits, parts.printer));
   const own: Own = { ...parts, sessions: openSessions(parts.database, parts.overHttps) };
-  app.use(accountRouter(own, createGown));
+  app.use(accountRouter(own, (maker, gown) => createGown(own, maker, gown)));
   app.use(gownsRouter(own));
   app.use(measureCardsRouter(own));
   app.use('/api', nothingHere);

@@ -5,6 +5,7 @@ import { connect } from './database/client.ts';
 import { settleDemoAccount } from './database/demo-account.ts';
 import { migrate } from './database/migrate.ts';
 import { seedSamples } from './database/sample-seed.ts';
+import { openDrafter } from './drafting/drafter.ts';
 import { openPrinter } from './features/print/printer.ts';
 import { isOnThisMachineAlone, ownOrigins } from './http/own-origins.ts';
 import { listen } from './listen.ts';
@@ -25,9 +26,11 @@ export async function runServer(screens: {
   await seedSamples(database);
   await settleDemoAccount(database, isOnThisMachineAlone(settings));
   const { limits, overHttps, trustedProxies } = settings;
-  const printer = openPrinter(limits.printsWaiting);
+  const drafter = openDrafter(limits);
+  const printer = openPrinter(limits);
   const app = buildApp({
     database,
+    drafter,
     printer,
     log,
     limits,
@@ -42,7 +45,7 @@ export async function runServer(screens: {
   const stop = async () => {
     await stopListening();
     await screens.close?.();
-    await printer.close();
+    await Promise.all([drafter.close(), printer.close()]);
     await close();
     log.info('closed');
   };

@@ -19,6 +19,10 @@ export type Settings = {
 /** How much one address, and all together, may ask for. */
 export type Limits = {
   readonly draftsPerMinute: number;
+  /** Drafts that may wait for their turn, those of saves among them; further ones come again in a moment. */
+  readonly draftsWaiting: number;
+  /** How many of them one address, or for saves one account, may have in the line. */
+  readonly draftsFromOneAddress: number;
   /** Requests for gowns and measure cards of one's own; a save drafts as well. */
   readonly savesPerMinute: number;
   /** Sign-ins and sign-ups, whether they succeed or not. */
@@ -26,6 +30,7 @@ export type Limits = {
   readonly printsPerMinute: number;
   /** Prints that may wait for their turn; further ones are sent away for a moment. */
   readonly printsWaiting: number;
+  readonly printsFromOneAddress: number;
 };
 
 function wholeNumber(env: NodeJS.ProcessEnv, name: string, otherwise: number): number {
@@ -62,10 +67,13 @@ export function readSettings(env: NodeJS.ProcessEnv): Settings {
     logLevel: env['LOG_LEVEL'] ?? 'info',
     limits: {
       draftsPerMinute: wholeNumber(env, 'DRAFTS_PER_MINUTE', 240),
+      draftsWaiting: wholeNumber(env, 'DRAFTS_WAITING', 48),
+      draftsFromOneAddress: wholeNumber(env, 'DRAFTS_FROM_ONE_ADDRESS', 6),
       savesPerMinute: wholeNumber(env, 'SAVES_PER_MINUTE', 300),
       signInsPerMinute: wholeNumber(env, 'SIGN_INS_PER_MINUTE', 60),
       printsPerMinute: wholeNumber(env, 'PRINTS_PER_MINUTE', 30),
       printsWaiting: wholeNumber(env, 'PRINTS_WAITING', 24),
+      printsFromOneAddress: wholeNumber(env, 'PRINTS_FROM_ONE_ADDRESS', 8),
     },
   };
 }
@@ -80,7 +88,11 @@ export const places = {
   client: isBundled ? join(here, '..', 'client') : join(here, '..', 'dist', 'client'),
 };
 
-/** The printing thread's program. */
-export const printWorkerPath = isBundled
-  ? join(here, 'print-worker.js')
-  : join(here, 'features', 'print', 'print-worker-unbuilt.mjs');
+/** A thread's program: bundled beside this file, or as written in its folder. */
+const workerPath = (name: string, ...folder: readonly string[]): string =>
+  isBundled ? join(here, `${name}.js`) : join(here, ...folder, `${name}-unbuilt.mjs`);
+
+export const workerPaths = {
+  draft: workerPath('draft-worker', 'drafting'),
+  print: workerPath('print-worker', 'features', 'print'),
+};

@@ -2,6 +2,7 @@ import type { Router } from 'express';
 import type { Endpoint, Received } from '#shared/api/endpoint.ts';
 import { RefusalError } from './refusal.ts';
 import { type Asked, type Given, serveTo } from './serve.ts';
+import type { Drafter } from '../drafting/drafter.ts';
 import type { Database } from '../database/client.ts';
 import type { Limits } from '../settings.ts';
 import type { Caller, Sessions } from './session.ts';
@@ -11,6 +12,7 @@ export type Own = {
   readonly database: Database;
   readonly sessions: Sessions;
   readonly limits: Limits;
+  readonly drafter: Drafter;
 };
 
 /** Answers a line of the contract to people who are signed in, and to nobody else. */

@@ -8,6 +8,9 @@ import { unitAsked } from './unit-asked.ts';
 /** A file to keep, and the name it is offered under. */
 export type Download = { readonly bytes: Uint8Array; readonly disposition: string };
 
+/** A reply that a thread has written already, by the contract's own schema. */
+export type Written = { readonly writtenJson: Uint8Array };
+
 /** A reply is only read: what is drafted may stay as unchangeable as it is. */
 type Frozen<T> = T extends readonly (infer Item)[]
   ? readonly Frozen<Item>[]
@@ -18,7 +21,7 @@ type Frozen<T> = T extends readonly (infer Item)[]
 /** What a handler gives: the contract's own answer or, for a file, its bytes with a name. */
 export type Given<E extends Endpoint> = E['reply'] extends { kind: 'file' }
   ? Download
-  : Frozen<Answer<E>>;
+  : Frozen<Answer<E>> | Written;
 
 /** What a handler is given beside the body. */
 export type Asked<E extends Endpoint, C = undefined> = {
@@ -28,16 +31,11 @@ export type Asked<E extends Endpoint, C = undefined> = {
   readonly caller: C;
 };
 
-type Handler<E extends Endpoint> = (received: Received<E>, request: Request) => Promise<Given<E>>;
+type Handler<E extends Endpoint> = (received: Received<E>, asked: Asked<E>) => Promise<Given<E>>;
 
 /** Answers one line of the contract: reads the body by its schema, and writes the reply by its schema. */
 export function serve<E extends Endpoint>(router: Router, contract: E, handler: Handler<E>): void {
-  serveTo(
-    router,
-    () => Promise.resolve(undefined),
-    contract,
-    (received, { request }) => handler(received, request),
-  );
+  serveTo(router, () => Promise.resolve(undefined), contract, handler);
 }
 
 /** The same to somebody in particular: who it is is settled before anything of the request is read. */
@@ -88,6 +86,10 @@ function bodyOf<E extends Endpoint>(value: unknown): Received<E> {
 
 function send(contract: Endpoint, response: Response, given: unknown): void {
   if (contract.reply.kind === 'json') {
+    if (isWritten(given)) {
+      response.type('json').end(given.writtenJson);
+      return;
+    }
     response.json(contract.reply.schema.parse(given));
     return;
   }
@@ -96,6 +98,9 @@ function send(contract: Endpoint, response: Response, given: unknown): void {
   response.setHeader('Content-Disposition', disposition);
   response.end(bytes);
 }
+
+const isWritten = (given: unknown): given is Written =>
+  typeof given === 'object' && given !== null && 'writtenJson' in given;
 
 /** A file endpoint's handler can give nothing else. */
 function downloadOf(given: unknown): Download {

@@ -6,7 +6,12 @@ import { command, must } from './shell.mjs';
 const bin = join(root, 'node_modules', '.bin');
 
 /** Entries of the server that run as programs of their own. */
-const entries = ['server/index.ts', 'server/ops/draft.ts', 'server/features/print/print-worker.ts'];
+const entries = [
+  'server/index.ts',
+  'server/ops/draft.ts',
+  'server/drafting/draft-worker.ts',
+  'server/features/print/print-worker.ts',
+];
 
 /** What the server reads beside its code, and where the bundle looks for it. */
 const companions = [

@@ -1,6 +1,9 @@
 import { afterEach, describe, expect, it } from 'vitest';
 import { refusal } from '#shared/api/problem-codes.ts';
 import type { Limits } from '#server/settings.ts';
+import { saveGown } from '#shared/api/gowns.ts';
+import { firefox, openBrowser, openMaker } from './support/maker.ts';
+import { newGown, save } from './support/saved-gown.ts';
 import { card, post, print } from './support/request-bodies.ts';
 import { type ServerUnderTest, startServer } from './support/server-under-test.ts';
 
@@ -41,7 +44,84 @@ describe('one address may not take everybody’s turn', () => {
   });
 });
 
+describe('drafts do not hold up anybody', () => {
+  it('one address has so many places in the line; the rest come again', async () => {
+    const address = await open({ draftsFromOneAddress: 3 });
+    const replies = await Promise.all(
+      Array.from({ length: 40 }, () => post(`${address}/api/drafts`, { card })),
+    );
+    const statuses = replies.map((each) => each.status);
+    expect(new Set(statuses)).toEqual(new Set([200, 503]));
+    const sentAway = replies.find((each) => each.status === 503);
+    expect(sentAway?.headers.get('retry-after')).toBe('1');
+    expect(refusal.parse(await sentAway?.json()).code).toBe('busy');
+  });
+
+  it('others are answered while many are drawn', async () => {
+    const address = await open({});
+    await post(`${address}/api/drafts`, { card });
+    let drawn = 0;
+    const drafts = Array.from({ length: 60 }, () =>
+      post(`${address}/api/drafts`, { card }).then(async (reply) => {
+        await reply.arrayBuffer();
+        drawn += 1;
+      }),
+    );
+    await expect.poll(() => drawn).toBeGreaterThan(0);
+    expect((await fetch(`${address}/api/account`)).status).toBe(200);
+    expect(drawn).toBeLessThan(30);
+    await Promise.all(drafts);
+  });
+
+  it('a draft nobody waits for any more is not drawn', async () => {
+    const address = await open({ draftsFromOneAddress: 60 });
+    const leaving = new AbortController();
+    const left = Array.from({ length: 50 }, () =>
+      fetch(`${address}/api/drafts`, {
+        method: 'POST',
+        headers: { 'content-type': 'application/json' },
+        body: JSON.stringify({ card }),
+        signal: leaving.signal,
+      }).catch(() => 'left'),
+    );
+    await post(`${address}/api/drafts`, { card });
+    const before = performance.now();
+    await (await post(`${address}/api/drafts`, { card })).arrayBuffer();
+    const one = performance.now() - before;
+    leaving.abort();
+    await Promise.all(left);
+    const start = performance.now();
+    await post(`${address}/api/drafts`, { card });
+    expect(performance.now() - start).toBeLessThan(Math.max(10 * one, 400));
+  });
+
+  it('a save that cannot be is refused before anything is drawn', async () => {
+    const address = await open({});
+    const maker = await openMaker(address);
+    const gown = await newGown(maker);
+    const stranger = await openMaker(address);
+    const busy = await startServer({
+      databaseUrl: server?.databaseUrl ?? '',
+      limits: { draftsFromOneAddress: 0 },
+    });
+    const as = (one: typeof maker) => openBrowser(busy.address, firefox, one.cookie());
+    await as(stranger).refused(404, saveGown, save(1), gown);
+    await as(maker).refused(409, saveGown, save(7), gown);
+    const { code } = await as(maker).refused(503, saveGown, save(1), gown);
+    expect(code).toBe('busy');
+    await busy.close();
+  });
+});
+
 describe('under load', () => {
+  it('one address has so many prints in the line', async () => {
+    const address = await open({ printsFromOneAddress: 2 });
+    const replies = await Promise.all(
+      Array.from({ length: 8 }, () => post(`${address}/api/prints/tiles`, print)),
+    );
+    expect(new Set(replies.map((each) => each.status))).toEqual(new Set([200, 503]));
+  });
+
   it('prints are answered in the order they were asked for', async () => {
     const address = await open({});
     const answered: number[] = [];

@@ -1,5 +1,4 @@
-import { Router, type Request } from 'express';
-import { ipKeyGenerator } from 'express-rate-limit';
+import { Router } from 'express';
 import {
   changePassword,
   listSessions,
@@ -10,22 +9,18 @@ import {
   whoAmI,
 } from '#shared/api/accounts.ts';
 import type { Received } from '#shared/api/endpoint.ts';
-import type { Database } from '../../database/client.ts';
 import { addressLimit } from '../../http/address-limit.ts';
 import { type Own, serveOwn } from '../../http/serve-own.ts';
 import { serveTo } from '../../http/serve.ts';
 import type { Caller } from '../../http/session.ts';
+import { addressOf } from '../../http/turn-of.ts';
 import * as service from './service.ts';
 
 /** Keeps what was drawn before there was an account, as its first gown. */
 type KeepGown = (
-  database: Database,
   caller: Omit<Caller, 'email'>,
   gown: NonNullable<Received<typeof signUp>['gown']>,
 ) => Promise<{ readonly id: string }>;
-
-/** One household's addresses count as one where a network gives each machine its own (IPv6). */
-const addressOf = (request: Request): string => ipKeyGenerator(request.ip ?? '');
 
 export function accountRouter({ database, sessions, limits }: Own, keepGown: KeepGown): Router {
   const router = Router();
@@ -47,7 +42,7 @@ export function accountRouter({ database, sessions, limits }: Own, keepGown: Kee
     const claim = { ...body, address: addressOf(request) };
     const { id, email } = await service.signUp(database, claim);
     const place = await sessions.begin(request, response, id);
-    const kept = gown && (await keepGown(database, { accountId: id, ...place }, gown));
+    const kept = gown && (await keepGown({ accountId: id, ...place }, gown));
     return { account: { email }, ...(kept && { gownId: kept.id }) };
   });
 

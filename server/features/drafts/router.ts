@@ -1,13 +1,16 @@
 import { Router } from 'express';
 import { draftGownRequest } from '#shared/api/drafts.ts';
+import type { Drafter } from '../../drafting/drafter.ts';
 import { addressLimit } from '../../http/address-limit.ts';
-import { draftOrRefuse } from '../../http/draft-or-refuse.ts';
 import { serve } from '../../http/serve.ts';
+import { turnOf } from '../../http/turn-of.ts';
 import type { Limits } from '../../settings.ts';
 
-export function draftsRouter(limits: Limits): Router {
+export function draftsRouter(limits: Limits, drafter: Drafter): Router {
   const router = Router();
   router.use(draftGownRequest.path, addressLimit(limits.draftsPerMinute));
-  serve(router, draftGownRequest, (inputs) => Promise.resolve(draftOrRefuse(inputs, 'cm')));
+  serve(router, draftGownRequest, async (inputs, { request, response }) => ({
+    writtenJson: await drafter.reply(inputs, turnOf(request, response)),
+  }));
   return router;
 }

@@ -1,7 +1,10 @@
 import type { Answer } from '#shared/api/endpoint.ts';
 import type { Gown, GownContent, listGowns } from '#shared/api/gowns.ts';
+import { engineVersion } from '#shared/engine/draft-gown.ts';
 import type { Caller } from '../../http/session.ts';
-import { drawnPiecesOf, redrawingOf } from './drawing.ts';
+import type { Drafter } from '../../drafting/drafter.ts';
+import { lastingTurn } from '../../http/turn-of.ts';
+import { drawnPiecesOf } from './drawing.ts';
 import type { GownRow, ListedGownRow } from './repository.ts';
 
 type Summary = Answer<typeof listGowns>['gowns'][number];
@@ -32,14 +35,22 @@ export const listedGown = (row: ListedGownRow): Summary => ({
 });
 
 /** A gown in full, as the session that asks sees it. */
-export const gownView = (row: GownRow, { sessionId }: Pick<Caller, 'sessionId'>): Gown => ({
-  ...summaryOf(row),
-  content: contentOf(row),
-  drawn: drawnPiecesOf(row),
-  lastSave: {
-    savedAt: row.savedAt.toISOString(),
-    device: row.savedDevice,
-    here: row.savedSession === sessionId,
-  },
-  redrawing: redrawingOf(row),
-});
+export async function gownView(
+  row: GownRow,
+  { accountId, sessionId }: Pick<Caller, 'accountId' | 'sessionId'>,
+  drafter: Drafter,
+): Promise<Gown> {
+  const drawn = drawnPiecesOf(row);
+  const isOlder = drawn !== null && drawn.engine !== engineVersion;
+  return {
+    ...summaryOf(row),
+    content: contentOf(row),
+    drawn,
+    lastSave: {
+      savedAt: row.savedAt.toISOString(),
+      device: row.savedDevice,
+      here: row.savedSession === sessionId,
+    },
+    redrawing: isOlder ? await drafter.redrawing(drawn, lastingTurn(accountId)) : null,
+  };
+}

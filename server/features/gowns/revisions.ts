@@ -7,9 +7,9 @@ import type {
 } from '#shared/api/revisions.ts';
 import type { Database } from '../../database/client.ts';
 import { acknowledge, acknowledgedSave } from '../../database/saves.ts';
-import { conflict, notFound, sameSave } from '../../http/conflict.ts';
+import { notFound, sameSave } from '../../http/conflict.ts';
 import { drawnPiecesOf } from './drawing.ts';
-import { contentOf, gownView } from './gown-view.ts';
+import { contentOf } from './gown-view.ts';
 import { copyOf, keepAsRevision } from './keep-as-revision.ts';
 import { findGown, holdGown } from './repository.ts';
 import {
@@ -18,7 +18,13 @@ import {
   type ListedRevisionRow,
   listRevisionRows,
 } from './revision-repository.ts';
-import { changeGown, type Maker, type Saved } from './service.ts';
+import { changeGown, type Saved } from './service.ts';
+import {
+  type Maker,
+  OtherVersionError,
+  savedOrConflict,
+  type Workroom,
+} from './saved-or-conflict.ts';
 
 type Listed = Answer<typeof listing>['revisions'][number];
 
@@ -54,13 +60,13 @@ export async function readRevision(
 
 /** Names a gown as it was last saved. */
 export async function nameRevision(
-  database: Database,
+  workroom: Workroom,
   maker: Maker,
   gownId: string,
   { saveId, baseVersion, name }: Received<typeof naming>,
 ): Promise<Listed> {
   const { accountId } = maker;
-  return database.transaction(async (turn) => {
+  return savedOrConflict(workroom, maker, async (turn) => {
     const row = await holdGown(turn, accountId, gownId);
     if (row === undefined) throw notFound('gown');
     const before = await acknowledgedSave(turn, accountId, saveId);
@@ -69,7 +75,7 @@ export async function nameRevision(
       sameSave(before, made?.id, baseVersion);
       if (made !== undefined) return listed(made);
     }
-    if (row.version !== baseVersion) throw conflict(row, gownView(row, maker));
+    if (row.version !== baseVersion) throw new OtherVersionError(row);
     const revision = copyOf(row, name, false);
     await insertRevision(turn, revision);
     const { id: record, version, createdAt: savedAt } = revision;
@@ -80,12 +86,12 @@ export async function nameRevision(
 
 /** Makes a revision the gown again; what stood there is kept. */
 export const returnToRevision = (
-  database: Database,
+  workroom: Workroom,
   maker: Maker,
   { gownId, revisionId }: { readonly gownId: string; readonly revisionId: string },
   save: Received<typeof returning>,
 ): Promise<Saved> =>
-  changeGown(database, maker, gownId, save, async (turn, row) => {
+  changeGown(workroom, maker, gownId, save, async (turn, row) => {
     const revision = await findRevision(turn, maker.accountId, gownId, revisionId);
     if (revision === undefined) throw notFound('revision');
     await keepAsRevision(turn, row, `Before returning to ${revision.name}`);

@@ -23,7 +23,8 @@ import { listGownRows, setGownArchived, setGownTitle } from './repository.ts';
 import * as revisions from './revisions.ts';
 import * as service from './service.ts';
 
-export function gownsRouter({ database, sessions, limits }: Own): Router {
+export function gownsRouter(own: Own): Router {
+  const { database, sessions, limits } = own;
   const router = Router();
   router.use('/api/gowns', addressLimit(limits.savesPerMinute));
 
@@ -31,16 +32,16 @@ export function gownsRouter({ database, sessions, limits }: Own): Router {
     gowns: (await listGownRows(database, caller.accountId)).map(listedGown),
   }));
   serveOwn(router, sessions, createGown, (body, { caller }) =>
-    service.createGown(database, caller, body),
+    service.createGown(own, caller, body),
   );
   serveOwn(router, sessions, readGown, (_body, { caller, params }) =>
-    service.readGown(database, caller, params.gownId),
+    service.readGown(own, caller, params.gownId),
   );
   serveOwn(router, sessions, saveGown, (body, { caller, params }) =>
-    service.saveGown(database, caller, params.gownId, body),
+    service.saveGown(own, caller, params.gownId, body),
   );
   serveOwn(router, sessions, duplicateGown, (body, { caller, params }) =>
-    service.duplicateGown(database, caller, params.gownId, body),
+    service.duplicateGown(own, caller, params.gownId, body),
   );
   serveOwn(router, sessions, renameGown, async ({ title }, { caller, params }) =>
     doneTo('gown', await setGownTitle(database, caller.accountId, params.gownId, title)),
@@ -56,13 +57,13 @@ export function gownsRouter({ database, sessions, limits }: Own): Router {
     revisions: await revisions.listRevisions(database, caller, params.gownId),
   }));
   serveOwn(router, sessions, nameRevision, (body, { caller, params }) =>
-    revisions.nameRevision(database, caller, params.gownId, body),
+    revisions.nameRevision(own, caller, params.gownId, body),
   );
   serveOwn(router, sessions, readRevision, (_body, { caller, params }) =>
     revisions.readRevision(database, caller, params.gownId, params.revisionId),
   );
   serveOwn(router, sessions, returnToRevision, (body, { caller, params }) =>
-    revisions.returnToRevision(database, caller, params, body),
+    revisions.returnToRevision(own, caller, params, body),
   );
   return router;
 }

@@ -8,18 +8,22 @@ import type {
   saveGown as saving,
 } from '#shared/api/gowns.ts';
 import { engineVersion } from '#shared/engine/draft-gown.ts';
-import type { Database } from '../../database/client.ts';
+import type { Store } from '../../database/client.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
-import { conflict, notFound, sameSave } from '../../http/conflict.ts';
+import { notFound, sameSave } from '../../http/conflict.ts';
+import type { Drawing } from '../../drafting/drawing.ts';
 import { RefusalError } from '../../http/refusal.ts';
-import type { Caller } from '../../http/session.ts';
-import { type Drawing, drawn, kept, nothingDrawn } from './drawing.ts';
+import { lastingTurn } from '../../http/turn-of.ts';
+import { kept, nothingDrawn } from './drawing.ts';
 import { contentOf, gownView } from './gown-view.ts';
 import { keepAsRevision } from './keep-as-revision.ts';
 import { findGown, type GownRow, holdGown, insertGown, replaceGown } from './repository.ts';
-
-/** Whoever saves, as far as it matters here. */
-export type Maker = Omit<Caller, 'email'>;
+import {
+  type Maker,
+  OtherVersionError,
+  savedOrConflict,
+  type Workroom,
+} from './saved-or-conflict.ts';
 
 export type Saved = { readonly id: string; readonly version: number; readonly savedAt: string };
 
@@ -31,15 +35,31 @@ export const savedAs = ({ record, version, savedAt }: Acknowledged): Saved => ({
 
 const columnsOf = ({ typed, unread, inputs }: GownContent) => ({ typed, unread, ...inputs });
 
-export async function readGown(database: Database, maker: Maker, id: string): Promise<Gown> {
+export async function readGown(
+  { database, drafter }: Workroom,
+  maker: Maker,
+  id: string,
+): Promise<Gown> {
   const row = await findGown(database, maker.accountId, id);
   if (row === undefined) throw notFound('gown');
-  return gownView(row, maker);
+  return gownView(row, maker, drafter);
+}
+
+/** The gown a save under this number has put on the server already, if it has. */
+async function putBefore(
+  store: Store,
+  { accountId }: Maker,
+  saveId: string,
+): Promise<Saved | undefined> {
+  const before = await acknowledgedSave(store, accountId, saveId);
+  if (before === undefined) return undefined;
+  const gown = await findGown(store, accountId, before.record);
+  return savedAs(sameSave(before, gown?.id, 1));
 }
 
 /** Puts a gown on the server once, however often it is sent. */
 async function putGown(
-  database: Database,
+  { database }: Workroom,
   maker: Maker,
   saveId: string,
   parts: { readonly title: string; readonly content: GownContent; readonly drawing: Drawing },
@@ -49,9 +69,7 @@ async function putGown(
   const save = { accountId, saveId, record: randomUUID(), version: 1, savedAt: now };
   return database.transaction(async (turn) => {
     if (!(await acknowledge(turn, save))) {
-      const before = await acknowledgedSave(turn, accountId, saveId);
-      const gown = before && (await findGown(turn, accountId, before.record));
-      return savedAs(sameSave(before ?? save, gown?.id, 1));
+      return (await putBefore(turn, maker, saveId)) ?? savedAs(sameSave(save, undefined, 1));
     }
     await insertGown(turn, {
       id: save.record,
@@ -71,24 +89,28 @@ async function putGown(
   });
 }
 
-export const createGown = (
-  database: Database,
+export async function createGown(
+  workroom: Workroom,
   maker: Maker,
   { saveId, title, content }: Received<typeof creation>,
-): Promise<Saved> =>
-  putGown(database, maker, saveId, { title, content, drawing: drawn(content) ?? nothingDrawn });
+): Promise<Saved> {
+  const before = await putBefore(workroom.database, maker, saveId);
+  if (before !== undefined) return before;
+  const drawing = await workroom.drafter.drawing(content, lastingTurn(maker.accountId));
+  return putGown(workroom, maker, saveId, { title, content, drawing: drawing ?? nothingDrawn });
+}
 
 export async function duplicateGown(
-  database: Database,
+  workroom: Workroom,
   maker: Maker,
   id: string,
   { saveId, title }: Received<typeof duplication>,
 ): Promise<Saved> {
-  const row = await findGown(database, maker.accountId, id);
+  const row = await findGown(workroom.database, maker.accountId, id);
   if (row === undefined) throw notFound('gown');
   const { engine, draftNumber, drawnFrom, pieces, picture, fresh } = row;
   const drawing = { engine, draftNumber, drawnFrom, pieces, picture, fresh };
-  return putGown(database, maker, saveId, { title, content: contentOf(row), drawing });
+  return putGown(workroom, maker, saveId, { title, content: contentOf(row), drawing });
 }
 
 /** What a save makes of the gown it finds. */
@@ -98,24 +120,38 @@ export type Change = {
   readonly parentId?: string;
 };
 
+/** What a save says of itself. */
+type Save = { readonly saveId: string; readonly baseVersion: number };
+
+/** The answer to a save done before; none where it is new and was made from the version there is. */
+async function savedBefore(
+  store: Store,
+  row: GownRow,
+  { saveId, baseVersion }: Save,
+): Promise<Saved | undefined> {
+  const before = await acknowledgedSave(store, row.accountId, saveId);
+  if (before !== undefined) return savedAs(sameSave(before, row.id, baseVersion + 1));
+  if (row.version !== baseVersion) throw new OtherVersionError(row);
+  return undefined;
+}
+
 /**
  * The one way a gown changes: held, so that two saves take turns; a save done before is answered as
  * before; one made from another version is refused.
  */
 export async function changeGown(
-  database: Database,
+  workroom: Workroom,
   maker: Maker,
   id: string,
-  { saveId, baseVersion }: { readonly saveId: string; readonly baseVersion: number },
-  change: (turn: Parameters<typeof holdGown>[0], row: GownRow) => Promise<Change>,
+  save: Save,
+  change: (turn: Store, row: GownRow) => Promise<Change>,
 ): Promise<Saved> {
   const { accountId } = maker;
-  return database.transaction(async (turn) => {
+  return savedOrConflict(workroom, maker, async (turn) => {
     const row = await holdGown(turn, accountId, id);
     if (row === undefined) throw notFound('gown');
-    const before = await acknowledgedSave(turn, accountId, saveId);
-    if (before !== undefined) return savedAs(sameSave(before, id, baseVersion + 1));
-    if (row.version !== baseVersion) throw conflict(row, gownView(row, maker));
+    const before = await savedBefore(turn, row, save);
+    if (before !== undefined) return before;
     const { content, drawing, ...parent } = await change(turn, row);
     const savedAt = new Date();
     const version = await replaceGown(turn, row, {
@@ -126,28 +162,44 @@ export async function changeGown(
       savedDevice: maker.device,
       savedSession: maker.sessionId,
     });
-    const save = { accountId, saveId, record: id, version, savedAt };
-    await acknowledge(turn, save);
-    return savedAs(save);
+    const acknowledged = { accountId, saveId: save.saveId, record: id, version, savedAt };
+    await acknowledge(turn, acknowledged);
+    return savedAs(acknowledged);
   });
 }
 
-/** Saves what is on the table, drawn by the engine the maker has agreed to. */
+function refuseOtherEngine(engine: string, row: GownRow): void {
+  if (engine === engineVersion || engine === row.engine) return;
+  throw new RefusalError(
+    'engine-changed',
+    'This page draws by older rules than the server. Open it again; what you typed is kept.',
+  );
+}
+
+/**
+ * Saves what is on the table, drawn by the engine the maker has agreed to. Whether it may be saved at
+ * all is looked at before it is drawn, and once more with the gown held.
+ */
 export async function saveGown(
-  database: Database,
+  workroom: Workroom,
   maker: Maker,
   id: string,
   { engine, content, keepReplaced, ...save }: Received<typeof saving>,
 ): Promise<Saved> {
-  const isCurrent = engine === engineVersion;
-  const fresh = isCurrent ? drawn(content) : undefined;
-  return changeGown(database, maker, id, save, async (turn, row) => {
-    if (!isCurrent && engine !== row.engine) {
-      throw new RefusalError(
-        'engine-changed',
-        'This page draws by older rules than the server. Open it again; what you typed is kept.',
-      );
-    }
+  const before = await savedOrConflict(workroom, maker, async (turn) => {
+    const row = await findGown(turn, maker.accountId, id);
+    if (row === undefined) throw notFound('gown');
+    const done = await savedBefore(turn, row, save);
+    if (done === undefined) refuseOtherEngine(engine, row);
+    return done;
+  });
+  if (before !== undefined) return before;
+  const fresh =
+    engine === engineVersion
+      ? await workroom.drafter.drawing(content, lastingTurn(maker.accountId))
+      : undefined;
+  return changeGown(workroom, maker, id, save, async (turn, row) => {
+    refuseOtherEngine(engine, row);
     const redrawn = fresh !== undefined && row.engine !== null && row.engine !== engine;
     if (redrawn) await keepAsRevision(turn, row, `As drawn by engine ${row.engine}`);
     if (keepReplaced) await keepAsRevision(turn, row, `As saved from ${row.savedDevice}`);

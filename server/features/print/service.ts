@@ -2,7 +2,7 @@ import type { PrintRequest } from '#shared/api/requests.ts';
 import { piecesSvg } from '#shared/exports/svg.ts';
 import { choosePieces } from '#shared/sheets/selection.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
-import { draftOrRefuse } from '../../http/draft-or-refuse.ts';
+import { draftOrRefuse } from '../../drafting/draft-or-refuse.ts';
 import { refusalFor } from '../../http/refusal.ts';
 import { chalkSheetPdf } from './chalk-sheet-pdf.ts';
 import { tilesPdf } from './tiles-pdf.ts';

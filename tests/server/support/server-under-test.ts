@@ -5,6 +5,7 @@ import { pino } from 'pino';
 import { inject } from 'vitest';
 import { buildApp } from '#server/app.ts';
 import { connect } from '#server/database/client.ts';
+import { openDrafter } from '#server/drafting/drafter.ts';
 import { openPrinter } from '#server/features/print/printer.ts';
 import { ownOrigins } from '#server/http/own-origins.ts';
 import { listen } from '#server/listen.ts';
@@ -22,10 +23,13 @@ export type ServerUnderTest = {
 
 const roomy: Limits = {
   draftsPerMinute: 10_000,
+  draftsWaiting: 100,
+  draftsFromOneAddress: 100,
   savesPerMinute: 10_000,
   signInsPerMinute: 10_000,
   printsPerMinute: 10_000,
   printsWaiting: 100,
+  printsFromOneAddress: 100,
 };
 
 async function asAdmin(sentence: string): Promise<void> {
@@ -52,10 +56,12 @@ export async function startServer(
   const { database, close } = connect(databaseUrl, () => undefined);
   const lines: string[] = [];
   const limits = { ...roomy, ...options.limits };
-  const printer = openPrinter(limits.printsWaiting);
+  const drafter = openDrafter(limits);
+  const printer = openPrinter(limits);
   const port = await freePort();
   const app = buildApp({
     database,
+    drafter,
     printer,
     log: pino({ base: null }, { write: (line) => void lines.push(line) }),
     limits,
@@ -72,7 +78,7 @@ export async function startServer(
     databaseUrl,
     close: async () => {
       await stopListening();
-      await printer.close();
+      await Promise.all([drafter.close(), printer.close()]);
       await close();
       await asAdmin(`drop database if exists ${name} with (force)`);
     },

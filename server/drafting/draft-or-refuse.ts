@@ -2,7 +2,7 @@ import { DraftingError } from '#shared/drafting/drafting-error.ts';
 import type { Draft, DraftInputs } from '#shared/engine/draft.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
 import type { Unit } from '#shared/units/said.ts';
-import { refusalFor } from './refusal.ts';
+import { refusalFor } from '../http/refusal.ts';
 
 /** Problems of a value outside its bounds, rather than of a gown that does not come together. */
 const boundsCodes = new Set(['out-of-range', 'disagree', 'not-a-number']);

@@ -1,0 +1,73 @@
+import { once } from 'node:events';
+import { setTimeout as pause } from 'node:timers/promises';
+import { Worker } from 'node:worker_threads';
+import { RefusalError } from './refusal.ts';
+import type { ThreadAnswer } from './thread-work.ts';
+
+/** A thread beside the one that answers requests; asked for one thing at a time. */
+export type WorkerThread<Order> = {
+  /** Throws RefusalError where the thread refuses. */
+  readonly ask: (order: Order) => Promise<unknown>;
+  readonly close: () => Promise<void>;
+};
+
+/** No gown takes a second; a thread that takes so long is lost, and a new one begun. */
+const patience = 30_000;
+
+/** A thread that runs a program, begun when it is first asked and again when it is lost. */
+export function openThread<Order>(program: string): WorkerThread<Order> {
+  let worker: Worker | undefined;
+
+  async function drop(): Promise<void> {
+    const dropped = worker;
+    worker = undefined;
+    await dropped?.terminate();
+  }
+
+  return {
+    ask: async (order) => {
+      worker ??= new Worker(program);
+      try {
+        return madeIn(await nextAnswer(worker, order));
+      } catch (error) {
+        if (!(error instanceof RefusalError)) await drop();
+        throw error;
+      }
+    },
+    close: drop,
+  };
+}
+
+async function nextAnswer(worker: Worker, order: unknown): Promise<ThreadAnswer<unknown>> {
+  const settled = new AbortController();
+  const { signal } = settled;
+  try {
+    const answered = once(worker, 'message', { signal });
+    const ended = once(worker, 'exit', { signal }).then(() => {
+      throw new Error('The thread ended.');
+    });
+    const late = pause(patience, undefined, { signal }).then(() => {
+      throw new Error('The thread did not answer.');
+    });
+    worker.postMessage(order);
+    return answerIn(await Promise.race([answered, ended, late]));
+  } finally {
+    settled.abort();
+  }
+}
+
+/** The thread posts nothing else. */
+function answerIn([posted]: readonly unknown[]): ThreadAnswer<unknown> {
+  return posted as ThreadAnswer<unknown>;
+}
+
+function madeIn(answer: ThreadAnswer<unknown>): unknown {
+  if (answer.kind === 'made') return answer.made;
+  if (answer.kind === 'refused') {
+    throw new RefusalError(answer.code, answer.message, { problems: answer.problems });
+  }
+  const fault = new Error('A thread met a fault.');
+  fault.name = answer.name;
+  fault.stack = answer.frames;
+  throw fault;
+}
