@@ -1,24 +1,11 @@
-/**
- * Pictures of the places of an account in every width and theme, to be looked at:
- * E2E_URL=… npx tsx e2e/own-shots.ts writes test-results/shots/.
- */
 import { randomUUID } from 'node:crypto';
 
-import { chromium, type Page } from '@playwright/test';
+import type { Page } from '@playwright/test';
 
 import { gownTable } from './screens/gown-table.ts';
 
-const address = process.env['E2E_URL'] ?? 'http://127.0.0.1:4173';
-const folder = 'test-results/shots';
-const widths = [390, 1280, 1920];
-const heights: Record<number, number> = { 390: 844, 1280: 800, 1920: 1080 };
-
-const browser = await chromium.launch({
-  executablePath: '/usr/bin/chromium',
-  args: process.getuid?.() === 0 ? ['--no-sandbox'] : [],
-});
-
-async function scenes(page: Page, keep: (name: string) => Promise<void>): Promise<void> {
+/** Walks through the places of a new account, a picture at each. */
+export async function ownScenes(page: Page, keep: (name: string) => Promise<void>): Promise<void> {
   const table = gownTable(page);
   await table.open();
   await page.getByRole('button', { name: /^Judith/ }).click();
@@ -63,9 +50,9 @@ async function scenes(page: Page, keep: (name: string) => Promise<void>): Promis
   await table.revisions.getByRole('img').first().waitFor();
   await keep('revisions');
   await table.revisions.getByRole('button', { name: 'Close' }).click();
-  const address = page.url();
+  const gownAddress = page.url();
   await lists(page, keep);
-  await page.goto(address);
+  await page.goto(gownAddress);
   await table.drawing.waitFor();
   await page.context().clearCookies();
   await table.setStyle('kneeFinished', '81');
@@ -98,23 +85,3 @@ async function lists(page: Page, keep: (name: string) => Promise<void>): Promise
   await page.getByText('this one').waitFor();
   await keep('account');
 }
-
-for (const width of widths) {
-  for (const colorScheme of ['light', 'dark'] as const) {
-    const context = await browser.newContext({
-      viewport: { width, height: heights[width] ?? 900 },
-      colorScheme,
-      baseURL: address,
-      locale: 'en-GB',
-      hasTouch: width < 500,
-    });
-    const page = await context.newPage();
-    const keep = async (name: string) => {
-      await page.waitForTimeout(300);
-      await page.screenshot({ path: `${folder}/own-${name}-${width}-${colorScheme}.png` });
-    };
-    await scenes(page, keep);
-    await context.close();
-  }
-}
-await browser.close();

@@ -5,6 +5,7 @@
 import { chromium, type Page } from '@playwright/test';
 
 import { tenMeasures } from './fixtures/measures.ts';
+import { ownScenes } from './own-shots.ts';
 import { draftingTable } from './screens/drafting-table.ts';
 
 const address = process.env['E2E_URL'] ?? 'http://127.0.0.1:4173';
@@ -27,7 +28,7 @@ async function scenes(page: Page, keep: (name: string) => Promise<void>): Promis
   await page.waitForLoadState('networkidle');
   await keep('empty');
   await table.start.click();
-  await table.typeOn(tenMeasures.centimetres);
+  await table.typeOn(['Anna', ...tenMeasures.centimetres]);
   await table.drawing.waitFor();
   await table.field('card.bustSpan').focus();
   await keep('table');
@@ -45,17 +46,21 @@ async function scenes(page: Page, keep: (name: string) => Promise<void>): Promis
 
 for (const width of widths) {
   for (const colorScheme of ['light', 'dark'] as const) {
-    const page = await browser.newPage({
+    const context = await browser.newContext({
       viewport: { width, height: heights[width] ?? 900 },
       colorScheme,
       baseURL: address,
       hasTouch: width < 500,
     });
-    await scenes(page, async (name) => {
+    const page = await context.newPage();
+    const keep = async (name: string) => {
       await page.waitForTimeout(250);
       await page.screenshot({ path: `${folder}/${name}-${width}-${colorScheme}.png` });
-    });
-    await page.close();
+    };
+    await scenes(page, keep);
+    await page.evaluate(() => localStorage.clear());
+    await ownScenes(page, (name) => keep(`own-${name}`));
+    await context.close();
   }
 }
 await browser.close();

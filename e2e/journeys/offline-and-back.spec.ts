@@ -1,5 +1,7 @@
 import type { Page } from '@playwright/test';
 
+import { gownSchema } from '#shared/api/gowns.ts';
+
 import { walkTo } from '../fixtures/keyboard.ts';
 import { expect, test } from '../fixtures/maker.ts';
 
@@ -8,7 +10,7 @@ const mend = (page: Page) => page.unroute('**/api/**');
 
 async function versionOf(page: Page, gownId: string): Promise<number> {
   const answer = await page.request.get(`/api/gowns/${gownId}`);
-  return Number((await answer.json()).version);
+  return gownSchema.parse(await answer.json()).version;
 }
 
 for (const width of [390, 1280]) {

@@ -1,3 +1,5 @@
+import { gownSchema } from '#shared/api/gowns.ts';
+
 import { walkTo } from '../fixtures/keyboard.ts';
 import { expect, test } from '../fixtures/maker.ts';
 
@@ -127,10 +129,11 @@ test('a gown drawn by older rules shows what would change before it changes', as
 }) => {
   await page.route(`**/api/gowns/${maker.gownId}`, async (route) => {
     const response = await route.fetch();
-    const kept = await response.json();
-    const [piece] = kept.drawn.pieces;
-    const change = { piece: piece.name, title: piece.title, change: 'shape', deviation: 3.2 };
-    const redrawing = { engine: '1.0.0', changes: [change], deviation: 3.2, problems: [] };
+    const kept = gownSchema.parse(await response.json());
+    const changes = (kept.drawn?.pieces ?? [])
+      .slice(0, 1)
+      .map(({ name, title }) => ({ piece: name, title, change: 'shape', deviation: 3.2 }));
+    const redrawing = { engine: '1.0.0', changes, deviation: 3.2, problems: [] };
     const drawn = { ...kept.drawn, engine: '0.9.0' };
     await route.fulfill({ json: { ...kept, drawnBy: '0.9.0', drawn, redrawing } });
   });

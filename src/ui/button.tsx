@@ -17,7 +17,7 @@ type ButtonProps = ComponentProps<'button'> & {
 export const Button = ({ kind = 'plain', slim = false, className = '', ...rest }: ButtonProps) => (
   <button
     type="button"
-    className={`inline-flex items-center justify-center gap-2 rounded-one border disabled:opacity-60 ${slim ? 'min-h-9 px-2' : 'min-h-10 px-4'} ${looks[kind]} ${className}`}
+    className={`inline-flex items-center justify-center gap-2 rounded-one border disabled:opacity-60 ${slim ? 'min-h-9 px-2 whitespace-nowrap' : 'min-h-10 px-4'} ${looks[kind]} ${className}`}
     {...rest}
   />
 );

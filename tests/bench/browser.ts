@@ -68,7 +68,8 @@ export async function benchBrowser(): Promise<BrowserBench> {
 
 const round = (value: number): number => Math.round(value * 100) / 100;
 
-async function layOut(page: Page, address: string): Promise<void> {
+/** Opens the table on a drawing that the browser had kept. */
+export async function layOut(page: Page, address: string): Promise<void> {
   const entries = Object.fromEntries(
     Object.entries(measures).map(([key, value]) => [`card.${key}`, { value }]),
   );

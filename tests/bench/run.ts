@@ -1,5 +1,6 @@
 import { bundle } from '../support/bundle.ts';
 import { benchBrowser } from './browser.ts';
+import { benchDrag } from './drag.ts';
 import { benchPdf } from './pdf.ts';
 import type { Measured } from './redraw.ts';
 
@@ -20,4 +21,4 @@ const write = (lines: readonly object[]): void => {
 const redraw = asRedrawBench(await import(await bundle(new URL('redraw.ts', import.meta.url))));
 write(await redraw.benchRedraw());
 write(await benchPdf());
-write([await benchBrowser()]);
+write([await benchBrowser(), await benchDrag()]);

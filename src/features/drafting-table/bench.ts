@@ -16,6 +16,23 @@ export type BenchAction =
 
 /** The table after an action, and the change written down where there was one. */
 export function bench(state: Bench, action: BenchAction): Bench {
+  return isOfTable(action) ? edited(state, action) : stepped(state, action);
+}
+
+type Step = Exclude<BenchAction, TableAction>;
+
+const steps: readonly BenchAction['type'][] = ['undo', 'redo', 'released', 'work laid'];
+
+const isOfTable = (action: BenchAction): action is TableAction => !steps.includes(action.type);
+
+function edited(state: Bench, action: TableAction): Bench {
+  const { table, history } = state;
+  const next = tableState(table, action);
+  if (next === table) return state;
+  return { table: next, history: followed(history, table, next, action) };
+}
+
+function stepped(state: Bench, action: Step): Bench {
   const { table, history } = state;
   switch (action.type) {
     case 'undo':
@@ -30,11 +47,6 @@ export function bench(state: Bench, action: BenchAction): Bench {
     case 'work laid': {
       const next = redrawn({ ...table, ...action.work });
       return { table: next, history: recorded(closed(history), table, next) };
-    }
-    default: {
-      const next = tableState(table, action);
-      if (next === table) return state;
-      return { table: next, history: followed(history, table, next, action) };
     }
   }
 }

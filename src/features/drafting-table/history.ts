@@ -39,12 +39,11 @@ export function recorded(
   after: Choices,
   gesture?: string,
 ): History {
-  const goesOn = gesture !== undefined && history.open?.gesture === gesture;
-  const { from, past } =
-    goesOn && history.open ? history.open : { from: before, past: history.past };
+  const going = history.open?.gesture === gesture ? history.open : undefined;
+  const { from, past } = going ?? { from: before, past: history.past };
   const keys = differingParts(from, after);
   const open = gesture === undefined ? {} : { open: { gesture, from, past } };
-  if (keys.length === 0 && !goesOn) return { ...history, ...open };
+  if (keys.length === 0 && going === undefined) return { ...history, ...open };
   const change = { before: some(from, keys), after: some(after, keys) };
   return { past: keys.length === 0 ? past : [...past, change].slice(-most), future: [], ...open };
 }

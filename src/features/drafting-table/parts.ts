@@ -21,15 +21,6 @@ const isChoice = (key: PartKey): key is ChoiceKey => choiceKeys.some((each) => e
 export const partOf = (choices: Choices, key: PartKey): Part =>
   (isChoice(key) ? choices[key] : choices.entries[key]) ?? null;
 
-/** Everything on the table, part by part; what is left open is not mentioned. */
-export const partsOf = (choices: Choices): Parts =>
-  Object.fromEntries(
-    partKeys.flatMap((key) => {
-      const part = partOf(choices, key);
-      return part === null ? [] : [[key, part]];
-    }),
-  );
-
 /** Whether two parts mean the same; how a figure was written does not matter where it could be read. */
 export function samePart(a: Part, b: Part): boolean {
   if (a === b) return true;

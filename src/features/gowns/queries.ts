@@ -35,7 +35,6 @@ export const cardsQuery = queryOptions({
   queryFn: async ({ signal }) => (await call(listMeasureCards, undefined, signal)).cards,
   staleTime: 0,
 });
-export type ListedCard = Answer<typeof listMeasureCards>['cards'][number];
 
 /** What a list can do to one of its records, or to have a new one. */
 export type Deed =

@@ -83,7 +83,7 @@ export const CardTable = ({ cardId, card, place, signIn }: CardTableProps) => {
       </header>
       {standing === 'refused' && <Notice>{`${message ?? ''} What you typed is kept here.`}</Notice>}
       <main id="content" className="mx-auto w-full max-w-xl grow bg-cloth px-4 py-4">
-        <MeasureCard state={table} dispatch={dispatch} />
+        <MeasureCard alone state={table} dispatch={dispatch} />
       </main>
       {standing === 'conflict' && current !== undefined && (
         <FullSheet

@@ -14,12 +14,19 @@ type MeasureCardProps = {
   readonly dispatch: Dispatch<TableAction>;
   /** What else can be done with the card. */
   readonly tools?: ReactNode;
+  /** Whether the card lies here without a style card. */
+  readonly alone?: boolean;
 };
 
 const everyMeasure = [...coreMeasures, ...furtherMeasures];
 
 /** The list of measures beside a body figure on which the current measure's tape is lit. */
-export const MeasureCard = memo(function MeasureCard({ state, dispatch, tools }: MeasureCardProps) {
+export const MeasureCard = memo(function MeasureCard({
+  state,
+  dispatch,
+  tools,
+  alone = false,
+}: MeasureCardProps) {
   const [current, setCurrent] = useState<FieldKey>();
   const [all, setAll] = useState(false);
   const key = everyMeasure.find((each) => current === `card.${each}`);
@@ -81,7 +88,7 @@ export const MeasureCard = memo(function MeasureCard({ state, dispatch, tools }:
         >
           {all ? 'Only the ten measures' : `All measures (${everyMeasure.length})`}
         </button>
-        <ClearCard dispatch={dispatch} />
+        <ClearCard what={alone ? 'card' : 'table'} dispatch={dispatch} />
         {tools}
         {all && (
           <>

@@ -29,13 +29,14 @@ export const TryTable = () => {
   });
   const [kept, setKept] = useState(true);
   const taken = useRef(false);
+  const { table, history } = state;
+  const { unit, name, date, topLine, shaping, preset, entries } = table;
   const keep = () => {
     if (taken.current) return;
-    setKept(keepTable(state.table));
-    keepTableHistory(state.history);
+    setKept(keepTable(table));
+    keepTableHistory(history);
   };
-  useKeeping(keep, [state]);
-  const { table } = state;
+  useKeeping(keep, [unit, name, date, topLine, shaping, preset, entries, history]);
   return (
     <DraftingTable
       bench={state}

@@ -1,0 +1,37 @@
+import { chromium } from '@playwright/test';
+const addr='http://localhost:5199';
+const b = await chromium.launch({executablePath:'/usr/bin/chromium', args: process.getuid?.()===0?['--no-sandbox']:[]});
+const vals=[92,78,72.4,98,19,26.5,33.5,44,20.5,106];
+const keys=['bustGirth','underbustGirth','waistGirth','hipGirth','bustSpan','sideNeckToBustPoint','sideNeckToUnderbust','frontWaistLength','waistToHip','waistToFloor'];
+for (const [w,h,scheme] of [[1280,800,'light'],[390,844,'light'],[1280,800,'dark']] as const) {
+  const phone=w<500;
+  const ctx=await b.newContext({viewport:{width:w,height:h},colorScheme:scheme,locale:'en-GB',hasTouch:phone,isMobile:phone});
+  const p=await ctx.newPage();
+  p.on('pageerror',e=>console.log('ERR',e.message));
+  await p.goto(addr+'/try');
+  await p.getByRole('button',{name:'Type ten measures'}).click();
+  await p.waitForTimeout(200);
+  if (w===1280&&scheme==='light') console.log('focused', await p.evaluate(()=>(document.activeElement as HTMLInputElement)?.name));
+  await p.locator('input[name="card.name"]').fill('Anna');
+  for (let i=0;i<10;i++) await p.locator(`input[name="card.${keys[i]}"]`).fill(String(vals[i]));
+  await p.locator(`input[name="card.waistToFloor"]`).press('Enter');
+  await p.waitForTimeout(400);
+  console.log(w, scheme, await p.evaluate(()=>document.activeElement?.getAttribute('aria-label')??document.activeElement?.textContent?.slice(0,30)));
+  const shot=(n:string)=>p.screenshot({path:`/tmp/shots/${n}-${w}-${scheme}.png`});
+  await shot('table');
+  await p.getByRole('tab',{name:'Steps'}).click();
+  await p.getByRole('tabpanel').getByRole('button').nth(17).click({timeout:5000}); await p.waitForTimeout(200);
+  await shot('steps');
+  await p.getByRole('tab',{name:'Proof'}).click();
+  if (phone) await p.getByRole('tab',{name:'Measures'}).click();
+  await p.locator('input[name="card.waistGirth"]').fill('28.5');
+  await p.locator('input[name="card.waistGirth"]').press('Enter');
+  await p.waitForTimeout(300); await shot('stale-field');
+  if (phone) await p.getByRole('tab',{name:'Proof'}).click();
+  await p.waitForTimeout(200); await shot('stale');
+  await p.getByRole('button',{name:'Print',exact:true}).first().click(); await p.waitForTimeout(300); await shot('print');
+  await p.keyboard.press('Escape');
+  await p.getByRole('combobox',{name:'Zoom to a piece'}).selectOption('front-top-side'); await p.waitForTimeout(300); await shot('zoomed');
+  await ctx.close();
+}
+await b.close();
