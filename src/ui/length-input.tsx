@@ -1,5 +1,6 @@
 import type { KeyboardEvent } from 'react';
 
+import { focusNext } from '../lib/focus-next.ts';
 import type { Wiring } from './field.tsx';
 
 type LengthInputProps = {
@@ -42,14 +43,4 @@ export function LengthInput(props: LengthInputProps) {
       className="figures h-9 scroll-mt-48 scroll-mb-4 w-26 shrink-0 rounded-one border border-rule bg-paper px-2 text-right aria-invalid:border-madder aria-invalid:text-madder"
     />
   );
-}
-
-/** Enter goes to the next figure of the same card. */
-function focusNext(from: HTMLInputElement): void {
-  const card = from.closest('form');
-  if (card === null) return;
-  const inputs = [...card.querySelectorAll<HTMLInputElement>('input[inputmode]')];
-  const next = inputs[inputs.indexOf(from) + 1];
-  if (next === undefined) from.blur();
-  else next.focus();
 }

@@ -8,6 +8,7 @@ type LookKeys = {
   readonly zoom: (by: number) => void;
   readonly fit: () => void;
   readonly walkSeams: (by: number) => void;
+  readonly act: () => void;
   readonly letGo: () => void;
 };
 
@@ -49,7 +50,7 @@ export function drawingKey(
     n: () => walk(1),
     p: () => walk(-1),
     Escape: tool?.letGo ?? look.letGo,
-    Enter: tool?.act,
+    Enter: tool?.act ?? look.act,
     ' ': tool?.act,
   };
   return others[key];
@@ -57,7 +58,7 @@ export function drawingKey(
 
 /** The keys in words, for who reaches the drawing by them. */
 export const keyWords: { readonly [T in Tool]: string } = {
-  look: 'Arrow keys move, + and − zoom, 0 fits, N and P walk the seams, Tab reaches the handles',
+  look: 'Arrow keys move, + and − zoom, 0 fits, N and P walk the seams, Tab reaches the handles, Enter prints',
   move: 'N and P choose a piece, arrow keys move it, with Shift farther, Enter snaps it back',
   tape: 'N and P go from corner to corner, arrow keys step, Enter holds the tape there, Escape lets go',
 };

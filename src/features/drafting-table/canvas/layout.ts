@@ -35,7 +35,7 @@ const nameRoom = 140;
 const beforeFlares = 20;
 
 /** The pieces as they were drafted: each side in one frame, front, back and flare side by side. */
-export function asDrafted(pieces: readonly FinishedPiece[]): Layout {
+export function asDrafted(pieces: readonly FinishedPiece[], aspect = 1): Layout {
   const groups = [
     pieces.filter((each) => each.part !== 'flare' && each.side === 'front'),
     pieces.filter((each) => each.part !== 'flare' && each.side === 'back'),
@@ -58,34 +58,37 @@ export function asDrafted(pieces: readonly FinishedPiece[]): Layout {
     [...(front?.placed ?? []), ...(back?.placed ?? [])],
     flare?.placed ?? [],
     frames,
+    aspect,
   );
 }
 
 /** The pieces cut apart, as they lie in the SVG too, but with the flares so stacked that a screen shows all large. */
-export function asCut(pieces: readonly FinishedPiece[]): Layout {
+export function asCut(pieces: readonly FinishedPiece[], aspect = 1): Layout {
   const placed = spread(pieces).placed.map(({ piece, translate }) => place(piece, translate));
   const bodies = placed.filter(({ piece }) => piece.part !== 'flare');
   const flares = placed
     .filter(({ piece }) => piece.part === 'flare')
     .map(({ piece, at }) => place(piece, add(at, point(nameRoom, 0))));
   const origin = point(0, 0);
-  return withFlares(bodies, flares, { front: origin, back: origin, flare: origin });
+  return withFlares(bodies, flares, { front: origin, back: origin, flare: origin }, aspect);
 }
 
-/** Every gore in a place of its own, in so many columns that the whole is nearest to a square. */
+/** Every gore in a place of its own, in so many columns that the whole fits a canvas of this width over height best. */
 function withFlares(
   bodies: readonly Placed[],
   flares: readonly Placed[],
   frames: Layout['frames'],
+  aspect: number,
 ): Layout {
   const all = laid([...bodies, ...inColumns(flares, 1)], frames);
   return flares
     .map((_, index) => laid([...bodies, ...inColumns(flares, index + 1)], frames))
-    .reduce((best, each) => (side(each.box) < side(best.box) ? each : best), all);
+    .reduce((best, each) => (side(each.box, aspect) < side(best.box, aspect) ? each : best), all);
 }
 
-/** Side of the square a box fits in. */
-const side = (box: Box): number => Math.max(box.right - box.left, box.bottom - box.top);
+/** Height of the canvas a box fits on. */
+const side = (box: Box, aspect: number): number =>
+  Math.max((box.right - box.left) / aspect, box.bottom - box.top);
 
 /** Pieces from the first one's place on, so many under each other, then a further column. */
 function inColumns(pieces: readonly Placed[], rows: number): Placed[] {

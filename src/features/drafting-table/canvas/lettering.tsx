@@ -17,13 +17,21 @@ type LetteringProps = {
 
 /** Names of levels and pieces, upright and the same size at every zoom. */
 export const Lettering = ({ draft, layout, view, size, named }: LetteringProps) => {
-  const end = Math.min(size.width - 8, toScreen(view, { x: layout.levelsEnd, y: 0 }).x);
+  const stop = toScreen(view, { x: layout.levelsEnd, y: 0 }).x;
+  const end = Math.min(size.width - 8, stop);
+  // From afar a long name does not fit between the last piece and the end of its line.
+  const room =
+    end < stop
+      ? Infinity
+      : stop -
+        Math.max(...bodies(layout).map(({ box }) => toScreen(view, { x: box.right, y: 0 }).x));
   return (
     <g aria-hidden="true">
       <g className="fill-brass text-[0.75rem]">
         {spaced(layout.levels.map((level) => ({ ...level, y: level.y * view.scale + view.y }))).map(
           ({ name, y }) =>
             y > rodWidth + 12 &&
+            levelTitles[name].length * 6 < room &&
             y < size.height && (
               <text key={name} x={end} y={y - 4} textAnchor="end" className="halo">
                 {levelTitles[name]}
@@ -38,6 +46,9 @@ export const Lettering = ({ draft, layout, view, size, named }: LetteringProps) 
     </g>
   );
 };
+
+const bodies = ({ placed }: Layout): Layout['placed'] =>
+  placed.filter(({ piece }) => piece.part !== 'flare');
 
 const PieceName = ({ label }: { label: PieceLabel }) => {
   const { title, cut, fault, small, at, hairline } = label;

@@ -24,8 +24,11 @@ const small = { letter: 5.9, line: 14 };
 
 const between = 3;
 
+/** How far down a piece its name stands: clear of the handles along a top edge, and of the tips of darts. */
+const shares = { top: 0.66, middle: 0.45, flare: 0.5 };
+
 /** How far outside its piece a name is tried, one place after the other. */
-const away = [14, 28, 42, 56];
+const away = [6, 14, 28, 42, 56, 70];
 
 /**
  * A name for every piece at this zoom. First the cut line gives way, then the long title to the short one, then
@@ -44,16 +47,16 @@ export function pieceLabels(
     const fault = faultOf(piece.name);
     const within = ways(placed, fault).find((words) => fits(words, box));
     if (within !== undefined) {
-      const share = piece.part === 'middle' ? 0.45 : 0.5;
       const height = heightOf(within);
       const at = {
         x: (box.left + box.right) / 2,
-        y: box.top + (box.bottom - box.top) * share - height / 2 + lineOf(within) * 0.8,
+        y:
+          box.top + (box.bottom - box.top) * shares[piece.part] - height / 2 + lineOf(within) * 0.8,
       };
       taken.push(around(within, at));
       return { piece: piece.name, ...within, at };
     }
-    const words: Words = { title: [shortTitle(piece)], small: true, ...(fault && { fault }) };
+    const words: Words = { title: stacked(piece), small: true, ...(fault && { fault }) };
     const others = [...taken, ...boxes.filter((_, other) => other !== index)];
     const place = beside(words, box, others);
     taken.push(around(words, place.at));
@@ -64,7 +67,6 @@ export function pieceLabels(
 /** From the fullest lettering to the shortest. */
 function ways({ piece }: Placed, fault: string | undefined): readonly Words[] {
   const brief = shortTitle(piece);
-  const [half = brief, ...rest] = brief.split(' ');
   const also = fault === undefined ? {} : { fault };
   return [
     { title: [piece.title], cut: piece.cut, small: false, ...also },
@@ -72,8 +74,14 @@ function ways({ piece }: Placed, fault: string | undefined): readonly Words[] {
     { title: [piece.title], small: false, ...also },
     { title: [brief], small: false, ...also },
     { title: [brief], small: true, ...also },
-    { title: [half, rest.join(' ')], small: true, ...also },
+    { title: stacked(piece), small: true, ...also },
   ];
+}
+
+/** `Front` over `side`. */
+function stacked(piece: Placed['piece']): readonly string[] {
+  const [half = '', ...rest] = shortTitle(piece).split(' ');
+  return [half, rest.join(' ')];
 }
 
 const sizeOf = (words: Words) => (words.small ? small : large);
@@ -108,8 +116,8 @@ function beside(
   const half = widthOf(words) / 2;
   const rise = lineOf(words) * 0.4;
   const places = away.flatMap((off) => [
-    { x: middle.x, y: box.bottom + off },
-    { x: middle.x, y: box.top - off + lineOf(words) * 0.5 },
+    { x: middle.x, y: box.top - off - heightOf(words) + lineOf(words) * 0.8 },
+    { x: middle.x, y: box.bottom + off + lineOf(words) * 0.8 },
     { x: box.right + off + half, y: middle.y },
     { x: box.left - off - half, y: middle.y },
   ]);
@@ -118,11 +126,19 @@ function beside(
     return own.left > 28 && own.top > 28 && others.every((each) => apart(own, each));
   };
   const at = places.find(free) ?? places[0] ?? middle;
-  return { at, hairline: [{ x: at.x, y: at.y - rise }, middle] };
+  const below = at.y > middle.y;
+  const foot = at.y + (words.title.length - 1) * lineOf(words) + 2;
+  return { at, hairline: [{ x: at.x, y: below ? at.y - rise * 2 : foot }, middle] };
 }
 
+/** So much two boxes may overlap: widths of letters are reckoned on the broad side, pixels. */
+const shy = 2;
+
 const apart = (a: Box, b: Box): boolean =>
-  a.right < b.left || b.right < a.left || a.bottom < b.top || b.bottom < a.top;
+  a.right < b.left + shy ||
+  b.right < a.left + shy ||
+  a.bottom < b.top + shy ||
+  b.bottom < a.top + shy;
 
 function onScreen(box: Box, view: View): Box {
   const from = toScreen(view, { x: box.left, y: box.top });

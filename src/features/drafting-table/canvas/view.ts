@@ -14,14 +14,18 @@ export type Box = {
 
 /**
  * Room the rod and the tools keep free of pieces when the drawing is fitted. A piece by itself stands clear
- * of the tools, in one row or two; all pieces together may reach between them.
+ * of the tools; all pieces together may reach between them, and on a phone have their names above them.
  */
 const insetOf = ({ width }: Size, place: Place) => ({
   left: 40,
-  top: 40,
+  top: width > 560 || place === 'middle' ? 40 : 66,
   right: 16,
-  bottom: width > 640 ? (place === 'middle' ? 64 : 24) : place === 'middle' ? 112 : 56,
+  bottom: width > 560 && place === 'corner' ? 24 : 64,
 });
+
+/** Width over height of a canvas, in halves: pieces are not laid anew at every pixel a window is drawn. */
+export const aspectOf = ({ width, height }: Size): number =>
+  height > 0 ? Math.max(0.5, Math.round((2 * width) / height) / 2) : 1;
 
 const leastScale = 0.02;
 const mostScale = 8;

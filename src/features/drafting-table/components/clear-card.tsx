@@ -1,13 +1,42 @@
-import type { Dispatch } from 'react';
+import { useState, type Dispatch } from 'react';
 
 import { Button } from '../../../ui/button.tsx';
-import type { TableAction } from '../table-state.ts';
+import type { BenchAction } from '../bench.ts';
+import type { TableState } from '../table-state.ts';
 
-type ClearCardProps = { readonly what: string; readonly dispatch: Dispatch<TableAction> };
+type ClearCardProps = {
+  readonly what: string;
+  readonly state: TableState;
+  readonly dispatch: Dispatch<BenchAction>;
+};
 
-/** Clears what lies here to start anew; one step back brings it again. */
-export const ClearCard = ({ what, dispatch }: ClearCardProps) => (
-  <Button kind="quiet" className="float-right -mr-4" onClick={() => dispatch({ type: 'cleared' })}>
-    {`Clear the ${what}`}
-  </Button>
-);
+/** Clears what lies here to start anew, and says whose figures went and how they come back. */
+export const ClearCard = ({ what, state, dispatch }: ClearCardProps) => {
+  const [gone, setGone] = useState<string>();
+  const empty = Object.keys(state.entries).length === 0 && state.name === '';
+  return (
+    <>
+      <Button
+        kind="quiet"
+        className="float-right -mr-4"
+        disabled={empty}
+        onClick={() => {
+          setGone(state.name.trim() === '' ? 'The figures' : `${state.name.trim()}’s figures`);
+          dispatch({ type: 'cleared' });
+        }}
+      >
+        {`Clear the ${what}`}
+      </Button>
+      <p role="status" className="clear-both text-sm">
+        {empty && gone !== undefined && (
+          <>
+            {`${gone} are cleared. `}
+            <Button kind="quiet" slim onClick={() => dispatch({ type: 'undo' })}>
+              Bring them back
+            </Button>
+          </>
+        )}
+      </p>
+    </>
+  );
+};

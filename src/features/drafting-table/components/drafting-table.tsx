@@ -1,8 +1,18 @@
-import { useDeferredValue, useRef, useState, type Dispatch, type ReactNode } from 'react';
+import {
+  useCallback,
+  useDeferredValue,
+  useRef,
+  useState,
+  type Dispatch,
+  type ReactNode,
+} from 'react';
 
 import { useCalm } from '../../../lib/use-calm.ts';
+import { coreMeasures } from '#shared/body/card.ts';
+
 import { useMedia } from '../../../lib/use-media.ts';
 import { Tabs, type Tab } from '../../../ui/tabs.tsx';
+import { ThemeToggle } from '../../../ui/theme-toggle.tsx';
 import type { Bench, BenchAction } from '../bench.ts';
 import type { Panel } from '../table-state.ts';
 import { useUndoKeys } from '../use-undo-keys.ts';
@@ -39,6 +49,12 @@ export const DraftingTable = (props: DraftingTableProps) => {
   const [printing, setPrinting] = useState(false);
   const cards = useRef<HTMLDivElement>(null);
   const wide = useMedia('(min-width: 1100px)');
+  const print = useCallback(() => setPrinting(true), []);
+  const content = useRef<HTMLDivElement>(null);
+  const filled = useCallback(
+    () => requestAnimationFrame(() => placeAfterCard(cards.current, content.current)?.focus()),
+    [],
+  );
   useUndoKeys(dispatch);
 
   const { draft } = state.drawn;
@@ -51,12 +67,22 @@ export const DraftingTable = (props: DraftingTableProps) => {
   const measures: Tab<Panel> = {
     value: 'measures',
     label: 'Measures',
-    render: () => <MeasureCard state={calm} dispatch={dispatch} tools={cardTools} />,
+    render: () => (
+      <MeasureCard state={calm} dispatch={dispatch} tools={cardTools} onFilled={filled} />
+    ),
   };
   const style: Tab<Panel> = {
     value: 'style',
     label: 'Style',
-    render: () => <StyleCard state={calm} dispatch={dispatch} />,
+    render: () => (
+      <>
+        <StyleCard state={calm} dispatch={dispatch} />
+        <p className="flex items-center gap-2 pt-4 sm:hidden">
+          Look of the page
+          <ThemeToggle />
+        </p>
+      </>
+    ),
   };
   const panels: readonly Tab<Panel>[] = [
     {
@@ -95,7 +121,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
   const choose = (panel: Panel) => dispatch({ type: 'panel', panel });
 
   const drawing = (
-    <div className="flex min-h-0 min-w-0 grow flex-col" id="content">
+    <div className="flex min-h-0 min-w-0 grow flex-col" id="content" ref={content}>
       {draft === undefined ? (
         <EmptyTable
           state={state}
@@ -103,13 +129,13 @@ export const DraftingTable = (props: DraftingTableProps) => {
           onType={() => {
             choose('measures');
             requestAnimationFrame(() =>
-              cards.current?.querySelector<HTMLInputElement>('input[inputmode]')?.focus(),
+              cards.current?.querySelector<HTMLInputElement>('input[name="card.name"]')?.focus(),
             );
           }}
         />
       ) : (
         <>
-          <Drawing draft={draft} state={state} place={place} dispatch={dispatch} />
+          <Drawing draft={draft} state={state} place={place} dispatch={dispatch} onPrint={print} />
           <Foot draft={calm.drawn.draft ?? draft} state={calm} />
         </>
       )}
@@ -118,13 +144,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
 
   return (
     <div className="flex h-dvh flex-col overflow-hidden">
-      <TableHeader
-        bench={bench}
-        dispatch={dispatch}
-        places={places}
-        title={title}
-        onPrint={() => setPrinting(true)}
-      >
+      <TableHeader bench={bench} dispatch={dispatch} places={places} title={title} onPrint={print}>
         {heading}
       </TableHeader>
       {notice}
@@ -134,7 +154,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
             ref={cards}
             className="w-[19rem] shrink-0 space-y-8 overflow-y-auto border-r border-rule bg-cloth px-4 py-4"
           >
-            <MeasureCard state={calm} dispatch={dispatch} tools={cardTools} />
+            <MeasureCard state={calm} dispatch={dispatch} tools={cardTools} onFilled={filled} />
             <StyleCard state={calm} dispatch={dispatch} />
           </div>
           {drawing}
@@ -167,5 +187,16 @@ export const DraftingTable = (props: DraftingTableProps) => {
         />
       )}
     </div>
+  );
+};
+
+/** Where the hand goes after the last measure: to what is wrong, to what is still open, or to the drawing. */
+const placeAfterCard = (cards: HTMLElement | null, content: HTMLElement | null) => {
+  const fields = [...(cards?.querySelectorAll<HTMLInputElement>('input[name^="card."]') ?? [])];
+  const core = fields.filter(({ name }) => coreMeasures.some((key) => name === `card.${key}`));
+  return (
+    fields.find((field) => field.getAttribute('aria-invalid') === 'true') ??
+    core.find(({ value }) => value === '') ??
+    content?.querySelector<HTMLElement>('[role=group][tabindex]')
   );
 };

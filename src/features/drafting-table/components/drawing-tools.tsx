@@ -16,15 +16,25 @@ export const DrawingTools = ({ layout, onFit, onZoom, onSeam }: DrawingToolsProp
   <div
     role="toolbar"
     aria-label="Look about"
-    className="ml-auto flex flex-wrap items-center justify-end rounded-one border border-rule bg-ground text-sm"
+    className="ml-auto flex items-center rounded-one border border-rule bg-ground text-sm"
   >
     <button type="button" className={tool} onClick={() => onFit(layout.box, 'corner')}>
       Fit
     </button>
-    <button type="button" className={tool} aria-label="Further" onClick={() => onZoom(0.8)}>
+    <button
+      type="button"
+      className={`${tool} max-sm:hidden`}
+      aria-label="Further"
+      onClick={() => onZoom(0.8)}
+    >
       −
     </button>
-    <button type="button" className={tool} aria-label="Nearer" onClick={() => onZoom(1.25)}>
+    <button
+      type="button"
+      className={`${tool} max-sm:hidden`}
+      aria-label="Nearer"
+      onClick={() => onZoom(1.25)}
+    >
       +
     </button>
     <select

@@ -19,7 +19,7 @@ import { useGestures } from '../canvas/use-gestures.ts';
 import { useMovedPieces } from '../canvas/use-moved-pieces.ts';
 import { useSheet } from '../canvas/use-sheet.ts';
 import { readingWords, useTape } from '../canvas/use-tape.ts';
-import { toPaper } from '../canvas/view.ts';
+import { aspectOf, toPaper } from '../canvas/view.ts';
 import { drawingKey, keyWords } from '../drawing-keys.ts';
 import { litSeam, seamIndex } from '../seams.ts';
 import type { TableState } from '../table-state.ts';
@@ -33,6 +33,7 @@ type DrawingProps = {
   readonly state: TableState;
   readonly place: string;
   readonly dispatch: Dispatch<BenchAction>;
+  readonly onPrint: () => void;
 };
 
 /** Pixels within which a line counts as pointed at: a finger is broader than a pointer. */
@@ -42,7 +43,8 @@ const reach = { pointer: 7, touch: 18 };
 const stride = 10;
 
 /** The pieces on the canvas under the rod, with what is pointed at, handled or explained on top. */
-export const Drawing = memo(function Drawing({ draft, state, place, dispatch }: DrawingProps) {
+export const Drawing = memo(function Drawing(props: DrawingProps) {
+  const { draft, state, place, dispatch, onPrint } = props;
   const frame = useRef<HTMLDivElement>(null);
   const canvas = useRef<HTMLCanvasElement>(null);
   const [held, setHeld] = useState(false);
@@ -53,7 +55,11 @@ export const Drawing = memo(function Drawing({ draft, state, place, dispatch }: 
   const drafting = state.panel === 'steps';
   const tool = drafting ? 'look' : chosenTool;
   const { pieces } = draft;
-  const asLaid = useMemo(() => (drafting ? asDrafted(pieces) : asCut(pieces)), [drafting, pieces]);
+  const aspect = aspectOf(size);
+  const asLaid = useMemo(
+    () => (drafting ? asDrafted : asCut)(pieces, aspect),
+    [drafting, pieces, aspect],
+  );
   const moved = useMovedPieces(place, asLaid, !drafting);
   const { layout } = moved;
   const key = `${String(drafting)} ${pieces.map((each) => each.name).join()}`;
@@ -96,6 +102,7 @@ export const Drawing = memo(function Drawing({ draft, state, place, dispatch }: 
     zoom: (by: number) => framing.zoom(by, middle),
     fit: () => framing.fit(layout.box, 'corner'),
     walkSeams,
+    act: onPrint,
     letGo: noSeam,
   };
   const far = (by: Point, farther: boolean) => scale(by, farther ? stride * 10 : stride);
@@ -153,6 +160,8 @@ export const Drawing = memo(function Drawing({ draft, state, place, dispatch }: 
         className="group absolute inset-0 touch-none -outline-offset-2"
         onKeyDown={(event) => {
           if (event.metaKey || event.ctrlKey || event.altKey) return;
+          // A handle in the hand is no place to print from.
+          if (event.key === 'Enter' && event.target !== event.currentTarget) return;
           const act = drawingKey(event, lookKeys, toolKeys);
           if (act === undefined) return;
           event.preventDefault();

@@ -3,20 +3,32 @@ import { memo, useState, type Dispatch, type ReactNode } from 'react';
 import { coreMeasures, furtherMeasures, type MeasureKey } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
 
+import { focusNext } from '../../../lib/focus-next.ts';
+import type { BenchAction } from '../bench.ts';
 import type { FieldKey } from '../fields.ts';
-import type { TableAction, TableState } from '../table-state.ts';
+import type { TableState } from '../table-state.ts';
 import { BodyFigure } from './body-figure.tsx';
 import { ClearCard } from './clear-card.tsx';
 import { FigureField, fieldProps } from './figure-field.tsx';
 
 type MeasureCardProps = {
   readonly state: TableState;
-  readonly dispatch: Dispatch<TableAction>;
+  readonly dispatch: Dispatch<BenchAction>;
   /** What else can be done with the card. */
   readonly tools?: ReactNode;
   /** Whether the card lies here without a style card. */
   readonly alone?: boolean;
+  /** The last measure has been typed. */
+  readonly onFilled?: () => void;
 };
+
+/** No strapless gown needs them. */
+const sleeveMeasures: readonly MeasureKey[] = [
+  'shoulderGirth',
+  'upperArmGirth',
+  'armLength',
+  'wristGirth',
+];
 
 const everyMeasure = [...coreMeasures, ...furtherMeasures];
 
@@ -26,6 +38,7 @@ export const MeasureCard = memo(function MeasureCard({
   dispatch,
   tools,
   alone = false,
+  onFilled,
 }: MeasureCardProps) {
   const [current, setCurrent] = useState<FieldKey>();
   const [all, setAll] = useState(false);
@@ -67,7 +80,12 @@ export const MeasureCard = memo(function MeasureCard({
           )}
         </p>
       </div>
-      <form onSubmit={(event) => event.preventDefault()}>
+      <form
+        onSubmit={(event) => {
+          event.preventDefault();
+          onFilled?.();
+        }}
+      >
         <label className="flex items-center justify-between gap-3 border-b border-rule py-1">
           <span className="shrink-0">Whose card</span>
           <input
@@ -76,7 +94,13 @@ export const MeasureCard = memo(function MeasureCard({
             maxLength={60}
             className="h-9 w-0 min-w-0 grow rounded-one border border-rule bg-paper px-2"
             value={state.name}
+            enterKeyHint="next"
             onChange={(event) => dispatch({ type: 'named', name: event.currentTarget.value })}
+            onKeyDown={(event) => {
+              if (event.key !== 'Enter') return;
+              event.preventDefault();
+              focusNext(event.currentTarget);
+            }}
           />
         </label>
         {coreMeasures.map(row)}
@@ -88,14 +112,16 @@ export const MeasureCard = memo(function MeasureCard({
         >
           {all ? 'Only the ten measures' : `All measures (${everyMeasure.length})`}
         </button>
-        <ClearCard what={alone ? 'card' : 'table'} dispatch={dispatch} />
+        <ClearCard what={alone ? 'card' : 'table'} state={state} dispatch={dispatch} />
         {tools}
         {all && (
           <>
             <p className="pb-2 text-sm text-slate">
               What you leave open is estimated from the ten, marked est.
             </p>
-            {furtherMeasures.map(row)}
+            {furtherMeasures.filter((measure) => !sleeveMeasures.includes(measure)).map(row)}
+            <h3 className="heading pt-4">For sleeves, later</h3>
+            {sleeveMeasures.map(row)}
           </>
         )}
       </form>
