@@ -11,6 +11,7 @@ import { measureCardsRouter } from './features/measure-cards/router.ts';
 import type { Printer } from './features/print/printer.ts';
 import { printRouter } from './features/print/router.ts';
 import { samplesRouter } from './features/samples/router.ts';
+import { addressLimit } from './http/address-limit.ts';
 import { errorReply } from './http/error-reply.ts';
 import { nothingHere } from './http/nothing-here.ts';
 import { originCheck } from './http/origin-check.ts';
@@ -51,7 +52,12 @@ export function buildApp(parts: Parts): Express {
     await ping(parts.database);
     response.setHeader('Cache-Control', 'no-store').json({ name: 'ellwand', database: 'answers' });
   });
-  app.use('/api', originCheck(parts.origins), express.json({ limit: bodyLimit, strict: false }));
+  app.use(
+    '/api',
+    addressLimit(parts.limits.requestsPerMinute),
+    originCheck(parts.origins),
+    express.json({ limit: bodyLimit, strict: false }),
+  );
   app.use(samplesRouter(parts.database));
   app.use(draftsRouter(parts.limits, parts.drafter));
   app.use(printRouter(parts.limits, parts.printer));

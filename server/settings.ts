@@ -18,6 +18,8 @@ export type Settings = {
 
 /** How much one address, and all together, may ask for. */
 export type Limits = {
+  /** Requests of any kind. */
+  readonly requestsPerMinute: number;
   readonly draftsPerMinute: number;
   /** Drafts that may wait for their turn, those of saves among them; further ones come again in a moment. */
   readonly draftsWaiting: number;
@@ -27,6 +29,8 @@ export type Limits = {
   readonly savesPerMinute: number;
   /** Sign-ins and sign-ups, whether they succeed or not. */
   readonly signInsPerMinute: number;
+  /** Accounts opened; a class may sit behind one address. */
+  readonly signUpsPerHour: number;
   readonly printsPerMinute: number;
   /** Prints that may wait for their turn; further ones are sent away for a moment. */
   readonly printsWaiting: number;
@@ -66,11 +70,13 @@ export function readSettings(env: NodeJS.ProcessEnv): Settings {
     trustedProxies: wholeNumber(env, 'TRUST_PROXY', 0),
     logLevel: env['LOG_LEVEL'] ?? 'info',
     limits: {
+      requestsPerMinute: wholeNumber(env, 'REQUESTS_PER_MINUTE', 1200),
       draftsPerMinute: wholeNumber(env, 'DRAFTS_PER_MINUTE', 240),
       draftsWaiting: wholeNumber(env, 'DRAFTS_WAITING', 48),
       draftsFromOneAddress: wholeNumber(env, 'DRAFTS_FROM_ONE_ADDRESS', 6),
       savesPerMinute: wholeNumber(env, 'SAVES_PER_MINUTE', 300),
       signInsPerMinute: wholeNumber(env, 'SIGN_INS_PER_MINUTE', 60),
+      signUpsPerHour: wholeNumber(env, 'SIGN_UPS_PER_HOUR', 60),
       printsPerMinute: wholeNumber(env, 'PRINTS_PER_MINUTE', 30),
       printsWaiting: wholeNumber(env, 'PRINTS_WAITING', 24),
       printsFromOneAddress: wholeNumber(env, 'PRINTS_FROM_ONE_ADDRESS', 8),

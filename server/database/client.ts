@@ -4,6 +4,7 @@ import { Pool } from 'pg';
 import { accounts } from './schema/accounts.ts';
 import { gownRevisions } from './schema/gown-revisions.ts';
 import { gowns } from './schema/gowns.ts';
+import { knownDevices } from './schema/known-devices.ts';
 import { measureCards } from './schema/measure-cards.ts';
 import { sampleGowns } from './schema/sample-gowns.ts';
 import { saves } from './schema/saves.ts';
@@ -14,6 +15,7 @@ const schema = {
   accounts,
   gownRevisions,
   gowns,
+  knownDevices,
   measureCards,
   sampleGowns,
   saves,

@@ -11,6 +11,7 @@ export const statusOf: { readonly [C in RefusalCode]: number } = {
   'wrong-origin': 403,
   'not-found': 404,
   'method-not-allowed': 405,
+  'account-full': 409,
   conflict: 409,
   'engine-changed': 409,
   'precondition-failed': 412,

@@ -12,6 +12,7 @@ export type Own = {
   readonly database: Database;
   readonly sessions: Sessions;
   readonly limits: Limits;
+  readonly overHttps: boolean;
   readonly drafter: Drafter;
 };
 

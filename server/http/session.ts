@@ -2,11 +2,14 @@ import { createHash } from 'node:crypto';
 import { DrizzlePostgreSQLAdapter } from '@lucia-auth/adapter-drizzle';
 import type { Request, Response } from 'express';
 import { generateIdFromEntropySize, Lucia } from 'lucia';
-import type { Database } from '../database/client.ts';
+import { endOldestSessions, holdAccountAsChecked } from '../database/account-hold.ts';
+import type { Database, Store } from '../database/client.ts';
 import { accounts } from '../database/schema/accounts.ts';
 import { sessions } from '../database/schema/sessions.ts';
 import { noteSessionUse } from '../database/session-use.ts';
 import { deviceWords } from './device-words.ts';
+import { mostKept } from './most-kept.ts';
+import { RefusalError } from './refusal.ts';
 
 declare module 'lucia' {
   interface Register {
@@ -37,11 +40,14 @@ export type SignedInPlace = {
 export type Sessions = {
   /** Who sends a request; asks the database each time, so that an ended session is ended at once. */
   readonly callerOf: (request: Request, response: Response) => Promise<Caller | undefined>;
-  /** Signs this browser in, in place of whoever was signed in on it. */
+  /**
+   * Signs this browser in, in place of whoever was signed in on it; only where the password that was
+   * checked is the account's still, so that no session outlives a change of it.
+   */
   readonly begin: (
     request: Request,
     response: Response,
-    accountId: string,
+    account: { readonly id: string; readonly passwordHash: string },
   ) => Promise<Pick<Caller, 'sessionId' | 'device'>>;
   readonly end: (response: Response, caller: Caller) => Promise<void>;
   /** Ends every session of an account, the one that asks as well. */
@@ -49,7 +55,7 @@ export type Sessions = {
   readonly placesOf: (accountId: string) => Promise<readonly SignedInPlace[]>;
 };
 
-const openLucia = (database: Database, overHttps: boolean) =>
+const openLucia = (database: Store, overHttps: boolean) =>
   new Lucia(new DrizzlePostgreSQLAdapter(database, sessions, accounts), {
     sessionCookie: {
       // With the prefix a browser takes the cookie from this host over https alone.
@@ -64,6 +70,13 @@ const openLucia = (database: Database, overHttps: boolean) =>
     getUserAttributes: ({ email }) => ({ email }),
   });
 
+/** Says the same for a wrong password, for one that was changed meanwhile, and for no account. */
+export const wrongSignIn = (): RefusalError =>
+  new RefusalError(
+    'wrong-sign-in',
+    'This e-mail and password do not belong together. Look at both and try again.',
+  );
+
 /** The database keeps a digest: who reads it there cannot sign in with it. */
 const digest = (secret: string) => createHash('sha256').update(secret).digest('hex');
 
@@ -74,9 +87,9 @@ const minute = 60_000;
 export function openSessions(database: Database, overHttps: boolean): Sessions {
   const lucia = openLucia(database, overHttps);
   const setCookie = (response: Response, secret: string) =>
-    response.setHeader('Set-Cookie', lucia.createSessionCookie(secret).serialize());
+    response.append('Set-Cookie', lucia.createSessionCookie(secret).serialize());
   const clearCookie = (response: Response) =>
-    response.setHeader('Set-Cookie', lucia.createBlankSessionCookie().serialize());
+    response.append('Set-Cookie', lucia.createBlankSessionCookie().serialize());
   return {
     callerOf: async (request, response) => {
       const secret = lucia.readSessionCookie(request.headers.cookie ?? '');
@@ -91,15 +104,20 @@ export function openSessions(database: Database, overHttps: boolean): Sessions {
       const { id: sessionId, device } = session;
       return { accountId: user.id, email: user.email, sessionId, device };
     },
-    begin: async (request, response, accountId) => {
+    begin: async (request, response, account) => {
       const before = lucia.readSessionCookie(request.headers.cookie ?? '');
-      if (before !== null) await lucia.invalidateSession(digest(before));
       const secret = generateIdFromEntropySize(25);
       const now = new Date();
       const sessionId = digest(secret);
       const device = deviceWords(request.headers['user-agent']);
       const attributes = { device, startedAt: now, lastUsedAt: now };
-      await lucia.createSession(accountId, attributes, { sessionId });
+      await database.transaction(async (turn) => {
+        if (!(await holdAccountAsChecked(turn, account))) throw wrongSignIn();
+        const inTurn = openLucia(turn, overHttps);
+        if (before !== null) await inTurn.invalidateSession(digest(before));
+        await inTurn.createSession(account.id, attributes, { sessionId });
+        await endOldestSessions(turn, account.id, mostKept.sessions);
+      });
       setCookie(response, secret);
       await lucia.deleteExpiredSessions();
       return { sessionId, device };

@@ -5,7 +5,14 @@ import { startServer } from './server-process.mjs';
 import { run } from './shell.mjs';
 
 /** Journeys of many browsers come from one address; the limits have tests of their own. */
-const roomForManyBrowsers = { PRINTS_PER_MINUTE: '1000', DRAFTS_PER_MINUTE: '1000' };
+const roomForManyBrowsers = {
+  PRINTS_PER_MINUTE: '1000',
+  DRAFTS_PER_MINUTE: '1000',
+  SAVES_PER_MINUTE: '10000',
+  SIGN_INS_PER_MINUTE: '1000',
+  SIGN_UPS_PER_HOUR: '10000',
+  REQUESTS_PER_MINUTE: '100000',
+};
 
 /**
  * Runs browser journeys against the production build, on a cluster and a port of their own.

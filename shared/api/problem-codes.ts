@@ -16,6 +16,8 @@ export const refusalCodes = [
   /** The request was sent from a page of somebody else's. */
   'wrong-origin',
   'not-found',
+  /** The account keeps as many of these as it may. */
+  'account-full',
   /** Saved meanwhile from somewhere else: `current` is how it now stands. */
   'conflict',
   /** This page and the server draw by different rules: open the page again. */

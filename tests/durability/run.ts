@@ -45,6 +45,7 @@ async function openServer(): Promise<void> {
       PORT: String(port),
       DATABASE_URL: cluster.url,
       SAVES_PER_MINUTE: '1000000',
+      REQUESTS_PER_MINUTE: '1000000',
     },
   });
   server = child;

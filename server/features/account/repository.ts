@@ -1,6 +1,8 @@
 import { and, eq, lt, sql } from 'drizzle-orm';
 import type { Database } from '../../database/client.ts';
 import { accounts } from '../../database/schema/accounts.ts';
+import { knownDevices } from '../../database/schema/known-devices.ts';
+import { sessions } from '../../database/schema/sessions.ts';
 import { signInAttempts } from '../../database/schema/sign-in-attempts.ts';
 
 export type AccountRow = typeof accounts.$inferSelect;
@@ -27,19 +29,26 @@ export async function insertAccount(
   return row;
 }
 
-/** Changes a password that is still the one that was checked; false where it is another by now. */
-export async function replacePassword(
+/**
+ * Changes a password that is still the one that was checked, and ends every session begun by the old
+ * one and every device's being known, both or neither; none where it is another by now.
+ */
+export const replacePassword = (
   database: Database,
   { id, passwordHash }: AccountRow,
   next: string,
-): Promise<boolean> {
-  const changed = await database
-    .update(accounts)
-    .set({ passwordHash: next })
-    .where(and(eq(accounts.id, id), eq(accounts.passwordHash, passwordHash)))
-    .returning({ id: accounts.id });
-  return changed.length > 0;
-}
+): Promise<AccountRow | undefined> =>
+  database.transaction(async (turn) => {
+    const [changed] = await turn
+      .update(accounts)
+      .set({ passwordHash: next })
+      .where(and(eq(accounts.id, id), eq(accounts.passwordHash, passwordHash)))
+      .returning();
+    if (changed === undefined) return undefined;
+    await turn.delete(sessions).where(eq(sessions.userId, id));
+    await turn.delete(knownDevices).where(eq(knownDevices.accountId, id));
+    return changed;
+  });
 
 /** Counts one more try under a key, from anew where the window is over; says how many there were. */
 export async function countAttempt(

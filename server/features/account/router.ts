@@ -1,4 +1,4 @@
-import { Router } from 'express';
+import { type Request, type Response, Router } from 'express';
 import {
   changePassword,
   listSessions,
@@ -9,11 +9,14 @@ import {
   whoAmI,
 } from '#shared/api/accounts.ts';
 import type { Received } from '#shared/api/endpoint.ts';
-import { addressLimit } from '../../http/address-limit.ts';
+import { addressLimit, hour } from '../../http/address-limit.ts';
+import { deviceCookie } from '../../http/known-device.ts';
+import { mostKept } from '../../http/most-kept.ts';
 import { type Own, serveOwn } from '../../http/serve-own.ts';
 import { serveTo } from '../../http/serve.ts';
 import type { Caller } from '../../http/session.ts';
 import { addressOf } from '../../http/turn-of.ts';
+import { isKnownDevice, noteDevice } from './device-repository.ts';
 import * as service from './service.ts';
 
 /** Keeps what was drawn before there was an account, as its first gown. */
@@ -22,28 +25,48 @@ type KeepGown = (
   gown: NonNullable<Received<typeof signUp>['gown']>,
 ) => Promise<{ readonly id: string }>;
 
-export function accountRouter({ database, sessions, limits }: Own, keepGown: KeepGown): Router {
+export function accountRouter(
+  { database, sessions, limits, overHttps }: Own,
+  keepGown: KeepGown,
+): Router {
   const router = Router();
   const some = addressLimit(limits.signInsPerMinute);
   for (const { path } of [signUp, signIn, changePassword]) router.use(path, some);
+  router.use(signUp.path, addressLimit(limits.signUpsPerHour, { within: hour, onlyDone: true }));
+  const devices = deviceCookie(overHttps);
+
+  /** Who tries, and whether this account was signed in on this browser before. */
+  const claimOf = async <C extends { readonly email: string }>(body: C, request: Request) => {
+    const device = devices.of(request);
+    const isKnown = device !== undefined && (await isKnownDevice(database, body.email, device));
+    return { ...body, address: addressOf(request), ...(isKnown && { knownAs: device }) };
+  };
+
+  const begin = async (
+    request: Request,
+    response: Response,
+    account: Parameters<typeof sessions.begin>[2],
+  ) => {
+    const place = await sessions.begin(request, response, account);
+    await noteDevice(database, account.id, devices.give(request, response), mostKept.knownDevices);
+    return place;
+  };
 
   serveTo(router, sessions.callerOf, whoAmI, (_body, { caller }) =>
     Promise.resolve({ account: caller === undefined ? null : { email: caller.email } }),
   );
 
   serveTo(router, nobody, signIn, async (body, { request, response }) => {
-    const claim = { ...body, address: addressOf(request) };
-    const { id, email } = await service.signIn(database, claim);
-    await sessions.begin(request, response, id);
-    return { account: { email } };
+    const account = await service.signIn(database, await claimOf(body, request));
+    await begin(request, response, account);
+    return { account: { email: account.email } };
   });
 
   serveTo(router, nobody, signUp, async ({ gown, ...body }, { request, response }) => {
-    const claim = { ...body, address: addressOf(request) };
-    const { id, email } = await service.signUp(database, claim);
-    const place = await sessions.begin(request, response, id);
-    const kept = gown && (await keepGown({ accountId: id, ...place }, gown));
-    return { account: { email }, ...(kept && { gownId: kept.id }) };
+    const account = await service.signUp(database, await claimOf(body, request));
+    const place = await begin(request, response, account);
+    const kept = gown && (await keepGown({ accountId: account.id, ...place }, gown));
+    return { account: { email: account.email }, ...(kept && { gownId: kept.id }) };
   });
 
   serveTo(router, sessions.callerOf, signOut, async (_body, { response, caller }) => {
@@ -57,10 +80,9 @@ export function accountRouter({ database, sessions, limits }: Own, keepGown: Kee
   });
 
   serveOwn(router, sessions, changePassword, async (body, { request, response, caller }) => {
-    const claim = { email: caller.email, password: body.password, address: addressOf(request) };
-    await service.changePassword(database, claim, body.newPassword);
-    await sessions.endAll(response, caller.accountId);
-    await sessions.begin(request, response, caller.accountId);
+    const { email, sessionId: knownAs } = caller;
+    const claim = { email, password: body.password, address: addressOf(request), knownAs };
+    await begin(request, response, await service.changePassword(database, claim, body.newPassword));
     return {};
   });
 

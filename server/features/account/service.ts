@@ -1,28 +1,22 @@
 import type { Database } from '../../database/client.ts';
 import { hashPassword, isPassword } from '../../http/passwords.ts';
-import { RefusalError, refusalFor } from '../../http/refusal.ts';
+import { refusalFor } from '../../http/refusal.ts';
+import { wrongSignIn } from '../../http/session.ts';
 import { error } from '#shared/units/problem.ts';
 import { said } from '#shared/units/said.ts';
 import { type AccountRow, findAccount, insertAccount, replacePassword } from './repository.ts';
-import { countTry } from './throttle.ts';
+import { countTry, type Trier } from './throttle.ts';
 
 /** What somebody says who wants in, and from where. */
-export type Credentials = {
-  readonly email: string;
-  readonly password: string;
-  readonly address: string;
-};
+export type Credentials = Trier & { readonly password: string };
 
 /** Checks a password; takes as long, and says the same, where there is no such account. */
 export async function signIn(database: Database, claim: Credentials): Promise<AccountRow> {
-  const takeBack = await countTry(database, claim.email, claim.address);
+  const takeBack = await countTry(database, claim);
   const account = await findAccount(database, claim.email);
   const right = await isPassword(account?.passwordHash, claim.password);
   if (account === undefined || !right) {
-    throw new RefusalError(
-      'wrong-sign-in',
-      'This e-mail and password do not belong together. Look at both and try again.',
-    );
+    throw wrongSignIn();
   }
   await takeBack();
   return account;
@@ -46,7 +40,7 @@ const notFree = () =>
  * hashed and one try counted: that an address is taken shows in the answer alone, to few who ask.
  */
 export async function signUp(database: Database, claim: Credentials): Promise<AccountRow> {
-  const takeBack = await countTry(database, claim.email, claim.address);
+  const takeBack = await countTry(database, claim);
   const present = await findAccount(database, claim.email);
   const account =
     present === undefined
@@ -57,16 +51,20 @@ export async function signUp(database: Database, claim: Credentials): Promise<Ac
   return account;
 }
 
-/** Changes a password after the present one was given once more. */
+/** Changes a password after the present one was given once more; every session of the account ends. */
 export async function changePassword(
   database: Database,
   claim: Credentials,
   next: string,
-): Promise<void> {
-  const takeBack = await countTry(database, claim.email, claim.address);
+): Promise<AccountRow> {
+  const takeBack = await countTry(database, claim);
   const account = await findAccount(database, claim.email);
   const right = await isPassword(account?.passwordHash, claim.password);
-  if (account === undefined || !right || !(await replaced(database, account, next))) {
+  const changed =
+    account !== undefined && right
+      ? await replacePassword(database, account, await hashPassword(next))
+      : undefined;
+  if (changed === undefined) {
     throw refusalFor(
       'bad-input',
       [
@@ -80,7 +78,5 @@ export async function changePassword(
     );
   }
   await takeBack();
+  return changed;
 }
-
-const replaced = async (database: Database, account: AccountRow, next: string): Promise<boolean> =>
-  replacePassword(database, account, await hashPassword(next));

@@ -1,7 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import type { Store } from '../../database/client.ts';
+import { mostKept } from '../../http/most-kept.ts';
 import type { GownRow } from './repository.ts';
-import { insertRevision, isKept, type RevisionRow } from './revision-repository.ts';
+import {
+  dropOldestAutomatic,
+  insertRevision,
+  isKept,
+  type RevisionRow,
+} from './revision-repository.ts';
 
 /** A copy of a gown as it stands. */
 export const copyOf = (row: GownRow, name: string, automatic: boolean): RevisionRow => ({
@@ -29,4 +35,5 @@ export const copyOf = (row: GownRow, name: string, automatic: boolean): Revision
 export async function keepAsRevision(store: Store, row: GownRow, name: string): Promise<void> {
   if (await isKept(store, row.id, row.version)) return;
   await insertRevision(store, copyOf(row, name, true));
+  await dropOldestAutomatic(store, row.id, mostKept.automaticRevisions);
 }

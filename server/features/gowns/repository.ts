@@ -72,6 +72,9 @@ export async function replaceGown(
   return row.version;
 }
 
+export const countGowns = (store: Store, accountId: string): Promise<number> =>
+  store.$count(gowns, eq(gowns.accountId, accountId));
+
 /** False where the account has no such gown. */
 async function set(
   store: Store,

@@ -1,4 +1,4 @@
-import { and, desc, eq, getTableColumns } from 'drizzle-orm';
+import { and, desc, eq, getTableColumns, inArray } from 'drizzle-orm';
 import type { Store } from '../../database/client.ts';
 import { gownRevisions } from '../../database/schema/gown-revisions.ts';
 import { gowns } from '../../database/schema/gowns.ts';
@@ -64,4 +64,25 @@ export async function isKept(store: Store, gownId: string, version: number): Pro
 
 export async function insertRevision(store: Store, row: RevisionRow): Promise<void> {
   await store.insert(gownRevisions).values(row);
+}
+
+export const countNamedRevisions = (store: Store, gownId: string): Promise<number> =>
+  store.$count(
+    gownRevisions,
+    and(eq(gownRevisions.gownId, gownId), eq(gownRevisions.automatic, false)),
+  );
+
+/** Drops the oldest copies a gown kept by itself, beyond so many; named ones stay. */
+export async function dropOldestAutomatic(
+  store: Store,
+  gownId: string,
+  most: number,
+): Promise<void> {
+  const oldest = store
+    .select({ id: gownRevisions.id })
+    .from(gownRevisions)
+    .where(and(eq(gownRevisions.gownId, gownId), eq(gownRevisions.automatic, true)))
+    .orderBy(desc(gownRevisions.createdAt))
+    .offset(most);
+  await store.delete(gownRevisions).where(inArray(gownRevisions.id, oldest));
 }

@@ -8,11 +8,13 @@ import type {
 import type { Database } from '../../database/client.ts';
 import { acknowledge, acknowledgedSave } from '../../database/saves.ts';
 import { notFound, sameSave } from '../../http/conflict.ts';
+import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
 import { drawnPiecesOf } from './drawing.ts';
 import { contentOf } from './gown-view.ts';
 import { copyOf, keepAsRevision } from './keep-as-revision.ts';
 import { findGown, holdGown } from './repository.ts';
 import {
+  countNamedRevisions,
   findRevision,
   insertRevision,
   type ListedRevisionRow,
@@ -76,6 +78,11 @@ export async function nameRevision(
       if (made !== undefined) return listed(made);
     }
     if (row.version !== baseVersion) throw new OtherVersionError(row);
+    refuseOneTooMany(
+      'named revisions of one gown',
+      await countNamedRevisions(turn, gownId),
+      mostKept.namedRevisions,
+    );
     const revision = copyOf(row, name, false);
     await insertRevision(turn, revision);
     const { id: record, version, createdAt: savedAt } = revision;

@@ -8,7 +8,9 @@ import type {
   saveGown as saving,
 } from '#shared/api/gowns.ts';
 import { engineVersion } from '#shared/engine/draft-gown.ts';
+import { holdAccount } from '../../database/account-hold.ts';
 import type { Store } from '../../database/client.ts';
+import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
 import { notFound, sameSave } from '../../http/conflict.ts';
 import type { Drawing } from '../../drafting/drawing.ts';
@@ -17,7 +19,14 @@ import { lastingTurn } from '../../http/turn-of.ts';
 import { kept, nothingDrawn } from './drawing.ts';
 import { contentOf, gownView } from './gown-view.ts';
 import { keepAsRevision } from './keep-as-revision.ts';
-import { findGown, type GownRow, holdGown, insertGown, replaceGown } from './repository.ts';
+import {
+  countGowns,
+  findGown,
+  type GownRow,
+  holdGown,
+  insertGown,
+  replaceGown,
+} from './repository.ts';
 import {
   type Maker,
   OtherVersionError,
@@ -71,6 +80,8 @@ async function putGown(
     if (!(await acknowledge(turn, save))) {
       return (await putBefore(turn, maker, saveId)) ?? savedAs(sameSave(save, undefined, 1));
     }
+    await holdAccount(turn, accountId);
+    refuseOneTooMany('gowns', await countGowns(turn, accountId), mostKept.gowns);
     await insertGown(turn, {
       id: save.record,
       accountId,

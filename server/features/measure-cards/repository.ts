@@ -59,6 +59,9 @@ export async function replaceCard(
   return row.version;
 }
 
+export const countCards = (store: Store, accountId: string): Promise<number> =>
+  store.$count(measureCards, eq(measureCards.accountId, accountId));
+
 /** False where the account has no such card. */
 async function set(
   store: Store,

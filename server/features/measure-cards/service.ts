@@ -6,12 +6,14 @@ import type {
   KeptCard,
   saveMeasureCard as saving,
 } from '#shared/api/measure-cards.ts';
+import { holdAccount } from '../../database/account-hold.ts';
 import type { Database } from '../../database/client.ts';
+import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
 import { conflict, notFound, sameSave } from '../../http/conflict.ts';
 import type { Caller } from '../../http/session.ts';
 import { cardView } from './card-view.ts';
-import { findCard, holdCard, insertCard, replaceCard } from './repository.ts';
+import { countCards, findCard, holdCard, insertCard, replaceCard } from './repository.ts';
 
 type Saved = { readonly id: string; readonly version: number; readonly savedAt: string };
 
@@ -43,6 +45,8 @@ export async function createCard(
       const card = before && (await findCard(turn, accountId, before.record));
       return savedAs(sameSave(before ?? save, card?.id, 1));
     }
+    await holdAccount(turn, accountId);
+    refuseOneTooMany('measure cards', await countCards(turn, accountId), mostKept.measureCards);
     await insertCard(turn, {
       id: save.record,
       accountId,

@@ -42,8 +42,12 @@ export const iphone =
 
 /** A browser with nobody signed in. */
 export function openBrowser(address: string, userAgent = firefox, cookieBefore = ''): Browser {
-  let cookie = cookieBefore;
+  const jar = new Map(
+    cookieBefore.split('; ').map((pair) => [pair.slice(0, pair.indexOf('=')), pair] as const),
+  );
+  const cookieNow = () => [...jar.values()].filter((pair) => pair !== '').join('; ');
   const send: Browser['send'] = async (line, body, params, headers) => {
+    const cookie = cookieNow();
     const reply = await fetch(`${address}${addressOf(line, params)}`, {
       method: line.method,
       headers: {
@@ -55,8 +59,12 @@ export function openBrowser(address: string, userAgent = firefox, cookieBefore =
       },
       ...(body === undefined ? {} : { body: JSON.stringify(body) }),
     });
-    for (const set of reply.headers.getSetCookie()) cookie = set.split(';')[0] ?? '';
-    if (cookie.endsWith('=')) cookie = '';
+    for (const set of reply.headers.getSetCookie()) {
+      const pair = set.split(';')[0] ?? '';
+      const name = pair.slice(0, pair.indexOf('='));
+      if (pair.endsWith('=')) jar.delete(name);
+      else jar.set(name, pair);
+    }
     return reply;
   };
   return {
@@ -72,7 +80,7 @@ export function openBrowser(address: string, userAgent = firefox, cookieBefore =
       if (reply.status !== status) throw new Error(`${reply.status}: ${told.message}`);
       return told;
     },
-    cookie: () => cookie,
+    cookie: cookieNow,
   };
 }
 

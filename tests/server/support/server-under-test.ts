@@ -22,11 +22,13 @@ export type ServerUnderTest = {
 };
 
 const roomy: Limits = {
+  requestsPerMinute: 100_000,
   draftsPerMinute: 10_000,
   draftsWaiting: 100,
   draftsFromOneAddress: 100,
   savesPerMinute: 10_000,
   signInsPerMinute: 10_000,
+  signUpsPerHour: 10_000,
   printsPerMinute: 10_000,
   printsWaiting: 100,
   printsFromOneAddress: 100,
@@ -47,6 +49,7 @@ export async function startServer(
     readonly overHttps?: boolean;
     readonly publicUrl?: string;
     readonly databaseUrl?: string;
+    readonly trustedProxies?: number;
   } = {},
 ): Promise<ServerUnderTest> {
   const name = `clone_${randomBytes(6).toString('hex')}`;
@@ -67,7 +70,7 @@ export async function startServer(
     limits,
     overHttps: options.overHttps ?? false,
     origins: ownOrigins({ publicUrl: options.publicUrl, host: '127.0.0.1', port }),
-    trustedProxies: 0,
+    trustedProxies: options.trustedProxies ?? 0,
     screens: options.screens ?? ((_request, _response, next) => next()),
     strictHeaders: true,
   });
