@@ -57,6 +57,7 @@ export function Tabs<T extends string>({ label, tabs, value, onChoose }: TabsPro
         ))}
       </div>
       <div
+        key={front.value}
         role="tabpanel"
         id={`${id}-sheet`}
         aria-labelledby={`${id}-${front.value}`}

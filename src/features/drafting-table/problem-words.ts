@@ -10,9 +10,9 @@ import type { TableState } from './table-state.ts';
 
 type Told = Pick<TableState, 'entries' | 'unit'>;
 
-/** A problem in the reader's unit; a figure that would do in the other unit is asked about first. */
+/** A problem in the reader's unit; a figure that would do in the other unit is asked about. */
 export const problemWords = (problem: Problem, table: Told): string =>
-  [otherUnit(problem, table), speak(problem.said, table.unit)].filter(Boolean).join(' ');
+  otherUnit(problem, table) ?? speak(problem.said, table.unit);
 
 /** What stands under a field; a combination that cannot be is said once, under the one of its fields it names first. */
 export function messageFor(
@@ -31,15 +31,16 @@ const perOther: Record<Unit, { readonly unit: Unit; readonly times: number }> = 
   cm: { unit: 'in', times: 2.54 },
 };
 
-/** `Did you mean 72.4 cm = 28 1⁄2 in?` where the same figure lies within its bounds in the other unit. */
+/** `Waist 72 3⁄8 in: did you mean 72.4 cm = 28 1⁄2 in?` where the same figure would do in the other unit. */
 function otherUnit({ code, field }: Problem, { entries, unit }: Told): string | undefined {
   const key = measureKeys.find((each) => field === `card.${each}`);
   if (code !== 'out-of-range' || key === undefined) return undefined;
-  const { min, max, kind } = measureGuide[key];
+  const { label, min, max, kind } = measureGuide[key];
   const value = valueOf(entries[`card.${key}`]);
   if (kind === 'angle' || value === undefined) return undefined;
   const other = perOther[unit];
   const meant = value * other.times;
   if (meant < min || meant > max) return undefined;
-  return `Did you mean ${formatWithUnit(meant, other.unit)} = ${formatWithUnit(meant, unit)}?`;
+  const worded = (length: number, as: Unit = unit): string => formatWithUnit(length, as);
+  return `${label} ${worded(value)}: did you mean ${worded(meant, other.unit)} = ${worded(meant)}? It must lie between ${worded(min)} and ${worded(max)}.`;
 }

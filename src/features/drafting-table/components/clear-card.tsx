@@ -1,4 +1,4 @@
-import { useState, type Dispatch } from 'react';
+import { useEffect, useRef, useState, type Dispatch } from 'react';
 
 import { Button } from '../../../ui/button.tsx';
 import type { BenchAction } from '../bench.ts';
@@ -13,21 +13,25 @@ type ClearCardProps = {
 /** Clears what lies here to start anew, and says whose figures went and how they come back. */
 export const ClearCard = ({ what, state, dispatch }: ClearCardProps) => {
   const [gone, setGone] = useState<string>();
+  const message = useRef<HTMLParagraphElement>(null);
+  useEffect(() => {
+    if (gone !== undefined) message.current?.scrollIntoView({ block: 'nearest' });
+  }, [gone]);
   const empty = Object.keys(state.entries).length === 0 && state.name === '';
   return (
     <>
       <Button
         kind="quiet"
         className="float-right -mr-4"
-        disabled={empty}
         onClick={() => {
+          if (empty) return;
           setGone(state.name.trim() === '' ? 'The figures' : `${state.name.trim()}’s figures`);
           dispatch({ type: 'cleared' });
         }}
       >
         {`Clear the ${what}`}
       </Button>
-      <p role="status" className="clear-both text-sm">
+      <p ref={message} role="status" className="clear-both scroll-mb-4 text-sm">
         {empty && gone !== undefined && (
           <>
             {`${gone} are cleared. `}

@@ -157,7 +157,7 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
         tabIndex={0}
         aria-label="Drawing of the pieces"
         aria-describedby="drawing-keys"
-        className="group absolute inset-0 touch-none -outline-offset-2"
+        className="group absolute inset-0 touch-none outline-none"
         onKeyDown={(event) => {
           if (event.metaKey || event.ctrlKey || event.altKey) return;
           // A handle in the hand is no place to print from.
@@ -196,6 +196,7 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
           {tool === 'move' && <HeldPiece piece={piece} layout={layout} view={view} />}
           <Rod view={view} size={size} unit={state.unit} />
         </svg>
+        <span className="pointer-events-none absolute inset-0 hidden border-2 border-brass group-focus-visible:block" />
         <p
           id="drawing-keys"
           className="absolute bottom-13 left-9 hidden rounded-one bg-cloth px-2 text-sm text-slate sm:group-focus-visible:block"

@@ -29,7 +29,11 @@ export const Foot = memo(function Foot({ draft, state }: FootProps) {
         drawn.problems.map((problem) => (
           <p key={`${problem.field} ${problem.code}`}>{speak(problem.said, unit)}</p>
         ))}
-      <p className={draft.walking.caution ? '' : 'text-slate'}>{speak(draft.walking.said, unit)}</p>
+      <p
+        className={`${draft.walking.caution ? '' : 'text-slate'} ${drawn.fresh ? '' : 'max-sm:hidden'}`}
+      >
+        {speak(draft.walking.said, unit)}
+      </p>
     </div>
   );
 });

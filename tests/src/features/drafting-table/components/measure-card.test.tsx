@@ -3,12 +3,16 @@ import { useReducer } from 'react';
 import { afterEach, expect, test } from 'vitest';
 
 import { MeasureCard } from '../../../../../src/features/drafting-table/components/measure-card.tsx';
-import { emptyTable, tableState } from '../../../../../src/features/drafting-table/table-state.ts';
+import { bench } from '../../../../../src/features/drafting-table/bench.ts';
+import { noHistory } from '../../../../../src/features/drafting-table/history.ts';
+import { emptyTable } from '../../../../../src/features/drafting-table/table-state.ts';
 
 const Card = () => {
-  const [state, dispatch] = useReducer(tableState, emptyTable);
-  return <MeasureCard state={state} dispatch={dispatch} />;
+  const [{ table }, dispatch] = useReducer(bench, { table: emptyTable, history: noHistory });
+  return <MeasureCard state={table} dispatch={dispatch} onFilled={() => (filled += 1)} />;
 };
+
+let filled = 0;
 
 const type = (label: string, text: string) => {
   const field = screen.getByLabelText<HTMLInputElement>(label);
@@ -44,4 +48,39 @@ test('the ten measures stand first; the others only when they are asked for', ()
   expect(screen.queryByLabelText('Upper chest')).toBeNull();
   fireEvent.click(screen.getByRole('button', { name: /All measures \(31\)/ }));
   expect(screen.getByLabelText('Upper chest')).toBeDefined();
+});
+
+test('Enter goes from the name to the bust, and after the tenth measure the card is handed in', () => {
+  render(<Card />);
+  const name = screen.getByLabelText<HTMLInputElement>('Whose card');
+  name.focus();
+  fireEvent.keyDown(name, { key: 'Enter' });
+  expect(document.activeElement).toBe(screen.getByLabelText('Bust'));
+  filled = 0;
+  fireEvent.keyDown(type('Waist to floor', '104'), { key: 'Enter' });
+  expect(filled).toBe(1);
+});
+
+test('clearing says whose figures went, and brings them back', () => {
+  Element.prototype.scrollIntoView = () => undefined;
+  render(<Card />);
+  fireEvent.change(screen.getByLabelText('Whose card'), { target: { value: 'Anna' } });
+  fireEvent.blur(type('Bust', '92'));
+  fireEvent.click(screen.getByRole('button', { name: 'Clear the table' }));
+  expect(screen.getByText(/Anna’s figures are cleared/)).toBeDefined();
+  fireEvent.click(screen.getByRole('button', { name: 'Bring them back' }));
+  expect(screen.getByLabelText<HTMLInputElement>('Bust').value).toBe('92.0');
+  expect(screen.queryByText(/figures are cleared/)).toBeNull();
+});
+
+test('the measures of an arm stand last, for sleeves', () => {
+  render(<Card />);
+  fireEvent.click(screen.getByRole('button', { name: /All measures/ }));
+  const labels = screen.getAllByRole('textbox').map((field) => field.getAttribute('name'));
+  expect(labels.slice(-4)).toEqual([
+    'card.shoulderGirth',
+    'card.upperArmGirth',
+    'card.armLength',
+    'card.wristGirth',
+  ]);
 });
