@@ -1,14 +1,16 @@
 import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
+import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
+import { styleKeys, styleLimits } from '#shared/drafts/gown/style-limits.ts';
 import { formatWithUnit } from '#shared/units/format-length.ts';
 import { speak } from '#shared/units/speak.ts';
 import type { Problem } from '#shared/units/problem.ts';
 import type { Unit } from '#shared/units/said.ts';
 
-import { valueOf, type FieldKey } from './fields.ts';
+import { fieldKeys, valueOf, type FieldKey } from './fields.ts';
 import type { TableState } from './table-state.ts';
 
-type Told = Pick<TableState, 'entries' | 'unit'>;
+type Told = Pick<TableState, 'entries' | 'unit' | 'drawn'>;
 
 /** A problem in the reader's unit; a figure that would do in the other unit is asked about. */
 export const problemWords = (problem: Problem, table: Told): string =>
@@ -24,23 +26,36 @@ export function messageFor(
   return found === undefined ? undefined : problemWords(found, table);
 }
 
-const measureKeys = [...coreMeasures, ...furtherMeasures];
-
 const perOther: Record<Unit, { readonly unit: Unit; readonly times: number }> = {
   in: { unit: 'cm', times: 1 / 2.54 },
   cm: { unit: 'in', times: 2.54 },
 };
 
 /** `Waist 72 3⁄8 in: did you mean 72.4 cm = 28 1⁄2 in?` where the same figure would do in the other unit. */
-function otherUnit({ code, field }: Problem, { entries, unit }: Told): string | undefined {
-  const key = measureKeys.find((each) => field === `card.${each}`);
-  if (code !== 'out-of-range' || key === undefined) return undefined;
-  const { label, min, max, kind } = measureGuide[key];
-  const value = valueOf(entries[`card.${key}`]);
-  if (kind === 'angle' || value === undefined) return undefined;
+function otherUnit({ code, field }: Problem, table: Told): string | undefined {
+  const { entries, unit } = table;
+  const key = fieldKeys.find((each) => field === each);
+  const bounds = key && boundsOf(key, table);
+  const value = key && valueOf(entries[key]);
+  if (code !== 'out-of-range' || bounds === undefined || value === undefined) return undefined;
+  const { label, min, max } = bounds;
   const other = perOther[unit];
   const meant = value * other.times;
   if (meant < min || meant > max) return undefined;
   const worded = (length: number, as: Unit = unit): string => formatWithUnit(length, as);
   return `${label} ${worded(value)}: did you mean ${worded(meant, other.unit)} = ${worded(meant)}? It must lie between ${worded(min)} and ${worded(max)}.`;
+}
+
+type Bounds = { readonly label: string; readonly min: number; readonly max: number };
+
+/** Bounds of a length: those of a style hang on the body of the last good draft. */
+function boundsOf(field: FieldKey, { drawn: { draft } }: Told): Bounds | undefined {
+  const measure = [...coreMeasures, ...furtherMeasures].find((key) => field === `card.${key}`);
+  if (measure !== undefined) {
+    return measureGuide[measure].kind === 'length' ? measureGuide[measure] : undefined;
+  }
+  const style = styleKeys.find((key) => field === `style.${key}`);
+  if (draft === undefined || style === undefined || style === 'flareFraction') return undefined;
+  const limits = styleLimits(draft.body, draft.bodyLevels, draft.inputs.style);
+  return { label: styleLabels[style], ...limits[style] };
 }
