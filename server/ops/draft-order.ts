@@ -8,9 +8,11 @@ import type { Problem } from '#shared/units/problem.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 
-export const usage = `Use: npm run --silent draft -- --measures card.json --style style.json
-       [--rules rules.json] [--paper A4|Letter] [--unit cm|in] --out DIR
-     npm run --silent draft -- --schema card|style|rules`;
+const usage = [
+  'Use: npm run --silent draft -- --measures card.json --style style.json',
+  '       [--rules rules.json] [--paper A4|Letter] [--unit cm|in] --out DIR',
+  '     npm run --silent draft -- --schema card|style|rules',
+];
 
 /** What the command ends with: every proof line holds, drawn but a line fails, or bad input. */
 export const ends = { proven: 0, unproven: 1, refused: 2 } as const;
@@ -18,10 +20,13 @@ export const ends = { proven: 0, unproven: 1, refused: 2 } as const;
 /** A gown that is drawn but not proven is written all the same, and the exit code says so. */
 export const endOf = (proof: Proof): number => (proof.holds ? ends.proven : ends.unproven);
 
+/** What a terminal would obey rather than show: a name of a file or a field may hold it. */
+const unshown = /[\p{Cc}\p{Zl}\p{Zp}\p{Bidi_Control}]/gu;
+
 /** Bad input on the command line; its message is for stderr and names the field or the option. */
 export class RefusedError extends Error {
   constructor(lines: readonly string[]) {
-    super(lines.join('\n'));
+    super(lines.map((line) => line.replace(unshown, '\ufffd')).join('\n'));
     this.name = 'RefusedError';
   }
 }
@@ -48,7 +53,7 @@ export function readOptions(args: readonly string[]) {
       },
     }).values;
   } catch (error) {
-    return refuse(error instanceof Error ? error.message : String(error), usage);
+    return refuse(error instanceof Error ? error.message : String(error), ...usage);
   }
 }
 
@@ -80,9 +85,10 @@ export type Order = {
 /** Reads the three files and the choices, or refuses by name what cannot be right. */
 export function readOrder(options: ReturnType<typeof readOptions>): Order {
   const { measures, style, rules, paper, unit, out } = options;
-  if (measures === undefined) return refuse('--measures is missing: name the measure card.', usage);
-  if (style === undefined) return refuse('--style is missing: name the style card.', usage);
-  if (out === undefined) return refuse('--out is missing: name a folder for the files.', usage);
+  if (measures === undefined)
+    return refuse('--measures is missing: name the measure card.', ...usage);
+  if (style === undefined) return refuse('--style is missing: name the style card.', ...usage);
+  if (out === undefined) return refuse('--out is missing: name a folder for the files.', ...usage);
   if (!isPaper(paper)) return refuse(`--paper must be A4 or Letter; it is “${paper}”.`);
   if (!isUnit(unit)) return refuse(`--unit must be cm or in; it is “${unit}”.`);
   const reading = readInputs({

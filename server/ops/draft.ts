@@ -1,5 +1,3 @@
-import { mkdirSync, writeFileSync } from 'node:fs';
-import { join } from 'node:path';
 import { type InputFile, inputFiles, jsonSchema } from '#shared/api/json-schema.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
 import type { Draft } from '#shared/engine/draft.ts';
@@ -19,6 +17,7 @@ import {
   refuse,
   refuseProblems,
 } from './draft-order.ts';
+import { writeFiles } from './write-files.ts';
 
 async function draw({ inputs, paper, unit }: Order): Promise<{ draft: Draft; tiles: Uint8Array }> {
   try {
@@ -33,8 +32,7 @@ async function draw({ inputs, paper, unit }: Order): Promise<{ draft: Draft; til
 
 function write(folder: string, files: Readonly<Record<string, string | Uint8Array>>): void {
   try {
-    mkdirSync(folder, { recursive: true });
-    for (const [name, content] of Object.entries(files)) writeFileSync(join(folder, name), content);
+    writeFiles(folder, files);
   } catch {
     refuse(`--out: the folder ${folder} cannot be written to.`);
   }

@@ -1,5 +1,5 @@
 import { execFile } from 'node:child_process';
-import { mkdtemp, readFile, readdir, rm, writeFile } from 'node:fs/promises';
+import { mkdir, mkdtemp, readFile, readdir, rm, symlink, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
@@ -98,9 +98,50 @@ describe('bad input ends with 2, and stderr names the field', () => {
   it('a folder that cannot be made', async () => {
     const blocked = await file('blocked', '');
     const args = await order(card);
-    const { code, told } = await draft(...args.slice(0, -1), join(blocked, 'out'));
-    expect(code).toBe(2);
-    expect(told).toContain('--out: the folder');
+    for (const out of [join(blocked, 'out'), blocked, '/proc/ellwand', '/proc/ellwand/out']) {
+      const { code, told } = await draft(...args.slice(0, -1), out);
+      expect(code).toBe(2);
+      expect(told).toBe(`--out: the folder ${out} cannot be written to.\n`);
+    }
+  });
+});
+
+describe('what a terminal would obey is shown and not sent to it', () => {
+  it('in a path, an option or the name of a field', async () => {
+    const sly = '\u001b[2J\u0007\u009b\nall is well\u202e';
+    const told = [
+      await draft('--measures', sly, '--style', 's', '--out', folder),
+      await draft(`--${sly}`, 'red'),
+      await draft(...(await order({ ...card, [sly]: 1 }))),
+    ].map((each) => each.told);
+    for (const each of told) {
+      expect(each).toContain('all is well');
+      expect(each.replaceAll('\n', '')).not.toMatch(/[\p{Cc}\p{Bidi_Control}]/u);
+      expect(each.split('\n').some((line) => line.startsWith('all is well'))).toBe(false);
+    }
+  });
+});
+
+describe('what lies in the folder already', () => {
+  it('is replaced by its name; a link is not followed, and nothing half written is left', async () => {
+    const out = join(folder, 'linked');
+    await mkdir(out);
+    const elsewhere = await file('elsewhere.txt', 'her notes');
+    await symlink(elsewhere, join(out, 'pieces.svg'));
+    await writeFile(join(out, 'draft.json'), 'an older draft');
+    const args = await order(card);
+    expect((await draft(...args.slice(0, -1), out)).code).toBe(0);
+    expect(await readFile(elsewhere, 'utf8')).toBe('her notes');
+    expect(await readFile(join(out, 'pieces.svg'), 'utf8')).toContain('<svg');
+    expect(await readdir(out)).toHaveLength(4);
+  });
+
+  it('is left alone where a folder has the name of a file', async () => {
+    const out = join(folder, 'taken');
+    await mkdir(join(out, 'pieces.svg'), { recursive: true });
+    const args = await order(card);
+    expect((await draft(...args.slice(0, -1), out)).code).toBe(2);
+    expect(await readdir(out)).toEqual(['pieces.svg']);
   });
 });
 
