@@ -43,7 +43,8 @@ export function asDrafted(pieces: readonly FinishedPiece[], aspect = 1): Layout 
   ];
   let x = 0;
   const [front, back, flare] = groups.map((group) => {
-    const box = around(group.map(boxOf));
+    // The gores lie beside the first of them, wherever in their frame they were struck.
+    const box = around((group === groups[2] ? group.slice(0, 1) : group).map(boxOf));
     const at = point(x - box.left, 0);
     x += box.right - box.left + gap + (group === groups[1] ? nameRoom : 0);
     return { at, placed: group.map((piece) => place(piece, at)) };

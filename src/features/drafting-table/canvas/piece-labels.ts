@@ -22,17 +22,15 @@ type Words = Pick<PieceLabel, 'title' | 'cut' | 'fault' | 'small'>;
 const large = { letter: 6.9, line: 17 };
 const small = { letter: 5.9, line: 14 };
 
-const between = 3;
-
 /** How far down a piece its name stands: clear of the handles along a top edge, and of the tips of darts. */
 const shares = { top: 0.66, middle: 0.45, flare: 0.5 };
 
 /** How far outside its piece a name is tried, one place after the other. */
-const away = [6, 14, 28, 42, 56, 70];
+const away = [6, 14, 22];
 
 /**
  * A name for every piece at this zoom. First the cut line gives way, then the long title to the short one, then
- * one line to two; where a piece is too small for any, its name stands beside it at the end of a hairline.
+ * one line to two; where a piece is too small for any, its name stands beside it at the end of a hairline, if that place is free.
  */
 export function pieceLabels(
   layout: Layout,
@@ -47,18 +45,13 @@ export function pieceLabels(
     const fault = faultOf(piece.name);
     const within = ways(placed, fault).find((words) => fits(words, box));
     if (within !== undefined) {
-      const height = heightOf(within);
-      const at = {
-        x: (box.left + box.right) / 2,
-        y:
-          box.top + (box.bottom - box.top) * shares[piece.part] - height / 2 + lineOf(within) * 0.8,
-      };
+      const at = centred(within, box, shares[piece.part]);
       taken.push(around(within, at));
       return { piece: piece.name, ...within, at };
     }
     const words: Words = { title: stacked(piece), small: true, ...(fault && { fault }) };
     const others = [...taken, ...boxes.filter((_, other) => other !== index)];
-    const place = beside(words, box, others);
+    const place = beside(words, box, others) ?? { at: centred(words, box, 0.5) };
     taken.push(around(words, place.at));
     return { piece: piece.name, ...words, ...place };
   });
@@ -96,7 +89,13 @@ const widthOf = (words: Words): number =>
 const heightOf = (words: Words): number => linesOf(words).length * lineOf(words);
 
 const fits = (words: Words, box: Box): boolean =>
-  widthOf(words) + between <= box.right - box.left && heightOf(words) <= box.bottom - box.top;
+  widthOf(words) <= box.right - box.left && heightOf(words) <= box.bottom - box.top;
+
+/** Where words start that are centred so far down a box. */
+const centred = (words: Words, box: Box, share: number): Point => ({
+  x: (box.left + box.right) / 2,
+  y: box.top + (box.bottom - box.top) * share - heightOf(words) / 2 + lineOf(words) * 0.8,
+});
 
 function around(words: Words, at: Point): Box {
   const half = widthOf(words) / 2;
@@ -104,14 +103,12 @@ function around(words: Words, at: Point): Box {
   return { left: at.x - half, right: at.x + half, top, bottom: top + heightOf(words) };
 }
 
-/** The nearest free place above, under or beside a piece, with a hairline to its middle. */
+/** The nearest free place above, under or beside a piece, with a hairline to its middle; none where all is full. */
 function beside(
   words: Words,
   box: Box,
   others: readonly Box[],
-): Pick<PieceLabel, 'at'> & {
-  readonly hairline: readonly [Point, Point];
-} {
+): Required<Pick<PieceLabel, 'at' | 'hairline'>> | undefined {
   const middle = { x: (box.left + box.right) / 2, y: (box.top + box.bottom) / 2 };
   const half = widthOf(words) / 2;
   const rise = lineOf(words) * 0.4;
@@ -125,14 +122,15 @@ function beside(
     const own = around(words, at);
     return own.left > 28 && own.top > 28 && others.every((each) => apart(own, each));
   };
-  const at = places.find(free) ?? places[0] ?? middle;
+  const at = places.find(free);
+  if (at === undefined) return undefined;
   const below = at.y > middle.y;
   const foot = at.y + (words.title.length - 1) * lineOf(words) + 2;
   return { at, hairline: [{ x: at.x, y: below ? at.y - rise * 2 : foot }, middle] };
 }
 
 /** So much two boxes may overlap: widths of letters are reckoned on the broad side, pixels. */
-const shy = 2;
+const shy = 4;
 
 const apart = (a: Box, b: Box): boolean =>
   a.right < b.left + shy ||

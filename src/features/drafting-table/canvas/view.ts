@@ -13,14 +13,14 @@ export type Box = {
 };
 
 /**
- * Room the rod and the tools keep free of pieces when the drawing is fitted. A piece by itself stands clear
- * of the tools; all pieces together may reach between them, and on a phone have their names above them.
+ * Room the rod and the tools keep free of pieces when the drawing is fitted; on a phone the names of small
+ * pieces stand above them.
  */
 const insetOf = ({ width }: Size, place: Place) => ({
   left: 40,
   top: width > 560 || place === 'middle' ? 40 : 66,
   right: 16,
-  bottom: width > 560 && place === 'corner' ? 24 : 64,
+  bottom: 60,
 });
 
 /** Width over height of a canvas, in halves: pieces are not laid anew at every pixel a window is drawn. */

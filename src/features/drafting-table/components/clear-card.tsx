@@ -22,7 +22,8 @@ export const ClearCard = ({ what, state, dispatch }: ClearCardProps) => {
     <>
       <Button
         kind="quiet"
-        className="float-right -mr-4"
+        slim
+        className="float-right -mr-2 min-h-10"
         onClick={() => {
           if (empty) return;
           setGone(state.name.trim() === '' ? 'The figures' : `${state.name.trim()}’s figures`);
