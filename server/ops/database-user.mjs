@@ -46,6 +46,21 @@ function asDatabaseUser(program, args) {
  */
 export const postgres = (program, args) => asDatabaseUser(join(programFolder(), program), args);
 
+/**
+ * Sends sentences to a cluster on loopback; the password goes by the environment, which others cannot read.
+ * @param {{ port: number, user: string, password: string }} who
+ * @param {string} sentences
+ */
+export const psql = ({ port, user, password }, sentences) =>
+  quietly(
+    join(programFolder(), 'psql'),
+    [
+      ...['-X', '-q', '-v', 'ON_ERROR_STOP=1', '-h', '127.0.0.1', '-p', String(port)],
+      ...['-U', user, '-d', 'postgres', '-f', '-'],
+    ],
+    { cwd: '/', env: { PGPASSWORD: password }, input: sentences },
+  );
+
 /** @param {string} path */
 function giveToDatabaseUser(path) {
   if (!isRoot()) return;

@@ -36,10 +36,14 @@ export async function must(what, program, args, options) {
  * Runs a program quietly.
  * @param {string} program
  * @param {readonly string[]} args
- * @param {{ cwd?: string }} [options]
+ * @param {{ cwd?: string, env?: Record<string, string>, input?: string }} [options]
  */
 export function quietly(program, args, options = {}) {
-  const done = spawnSync(program, args, { encoding: 'utf8', cwd: options.cwd ?? root });
+  const { cwd = root, env, input } = options;
+  const done = spawnSync(program, args, {
+    ...{ encoding: 'utf8', cwd, env: { ...process.env, ...env } },
+    ...(input === undefined ? {} : { input }),
+  });
   if (done.error) return { ok: false, output: done.error.message };
   return { ok: done.status === 0, output: `${done.stdout}${done.stderr}`.trim() };
 }

@@ -36,8 +36,38 @@ describe('the private database', () => {
 
   it('listens on loopback alone, and keeps its files to itself', async () => {
     expect(await ask(cluster.url, 'show listen_addresses')).toBe('127.0.0.1');
-    expect(statSync(join(cluster.folder, 'password')).mode & 0o077).toBe(0);
+    for (const each of ['password', 'owner-password']) {
+      expect(statSync(join(cluster.folder, each)).mode & 0o077).toBe(0);
+    }
     expect(statSync(cluster.folder).mode & 0o077).toBe(0);
+  });
+
+  it('is worked with as its owner, who is nobody on the machine', async () => {
+    const rights = `select rolsuper or rolcreaterole or rolcreatedb or rolreplication or rolbypassrls
+      or pg_has_role(current_user, 'pg_execute_server_program', 'member')
+      from pg_roles where rolname = current_user`;
+    expect(await ask(cluster.url, rights)).toBe(false);
+    await expect(ask(cluster.url, "copy (select 1) to program 'true'")).rejects.toThrow(
+      /must be superuser/,
+    );
+    await expect(ask(cluster.url, "select pg_read_file('/etc/hostname')")).rejects.toThrow(
+      /permission denied/,
+    );
+  });
+
+  it('made by an older Ellwand keeps its tables and goes on with them', async () => {
+    await ask(cluster.adminUrl, 'create schema older');
+    await ask(cluster.adminUrl, 'create table older.noted (id serial primary key, note text)');
+    await ask(cluster.adminUrl, 'create table noted (id serial primary key, note text)');
+    await ask(cluster.adminUrl, "insert into noted (note) values ('kept')");
+    cluster.stop();
+    rmSync(join(cluster.folder, 'owner-password'));
+    cluster = await start();
+    await ask(cluster.url, 'alter table noted add column more text');
+    await ask(cluster.url, "insert into noted (note) values ('new')");
+    expect(await ask(cluster.url, 'select count(*)::int from noted')).toBe(2);
+    await ask(cluster.url, 'create table older.another (id serial)');
+    await ask(cluster.url, "insert into older.noted (note) values ('new')");
   });
 
   it('is found running, and then left running to whoever started it', async () => {

@@ -10,6 +10,7 @@ import { openPrinter } from '#server/features/print/printer.ts';
 import { ownOrigins } from '#server/http/own-origins.ts';
 import { listen } from '#server/listen.ts';
 import type { Limits } from '#server/settings.ts';
+import { owner } from '#server/ops/database-owner.mjs';
 import { freePort } from '#server/ops/free-port.mjs';
 import { template } from './cluster-setup.ts';
 
@@ -35,7 +36,7 @@ const roomy: Limits = {
 };
 
 async function asAdmin(sentence: string): Promise<void> {
-  const admin = new Client({ connectionString: inject('clusterUrl') });
+  const admin = new Client({ connectionString: inject('adminUrl') });
   await admin.connect();
   await admin.query(sentence);
   await admin.end();
@@ -54,7 +55,7 @@ export async function startServer(
 ): Promise<ServerUnderTest> {
   const name = `clone_${randomBytes(6).toString('hex')}`;
   if (options.databaseUrl === undefined)
-    await asAdmin(`create database ${name} template ${template}`);
+    await asAdmin(`create database ${name} template ${template} owner ${owner}`);
   const databaseUrl = options.databaseUrl ?? inject('clusterUrl').replace(/postgres$/, name);
   const { database, close } = connect(databaseUrl, () => undefined);
   const lines: string[] = [];
