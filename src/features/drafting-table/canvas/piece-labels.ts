@@ -24,13 +24,18 @@ const small = { letter: 5.9, line: 14 };
 
 /** How far down a piece its name stands: clear of the handles along a top edge, and of the tips of darts. */
 const shares = { top: 0.66, middle: 0.45, flare: 0.5 };
+const lowShares = { ...shares, middle: 0.68 };
 
 /** How far outside its piece a name is tried, one place after the other. */
 const away = [6, 14, 22];
 
+/** And how far to the side above it. */
+const aside = [0, 9, -9];
+
 /**
  * A name for every piece at this zoom. First the cut line gives way, then the long title to the short one, then
- * one line to two; where a piece is too small for any, its name stands beside it at the end of a hairline, if that place is free.
+ * one line to two; where a piece is too small for any, its name stands beside it at the end of a hairline, if there
+ * is a free place.
  */
 export function pieceLabels(
   layout: Layout,
@@ -45,7 +50,11 @@ export function pieceLabels(
     const fault = faultOf(piece.name);
     const within = ways(placed, fault).find((words) => fits(words, box));
     if (within !== undefined) {
-      const at = centred(within, box, shares[piece.part]);
+      const at = centred(
+        within,
+        box,
+        within.title.length > 1 ? lowShares[piece.part] : shares[piece.part],
+      );
       taken.push(around(within, at));
       return { piece: piece.name, ...within, at };
     }
@@ -113,7 +122,10 @@ function beside(
   const half = widthOf(words) / 2;
   const rise = lineOf(words) * 0.4;
   const places = away.flatMap((off) => [
-    { x: middle.x, y: box.top - off - heightOf(words) + lineOf(words) * 0.8 },
+    ...aside.map((by) => ({
+      x: middle.x + by,
+      y: box.top - off - heightOf(words) + lineOf(words) * 0.8,
+    })),
     { x: middle.x, y: box.bottom + off + lineOf(words) * 0.8 },
     { x: box.right + off + half, y: middle.y },
     { x: box.left - off - half, y: middle.y },
