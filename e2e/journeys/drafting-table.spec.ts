@@ -9,7 +9,7 @@ test('the pieces follow every figure at once', async ({ drawnTable }) => {
     const after = await drawnTable.drawing.locator('canvas').screenshot();
     expect(after.equals(before)).toBe(false);
   }).toPass();
-  await expect(drawnTable.panel.getByRole('row', { name: /Knee seam/ })).toContainText('100.0');
+  await expect(drawnTable.panel.getByRole('row', { name: /^Knee seam —/ })).toContainText('100.0');
 });
 
 test('a seam lights with its partner and both lengths, pointed at or stepped to by key', async ({
@@ -136,7 +136,7 @@ test('without the server the table still draws, and the print says what to do', 
 }) => {
   await page.route('**/api/**', (route) => route.abort());
   await drawnTable.field('style.kneeFinished').fill('100');
-  await expect(drawnTable.panel.getByRole('row', { name: /Knee seam/ })).toContainText('100.0');
+  await expect(drawnTable.panel.getByRole('row', { name: /^Knee seam —/ })).toContainText('100.0');
   await drawnTable.print.click();
   await drawnTable.printButton('Chalk sheet').click();
   await expect(drawnTable.printRow('Chalk sheet')).toContainText('The server cannot be reached');
