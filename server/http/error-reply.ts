@@ -53,9 +53,7 @@ const ofAnotherReply = [
 ];
 
 const property = (error: unknown, key: string): unknown =>
-  typeof error === 'object' && error !== null && Object.hasOwn(error, key)
-    ? Reflect.get(error, key)
-    : undefined;
+  typeof error === 'object' && error !== null && key in error ? Reflect.get(error, key) : undefined;
 
 /** Headers of a request that do not fit what they came with, as Express and its parts tell it by a status. */
 function fromHeaders(error: unknown): RefusalError | undefined {
