@@ -26,7 +26,12 @@ type HandlesProps = {
   readonly view: View;
   readonly unit: Unit;
   readonly onMove: (key: Handle['key'], value: number) => void;
-  readonly onHold: (held: boolean) => void;
+  /** The hand takes a handle, draws it to a value, and lets it go there. */
+  readonly onHold: (key: Handle['key']) => void;
+  readonly onDrag: (key: Handle['key'], value: number) => void;
+  readonly onDrop: () => void;
+  /** Whether something else shows where they are. */
+  readonly hidden: boolean;
   /** The hand leaves a handle: what comes next is another change. */
   readonly onRelease: () => void;
 };
@@ -64,20 +69,25 @@ const Lozenge = ({
   layout,
   view,
   unit,
+  hidden,
   onMove,
   onHold,
+  onDrag,
+  onDrop,
   onRelease,
 }: LozengeProps) => {
   const [near, setNear] = useState(false);
   const from = useRef<{ readonly x: number; readonly y: number; readonly value: number }>(
     undefined,
   );
+  const drawnTo = useRef<number>(undefined);
   const placed = layout.placed.find(({ piece }) => piece.name === handle.piece);
   if (placed === undefined) return null;
   const point = toScreen(view, add(handle.at, placed.at));
   const at = aside ? add(point, scale(handle.along, 26)) : point;
   const { small, large } = nudges[unit];
-  const move = (to: number) => onMove(handle.key, Math.min(limit.max, Math.max(limit.min, to)));
+  const within = (to: number) => Math.min(limit.max, Math.max(limit.min, to));
+  const move = (to: number) => onMove(handle.key, within(to));
 
   const press = (event: KeyboardEvent) => {
     const way = { ArrowUp: 1, ArrowRight: 1, ArrowDown: -1, ArrowLeft: -1 }[event.key];
@@ -94,7 +104,7 @@ const Lozenge = ({
     event.currentTarget.setPointerCapture(event.pointerId);
     event.currentTarget.focus();
     from.current = { x: event.clientX, y: event.clientY, value };
-    onHold(true);
+    onHold(handle.key);
   };
   const drag = (event: PointerEvent) => {
     event.stopPropagation();
@@ -104,11 +114,14 @@ const Lozenge = ({
     // Seen from far off a pixel is a long way: then the lozenge follows slower than the hand.
     const most = event.pointerType === 'touch' ? finest.touch : finest.pointer;
     const grown = dot(pixels, handle.along) * Math.min(most, Math.max(-most, perPixel));
-    move(Math.round((from.current.value + grown) / small) * small);
+    drawnTo.current = within(Math.round((from.current.value + grown) / small) * small);
+    onDrag(handle.key, drawnTo.current);
   };
   const drop = () => {
     from.current = undefined;
-    onHold(false);
+    if (drawnTo.current !== undefined) onMove(handle.key, drawnTo.current);
+    drawnTo.current = undefined;
+    onDrop();
     onRelease();
   };
 
@@ -123,7 +136,7 @@ const Lozenge = ({
       aria-valuetext={formatWithUnit(value, unit)}
       data-handle={handle.key}
       transform={`translate(${at.x} ${at.y})`}
-      className="pointer-events-auto cursor-grab touch-none outline-none focus-visible:[&_.ring]:opacity-100"
+      className={`pointer-events-auto cursor-grab touch-none outline-none focus-visible:[&_.ring]:opacity-100 ${hidden ? 'opacity-0' : ''}`}
       onKeyDown={press}
       onKeyUp={(event) => event.key.startsWith('Arrow') && onRelease()}
       onPointerDown={grab}

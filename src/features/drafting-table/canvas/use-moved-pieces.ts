@@ -25,6 +25,7 @@ export function useMovedPieces(place: string, layout: Layout, movable: boolean) 
   }, [key, shifts]);
   return {
     layout: moved,
+    shifts,
     any: Object.keys(shifts).length > 0,
     move: (piece: string, by: Point) =>
       setShifts((now) => ({ ...now, [piece]: add(now[piece] ?? point(0, 0), by) })),

@@ -6,6 +6,7 @@ import { scale, type Point } from '#shared/geometry/point.ts';
 import { useSize } from '../../../lib/use-size.ts';
 import { useTheme } from '../../../lib/use-theme.ts';
 import type { BenchAction } from '../bench.ts';
+import { DragView } from '../canvas/drag-view.tsx';
 import { Handles } from '../canvas/handles.tsx';
 import { asCut, asDrafted } from '../canvas/layout.ts';
 import { Lettering } from '../canvas/lettering.tsx';
@@ -14,6 +15,7 @@ import { pieceAt } from '../canvas/moved-pieces.ts';
 import { Rod } from '../canvas/rod.tsx';
 import { StepPoints } from '../canvas/step-points.tsx';
 import { TapeLine } from '../canvas/tape-line.tsx';
+import { useDrag } from '../canvas/use-drag.ts';
 import { useFraming } from '../canvas/use-framing.ts';
 import { useGestures } from '../canvas/use-gestures.ts';
 import { useMovedPieces } from '../canvas/use-moved-pieces.ts';
@@ -47,7 +49,7 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
   const { draft, state, place, dispatch, onPrint } = props;
   const frame = useRef<HTMLDivElement>(null);
   const canvas = useRef<HTMLCanvasElement>(null);
-  const [held, setHeld] = useState(false);
+  const [shown, setShown] = useState(false);
   const [chosenTool, setTool] = useState<Tool>('look');
   const [piece, setPiece] = useState<string>();
   const size = useSize(frame);
@@ -64,7 +66,8 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
   const { layout } = moved;
   const key = `${String(drafting)} ${pieces.map((each) => each.name).join()}`;
   // Framed by where the pieces lay: one that is carried off does not carry the view along.
-  const framing = useFraming(key, asLaid.box, size, !held);
+  const drag = useDrag(draft, moved.shifts);
+  const framing = useFraming(key, asLaid.box, size, drag.held === undefined);
   const { view } = framing;
   const tape = useTape(layout);
 
@@ -171,9 +174,18 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
       >
         <canvas
           ref={canvas}
-          className={`absolute inset-0 h-full w-full ${state.drawn.fresh ? '' : 'opacity-50'}`}
+          className={`absolute inset-0 h-full w-full ${shown ? 'invisible' : ''} ${state.drawn.fresh ? '' : 'opacity-50'}`}
           aria-hidden="true"
         />
+        {drag.held !== undefined && (
+          <DragView
+            held={drag.held}
+            view={view}
+            unit={state.unit}
+            listen={drag.listen}
+            onShown={() => setShown(true)}
+          />
+        )}
         <svg className="pointer-events-none absolute inset-0 h-full w-full">
           <Lettering draft={draft} layout={layout} view={view} size={size} named={!drafting} />
           {step !== undefined && <StepPoints step={step} layout={layout} view={view} />}
@@ -186,7 +198,13 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
               onMove={(handle, value) =>
                 dispatch({ type: 'moved', field: `style.${handle}`, value })
               }
-              onHold={setHeld}
+              hidden={shown}
+              onHold={drag.hold}
+              onDrag={drag.to}
+              onDrop={() => {
+                drag.letGo();
+                setShown(false);
+              }}
               onRelease={() => dispatch({ type: 'released' })}
             />
           )}
