@@ -90,7 +90,7 @@ type Round = {
 /** The darts of the middle: shares of the intake and heights of the tips. */
 type DartPlan = { readonly shares: readonly number[]; readonly tips: readonly number[] };
 
-const roundsAtMost = 48;
+const roundsAtMost = 80;
 /** From this round on it moves half way only, which settles the few bodies that swing. */
 const dampedFrom = 14;
 
