@@ -35,7 +35,8 @@ export async function startServer(args, address, env) {
   /** @type {Promise<number>} */
   const ended = new Promise((resolve) => {
     child.on('exit', (code) => {
-      resolve(code ?? 0);
+      // Without a code it was killed, which is no success.
+      resolve(code ?? 1);
     });
   });
   const stop = async () => {

@@ -7,9 +7,6 @@ import { line } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { deg, mm, said } from '../../units/said.ts';
 
-/** Lost to both selvedges. */
-const selvedges = 20;
-
 /**
  * Inner radius of a circle flare: seam length over 2 pi times the part of a full circle.
  * Millimetres. Source: plane geometry; check values in `tests/outside`.
@@ -41,7 +38,7 @@ export function planFlare(
   const angle = seamHalf / inner;
   const outer = inner + depth;
   const fits = (halfGore: number): boolean =>
-    halfGore <= Math.PI / 2 + 1e-9 && 2 * outer * Math.sin(halfGore) <= clothWidth - selvedges;
+    halfGore <= Math.PI / 2 + 1e-9 && 2 * outer * Math.sin(halfGore) <= clothWidth;
   let gores = 1;
   while (!fits(angle / (2 * gores - 1)) && gores < 12) gores += 1;
   return { inner, outer, angle, halfGore: angle / (2 * gores - 1), gores };

@@ -25,7 +25,7 @@ export type HalfInputs = {
   readonly axis: number;
   /** Height at which the first dart of the middle ends; a second ends 20 higher. */
   readonly dartTip: number;
-  /** Where the dart plan is given: one dart or two. */
+  /** Darts of the middle: one, or two sharing the intake. */
   readonly dartCount: 1 | 2;
   /** Where darts shape the top, the side seam helps them under the bust by its share. */
   readonly sideHelps: boolean;

@@ -78,8 +78,6 @@ export type Suppression = {
   readonly side: number;
   /** Left to the dart or princess seam. */
   readonly dart: number;
-  /** The side was moved out so that it leans at most 25 degrees. */
-  readonly eased: boolean;
   /** Even moved out it leans more. */
   readonly steep: boolean;
 };
@@ -106,19 +104,15 @@ export function shareSuppression(
   };
   const wished = whole <= 0 ? quarters.waist : quarters.waist + (1 - share) * whole;
   let side = Math.max(quarters.waist, Math.min(wished, inner));
-  let eased = false;
   if (whole > 0 && leanAt(side) > steepestLean) {
     const limit = Math.max(side, Math.min(inner, Math.max(quarters.bust, quarters.hip)));
-    const out = leastOutward(side, limit, leanAt);
-    eased = out > side;
-    side = out;
+    side = leastOutward(side, limit, leanAt);
   }
   if (side - quarters.waist < narrowestDart) side = quarters.waist;
   return {
     whole,
     side,
     dart: side - quarters.waist,
-    eased,
     steep: leanAt(side) > steepestLean + 1e-6,
   };
 }

@@ -19,9 +19,6 @@ export type Walking = { readonly step: number; readonly caution: boolean; readon
 export const longestStep = (skirt: number, knee: number, leg: number, depth: number): number =>
   Math.max(0, ((skirt - knee) / 2) * (leg / depth));
 
-/** Girth round both knees standing together, from one: G (1 + 2/pi). Source: derived, two circles in a band. */
-export const kneesTogether = (knee: number): number => knee * (1 + 2 / Math.PI);
-
 /** The step the knee seam allows, stated on every gown. */
 export function walking(
   paper: PartTable,
