@@ -119,5 +119,6 @@ export function joinedPairs(placed: Placed): readonly JoinedPair[] {
 export const isPanelSeam = ({ first, second }: JoinedPair): boolean =>
   first.piece.side === second.piece.side && first.piece.part === second.piece.part;
 
-/** An edge as it is spoken of: `waist a` for `waist-a`. */
-export const spoken = (name: string): string => name.replaceAll('-', ' ');
+/** An edge as it is spoken of: `waist seam a` for `waist-a`, `knee half` for `knee-half`. */
+export const spoken = (name: string): string =>
+  name.replace(/^waist-(?=[a-z]$)/, 'waist seam ').replaceAll('-', ' ');
