@@ -26,12 +26,15 @@ const fitted =
 /**
  * Upper chest from bust and under-bust: within 7 mm of the upper chest row of ASTM D5585-11e1 (seen), sizes 2 to 20,
  * whose cup hardly changes. How a cup shares is our rule: three tenths of what the bust gains over the same ribs
- * lie above it, and the upper chest stays under the bust by 15 % of bust less under-bust.
+ * lie above it, and the upper chest stays under the bust by 15 % of bust less under-bust, by 150 at most: beyond that nobody guesses.
  */
 export const upperChestByCup = ({ bustGirth, underbustGirth }: Known): number =>
-  Math.min(
-    0.3 * bustGirth + 0.555 * underbustGirth + 206,
-    bustGirth - 0.15 * (bustGirth - underbustGirth),
+  Math.max(
+    bustGirth - 150,
+    Math.min(
+      0.3 * bustGirth + 0.555 * underbustGirth + 206,
+      bustGirth - 0.15 * (bustGirth - underbustGirth),
+    ),
   );
 
 /** ASTM D5585-11e1 (seen): within 5 mm of its neck base row. */
