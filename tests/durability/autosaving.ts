@@ -29,7 +29,8 @@ async function sendOnce(line: Endpoint, body: object, gownId: string): Promise<R
     body: JSON.stringify(body),
     signal: AbortSignal.timeout(5000),
   });
-  for (const set of reply.headers.getSetCookie()) cookie = set.split(';')[0] ?? '';
+  const given = reply.headers.getSetCookie().map((set) => set.split(';')[0] ?? '');
+  if (given.length > 0) cookie = given.join('; ');
   return reply;
 }
 
