@@ -50,6 +50,7 @@ for (const width of widths) {
       viewport: { width, height: heights[width] ?? 900 },
       colorScheme,
       baseURL: address,
+      locale: 'en-GB',
       hasTouch: width < 500,
     });
     const page = await context.newPage();
