@@ -109,7 +109,7 @@ test('a measure card is kept by itself, and laid on a gown', async ({ page, gown
   await page.getByRole('button', { name: 'Keep this card' }).click();
   await expect(page.getByText('among the measure cards')).toBeVisible();
   await page.goto('/gowns/measure-cards');
-  await page.getByRole('link', { name: 'Measure card' }).last().click();
+  await page.getByRole('link', { name: 'Measure card', exact: true }).click();
   const waist = page.locator('input[name="card.waistGirth"]');
   await waist.fill('70');
   await waist.press('Enter');
