@@ -90,9 +90,15 @@ const handle = z.object({
 
 /** A gown drafted, finished and proven, as it goes over the wire and into `draft.json`. */
 export const draftSchema = z.object({
+  garment: z.literal('gown'),
   engine: z.string(),
   number: z.string(),
-  inputs: z.object({ card: measureCard, style: styleCard, rules: houseRules }),
+  inputs: z.object({
+    garment: z.literal('gown').optional(),
+    card: measureCard,
+    style: styleCard,
+    rules: houseRules,
+  }),
   body: z.object({
     measures: z.object(measures()),
     estimated: z.object(rulesUsed()),

@@ -22,19 +22,24 @@ import { draftNumber } from './draft-number.ts';
 /** Version of the rules of the blocks: a change of any shape raises it. */
 const blockVersion = '1.0.0';
 
-/** The three inputs of a block. */
-export type BlockInputs<Card> = {
+/** The garments that are blocks. */
+export type BlockName = 'bodice-block' | 'skirt-block';
+
+/** The three inputs of a block, and which it is. */
+export type BlockInputs<Name extends BlockName, Card> = {
+  readonly garment: Name;
   readonly card: MeasureCard;
   readonly style: Card;
   readonly rules: HouseRules;
 };
 
 /** A block drafted, finished and proven: of a gown's draft all that applies. */
-export type BlockDraft<Card, Style> = {
+export type BlockDraft<Name extends BlockName, Card, Style> = {
+  readonly garment: Name;
   readonly engine: string;
   /** Short number printed on every piece, the same for the same inputs. */
   readonly number: string;
-  readonly inputs: BlockInputs<Card>;
+  readonly inputs: BlockInputs<Name, Card>;
   readonly body: Body;
   readonly bodyLevels: BodyLevels;
   readonly style: Style;
@@ -50,8 +55,8 @@ export type BlockDraft<Card, Style> = {
 };
 
 /** How one kind of block is made; each of its own kind of style card. */
-export type BlockKind<Card, Style> = {
-  readonly name: string;
+export type BlockKind<Name extends BlockName, Card, Style> = {
+  readonly garment: Name;
   readonly check: (card: Card, body: Body, levels: BodyLevels) => readonly Problem[];
   readonly resolve: (card: Card, body: Body, levels: BodyLevels) => Style;
   readonly draw: (
@@ -97,11 +102,11 @@ function narrateFinishing(table: DraftingTable, pieces: readonly Piece[], rules:
  * Pure: the same inputs give the same draft, byte for byte.
  * @throws DraftingError where the inputs are outside their limits; its problems name the fields.
  */
-export function draftBlock<Card, Style>(
-  kind: BlockKind<Card, Style>,
-  inputs: BlockInputs<Card>,
-): BlockDraft<Card, Style> {
-  const { card, style, rules } = inputs;
+export function draftBlock<Name extends BlockName, Card, Style>(
+  kind: BlockKind<Name, Card, Style>,
+  { card, style, rules }: Omit<BlockInputs<Name, Card>, 'garment'>,
+): BlockDraft<Name, Card, Style> {
+  const { garment } = kind;
   const aboutCard = checkCard(card);
   refuse([...aboutCard, ...checkRules(rules)]);
   const body = completeCard(card);
@@ -111,14 +116,15 @@ export function draftBlock<Card, Style>(
   refuse(aboutStyle);
   const resolved = kind.resolve(style, body, bodyLevels);
   const drawn = kind.draw(table, body, bodyLevels, resolved, rules);
-  const number = draftNumber(JSON.stringify([kind.name, blockVersion, card, style, rules]));
+  const number = draftNumber(JSON.stringify([garment, blockVersion, card, style, rules]));
   narrateFinishing(table, drawn.pieces, rules);
   const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'block' };
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {
+    garment,
     engine: blockVersion,
     number,
-    inputs,
+    inputs: { garment, card, style, rules },
     body,
     bodyLevels,
     style: resolved,

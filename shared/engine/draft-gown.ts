@@ -68,6 +68,7 @@ export function draftGown(inputs: DraftInputs): Draft {
   const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'cloth' };
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {
+    garment: 'gown',
     engine: engineVersion,
     number,
     inputs,

@@ -8,18 +8,18 @@ import {
 import { type BlockDraft, type BlockInputs, draftBlock } from './block-draft.ts';
 
 /** The three inputs of a skirt block. */
-export type SkirtBlockInputs = BlockInputs<SkirtBlockCard>;
+export type SkirtBlockInputs = BlockInputs<'skirt-block', SkirtBlockCard>;
 /** A skirt block drafted, finished and proven. */
-export type SkirtBlockDraft = BlockDraft<SkirtBlockCard, SkirtBlockStyle>;
+export type SkirtBlockDraft = BlockDraft<'skirt-block', SkirtBlockCard, SkirtBlockStyle>;
 
 /**
  * Drafts a straight skirt block, front and back (method section 5), mm.
  * @throws DraftingError where the inputs are outside their limits; its problems name the fields.
  */
-export const draftSkirtBlock = (inputs: SkirtBlockInputs): SkirtBlockDraft =>
+export const draftSkirtBlock = (inputs: Omit<SkirtBlockInputs, 'garment'>): SkirtBlockDraft =>
   draftBlock(
     {
-      name: 'skirt-block',
+      garment: 'skirt-block',
       check: checkSkirtBlock,
       resolve: resolveSkirtBlock,
       draw: drawSkirtBlock,

@@ -9,8 +9,9 @@ import type { Proof } from '../proof/proof.ts';
 import type { Said } from '../units/said.ts';
 import type { Problem } from '../units/problem.ts';
 
-/** The three inputs of a draft. */
+/** The three inputs of a gown; those saved before there were blocks name no garment. */
 export type DraftInputs = {
+  readonly garment?: 'gown' | undefined;
   readonly card: MeasureCard;
   readonly style: StyleCard;
   readonly rules: HouseRules;
@@ -18,6 +19,7 @@ export type DraftInputs = {
 
 /** A gown drafted, finished and proven. */
 export type Draft = {
+  readonly garment: 'gown';
   readonly engine: string;
   /** Short number printed on every piece, the same for the same inputs. */
   readonly number: string;

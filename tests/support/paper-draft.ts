@@ -25,6 +25,7 @@ export const paperDraft = (
   pieces: readonly FinishedPiece[],
   card: MeasureCard = paperCard,
 ): Draft => ({
+  garment: 'gown',
   engine: 'by hand',
   number: '4F2A',
   inputs: { card, style: {}, rules: balanced },
