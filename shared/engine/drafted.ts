@@ -31,7 +31,8 @@ export function draftAny(inputs: DraftedInputs): Drafted {
       return draftBodiceBlock(inputs);
     case 'skirt-block':
       return draftSkirtBlock(inputs);
-    default:
+    case 'gown':
+    case undefined:
       return draftGown(inputs);
   }
 }
