@@ -34,12 +34,19 @@ const notch = z.object({
   strokes: z.union([z.literal(1), z.literal(2)]),
 });
 
+const innerLine = z.object({
+  name: z.string(),
+  kind: z.enum(['boning', 'pleat-fold', 'pleat-place', 'stay', 'stitching']),
+  path: pathSchema,
+});
+
 /** A piece with everything the scissors need, as it goes over the wire and into `draft.json`. */
 export const pieceSchema = z.object({
   name: z.string(),
   title: z.string(),
   side: z.enum(['front', 'back']),
-  part: z.enum(['top', 'middle', 'flare']),
+  part: z.enum(['top', 'middle', 'flare', 'sleeve', 'inner']),
+  cloth: z.exactOptional(z.enum(['lining', 'interfacing', 'ribbon'])),
   cut: z.string(),
   copies: z.number(),
   edges: z.array(edge),
@@ -48,6 +55,7 @@ export const pieceSchema = z.object({
   notches: z.array(notch),
   grain: z.object({ from: pointSchema, to: pointSchema }),
   drills: z.array(pointSchema),
+  lines: z.exactOptional(z.array(innerLine)),
   cutLine: pathSchema,
   notchMarks: z.array(
     z.object({ name: z.string(), edge: z.string(), strokes: z.array(lineSchema) }),

@@ -1,5 +1,10 @@
 import { z } from 'zod';
-import { easeLevels, styleLengths, topLineShapes } from '../drafts/gown/style-card.ts';
+import {
+  easeLevels,
+  isPlainNumber,
+  styleChoices,
+  styleLengths,
+} from '../drafts/gown/style-card.ts';
 import type { EaseLevel, GownStyle, StyleCard, StyleLength } from '../drafts/gown/style-card.ts';
 import { styleHints, styleLabels } from '../drafts/gown/style-labels.ts';
 import type { StyleKey } from '../drafts/gown/style-limits.ts';
@@ -7,9 +12,7 @@ import type { StyleKey } from '../drafts/gown/style-limits.ts';
 const described = (key: StyleKey) =>
   z
     .number()
-    .describe(
-      `${styleLabels[key]}, ${key === 'flareFraction' ? 'a number' : 'mm'}. ${styleHints[key]}`,
-    );
+    .describe(`${styleLabels[key]}, ${isPlainNumber(key) ? 'a number' : 'mm'}. ${styleHints[key]}`);
 
 type Lengths = { [K in StyleLength]: z.ZodNumber };
 type Eases = { [L in EaseLevel]: z.ZodNumber };
@@ -20,19 +23,28 @@ const lengths = () =>
 const eases = () =>
   Object.fromEntries(easeLevels.map((level) => [level, described(`ease.${level}`)])) as Eases;
 
-const topLine = z.enum(topLineShapes);
-const shaping = z.enum(['princess', 'darts']);
+const choices = {
+  topLine: z.enum(styleChoices.topLine),
+  shaping: z.enum(styleChoices.shaping),
+  waistSeam: z.enum(styleChoices.waistSeam),
+  flare: z.enum(styleChoices.flare),
+  sleeve: z.enum(styleChoices.sleeve),
+  closure: z.enum(styleChoices.closure),
+  facing: z.enum(styleChoices.facing),
+  lining: z.enum(styleChoices.lining),
+  boning: z.enum(styleChoices.boning),
+  cloth: z.enum(styleChoices.cloth),
+};
 const ease = z.strictObject(eases());
 
 /** A style with every choice made, as a draft tells it. */
 export const gownStyle = z.strictObject({
   ...lengths(),
-  topLine,
-  shaping,
+  ...choices,
   ease,
 }) satisfies z.ZodType<GownStyle>;
 
 /** Shape of a style card: what is left out takes its default; bounds are `checkStyle`'s to say. */
 export const styleCard = z
-  .strictObject({ ...lengths(), topLine, shaping, ease: ease.partial() })
+  .strictObject({ ...lengths(), ...choices, ease: ease.partial() })
   .partial() satisfies z.ZodType<StyleCard>;

@@ -8,6 +8,7 @@ export const handleKeys = [
   'topDrop',
   'sideDepth',
   'backDepth',
+  'waistSeamRise',
   'dartLength',
   'kneeLevel',
   'kneeFinished',

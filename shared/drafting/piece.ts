@@ -71,6 +71,14 @@ export type Notch = {
   readonly strokes: 1 | 2;
 };
 
+/** A line drawn inside a piece and neither cut nor sewn as a seam: where a bone lies, where a pleat folds. */
+export type InnerLine = {
+  /** Kebab-case, unique in its piece: `bone-princess`, `pleat-3-fold`. */
+  readonly name: string;
+  readonly kind: 'boning' | 'pleat-fold' | 'pleat-place' | 'stay' | 'stitching';
+  readonly path: Path;
+};
+
 /** A piece as drafted: seam lines only. */
 export type Piece = {
   /** Kebab-case: `front-top-centre`, `back-middle`, `flare-front`. */
@@ -79,7 +87,9 @@ export type Piece = {
   readonly title: string;
   readonly side: Side;
   /** The part it belongs to. */
-  readonly part: 'top' | 'middle' | 'flare';
+  readonly part: 'top' | 'middle' | 'flare' | 'sleeve' | 'inner';
+  /** What it is cut from where that is not the gown's own cloth. */
+  readonly cloth?: 'lining' | 'interfacing' | 'ribbon';
   /** As printed on the piece: `cut 1 on fold`, `cut 2 (a pair)`. */
   readonly cut: string;
   /** Cloth pieces to cut from this drawing. */
@@ -91,6 +101,7 @@ export type Piece = {
   readonly grain: { readonly from: Point; readonly to: Point };
   /** Drill points, 12 mm inside dart tips. */
   readonly drills: readonly Point[];
+  readonly lines?: readonly InnerLine[];
 };
 
 /** One line of lettering; `at` is the left end of its base line, `size` its height in mm. */

@@ -19,7 +19,7 @@ export const bothShapings: fc.Arbitrary<readonly DraftInputs[]> = fc
     const body = completeCard(card);
     const levels = gownLevels(openTable(), body);
     const styles = (['princess', 'darts'] as const)
-      .map((shaping) => styleOn({ ...draws, shaping }, body, levels))
+      .map((shaping) => styleOn({ ...draws, named: { ...draws.named, shaping } }, body, levels))
       .filter((style, index) => index === 0 || style.shaping === 'darts');
     return styles.map((style) => ({ card, style, rules }));
   });

@@ -7,12 +7,12 @@ import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
 import { drawGown } from '#shared/drafts/gown/draw-gown.ts';
 import { resolveStyle } from '#shared/drafts/gown/resolve-style.ts';
 import { checkStyle } from '#shared/drafts/gown/style-check.ts';
-import { easeLevels, styleLengths, topLineShapes } from '#shared/drafts/gown/style-card.ts';
+import { easeLevels, styleChoices, styleLengths } from '#shared/drafts/gown/style-card.ts';
 import type {
   EaseLevel,
   StyleCard,
+  StyleChoice,
   StyleLength,
-  TopLineShape,
 } from '#shared/drafts/gown/style-card.ts';
 import {
   styleKeys,
@@ -26,8 +26,8 @@ type Draw = { readonly at: number; readonly open: boolean };
 
 /** One draw a choice, made before the body is known. */
 export type StyleDraws = {
-  readonly shaping: 'princess' | 'darts' | undefined;
-  readonly topLine: TopLineShape | undefined;
+  /** A choice of each kind by name, or none. */
+  readonly named: { readonly [C in StyleChoice]: StyleCard[C] };
   readonly choices: Readonly<Record<string, Draw>>;
 };
 
@@ -41,8 +41,18 @@ const draw = fc.record({
 
 /** Draws for a style on a body not yet known; `styleOn` puts them between that body's limits. */
 export const styleDraws: fc.Arbitrary<StyleDraws> = fc.record({
-  shaping: fc.constantFrom('princess', 'darts', undefined),
-  topLine: fc.constantFrom(...topLineShapes, undefined),
+  named: fc.record({
+    topLine: fc.constantFrom(...styleChoices.topLine, undefined),
+    shaping: fc.constantFrom(...styleChoices.shaping, undefined),
+    waistSeam: fc.constantFrom(...styleChoices.waistSeam, undefined),
+    flare: fc.constantFrom(...styleChoices.flare, undefined),
+    sleeve: fc.constantFrom('none' as const, undefined),
+    closure: fc.constantFrom(...styleChoices.closure, undefined),
+    facing: fc.constantFrom(...styleChoices.facing, undefined),
+    lining: fc.constantFrom(...styleChoices.lining, undefined),
+    boning: fc.constantFrom(...styleChoices.boning, undefined),
+    cloth: fc.constantFrom(...styleChoices.cloth, undefined),
+  }),
   choices: fc.record(Object.fromEntries(styleKeys.map((key) => [key, draw]))),
 });
 
@@ -66,17 +76,20 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   const eased = easeOf(styleLimits(body, levels), given);
   const fits = (style: StyleCard): boolean =>
     checkStyle(style, body, levels).every(({ severity }) => severity === 'warning');
-  let style: StyleCard = {
-    ...(fits(eased) ? eased : {}),
-    ...(draws.topLine === undefined ? {} : { topLine: draws.topLine }),
-  };
+  const { shaping: wished, ...named } = draws.named;
+  let style: StyleCard = fits(eased) ? eased : {};
+  for (const [choice, name] of Object.entries(named)) {
+    const more = { ...style, ...(name === undefined ? {} : { [choice]: name }) };
+    // Choices that exclude each other are refused by name; what is drawn keeps the first of the two.
+    if (fits(more)) style = more;
+  }
   for (const key of order) {
     const choice = given(key);
     if (choice === undefined) continue;
     style = { ...style, [key]: placed(styleLimits(body, levels, style)[key], choice.at) };
   }
-  const reaches = draws.shaping === 'darts' && dartsReach(style, body, levels);
-  const shaping = draws.shaping === 'darts' && !reaches ? 'princess' : draws.shaping;
+  const reaches = wished === 'darts' && dartsReach(style, body, levels);
+  const shaping = wished === 'darts' && !reaches ? 'princess' : wished;
   return shaping === undefined ? style : { ...style, shaping };
 }
 

@@ -16,6 +16,7 @@ import { type PairInputs, type PairedHalves, pairHalves } from './pair-halves.ts
 import { finishedQuarters, wantedGirths } from './quarters.ts';
 import type { SideHeights } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
+import { seamUnderBust } from './style-limits.ts';
 import { topPartner } from './top.ts';
 import { type Walking, walking } from './walking.ts';
 
@@ -28,21 +29,18 @@ export type DrawnGown = {
   readonly walking: Walking;
 };
 
-/** The raised waist seam lies this far above the waist, and at least `underBust` below the under-bust. */
-const raisedBy = 76;
-const underBust = 20;
-
-function waistSeamLevel(table: DraftingTable, levels: BodyLevels): number {
+/** Height of the waist seam: raised by the style's choice, but clear of the under-bust. */
+function waistSeamLevel(table: DraftingTable, levels: BodyLevels, style: GownStyle): number {
   const paper = table.part('Levels', 'both');
-  const raised = levels.waist - raisedBy;
-  const lowest = levels.underbust + underBust;
-  return raised >= lowest
-    ? paper.level('Waist seam', said`Raised ${mm(raisedBy)} above the waist`, raised, [])
+  const raised = levels.waist - style.waistSeamRise;
+  const highest = levels.underbust + seamUnderBust;
+  return raised > highest + 1e-6
+    ? paper.level('Waist seam', said`Raised ${mm(style.waistSeamRise)} above the waist`, raised, [])
     : paper.level(
         'Waist seam',
-        said`Raised ${mm(raisedBy)} it would lie within ${mm(underBust)} of the under-bust; it is moved down to clear it`,
-        lowest,
-        [],
+        said`${mm(seamUnderBust)} under the under-bust, as high as a seam may lie: ${mm(levels.waist - highest)} above the waist`,
+        highest,
+        ['sideNeckToUnderbust', 'frontWaistLength'],
       );
 }
 
@@ -54,7 +52,7 @@ export function drawGown(
   style: GownStyle,
   rules: HouseRules,
 ): DrawnGown {
-  const seam = waistSeamLevel(table, bodyLevels);
+  const seam = waistSeamLevel(table, bodyLevels, style);
   const knee = table
     .part('Levels', 'both')
     .level(

@@ -12,7 +12,7 @@ const out = point(1, 0);
 
 /**
  * The points a maker moves by hand, each where it lies on a piece: neck depth, neck width and top drop
- * at the peak, side and back depth, dart length, knee seam and its girth, flare length. A straight top
+ * at the peak, side and back depth, waist seam, dart length, knee seam and its girth, flare length. A straight top
  * line has neither dip nor peak: its drop is moved at the centre.
  */
 export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonly Handle[] {
@@ -32,6 +32,9 @@ export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonl
       : [...move('neckDepth', centre, down), ...peakHandles(front, style)]),
     ...move('sideDepth', side && placed(side, startOf), down),
     ...move('backDepth', heldAt(back, 'top', startOf), up),
+    ...(style.waistSeam === 'raised'
+      ? move('waistSeamRise', heldAt(middle, 'fold', endOf), up)
+      : []),
     ...move('dartLength', tip, down),
     ...move('kneeLevel', heldAt(middle, 'fold', startOf), up),
     // A millimetre out at one of the four quarters of the knee seam is four round it.

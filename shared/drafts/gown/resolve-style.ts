@@ -1,5 +1,6 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
+import { styleChoices } from './style-card.ts';
 import type { EaseLevel, GownStyle, StyleCard, StyleLength } from './style-card.ts';
 import { styleLimits } from './style-limits.ts';
 
@@ -13,23 +14,39 @@ export function resolveStyle(style: StyleCard, body: Body, levels: BodyLevels): 
   const ease = (level: EaseLevel): number => style.ease?.[level] ?? limits[`ease.${level}`].initial;
   const flareLength = length('flareLength');
   return {
-    topLine: style.topLine ?? 'sweetheart',
+    topLine: style.topLine ?? styleChoices.topLine[0],
+    shaping: style.shaping ?? styleChoices.shaping[0],
+    waistSeam: style.waistSeam ?? styleChoices.waistSeam[0],
+    flare: style.flare ?? styleChoices.flare[0],
+    sleeve: style.sleeve ?? styleChoices.sleeve[0],
+    closure: style.closure ?? styleChoices.closure[0],
+    facing: style.facing ?? styleChoices.facing[0],
+    lining: style.lining ?? styleChoices.lining[0],
+    boning: style.boning ?? styleChoices.boning[0],
+    cloth: style.cloth ?? styleChoices.cloth[0],
     topDrop: length('topDrop'),
     neckDepth: length('neckDepth'),
     neckWidth: length('neckWidth'),
     sideDepth: length('sideDepth'),
     backDepth: length('backDepth'),
-    shaping: style.shaping ?? 'princess',
+    waistSeamRise: length('waistSeamRise'),
     dartLength: length('dartLength'),
     kneeLevel: length('kneeLevel'),
     kneeFinished: length('kneeFinished'),
     flareFraction: length('flareFraction'),
+    hemSweep: length('hemSweep'),
     flareLength,
     floorClearance:
       style.flareLength === undefined
         ? length('floorClearance')
         : limits.flareLength.max - flareLength,
     heelHeight: length('heelHeight'),
+    train: length('train'),
+    bandHeight: length('bandHeight'),
+    pleatRatio: length('pleatRatio'),
+    armEase: length('armEase'),
+    stretch: length('stretch'),
+    shrinkage: length('shrinkage'),
     clothWidth: length('clothWidth'),
     ease: {
       chest: ease('chest'),

@@ -4,7 +4,7 @@ import { readingGrace } from '../../units/format-length.ts';
 import { error, warning, type Problem } from '../../units/problem.ts';
 import { mm, said, type Said } from '../../units/said.ts';
 import { resolveStyle } from './resolve-style.ts';
-import type { EaseLevel, GownStyle, StyleCard } from './style-card.ts';
+import { isPlainNumber, type EaseLevel, type GownStyle, type StyleCard } from './style-card.ts';
 import { styleLabels } from './style-labels.ts';
 import { styleKeys, styleLimits, type Limit, type StyleKey } from './style-limits.ts';
 
@@ -52,7 +52,7 @@ const levelAfterDot = (key: StyleKey): EaseLevel => key.slice('ease.'.length) as
 const lengthKey = (key: StyleKey) => key as Exclude<StyleKey, `ease.${EaseLevel}`>;
 
 const worded = (key: StyleKey, value: number): Said =>
-  key === 'flareFraction' ? [String(Number(value.toPrecision(4)))] : [mm(value)];
+  isPlainNumber(key) ? [String(Number(value.toPrecision(4)))] : [mm(value)];
 
 function checkLimit(
   key: StyleKey,
@@ -71,7 +71,7 @@ function checkLimit(
       }),
     ];
   }
-  const grace = key === 'flareFraction' ? 0 : readingGrace;
+  const grace = isPlainNumber(key) ? 0 : readingGrace;
   if (value >= min - grace && value <= max + grace) return [];
   return [
     error({

@@ -1,9 +1,10 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
 import { easeLevels, styleLengths } from './style-card.ts';
+import { isOffShoulder } from './style-card.ts';
 import type { EaseLevel, StyleCard, StyleLength, TopLineShape } from './style-card.ts';
 
-/** Bounds of one style choice and what it is when left open, millimetres (`flareFraction`: part of a circle). */
+/** Bounds of one style choice and what it is when left open, millimetres (the `plainNumbers` as they are). */
 export type Limit = { readonly min: number; readonly max: number; readonly initial: number };
 
 /** Dotted keys as the contract writes them. */
@@ -42,11 +43,24 @@ function kneeFinished(body: Body, levels: BodyLevels, kneeLevel: number, hipEase
 }
 
 /** The back top line at the centre back, above the waist. */
-function backDepth(body: Body, levels: BodyLevels): Limit {
+function backDepth(body: Body, levels: BodyLevels, initial: number): Limit {
   const least = Math.max(100, Math.ceil(levels.waist - levels.bust + 10));
   const most = Math.min(Math.max(250, least + 60), body.measures.backWaistLength - belowNape);
-  return limit(least, most, 180);
+  return limit(least, most, initial);
 }
+
+/** An armhole this deep at least lies between the band's edge and the underarm. */
+const leastArmhole = 30;
+/** Off the shoulder the back dips this much from the arms to the centre. */
+const backDip = 10;
+
+/** A raised waist seam lies at least this over the waist, and this under the under-bust. */
+const leastRise = 20;
+export const seamUnderBust = 20;
+
+/** The hem of an A-line, of godets or of seams that run on outwards: a fifth of a circle more than the knee. */
+const hemSweep = (knee: number, depth: number): Limit =>
+  limit(knee + 100, knee + 2 * Math.PI * depth, knee + 0.4 * Math.PI * depth);
 
 /** Ease the woven, boned gown takes at each level (method section 4), and how far a maker may go. */
 const easeLimits: { readonly [K in `ease.${EaseLevel}`]: Limit } = {
@@ -83,7 +97,10 @@ function neck(
  */
 export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {}): StyleLimits {
   const { bustSpan, waistToHip } = body.measures;
-  const topDrop = limit(levels.bust - 110, levels.bust - 60, levels.bust - 85);
+  const offShoulder = isOffShoulder(style);
+  const topDrop = offShoulder
+    ? limit(90, levels.bust - 60, 127)
+    : limit(levels.bust - 110, levels.bust - 60, levels.bust - 85);
   // A choice out of its own bounds must not bend the bounds of those that hang on it.
   const chosen = (value: number | undefined, { min, max, initial }: Limit): number =>
     value === undefined || Number.isNaN(value) ? initial : Math.min(max, Math.max(min, value));
@@ -97,31 +114,52 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
     levels.floor - levels.knee + seamAboveKnee + chosen(style.heelHeight, heelHeight);
   const shortestFlare = 150;
   const floorClearance = limit(0, seamToFloor - shortestFlare, 20);
+  const flareLength = limit(
+    shortestFlare,
+    seamToFloor,
+    seamToFloor - chosen(style.floorClearance, floorClearance),
+  );
+  const finishedKnee = kneeFinished(
+    body,
+    levels,
+    seamAboveKnee,
+    chosen(style.ease?.hip, easeLimits['ease.hip']),
+  );
+  const sideDepth = offShoulder
+    ? limit(peak, levels.underarm - leastArmhole, 165)
+    : limit(
+        Math.max(peak, Math.min(levels.underarm, levels.bust - 15)),
+        levels.bust - 10,
+        Math.min(levels.underarm + 10, levels.bust - 15),
+      );
+  const highestSeam = Math.max(leastRise, levels.waist - levels.underbust - seamUnderBust);
   return {
     topDrop,
     ...neck(style.topLine ?? 'sweetheart', peak, levels.bust, bustSpan),
-    sideDepth: limit(
-      Math.max(peak, Math.min(levels.underarm, levels.bust - 15)),
-      levels.bust - 10,
-      Math.min(levels.underarm + 10, levels.bust - 15),
-    ),
-    backDepth: backDepth(body, levels),
-    dartLength: limit(Math.min(100, longestDart - 15), longestDart, 127),
-    kneeLevel,
-    kneeFinished: kneeFinished(
+    sideDepth,
+    backDepth: backDepth(
       body,
       levels,
-      seamAboveKnee,
-      chosen(style.ease?.hip, easeLimits['ease.hip']),
+      offShoulder ? levels.waist - chosen(style.sideDepth, sideDepth) - backDip : 180,
     ),
+    waistSeamRise: limit(leastRise, highestSeam, 76),
+    dartLength: limit(Math.min(100, longestDart - 15), longestDart, 127),
+    kneeLevel,
+    kneeFinished: finishedKnee,
     flareFraction: limit(0.25, 1, 0.5),
-    flareLength: limit(
-      shortestFlare,
-      seamToFloor,
-      seamToFloor - chosen(style.floorClearance, floorClearance),
+    hemSweep: hemSweep(
+      chosen(style.kneeFinished, finishedKnee),
+      chosen(style.flareLength, flareLength),
     ),
+    flareLength,
     floorClearance,
     heelHeight,
+    train: limit(0, 1500, 0),
+    bandHeight: limit(60, 200, 110),
+    pleatRatio: limit(1, 3, 2),
+    armEase: limit(-40, 60, 0),
+    stretch: limit(0, 100, style.cloth === 'stretch' ? 20 : 0),
+    shrinkage: limit(0, 10, 0),
     clothWidth: limit(700, 3000, 1450),
     ...easeLimits,
   };

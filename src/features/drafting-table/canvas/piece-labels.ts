@@ -23,7 +23,7 @@ const large = { letter: 6.9, line: 17 };
 const small = { letter: 5.9, line: 14 };
 
 /** How far down a piece its name stands: clear of the handles along a top edge, and of the tips of darts. */
-const shares = { top: 0.66, middle: 0.45, flare: 0.5 };
+const shares = { top: 0.66, middle: 0.45, flare: 0.5, sleeve: 0.5, inner: 0.5 };
 const lowShares = { ...shares, middle: 0.68 };
 
 /** How far outside its piece a name is tried, one place after the other. */
