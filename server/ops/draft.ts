@@ -4,6 +4,7 @@ import type { Draft } from '#shared/engine/draft.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
 import { draftJson, proofJson } from '#shared/exports/json.ts';
 import { piecesSvg } from '#shared/exports/svg.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
 import { speak } from '#shared/units/speak.ts';
 import { tilesPdf } from '../features/print/tiles-pdf.ts';
@@ -22,7 +23,7 @@ import { writeFiles } from './write-files.ts';
 async function draw({ inputs, paper, unit }: Order): Promise<{ draft: Draft; tiles: Uint8Array }> {
   try {
     const draft = draftGown(inputs);
-    return { draft, tiles: await tilesPdf(draft, { paper, unit, selection: 'whole-gown' }) };
+    return { draft, tiles: await tilesPdf(draft, presetOrder(paper, 'whole-gown'), unit) };
   } catch (error) {
     if (error instanceof DraftingError) return refuseProblems(error.problems, unit);
     if (error instanceof SheetLimitError) return refuseProblems([error.problem], unit);

@@ -8,6 +8,7 @@ import { balanced } from '#shared/drafting/house-rule-presets.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
 import type { PrintJob } from '#shared/exports/drawing.ts';
 import { tilesJob } from '#shared/exports/tiles.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import { middleBody } from '../support/middle-body.ts';
 import { embedPdfRoute, largePage } from './embed-pdf-route.ts';
@@ -25,7 +26,7 @@ export type PdfBench = {
 
 const warmUp = 10;
 const rounds = 30;
-const choice = { paper: 'A4', selection: 'whole-gown', unit: 'cm' } as const;
+const order = presetOrder('A4', 'whole-gown');
 
 type Taken = { readonly median: number; readonly p95: number };
 
@@ -120,8 +121,8 @@ async function besidePdfposter(
  */
 export async function benchPdf(): Promise<readonly PdfBench[]> {
   const draft = draftGown({ card: middleBody, style: {}, rules: balanced });
-  const sheets = planSheets(draft.pieces, choice);
-  const whole = tilesJob(draft, choice);
+  const sheets = planSheets(draft.pieces, order);
+  const whole = tilesJob(draft, order, 'cm');
   const job: PrintJob = { ...whole, pages: whole.pages.slice(1) };
   const what = `PDF of the demo gown, ${job.pages.length} A4 tiles`;
   const ours = () => pdfBytes(job);

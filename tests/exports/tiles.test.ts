@@ -3,14 +3,15 @@ import { balanced } from '#shared/drafting/house-rule-presets.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
 import type { Mark } from '#shared/exports/drawing.ts';
 import { tilesJob } from '#shared/exports/tiles.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import { speak } from '#shared/units/speak.ts';
 import { middleBody } from '../support/middle-body.ts';
 
 const draft = draftGown({ card: middleBody, style: {}, rules: balanced });
-const choice = { paper: 'A4', selection: 'whole-gown', unit: 'cm' } as const;
-const { plan } = planSheets(draft.pieces, choice);
-const job = tilesJob(draft, choice);
+const order = presetOrder('A4', 'whole-gown');
+const { plan } = planSheets(draft.pieces, order);
+const job = tilesJob(draft, order, 'cm');
 
 const texts = (marks: readonly Mark[]): readonly string[] =>
   marks.flatMap((mark) =>

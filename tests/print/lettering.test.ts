@@ -9,6 +9,7 @@ import { chalkSheetJob } from '#shared/exports/chalk-sheet.ts';
 import type { Mark } from '#shared/exports/drawing.ts';
 import { words } from '#shared/exports/marks.ts';
 import { tilesJob } from '#shared/exports/tiles.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { papers, toPoints } from '#shared/sheets/papers.ts';
 import { fontkitForPdfLib } from '../support/fontkit-for-pdf-lib.ts';
 import { middleBody } from '../support/middle-body.ts';
@@ -107,7 +108,7 @@ describe('lettering on paper, looked at in pixels', () => {
   it('has a letter in the typeface for everything Ellwand itself writes', async () => {
     const draft = draftGown({ card: middleBody, style: {}, rules: balanced });
     const jobs = (['cm', 'in'] as const).flatMap((unit) => [
-      tilesJob(draft, { paper: 'A4', selection: 'whole-gown', unit }),
+      tilesJob(draft, presetOrder('A4', 'whole-gown'), unit),
       chalkSheetJob(draft, { paper: 'Letter', unit }),
     ]);
     const texts = (marks: readonly Mark[]): readonly string[] =>

@@ -4,6 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { chalkSheetPdf } from '#server/features/print/chalk-sheet-pdf.ts';
 import { tilesPdf } from '#server/features/print/tiles-pdf.ts';
 import { papers, toPoints } from '#shared/sheets/papers.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { mostSheets, SheetLimitError } from '#shared/sheets/sheet-limit.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import { speak } from '#shared/units/speak.ts';
@@ -12,10 +13,9 @@ import { oblong } from '../support/paper-pieces.ts';
 import { inspect } from '../support/pgm.ts';
 
 const pieces = [oblong('front', 300, 500), oblong('flare-front', 600, 500, { part: 'flare' })];
-const gown = { selection: 'whole-gown', unit: 'cm' } as const;
 
 describe.each(['A4', 'Letter'] as const)('the tiles as a PDF on %s', (paper) => {
-  const print = () => tilesPdf(paperDraft(pieces), { ...gown, paper });
+  const print = () => tilesPdf(paperDraft(pieces), presetOrder(paper, 'whole-gown'), 'cm');
 
   it('pass the check of an independent reader without a complaint', async () => {
     expect(await inspect(await print(), 'qpdf', ['--check'])).toContain(
@@ -25,7 +25,7 @@ describe.each(['A4', 'Letter'] as const)('the tiles as a PDF on %s', (paper) => 
 
   it('have sheets of exactly that paper, one for the cover and one for each tile', async () => {
     const pdf = await PDFDocument.load(await print());
-    const { sheets } = planSheets(pieces, { ...gown, paper });
+    const { sheets } = planSheets(pieces, presetOrder(paper, 'whole-gown'));
     expect(pdf.getPageCount()).toBe(sheets);
     for (const page of pdf.getPages()) {
       const { x, y, width, height } = page.getMediaBox();
@@ -51,7 +51,7 @@ describe.each(['A4', 'Letter'] as const)('the tiles as a PDF on %s', (paper) => 
   it('are read by the viewer that browsers use: its sheets, and what is lettered on them', async () => {
     const task = getDocument({ data: await print(), verbosity: 0 });
     const pdf = await task.promise;
-    const { sheets, plan } = planSheets(pieces, { ...gown, paper });
+    const { sheets, plan } = planSheets(pieces, presetOrder(paper, 'whole-gown'));
     expect(pdf.numPages).toBe(sheets);
     for (const [i, tile] of plan.tiles.entries()) {
       const page = await pdf.getPage(i + 2);
@@ -82,7 +82,7 @@ describe('a name on the card', () => {
     async (name) => {
       const draft = paperDraft(pieces, { ...paperCard, name });
       for (const pdf of [
-        await tilesPdf(draft, { ...gown, paper: 'A4' }),
+        await tilesPdf(draft, presetOrder('A4', 'whole-gown'), 'cm'),
         await chalkSheetPdf(draft, { paper: 'A4', unit: 'in' }),
       ]) {
         expect(await inspect(pdf, 'qpdf', ['--check'])).toContain(
@@ -95,10 +95,11 @@ describe('a name on the card', () => {
 
 describe('a date on the card', () => {
   it.each(['2026-11-14', 'soon) /Evil (', ''])('cannot write into the file: %j', async (date) => {
-    const pdf = await tilesPdf(paperDraft(pieces, { ...paperCard, date }), {
-      ...gown,
-      paper: 'A4',
-    });
+    const pdf = await tilesPdf(
+      paperDraft(pieces, { ...paperCard, date }),
+      presetOrder('A4', 'whole-gown'),
+      'cm',
+    );
     expect(await inspect(pdf, 'qpdf', ['--check'])).toContain(
       'No syntax or stream encoding errors',
     );
@@ -110,7 +111,7 @@ describe('a date on the card', () => {
 describe('a drawing too large for home paper', () => {
   it('is refused in words, naming the bound and what to print instead', async () => {
     const draft = paperDraft([oblong('flare-front', 4000, 4000, { part: 'flare' })]);
-    const refused = await tilesPdf(draft, { ...gown, paper: 'A4' }).catch(
+    const refused = await tilesPdf(draft, presetOrder('A4', 'whole-gown'), 'cm').catch(
       (error: unknown) => error,
     );
     expect(refused).toBeInstanceOf(SheetLimitError);

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { tilesPdf } from '#server/features/print/tiles-pdf.ts';
 import { testSquares } from '#shared/exports/cover.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import { overlap, printerMargin } from '#shared/sheets/tile-grid.ts';
 import { oblong } from '../support/paper-pieces.ts';
@@ -30,7 +31,7 @@ async function sidesOf(pdf: Uint8Array, square: { x: number; y: number; side: nu
 
 describe.each(papers)('on %s, printed and measured', (paper) => {
   const draft = paperDraft([oblong('front', 300, 120)]);
-  const print = () => tilesPdf(draft, { paper, selection: 'bodice-toile', unit: 'cm' });
+  const print = () => tilesPdf(draft, presetOrder(paper, 'bodice-toile'), 'cm');
 
   it('the 100 mm square is 100.0 mm both ways within a tenth', async () => {
     const { across, down } = await sidesOf(await print(), testSquares.metric);
@@ -60,12 +61,12 @@ function glued(first: Picture, second: Picture, step: number, way: 'right' | 'be
 }
 
 describe.each(papers)('two neighbouring %s sheets, trimmed and glued on their strip', (paper) => {
-  const choice = { paper, selection: 'bodice-toile', unit: 'cm' } as const;
+  const order = presetOrder(paper, 'bodice-toile');
 
   async function sheets(width: number, height: number) {
     const draft = paperDraft([oblong('front', width, height)]);
-    const { plan } = planSheets(draft.pieces, choice);
-    const pdf = await tilesPdf(draft, choice);
+    const { plan } = planSheets(draft.pieces, order);
+    const pdf = await tilesPdf(draft, order, 'cm');
     const area = { x: printerMargin, y: printerMargin, ...plan.use };
     const [first, second] = [await renderPart(pdf, 2, area), await renderPart(pdf, 3, area)];
     return { plan, first, second };

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { arrange } from '#shared/sheets/arrange.ts';
 import { boxOf, placedChain, shapeOf } from '#shared/sheets/layout.ts';
 import { papers } from '#shared/sheets/papers.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { choosePieces } from '#shared/sheets/selection.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import { planTiles } from '#shared/sheets/tile-plan.ts';
@@ -76,10 +77,10 @@ describe('what is printed', () => {
   });
 
   it('counts its cover among the sheets', () => {
-    expect(planSheets(gown, { paper: 'A4', selection: 'bodice-toile' }).sheets).toBe(2);
+    expect(planSheets(gown, presetOrder('A4', 'bodice-toile')).sheets).toBe(2);
   });
 
   it('is a cover alone where nothing is chosen', () => {
-    expect(planSheets([], { paper: 'A4', selection: 'whole-gown' }).plan.tiles).toEqual([]);
+    expect(planSheets([], presetOrder('A4', 'whole-gown')).plan.tiles).toEqual([]);
   });
 });

@@ -1,5 +1,6 @@
 import type { PrintRequest } from '#shared/api/requests.ts';
 import { piecesSvg } from '#shared/exports/svg.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { choosePieces } from '#shared/sheets/selection.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
 import { draftOrRefuse } from '../../drafting/draft-or-refuse.ts';
@@ -16,7 +17,7 @@ export async function tilesOf({
 }: PrintRequest): Promise<Uint8Array> {
   const draft = draftOrRefuse(inputs, unit);
   try {
-    return await tilesPdf(draft, { paper, unit, selection: pieces });
+    return await tilesPdf(draft, presetOrder(paper, pieces), unit);
   } catch (error) {
     if (error instanceof SheetLimitError) throw refusalFor('not-drawable', [error.problem], unit);
     throw error;

@@ -1,10 +1,12 @@
 import type { Draft } from '#shared/engine/draft.ts';
-import { type TileChoice, tilesJob } from '#shared/exports/tiles.ts';
+import { tilesJob } from '#shared/exports/tiles.ts';
+import type { PrintOrder } from '#shared/sheets/print-order.ts';
+import type { Unit } from '#shared/units/said.ts';
 import { pdfBytes } from './pdf-document.ts';
 
 /**
- * The tiles of a draft as a PDF at true scale: cover first, then the sheets row by row. The same draft
- * and choice give the same bytes. Throws `SheetLimitError` before any page is drawn.
+ * The sheets of a draft as a PDF: cover first, then the sheets row by row. The same draft, order and
+ * unit give the same bytes. Throws `SheetLimitError` before any page is drawn.
  */
-export const tilesPdf = async (draft: Draft, choice: TileChoice): Promise<Uint8Array> =>
-  pdfBytes(tilesJob(draft, choice));
+export const tilesPdf = async (draft: Draft, order: PrintOrder, unit: Unit): Promise<Uint8Array> =>
+  pdfBytes(tilesJob(draft, order, unit));

@@ -1,6 +1,7 @@
 import { useMemo, useState } from 'react';
 
 import type { Draft } from '#shared/engine/draft.ts';
+import { presetOrder } from '#shared/sheets/print-order.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import type { PaperName } from '#shared/sheets/papers.ts';
 
@@ -30,8 +31,8 @@ const PrintChoices = ({ draft, state }: Omit<PrintDialogProps, 'open' | 'onClose
   const [paper, setPaper] = useState<PaperName>(() => (printsOnLetter() ? 'Letter' : 'A4'));
   const sheets = useMemo(
     () => ({
-      toile: planSheets(draft.pieces, { paper, selection: 'bodice-toile' }).sheets,
-      gown: planSheets(draft.pieces, { paper, selection: 'whole-gown' }).sheets,
+      toile: planSheets(draft.pieces, presetOrder(paper, 'bodice-toile')).sheets,
+      gown: planSheets(draft.pieces, presetOrder(paper, 'whole-gown')).sheets,
     }),
     [draft, paper],
   );
