@@ -11,6 +11,8 @@ const sharedArrows = {
   engine: ['drafts', 'finishing', 'proof', 'narration', 'drafting', 'geometry', 'body', 'units'],
   sheets: ['engine', 'drafting', 'geometry', 'units'],
   exports: [
+    'compare',
+    'regrade',
     'sheets',
     'engine',
     'proof',
@@ -21,7 +23,8 @@ const sharedArrows = {
     'body',
     'units',
   ],
-  compare: ['drafting', 'geometry', 'units'],
+  compare: ['engine', 'proof', 'drafting', 'geometry', 'body', 'units'],
+  regrade: ['compare', 'engine', 'proof', 'drafts', 'drafting', 'geometry', 'body', 'units'],
   api: ['engine', 'sheets', 'compare', 'proof', 'drafts', 'drafting', 'geometry', 'body', 'units'],
 };
 
