@@ -1,9 +1,10 @@
 import { draftJson } from '#shared/exports/json.ts';
 
+import { failureWords } from '../../../lib/failure-words.ts';
 import { saveFile } from '../../../lib/save-file.ts';
 import { Button } from '../../../ui/button.tsx';
 import type { PrintOrder } from '../queries.ts';
-import { refusalWords, usePrint } from '../use-print.ts';
+import { usePrint } from '../use-print.ts';
 
 type FilesToKeepProps = { readonly order: Omit<PrintOrder, 'kind'> };
 
@@ -33,7 +34,7 @@ export const FilesToKeep = ({ order }: FilesToKeepProps) => {
           <span className="text-verdigris">{`✓ saved as ${svg.saved.name}`}</span>
         )}
         {svg.refused !== null && (
-          <span className="text-madder">{refusalWords(svg.refused, order.unit)}</span>
+          <span className="text-madder">{failureWords(svg.refused, order.unit)}</span>
         )}
       </p>
     </div>

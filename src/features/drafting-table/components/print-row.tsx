@@ -1,7 +1,8 @@
+import { failureWords } from '../../../lib/failure-words.ts';
 import { Button } from '../../../ui/button.tsx';
-import { RodProgress } from '../../../ui/rod-progress.tsx';
+import { FileState } from '../../../ui/file-state.tsx';
 import type { PrintOrder } from '../queries.ts';
-import { refusalWords, usePrint } from '../use-print.ts';
+import { usePrint } from '../use-print.ts';
 
 type PrintRowProps = {
   readonly title: string;
@@ -29,33 +30,13 @@ export const PrintRow = ({ title, note, sheets, order }: PrintRowProps) => {
           </Button>
         </p>
       </div>
-      <div role="status">
-        {print.waiting && (
-          <p className="mt-2 flex items-center gap-3 text-sm">
-            <RodProgress label={`Writing: ${title}`} />
-            Writing…
-            <Button kind="quiet" className="min-h-8 px-2" onClick={print.cancel}>
-              Cancel
-            </Button>
-          </p>
-        )}
-        {print.saved !== undefined && (
-          <p className="mt-2 text-sm text-verdigris">
-            {`✓ saved as ${print.saved.name} `}
-            <a
-              className="text-brass underline"
-              href={print.saved.address}
-              target="_blank"
-              rel="noreferrer"
-            >
-              Open
-            </a>
-          </p>
-        )}
-        {print.refused !== null && (
-          <p className="mt-2 text-sm text-madder">{refusalWords(print.refused, order.unit)}</p>
-        )}
-      </div>
+      <FileState
+        title={title}
+        waiting={print.waiting}
+        saved={print.saved}
+        refused={print.refused === null ? undefined : failureWords(print.refused, order.unit)}
+        onCancel={print.cancel}
+      />
     </section>
   );
 };
