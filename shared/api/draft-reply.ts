@@ -54,6 +54,7 @@ const step = z.object({
   lines: z.array(pathSchema),
   side: z.enum(['front', 'back', 'both', 'flare']),
   measures: z.array(z.string()),
+  pieces: z.exactOptional(z.array(z.string())),
 });
 
 const edgeRef = z.object({ piece: z.string(), edge: z.string() });

@@ -6,8 +6,12 @@ import type { Said } from '../units/said.ts';
 export const saidSchema = z.array(
   z.union([
     z.string(),
-    z.strictObject({ mm: z.number(), fine: z.exactOptional(z.literal(true)) }),
-    z.strictObject({ deg: z.number() }),
+    z.strictObject({
+      mm: z.number(),
+      fine: z.exactOptional(z.literal(true)),
+      of: z.exactOptional(z.array(z.string())),
+    }),
+    z.strictObject({ deg: z.number(), of: z.exactOptional(z.array(z.string())) }),
   ]),
 ) satisfies z.ZodType<Said>;
 

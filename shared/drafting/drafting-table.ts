@@ -1,4 +1,4 @@
-import type { Path } from '../geometry/path.ts';
+import { type Path, line } from '../geometry/path.ts';
 import type { Point } from '../geometry/point.ts';
 import type { Problem } from '../units/problem.ts';
 import { type Said, mm, said } from '../units/said.ts';
@@ -11,12 +11,19 @@ export type Drawn = {
   readonly points?: Readonly<Record<string, Point>>;
   readonly lines?: readonly Path[];
   readonly measures?: readonly string[];
+  readonly pieces?: readonly string[];
 };
 
 /** The table set up for one part of the draft: each verb computes, draws and is remembered. */
 export type PartTable = {
-  /** Hangs a level below the side neck point and gives its height. */
-  readonly level: (name: string, how: Said, y: number, measures: readonly string[]) => number;
+  /** Hangs a level below the side neck point and gives its height; `of`: where it rests on other measures than it names. */
+  readonly level: (
+    name: string,
+    how: Said,
+    y: number,
+    measures: readonly string[],
+    of?: readonly string[],
+  ) => number;
   /** Squares a width out from the centre line at a height and gives its end point. */
   readonly squareAcross: (name: string, y: number, width: Quantity, why?: Said) => Point;
   /** Draws what the sentence says. */
@@ -37,6 +44,9 @@ const slug = (words: string): string =>
     .replace(/[^a-z0-9]+/g, '-')
     .replace(/^-|-$/g, '');
 
+/** A level is ruled so far across, mm: past the side of a middle body; its quarter is measured off later. */
+const levelReach = 300;
+
 /** A clean table. */
 export function openTable(): DraftingTable {
   const steps: Step[] = [];
@@ -53,13 +63,15 @@ export function openTable(): DraftingTable {
         lines: drawn.lines ?? [],
         side,
         measures: drawn.measures ?? [],
+        ...(drawn.pieces ? { pieces: drawn.pieces } : {}),
       });
     };
     return {
       draw,
-      level: (title, how, y, measures) => {
-        draw(`${title} level`, said`${how}: ${mm(y)} below the side neck point.`, {
+      level: (title, how, y, measures, of = measures) => {
+        draw(`${title} level`, said`${how}: ${mm(y, of)} below the side neck point.`, {
           points: { [slug(title)]: { x: 0, y } },
+          lines: [[line({ x: 0, y }, { x: levelReach, y })]],
           measures,
         });
         return y;
@@ -68,7 +80,7 @@ export function openTable(): DraftingTable {
         const end = { x: width.value, y };
         draw(title, said`Square out from the centre: ${worked(width)}.`, {
           points: { [slug(title)]: end },
-          lines: [[{ kind: 'line', from: { x: 0, y }, to: end }]],
+          lines: [[line({ x: 0, y }, end)]],
           measures: width.measures,
           ...(why ? { why } : {}),
         });

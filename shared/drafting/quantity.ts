@@ -12,16 +12,19 @@ export type Quantity = {
 /** A measure of the body as its card gives it; an estimate says so wherever it is spoken. */
 export const taken = (name: string, key: string, value: number, estimated: boolean): Quantity => ({
   value,
-  how: said`${name} ${mm(value)}${estimated ? ' (estimated)' : ''}`,
+  how: said`${name} ${mm(value, [key])}${estimated ? ' (estimated)' : ''}`,
   measures: [key],
 });
+
+/** An amount that would read as nothing is added in silence, mm. */
+const leastSaid = 0.5;
 
 /** The same length with a named amount added; a taken-off amount is negative. */
 export const plus = (quantity: Quantity, name: string, amount: number): Quantity => ({
   value: quantity.value + amount,
-  stated: amount === 0 && quantity.stated === true,
+  stated: Math.abs(amount) < leastSaid && quantity.stated === true,
   how:
-    amount === 0
+    Math.abs(amount) < leastSaid
       ? quantity.how
       : said`${quantity.how} ${amount < 0 ? '−' : '+'} ${name} ${mm(Math.abs(amount))}`,
   measures: quantity.measures,
@@ -30,11 +33,13 @@ export const plus = (quantity: Quantity, name: string, amount: number): Quantity
 /** A quarter of a girth. */
 export const quarterOf = (girth: Quantity): Quantity => ({
   value: girth.value / 4,
-  how: said`a quarter of (${girth.how}) = ${mm(girth.value / 4)}`,
+  how: said`a quarter of (${girth.how}) = ${mm(girth.value / 4, girth.measures)}`,
   stated: true,
   measures: girth.measures,
 });
 
 /** The whole sum: how it was worked out, and what it comes to. */
 export const worked = (quantity: Quantity): Said =>
-  quantity.stated === true ? quantity.how : said`${quantity.how} = ${mm(quantity.value)}`;
+  quantity.stated === true
+    ? quantity.how
+    : said`${quantity.how} = ${mm(quantity.value, quantity.measures)}`;

@@ -22,4 +22,6 @@ export type Step = {
   readonly side: 'front' | 'back' | 'both' | 'flare';
   /** Keys of the measures whose numbers the sentence uses. */
   readonly measures: readonly string[];
+  /** Names of the pieces whose outline is complete with this step. */
+  readonly pieces?: readonly string[];
 };

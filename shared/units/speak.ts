@@ -1,14 +1,22 @@
 import { formatAngle, formatFine, formatWithUnit } from './format-length.ts';
-import type { Said, Unit } from './said.ts';
+import type { Said, SaidAngle, SaidLength, Unit } from './said.ts';
 
-/** Words a sentence in the reader's unit; every length carries its unit. */
+/** A length that is something, however little, is not read as nothing, mm. */
+const leastRead = 0.4;
+
+/** A length in inches to a sixteenth; what is less but not nothing as the next smaller mark. */
+function inches(lengthMm: number): string {
+  const read = formatWithUnit(lengthMm, 'in');
+  return read === '0 in' && Math.abs(lengthMm) >= leastRead ? '1\u204432 in' : read;
+}
+
+/** Words one quantity of a sentence in the reader's unit; every length carries its unit. */
+export function speakQuantity(quantity: SaidLength | SaidAngle, unit: Unit): string {
+  if ('deg' in quantity) return formatAngle(quantity.deg);
+  if (quantity.fine === true) return `${formatFine(quantity.mm, unit)} ${unit}`;
+  return unit === 'in' ? inches(quantity.mm) : formatWithUnit(quantity.mm, unit);
+}
+
+/** Words a sentence in the reader's unit. */
 export const speak = (sentence: Said, unit: Unit): string =>
-  sentence
-    .map((part) => {
-      if (typeof part === 'string') return part;
-      if ('deg' in part) return formatAngle(part.deg);
-      return part.fine === true
-        ? `${formatFine(part.mm, unit)} ${unit}`
-        : formatWithUnit(part.mm, unit);
-    })
-    .join('');
+  sentence.map((part) => (typeof part === 'string' ? part : speakQuantity(part, unit))).join('');

@@ -132,7 +132,11 @@ export function drawBodiceBlock(
   });
   const asDrawn = frontPiece(half('front'), opened);
   const papers = {
-    front: narrateHalf(table, body, half('front'), quarters.front, { opened, angle }),
+    front: narrateHalf(table, body, half('front'), quarters.front, {
+      opened,
+      angle,
+      place: style.bustDart,
+    }),
     back: narrateHalf(table, body, half('back'), quarters.back, {
       shoulderEase: style.shoulderEase,
     }),

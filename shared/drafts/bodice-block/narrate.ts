@@ -8,7 +8,7 @@ import { line } from '../../geometry/path.ts';
 import { type Point, distance } from '../../geometry/point.ts';
 import { type Said, deg, mm, said } from '../../units/said.ts';
 import type { BustDartAngle } from './bust-dart.ts';
-import { type BodiceHalf, type BodiceQuarters, sideOf } from './pieces.ts';
+import { type BodiceHalf, type BodiceQuarters, bodiceBack, bodiceFront, sideOf } from './pieces.ts';
 import { type OpenedShoulder, shoulderTilt } from './shoulder.ts';
 import type { BustDartPlace } from './style-card.ts';
 
@@ -27,13 +27,18 @@ export function blockUnderarm(table: DraftingTable, levels: BodyLevels, drop: nu
         ? said`Underarm lowered by ${mm(drop)} for the arm to move`
         : said`Underarm lowered by ${mm(drop)} would pass the bust line; it stays ${mm(aboveBust)} above it`,
       Math.min(wished, lowest),
-      ['underarmToWaist'],
+      [],
+      wished <= lowest ? ['underarmToWaist'] : [],
     );
 }
 
 /** What only one of the halves has. */
 type Own =
-  | { readonly opened: OpenedShoulder; readonly angle: BustDartAngle }
+  | {
+      readonly opened: OpenedShoulder;
+      readonly angle: BustDartAngle;
+      readonly place: BustDartPlace;
+    }
   | { readonly shoulderEase: number };
 
 /** Records how a half came about and gives its paper for what follows. */
@@ -57,7 +62,7 @@ export function narrateHalf(
   narrateWaist(paper, half, quarters);
   narrateShoulder(paper, body, half, own);
   if ('opened' in own) narrateDart(paper, own.opened, own.angle);
-  narrateArmhole(paper, body, half);
+  narrateArmhole(paper, body, half, 'place' in own && own.place !== 'shoulder');
   return paper;
 }
 
@@ -67,7 +72,7 @@ function narrateSide(paper: PartTable, { plan, rules }: BodiceHalf): void {
   const way = side >= 0 ? 'in' : 'out';
   paper.draw(
     'Side seam',
-    said`Bust quarter ${mm(plan.figures.bust)} less waist quarter ${mm(plan.figures.waist)} is ${mm(plan.figures.bust - plan.figures.waist)}: the side seam runs ${way} by ${mm(Math.abs(side))}, ${darts === 0 ? 'nothing is left for a dart' : said`waist darts take ${mm(darts)}`}. It is straight and ${mm(pathLength(path))} long.`,
+    said`Bust quarter ${mm(plan.figures.bust, ['bustGirth'])} less waist quarter ${mm(plan.figures.waist, ['waistGirth'])} is ${mm(plan.figures.bust - plan.figures.waist, ['bustGirth', 'waistGirth'])}: the side seam runs ${way} by ${mm(Math.abs(side))}, ${darts === 0 ? 'nothing is left for a dart' : said`waist darts take ${mm(darts)}`}. It is straight and ${mm(pathLength(path))} long.`,
     {
       why: said`The side seam takes about ${Math.round(rules.sideShare * 100)} % of what goes out, alike in front and back, so that both sides fall together.`,
       points: { underarm: plan.underarm, 'side-waist': plan.waistEnd },
@@ -85,7 +90,7 @@ function narrateWaist(paper: PartTable, { plan }: BodiceHalf, quarters: BodiceQu
       : said`${mouths.length === 1 ? 'one dart of' : 'two darts, together'} ${mm(plan.intake.darts)}`;
   paper.draw(
     'Waist seam',
-    said`Square to the centre line and to the side seam, with ${darts}: sewn, it is ${mm(quarters.waist.value)} long, the quarter.`,
+    said`Square to the centre line and to the side seam, with ${darts}: sewn, it is ${mm(quarters.waist.value, quarters.waist.measures)} long, the waist quarter.`,
     {
       why: said`It meets the legs of each dart squarely, so it runs on as one smooth curve when the dart is closed.`,
       lines: [
@@ -112,8 +117,8 @@ function narrateShoulder(
   const { neckGirth, shoulderLength, shoulderSlope } = body.measures;
   const front = plan.side === 'front';
   const neck: Said = front
-    ? said`A fifth of the neck girth ${mm(neckGirth)}${estimate(body, 'neckGirth')} less ${mm(2)} gives the depth ${mm(shoulder.centreNeck.y)} at the centre front`
-    : said`A fifth of the neck girth ${mm(neckGirth)}${estimate(body, 'neckGirth')} less ${mm(2)} gives the width ${mm(shoulder.sideNeck.x)}; the side neck lies a third of it above the nape`;
+    ? said`A fifth of the neck girth ${mm(neckGirth)}${estimate(body, 'neckGirth')} less ${mm(2)} gives the depth ${mm(shoulder.centreNeck.y, ['neckGirth'])} at the centre front`
+    : said`A fifth of the neck girth ${mm(neckGirth)}${estimate(body, 'neckGirth')} less ${mm(2)} gives the width ${mm(shoulder.sideNeck.x, ['neckGirth'])}; the side neck lies a third of it above the nape`;
   paper.draw(
     'Neck',
     said`${neck}; the curve leaves the centre line and meets the shoulder squarely, ${mm(pathLength(shoulder.neck))} long.`,
@@ -122,7 +127,7 @@ function narrateShoulder(
   const ease = 'shoulderEase' in own ? own.shoulderEase : 0;
   paper.draw(
     'Shoulder',
-    said`Slope ${deg(shoulderSlope)}${estimate(body, 'shoulderSlope')} ${front ? 'less' : 'and'} ${deg(shoulderTilt)}, shoulder length ${mm(shoulderLength)}${estimate(body, 'shoulderLength')}${ease === 0 ? '' : said` + ease ${mm(ease)}`} = ${mm(shoulder.length)}.`,
+    said`Shoulder slope ${deg(shoulderSlope)}${estimate(body, 'shoulderSlope')} ${front ? 'less' : 'plus'} ${deg(shoulderTilt)}; shoulder length ${mm(shoulderLength)}${estimate(body, 'shoulderLength')}${ease === 0 ? '' : said` + ease ${mm(ease)} = ${mm(shoulder.length, ['shoulderLength'])}`}.`,
     {
       why: front
         ? said`The seam lies a little forward of the top of the shoulder, so the front slopes less than the back.`
@@ -152,7 +157,12 @@ function narrateDart(paper: PartTable, opened: OpenedShoulder, angle: BustDartAn
   );
 }
 
-function narrateArmhole(paper: PartTable, body: Body, { plan, armhole }: BodiceHalf): void {
+function narrateArmhole(
+  paper: PartTable,
+  body: Body,
+  { plan, armhole }: BodiceHalf,
+  dartToMove: boolean,
+): void {
   const key = plan.side === 'front' ? 'acrossFront' : 'acrossBack';
   const name = plan.side === 'front' ? 'across front' : 'across back';
   const shift = armhole.upright.x - armhole.asked;
@@ -168,6 +178,7 @@ function narrateArmhole(paper: PartTable, body: Body, { plan, armhole }: BodiceH
       points: { upright: armhole.upright },
       lines: [armhole.path],
       measures: [key],
+      ...(dartToMove ? {} : { pieces: [plan.side === 'front' ? bodiceFront : bodiceBack] }),
     },
   );
 }
@@ -205,6 +216,7 @@ export function narratePlace(
         front.edges.flatMap((edge) => edge.path),
         ...(dart ? [dart.centreLeg, dart.sideLeg] : []),
       ],
+      pieces: [bodiceFront],
     },
   );
 }

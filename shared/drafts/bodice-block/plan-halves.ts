@@ -61,15 +61,18 @@ const placeOnSide = (figures: HalfFigures, heights: BlockHeights, lean: number) 
   };
 };
 
+/** Widest single dart, mm, and how many darts there are where that is settled beforehand. */
+type DartRule = { readonly most: number; readonly settled: 1 | 2 | undefined };
+
 function dartsOf(
   figures: HalfFigures,
   intake: number,
   sideX: number,
-  widest: number,
+  { most, settled }: DartRule,
 ): readonly PlannedDart[] {
   if (intake === 0) return [];
   const first = { axis: figures.axis, tip: figures.tip };
-  if (intake <= widest) return [{ ...first, share: 1 }];
+  if ((settled ?? (intake <= most ? 1 : 2)) === 1) return [{ ...first, share: 1 }];
   return [
     { ...first, share: 0.6 },
     { axis: (figures.axis + sideX) / 2, tip: figures.secondTip, share: 0.4 },
@@ -84,14 +87,14 @@ function shape(
   figures: HalfFigures,
   heights: BlockHeights,
   { intake, length }: Round,
-  widest: number,
+  rule: DartRule,
 ): Shape {
   const drop = heights.waist - heights.bust;
   const planWith = (run: number) => {
     const lean = run / drop;
     const line = placeOnSide(figures, heights, lean);
     const end = line.at(length);
-    const darts = dartsOf(figures, intake.darts, end.x, widest);
+    const darts = dartsOf(figures, intake.darts, end.x, rule);
     const plan: PlannedWaist = { centre: heights.waist, darts, side: end, sideSlope: lean };
     return { lean, line, end, plan };
   };
@@ -152,7 +155,13 @@ export function planHalves(
     steepestSide * (heights.waist - heights.bust),
   );
   const draw = (side: Side, length: number): Shape =>
-    shape(side, figures[side], heights, { intake: shares[side], length }, rules.dartWidest);
+    shape(
+      side,
+      figures[side],
+      heights,
+      { intake: shares[side], length },
+      { most: rules.dartWidest, settled: rules.counts?.darts?.[side] },
+    );
   const halves = withEvenSides(heights.waist - heights.underarm, (length) => ({
     front: draw('front', length),
     back: draw('back', length),

@@ -181,6 +181,7 @@ function narratePrincess(paper: PartTable, half: Half, opening: number, height: 
       why: said`The edges swell outside the straight legs and never cut the corner at bust level, which would cost girth there.`,
       points: { 'bust-point': point(half.axis, below.top) },
       lines: [intakeEdge(below, 'centre'), intakeEdge(below, 'side')],
+      pieces: [`${half.side}-top-centre`, `${half.side}-top-side`],
     },
   );
 }
@@ -194,6 +195,7 @@ function narrateDarts(paper: PartTable, half: Half, opening: number, clearance: 
     {
       why: said`A dart that ran all the way would stand up in a point; stopped short it melts into the curve.`,
       lines: darts.flatMap((dart) => [intakeEdge(dart, 'centre'), intakeEdge(dart, 'side')]),
+      pieces: [`${half.side}-top`],
     },
   );
 }

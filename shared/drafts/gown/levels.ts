@@ -1,7 +1,8 @@
 import type { Body, MeasureKey } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
 import type { DraftingTable } from '../../drafting/drafting-table.ts';
-import { mm, said } from '../../units/said.ts';
+import { taken } from '../../drafting/quantity.ts';
+import { type Said, mm, said } from '../../units/said.ts';
 
 /** Underarm nearer to the bust point than this is set `raisedBy` above it (method section 3). */
 const nearest = 10;
@@ -11,31 +12,32 @@ const raisedBy = 20;
 export function gownLevels(table: DraftingTable, body: Body): BodyLevels {
   const paper = table.part('Levels', 'both');
   const m = body.measures;
-  const est = (key: MeasureKey): string => (key in body.estimated ? ' (estimated)' : '');
+  const measured = (name: string, key: MeasureKey): Said =>
+    taken(name, key, m[key], key in body.estimated).how;
 
   const sideNeckX = m.neckGirth / 5 - 7;
   const bustPointX = m.bustSpan / 2;
   paper.draw(
     'Side neck point',
-    said`A fifth of the neck girth ${mm(m.neckGirth)}${est('neckGirth')} less ${mm(7)} = ${mm(sideNeckX)} out from the centre. Everything hangs from its height.`,
+    said`A fifth of the ${measured('neck girth', 'neckGirth')} less ${mm(7)} = ${mm(sideNeckX, ['neckGirth'])} out from the centre. Everything hangs from its height.`,
     { points: { 'side-neck': { x: sideNeckX, y: 0 } }, measures: ['neckGirth'] },
   );
   const across = bustPointX - sideNeckX;
   const bust = paper.level(
     'Bust',
-    said`Half the bust span ${mm(m.bustSpan)} puts the bust point ${mm(bustPointX)} out; the slanting measure ${mm(m.sideNeckToBustPoint)} from the side neck then falls`,
+    said`Half the ${measured('bust span', 'bustSpan')} puts the bust point ${mm(bustPointX, ['bustSpan'])} out; ${measured('side neck to bust point', 'sideNeckToBustPoint')}, measured on the slant, then falls`,
     Math.sqrt(m.sideNeckToBustPoint ** 2 - across ** 2),
     ['bustSpan', 'sideNeckToBustPoint'],
   );
   const underbust = paper.level(
     'Under-bust',
-    said`Side neck to under-bust ${mm(m.sideNeckToUnderbust)} less to bust point ${mm(m.sideNeckToBustPoint)} hangs it ${mm(m.sideNeckToUnderbust - m.sideNeckToBustPoint)} under the bust level`,
+    said`${measured('Side neck to under-bust', 'sideNeckToUnderbust')} less ${measured('side neck to bust point', 'sideNeckToBustPoint')} hangs it ${mm(m.sideNeckToUnderbust - m.sideNeckToBustPoint, ['sideNeckToUnderbust', 'sideNeckToBustPoint'])} under the bust level`,
     bust + m.sideNeckToUnderbust - m.sideNeckToBustPoint,
     ['sideNeckToUnderbust', 'sideNeckToBustPoint'],
   );
   const waist = paper.level(
     'Waist',
-    said`Front waist length ${mm(m.frontWaistLength)} less side neck to bust point hangs it ${mm(m.frontWaistLength - m.sideNeckToBustPoint)} under the bust level`,
+    said`${measured('Front waist length', 'frontWaistLength')} less ${measured('side neck to bust point', 'sideNeckToBustPoint')} hangs it ${mm(m.frontWaistLength - m.sideNeckToBustPoint, ['frontWaistLength', 'sideNeckToBustPoint'])} under the bust level`,
     bust + m.frontWaistLength - m.sideNeckToBustPoint,
     ['frontWaistLength', 'sideNeckToBustPoint'],
   );
@@ -43,22 +45,25 @@ export function gownLevels(table: DraftingTable, body: Body): BodyLevels {
   const underarm = underarmLevel(table, body, bust, waist);
   const topHip = paper.level(
     'Top hip',
-    said`${mm(m.waistToTopHip)}${est('waistToTopHip')} under the waist`,
+    said`${measured('Waist to top hip', 'waistToTopHip')} down from the waist`,
     waist + m.waistToTopHip,
     ['waistToTopHip'],
   );
-  const hip = paper.level('Hip', said`${mm(m.waistToHip)} under the waist`, waist + m.waistToHip, [
-    'waistToHip',
-  ]);
+  const hip = paper.level(
+    'Hip',
+    said`${measured('Waist to hip', 'waistToHip')} down from the waist`,
+    waist + m.waistToHip,
+    ['waistToHip'],
+  );
   const knee = paper.level(
     'Knee',
-    said`${mm(m.waistToKnee)}${est('waistToKnee')} under the waist`,
+    said`${measured('Waist to knee', 'waistToKnee')} down from the waist`,
     waist + m.waistToKnee,
     ['waistToKnee'],
   );
   const floor = paper.level(
     'Floor',
-    said`${mm(m.waistToFloor)} under the waist, barefoot`,
+    said`${measured('Waist to floor', 'waistToFloor')} down from the waist, barefoot`,
     waist + m.waistToFloor,
     ['waistToFloor'],
   );
@@ -80,11 +85,13 @@ export function gownLevels(table: DraftingTable, body: Body): BodyLevels {
 function underarmLevel(table: DraftingTable, body: Body, bust: number, waist: number): number {
   const paper = table.part('Levels', 'both');
   const up = body.measures.underarmToWaist;
+  const measured = (name: string): Said =>
+    taken(name, 'underarmToWaist', up, 'underarmToWaist' in body.estimated).how;
   const level = waist - up;
   if (bust - level >= nearest) {
     return paper.level(
       'Underarm',
-      said`Underarm to waist ${mm(up)}${'underarmToWaist' in body.estimated ? ' (estimated)' : ''} up from the waist`,
+      said`${measured('Underarm to waist')} up from the waist`,
       level,
       ['underarmToWaist'],
     );
@@ -98,8 +105,9 @@ function underarmLevel(table: DraftingTable, body: Body, bust: number, waist: nu
   });
   return paper.level(
     'Underarm',
-    said`Underarm to waist ${mm(up)} would come out level with the bust point; it is set ${mm(raisedBy)} above it`,
+    said`${measured('Underarm to waist')} would come out level with the bust point; it is set ${mm(raisedBy)} above it`,
     bust - raisedBy,
     ['underarmToWaist'],
+    [],
   );
 }

@@ -1,5 +1,5 @@
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
-import type { Side } from '../../drafting/piece.ts';
+import { line } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
 import { profilePath, steepest, xAt } from '../../geometry/profile.ts';
 import { deg, mm, said } from '../../units/said.ts';
@@ -16,6 +16,9 @@ const levelRows = [
   ['hip', 'Hip line'],
   ['knee', 'Knee seam line'],
 ] as const;
+
+/** What is less is left unsaid: it reads as nothing in either unit. */
+const leastSaid = 0.5;
 
 const balanceWhy = said`The balance moves the side seam between front and back: what the front gains, the back gives.`;
 
@@ -38,7 +41,7 @@ export function narrateHalf(
   }
   narrateSuppression(table, paper, half);
   narrateSide(paper, half);
-  narrateContour(paper, half.side, contour, moved);
+  narrateContour(paper, half, contour, moved);
   narrateWaistSeam(paper, half, quarters);
   return paper;
 }
@@ -56,13 +59,29 @@ function narrateSuppression(table: DraftingTable, paper: PartTable, half: Half):
         : said`two darts take ${mm(suppression.dart * (shares[0] ?? 1))} and ${mm(suppression.dart * (shares[1] ?? 0))}`;
   paper.draw(
     'Waist suppression',
-    said`Mean of bust and hip quarters ${mm(mean)} less the waist quarter ${mm(quarters.waist)} ${
+    said`Mean of bust and hip quarters ${mm(mean, ['bustGirth', 'hipGirth'])} less the waist quarter ${mm(quarters.waist, ['waistGirth'])} ${
       suppression.whole > 0
-        ? said`leaves ${mm(suppression.whole)} to take in. The side seam ${inwards >= 0 ? 'takes' : 'stands out by'} ${mm(Math.abs(inwards))}; ${darts}`
+        ? said`leaves ${mm(suppression.whole, ['bustGirth', 'hipGirth', 'waistGirth'])} to take in. The side seam ${
+            Math.abs(inwards) < leastSaid
+              ? said`takes none of it`
+              : said`${inwards > 0 ? 'takes' : 'stands out by'} ${mm(Math.abs(inwards))}`
+          }; ${darts}`
         : said`leaves nothing to take in: the side seam passes through the waist quarter, no dart`
     }.`,
     {
       why: said`The side seam stays inside the bust and leans at most 25°, so that it hangs without a hollow.`,
+      points: {
+        'waist-quarter': point(quarters.waist, half.heights.waist),
+        'bust-hip-mean': point(mean, half.heights.waist),
+      },
+      lines: [
+        [
+          line(
+            point(Math.min(quarters.waist, mean), half.heights.waist),
+            point(Math.max(quarters.waist, mean), half.heights.waist),
+          ),
+        ],
+      ],
       measures: ['bustGirth', 'hipGirth', 'waistGirth'],
     },
   );
@@ -108,22 +127,37 @@ function narrateSide(paper: PartTable, half: Half): void {
   );
 }
 
-function narrateContour(paper: PartTable, side: Side, contour: Contour, moved: number): void {
+function narrateContour(paper: PartTable, half: Half, contour: Contour, moved: number): void {
+  const { side, heights, quarters } = half;
   const shared =
-    moved > 0.05
+    moved > leastSaid
       ? side === 'front'
         ? said` ${mm(moved)} of it comes from the back, whose side would lean too far.`
         : said` ${mm(moved)} more than the side can lean goes to the front.`
       : said``;
+  const lean =
+    Math.abs(contour.lean) < leastSaid
+      ? said`the side stays upright`
+      : said`the side leans ${contour.lean < 0 ? 'out' : 'in'} by ${mm(Math.abs(contour.lean))}`;
   const opening =
     contour.opening === 0
       ? said`no opening is needed`
       : said`the opening at the top edge takes ${mm(contour.opening)}`;
   paper.draw(
     'Above the bust',
-    said`Bust quarter less upper chest quarter leaves ${mm(contour.reduction)}: the side leans ${contour.lean < 0 ? 'out' : 'in'} by ${mm(Math.abs(contour.lean))}, ${opening}.${shared}`,
+    said`Bust quarter less upper chest quarter leaves ${mm(contour.reduction, ['bustGirth', 'upperChestGirth'])}: ${lean}, ${opening}.${shared}`,
     {
       why: said`This is the only amount taken out above the bust: with it the top edge lies on the upper chest and cannot gape.`,
+      points: { 'side-chest': point(xAt(half.line, heights.underarm), heights.underarm) },
+      lines: [
+        [
+          line(
+            point(xAt(half.line, heights.underarm), heights.underarm),
+            point(quarters.bust, heights.underarm),
+          ),
+        ],
+        profilePath(half.line, heights.underarm, heights.bust),
+      ],
       measures: ['bustGirth', 'upperChestGirth'],
     },
   );
@@ -132,12 +166,12 @@ function narrateContour(paper: PartTable, side: Side, contour: Contour, moved: n
 function narrateWaistSeam(paper: PartTable, half: Half, quarters: Quarters): void {
   const fall = half.seam.to.y - half.seam.from.y;
   const way =
-    Math.abs(fall) < 0.05
+    Math.abs(fall) < leastSaid
       ? said`stays level`
       : said`${fall > 0 ? 'falls' : 'rises'} ${mm(Math.abs(fall))}`;
   paper.draw(
     'Waist seam',
-    said`Drawn with its intake closed, ${mm(quarters.seam.value)} long (${quarters.seam.how}): square at the centre, it ${way} at the side, then is opened by ${mm(half.gap.seam)}.`,
+    said`Drawn with its intake closed, ${mm(quarters.seam.value, quarters.seam.measures)} long (${quarters.seam.how}): square at the centre, it ${way} at the side, then ${half.gap.seam < leastSaid ? said`needs no opening` : said`is opened by ${mm(half.gap.seam)}`}.`,
     {
       why: said`Top and middle are cut from this one line, so they are equal by construction.`,
       lines: [[half.seam]],

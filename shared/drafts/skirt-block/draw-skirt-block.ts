@@ -14,7 +14,7 @@ import { type Said, mm, said } from '../../units/said.ts';
 import { blockQuarter } from '../block-quarter.ts';
 import type { DrawnBlock } from '../drawn-block.ts';
 import { warnOfEstimates } from '../lean-on.ts';
-import { sideOf, skirtPiece } from './pieces.ts';
+import { nameOf, sideOf, skirtPiece } from './pieces.ts';
 import { type QuarterPlan, type SkirtHeights, planQuarters } from './plan-quarters.ts';
 import type { SkirtBlockStyle } from './style-card.ts';
 
@@ -80,8 +80,15 @@ function narrateQuarter(
   const taken: Said = darts === 0 ? said`${count}` : said`${count} ${mm(darts)}`;
   paper.draw(
     'Suppression',
-    said`Hip quarter ${mm(plan.figures.hip)} less waist quarter ${mm(plan.figures.waist)} is ${mm(plan.figures.hip - plan.figures.waist)}: the side takes ${mm(side)}, ${taken}.`,
+    said`Hip quarter ${mm(plan.figures.hip, ['hipGirth'])} less waist quarter ${mm(plan.figures.waist, ['waistGirth'])} is ${mm(plan.figures.hip - plan.figures.waist, ['hipGirth', 'waistGirth'])}: the side takes ${mm(side)}, ${taken}.`,
     {
+      points: {
+        'waist-quarter': point(plan.figures.waist, heights.waist),
+        'hip-quarter': point(plan.figures.hip, heights.waist),
+      },
+      lines: [
+        [line(point(plan.figures.waist, heights.waist), point(plan.figures.hip, heights.waist))],
+      ],
       why: said`Front and back together take ${mm(half)}: up to ${mm(60)} one dart each, up to ${mm(100)} two in the back, then two each; none wider than ${mm(35)}.`,
       measures: ['hipGirth', 'waistGirth'],
     },
@@ -94,12 +101,11 @@ function narrateQuarter(
       why: said`The waist rises at the side so that it meets the slanting seam squarely, in front and back alike.`,
       points: { 'side-waist': point(xAt(plan.curve, plan.sideTop), plan.sideTop) },
       lines: [path],
-      measures: ['waistToHip'],
     },
   );
   paper.draw(
     'Waist',
-    said`Square to the centre line and to the side seam; sewn, it is ${mm(quarters.waist.value)} long, the quarter.`,
+    said`Square to the centre line and to the side seam; sewn, it is ${mm(quarters.waist.value, quarters.waist.measures)} long, the waist quarter.`,
     {
       why: said`It meets the legs of each dart squarely, so it runs on as one smooth curve when the dart is closed.`,
       lines: [
@@ -110,6 +116,7 @@ function narrateQuarter(
         }),
       ],
       measures: ['waistGirth'],
+      pieces: [nameOf[plan.side]],
     },
   );
   return paper;
@@ -126,9 +133,12 @@ export function drawSkirtBlock(
   warnOfEstimates(table, body, 'skirt block', ['topHipGirth', 'waistToKnee']);
   const hem = table
     .part('Levels', 'both')
-    .level('Hem', said`${mm(style.length)} under the waist`, levels.waist + style.length, [
-      'waistToKnee',
-    ]);
+    .level(
+      'Hem',
+      said`Skirt length ${mm(style.length)} down from the waist`,
+      levels.waist + style.length,
+      [],
+    );
   const heights: SkirtHeights = { waist: levels.waist, hip: levels.hip, hem };
   const quarters = {
     front: quartersOf('front', body, style, rules),

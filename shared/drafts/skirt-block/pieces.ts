@@ -8,7 +8,8 @@ import { profilePath, xAt } from '../../geometry/profile.ts';
 import { waistDarts, waistEdges } from '../waist-edges.ts';
 import type { QuarterPlan, SkirtHeights } from './plan-quarters.ts';
 
-const nameOf = { front: 'skirt-front', back: 'skirt-back' } as const;
+/** Names of the two pieces. */
+export const nameOf = { front: 'skirt-front', back: 'skirt-back' } as const;
 /** Darts are drilled this far inside their tips (common practice, no source: 10 to 15). */
 const drillInside = 12;
 /** The zip at the centre back ends this far above the hip, as on the gown. */

@@ -153,7 +153,8 @@ export function planQuarters(
   const widest = Math.min(widestSkirtDart, rules.dartWidest);
   const draw = (side: Side, length: number): Shape => {
     const intake = shares[side];
-    const count = dartCount(side, half, intake.darts, widest);
+    const own = dartCount(side, half, intake.darts, widest);
+    const count = own === 0 ? own : (rules.counts?.darts?.[side] ?? own);
     return shape(side, figures[side], heights, { intake, length, count });
   };
   const quarters = withEvenSides(heights.hip - heights.waist, (length) => ({
