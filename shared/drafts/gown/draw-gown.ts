@@ -10,6 +10,7 @@ import { type FlarePlan, flarePieces, flareRadius, planFlare } from './flare.ts'
 import { backEdgeIsHigh, drawTop } from './draw-top.ts';
 import { gownHandles } from './handles.ts';
 import type { Half } from './half.ts';
+import { kneeStretches, oneSkirt } from './knee-stretches.ts';
 import { middlePiece } from './middle.ts';
 import { narrateHalf, warnOfShift } from './narrate-halves.ts';
 import { type PairInputs, type PairedHalves, pairHalves } from './pair-halves.ts';
@@ -141,8 +142,9 @@ function drawSide(
   const contour = pair.contour[side];
   const paper = narrateHalf(table, half, shared.quarters[side], contour, pair.contour.moved);
   const top = drawTop(table, paper, half, pair.front, contour.opening, style, rules);
-  const middle = middlePiece(paper, half, flare[side], topPartner(side, style.shaping));
+  const knees = kneeStretches(flare[side], oneSkirt(side));
+  const middle = middlePiece(paper, half, knees, topPartner(side, style.shaping));
   const other = flare[side === 'front' ? 'back' : 'front'];
-  const gores = flarePieces(table.part('Flare', 'flare'), side, flare[side], other.gores);
+  const gores = flarePieces(table.part('Flare', 'flare'), side, flare[side], other.gores, knees);
   return { pieces: [...top.pieces, middle, ...gores], openings: top.openings };
 }

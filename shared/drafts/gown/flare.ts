@@ -2,10 +2,11 @@ import type { PartTable } from '../../drafting/drafting-table.ts';
 import { edge, notchAtLength, to } from '../../drafting/outline.ts';
 import type { Edge, Piece, Side } from '../../drafting/piece.ts';
 import { arc } from '../../geometry/arc.ts';
-import { reverse } from '../../geometry/curve.ts';
+import { pathLength, reverse } from '../../geometry/curve.ts';
 import { line } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { deg, mm, said } from '../../units/said.ts';
+import type { KneeStretch } from './knee-stretches.ts';
 
 /**
  * Inner radius of a circle flare: seam length over 2 pi times the part of a full circle.
@@ -52,16 +53,13 @@ export const kneeWidths = (plan: FlarePlan): readonly number[] =>
 export const goreName = (side: Side, k: number): string =>
   k === 0 ? `flare-${side}` : `flare-${side}-${k + 1}`;
 
-/** Names of the knee stretches of a flare of several gores. */
-export const kneeStretch = (k: number, gores: number): string =>
-  gores === 1 ? 'knee' : `knee-${'abcdefghijkl'[k] ?? ''}`;
-
 /** The pieces of one half of the flare, each in a frame of its own: the apex at the origin. */
 export function flarePieces(
   paper: PartTable,
   side: Side,
   plan: FlarePlan,
   otherGores: number,
+  stretches: readonly KneeStretch[],
 ): readonly Piece[] {
   const degrees = (plan.angle * 180) / Math.PI;
   paper.draw(
@@ -72,12 +70,19 @@ export function flarePieces(
         arc(point(0, 0), plan.outer, 0, plan.angle),
         arc(point(0, 0), plan.inner, 0, plan.angle),
       ],
+      pieces: Array.from({ length: plan.gores }, (_, k) => goreName(side, k)),
     },
   );
-  return Array.from({ length: plan.gores }, (_, k) => gore(side, plan, k, otherGores));
+  return Array.from({ length: plan.gores }, (_, k) => gore(side, plan, k, otherGores, stretches));
 }
 
-function gore(side: Side, plan: FlarePlan, k: number, otherGores: number): Piece {
+function gore(
+  side: Side,
+  plan: FlarePlan,
+  k: number,
+  otherGores: number,
+  stretches: readonly KneeStretch[],
+): Piece {
   const { inner, outer, halfGore, gores } = plan;
   const onFold = k === 0;
   const last = k === gores - 1;
@@ -87,12 +92,17 @@ function gore(side: Side, plan: FlarePlan, k: number, otherGores: number): Piece
     point(radius * Math.sin(angle), radius * Math.cos(angle));
   const other = side === 'front' ? 'back' : 'front';
   const strokes = side === 'front' ? 1 : 2;
-  const knee = edge(
-    kneeStretch(k, gores),
-    'seam',
-    arc(origin, inner, from, halfGore),
-    to(`${side}-middle`, kneeStretch(k, gores)),
-  );
+  const angleAt = (along: number, goreFrom: number): number => from + (along - goreFrom) / inner;
+  const knees = stretches
+    .filter((stretch) => stretch.gore === k)
+    .map(({ name, from: start, until, goreFrom, skirt }) =>
+      edge(
+        name,
+        'seam',
+        arc(origin, inner, angleAt(start, goreFrom), angleAt(until, goreFrom)),
+        to(skirt, name),
+      ),
+    );
   const outwards = [line(rim(inner, halfGore), rim(outer, halfGore))];
   const far: Edge = last
     ? edge('side', 'side', outwards, to(goreName(other, otherGores - 1), 'side'))
@@ -102,7 +112,6 @@ function gore(side: Side, plan: FlarePlan, k: number, otherGores: number): Piece
   const near: Edge = onFold
     ? edge('centre', 'fold', inwards)
     : edge(`gore-${k}`, 'seam', inwards, to(goreName(side, k - 1), `gore-${k}`));
-  const width = inner * (halfGore - from);
   const depth = outer - inner;
   const markAt = (seam: number): number => (depth * seam) / (gores + 1);
   return {
@@ -112,11 +121,13 @@ function gore(side: Side, plan: FlarePlan, k: number, otherGores: number): Piece
     part: 'flare',
     cut: onFold ? 'cut 1 on fold' : 'cut 2 (a pair)',
     copies: onFold ? 1 : 2,
-    edges: [knee, far, hem, near],
+    edges: [...knees, far, hem, near],
     darts: [],
     levels: [],
     notches: [
-      ...notchAtLength(`${knee.name}-half`, knee, width / 2, strokes),
+      ...knees.flatMap((knee) =>
+        notchAtLength(`${knee.name}-half`, knee, pathLength(knee.path) / 2, strokes),
+      ),
       // The seam nearer the centre is travelled upwards, from the hem.
       ...goreMark(near, depth - markAt(k), strokes),
       ...goreMark(far, markAt(k + 1), strokes),

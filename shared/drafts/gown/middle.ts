@@ -14,9 +14,10 @@ import { type Path, line } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { profilePath, xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
-import { type FlarePlan, goreName, kneeStretch, kneeWidths } from './flare.ts';
+import { goreName } from './flare.ts';
 import { type Half, dartShares } from './half.ts';
 import { intakeEdge, middleDarts, seamStretches } from './intakes.ts';
+import type { KneeStretch } from './knee-stretches.ts';
 
 /** The zip ends this far above the hip at the highest. */
 const zipAboveHip = 20;
@@ -32,7 +33,7 @@ export type TopPartner = (stretch: number) => string;
 export function middlePiece(
   paper: PartTable,
   half: Half,
-  flare: FlarePlan,
+  kneeSeam: readonly KneeStretch[],
   topPartner: TopPartner,
 ): Piece {
   const { side, heights, levels, line: seam } = half;
@@ -70,7 +71,7 @@ export function middlePiece(
     [line(kneeCentre, centreTop)],
     side === 'front' ? undefined : 'self',
   );
-  const knees = kneeEdges(side, flare, heights.knee);
+  const knees = kneeEdges(side, kneeSeam, heights.knee);
   narrateDarts(paper, half, sewn);
   paper.draw(
     'Skirt',
@@ -82,6 +83,7 @@ export function middlePiece(
         ...stretches,
         ...sewn.flatMap((dart) => [dart.centreLeg, dart.sideLeg]),
       ],
+      pieces: [name],
     },
   );
   return {
@@ -155,17 +157,16 @@ function secondDartMark(
 }
 
 /** The knee seam from the side to the centre, in a stretch for each gore of the flare. */
-function kneeEdges(side: Piece['side'], flare: FlarePlan, y: number): readonly Edge[] {
-  let x = 0;
-  return kneeWidths(flare)
-    .map((width, k) => {
-      const from = x;
-      x += width;
-      const name = kneeStretch(k, flare.gores);
-      return edge(name, 'seam', [line(point(x, y), point(from, y))], to(goreName(side, k), name));
-    })
+export const kneeEdges = (
+  side: Piece['side'],
+  stretches: readonly KneeStretch[],
+  y: number,
+): readonly Edge[] =>
+  stretches
+    .map(({ name, from, until, gore }) =>
+      edge(name, 'seam', [line(point(until, y), point(from, y))], to(goreName(side, gore), name)),
+    )
     .reverse();
-}
 
 /** Beside the darts, between hip and knee. */
 const grainIn = (half: Half): { readonly from: Point; readonly to: Point } => {
