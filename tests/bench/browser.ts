@@ -1,5 +1,7 @@
 import { chromium, type Page } from '@playwright/test';
 import { preview } from 'vite';
+import { coreMeasures } from '#shared/body/card.ts';
+import { sampleCards } from '#shared/body/sample-cards.ts';
 
 /** One line of the benchmark's report. */
 export type BrowserBench = {
@@ -17,20 +19,6 @@ const frame = 1000 / 60;
 const slowdown = 4;
 const warmUp = 30;
 const rounds = 80;
-
-/** The demo gown's ten measures, mm. */
-const measures = {
-  bustGirth: 920,
-  underbustGirth: 780,
-  waistGirth: 738,
-  hipGirth: 990,
-  bustSpan: 190,
-  sideNeckToBustPoint: 275,
-  sideNeckToUnderbust: 345,
-  frontWaistLength: 440,
-  waistToHip: 205,
-  waistToFloor: 1050,
-};
 
 /**
  * Time from a typed figure to the drawing on the canvas (draft, finishing, proof, React and paper), on
@@ -71,7 +59,7 @@ const round = (value: number): number => Math.round(value * 100) / 100;
 /** Opens the table on a drawing that the browser had kept. */
 export async function layOut(page: Page, address: string): Promise<void> {
   const entries = Object.fromEntries(
-    Object.entries(measures).map(([key, value]) => [`card.${key}`, { value }]),
+    coreMeasures.map((key) => [`card.${key}`, { value: sampleCards.judith[key] }]),
   );
   await page.addInitScript((kept) => localStorage.setItem('ellwand.table', JSON.stringify(kept)), {
     version: 1,

@@ -1,23 +1,10 @@
+import { sampleCards } from '#shared/body/sample-cards.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
 import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
 import type { FinishedPiece } from '#shared/drafting/piece.ts';
 import { levelTitles } from '#shared/exports/level-titles.ts';
 import { pathData } from '#shared/exports/path-data.ts';
 import { spread, type SpreadPiece } from '#shared/exports/spread.ts';
-
-/** The body of the drawing on the front page; invented. */
-const card = {
-  bustGirth: 920,
-  underbustGirth: 780,
-  waistGirth: 738,
-  hipGirth: 990,
-  bustSpan: 190,
-  sideNeckToBustPoint: 275,
-  sideNeckToUnderbust: 345,
-  frontWaistLength: 440,
-  waistToHip: 205,
-  waistToFloor: 1050,
-};
 
 /** Room above and beside the pieces for the rod, mm. */
 const margin = 46;
@@ -35,7 +22,11 @@ const sheets: readonly Sheet[] = [
  * Made when the screens are built, so that they are never older than the engine.
  */
 export function demoGown(): string {
-  const { pieces } = draftGown({ card, style: {}, rules: houseRulePresets.balanced });
+  const { pieces } = draftGown({
+    card: sampleCards.judith,
+    style: {},
+    rules: houseRulePresets.balanced,
+  });
   return [
     '<svg xmlns="http://www.w3.org/2000/svg">',
     ...sheets.map((sheet) => symbol(pieces, sheet)),
