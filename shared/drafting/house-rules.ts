@@ -14,6 +14,9 @@ export type BalanceLevel = (typeof balanceLevels)[number];
 export const edgeKinds = ['seam', 'side', 'zip', 'top', 'hem', 'fold', 'mouth'] as const;
 export type EdgeKind = (typeof edgeKinds)[number];
 
+/** How many darts or gores a half has, for each half that is not to decide by its own measures. */
+type Counts<N extends number> = { readonly front?: N; readonly back?: N };
+
 /** How a workroom drafts (method sections 4, 6, 7), millimetres; they travel with the draft. */
 export type HouseRules = {
   /** Added to the front quarter and taken from the back one, by level. */
@@ -34,4 +37,6 @@ export type HouseRules = {
     readonly top: number;
     readonly hem: number;
   };
+  /** Numbers settled beforehand, as the sizes of a nest have them from the largest; absent, each draft decides. */
+  readonly counts?: { readonly darts?: Counts<1 | 2>; readonly gores?: Counts<number> };
 };

@@ -49,6 +49,8 @@ export type PairInputs = {
 /** One dart, or two where one would be wider than the house sews (or, in a top, too blunt at its tip). */
 function dartCount(half: Half, inputs: PairInputs): 1 | 2 {
   const { rules, style } = inputs;
+  const settled = rules.counts?.darts?.[half.side];
+  if (settled !== undefined) return settled;
   const widest = Math.max(half.gap.seam, half.gap.waist);
   if (widest > rules.dartWidest) return 2;
   if (style.shaping === 'princess') return 1;
