@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { measureCard } from './card.ts';
+import { longestReason, measureCard, overruledWith } from './card.ts';
 import { endpoint } from './endpoint.ts';
 import { givenName, keptText } from './kept-text.ts';
 import { pieceSchema } from './piece-reply.ts';
@@ -9,7 +9,10 @@ import { baseVersion, done, lastSave, fieldKey, saved, saveId, typed } from './s
 import { styleCard } from './style.ts';
 
 /** A measure card as far as it has been filled in. */
-export const partCard = measureCard.partial().extend({ name: keptText(80).optional() });
+export const partCard = measureCard.partial().extend({
+  name: keptText(80).optional(),
+  overruled: overruledWith(keptText(longestReason)),
+});
 
 /**
  * What a maker has put on the table: the letters in the fields, and what they mean where they can be

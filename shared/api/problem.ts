@@ -22,4 +22,5 @@ export const problemSchema = z.strictObject({
   field: z.string(),
   with: z.exactOptional(z.array(z.string())),
   said: saidSchema,
+  overruled: z.exactOptional(z.string()),
 }) satisfies z.ZodType<Problem>;

@@ -41,11 +41,20 @@ export type CoreMeasure = (typeof coreMeasures)[number];
 export type FurtherMeasure = (typeof furtherMeasures)[number];
 export type MeasureKey = CoreMeasure | FurtherMeasure;
 
+/** A warning about this card that the maker has looked at and keeps, and why; told by its code and fields. */
+export type Overruled = {
+  readonly code: string;
+  readonly field: string;
+  readonly with?: readonly string[] | undefined;
+  readonly reason: string;
+};
+
 /** What was measured, millimetres (`shoulderSlope` degrees), and whose card it is. */
 export type MeasureCard = {
   readonly name?: string | undefined;
   /** Day the measures were taken, `2026-11-14`. */
   readonly date?: string | undefined;
+  readonly overruled?: readonly Overruled[] | undefined;
 } & { readonly [K in CoreMeasure]: number } & {
   readonly [K in FurtherMeasure]?: number | undefined;
 };

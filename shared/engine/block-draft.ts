@@ -2,6 +2,7 @@ import type { Body, MeasureCard } from '../body/card.ts';
 import type { BodyLevels } from '../body/levels.ts';
 import { checkCard } from '../body/check-card.ts';
 import { completeCard } from '../body/complete-card.ts';
+import { withReasons } from '../body/overrule.ts';
 import { checkRules } from '../drafting/check-rules.ts';
 import type { WantedGirth } from '../drafting/construction.ts';
 import { DraftingError } from '../drafting/drafting-error.ts';
@@ -133,7 +134,7 @@ export function draftBlock<Name extends BlockName, Card, Style>(
     steps: table.steps,
     wanted: drawn.wanted,
     ...(drawn.bustPoint && { bustPoint: drawn.bustPoint }),
-    warnings: [...aboutCard, ...aboutStyle, ...table.warnings],
+    warnings: withReasons([...aboutCard, ...aboutStyle, ...table.warnings], card),
     proof: proveBlock({ pieces, wanted: drawn.wanted, rules }),
   };
 }

@@ -1,6 +1,7 @@
 import { checkCard } from '../body/check-card.ts';
 import type { Body } from '../body/card.ts';
 import { completeCard } from '../body/complete-card.ts';
+import { withReasons } from '../body/overrule.ts';
 import { checkRules } from '../drafting/check-rules.ts';
 import type { Construction } from '../drafting/construction.ts';
 import { DraftingError } from '../drafting/drafting-error.ts';
@@ -81,7 +82,7 @@ export function draftGown(inputs: DraftInputs): Draft {
     handles: drawn.handles,
     construction: drawn.construction,
     walking: drawn.walking,
-    warnings: [...aboutCard, ...aboutStyle, ...table.warnings],
+    warnings: withReasons([...aboutCard, ...aboutStyle, ...table.warnings], card),
     proof: prove({ pieces, construction: drawn.construction, rules }),
   };
 }

@@ -14,6 +14,7 @@ import { pagePlan } from './page-plan.ts';
 import { rod } from './rod.ts';
 import { type Block, paragraph, stack } from './text-block.ts';
 import { shorten } from './type-width.ts';
+import { warningWords } from './warning-words.ts';
 
 /** Where the two squares stand on the cover, mm: the print tests measure them there. */
 export const testSquares = {
@@ -97,7 +98,7 @@ function listsBeside(
         (y) => measureList(draft, unit, columns, { x, y, width }),
         (y) => paragraph(note, x, y, width, 2.8, { grey: 0.3 }),
         ...draft.warnings.map(
-          (each) => (y: number) => paragraph(speak(each.said, unit), x, y, width, 2.8),
+          (each) => (y: number) => paragraph(warningWords(each, unit), x, y, width, 2.8),
         ),
       ],
       metric.y,

@@ -11,6 +11,8 @@ export type Problem = {
   readonly field: string;
   readonly with?: readonly string[];
   readonly said: Said;
+  /** Why the maker keeps what a warning is about. */
+  readonly overruled?: string;
 };
 
 type ProblemParts = Omit<Problem, 'severity'>;
