@@ -55,7 +55,9 @@ export function placeOf(draft: Comparable, side: Side, wanted: AlignPoint): Poin
     case 'bust-point':
       if (side === 'back') return point(0, bodyLevels.bust);
       return draft.bustPoint ?? point(bodyLevels.bustPointX, bodyLevels.bust);
-    default:
+    case 'side-waist':
+    case 'side-bust':
+    case 'side-hip':
       return sideAt(draft, side, levelOf[wanted]);
   }
 }
