@@ -1,6 +1,6 @@
 import { endpoint } from './endpoint.ts';
 import { draftSchema } from './draft-reply.ts';
-import { draftRequest, printRequest } from './requests.ts';
+import { draftRequest, printRequest, sheetsRequest } from './requests.ts';
 
 /** A gown drafted and proven, as JSON. */
 export const draftGownRequest = endpoint({
@@ -31,5 +31,21 @@ export const printPieces = endpoint({
   method: 'POST',
   path: '/api/prints/pieces.svg',
   body: printRequest,
+  reply: { kind: 'file', mediaType: 'image/svg+xml' },
+});
+
+/** The sheets of an order on any paper: the cover first, then the sheets its plan names. */
+export const printSheets = endpoint({
+  method: 'POST',
+  path: '/api/prints/sheets',
+  body: sheetsRequest,
+  reply: { kind: 'file', mediaType: 'application/pdf' },
+});
+
+/** The pieces of an order as SVG, one user unit to the millimetre, each once and as drafted. */
+export const printSheetsSvg = endpoint({
+  method: 'POST',
+  path: '/api/prints/sheets.svg',
+  body: sheetsRequest,
   reply: { kind: 'file', mediaType: 'image/svg+xml' },
 });

@@ -4,6 +4,8 @@ import { measureGuide } from '../body/measure-guide.ts';
 import { styleLabels } from '../drafts/gown/style-labels.ts';
 import { styleKeys } from '../drafts/gown/style-limits.ts';
 import type { DraftInputs } from '../engine/draft.ts';
+import { sheetNames } from '../sheets/print-order.ts';
+import { selections } from '../sheets/selection.ts';
 import { error, type Problem } from '../units/problem.ts';
 import { said, type Said } from '../units/said.ts';
 import { draftRequest } from './requests.ts';
@@ -25,6 +27,17 @@ const names = new Map<string, string>([
   ['newPassword', 'The new password'],
   ['title', 'The title'],
   ['name', 'The name'],
+  ['order', 'The order of the sheets'],
+  ['order.paper', 'The paper'],
+  ['order.margin', 'The margin'],
+  ['order.overlap', 'The overlap'],
+  ['order.pieces', 'The choice of pieces'],
+  ['order.orientation', 'The way the sheets lie'],
+  ['order.glueMarks', 'The choice of glue marks'],
+  ['order.lines', 'The choice of lines'],
+  ['order.inkSaving', 'The choice to save ink'],
+  ['order.scale', 'The scale'],
+  ['order.leftOut', 'The list of sheets left out'],
 ]);
 
 /** A gown's cards lie deeper in some requests than in others. */
@@ -32,6 +45,9 @@ const within = /^(gown\.)?(content\.)?(inputs\.)?/;
 
 const called = (field: string): string =>
   names.get(field) ?? names.get(field.replace(within, '')) ?? `“${field}”`;
+
+const quoted = (choices: readonly unknown[]): string =>
+  choices.map((each) => (typeof each === 'string' ? `“${each}”` : String(each))).join(', ');
 
 const short = (text: string): string => (text.length > 60 ? `${text.slice(0, 60)}…` : text);
 
@@ -54,6 +70,12 @@ const objects: Readonly<Record<string, string>> = {
   'rules.allowance': '{"seam": 15}',
 };
 
+/** What may stand where the contract takes more than one form. */
+const unions: Readonly<Record<string, string>> = {
+  'order.paper': `one of ${quoted(sheetNames)}, or a sheet of your own such as {"width": 305, "height": 457}`,
+  'order.pieces': `one of ${quoted(selections)}, or a list such as [{"piece": "front-middle", "copies": 1, "how": "on fold"}]`,
+};
+
 const wrongType = (field: string, expected: string, missing: boolean): Said => {
   const name = called(field);
   if (missing && field === '') {
@@ -74,7 +96,7 @@ const wrongType = (field: string, expected: string, missing: boolean): Said => {
   const unit = field.endsWith('shoulderSlope') ? 'of degrees' : 'of millimetres';
   return field === 'style.flareFraction' || field === 'rules.sideShare'
     ? said`${name} must be a plain number, without quotes, such as 0.5.`
-    : said`${name} must be a plain number ${unit}, without quotes or a unit, such as ${unit === 'of degrees' ? 20 : 920}.`;
+    : said`${name} must be a plain number ${unit}, without quotes or a unit, such as ${field.startsWith('order.') ? 10 : unit === 'of degrees' ? 20 : 920}.`;
 };
 
 function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
@@ -102,8 +124,11 @@ function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
   if (issue.code === 'invalid_format' && issue.format === 'date') {
     return said`${name} must be a day written as year, month, day, such as 2026-11-14.`;
   }
+  if (issue.code === 'invalid_union' && unions[field] !== undefined) {
+    return said`${name} must be ${unions[field]}.`;
+  }
   if (issue.code === 'invalid_value') {
-    const choices = issue.values.map((each) => `“${String(each)}”`).join(', ');
+    const choices = quoted(issue.values);
     return said`${name} must be one of ${choices}.`;
   }
   return said`${name} cannot be read: look up its form in the README.`;

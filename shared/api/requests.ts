@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import type { DraftInputs } from '../engine/draft.ts';
 import { measureCard } from './card.ts';
+import { printOrder } from './print-order.ts';
 import { fillRules, rulesCard } from './rules.ts';
 import { styleCard } from './style.ts';
 
@@ -21,3 +22,11 @@ export const printRequest = z.strictObject({
   pieces: z.enum(['bodice-toile', 'whole-gown']),
 });
 export type PrintRequest = z.output<typeof printRequest>;
+
+/** What sheets are asked for with: what is drafted, and how it is printed. */
+export const sheetsRequest = z.strictObject({
+  inputs: draftRequest,
+  unit: z.enum(['cm', 'in']),
+  order: printOrder.prefault({}),
+});
+export type SheetsRequest = z.output<typeof sheetsRequest>;

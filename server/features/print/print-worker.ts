@@ -1,15 +1,24 @@
 import { answerOrders } from '../../http/thread-work.ts';
-import type { PrintOrder } from './print-order.ts';
-import { chalkSheetOf, piecesOf, tilesOf } from './service.ts';
-
-const makers = { tiles: tilesOf, 'chalk-sheet': chalkSheetOf, pieces: piecesOf };
+import type { PrintTask } from './print-task.ts';
+import { chalkSheetOf, piecesOf, sheetsOf, sheetsSvgOf, tilesOf } from './service.ts';
 
 answerOrders((posted) => {
-  const { what, wanted } = orderIn(posted);
-  return makers[what](wanted);
+  const task = taskIn(posted);
+  switch (task.what) {
+    case 'tiles':
+      return tilesOf(task.wanted);
+    case 'chalk-sheet':
+      return chalkSheetOf(task.wanted);
+    case 'pieces':
+      return piecesOf(task.wanted);
+    case 'sheets':
+      return sheetsOf(task.wanted);
+    case 'sheets-svg':
+      return sheetsSvgOf(task.wanted);
+  }
 });
 
 /** The printer posts nothing else. */
-function orderIn(posted: unknown): PrintOrder {
-  return posted as PrintOrder;
+function taskIn(posted: unknown): PrintTask {
+  return posted as PrintTask;
 }

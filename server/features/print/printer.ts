@@ -1,12 +1,12 @@
 import { firstComeQueue, type Turn } from '../../http/first-come-queue.ts';
 import { openThread } from '../../http/worker-thread.ts';
 import { type Limits, workerPaths } from '../../settings.ts';
-import type { PrintOrder } from './print-order.ts';
+import type { PrintTask } from './print-task.ts';
 
 /** Prints in a thread of its own, so that everything else is answered meanwhile. */
 export type Printer = {
   /** Waits its turn; throws RefusalError where it cannot be drawn or too many wait. */
-  readonly print: (order: PrintOrder, turn: Turn) => Promise<Uint8Array>;
+  readonly print: (task: PrintTask, turn: Turn) => Promise<Uint8Array>;
   readonly close: () => Promise<void>;
 };
 
@@ -17,9 +17,9 @@ export function openPrinter(limits: Limits): Printer {
     busy: 'Many people are printing at this moment. Try again in a few seconds.',
     retryAfterSeconds: 5,
   });
-  const thread = openThread<PrintOrder>(workerPaths.print);
+  const thread = openThread<PrintTask>(workerPaths.print);
   return {
-    print: (order, turn) => queue(turn, async () => bytesIn(await thread.ask(order))),
+    print: (task, turn) => queue(turn, async () => bytesIn(await thread.ask(task))),
     close: thread.close,
   };
 }

@@ -1,13 +1,20 @@
 import { Router } from 'express';
 import type { Endpoint } from '#shared/api/endpoint.ts';
-import { printChalkSheet, printPieces, printTiles } from '#shared/api/drafts.ts';
-import type { PrintRequest } from '#shared/api/requests.ts';
+import {
+  printChalkSheet,
+  printPieces,
+  printSheets,
+  printSheetsSvg,
+  printTiles,
+} from '#shared/api/drafts.ts';
+import type { PrintRequest, SheetsRequest } from '#shared/api/requests.ts';
+import { paperOf } from '#shared/sheets/papers.ts';
 import { addressLimit } from '../../http/address-limit.ts';
 import { attachment, fileName } from '../../http/file-name.ts';
 import { type Asked, type Download, serve } from '../../http/serve.ts';
 import { turnOf } from '../../http/turn-of.ts';
 import type { Limits } from '../../settings.ts';
-import type { PrintOrder } from './print-order.ts';
+import type { PrintTask } from './print-task.ts';
 import type { Printer } from './printer.ts';
 
 /** Prints share one limit per address and one line to wait in, whatever is printed. */
@@ -16,11 +23,11 @@ export function printRouter(limits: Limits, printer: Printer): Router {
   router.use('/api/prints', addressLimit(limits.printsPerMinute));
 
   const download = async (
-    order: PrintOrder,
+    task: PrintTask,
     { request, response }: Pick<Asked<Endpoint>, 'request' | 'response'>,
     name: string,
   ): Promise<Download> => ({
-    bytes: await printer.print(order, turnOf(request, response)),
+    bytes: await printer.print(task, turnOf(request, response)),
     disposition: attachment(name),
   });
 
@@ -39,6 +46,18 @@ export function printRouter(limits: Limits, printer: Printer): Router {
   );
   serve(router, printPieces, (wanted, asked) =>
     download({ what: 'pieces', wanted }, asked, named(wanted, [wanted.pieces], 'svg')),
+  );
+  const sheetsNamed = ({ inputs, order }: SheetsRequest, extension: 'pdf' | 'svg') => {
+    const pieces = typeof order.pieces === 'string' ? order.pieces : 'pieces';
+    const scale = order.scale === 1 ? [] : [`scale 1 ${1 / order.scale}`];
+    const onPaper = extension === 'svg' ? [] : [paperOf(order.paper).name, ...scale];
+    return fileName([inputs.card.name, pieces, ...onPaper], extension);
+  };
+  serve(router, printSheets, (wanted, asked) =>
+    download({ what: 'sheets', wanted }, asked, sheetsNamed(wanted, 'pdf')),
+  );
+  serve(router, printSheetsSvg, (wanted, asked) =>
+    download({ what: 'sheets-svg', wanted }, asked, sheetsNamed(wanted, 'svg')),
   );
   return router;
 }

@@ -1,8 +1,11 @@
-import type { PrintRequest } from '#shared/api/requests.ts';
+import type { PrintRequest, SheetsRequest } from '#shared/api/requests.ts';
+import type { Draft } from '#shared/engine/draft.ts';
 import { piecesSvg } from '#shared/exports/svg.ts';
-import { presetOrder } from '#shared/sheets/print-order.ts';
+import { checkOrder } from '#shared/sheets/check-order.ts';
+import { type PrintOrder, presetOrder } from '#shared/sheets/print-order.ts';
 import { choosePieces } from '#shared/sheets/selection.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
+import type { Unit } from '#shared/units/said.ts';
 import { draftOrRefuse } from '../../drafting/draft-or-refuse.ts';
 import { refusalFor } from '../../http/refusal.ts';
 import { chalkSheetPdf } from './chalk-sheet-pdf.ts';
@@ -15,9 +18,30 @@ export async function tilesOf({
   pieces,
   ...inputs
 }: PrintRequest): Promise<Uint8Array> {
+  return pdfOf(draftOrRefuse(inputs, unit), presetOrder(paper, pieces), unit);
+}
+
+/** The sheets of an order. */
+export async function sheetsOf({ inputs, unit, order }: SheetsRequest): Promise<Uint8Array> {
+  return pdfOf(draftFor(inputs, order, unit), order, unit);
+}
+
+/** The pieces of an order as SVG. */
+export async function sheetsSvgOf({ inputs, unit, order }: SheetsRequest): Promise<Uint8Array> {
+  return svgOf(draftFor(inputs, order, unit), order.pieces, unit);
+}
+
+/** The draft an order is for, once nothing in the order is wrong. */
+function draftFor(inputs: SheetsRequest['inputs'], order: PrintOrder, unit: Unit): Draft {
   const draft = draftOrRefuse(inputs, unit);
+  const problems = checkOrder(order, draft.pieces);
+  if (problems.length > 0) throw refusalFor('bad-input', problems, unit);
+  return draft;
+}
+
+async function pdfOf(draft: Draft, order: PrintOrder, unit: Unit): Promise<Uint8Array> {
   try {
-    return await tilesPdf(draft, presetOrder(paper, pieces), unit);
+    return await tilesPdf(draft, order, unit);
   } catch (error) {
     if (error instanceof SheetLimitError) throw refusalFor('not-drawable', [error.problem], unit);
     throw error;
@@ -41,7 +65,13 @@ export async function piecesOf({
   pieces: selection,
   ...inputs
 }: PrintRequest): Promise<Uint8Array> {
-  const draft = draftOrRefuse(inputs, unit);
-  const chosen = { ...draft, pieces: choosePieces(draft.pieces, selection) };
-  return Promise.resolve(new TextEncoder().encode(piecesSvg(chosen, unit)));
+  return svgOf(draftOrRefuse(inputs, unit), selection, unit);
+}
+
+async function svgOf(draft: Draft, chosen: PrintOrder['pieces'], unit: Unit): Promise<Uint8Array> {
+  const pieces =
+    typeof chosen === 'string'
+      ? choosePieces(draft.pieces, chosen)
+      : draft.pieces.filter(({ name }) => chosen.some(({ piece }) => piece === name));
+  return Promise.resolve(new TextEncoder().encode(piecesSvg({ ...draft, pieces }, unit)));
 }
