@@ -33,27 +33,33 @@ async function traced(devtools: CDPSession, act: () => Promise<void>): Promise<T
   return events;
 }
 
-/** Swings a handle to and fro about where it lay, a move every sixtieth of a second. */
-async function drag(page: Page, name: string): Promise<number> {
+/**
+ * Swings a handle to and fro about where it lay, a move every sixtieth of a second. The pointer is moved
+ * by the browser itself: Playwright's own mouse runs a script in the page at every move.
+ */
+async function drag(page: Page, devtools: CDPSession, name: string): Promise<number> {
   const box = await page.getByRole('slider', { name }).boundingBox();
   if (box === null) throw new Error(`There is no handle “${name}”.`);
-  const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
-  await page.mouse.move(x, y);
-  await page.mouse.down();
+  const [left, y] = [box.x + box.width / 2, box.y + box.height / 2];
+  const held = { button: 'left', buttons: 1, clickCount: 1 } as const;
+  const pointer = (type: 'mousePressed' | 'mouseMoved' | 'mouseReleased', x: number) =>
+    devtools.send('Input.dispatchMouseEvent', { type, x, y, ...held });
+  await pointer('mousePressed', left);
   const until = performance.now() + seconds * 1000;
   let moves = 0;
   while (performance.now() < until) {
-    await page.mouse.move(x + 14 * Math.sin(moves / 9), y);
+    await pointer('mouseMoved', left + 14 * Math.sin(moves / 9));
     moves += 1;
     await new Promise((done) => setTimeout(done, 1000 / 60));
   }
-  await page.mouse.up();
+  await pointer('mouseReleased', left);
   return moves;
 }
 
-/** Milliseconds the page's main thread worked for each frame it handed on. */
-function frameTimes(events: readonly TraceEvent[]): number[] {
-  const thread = ({ pid, tid }: TraceEvent): string => `${pid}/${tid}`;
+const thread = ({ pid, tid }: TraceEvent): string => `${pid}/${tid}`;
+
+/** Milliseconds the page's main thread worked for each frame it handed on, and the pictures drawn beside it. */
+function readFrames(events: readonly TraceEvent[]) {
   const commits = events.filter(({ name }) => name === 'Commit');
   const counts = new Map<string, TraceEvent[]>();
   for (const each of commits) counts.set(thread(each), [...(counts.get(thread(each)) ?? []), each]);
@@ -71,7 +77,10 @@ function frameTimes(events: readonly TraceEvent[]): number[] {
     while (frame < ends.length && (ends[frame] ?? 0) < ts) frame += 1;
     if (frame < ends.length) times[frame] = (times[frame] ?? 0) + (tdur ?? dur) / 1000;
   }
-  return times.slice(1);
+  const pictures = events.filter(
+    (each) => each.name === 'FireAnimationFrame' && thread(each) !== page[0],
+  );
+  return { times: times.slice(1).sort((a, b) => a - b), pictures: pictures.length };
 }
 
 /**
@@ -91,15 +100,16 @@ export async function benchDrag() {
     await devtools.send('Emulation.setCPUThrottlingRate', { rate: slowdown });
     let moves = 0;
     const events = await traced(devtools, async () => {
-      moves = await drag(page, 'Finished knee');
+      moves = await drag(page, devtools, 'Finished knee');
     });
-    const times = frameTimes(events).sort((a, b) => a - b);
+    const { times, pictures } = readFrames(events);
     const at = (share: number): number =>
       Math.round((times[Math.floor((times.length - 1) * share)] ?? 0) * 100) / 100;
     return {
       name: `main thread a frame while a handle is dragged ${seconds} s at ${slowdown}x CPU slowdown`,
       frames: times.length,
       moves,
+      pictures,
       median: at(0.5),
       p95: at(0.95),
       unit: 'ms',

@@ -1,27 +1,30 @@
 import type { Handle } from '#shared/drafting/construction.ts';
 import type { DraftInputs } from '#shared/engine/draft.ts';
-import type { Point } from '#shared/geometry/point.ts';
+import type { Unit } from '#shared/units/said.ts';
 
+import type { Colours } from './colours.ts';
 import type { Shifts } from './moved-pieces.ts';
+import type { Size, View } from './view.ts';
 
-/** What is to be drafted while a handle is held: the inputs as they stand, with its value moved. */
-export type DragOrder = {
+/** A handle taken into the hand: the inputs as they stand, and how the paper is looked at. */
+export type Hold = {
   readonly inputs: DraftInputs;
   readonly key: Handle['key'];
-  readonly value: number;
   readonly shifts: Shifts;
+  readonly unit: Unit;
+  readonly view: View;
+  readonly size: Size;
+  /** Pixels of the screen for one of the page. */
+  readonly density: number;
+  readonly colours: Colours;
 };
 
-/** The pieces in lines on the paper, as SVG writes them, and where the handle has come to lie. */
-export type DragPicture = {
-  readonly at: Point;
-  readonly cut: string;
-  readonly seams: string;
-  readonly darts: string;
-};
+/** What the page tells the drawing thread: once the canvas, at every grip the hold, at every move the value. */
+export type DragOrder =
+  | { readonly canvas: OffscreenCanvas }
+  /** The number tells this grip's pictures from those of the one before. */
+  | { readonly grip: number; readonly hold: Hold }
+  | { readonly value: number };
 
-/** What comes back; nothing to show where the value cannot be drawn. */
-export type DragReply = {
-  readonly value: number;
-  readonly picture: DragPicture | undefined;
-};
+/** The first picture of a grip is drawn. */
+export type DragReply = { readonly shown: number };

@@ -1,22 +1,32 @@
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
-import type { FinishedPiece } from '#shared/drafting/piece.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
-import { pathData } from '#shared/exports/path-data.ts';
-import type { Path } from '#shared/geometry/path.ts';
-import { add, type Point } from '#shared/geometry/point.ts';
+import { add } from '#shared/geometry/point.ts';
 
-import type { DragOrder, DragPicture } from './drag-order.ts';
+import { cleared, drawHandle, drawPieces } from './drag-drawing.ts';
+import type { DragOrder, DragReply, Hold } from './drag-order.ts';
 import { asCut } from './layout.ts';
 import { shifted } from './moved-pieces.ts';
 
 /*
- * Drafts in a thread of its own while a handle is dragged, so that the page has its frames for the
- * hand: what it sends back are lines ready to be shown.
+ * Drafts and draws in a thread of its own while a handle is dragged, so that the page has its frames
+ * for the hand: the canvas is this thread's, and the newest value is drawn once a frame.
  */
+
+let canvas: OffscreenCanvas | undefined;
+let held: { readonly grip: number; readonly hold: Hold } | undefined;
+let next: number | undefined;
+let awaited = false;
+let shown: number | undefined;
 
 addEventListener('message', (event: MessageEvent<unknown>) => {
   const order = orderOf(event.data);
-  postMessage({ value: order.value, picture: pictureOf(order) });
+  if ('canvas' in order) canvas = order.canvas;
+  else if ('hold' in order) [held, next] = [order, undefined];
+  else {
+    next = order.value;
+    if (!awaited) requestAnimationFrame(drawNext);
+    awaited = true;
+  }
 });
 
 /** Only the page of this very build sends orders. */
@@ -24,39 +34,31 @@ function orderOf(data: unknown): DragOrder {
   return data as DragOrder;
 }
 
-function pictureOf({ inputs, key, value, shifts }: DragOrder): DragPicture | undefined {
+function drawNext(): void {
+  awaited = false;
+  if (canvas === undefined || held === undefined || next === undefined) return;
+  const { grip, hold } = held;
+  if (!drawn(canvas, hold, next) || shown === grip) return;
+  const reply: DragReply = { shown: grip };
+  shown = grip;
+  postMessage(reply);
+}
+
+/** Draws the pieces at a value; false where they cannot be drawn, and the last ones stand. */
+function drawn(on: OffscreenCanvas, hold: Hold, value: number): boolean {
+  const { inputs, key, shifts } = hold;
   try {
-    const style = { ...inputs.style, [key]: value };
-    const draft = draftGown({ ...inputs, style });
+    const draft = draftGown({ ...inputs, style: { ...inputs.style, [key]: value } });
     const { placed } = shifted(asCut(draft.pieces), shifts);
     const handle = draft.handles.find((each) => each.key === key);
     const under = placed.find(({ piece }) => piece.name === handle?.piece);
-    if (handle === undefined || under === undefined) return undefined;
-    const drawn = (lines: (piece: FinishedPiece) => readonly Path[], closed = false): string =>
-      placed
-        .flatMap(({ piece, at }) => lines(piece).map((path) => pathData(laid(path, at), closed)))
-        .join('');
-    return {
-      at: add(handle.at, under.at),
-      cut: drawn(({ cutLine }) => [cutLine], true),
-      seams: drawn(({ edges }) => edges.map(({ path }) => path)),
-      darts: drawn(({ darts }) => darts.flatMap(({ centreLeg, sideLeg }) => [centreLeg, sideLeg])),
-    };
+    const pen = cleared(on, hold);
+    if (handle === undefined || under === undefined || pen === undefined) return false;
+    drawPieces(pen, placed, hold);
+    drawHandle(pen, add(handle.at, under.at), value, hold);
+    return true;
   } catch (error) {
-    if (error instanceof DraftingError) return undefined;
+    if (error instanceof DraftingError) return false;
     throw error;
   }
 }
-
-const laid = (path: Path, at: Point): Path =>
-  path.map((each) =>
-    each.kind === 'line'
-      ? { ...each, from: add(each.from, at), to: add(each.to, at) }
-      : {
-          ...each,
-          from: add(each.from, at),
-          c1: add(each.c1, at),
-          c2: add(each.c2, at),
-          to: add(each.to, at),
-        },
-  );

@@ -1,4 +1,4 @@
-import { useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
+import { useState, type KeyboardEvent, type PointerEvent } from 'react';
 
 import type { Handle } from '#shared/drafting/construction.ts';
 import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
@@ -10,6 +10,7 @@ import type { Unit } from '#shared/units/said.ts';
 
 import type { Layout } from './layout.ts';
 import { toScreen, type View } from './view.ts';
+import { whileHeld } from './while-held.ts';
 
 /** One press of an arrow key, and with shift, millimetres. */
 const nudges: Record<Unit, { readonly small: number; readonly large: number }> = {
@@ -28,10 +29,8 @@ type HandlesProps = {
   readonly onMove: (key: Handle['key'], value: number) => void;
   /** The hand takes a handle, draws it to a value, and lets it go there. */
   readonly onHold: (key: Handle['key']) => void;
-  readonly onDrag: (key: Handle['key'], value: number) => void;
+  readonly onDrag: (value: number) => void;
   readonly onDrop: () => void;
-  /** Whether something else shows where they are. */
-  readonly hidden: boolean;
   /** The hand leaves a handle: what comes next is another change. */
   readonly onRelease: () => void;
 };
@@ -69,7 +68,6 @@ const Lozenge = ({
   layout,
   view,
   unit,
-  hidden,
   onMove,
   onHold,
   onDrag,
@@ -77,10 +75,6 @@ const Lozenge = ({
   onRelease,
 }: LozengeProps) => {
   const [near, setNear] = useState(false);
-  const from = useRef<{ readonly x: number; readonly y: number; readonly value: number }>(
-    undefined,
-  );
-  const drawnTo = useRef<number>(undefined);
   const placed = layout.placed.find(({ piece }) => piece.name === handle.piece);
   if (placed === undefined) return null;
   const point = toScreen(view, add(handle.at, placed.at));
@@ -101,28 +95,28 @@ const Lozenge = ({
   };
   const grab = (event: PointerEvent<SVGGElement>) => {
     event.stopPropagation();
-    event.currentTarget.setPointerCapture(event.pointerId);
-    event.currentTarget.focus();
-    from.current = { x: event.clientX, y: event.clientY, value };
-    onHold(handle.key);
-  };
-  const drag = (event: PointerEvent) => {
-    event.stopPropagation();
-    if (from.current === undefined) return;
-    const pixels = subtract({ x: event.clientX, y: event.clientY }, from.current);
-    const perPixel = handle.perMillimetre / view.scale;
+    const { currentTarget, pointerId, pointerType } = event;
+    currentTarget.setPointerCapture(pointerId);
+    currentTarget.focus();
+    const from = { x: event.clientX, y: event.clientY };
     // Seen from far off a pixel is a long way: then the lozenge follows slower than the hand.
-    const most = event.pointerType === 'touch' ? finest.touch : finest.pointer;
-    const grown = dot(pixels, handle.along) * Math.min(most, Math.max(-most, perPixel));
-    drawnTo.current = within(Math.round((from.current.value + grown) / small) * small);
-    onDrag(handle.key, drawnTo.current);
-  };
-  const drop = () => {
-    from.current = undefined;
-    if (drawnTo.current !== undefined) onMove(handle.key, drawnTo.current);
-    drawnTo.current = undefined;
-    onDrop();
-    onRelease();
+    const most = pointerType === 'touch' ? finest.touch : finest.pointer;
+    const perPixel = Math.min(most, Math.max(-most, handle.perMillimetre / view.scale));
+    let drawnTo: number | undefined;
+    onHold(handle.key);
+    whileHeld(currentTarget, {
+      move: (to) => {
+        const grown = dot(subtract(to, from), handle.along) * perPixel;
+        const next = within(Math.round((value + grown) / small) * small);
+        if (next !== drawnTo) onDrag(next);
+        drawnTo = next;
+      },
+      drop: () => {
+        if (drawnTo !== undefined) onMove(handle.key, drawnTo);
+        onDrop();
+        onRelease();
+      },
+    });
   };
 
   return (
@@ -136,13 +130,10 @@ const Lozenge = ({
       aria-valuetext={formatWithUnit(value, unit)}
       data-handle={handle.key}
       transform={`translate(${at.x} ${at.y})`}
-      className={`pointer-events-auto cursor-grab touch-none outline-none focus-visible:[&_.ring]:opacity-100 ${hidden ? 'opacity-0' : ''}`}
+      className="pointer-events-auto cursor-grab touch-none outline-none group-data-dragging:opacity-0 focus-visible:[&_.ring]:opacity-100"
       onKeyDown={press}
       onKeyUp={(event) => event.key.startsWith('Arrow') && onRelease()}
       onPointerDown={grab}
-      onPointerMove={drag}
-      onPointerUp={drop}
-      onPointerCancel={drop}
       onPointerEnter={() => setNear(true)}
       onPointerLeave={() => setNear(false)}
       onFocus={() => setNear(true)}

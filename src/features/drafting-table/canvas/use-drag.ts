@@ -1,65 +1,60 @@
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useMemo, useRef, type RefObject } from 'react';
 
-import type { Handle } from '#shared/drafting/construction.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { DragOrder, DragReply, Hold } from './drag-order.ts';
 
-import type { DragOrder, DragPicture, DragReply } from './drag-order.ts';
-import type { Shifts } from './moved-pieces.ts';
-
-/** What is shown while a handle is dragged. */
-export type Dragged = { readonly value: number; readonly picture: DragPicture };
+export type Drag = {
+  /** The hand takes a handle, draws it to a value, and lets it go. */
+  readonly hold: (hold: Hold) => void;
+  readonly to: (value: number) => void;
+  readonly letGo: () => void;
+};
 
 /**
- * Has the pieces drafted in a thread of their own while a handle is held: one value at a time, the
- * newest next. What it draws is shown by whoever listens, past the table, which hears of the last value.
+ * Has the pieces drafted and drawn on a canvas by a thread of their own while a handle is held; the page
+ * hears of the first picture, the table of the last value. While the pieces are shown there the frame
+ * carries `data-dragging`, and what lies under them hides. A browser that cannot lend a canvas to a
+ * thread shows the pieces when the handle is let go.
  */
-export function useDrag(draft: Draft, shifts: Shifts) {
-  const [held, setHeld] = useState<Handle['key']>();
+export function useDrag(
+  canvas: RefObject<HTMLCanvasElement | null>,
+  frame: RefObject<HTMLElement | null>,
+): Drag {
   const worker = useRef<Worker>(undefined);
-  const next = useRef<DragOrder>(undefined);
-  const busy = useRef(false);
-  const listener = useRef<(dragged: Dragged) => void>(undefined);
   useEffect(() => () => worker.current?.terminate(), []);
 
-  const send = () => {
-    const order = next.current;
-    if (busy.current || order === undefined || worker.current === undefined) return;
-    next.current = undefined;
-    busy.current = true;
-    worker.current.postMessage(order);
-  };
-  const start = () => {
-    const begun = new Worker(new URL('./drag-worker.ts', import.meta.url), { type: 'module' });
-    begun.addEventListener('message', (event: MessageEvent<unknown>) => {
-      const { value, picture } = replyOf(event.data);
-      busy.current = false;
-      if (picture !== undefined) listener.current?.({ value, picture });
-      send();
-    });
-    worker.current = begun;
-  };
-  return {
-    held,
-    /** The hand takes a handle. */
-    hold: (key: Handle['key']) => {
-      if (worker.current === undefined) start();
-      setHeld(key);
-    },
-    to: (key: Handle['key'], value: number) => {
-      next.current = { inputs: draft.inputs, key, value, shifts };
-      send();
-    },
-    letGo: () => {
-      next.current = undefined;
-      setHeld(undefined);
-    },
-    listen: (to: (dragged: Dragged) => void) => {
-      listener.current = to;
-      return () => {
-        listener.current = undefined;
-      };
-    },
-  };
+  return useMemo(() => {
+    let grip = 0;
+    let held = false;
+    const tell = (order: DragOrder, lent: Transferable[] = []) =>
+      worker.current?.postMessage(order, lent);
+    const start = (lent: HTMLCanvasElement) => {
+      const begun = new Worker(new URL('./drag-worker.ts', import.meta.url), { type: 'module' });
+      begun.addEventListener('message', (event: MessageEvent<unknown>) => {
+        if (held && replyOf(event.data).shown === grip) {
+          frame.current?.setAttribute('data-dragging', '');
+        }
+      });
+      worker.current = begun;
+      const surface = lent.transferControlToOffscreen();
+      tell({ canvas: surface }, [surface]);
+    };
+    return {
+      hold: (hold) => {
+        held = true;
+        grip += 1;
+        const lent = canvas.current;
+        if (lent !== null && worker.current === undefined && 'transferControlToOffscreen' in lent) {
+          start(lent);
+        }
+        tell({ grip, hold });
+      },
+      to: (value) => tell({ value }),
+      letGo: () => {
+        held = false;
+        frame.current?.removeAttribute('data-dragging');
+      },
+    };
+  }, [canvas, frame]);
 }
 
 /** Only our own worker answers. */

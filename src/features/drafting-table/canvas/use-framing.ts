@@ -12,10 +12,9 @@ type Framing = { readonly key: string } & (
  * How the drawing is looked at: a box that stays fitted as the window changes, until the reader moves
  * or zooms by hand. A new set of pieces, or pieces of quite another size, is fitted again.
  */
-export function useFraming(key: string, box: Box, size: Size, still: boolean) {
+export function useFraming(key: string, box: Box, size: Size) {
   const [framing, setFraming] = useState<Framing>({ key, box, place: 'corner' });
-  const outgrown =
-    'place' in framing && framing.place === 'corner' && still && outgrows(box, framing.box);
+  const outgrown = 'place' in framing && framing.place === 'corner' && outgrows(box, framing.box);
   if (framing.key !== key || outgrown) setFraming({ key, box, place: 'corner' });
   const view = useMemo(() => seen(framing, size), [framing, size]);
   return {

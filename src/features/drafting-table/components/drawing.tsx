@@ -1,12 +1,13 @@
 import { memo, useMemo, useRef, useState, type Dispatch } from 'react';
 
+import type { Handle } from '#shared/drafting/construction.ts';
 import type { Draft } from '#shared/engine/draft.ts';
 import { scale, type Point } from '#shared/geometry/point.ts';
 
 import { useSize } from '../../../lib/use-size.ts';
 import { useTheme } from '../../../lib/use-theme.ts';
 import type { BenchAction } from '../bench.ts';
-import { DragView } from '../canvas/drag-view.tsx';
+import { readColours } from '../canvas/colours.ts';
 import { Handles } from '../canvas/handles.tsx';
 import { asCut, asDrafted } from '../canvas/layout.ts';
 import { Lettering } from '../canvas/lettering.tsx';
@@ -49,7 +50,8 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
   const { draft, state, place, dispatch, onPrint } = props;
   const frame = useRef<HTMLDivElement>(null);
   const canvas = useRef<HTMLCanvasElement>(null);
-  const [shown, setShown] = useState(false);
+  const dragged = useRef<HTMLCanvasElement>(null);
+  const drag = useDrag(dragged, frame);
   const [chosenTool, setTool] = useState<Tool>('look');
   const [piece, setPiece] = useState<string>();
   const size = useSize(frame);
@@ -66,8 +68,7 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
   const { layout } = moved;
   const key = `${String(drafting)} ${pieces.map((each) => each.name).join()}`;
   // Framed by where the pieces lay: one that is carried off does not carry the view along.
-  const drag = useDrag(draft, moved.shifts);
-  const framing = useFraming(key, asLaid.box, size, drag.held === undefined);
+  const framing = useFraming(key, asLaid.box, size);
   const { view } = framing;
   const tape = useTape(layout);
 
@@ -127,6 +128,19 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
     },
   }[tool];
 
+  const hold = (handle: Handle['key']) => {
+    if (frame.current === null) return;
+    drag.hold({
+      inputs: draft.inputs,
+      key: handle,
+      shifts: moved.shifts,
+      unit: state.unit,
+      view,
+      size,
+      density: devicePixelRatio,
+      colours: readColours(frame.current),
+    });
+  };
   const within = (touch: boolean) => (touch ? reach.touch : reach.pointer) / view.scale;
   const grabbed = useRef<string>(undefined);
   const gestures = useGestures(frame, {
@@ -174,18 +188,14 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
       >
         <canvas
           ref={canvas}
-          className={`absolute inset-0 h-full w-full ${shown ? 'invisible' : ''} ${state.drawn.fresh ? '' : 'opacity-50'}`}
+          className={`absolute inset-0 h-full w-full group-data-dragging:invisible ${state.drawn.fresh ? '' : 'opacity-50'}`}
           aria-hidden="true"
         />
-        {drag.held !== undefined && (
-          <DragView
-            held={drag.held}
-            view={view}
-            unit={state.unit}
-            listen={drag.listen}
-            onShown={() => setShown(true)}
-          />
-        )}
+        <canvas
+          ref={dragged}
+          className="pointer-events-none invisible absolute inset-0 h-full w-full will-change-transform group-data-dragging:visible"
+          aria-hidden="true"
+        />
         <svg className="pointer-events-none absolute inset-0 h-full w-full">
           <Lettering draft={draft} layout={layout} view={view} size={size} named={!drafting} />
           {step !== undefined && <StepPoints step={step} layout={layout} view={view} />}
@@ -198,13 +208,9 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
               onMove={(handle, value) =>
                 dispatch({ type: 'moved', field: `style.${handle}`, value })
               }
-              hidden={shown}
-              onHold={drag.hold}
+              onHold={hold}
               onDrag={drag.to}
-              onDrop={() => {
-                drag.letGo();
-                setShown(false);
-              }}
+              onDrop={drag.letGo}
               onRelease={() => dispatch({ type: 'released' })}
             />
           )}
