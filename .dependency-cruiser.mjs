@@ -10,7 +10,9 @@ const sharedArrows = {
   narration: ['drafting', 'geometry', 'units'],
   engine: ['drafts', 'finishing', 'proof', 'narration', 'drafting', 'geometry', 'body', 'units'],
   sheets: ['engine', 'drafting', 'geometry', 'units'],
+  lesson: ['sheets', 'engine', 'drafting', 'geometry', 'body', 'units'],
   exports: [
+    'lesson',
     'compare',
     'regrade',
     'sheets',

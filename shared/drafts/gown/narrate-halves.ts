@@ -1,4 +1,5 @@
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
+import { worked } from '../../drafting/quantity.ts';
 import { line } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
 import { profilePath, steepest, xAt } from '../../geometry/profile.ts';
@@ -41,7 +42,7 @@ export function narrateHalf(
   }
   narrateSuppression(table, paper, half);
   narrateSide(paper, half);
-  narrateContour(paper, half, contour, moved);
+  narrateContour(paper, half, quarters, contour, moved);
   narrateWaistSeam(paper, half, quarters);
   return paper;
 }
@@ -127,8 +128,14 @@ function narrateSide(paper: PartTable, half: Half): void {
   );
 }
 
-function narrateContour(paper: PartTable, half: Half, contour: Contour, moved: number): void {
-  const { side, heights, quarters } = half;
+function narrateContour(
+  paper: PartTable,
+  half: Half,
+  quarters: Quarters,
+  contour: Contour,
+  moved: number,
+): void {
+  const { side, heights } = half;
   const shared =
     moved > leastSaid
       ? side === 'front'
@@ -145,7 +152,7 @@ function narrateContour(paper: PartTable, half: Half, contour: Contour, moved: n
       : said`the opening at the top edge takes ${mm(contour.opening)}`;
   paper.draw(
     'Above the bust',
-    said`Bust quarter less upper chest quarter leaves ${mm(contour.reduction, ['bustGirth', 'upperChestGirth'])}: ${lean}, ${opening}.${shared}`,
+    said`Bust quarter ${mm(quarters.bust.value, quarters.bust.measures)} less upper chest quarter (${worked(quarters.chest)}) leaves ${mm(contour.reduction, ['bustGirth', 'upperChestGirth'])}: ${lean}, ${opening}.${shared}`,
     {
       why: said`This is the only amount taken out above the bust: with it the top edge lies on the upper chest and cannot gape.`,
       points: { 'side-chest': point(xAt(half.line, heights.underarm), heights.underarm) },
@@ -153,7 +160,7 @@ function narrateContour(paper: PartTable, half: Half, contour: Contour, moved: n
         [
           line(
             point(xAt(half.line, heights.underarm), heights.underarm),
-            point(quarters.bust, heights.underarm),
+            point(quarters.bust.value, heights.underarm),
           ),
         ],
         profilePath(half.line, heights.underarm, heights.bust),

@@ -1,6 +1,8 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
+import { measureGuide } from '../../body/measure-guide.ts';
 import type { PartTable } from '../../drafting/drafting-table.ts';
+import { taken } from '../../drafting/quantity.ts';
 import { type Said, mm, said } from '../../units/said.ts';
 
 /** The hip joint lies at this part of waist to hip under the waist [named estimate, method section 6]. */
@@ -35,12 +37,20 @@ export function walking(
     kneeSeam - joint,
   );
   const caution = step < easyStep;
-  const sentence = said`Finished knee ${mm(kneeFinished)} lets her step about ${mm(step)}.${
+  const of = ['kneeGirth', 'waistToHip', 'waistToFloor'] as const;
+  const sentence = said`Finished knee ${mm(kneeFinished)} lets her step about ${mm(step, of)}.${
     caution ? ' Stairs, kerbs and getting into a car need care: try it at the fitting.' : ''
   }`;
-  paper.draw('Walking', sentence, {
-    why: said`The knees open as the foot goes forward, and the seam must reach round both. An unhurried step is about ${mm(650)}. Between hip and knee seam the side falls in: tape round both thighs together there, seated and standing, against the toile.`,
-    measures: ['kneeGirth', 'waistToHip', 'waistToFloor'],
-  });
+  const [knee, waistToHip, waistToFloor] = of.map(
+    (key) => taken(measureGuide[key].label, key, body.measures[key], key in body.estimated).how,
+  );
+  paper.draw(
+    'Walking',
+    said`${knee ?? []}; ${waistToHip ?? []}; ${waistToFloor ?? []}. ${sentence}`,
+    {
+      why: said`The knees open as the foot goes forward, and the seam must reach round both. An unhurried step is about ${mm(650)}. Between hip and knee seam the side falls in: tape round both thighs together there, seated and standing, against the toile.`,
+      measures: of,
+    },
+  );
   return { step, caution, said: sentence };
 }
