@@ -29,18 +29,19 @@ export type FlarePlan = {
   readonly gores: number;
 };
 
-/** Divides a half of the flare until each gore fits the cloth and is at most a half circle. */
+/** Divides a half of the flare until each gore fits the cloth and is at most a half circle; `from` so many on. */
 export function planFlare(
   seamHalf: number,
   inner: number,
   depth: number,
   clothWidth: number,
+  from = 1,
 ): FlarePlan {
   const angle = seamHalf / inner;
   const outer = inner + depth;
   const fits = (halfGore: number): boolean =>
     halfGore <= Math.PI / 2 + 1e-9 && 2 * outer * Math.sin(halfGore) <= clothWidth;
-  let gores = 1;
+  let gores = from;
   while (!fits(angle / (2 * gores - 1)) && gores < 12) gores += 1;
   return { inner, outer, angle, halfGore: angle / (2 * gores - 1), gores };
 }
