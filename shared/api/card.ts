@@ -28,11 +28,17 @@ export const overruledWith = <R extends z.ZodType<string>>(reason: R) =>
       z.strictObject({
         code: z.string().min(1).max(60).describe('Code of the warning, such as unlikely-girth.'),
         field: z.string().max(60).describe('Field it stands by, such as card.waistGirth.'),
-        with: z.array(z.string().max(60)).max(4).optional().describe('The other fields it names.'),
+        with: z
+          .array(z.string().max(60))
+          .max(4)
+          .readonly()
+          .optional()
+          .describe('The other fields it names.'),
         reason: reason.describe('Why the measures are kept all the same, at most 200 letters.'),
       }),
     )
     .max(mostOverruled)
+    .readonly()
     .optional()
     .describe('Warnings the maker has looked at and keeps.');
 

@@ -1,0 +1,123 @@
+import { balanceLevels, type BalanceLevel, type HouseRules } from './house-rules.ts';
+
+type Allowance = keyof HouseRules['allowance'];
+type Single = 'cupShare' | 'sideShare' | 'dartWidest' | 'dartClearance';
+
+/** Keys of the house rules' figures as the contract writes them. */
+export type HouseRuleKey = `balance.${BalanceLevel}` | Single | `allowance.${Allowance}`;
+
+/** One figure of the house rules: its name, what it does, and its bounds (both allowed). */
+export type HouseRuleFigure = {
+  readonly key: HouseRuleKey;
+  readonly label: string;
+  /** One sentence beside the field. */
+  readonly hint: string;
+  readonly min: number;
+  readonly max: number;
+  /** A share of one and no length. */
+  readonly share?: true;
+  readonly value: (rules: HouseRules) => number;
+  /** The rules with another value for it. */
+  readonly put: (rules: HouseRules, value: number) => HouseRules;
+};
+
+const levelWords: { readonly [L in BalanceLevel]: string } = {
+  chest: 'chest',
+  bust: 'bust',
+  underbust: 'under-bust',
+  waist: 'waist',
+  topHip: 'top hip',
+  hip: 'hip',
+  knee: 'knee',
+};
+
+const balanceAt = (level: BalanceLevel): HouseRuleFigure => ({
+  key: `balance.${level}`,
+  label: `Balance at the ${levelWords[level]}`,
+  hint: 'What the front quarter has more than the plain one, and the back one less.',
+  min: -30,
+  max: 30,
+  value: (rules) => rules.balance[level],
+  put: (rules, value) => ({ ...rules, balance: { ...rules.balance, [level]: value } }),
+});
+
+const single = (
+  key: Single,
+  figure: Pick<HouseRuleFigure, 'label' | 'hint' | 'min' | 'max' | 'share'>,
+): HouseRuleFigure => ({
+  key,
+  ...figure,
+  value: (rules) => rules[key],
+  put: (rules, value) => ({ ...rules, [key]: value }),
+});
+
+const allowanceFor = (
+  kind: Allowance,
+  figure: Pick<HouseRuleFigure, 'label' | 'hint' | 'min' | 'max'>,
+): HouseRuleFigure => ({
+  key: `allowance.${kind}`,
+  ...figure,
+  value: (rules) => rules.allowance[kind],
+  put: (rules, value) => ({ ...rules, allowance: { ...rules.allowance, [kind]: value } }),
+});
+
+/** Every figure of the house rules. Bounds: common practice, no source; a let-out allowance may be wide, an enclosed edge may not. */
+export const houseRuleFigures: readonly HouseRuleFigure[] = [
+  ...balanceLevels.map(balanceAt),
+  single('cupShare', {
+    label: 'Share of a full cup',
+    hint: 'Part of the bust’s fullness beyond a middle cup that the front gains over the back.',
+    min: 0,
+    max: 0.5,
+    share: true,
+  }),
+  single('sideShare', {
+    label: 'Share of the side seam',
+    hint: 'Part of what goes between bust, waist and hip that the side seam takes; darts take the rest.',
+    min: 0,
+    max: 1,
+    share: true,
+  }),
+  single('dartWidest', {
+    label: 'Widest dart',
+    hint: 'A wider intake is sewn in two darts.',
+    min: 15,
+    max: 60,
+  }),
+  single('dartClearance', {
+    label: 'Dart clearance',
+    hint: 'Darts stop this short of the bust point.',
+    min: 10,
+    max: 40,
+  }),
+  allowanceFor('seam', {
+    label: 'Seam allowance',
+    hint: 'Outside every seam that has no allowance of its own.',
+    min: 6,
+    max: 30,
+  }),
+  allowanceFor('side', {
+    label: 'Side seam allowance',
+    hint: 'Wide enough that the gown can be let out.',
+    min: 6,
+    max: 50,
+  }),
+  allowanceFor('zip', {
+    label: 'Zip allowance',
+    hint: 'Where the zip is set in, never counted in a girth.',
+    min: 10,
+    max: 50,
+  }),
+  allowanceFor('top', {
+    label: 'Top edge allowance',
+    hint: 'Enclosed by lining or facing.',
+    min: 5,
+    max: 20,
+  }),
+  allowanceFor('hem', {
+    label: 'Hem allowance',
+    hint: 'What is turned up; a circular hem takes little.',
+    min: 6,
+    max: 60,
+  }),
+];
