@@ -1,9 +1,9 @@
 import type { Draft } from '#shared/engine/draft.ts';
 import { levelTitles } from '#shared/exports/level-titles.ts';
 
+import { rodWidth } from '../../../ui/rod.tsx';
 import type { Layout } from './layout.ts';
 import { pieceLabels, type PieceLabel } from './piece-labels.ts';
-import { rodWidth } from './rod.tsx';
 import { toScreen, type Size, type View } from './view.ts';
 
 type LetteringProps = {

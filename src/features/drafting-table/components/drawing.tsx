@@ -6,6 +6,7 @@ import { scale, type Point } from '#shared/geometry/point.ts';
 
 import { useSize } from '../../../lib/use-size.ts';
 import { useTheme } from '../../../lib/use-theme.ts';
+import { Rod } from '../../../ui/rod.tsx';
 import type { BenchAction } from '../bench.ts';
 import { readColours } from '../canvas/colours.ts';
 import { Handles } from '../canvas/handles.tsx';
@@ -13,7 +14,6 @@ import { asCut, asDrafted } from '../canvas/layout.ts';
 import { Lettering } from '../canvas/lettering.tsx';
 import { litLines } from '../canvas/lit-lines.ts';
 import { pieceAt } from '../canvas/moved-pieces.ts';
-import { Rod } from '../canvas/rod.tsx';
 import { StepPoints } from '../canvas/step-points.tsx';
 import { TapeLine } from '../canvas/tape-line.tsx';
 import { useDrag } from '../canvas/use-drag.ts';

@@ -3,12 +3,16 @@ import { memo } from 'react';
 import type { Unit } from '#shared/units/said.ts';
 
 import { rodMarks, type RodMark } from './rod-marks.ts';
-import type { Size, View } from './view.ts';
 
 /** Width of the rod, pixels. */
 export const rodWidth = 26;
 
-type RodProps = { readonly view: View; readonly size: Size; readonly unit: Unit };
+type RodProps = {
+  /** Pixels a millimetre, and where the drawing's origin lies. */
+  readonly view: { readonly scale: number; readonly x: number; readonly y: number };
+  readonly size: { readonly width: number; readonly height: number };
+  readonly unit: Unit;
+};
 
 /** The brass measuring rod along the top and left edge, in the reader's unit. */
 export const Rod = memo(function Rod({ view, size, unit }: RodProps) {

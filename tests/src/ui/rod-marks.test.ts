@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 
-import { rodMarks } from '../../../../../src/features/drafting-table/canvas/rod-marks.ts';
+import { rodMarks } from '../../../src/ui/rod-marks.ts';
 
 describe.each(['in', 'cm'] as const)('the rod in %s', (unit) => {
   test.each([0.05, 0.2, 0.7, 2, 8])('is true to the drawing at %d pixels a millimetre', (scale) => {
