@@ -11,7 +11,7 @@ export const balanceLevels = [
 export type BalanceLevel = (typeof balanceLevels)[number];
 
 /** What the edge of a piece becomes, which decides its allowance. */
-export const edgeKinds = ['seam', 'side', 'zip', 'top', 'hem', 'fold', 'mouth'] as const;
+export const edgeKinds = ['seam', 'side', 'zip', 'top', 'hem', 'armhole', 'fold', 'mouth'] as const;
 export type EdgeKind = (typeof edgeKinds)[number];
 
 /** How many darts or gores a half has, for each half that is not to decide by its own measures. */
@@ -40,3 +40,9 @@ export type HouseRules = {
   /** Numbers settled beforehand, as the sizes of a nest have them from the largest; absent, each draft decides. */
   readonly counts?: { readonly darts?: Counts<1 | 2>; readonly gores?: Counts<number> };
 };
+
+/** Cloth beyond the seam line by kind of edge, mm: an armhole edge is enclosed like the top edge it carries on. */
+export const allowanceFor = (
+  kind: Exclude<EdgeKind, 'fold' | 'mouth'>,
+  { allowance }: HouseRules,
+): number => allowance[kind === 'armhole' ? 'top' : kind];

@@ -10,6 +10,7 @@ import type { HouseRules } from '../drafting/house-rules.ts';
 import { drawGown } from '../drafts/gown/draw-gown.ts';
 import { gownLevels } from '../drafts/gown/levels.ts';
 import { resolveStyle } from '../drafts/gown/resolve-style.ts';
+import type { GownStyle } from '../drafts/gown/style-card.ts';
 import { checkStyle } from '../drafts/gown/style-check.ts';
 import { finishPiece } from '../finishing/finish-piece.ts';
 import { prove } from '../proof/prove.ts';
@@ -30,7 +31,8 @@ function refuse(problems: readonly Problem[]): void {
 }
 
 /** The body as drawn: where nobody measured the waist seam, its girth is the one the draft came to. */
-function withDrawnSeam(body: Body, { wanted }: Construction): Body {
+function withDrawnSeam(body: Body, { wanted }: Construction, { waistSeam }: GownStyle): Body {
+  if (waistSeam !== 'raised') return body;
   const seam = wanted.find(({ level }) => level === 'waist-seam')?.body;
   if (seam === undefined || !('waistSeamGirth' in body.estimated)) return body;
   return { ...body, measures: { ...body.measures, waistSeamGirth: seam } };
@@ -73,7 +75,7 @@ export function draftGown(inputs: DraftInputs): Draft {
     engine: engineVersion,
     number,
     inputs,
-    body: withDrawnSeam(body, drawn.construction),
+    body: withDrawnSeam(body, drawn.construction, resolved),
     bodyLevels: levels,
     style: resolved,
     levels: drawn.levels,

@@ -1,4 +1,4 @@
-import type { EdgeKind, HouseRules } from '../drafting/house-rules.ts';
+import { type EdgeKind, type HouseRules, allowanceFor } from '../drafting/house-rules.ts';
 import type { Edge } from '../drafting/piece.ts';
 
 /**
@@ -6,7 +6,7 @@ import type { Edge } from '../drafting/piece.ts';
  * own: its cap follows the edges beside it (`dart-cap.ts`).
  */
 export function allowanceOf(kind: EdgeKind, rules: HouseRules): number {
-  return kind === 'fold' || kind === 'mouth' ? 0 : rules.allowance[kind];
+  return kind === 'fold' || kind === 'mouth' ? 0 : allowanceFor(kind, rules);
 }
 
 /** First words of the names of seams that run round the body and are sewn after the long ones. */

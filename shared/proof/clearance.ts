@@ -1,5 +1,5 @@
 import type { Edge, FinishedPiece } from '../drafting/piece.ts';
-import type { HouseRules } from '../drafting/house-rules.ts';
+import { type HouseRules, allowanceFor } from '../drafting/house-rules.ts';
 import { endOf, endTangent, pointAt, startOf, startTangent, tangentAt } from '../geometry/curve.ts';
 import {
   type Point,
@@ -27,7 +27,7 @@ export const clearBound = 0.2;
 /** What the house rules ask beyond an edge; a fold is cut on the line, a mouth follows its cap. */
 export const allowanceOf = (edge: Edge, rules: HouseRules): number | undefined => {
   if (edge.kind === 'mouth' || edge.open === true) return undefined;
-  return edge.kind === 'fold' ? 0 : rules.allowance[edge.kind];
+  return edge.kind === 'fold' ? 0 : allowanceFor(edge.kind, rules);
 };
 
 /** Where the cutting line stands off an edge least rightly: measured square to the seam line. */

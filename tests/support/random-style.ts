@@ -46,7 +46,7 @@ export const styleDraws: fc.Arbitrary<StyleDraws> = fc.record({
     shaping: fc.constantFrom(...styleChoices.shaping, undefined),
     waistSeam: fc.constantFrom(...styleChoices.waistSeam, undefined),
     flare: fc.constantFrom(...styleChoices.flare, undefined),
-    sleeve: fc.constantFrom('none' as const, undefined),
+    sleeve: fc.constantFrom(...styleChoices.sleeve, undefined),
     closure: fc.constantFrom(...styleChoices.closure, undefined),
     facing: fc.constantFrom(...styleChoices.facing, undefined),
     lining: fc.constantFrom(...styleChoices.lining, undefined),

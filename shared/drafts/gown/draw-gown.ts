@@ -19,7 +19,9 @@ import type { SideHeights } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
 import { seamUnderBust } from './style-limits.ts';
 import { topPartner } from './top.ts';
+import { topNames } from './top-names.ts';
 import { type Walking, walking } from './walking.ts';
+import { wholeSkirt } from './whole.ts';
 
 /** A gown drawn: pieces without allowances, and what proof and screens need to know of them. */
 export type DrawnGown = {
@@ -30,9 +32,11 @@ export type DrawnGown = {
   readonly walking: Walking;
 };
 
-/** Height of the waist seam: raised by the style's choice, but clear of the under-bust. */
+/** Height of the waist seam: raised by the style's choice but clear of the under-bust, or at the waist. */
 function waistSeamLevel(table: DraftingTable, levels: BodyLevels, style: GownStyle): number {
   const paper = table.part('Levels', 'both');
+  // A seam in the waist itself, or none at all: what the seam would hold is held at the waist.
+  if (style.waistSeam !== 'raised') return levels.waist;
   const raised = levels.waist - style.waistSeamRise;
   const highest = levels.underbust + seamUnderBust;
   return raised > highest + 1e-6
@@ -58,8 +62,9 @@ export function drawGown(
     .part('Levels', 'both')
     .level(
       'Knee seam',
-      said`${mm(style.kneeLevel)} above the knee`,
+      style.kneeLevel === 0 ? said`At the knee` : said`${mm(style.kneeLevel)} above the knee`,
       bodyLevels.knee - style.kneeLevel,
+      [],
       ['waistToKnee'],
     );
   const levels: SideHeights = { ...bodyLevels, seam, knee };
@@ -67,15 +72,20 @@ export function drawGown(
     front: finishedQuarters('front', body, style, rules, bodyLevels, seam),
     back: finishedQuarters('back', body, style, rules, bodyLevels, seam),
   };
-  const pair = pairOpened({ quarters, levels, style, rules, frontAxis: bodyLevels.bustPointX });
+  const acrossOf = halfAcross(body);
+  const pair = pairOpened(
+    { quarters, levels, style, rules, frontAxis: bodyLevels.bustPointX },
+    acrossOf.back,
+  );
   const depth = style.flareLength;
   const inner = flareRadius(style.kneeFinished, style.flareFraction);
+  const gores = rules.counts?.gores;
   const flare = {
-    front: planFlare(quarters.front.knee.value, inner, depth, style.clothWidth),
-    back: planFlare(quarters.back.knee.value, inner, depth, style.clothWidth),
+    front: planFlare(quarters.front.knee.value, inner, depth, style.clothWidth, gores?.front),
+    back: planFlare(quarters.back.knee.value, inner, depth, style.clothWidth, gores?.back),
   };
   const sides = (['front', 'back'] as const).map((side) =>
-    drawSide(table, side, { pair, quarters, flare, style, rules }),
+    drawSide(table, side, { pair, quarters, flare, style, rules, acrossOf }),
   );
   warnOfShift(table, pair);
   const { front, back } = pair;
@@ -111,11 +121,25 @@ export function drawGown(
   };
 }
 
+/** Half the width of the body where a gown off the shoulder ends, front and back. */
+type Across = { readonly front: number; readonly back: number };
+
+const halfAcross = ({ measures }: Body): Across => ({
+  front: measures.acrossFront / 2,
+  back: measures.acrossBack / 2,
+});
+
 /** Opens the back above the bust where the top line then crosses high enough; else the front takes it. */
-function pairOpened(inputs: Omit<PairInputs, 'backOpens'>): PairedHalves {
+function pairOpened(inputs: Omit<PairInputs, 'backOpens'>, halfAcrossBack: number): PairedHalves {
   const opened = pairHalves({ ...inputs, backOpens: true });
   const { opening } = opened.contour.back;
-  if (opening === 0 || backEdgeIsHigh(opened, opening, inputs.style, inputs.rules)) return opened;
+  const { back: half, front } = opened;
+  const { style, rules } = inputs;
+  if (
+    opening === 0 ||
+    backEdgeIsHigh({ half, front, opening, halfAcross: halfAcrossBack, style, rules })
+  )
+    return opened;
   return pairHalves({ ...inputs, backOpens: false });
 }
 
@@ -130,6 +154,7 @@ type Shared = {
   readonly flare: { readonly front: FlarePlan; readonly back: FlarePlan };
   readonly style: GownStyle;
   readonly rules: HouseRules;
+  readonly acrossOf: Across;
 };
 
 function drawSide(
@@ -141,10 +166,22 @@ function drawSide(
   const half = pair[side];
   const contour = pair.contour[side];
   const paper = narrateHalf(table, half, shared.quarters[side], contour, pair.contour.moved);
-  const top = drawTop(table, paper, half, pair.front, contour.opening, style, rules);
-  const knees = kneeStretches(flare[side], oneSkirt(side));
-  const middle = middlePiece(paper, half, knees, topPartner(side, style.shaping));
+  const whole = style.waistSeam === 'none';
+  const knees = kneeStretches(
+    flare[side],
+    whole ? wholeSkirt(style, topNames(side, style), half.axis) : oneSkirt(side),
+  );
+  const top = drawTop(table, paper, {
+    half,
+    front: pair.front,
+    opening: contour.opening,
+    halfAcross: shared.acrossOf[side],
+    knees,
+    style,
+    rules,
+  });
+  const middle = whole ? [] : [middlePiece(paper, half, knees, topPartner(side, style))];
   const other = flare[side === 'front' ? 'back' : 'front'];
   const gores = flarePieces(table.part('Flare', 'flare'), side, flare[side], other.gores, knees);
-  return { pieces: [...top.pieces, middle, ...gores], openings: top.openings };
+  return { pieces: [...top.pieces, ...middle, ...gores], openings: top.openings };
 }

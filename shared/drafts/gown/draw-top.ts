@@ -3,59 +3,94 @@ import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts'
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Piece } from '../../drafting/piece.ts';
 import { pathLength } from '../../geometry/curve.ts';
+import type { Path } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
-import { profileLength, slopeAt, xAt } from '../../geometry/profile.ts';
-import { mm, said } from '../../units/said.ts';
+import { slopeAt, xAt } from '../../geometry/profile.ts';
+import { armholeEdge } from './armhole-edge.ts';
 import { princessAbove, topDart } from './contour.ts';
-import { intakeEdge, princessBelow, topDarts } from './intakes.ts';
 import { refuseBluntDarts, tipOf } from './darts-reach.ts';
 import { type Half, heightOn } from './half.ts';
-import type { GownStyle } from './style-card.ts';
-import { heightAtArc } from './truing.ts';
-import { dartedTop, princessPanels } from './top.ts';
-import { type TopLine, type TopLinePoints, notchCorner, topLine } from './top-line.ts';
+import { topDarts } from './intakes.ts';
+import type { KneeStretch } from './knee-stretches.ts';
+import { narrateArmhole, narrateDarts, narratePrincess, narrateTop } from './narrate-top.ts';
+import { type GownStyle, isOffShoulder } from './style-card.ts';
+import { type TopParts, dartedTop, princessPanels } from './top.ts';
+import { type TopLine, notchCorner, topLine } from './top-line.ts';
+import { topLinePoints } from './top-line-points.ts';
+import { topNames } from './top-names.ts';
+import { wholeDarted, wholePanels } from './whole.ts';
 
-/** The top line stays at least this far above the bust point. */
-const overBust = 30;
+/** What the top of a half is drawn from. */
+export type TopInputs = {
+  readonly half: Half;
+  /** The front half, whose side seam is master. */
+  readonly front: Half;
+  readonly opening: number;
+  /** Half the width of the body where a gown off the shoulder ends. */
+  readonly halfAcross: number;
+  /** The knee seam of the half, for pieces that reach down to it. */
+  readonly knees: readonly KneeStretch[];
+  readonly style: GownStyle;
+  readonly rules: HouseRules;
+};
+
+/** The top of a half in pieces, with the edges that hold it up. */
+export type DrawnTop = {
+  readonly pieces: readonly Piece[];
+  readonly openings: readonly TopOpening[];
+  /** Length of the top edge sewn, mm. */
+  readonly topEdge: number;
+  /** The armhole edge of a gown off the shoulder, from the top line to the underarm. */
+  readonly armhole?: Path;
+};
 
 /** Draws the top of a half: its top line, its princess panels or its one darted piece. */
-export function drawTop(
-  table: DraftingTable,
-  paper: PartTable,
-  half: Half,
-  front: Half,
-  opening: number,
-  style: GownStyle,
-  rules: HouseRules,
-): { readonly pieces: readonly Piece[]; readonly openings: readonly TopOpening[] } {
+export function drawTop(table: DraftingTable, paper: PartTable, inputs: TopInputs): DrawnTop {
+  const { half, opening, style, rules, knees } = inputs;
   const { side, axis } = half;
-  const points = topLinePoints(half, front, style);
+  const points = topLinePoints(half, inputs.front, style, inputs);
   const bust = heightOn(half, 'bust', axis);
   const peak = side === 'front' ? style.topDrop : Math.min(points.centre.y, points.side.y);
-  const sideTop = points.side.y;
-  const corner = side === 'front' && style.topLine === 'notched' ? { topCorner: notchCorner } : {};
+  const names = topNames(side, style);
+  const whole = style.waistSeam === 'none';
+  const partsOf = (top: TopLine): TopParts => ({
+    half,
+    top,
+    names,
+    partner: topNames(side === 'front' ? 'back' : 'front', style),
+    dartClearance: rules.dartClearance,
+    ...outerEnd(inputs, top, points.side.y),
+    ...(side === 'front' && style.topLine === 'notched' ? { topCorner: notchCorner } : {}),
+  });
+  const finish = (
+    parts: TopParts,
+    pieces: readonly Piece[],
+    openings: readonly TopOpening[],
+  ): DrawnTop => {
+    if (parts.armhole) narrateArmhole(paper, parts.top, parts.armhole, inputs);
+    return {
+      pieces,
+      openings,
+      topEdge: pathLength(parts.top.centre) + pathLength(parts.top.outer),
+      ...(parts.armhole ? { armhole: parts.armhole } : {}),
+    };
+  };
   if (style.shaping === 'princess') {
     const above = princessAbove(axis, bust, opening, peak);
-    const top = topLine(points, above.legs);
-    narrateTop(table, paper, half, points, top);
-    narratePrincess(paper, half, opening, above.height);
-    return {
-      pieces: princessPanels({
-        half,
-        top,
-        above: above.intake,
-        sideTop,
-        dartClearance: rules.dartClearance,
-        ...corner,
-      }),
-      openings: openingOf(
+    const parts = { ...partsOf(topLine(points, above.legs)), above: above.intake };
+    narrateTop(table, paper, half, points, parts.top);
+    narratePrincess(paper, half, style, opening, above.height);
+    return finish(
+      parts,
+      whole ? wholePanels(parts, knees) : princessPanels(parts),
+      openingOf(
         half,
         opening,
         above.height,
-        { piece: `${side}-top-centre`, edge: 'princess' },
-        { piece: `${side}-top-side`, edge: 'princess' },
+        { piece: names.centre, edge: 'princess' },
+        { piece: names.side, edge: 'princess' },
       ),
-    };
+    );
   }
   const dart = topDart(axis, bust, opening, peak, rules.dartClearance);
   refuseBluntDarts(
@@ -63,20 +98,32 @@ export function drawTop(
     topDarts(half, rules.dartClearance),
     opening > 0 ? tipOf(dart.legs.angle) : 0,
   );
-  const top = topLine(points, dart.legs);
-  narrateTop(table, paper, half, points, top);
-  narrateDarts(paper, half, opening, rules.dartClearance);
-  const on = { piece: `${side}-top`, edge: 'top-mouth' };
+  const parts: TopParts = {
+    ...partsOf(topLine(points, dart.legs)),
+    ...(opening > 0 ? { topDartTip: dart.legs.pivot } : {}),
+  };
+  narrateTop(table, paper, half, points, parts.top);
+  narrateDarts(paper, half, style, opening, rules.dartClearance);
+  const on = { piece: names.one, edge: 'top-mouth' };
+  return finish(
+    parts,
+    whole ? wholeDarted(parts, knees) : dartedTop(parts),
+    openingOf(half, opening, dart.height, on, on),
+  );
+}
+
+/** Where the side seam begins: at the top line, or at the underarm under an armhole edge. */
+function outerEnd(
+  { half, style }: TopInputs,
+  top: TopLine,
+  sideDepth: number,
+): Pick<TopParts, 'sideTop' | 'armhole'> {
+  const from = top.outer.at(-1)?.to;
+  if (!isOffShoulder(style) || !from) return { sideTop: sideDepth };
+  const y = half.heights.underarm;
   return {
-    pieces: dartedTop({
-      half,
-      top,
-      sideTop,
-      dartClearance: rules.dartClearance,
-      ...corner,
-      ...(opening > 0 ? { topDartTip: dart.legs.pivot } : {}),
-    }),
-    openings: openingOf(half, opening, dart.height, on, on),
+    sideTop: y,
+    armhole: armholeEdge(from, top.outward, point(xAt(half.line, y), y), slopeAt(half.line, y)),
   };
 }
 
@@ -84,19 +131,15 @@ export function drawTop(
 const backEdgeOver = 30;
 
 /** Whether the back's top line, drawn with its opening, crosses it high enough over bust level. */
-export function backEdgeIsHigh(
-  { front, back }: { readonly front: Half; readonly back: Half },
-  opening: number,
-  style: GownStyle,
-  rules: HouseRules,
-): boolean {
-  const points = topLinePoints(back, front, style);
-  const bust = heightOn(back, 'bust', back.axis);
+export function backEdgeIsHigh(inputs: Omit<TopInputs, 'knees'>): boolean {
+  const { half, front, opening, style, rules } = inputs;
+  const points = topLinePoints(half, front, style, inputs);
+  const bust = heightOn(half, 'bust', half.axis);
   const peak = Math.min(points.centre.y, points.side.y);
   const { legs } =
     style.shaping === 'princess'
-      ? princessAbove(back.axis, bust, opening, peak)
-      : topDart(back.axis, bust, opening, peak, rules.dartClearance);
+      ? princessAbove(half.axis, bust, opening, peak)
+      : topDart(half.axis, bust, opening, peak, rules.dartClearance);
   return bust - topLine(points, legs).crossing >= backEdgeOver;
 }
 
@@ -108,94 +151,3 @@ const openingOf = (
   outer: TopOpening['outer'],
 ): readonly TopOpening[] =>
   wanted > 0 ? [{ side: half.side, wanted, height, centre, outer }] : [];
-
-/** Where the top line runs: the back meets the front at the side seam, at the same length from the waist. */
-function topLinePoints(half: Half, front: Half, style: GownStyle): TopLinePoints {
-  const arc = profileLength(front.line, style.sideDepth, front.heights.waist);
-  const y = half.side === 'front' ? style.sideDepth : heightAtArc(half, arc);
-  const end = { side: point(xAt(half.line, y), y), sideLean: slopeAt(half.line, y) };
-  return half.side === 'front'
-    ? frontTopLine(style, half.axis, end)
-    : { centre: point(0, half.levels.waist - style.backDepth), ...end };
-}
-
-function frontTopLine(
-  style: GownStyle,
-  axis: number,
-  end: Pick<TopLinePoints, 'side' | 'sideLean'>,
-): TopLinePoints {
-  if (style.topLine === 'straight') {
-    // Level from the centre to the princess line or dart, falling only from there to the side.
-    return { centre: point(0, style.topDrop), peak: point(axis, style.topDrop), ...end };
-  }
-  return {
-    centre: point(0, style.neckDepth),
-    peak: point(style.neckWidth, style.topDrop),
-    shape: style.topLine,
-    ...end,
-  };
-}
-
-function narrateTop(
-  table: DraftingTable,
-  paper: PartTable,
-  half: Half,
-  points: TopLinePoints,
-  top: TopLine,
-): void {
-  const { centre, peak, side } = points;
-  const run = peak
-    ? said`From ${mm(centre.y)} down at the centre up to the peak, ${mm(peak.x)} out and ${mm(peak.y)} down, and on to the side seam ${mm(side.y)} down`
-    : said`From ${mm(half.levels.waist - centre.y)} above the waist at the centre to the side seam, where it meets the front`;
-  paper.draw(
-    'Top line',
-    said`${run}; drawn with the opening closed so that it crosses the seam without a kink, ${mm(pathLength(top.centre) + pathLength(top.outer))} long when sewn.`,
-    {
-      why: said`It sets out square to the centre and arrives square to the side seam, so front and back join without a corner.`,
-      points: { 'top-centre': centre, ...(peak ? { 'top-peak': peak } : {}), 'top-side': side },
-      lines: [top.centre, top.outer],
-    },
-  );
-  const bust = heightOn(half, 'bust', half.axis);
-  if (half.side === 'front' && bust - top.crossing < overBust) {
-    table.warn({
-      code: 'top-line-low',
-      severity: 'warning',
-      field: 'style.topDrop',
-      with: ['style.sideDepth'],
-      said: said`The top line passes ${mm(bust - top.crossing)} above the bust point; under ${mm(overBust)} it may not hold. Raise the top line or the side.`,
-    });
-  }
-}
-
-function narratePrincess(paper: PartTable, half: Half, opening: number, height: number): void {
-  const below = princessBelow(half);
-  const above =
-    opening > 0
-      ? said`opens to ${mm(opening)} at ${mm(below.top - height)} above it`
-      : said`stays closed above it`;
-  paper.draw(
-    'Princess seam',
-    said`${mm(half.axis)} out from the centre both panels pass ${half.side === 'front' ? 'the bust point' : 'bust level'} upright. Below it the gap is ${mm(half.gap.underbust)} at the under-bust and ${mm(half.gap.seam)} at the waist seam, half on each side; the seam ${above}.`,
-    {
-      why: said`The edges swell outside the straight legs and never cut the corner at bust level, which would cost girth there.`,
-      points: { 'bust-point': point(half.axis, below.top) },
-      lines: [intakeEdge(below, 'centre'), intakeEdge(below, 'side')],
-      pieces: [`${half.side}-top-centre`, `${half.side}-top-side`],
-    },
-  );
-}
-
-function narrateDarts(paper: PartTable, half: Half, opening: number, clearance: number): void {
-  const darts = topDarts(half, clearance);
-  const above = opening > 0 ? said`; one from the top line takes ${mm(opening)}` : said``;
-  paper.draw(
-    'Bust darts',
-    said`${darts.length === 1 ? 'One dart' : 'Two darts'} from the waist seam, ending ${mm(clearance)} short of ${half.side === 'front' ? 'the bust point' : 'bust level'}: ${mm(half.gap.underbust)} at the under-bust, ${mm(half.gap.seam)} at the waist seam${above}.`,
-    {
-      why: said`A dart that ran all the way would stand up in a point; stopped short it melts into the curve.`,
-      lines: darts.flatMap((dart) => [intakeEdge(dart, 'centre'), intakeEdge(dart, 'side')]),
-      pieces: [`${half.side}-top`],
-    },
-  );
-}

@@ -1,11 +1,14 @@
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
 import type { Cubic } from '../../geometry/path.ts';
+import { type Point, point } from '../../geometry/point.ts';
 import { type Profile, slopeAt, xAt } from '../../geometry/profile.ts';
+import { type Fading, heldBelow } from './fading.ts';
 import { bustToHip, narrowestDart, shareSuppression, sideLine } from './side-line.ts';
 import type { SideHeights, SideWidths, Suppression } from './side-line.ts';
+import type { GownStyle } from './style-card.ts';
 import { type SideArcs, towards, truedHeights } from './truing.ts';
-import { closedSeam, fallFor } from './waist-seam.ts';
+import { closedSeam, fallFor, seamAt } from './waist-seam.ts';
 
 const sideLevels = ['underarm', 'bust', 'underbust', 'seam', 'topHip', 'hip', 'knee'] as const;
 
@@ -29,6 +32,8 @@ export type HalfInputs = {
   readonly dartCount: 1 | 2;
   /** Where darts shape the top, the side seam helps them under the bust by its share. */
   readonly sideHelps: boolean;
+  readonly waistSeam: GownStyle['waistSeam'];
+  readonly fading: Fading;
   /** Slope (dy/dx) at which the waist seam arrives at the side; the half's own square where absent. */
   readonly seamSlope?: number;
   /** An earlier drawing of the same half to start from. */
@@ -58,6 +63,7 @@ export type Half = {
   /** Axes of the darts of the middle, from the centre out, and the heights of their tips. */
   readonly dartAxes: readonly number[];
   readonly dartTips: readonly number[];
+  readonly fading: Fading;
   readonly held: Round['held'];
 };
 
@@ -72,9 +78,9 @@ export const heightOn = (
   return centre + ((side - centre) * x) / xAt(half.line, side);
 };
 
-/** Part of the waist intake that a dart still holds at a height below the waist. */
-export const heldBelow = (waist: number, tip: number, y: number): number =>
-  tip <= waist ? 0 : Math.max(0, (tip - y) / (tip - waist));
+/** Where a level meets the side seam. */
+export const atSide = (half: Pick<Half, 'line' | 'heights'>, level: keyof SideHeights): Point =>
+  point(xAt(half.line, half.heights[level]), half.heights[level]);
 
 /** What one round of drawing leaves for the next. */
 type Round = {
@@ -107,10 +113,7 @@ export function drawHalf(inputs: HalfInputs): Half | undefined {
     tips: shares.map((_, k) => Math.max(levels.waist, inputs.dartTip - 20 * k)),
   };
   const suppression = shareSuppression(quarters, rules.sideShare, (waist) => ({
-    line: bustToHip(
-      levels,
-      widthsAt(inputs, darts, waist, () => levels.topHip),
-    ),
+    line: bustToHip(levels, plainWidths(inputs, darts, waist)),
     top: levels.bust,
     foot: levels.hip,
   }));
@@ -139,36 +142,53 @@ export function drawHalf(inputs: HalfInputs): Half | undefined {
     suppression,
     line: round.line,
     seam: round.seam,
-    gap: { ...round.gap, waist: suppression.dart },
+    gap: {
+      ...round.gap,
+      waist: inputs.waistSeam === 'raised' ? suppression.dart : round.gap.seam,
+    },
     axis: inputs.axis,
     dartCount: inputs.dartCount,
     dartAxes: round.axes,
     dartTips: darts.tips,
+    fading: inputs.fading,
     held: round.held,
   };
 }
 
-/** Side widths for a width at the waist: the top hip carries what the darts still hold there. */
+/** Where a dart begins to run out and where the top hip lies on its axis. */
+type DartRun = { readonly from: number; readonly topHip: number };
+
+/**
+ * Side widths for a width at the waist, `intake` of it taken in by darts: the top hip carries what
+ * they still hold there.
+ */
 function widthsAt(
-  inputs: HalfInputs,
+  { quarters, lean, fading }: HalfInputs,
   darts: DartPlan,
   waist: number,
-  topHipAt: (dart: number) => number,
+  intake: number,
+  runOf: (dart: number) => DartRun,
 ): SideWidths {
-  const { quarters, levels } = inputs;
-  const held = darts.shares.reduce(
-    (sum, share, k) => sum + share * heldBelow(levels.waist, darts.tips[k] ?? 0, topHipAt(k)),
-    0,
-  );
+  const held = darts.shares.reduce((sum, share, k) => {
+    const { from, topHip } = runOf(k);
+    return sum + share * heldBelow(fading, from, darts.tips[k] ?? 0, topHip);
+  }, 0);
   return {
     bust: quarters.bust,
     waist,
-    topHip: quarters.topHip + (waist - quarters.waist) * held,
+    topHip: quarters.topHip + intake * held,
     hip: quarters.hip,
     knee: quarters.knee,
-    lean: inputs.lean,
+    lean,
   };
 }
+
+/** Side widths before the lines are drawn: levels level, darts from the waist down. */
+const plainWidths = (inputs: HalfInputs, darts: DartPlan, waist: number): SideWidths =>
+  widthsAt(inputs, darts, waist, waist - inputs.quarters.waist, () => ({
+    from: inputs.levels.waist,
+    topHip: inputs.levels.topHip,
+  }));
 
 function firstRound(inputs: HalfInputs, darts: DartPlan, waist: number): Round {
   const { levels, quarters, from } = inputs;
@@ -179,10 +199,7 @@ function firstRound(inputs: HalfInputs, darts: DartPlan, waist: number): Round {
   return {
     heights: levels,
     axes: darts.shares.map(() => inputs.axis),
-    line: sideLine(
-      levels,
-      widthsAt(inputs, darts, waist, () => levels.topHip),
-    ),
+    line: sideLine(levels, plainWidths(inputs, darts, waist)),
     seam: closedSeam(quarters.seam, levels.seam, 0, 0),
     gap: { underbust: 0, seam: 0 },
     held: { underbust: false, seam: false },
@@ -197,16 +214,21 @@ function nextRound(
   share: number,
 ): Round {
   const { levels, quarters } = inputs;
+  const raised = inputs.waistSeam === 'raised';
+  const mouths = mouthsOn(last.axes, darts.shares, last.gap.seam);
+  // A seam in the waist itself is held by the waist's own width.
+  const atWaist = !raised && last.held.seam ? last.seam.to.x : waist;
   const widths: SideWidths = {
-    ...widthsAt(inputs, darts, waist, (k) =>
-      heightOn({ levels, ...last }, 'topHip', last.axes[k] ?? inputs.axis),
-    ),
+    ...widthsAt(inputs, darts, atWaist, raised ? waist - quarters.waist : last.gap.seam, (k) => ({
+      from: raised ? levels.waist : seamAt(last.seam, mouths[k] ?? inputs.axis).y,
+      topHip: heightOn({ levels, ...last }, 'topHip', last.axes[k] ?? inputs.axis),
+    })),
     ...(last.held.underbust ? { underbust: quarters.underbust } : {}),
-    ...(last.held.seam ? { seam: last.seam.to.x } : {}),
+    ...(raised && last.held.seam ? { seam: last.seam.to.x } : {}),
   };
   const line = sideLine(last.heights, helped(inputs, widths, last.heights));
   const slope = inputs.seamSlope ?? -slopeAt(line, last.heights.seam);
-  const fall = inputs.trueTo ? last.heights.seam - levels.seam : fallFor(slope, quarters.seam);
+  const fall = fallOf(inputs, last.heights, slope);
   const seam = closedSeam(quarters.seam, levels.seam, fall, slope);
   const underbust = xAt(line, last.heights.underbust) - quarters.underbust;
   const opening = xAt(line, last.heights.seam) - seam.to.x;
@@ -219,15 +241,37 @@ function nextRound(
     seam: held.seam ? 0 : opening,
   };
   return {
-    heights: inputs.trueTo
-      ? towards(last.heights, truedHeights(line, last.heights, inputs.trueTo), share)
-      : { ...levels, seam: levels.seam + fall },
+    heights: heightsNext(inputs, last.heights, line, fall, share),
     axes: dartAxes(inputs.axis, gap.seam, darts.shares, line, last.heights),
     line,
     seam,
     gap,
     held,
   };
+}
+
+/** How far the seam falls at the side: the back's raised seam is trued to the front's, a seam in the waist is its own. */
+function fallOf(inputs: HalfInputs, heights: SideHeights, slope: number): number {
+  if (inputs.waistSeam === 'none') return 0;
+  return inputs.trueTo && inputs.waistSeam === 'raised'
+    ? heights.seam - inputs.levels.seam
+    : fallFor(slope, inputs.quarters.seam);
+}
+
+/** Heights at the side: the levels themselves in front, trued in the back; from a seam in the waist lengths count from it. */
+function heightsNext(
+  { levels, trueTo, waistSeam }: HalfInputs,
+  last: SideHeights,
+  line: Profile,
+  fall: number,
+  share: number,
+): SideHeights {
+  const seam = levels.seam + fall;
+  if (waistSeam === 'raised')
+    return trueTo ? towards(last, truedHeights(line, last, trueTo), share) : { ...levels, seam };
+  const own = { waist: seam, seam };
+  if (!trueTo) return { ...levels, ...own };
+  return { ...towards(last, truedHeights(line, { ...last, ...own }, trueTo), share), ...own };
 }
 
 /** Leanest the side is pulled in between bust and under-bust to help the darts, 14 degrees [our rule]. */
@@ -243,6 +287,20 @@ function helped(inputs: HalfInputs, widths: SideWidths, heights: SideHeights): S
   );
   const free = xAt(sideLine(heights, widths), heights.underbust);
   return free > pulled ? { ...widths, underbust: pulled } : widths;
+}
+
+/** Places along the closed waist seam at which darts on these axes open, from the centre out. */
+export function mouthsOn(
+  axes: readonly number[],
+  shares: readonly number[],
+  gap: number,
+): readonly number[] {
+  let before = 0;
+  return shares.map((share, k) => {
+    const at = (axes[k] ?? 0) - before - (share * gap) / 2;
+    before += share * gap;
+    return at;
+  });
 }
 
 /** The first dart's centre leg continues the princess seam above; a second stands midway to the side. */

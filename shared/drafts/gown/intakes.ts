@@ -8,11 +8,12 @@ import {
   offsetProfile,
   positiveSpline,
   profilePath,
-  straightProfile,
+  slopeAt,
   xAt,
 } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
-import { type Half, dartShares, heightOn } from './half.ts';
+import { fade, scaled } from './fading.ts';
+import { type Half, dartShares, heightOn, mouthsOn } from './half.ts';
 import { seamAt } from './waist-seam.ts';
 
 /** Steepest gap at a dart tip: 30 degrees between its legs (method section 6). */
@@ -35,14 +36,8 @@ export const intakeEdge = (intake: Intake, towards: 'centre' | 'side'): Path =>
   );
 
 /** Places along the closed waist seam at which the darts of the middle open, from the centre out. */
-export const mouthsOnSeam = (half: Half): readonly number[] => {
-  let before = 0;
-  return dartShares(half.dartCount).map((share, k) => {
-    const at = (half.dartAxes[k] ?? half.axis) - before - (share * half.gap.seam) / 2;
-    before += share * half.gap.seam;
-    return at;
-  });
-};
+export const mouthsOnSeam = (half: Half): readonly number[] =>
+  mouthsOn(half.dartAxes, dartShares(half.dartCount), half.gap.seam);
 
 /** Cloth left between an intake and its neighbour, the centre line or the side. */
 const clothBetween = 8;
@@ -167,33 +162,43 @@ export function topDarts(half: Half, clearance: number): readonly Intake[] {
   });
 }
 
-/** The darts of the middle: upright at the waist seam, a cubic to the waist, straight to the tip. */
+/** The darts of the middle: upright at a raised waist seam, a cubic to the waist, straight to the tip. */
 export function middleDarts(half: Half): readonly Intake[] {
   const { waist } = half.levels;
   const mouths = mouthsOnSeam(half);
   return dartShares(half.dartCount).map((share, k) => {
     const axis = half.dartAxes[k] ?? half.axis;
     const top = seamAt(half.seam, mouths[k] ?? axis).y;
-    const tip = half.dartTips[k] ?? waist;
+    if (half.fading !== 'straight') return below(half, { axis, gap: [], top, foot: top }, k);
     const atSeam = { y: top, x: share * half.gap.seam };
-    const atWaist = { y: waist, x: share * half.gap.waist };
-    if (half.gap.waist === 0 || tip <= waist) {
-      return {
-        axis,
-        top,
-        foot: waist,
-        gap: cubicProfile(atSeam, { y: waist, x: 0 }, 0, -atSeam.x / (waist - top)),
-      };
-    }
-    const closing = -atWaist.x / (tip - waist);
-    return {
+    const atWaist = share * half.gap.waist;
+    const runOut = fade(half.fading, waist, half.dartTips[k] ?? waist);
+    const closing = runOut && atWaist > 0 ? atWaist * slopeAt(runOut, waist) : undefined;
+    const toWaist: Intake = {
       axis,
       top,
-      foot: tip,
-      gap: [
-        ...cubicProfile(atSeam, atWaist, 0, closing),
-        ...straightProfile(atWaist, { y: tip, x: 0 }),
-      ],
+      foot: waist,
+      gap:
+        closing === undefined
+          ? cubicProfile(atSeam, { y: waist, x: 0 }, 0, -atSeam.x / (waist - top))
+          : cubicProfile(atSeam, { y: waist, x: atWaist }, 0, closing),
     };
+    return closing === undefined ? toWaist : below(half, toWaist, k);
   });
 }
+
+/** An intake carried on below the waist to the tip of its dart. */
+function below(half: Half, above: Intake, k: number): Intake {
+  const tip = half.dartTips[k] ?? above.foot;
+  const share = dartShares(half.dartCount)[k] ?? 1;
+  const runOut = fade(half.fading, above.foot, tip);
+  if (!runOut) return above;
+  return { ...above, foot: tip, gap: [...above.gap, ...scaled(runOut, share * half.gap.waist)] };
+}
+
+/** The princess gap of a gown without a waist seam: through the waist it goes on down and runs out at the tip. */
+export const princessWhole = (half: Half): Intake => below(half, princessBelow(half), 0);
+
+/** The darts of a gown without a waist seam, pointed at both ends. */
+export const wholeDarts = (half: Half, clearance: number): readonly Intake[] =>
+  topDarts(half, clearance).map((dart, k) => below(half, dart, k));

@@ -15,7 +15,7 @@ import { type Point, point } from '../../geometry/point.ts';
 import { profilePath, xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
 import { goreName } from './flare.ts';
-import { type Half, dartShares } from './half.ts';
+import { type Half, atSide, dartShares } from './half.ts';
 import { intakeEdge, middleDarts, seamStretches } from './intakes.ts';
 import type { KneeStretch } from './knee-stretches.ts';
 
@@ -75,7 +75,7 @@ export function middlePiece(
   narrateDarts(paper, half, sewn);
   paper.draw(
     'Skirt',
-    said`From the raised waist seam to the knee seam the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the knee seam.`,
+    said`From the waist seam to the knee seam the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the knee seam.`,
     {
       lines: [
         sideEdge.path,
@@ -96,7 +96,10 @@ export function middlePiece(
     edges: [...waistEdges(stretches, sewn, topPartner), sideEdge, ...knees, centre],
     darts: sewn,
     levels: [
-      levelLine('waist', point(0, levels.waist), point(xAt(seam, heights.waist), heights.waist)),
+      // A seam in the waist itself is the waist; it is counted along the seam.
+      ...(levels.seam === levels.waist
+        ? []
+        : [levelLine('waist', point(0, levels.waist), atSide(half, 'waist'))]),
       levelLine(
         'top-hip',
         point(0, levels.topHip),
@@ -107,22 +110,34 @@ export function middlePiece(
     ],
     notches: [
       ...secondDartMark(stretches, topPartner, strokes),
-      ...notchAtHeight('waist', sideEdge, heights.waist, strokes),
+      ...(levels.seam === levels.waist
+        ? []
+        : notchAtHeight('waist', sideEdge, heights.waist, strokes)),
       ...notchAtHeight('hip', sideEdge, heights.hip, strokes),
-      ...knees.flatMap((knee) =>
-        notchAtLength(`${knee.name}-half`, knee, pathLength(knee.path) / 2, strokes),
-      ),
-      ...(side === 'back'
-        ? [
-            ...notchAtHeight('waist', centre, levels.waist, strokes),
-            ...notchAtHeight('zip-end', centre, levels.hip - zipAboveHip, strokes),
-          ]
-        : []),
+      ...kneeMarks(knees, strokes),
+      ...centreMarks(half, centre),
     ],
     grain: grainIn(half),
     drills: drillPoints(sewn),
   };
 }
+
+/** Marks half way along each stretch of the knee seam. */
+export const kneeMarks = (knees: readonly Edge[], strokes: 1 | 2): Piece['notches'] =>
+  knees.flatMap((knee) =>
+    notchAtLength(`${knee.name}-half`, knee, pathLength(knee.path) / 2, strokes),
+  );
+
+/** Marks on the centre back: the waist, where it is no corner, and the end of the zip. */
+export const centreMarks = ({ side, levels }: Half, centre: Edge): Piece['notches'] =>
+  side === 'front'
+    ? []
+    : [
+        ...(levels.seam === levels.waist && endOf(centre.path)?.y === levels.waist
+          ? []
+          : notchAtHeight('waist', centre, levels.waist, 2)),
+        ...notchAtHeight('zip-end', centre, levels.hip - zipAboveHip, 2),
+      ];
 
 function narrateDarts(paper: PartTable, half: Half, darts: readonly Dart[]): void {
   if (darts.length === 0) return;

@@ -3,6 +3,7 @@ import type { HouseRules } from '../../drafting/house-rules.ts';
 import { slopeAt } from '../../geometry/profile.ts';
 import { said } from '../../units/said.ts';
 import { type Contour, contours } from './contour.ts';
+import { fadingOf } from './fading.ts';
 import { type Half, type HalfInputs, type QuarterWidths, drawHalf } from './half.ts';
 import { refuseCrowdedIntakes } from './intakes.ts';
 import type { Quarters } from './quarters.ts';
@@ -51,6 +52,8 @@ function dartCount(half: Half, inputs: PairInputs): 1 | 2 {
   const { rules, style } = inputs;
   const settled = rules.counts?.darts?.[half.side];
   if (settled !== undefined) return settled;
+  // One princess seam from the top edge to the knee takes whatever there is.
+  if (half.fading === 'seam') return 1;
   const widest = Math.max(half.gap.seam, half.gap.waist);
   if (widest > rules.dartWidest) return 2;
   if (style.shaping === 'princess') return 1;
@@ -88,7 +91,8 @@ export function pairHalves(inputs: PairInputs): PairedHalves {
   // Where the side cannot help the darts and still be trued, the darts take all of it.
   const darted = inputs.style.shaping === 'darts';
   const pair = (darted ? pairWith(inputs, true) : undefined) ?? pairWith(inputs, false);
-  if (!pair || cornersAtSeam(pair) > crookedCorner) throw cannotBeDrawn();
+  if (!pair || (inputs.style.waistSeam !== 'none' && cornersAtSeam(pair) > crookedCorner))
+    throw cannotBeDrawn();
   refuseCrowdedIntakes(pair.front);
   refuseCrowdedIntakes(pair.back);
   return pair;
@@ -117,7 +121,9 @@ function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefi
   );
   const tip = (longer: number): number =>
     Math.min(levels.waist + style.dartLength + longer, levels.hip - aboveHip);
-  const base = { levels, rules, dartCount: 1, sideHelps } as const;
+  const fading = fadingOf(style);
+  const { waistSeam } = style;
+  const base = { levels, rules, dartCount: 1, sideHelps, waistSeam, fading } as const;
   const frontInputs: HalfInputs = {
     ...base,
     side: 'front',
@@ -157,13 +163,14 @@ function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefi
   const first = draw({ front: 1, back: 1 });
   if (!first) return undefined;
   const count = { front: dartCount(first.front, inputs), back: dartCount(first.back, inputs) };
-  let slope = meanSlope(first);
+  const seamed = style.waistSeam !== 'none';
+  let slope = seamed ? meanSlope(first) : 0;
   let last = first;
   for (let round = 0; round < roundsAtMost; round += 1) {
     const drawn = draw(count, last, slope);
     if (!drawn) return undefined;
     last = drawn;
-    const next = meanSlope(drawn);
+    const next = seamed ? meanSlope(drawn) : 0;
     // A hundredth of a degree: the corners of the seam are proven to two degrees.
     if (Math.abs(next - slope) < 1.7e-4) return { ...drawn, contour };
     slope = round < dampedFrom ? next : (slope + next) / 2;

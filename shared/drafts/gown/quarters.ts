@@ -91,6 +91,8 @@ export function finishedQuarters(
     how: ['finished knee ', { mm: style.kneeFinished }],
     measures: [],
   });
+  if (style.waistSeam !== 'raised')
+    return { chest, bust, underbust, waist, topHip, hip, knee, seam: waist };
   const share = seamShare(heights, seam);
   const seamQuarter: Quantity =
     'waistSeamGirth' in body.estimated
@@ -145,6 +147,15 @@ export function wantedGirths(
     wanted: body.measures[girth] + easeAt(style, key),
     estimated: girth in body.estimated,
   }));
+  const knee: WantedGirth = { level: 'knee-seam', wanted: style.kneeFinished, estimated: false };
+  if (style.waistSeam === 'none') return [...rows, knee];
+  if (style.waistSeam === 'natural')
+    return [
+      ...rows.map((row) =>
+        row.level === 'waist' ? { ...row, level: 'waist-seam' as const } : row,
+      ),
+      knee,
+    ];
   const ease = seamEase(style, seamShare(heights, seamLevel));
   const seam: WantedGirth = {
     level: 'waist-seam',
@@ -153,10 +164,5 @@ export function wantedGirths(
     wanted: seamGirth,
     estimated: 'waistSeamGirth' in body.estimated,
   };
-  return [
-    ...rows.slice(0, 3),
-    seam,
-    ...rows.slice(3),
-    { level: 'knee-seam', wanted: style.kneeFinished, estimated: false },
-  ];
+  return [...rows.slice(0, 3), seam, ...rows.slice(3), knee];
 }

@@ -1,5 +1,5 @@
 import { pathCrossings, splitPath } from '../../geometry/curve.ts';
-import { moved, movedPath, turnAbout, undo } from '../../geometry/motion.ts';
+import { type Motion, moved, movedPath, turnAbout, undo } from '../../geometry/motion.ts';
 import { type Path, cubic } from '../../geometry/path.ts';
 import { type Point, distance, point, unit } from '../../geometry/point.ts';
 import type { StraightLegs } from './contour.ts';
@@ -13,6 +13,8 @@ export type TopLine = {
   readonly outer: Path;
   /** Height at which it meets both legs. */
   readonly crossing: number;
+  /** Direction in which it arrives at its outer end, laid flat. */
+  readonly outward: Point;
 };
 
 /** Where a top line sets out, peaks and ends. */
@@ -23,24 +25,24 @@ export type TopLinePoints = {
   /** How it climbs from the centre to the peak. */
   readonly shape?: TopLineShape;
   readonly side: Point;
-  /** Lean (dx/dy) of the side seam there: the line arrives square to it. */
-  readonly sideLean: number;
+  /** Lean (dx/dy) of the side seam there: the line arrives square to it. Absent off the shoulder. */
+  readonly sideLean?: number;
 };
 
 /**
  * Draws a top line with its opening closed, so that it crosses without a kink, and opens it again.
- * It sets out square to the centre line, is level at the peak and arrives square to the side seam.
+ * It sets out square to the centre line, is level at the peak and arrives square to the side seam, or, off
+ * the shoulder, in one bend at the armhole.
  */
 export function topLine(points: TopLinePoints, legs: StraightLegs): TopLine {
   // Closing turns the outer panel about the point where the straight legs would meet.
   const closing = turnAbout(legs.pivot, -2 * legs.angle);
   const side = moved(points.side, closing);
-  const outward = unit({ x: 1, y: -points.sideLean });
-  const arrive = {
-    x: closing.cos * outward.x - closing.sin * outward.y,
-    y: closing.sin * outward.x + closing.cos * outward.y,
-  };
-  const { centre, peak, shape = 'sweetheart' } = points;
+  const { centre, peak, shape = 'sweetheart', sideLean } = points;
+  const arrive =
+    sideLean === undefined
+      ? bentTowards(peak ?? centre, side)
+      : turned(unit({ x: 1, y: -sideLean }), closing);
   const drawn: Path = peak
     ? [...rise(centre, peak, shape), ...fall(peak, side, arrive)]
     : fall(centre, side, arrive);
@@ -53,8 +55,21 @@ export function topLine(points: TopLinePoints, legs: StraightLegs): TopLine {
     centre: inner,
     outer: movedPath(outerClosed, undo(closing)),
     crossing: at.at.y,
+    outward: turned(arrive, undo(closing)),
   };
 }
+
+const turned = (direction: Point, { cos, sin }: Motion): Point =>
+  point(cos * direction.x - sin * direction.y, sin * direction.x + cos * direction.y);
+
+/** Off the shoulder the line bends one way only from where it lay level: it arrives this much steeper than straight. */
+const steeper = 1.6;
+const steepestArrival = Math.tan((35 * Math.PI) / 180);
+
+const bentTowards = (from: Point, to: Point): Point => {
+  const slope = (steeper * (to.y - from.y)) / (to.x - from.x);
+  return unit({ x: 1, y: Math.max(-steepestArrival, Math.min(steepestArrival, slope)) });
+};
 
 /** Tightest bend of the dip at the centre, so that an enclosed allowance still lies flat outside it. */
 const tightestDip = 16;

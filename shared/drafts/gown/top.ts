@@ -13,9 +13,11 @@ import { type Point, point } from '../../geometry/point.ts';
 import { profilePath, xAt } from '../../geometry/profile.ts';
 import type { Intake } from './intakes.ts';
 import { intakeEdge, princessBelow, seamStretches, topDarts } from './intakes.ts';
-import { type Half, dartShares, heightOn } from './half.ts';
+import { type Half, atSide, dartShares, heightOn } from './half.ts';
 import { waistEdges, waistStretch } from './middle.ts';
+import type { GownStyle } from './style-card.ts';
 import type { TopLine } from './top-line.ts';
+import { type TopNames, topNames } from './top-names.ts';
 
 /** A top ready to be cut: its half, its top line and the straight legs above the bust. */
 export type TopParts = {
@@ -25,18 +27,22 @@ export type TopParts = {
   readonly above?: Intake;
   /** Tip of the dart in the top line, where darts shape it and there is an opening. */
   readonly topDartTip?: Point;
-  /** Height on the side seam at which the top line ends. */
+  readonly names: TopNames;
+  /** Names of the other half's pieces. */
+  readonly partner: TopNames;
+  /** Height on the side seam at which it begins: where the top line ends, or at the underarm. */
   readonly sideTop: number;
+  /** From the top line to the underarm, where the gown is off the shoulder. */
+  readonly armhole?: Path;
   readonly dartClearance: number;
   /** Degrees between the centre and the top line where it is meant not to be square. */
   readonly topCorner?: number;
 };
 
-const other = (side: Side): Side => (side === 'front' ? 'back' : 'front');
-const strokesOf = (side: Side): 1 | 2 => (side === 'front' ? 1 : 2);
-const titleOf = (side: Side): string => (side === 'front' ? 'Front top' : 'Back top');
+export const strokesOf = (side: Side): 1 | 2 => (side === 'front' ? 1 : 2);
 
-const centreEdge = (side: Side, from: Point, until: Point): Edge =>
+/** The centre line of a piece: a fold in front, the zip seam in the back. */
+export const centreEdge = (side: Side, from: Point, until: Point): Edge =>
   edge(
     'centre',
     side === 'front' ? 'fold' : 'zip',
@@ -44,17 +50,20 @@ const centreEdge = (side: Side, from: Point, until: Point): Edge =>
     side === 'front' ? undefined : 'self',
   );
 
+/** The armhole edge, where there is one, travelled from the top line to the underarm. */
+export const armholeEdges = ({ armhole }: TopParts): readonly Edge[] =>
+  armhole ? [edge('armhole', 'armhole', armhole)] : [];
+
 const sideEdge = ({ half, sideTop }: TopParts, partner: string): Edge =>
   edge('side', 'side', profilePath(half.line, sideTop, half.heights.seam), to(partner, 'side'));
 
-const atSide = (half: Half, level: 'bust' | 'underbust'): Point =>
-  point(xAt(half.line, half.heights[level]), half.heights[level]);
-
 /** Which piece of the top a stretch of the waist seam belongs to. */
 export const topPartner =
-  (side: Side, shaping: 'princess' | 'darts') =>
-  (stretch: number): string =>
-    shaping === 'darts' ? `${side}-top` : stretch === 0 ? `${side}-top-centre` : `${side}-top-side`;
+  (side: Side, style: GownStyle) =>
+  (stretch: number): string => {
+    const { centre, side: outer, one } = topNames(side, style);
+    return style.shaping === 'darts' ? one : stretch === 0 ? centre : outer;
+  };
 
 /** Two panels that meet at the princess seam: both pass the bust point upright and swell below it. */
 export function princessPanels(parts: TopParts & { readonly above: Intake }): readonly Piece[] {
@@ -70,14 +79,14 @@ export function princessPanels(parts: TopParts & { readonly above: Intake }): re
   ];
   const openings = dartShares(half.dartCount).map((_, k) => (k === 0 ? half.gap.seam : 0));
   const [first = [], ...rest] = seamStretches(half, openings);
-  const [nameCentre, nameSide] = [`${side}-top-centre`, `${side}-top-side`];
+  const { centre: nameCentre, side: nameSide, title } = parts.names;
   const toMiddle = (path: Path, k: number): Edge =>
     edge(waistStretch(k), 'seam', reverse(path), to(`${side}-middle`, waistStretch(k)));
   const centrePrincess = edge('princess', 'seam', leg('centre'), to(nameSide, 'princess'));
   const sidePrincess = edge('princess', 'seam', reverse(leg('side')), to(nameCentre, 'princess'));
   const seamCentre = startOf(first) ?? point(0, half.levels.seam);
   const topCentre = startOf(top.centre) ?? point(0, 0);
-  const own = sideEdge(parts, `${other(side)}-top-side`);
+  const own = sideEdge(parts, parts.partner.side);
   const underbust = heightOn(half, 'underbust', half.axis);
   const marks = (on: Edge): Piece['notches'] => [
     ...notchAtHeight('bust-point', on, below.top, strokes),
@@ -98,7 +107,7 @@ export function princessPanels(parts: TopParts & { readonly above: Intake }): re
   return [
     {
       name: nameCentre,
-      title: `${titleOf(side)}, centre panel`,
+      title: `${title}, centre panel`,
       side,
       part: 'top',
       cut: side === 'front' ? 'cut 1 on fold' : 'cut 2 (a pair)',
@@ -117,13 +126,14 @@ export function princessPanels(parts: TopParts & { readonly above: Intake }): re
     },
     {
       name: nameSide,
-      title: `${titleOf(side)}, side panel`,
+      title: `${title}, side panel`,
       side,
       part: 'top',
       cut: 'cut 2 (a pair)',
       copies: 2,
       edges: [
         edge('top', 'top', top.outer),
+        ...armholeEdges(parts),
         own,
         ...rest.map((path, k) => toMiddle(path, k + 1)).reverse(),
         sidePrincess,
@@ -153,7 +163,13 @@ export function princessPanels(parts: TopParts & { readonly above: Intake }): re
 const secondDartMark = ([before, after]: readonly Edge[], strokes: 1 | 2): Piece['notches'] =>
   before && after ? notchAtLength('second-dart', before, 0, strokes) : [];
 
-const grainBetween = (x: number, bust: number, foot: number, top: number): Piece['grain'] => ({
+/** The grain of a piece, upright. */
+export const grainBetween = (
+  x: number,
+  bust: number,
+  foot: number,
+  top: number,
+): Piece['grain'] => ({
   from: point(x, Math.min(bust, top + 0.25 * (foot - top))),
   to: point(x, foot - 0.18 * (foot - bust)),
 });
@@ -162,7 +178,7 @@ const grainBetween = (x: number, bust: number, foot: number, top: number): Piece
 export function dartedTop(parts: TopParts): readonly Piece[] {
   const { half, top, topDartTip } = parts;
   const { side } = half;
-  const name = `${side}-top`;
+  const { one: name, title } = parts.names;
   const strokes = strokesOf(side);
   const openings = dartShares(half.dartCount).map((share) => share * half.gap.seam);
   const stretches = seamStretches(half, openings);
@@ -180,7 +196,7 @@ export function dartedTop(parts: TopParts): readonly Piece[] {
     };
   });
   const topDart = topDartOf(top, topDartTip);
-  const own = sideEdge(parts, `${other(side)}-top`);
+  const own = sideEdge(parts, parts.partner.one);
   const waist = waistEdges(stretches, waistDarts, () => `${side}-middle`).map((each): Edge => ({
     ...each,
     path: reverse(each.path),
@@ -190,13 +206,14 @@ export function dartedTop(parts: TopParts): readonly Piece[] {
   return [
     {
       name,
-      title: titleOf(side),
+      title,
       side,
       part: 'top',
       cut: side === 'front' ? 'cut 1 on fold' : 'cut 2 (a pair)',
       copies: side === 'front' ? 1 : 2,
       edges: [
         ...topEdges(top, topDart, parts.topCorner),
+        ...armholeEdges(parts),
         own,
         ...[...waist].reverse(),
         centreEdge(side, seamCentre, topCentre),
@@ -212,7 +229,8 @@ export function dartedTop(parts: TopParts): readonly Piece[] {
   ];
 }
 
-function topDartOf(top: TopLine, tip: Point | undefined): readonly Dart[] {
+/** The dart in the top line, where there is one. */
+export function topDartOf(top: TopLine, tip: Point | undefined): readonly Dart[] {
   const from = endOf(top.centre);
   const until = startOf(top.outer);
   if (!tip || !from || !until) return [];
@@ -228,10 +246,12 @@ function topDartOf(top: TopLine, tip: Point | undefined): readonly Dart[] {
   ];
 }
 
-const notched = (top: Edge, corner: number | undefined): Edge =>
+/** A top edge that leaves the centre at an angle of its own. */
+export const notched = (top: Edge, corner: number | undefined): Edge =>
   corner === undefined ? top : { ...top, corner };
 
-function topEdges(
+/** The top line in one edge, or in two with the mouth of its dart between. */
+export function topEdges(
   top: TopLine,
   dart: readonly Dart[],
   corner: number | undefined,

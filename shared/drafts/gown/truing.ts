@@ -30,7 +30,10 @@ export function towards(from: SideHeights, to: SideHeights, share: number): Side
 export function truedHeights(line: Profile, heights: SideHeights, arcs: SideArcs): SideHeights {
   const { waist } = heights;
   const above = (level: keyof SideArcs): number =>
-    waist - ((waist - heights[level]) * arcs[level]) / profileLength(line, heights[level], waist);
+    heights[level] === waist
+      ? waist
+      : waist -
+        ((waist - heights[level]) * arcs[level]) / profileLength(line, heights[level], waist);
   const below = (level: keyof SideArcs): number =>
     waist + ((heights[level] - waist) * arcs[level]) / profileLength(line, waist, heights[level]);
   return {

@@ -1,0 +1,204 @@
+import { drillPoints, edge, levelLine, notchAtHeight, to } from '../../drafting/outline.ts';
+import type { Dart, Edge, LevelLine, LevelName, Piece } from '../../drafting/piece.ts';
+import { reverse, startOf } from '../../geometry/curve.ts';
+import { type Path, line } from '../../geometry/path.ts';
+import { point } from '../../geometry/point.ts';
+import { profilePath, xAt } from '../../geometry/profile.ts';
+import { atSide, heightOn } from './half.ts';
+import { type Intake, intakeEdge, princessWhole, wholeDarts } from './intakes.ts';
+import type { KneeStretch, SkirtPanel } from './knee-stretches.ts';
+import { centreMarks, kneeEdges, kneeMarks } from './middle.ts';
+import type { SideHeights } from './side-line.ts';
+import {
+  type TopParts,
+  armholeEdges,
+  centreEdge,
+  grainBetween,
+  notched,
+  strokesOf,
+  topDartOf,
+  topEdges,
+} from './top.ts';
+import type { TopNames } from './top-names.ts';
+import type { GownStyle } from './style-card.ts';
+
+/** Levels across a piece that reaches from the top edge to the knee seam. */
+const across: readonly (readonly [LevelName, keyof SideHeights])[] = [
+  ['bust', 'bust'],
+  ['underbust', 'underbust'],
+  ['waist', 'waist'],
+  ['top-hip', 'topHip'],
+  ['hip', 'hip'],
+  ['knee-seam', 'knee'],
+];
+
+/** The pieces above the knee seam of a gown without a waist seam, and where they end on it. */
+export const wholeSkirt = (
+  { shaping }: Pick<GownStyle, 'shaping'>,
+  names: TopNames,
+  axis: number,
+): readonly SkirtPanel[] =>
+  shaping === 'darts'
+    ? [{ piece: names.one, until: Infinity }]
+    : [
+        { piece: names.centre, until: axis },
+        { piece: names.side, until: Infinity },
+      ];
+
+const sideDown = ({ half, sideTop }: TopParts, partner: string): Edge =>
+  edge('side', 'side', profilePath(half.line, sideTop, half.heights.knee), to(partner, 'side'));
+
+const sideMarks = ({ half }: TopParts, own: Edge): Piece['notches'] =>
+  (['bust', 'waist', 'hip'] as const).flatMap((level) =>
+    notchAtHeight(level, own, half.heights[level], strokesOf(half.side)),
+  );
+
+/** The front is cut on the fold, the back as a pair joined at the centre. */
+const cutOf = ({ half }: TopParts): Pick<Piece, 'cut' | 'copies'> =>
+  half.side === 'front'
+    ? { cut: 'cut 1 on fold', copies: 1 }
+    : { cut: 'cut 2 (a pair)', copies: 2 };
+
+const topCentreOf = ({ top }: TopParts) => startOf(top.centre) ?? point(0, 0);
+
+/**
+ * Two panels from the top edge to the knee seam: they meet at the princess seam, which takes in the
+ * waist, runs out at its tip and goes straight on down.
+ */
+export function wholePanels(
+  parts: TopParts & { readonly above: Intake },
+  knees: readonly KneeStretch[],
+): readonly Piece[] {
+  const { half, top, above, names } = parts;
+  const { side, heights, levels, axis } = half;
+  const strokes = strokesOf(side);
+  const below = princessWhole(half);
+  const upper = { ...above, top: top.crossing, foot: below.top };
+  const leg = (towards: 'centre' | 'side'): Path => [
+    ...intakeEdge(upper, towards),
+    ...intakeEdge(below, towards),
+    line(point(axis, below.foot), point(axis, heights.knee)),
+  ];
+  const centrePrincess = edge('princess', 'seam', leg('centre'), to(names.side, 'princess'));
+  const sidePrincess = edge('princess', 'seam', reverse(leg('side')), to(names.centre, 'princess'));
+  const own = sideDown(parts, parts.partner.side);
+  const gapAt = (y: number): number => (y >= below.foot ? 0 : xAt(below.gap, y));
+  const level = (
+    name: LevelName,
+    key: keyof SideHeights,
+    towards: 'centre' | 'side',
+  ): LevelLine => {
+    const y = heightOn(half, key, axis);
+    return towards === 'centre'
+      ? levelLine(name, point(0, levels[key]), point(axis - gapAt(y) / 2, y))
+      : levelLine(name, point(axis + gapAt(y) / 2, y), atSide(half, key));
+  };
+  const marks = (on: Edge): Piece['notches'] => [
+    ...notchAtHeight('bust-point', on, below.top, strokes),
+    ...(['underbust', 'waist', 'hip'] as const).flatMap((key) =>
+      notchAtHeight(key, on, heightOn(half, key, axis), strokes),
+    ),
+  ];
+  const kneesOf = (piece: string): readonly Edge[] =>
+    kneeEdges(
+      side,
+      knees.filter(({ skirt }) => skirt === piece),
+      heights.knee,
+    );
+  const [centreKnees, sideKnees] = [kneesOf(names.centre), kneesOf(names.side)];
+  const centre = centreEdge(side, point(0, heights.knee), topCentreOf(parts));
+  const grain = (x: number): Piece['grain'] =>
+    grainBetween(x, levels.hip, heights.knee, levels.waist);
+  return [
+    {
+      name: names.centre,
+      title: `${names.title}, centre panel`,
+      side,
+      part: 'top',
+      ...cutOf(parts),
+      edges: [
+        notched(edge('top', 'top', top.centre), parts.topCorner),
+        centrePrincess,
+        ...centreKnees,
+        centre,
+      ],
+      darts: [],
+      levels: across.map(([name, key]) => level(name, key, 'centre')),
+      notches: [
+        ...marks(centrePrincess),
+        ...kneeMarks(centreKnees, strokes),
+        ...centreMarks(half, centre),
+      ],
+      grain: grain(axis * 0.35),
+      drills: [],
+    },
+    {
+      name: names.side,
+      title: `${names.title}, side panel`,
+      side,
+      part: 'top',
+      cut: 'cut 2 (a pair)',
+      copies: 2,
+      edges: [
+        edge('top', 'top', top.outer),
+        ...armholeEdges(parts),
+        own,
+        ...sideKnees,
+        sidePrincess,
+      ],
+      darts: [],
+      levels: across.map(([name, key]) => level(name, key, 'side')),
+      notches: [...sideMarks(parts, own), ...marks(sidePrincess), ...kneeMarks(sideKnees, strokes)],
+      grain: grain((axis + xAt(half.line, heights.hip)) / 2),
+      drills: [],
+    },
+  ];
+}
+
+/** One piece from the top edge to the knee seam, its waist taken in by darts pointed at both ends. */
+export function wholeDarted(parts: TopParts, knees: readonly KneeStretch[]): readonly Piece[] {
+  const { half, top, names } = parts;
+  const { side, heights, levels } = half;
+  const strokes = strokesOf(side);
+  const shaped = half.gap.underbust > 0 || half.gap.waist > 0;
+  const waistDarts = (shaped ? wholeDarts(half, parts.dartClearance) : []).map(
+    (intake, k): Dart => ({
+      name: k === 0 ? 'waist' : `waist-${k + 1}`,
+      tip: 'both',
+      centreLeg: intakeEdge(intake, 'centre'),
+      sideLeg: intakeEdge(intake, 'side'),
+      pressed: 'centre',
+    }),
+  );
+  const topDart = topDartOf(top, parts.topDartTip);
+  const own = sideDown(parts, parts.partner.one);
+  const centre = centreEdge(side, point(0, heights.knee), topCentreOf(parts));
+  const kneeSeam = kneeEdges(side, knees, heights.knee);
+  return [
+    {
+      name: names.one,
+      title: names.title,
+      side,
+      part: 'top',
+      ...cutOf(parts),
+      edges: [
+        ...topEdges(top, topDart, parts.topCorner),
+        ...armholeEdges(parts),
+        own,
+        ...kneeSeam,
+        centre,
+      ],
+      darts: [...topDart, ...waistDarts],
+      levels: across.map(([name, key]) =>
+        levelLine(name, point(0, levels[key]), atSide(half, key)),
+      ),
+      notches: [
+        ...sideMarks(parts, own),
+        ...kneeMarks(kneeSeam, strokes),
+        ...centreMarks(half, centre),
+      ],
+      grain: grainBetween(half.axis * 0.35, levels.hip, heights.knee, levels.waist),
+      drills: drillPoints([...waistDarts, ...topDart]),
+    },
+  ];
+}
