@@ -19,23 +19,20 @@ export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonl
   const front = edgesOf(pieces, (piece) => piece.side === 'front' && piece.part === 'top');
   const back = edgesOf(pieces, (piece) => piece.side === 'back' && piece.part === 'top');
   const centre = heldAt(front, 'top', startOf);
-  const side = front.find(({ edge }) => edge.kind === 'side');
-  const middle = edgesOf(pieces, (piece) => piece.name === 'front-middle');
-  const tip = dartTip(
-    pieces.find((piece) => piece.name === 'front-middle'),
-    style,
-  );
+  const outer = front.findLast(({ edge }) => edge.kind === 'top');
+  const skirt = pieces.filter((piece) => piece.side === 'front' && isSkirt(piece));
+  const middle = edgesOf(skirt, () => true);
   const flare = edgesOf(pieces, (piece) => piece.name === 'flare-front');
   return [
     ...(style.topLine === 'straight'
       ? move('topDrop', centre, down)
       : [...move('neckDepth', centre, down), ...peakHandles(front, style)]),
-    ...move('sideDepth', side && placed(side, startOf), down),
+    ...move('sideDepth', outer && placed(outer, endOf), down),
     ...move('backDepth', heldAt(back, 'top', startOf), up),
     ...(style.waistSeam === 'raised'
       ? move('waistSeamRise', heldAt(middle, 'fold', endOf), up)
       : []),
-    ...move('dartLength', tip, down),
+    ...move('dartLength', dartTip(skirt, style), down),
     ...move('kneeLevel', heldAt(middle, 'fold', startOf), up),
     // A millimetre out at one of the four quarters of the knee seam is four round it.
     ...move('kneeFinished', heldAt(middle, 'side', endOf), out, 4),
@@ -70,13 +67,31 @@ function heldAt(
   return held && placed(held, end);
 }
 
-/** The tip of the front dart; none where there is no dart, or one too small to reach its length. */
-function dartTip(middle: Piece | undefined, { dartLength }: GownStyle): Placed | undefined {
-  const at = endOf(middle?.darts[0]?.centreLeg ?? []);
-  const waist = middle?.levels.find(({ level }) => level === 'waist')?.from.y;
-  if (!middle || !at || waist === undefined) return undefined;
-  return Math.abs(at.y - waist - dartLength) < 1e-6 ? { piece: middle.name, at } : undefined;
+/** Whether a piece reaches down to the knee seam. */
+const isSkirt = ({ levels, part }: Piece): boolean =>
+  part !== 'flare' && levels.some(({ level }) => level === 'knee-seam');
+
+/**
+ * The tip of the front dart, or the place where a princess seam has taken in all it does; none where
+ * there is no dart, or one too small to reach its length.
+ */
+function dartTip(skirt: readonly Piece[], { dartLength }: GownStyle): Placed | undefined {
+  for (const piece of skirt) {
+    const waist = waistOf(piece);
+    const ends = [
+      ...(piece.darts.find(({ name }) => name === 'waist')?.centreLeg ?? []),
+      ...(piece.edges.find(({ name }) => name === 'princess')?.path ?? []),
+    ].map(({ to }) => to);
+    const at = ends.find(({ y }) => Math.abs(y - (waist ?? 0) - dartLength) < 1e-6);
+    if (at) return { piece: piece.name, at };
+  }
+  return undefined;
 }
+
+/** Height of the waist on a piece: its level, or its upper edge where the seam lies in the waist itself. */
+const waistOf = (piece: Piece): number | undefined =>
+  piece.levels.find(({ level }) => level === 'waist')?.from.y ??
+  endOf(piece.edges.find(({ name }) => name === 'centre')?.path ?? [])?.y;
 
 /**
  * Where the peak came to lie once the opening above the bust was laid flat: out along the top line it

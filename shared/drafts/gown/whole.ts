@@ -29,7 +29,6 @@ const across: readonly (readonly [LevelName, keyof SideHeights])[] = [
   ['waist', 'waist'],
   ['top-hip', 'topHip'],
   ['hip', 'hip'],
-  ['knee-seam', 'knee'],
 ];
 
 /** The pieces above the knee seam of a gown without a waist seam, and where they end on it. */
@@ -82,6 +81,8 @@ export function wholePanels(
   const centrePrincess = edge('princess', 'seam', leg('centre'), to(names.side, 'princess'));
   const sidePrincess = edge('princess', 'seam', reverse(leg('side')), to(names.centre, 'princess'));
   const own = sideDown(parts, parts.partner.side);
+  const kneeLine = (from: number, until: number): LevelLine =>
+    levelLine('knee-seam', point(from, heights.knee), point(until, heights.knee));
   const gapAt = (y: number): number => (y >= below.foot ? 0 : xAt(below.gap, y));
   const level = (
     name: LevelName,
@@ -123,7 +124,7 @@ export function wholePanels(
         centre,
       ],
       darts: [],
-      levels: across.map(([name, key]) => level(name, key, 'centre')),
+      levels: [...across.map(([name, key]) => level(name, key, 'centre')), kneeLine(0, axis)],
       notches: [
         ...marks(centrePrincess),
         ...kneeMarks(centreKnees, strokes),
@@ -147,7 +148,10 @@ export function wholePanels(
         sidePrincess,
       ],
       darts: [],
-      levels: across.map(([name, key]) => level(name, key, 'side')),
+      levels: [
+        ...across.map(([name, key]) => level(name, key, 'side')),
+        kneeLine(axis, xAt(half.line, heights.knee)),
+      ],
       notches: [...sideMarks(parts, own), ...marks(sidePrincess), ...kneeMarks(sideKnees, strokes)],
       grain: grain((axis + xAt(half.line, heights.hip)) / 2),
       drills: [],
@@ -189,9 +193,10 @@ export function wholeDarted(parts: TopParts, knees: readonly KneeStretch[]): rea
         centre,
       ],
       darts: [...topDart, ...waistDarts],
-      levels: across.map(([name, key]) =>
-        levelLine(name, point(0, levels[key]), atSide(half, key)),
-      ),
+      levels: [
+        ...across.map(([name, key]) => levelLine(name, point(0, levels[key]), atSide(half, key))),
+        levelLine('knee-seam', point(0, heights.knee), atSide(half, 'knee')),
+      ],
       notches: [
         ...sideMarks(parts, own),
         ...kneeMarks(kneeSeam, strokes),
