@@ -1,5 +1,10 @@
 import { z } from 'zod';
-import { balanceLevels, type BalanceLevel, type HouseRules } from '../drafting/house-rules.ts';
+import {
+  armholePlaces,
+  balanceLevels,
+  type BalanceLevel,
+  type HouseRules,
+} from '../drafting/house-rules.ts';
 import { houseRulePresets } from '../drafting/house-rule-presets.ts';
 
 type Balance = { [L in BalanceLevel]: z.ZodNumber };
@@ -23,6 +28,13 @@ const allowance = z.strictObject({
   hem: z.number().describe('Circular hem, mm.'),
 });
 
+const intakes = z.strictObject({
+  topLine: z.number().describe('At the height of the peak, mm.'),
+  underbust: z.number().describe('At the under-bust, mm.'),
+  waistSeam: z.number().describe('At a raised waist seam, mm.'),
+  waist: z.number().describe('At the waist, mm.'),
+});
+
 /** House rules with every value, as a draft tells them. */
 export const houseRules = z.strictObject({
   balance,
@@ -32,6 +44,12 @@ export const houseRules = z.strictObject({
   sideShare: z.number().describe('Part of the waist suppression that the side seam takes, 0 to 1.'),
   dartWidest: z.number().describe('Widest intake sewn in one dart, mm.'),
   dartClearance: z.number().describe('Darts stop this short of the bust point, mm.'),
+  armholeAt: z
+    .enum(armholePlaces)
+    .describe('Where a gown off the shoulder ends: width across, or shoulder width.'),
+  intakes: z
+    .exactOptional(intakes)
+    .describe('Intakes given outright, front and back alike; the side seam takes the rest.'),
   allowance,
 }) satisfies z.ZodType<HouseRules>;
 
@@ -52,6 +70,8 @@ export function fillRules(card: z.output<typeof rulesCard>): HouseRules {
     sideShare: card.sideShare ?? base.sideShare,
     dartWidest: card.dartWidest ?? base.dartWidest,
     dartClearance: card.dartClearance ?? base.dartClearance,
+    armholeAt: card.armholeAt ?? base.armholeAt,
+    ...(card.intakes === undefined ? {} : { intakes: card.intakes }),
     allowance: merged(base.allowance, card.allowance),
   };
 }

@@ -3,16 +3,20 @@ import { error, type Problem } from '../units/problem.ts';
 import { mm, said, type Said } from '../units/said.ts';
 import { houseRuleFigures, type HouseRuleFigure } from './house-rule-figures.ts';
 import type { HouseRules } from './house-rules.ts';
+import { intakeFigures } from './intake-figures.ts';
 
-const worded = ({ share }: HouseRuleFigure, value: number): Said =>
+/** What a figure is checked by. */
+type Bounded = Pick<HouseRuleFigure, 'label' | 'min' | 'max' | 'share'> & { readonly key: string };
+
+const worded = ({ share }: Bounded, value: number): Said =>
   share === true ? [String(value)] : [mm(value)];
 
-const holds = ({ min, max, share }: HouseRuleFigure, value: number): boolean => {
+const holds = ({ min, max, share }: Bounded, value: number): boolean => {
   const grace = share === true ? 0 : readingGrace;
   return value >= min - grace && value <= max + grace;
 };
 
-function problemOf(rule: HouseRuleFigure, value: number): Problem {
+function problemOf(rule: Bounded, value: number): Problem {
   const field = `rules.${rule.key}`;
   if (!Number.isFinite(value)) {
     return error({
@@ -28,9 +32,22 @@ function problemOf(rule: HouseRuleFigure, value: number): Problem {
   });
 }
 
+/** A figure with its value in these rules. */
+type Given = { readonly rule: Bounded; readonly value: number };
+
+const intakesGiven = ({ intakes }: HouseRules): readonly Given[] =>
+  intakes === undefined
+    ? []
+    : intakeFigures.map(({ place, label, min, max }) => ({
+        rule: { key: `intakes.${place}`, label, min, max },
+        value: intakes[place],
+      }));
+
 /** What is wrong in a workroom's house rules: every value outside its bounds, with both of them. */
 export const checkRules = (rules: HouseRules): readonly Problem[] =>
-  houseRuleFigures
-    .map((rule) => ({ rule, value: rule.value(rules) }))
+  [
+    ...houseRuleFigures.map((rule): Given => ({ rule, value: rule.value(rules) })),
+    ...intakesGiven(rules),
+  ]
     .filter(({ rule, value }) => !holds(rule, value))
     .map(({ rule, value }) => problemOf(rule, value));

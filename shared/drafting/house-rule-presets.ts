@@ -11,6 +11,7 @@ const shared = {
 export const balanced: HouseRules = {
   balance: { chest: 6, bust: 10, underbust: -5, waist: 5, topHip: 2, hip: 0, knee: -5 },
   cupShare: 0.15,
+  armholeAt: 'across',
   ...shared,
 };
 
@@ -18,8 +19,13 @@ export const balanced: HouseRules = {
 export const quarterRule: HouseRules = {
   balance: { chest: 0, bust: 0, underbust: 0, waist: 0, topHip: 0, hip: 0, knee: 0 },
   cupShare: 0,
+  armholeAt: 'shoulder',
   ...shared,
 };
+
+/** Whether rules move the side seam nowhere, as the plain quarter rule does. */
+export const isQuarterRule = ({ balance }: HouseRules): boolean =>
+  Object.values(balance).every((each) => each === 0);
 
 /** The presets a rules file may start from. */
 export const houseRulePresets = { balanced, quarterRule } as const;

@@ -17,6 +17,14 @@ export type EdgeKind = (typeof edgeKinds)[number];
 /** How many darts or gores a half has, for each half that is not to decide by its own measures. */
 type Counts<N extends number> = { readonly front?: N; readonly back?: N };
 
+/** The places at which a maker may give the intake of dart or princess outright, from the top down. */
+export const intakePlaces = ['topLine', 'underbust', 'waistSeam', 'waist'] as const;
+export type IntakePlace = (typeof intakePlaces)[number];
+
+/** Where a gown off the shoulder ends: at the width across front and back, or at the shoulder width. */
+export const armholePlaces = ['across', 'shoulder'] as const;
+export type ArmholePlace = (typeof armholePlaces)[number];
+
 /** How a workroom drafts (method sections 4, 6, 7), millimetres; they travel with the draft. */
 export type HouseRules = {
   /** Added to the front quarter and taken from the back one, by level. */
@@ -29,6 +37,9 @@ export type HouseRules = {
   readonly dartWidest: number;
   /** Darts stop this short of the bust point. */
   readonly dartClearance: number;
+  readonly armholeAt: ArmholePlace;
+  /** Intakes given outright, front and back alike: the side seam takes the rest. Absent, they are derived. */
+  readonly intakes?: { readonly [P in IntakePlace]: number } | undefined;
   /** Allowance beyond the seam line by kind of edge; a fold has none. */
   readonly allowance: {
     readonly seam: number;

@@ -51,6 +51,21 @@ export function contours(
   };
 }
 
+/**
+ * Where the maker gives the opening outright, front and back take it alike and the side leans by what it
+ * may of the rest; what neither takes is left, and the chest is not held.
+ */
+export const outrightContours =
+  (opening: number) =>
+  (...[front, back, rise]: Parameters<typeof contours>): ReturnType<typeof contours> => {
+    const half = ({ bust, chest }: typeof front): Contour => ({
+      reduction: bust - chest,
+      lean: Math.max(-rise * leanOut, Math.min(bust - chest - opening, rise * leanIn)),
+      opening,
+    });
+    return { front: half(front), back: half(back), moved: 0 };
+  };
+
 /** An upper chest larger than both can hold at 3 degrees: the sides lean out alike. */
 function bothLeanOut(frontR: number, backR: number, moved: number): ReturnType<typeof contours> {
   const each = (frontR + backR) / 2;

@@ -4,7 +4,13 @@ import type { Cubic } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { type Profile, slopeAt, xAt } from '../../geometry/profile.ts';
 import { type Fading, heldBelow } from './fading.ts';
-import { bustToHip, narrowestDart, shareSuppression, sideLine } from './side-line.ts';
+import {
+  bustToHip,
+  narrowestDart,
+  outrightSuppression,
+  shareSuppression,
+  sideLine,
+} from './side-line.ts';
 import type { SideHeights, SideWidths, Suppression } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
 import { type SideArcs, towards, truedHeights } from './truing.ts';
@@ -106,13 +112,13 @@ const dampedFrom = 14;
  * answer where the girths change so fast that they do not settle.
  */
 export function drawHalf(inputs: HalfInputs): Half | undefined {
-  const { quarters, levels, rules } = inputs;
+  const { quarters, levels } = inputs;
   const shares = dartShares(inputs.dartCount);
   const darts: DartPlan = {
     shares,
     tips: shares.map((_, k) => Math.max(levels.waist, inputs.dartTip - 20 * k)),
   };
-  const suppression = shareSuppression(quarters, rules.sideShare, (waist) => ({
+  const suppression = suppressionOf(inputs, (waist) => ({
     line: bustToHip(levels, plainWidths(inputs, darts, waist)),
     top: levels.bust,
     foot: levels.hip,
@@ -153,6 +159,15 @@ export function drawHalf(inputs: HalfInputs): Half | undefined {
     fading: inputs.fading,
     held: round.held,
   };
+}
+
+/** Who takes the waist suppression: shared by the house, or as the maker gives the dart outright. */
+function suppressionOf(
+  { quarters, rules }: HalfInputs,
+  lineFor: Parameters<typeof shareSuppression>[2],
+): Suppression {
+  if (!rules.intakes) return shareSuppression(quarters, rules.sideShare, lineFor);
+  return outrightSuppression(quarters, rules.intakes.waist, lineFor);
 }
 
 /** Where a dart begins to run out and where the top hip lies on its axis. */
@@ -215,16 +230,20 @@ function nextRound(
 ): Round {
   const { levels, quarters } = inputs;
   const raised = inputs.waistSeam === 'raised';
+  const given = inputs.rules.intakes;
   const mouths = mouthsOn(last.axes, darts.shares, last.gap.seam);
-  // A seam in the waist itself is held by the waist's own width.
-  const atWaist = !raised && last.held.seam ? last.seam.to.x : waist;
+  // A seam in the waist itself is held by the waist's own width, where it is held or its intake given.
+  const onSeam = last.seam.to.x + (given ? intakeAtSeam(given, raised) : 0);
+  const atWaist = !raised && (last.held.seam || given) ? onSeam : waist;
   const widths: SideWidths = {
     ...widthsAt(inputs, darts, atWaist, raised ? waist - quarters.waist : last.gap.seam, (k) => ({
       from: raised ? levels.waist : seamAt(last.seam, mouths[k] ?? inputs.axis).y,
       topHip: heightOn({ levels, ...last }, 'topHip', last.axes[k] ?? inputs.axis),
     })),
-    ...(last.held.underbust ? { underbust: quarters.underbust } : {}),
-    ...(raised && last.held.seam ? { seam: last.seam.to.x } : {}),
+    ...(last.held.underbust || given
+      ? { underbust: quarters.underbust + (given?.underbust ?? 0) }
+      : {}),
+    ...(raised && (last.held.seam || given) ? { seam: onSeam } : {}),
   };
   const line = sideLine(last.heights, helped(inputs, widths, last.heights));
   const slope = inputs.seamSlope ?? -slopeAt(line, last.heights.seam);
@@ -233,8 +252,8 @@ function nextRound(
   const underbust = xAt(line, last.heights.underbust) - quarters.underbust;
   const opening = xAt(line, last.heights.seam) - seam.to.x;
   const held = {
-    underbust: last.held.underbust || underbust < 0,
-    seam: last.held.seam || opening < narrowestDart,
+    underbust: last.held.underbust || (given ? given.underbust === 0 : underbust < 0),
+    seam: last.held.seam || (given ? intakeAtSeam(given, raised) === 0 : opening < narrowestDart),
   };
   const gap = {
     underbust: held.underbust ? 0 : underbust,
@@ -249,6 +268,10 @@ function nextRound(
     held,
   };
 }
+
+/** What the maker takes in where top and skirt meet. */
+const intakeAtSeam = (given: NonNullable<HouseRules['intakes']>, raised: boolean): number =>
+  raised ? given.waistSeam : given.waist;
 
 /** How far the seam falls at the side: the back's raised seam is trued to the front's, a seam in the waist is its own. */
 function fallOf(inputs: HalfInputs, heights: SideHeights, slope: number): number {

@@ -2,7 +2,7 @@ import { DraftingError } from '../../drafting/drafting-error.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import { slopeAt } from '../../geometry/profile.ts';
 import { said } from '../../units/said.ts';
-import { type Contour, contours } from './contour.ts';
+import { type Contour, contours, outrightContours } from './contour.ts';
 import { fadingOf } from './fading.ts';
 import { type Half, type HalfInputs, type QuarterWidths, drawHalf } from './half.ts';
 import { refuseCrowdedIntakes } from './intakes.ts';
@@ -50,10 +50,10 @@ export type PairInputs = {
 /** One dart, or two where one would be wider than the house sews (or, in a top, too blunt at its tip). */
 function dartCount(half: Half, inputs: PairInputs): 1 | 2 {
   const { rules, style } = inputs;
+  // One princess seam from the top edge to the knee takes whatever there is; so does an intake given outright.
+  if (half.fading === 'seam' || rules.intakes) return 1;
   const settled = rules.counts?.darts?.[half.side];
   if (settled !== undefined) return settled;
-  // One princess seam from the top edge to the knee takes whatever there is.
-  if (half.fading === 'seam') return 1;
   const widest = Math.max(half.gap.seam, half.gap.waist);
   if (widest > rules.dartWidest) return 2;
   if (style.shaping === 'princess') return 1;
@@ -113,7 +113,7 @@ type Drawn = { readonly front: Half; readonly back: Half };
 function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefined {
   const { levels, style, rules, quarters } = inputs;
   const widths = { front: widthsOf(quarters.front), back: widthsOf(quarters.back) };
-  const contour = contours(
+  const contour = (rules.intakes ? outrightContours(rules.intakes.topLine) : contours)(
     { bust: quarters.front.bust.value, chest: quarters.front.chest.value },
     { bust: quarters.back.bust.value, chest: quarters.back.chest.value },
     levels.bust - levels.underarm,

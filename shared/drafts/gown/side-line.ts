@@ -117,6 +117,26 @@ export function shareSuppression(
   };
 }
 
+/** The suppression where the maker gives the dart outright: the side seam takes what it leaves, however it leans. */
+export function outrightSuppression(
+  quarters: { readonly bust: number; readonly waist: number; readonly hip: number },
+  dart: number,
+  lineFor: (waist: number) => {
+    readonly line: Profile;
+    readonly top: number;
+    readonly foot: number;
+  },
+): Suppression {
+  const side = quarters.waist + dart;
+  const { line, top, foot } = lineFor(side);
+  return {
+    whole: (quarters.bust + quarters.hip) / 2 - quarters.waist,
+    side,
+    dart,
+    steep: steepest(line, top, foot) > steepestLean + 1e-6,
+  };
+}
+
 /** Least width from `side` out to `limit` at which the lean is small enough, else the least leaning. */
 function leastOutward(side: number, limit: number, leanAt: (waist: number) => number): number {
   const steps = 12;

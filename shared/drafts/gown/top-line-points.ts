@@ -5,8 +5,9 @@ import { type GownStyle, isOffShoulder } from './style-card.ts';
 import type { TopLinePoints } from './top-line.ts';
 import { heightAtArc } from './truing.ts';
 
-/** Off the shoulder the top line ends at least this far inside the side line (our rule). */
-const insideSide = 12;
+/** Off the shoulder the top line ends inside the side line by this, and by this part of the armhole's height (our rule). */
+const insideSide = 20;
+const hollowShare = 0.4;
 
 /** What the top line of a half is drawn from: half the width of the body there, and its opening. */
 export type TopWidth = { readonly halfAcross: number; readonly opening: number };
@@ -35,7 +36,9 @@ function sideEnd(half: Half, front: Half, style: GownStyle): End {
 
 /** Off the shoulder: at the armhole, half the width across out, and the opening more. */
 function shoulderEnd(half: Half, style: GownStyle, { halfAcross, opening }: TopWidth): End {
-  const most = xAt(half.line, half.heights.underarm) - insideSide;
+  const { underarm } = half.heights;
+  const inside = Math.max(insideSide, hollowShare * (underarm - style.sideDepth));
+  const most = xAt(half.line, underarm) - inside;
   return { side: point(Math.min(halfAcross + opening, most), style.sideDepth) };
 }
 
