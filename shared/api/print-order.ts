@@ -38,5 +38,5 @@ export const printOrder = z.strictObject({
   lines: z.enum(lineChoices).default(plainOrder.lines),
   inkSaving: z.boolean().default(plainOrder.inkSaving),
   scale: z.literal(printScales).default(plainOrder.scale),
-  leftOut: z.array(z.string().max(8)).max(mostLeftOut).default([]),
+  leftOut: z.array(z.string().max(8)).max(mostLeftOut).readonly().default([]),
 }) satisfies z.ZodType<PrintOrder>;

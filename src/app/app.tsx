@@ -24,6 +24,14 @@ const router = createBrowserRouter([
         }),
       },
       {
+        path: paths.tablePrint,
+        lazy: async () => ({ Component: (await import('./try-print-place.tsx')).TryPrintPlace }),
+      },
+      {
+        path: paths.gownPrint,
+        lazy: async () => ({ Component: (await import('./gown-print-place.tsx')).GownPrintPlace }),
+      },
+      {
         path: paths.gown,
         lazy: async () => ({ Component: (await import('./gown-place.tsx')).GownPlace }),
       },

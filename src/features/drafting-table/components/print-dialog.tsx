@@ -1,4 +1,5 @@
 import { useMemo, useState } from 'react';
+import { Link } from 'react-router-dom';
 
 import type { Draft } from '#shared/engine/draft.ts';
 import { presetOrder } from '#shared/sheets/print-order.ts';
@@ -86,6 +87,17 @@ const PrintChoices = ({ draft, state }: Omit<PrintDialogProps, 'open' | 'onClose
           sheets={sheets.gown}
           order={{ ...order, kind: 'whole-gown' }}
         />
+      </div>
+      <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1 border-b border-rule py-3 sm:flex-nowrap">
+        <p className="basis-full text-sm text-slate sm:basis-auto">
+          Every paper, piece by piece, with a page plan before you print, and a scale check after.
+        </p>
+        <Link
+          to="print"
+          className="ml-auto inline-flex min-h-10 w-32 shrink-0 items-center justify-center rounded-one border border-rule bg-paper px-2"
+        >
+          Print room
+        </Link>
       </div>
       <FilesToKeep order={order} />
       <p className="mt-4 text-sm text-slate">

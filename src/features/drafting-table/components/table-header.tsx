@@ -23,6 +23,7 @@ type TableHeaderProps = {
 /** Above the table: on a phone in two rows, the gown and its keeping in the second. */
 export const TableHeader = (props: TableHeaderProps) => {
   const { bench, dispatch, onPrint, places, title, children } = props;
+  const drawn = bench.table.drawn.draft !== undefined;
   return (
     <header className="flex shrink-0 flex-wrap items-center gap-x-2 border-b border-rule px-3 py-2 sm:gap-x-4 sm:px-4 lg:flex-nowrap">
       <Link to="/" aria-label="Ellwand, to the front page">
@@ -46,18 +47,18 @@ export const TableHeader = (props: TableHeaderProps) => {
           onChoose={(unit) => dispatch({ type: 'unit', unit })}
         />
       </span>
-      <Button
-        kind="primary"
-        className="order-2 lg:order-4"
-        disabled={bench.table.drawn.draft === undefined}
-        onClick={onPrint}
-      >
+      <Button kind="primary" className="order-2 lg:order-4" disabled={!drawn} onClick={onPrint}>
         Print
       </Button>
       <span className="order-3 basis-full lg:hidden" />
-      {places !== undefined && (
-        <nav aria-label="Places" className="order-4 lg:order-1">
+      {(places !== undefined || drawn) && (
+        <nav aria-label="Places" className="order-4 flex gap-4 whitespace-nowrap lg:order-1">
           {places}
+          {drawn && (
+            <Link to="print" className="text-slate hover:text-ink max-sm:hidden">
+              Print room
+            </Link>
+          )}
         </nav>
       )}
       <div className="order-4 flex min-w-0 grow items-center gap-x-2 lg:order-3 lg:gap-x-4">

@@ -1,0 +1,22 @@
+import { useState } from 'react';
+
+import { keptTable } from '../features/drafting-table/saved-table.ts';
+import { PrintRoomPage } from '../features/print-room/routes/print-room-page.tsx';
+import { measuresInInches } from '../lib/reader.ts';
+import { paths } from './paths.ts';
+
+/** The print room for what lies on the table at Try it. */
+export const TryPrintPlace = () => {
+  const [table] = useState(() => keptTable(measuresInInches() ? 'in' : 'cm'));
+  const { drawn, name, unit } = table;
+  return (
+    <PrintRoomPage
+      draft={drawn.draft}
+      fresh={drawn.fresh}
+      title={name === '' ? 'A gown to try' : `${name} · gown`}
+      unit={unit}
+      table={paths.table}
+      maker="try"
+    />
+  );
+};

@@ -1,0 +1,81 @@
+import type { SheetPlan } from '#shared/sheets/sheet-plan.ts';
+import type { Unit } from '#shared/units/said.ts';
+import { speak } from '#shared/units/speak.ts';
+
+import { Button } from '../../../ui/button.tsx';
+import { RodProgress } from '../../../ui/rod-progress.tsx';
+import { seamsToGlue } from '../plan-picture.ts';
+import type { Planning } from '../use-plan.ts';
+
+type PlanCountProps = {
+  readonly planning: Planning;
+  readonly leftOut: readonly string[];
+  readonly unit: Unit;
+  readonly onCancel: () => void;
+  readonly onAgain: () => void;
+};
+
+/** The plan in one sentence, or how it comes about. */
+export const PlanCount = ({ planning, leftOut, unit, onCancel, onAgain }: PlanCountProps) => {
+  if (planning.kind === 'arranging') {
+    const { progress } = planning;
+    return (
+      <p className="flex flex-wrap items-center gap-x-3">
+        <RodProgress
+          label="Arranging the pieces"
+          share={progress === undefined ? undefined : progress.moves / progress.of}
+        />
+        <span className="figures" aria-hidden="true">
+          {progress === undefined ? 'Arranging…' : `Arranging: ${progress.sheets} sheets so far`}
+        </span>
+        <Button kind="quiet" slim onClick={onCancel}>
+          Cancel
+        </Button>
+      </p>
+    );
+  }
+  return (
+    <div role="status" className="figures leading-snug">
+      {planning.kind === 'planned' && <Counted plan={planning.plan} leftOut={leftOut} />}
+      {planning.kind === 'waiting' && (
+        <p className="text-madder">Nothing to arrange yet: mend what is marked.</p>
+      )}
+      {planning.kind === 'refused' && (
+        <p className="text-madder">{speak(planning.problem.said, unit)}</p>
+      )}
+      {(planning.kind === 'called off' || planning.kind === 'failed') && (
+        <p className="flex flex-wrap items-center gap-x-3">
+          {planning.kind === 'failed'
+            ? 'The pieces could not be arranged.'
+            : 'Arranging was called off.'}
+          <Button slim onClick={onAgain}>
+            Arrange again
+          </Button>
+        </p>
+      )}
+    </div>
+  );
+};
+
+type CountedProps = { readonly plan: SheetPlan; readonly leftOut: readonly string[] };
+
+const Counted = ({ plan, leftOut }: CountedProps) => {
+  const { paper, tiles } = plan.plan;
+  const laid = tiles.filter(({ name }) => !leftOut.includes(name)).length;
+  const seams = seamsToGlue(plan, leftOut);
+  return (
+    <>
+      <p className="text-lg font-semibold">{`${counted(laid + 1, 'sheet')} of ${paper.name}`}</p>
+      <p className="text-sm text-slate">
+        {[
+          `the cover and ${laid} to lay out`,
+          `${counted(seams, 'seam')} to glue`,
+          ...(leftOut.length === 0 ? [] : [`${leftOut.length} left out`]),
+        ].join(' · ')}
+      </p>
+    </>
+  );
+};
+
+const counted = (count: number, what: string): string =>
+  `${count} ${what}${count === 1 ? '' : 's'}`;
