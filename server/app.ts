@@ -8,6 +8,7 @@ import { draftsRouter } from './features/drafts/router.ts';
 import { gownsRouter } from './features/gowns/router.ts';
 import { createGown } from './features/gowns/service.ts';
 import { measureCardsRouter } from './features/measure-cards/router.ts';
+import { peopleRouter } from './features/people/router.ts';
 import type { Printer } from './features/print/printer.ts';
 import { printRouter } from './features/print/router.ts';
 import { samplesRouter } from './features/samples/router.ts';
@@ -65,6 +66,7 @@ export function buildApp(parts: Parts): Express {
   app.use(accountRouter(own, (maker, gown) => createGown(own, maker, gown)));
   app.use(gownsRouter(own));
   app.use(measureCardsRouter(own));
+  app.use(peopleRouter(own));
   app.use('/api', nothingHere);
   app.use(parts.screens);
   app.use(nothingHere);

@@ -6,6 +6,7 @@ import { gownRevisions } from './schema/gown-revisions.ts';
 import { gowns } from './schema/gowns.ts';
 import { knownDevices } from './schema/known-devices.ts';
 import { measureCards } from './schema/measure-cards.ts';
+import { people } from './schema/people.ts';
 import { sampleGowns } from './schema/sample-gowns.ts';
 import { saves } from './schema/saves.ts';
 import { sessions } from './schema/sessions.ts';
@@ -17,6 +18,7 @@ const schema = {
   gowns,
   knownDevices,
   measureCards,
+  people,
   sampleGowns,
   saves,
   sessions,

@@ -4,6 +4,7 @@ import { RefusalError } from './refusal.ts';
 export const mostKept = {
   gowns: 500,
   measureCards: 500,
+  people: 500,
   /** Of one gown. */
   namedRevisions: 100,
   automaticRevisions: 50,
@@ -13,7 +14,7 @@ export const mostKept = {
 
 /** Refuses what would be one too many; nothing there is touched. */
 export function refuseOneTooMany(
-  what: 'gowns' | 'measure cards' | 'named revisions of one gown',
+  what: 'gowns' | 'measure cards' | 'people' | 'named revisions of one gown',
   present: number,
   most: number,
 ): void {

@@ -12,6 +12,8 @@ export const statusOf: { readonly [C in RefusalCode]: number } = {
   'not-found': 404,
   'method-not-allowed': 405,
   'account-full': 409,
+  'another-person': 409,
+  'card-in-use': 409,
   conflict: 409,
   'engine-changed': 409,
   'precondition-failed': 412,

@@ -27,7 +27,13 @@ export const gownContent = z.strictObject({
 export type GownContent = z.output<typeof gownContent>;
 
 /** A gown as it is put on the server for the first time. */
-export const gownCreation = z.strictObject({ saveId, title: givenName, content: gownContent });
+export const gownCreation = z.strictObject({
+  saveId,
+  title: givenName,
+  content: gownContent,
+  /** The measure card it is drawn from; it is then that person's gown. */
+  cardId: z.uuid().optional(),
+});
 
 /** Outlines of the pieces as one SVG path in a box from 0, 0; whole numbers, a few hundred letters. */
 const picture = z.object({ width: z.number(), height: z.number(), path: z.string() });
@@ -44,6 +50,9 @@ const summary = {
   drawnBy: z.string().nullable(),
   /** Whether the pieces are those of the inputs as they stand; else they are the last good ones. */
   fresh: z.boolean(),
+  /** Whom it is made for, and the measure card that was laid on it last. */
+  personId: z.uuid().nullable(),
+  cardId: z.uuid().nullable(),
 };
 
 /** The pieces a gown keeps, and what they were drawn from. */
@@ -113,6 +122,36 @@ export const saveGown = endpoint({
     engine: z.string().max(20),
     content: gownContent,
     keepReplaced: z.boolean().default(false),
+  }),
+  reply: { kind: 'json', schema: saved },
+});
+
+/**
+ * Notes that a measure card was laid on the gown, which is then that person's; from now on the card is
+ * not changed any more. Refused as `another-person` where the gown is somebody else's.
+ */
+export const noteCard = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/card',
+  params,
+  body: z.strictObject({ cardId: z.uuid() }),
+  reply: doneReply,
+});
+
+/**
+ * Redraws the gown for another measure card, its depths as given. What stood there is kept as a
+ * revision, and the gown as regraded is kept as a revision that names it as its parent.
+ */
+export const regradeGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/regrade',
+  params,
+  body: z.strictObject({
+    saveId,
+    baseVersion,
+    engine: z.string().max(20),
+    cardId: z.uuid(),
+    style: styleCard,
   }),
   reply: { kind: 'json', schema: saved },
 });

@@ -18,6 +18,13 @@ const summary = {
   savedAt: z.iso.datetime(),
   /** Measures taken so far, of the core ones and of all. */
   taken: z.object({ core: z.int(), all: z.int() }),
+  person: z.object({ id: z.uuid(), name: z.string() }),
+  /** Day the measures were taken. */
+  takenOn: z.iso.date(),
+  /** The card it was copied from as its start. */
+  startedFrom: z.uuid().nullable(),
+  /** Gowns it was laid on: as long as there are any it is not changed any more. */
+  usedBy: z.array(z.object({ id: z.uuid(), title: z.string() })),
 };
 
 /** A measure card in full; also what a `conflict` carries as `current`. */
@@ -36,11 +43,38 @@ export const listMeasureCards = endpoint({
   reply: { kind: 'json', schema: z.object({ cards: z.array(z.object(summary)) }) },
 });
 
+/**
+ * Puts a card on the server; it belongs to `personId`, or else to whoever of the maker's list is named
+ * on it, who is put on the list where nobody is called so. Without a day it bears the present one.
+ */
 export const createMeasureCard = endpoint({
   method: 'POST',
   path: '/api/measure-cards',
-  body: z.strictObject({ saveId, name: givenName, content: cardContent }),
+  body: z.strictObject({
+    saveId,
+    name: givenName,
+    content: cardContent,
+    personId: z.uuid().optional(),
+  }),
   reply: created,
+});
+
+/** Starts the next card of the same person as a copy of this one, taken on another day. */
+export const startNextCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/next',
+  params: z.object({ cardId: z.uuid() }),
+  body: z.strictObject({ saveId, name: givenName, takenOn: z.iso.date() }),
+  reply: created,
+});
+
+/** Says whose card it is after all; gowns it was laid on go along. */
+export const giveMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/give',
+  params: z.object({ cardId: z.uuid() }),
+  body: z.strictObject({ personId: z.uuid() }),
+  reply: { kind: 'json', schema: done },
 });
 
 export const readMeasureCard = endpoint({
@@ -51,7 +85,7 @@ export const readMeasureCard = endpoint({
   reply: { kind: 'json', schema: keptCardSchema },
 });
 
-/** Saves a card; gowns already drawn keep the measures they were drawn from. */
+/** Saves a card; refused as `card-in-use` once it was laid on a gown. */
 export const saveMeasureCard = endpoint({
   method: 'POST',
   path: '/api/measure-cards/:cardId/save',

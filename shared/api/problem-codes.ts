@@ -18,6 +18,10 @@ export const refusalCodes = [
   'not-found',
   /** The account keeps as many of these as it may. */
   'account-full',
+  /** The measure card was laid on a gown: its measures stay as they are. */
+  'card-in-use',
+  /** The gown is made for somebody else than the measure card is. */
+  'another-person',
   /** Saved meanwhile from somewhere else: `current` is how it now stands. */
   'conflict',
   /** This page and the server draw by different rules: open the page again. */

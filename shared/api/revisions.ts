@@ -12,8 +12,10 @@ const summary = {
   automatic: z.boolean(),
   /** Version of the gown it is a copy of. */
   version: z.int(),
-  /** The revision the gown had last been returned to by then, if any. */
+  /** The revision the gown came from by then: last returned to, or regraded from. */
   parentId: z.uuid().nullable(),
+  /** The measure card that had been laid on it last. */
+  cardId: z.uuid().nullable(),
   createdAt: z.iso.datetime(),
   drawnBy: z.string().nullable(),
 };

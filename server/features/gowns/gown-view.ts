@@ -26,6 +26,8 @@ const summaryOf = (row: ListedGownRow) => ({
   savedAt: row.savedAt.toISOString(),
   drawnBy: row.engine,
   fresh: row.fresh,
+  personId: row.personId,
+  cardId: row.cardId,
 });
 
 /** A gown as it stands in a list. */

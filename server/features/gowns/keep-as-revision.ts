@@ -4,6 +4,7 @@ import { mostKept } from '../../http/most-kept.ts';
 import type { GownRow } from './repository.ts';
 import {
   dropOldestAutomatic,
+  findNamed,
   insertRevision,
   isKept,
   type RevisionRow,
@@ -17,6 +18,7 @@ export const copyOf = (row: GownRow, name: string, automatic: boolean): Revision
   automatic,
   version: row.version,
   parentId: row.parentId,
+  cardId: row.cardId,
   createdAt: new Date(),
   typed: row.typed,
   unread: row.unread,
@@ -36,4 +38,13 @@ export async function keepAsRevision(store: Store, row: GownRow, name: string): 
   if (await isKept(store, row.id, row.version)) return;
   await insertRevision(store, copyOf(row, name, true));
   await dropOldestAutomatic(store, row.id, mostKept.automaticRevisions);
+}
+
+/** Keeps a gown under a name for good, unless a maker named this version already; gives the revision. */
+export async function keepForGood(store: Store, row: GownRow, name: string): Promise<RevisionRow> {
+  const named = await findNamed(store, row.id, row.version);
+  if (named !== undefined) return named;
+  const revision = copyOf(row, name, false);
+  await insertRevision(store, revision);
+  return revision;
 }

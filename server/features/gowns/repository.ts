@@ -1,15 +1,24 @@
 import { and, desc, eq, getTableColumns, sql } from 'drizzle-orm';
 import type { Store } from '../../database/client.ts';
 import { gowns } from '../../database/schema/gowns.ts';
+import { measureCards } from '../../database/schema/measure-cards.ts';
 
 export type GownRow = typeof gowns.$inferSelect;
 
 /** What a save replaces. */
 export type GownChange = Omit<
   GownRow,
-  'id' | 'accountId' | 'version' | 'archivedAt' | 'createdAt' | 'title' | 'parentId'
+  | 'id'
+  | 'accountId'
+  | 'version'
+  | 'archivedAt'
+  | 'createdAt'
+  | 'title'
+  | 'parentId'
+  | 'cardId'
+  | 'personId'
 > &
-  Partial<Pick<GownRow, 'parentId'>>;
+  Partial<Pick<GownRow, 'parentId' | 'cardId' | 'personId'>>;
 
 const {
   typed: _typed,
@@ -80,7 +89,7 @@ async function set(
   store: Store,
   accountId: string,
   id: string,
-  change: Partial<Pick<GownRow, 'title' | 'archivedAt'>>,
+  change: Partial<Pick<GownRow, 'title' | 'archivedAt' | 'cardId' | 'personId'>>,
 ): Promise<boolean> {
   const changed = await store
     .update(gowns)
@@ -95,3 +104,27 @@ export const setGownTitle = (store: Store, accountId: string, id: string, title:
 
 export const setGownArchived = (store: Store, accountId: string, id: string, at: Date | null) =>
   set(store, accountId, id, { archivedAt: at });
+
+/** Which card was laid on a gown last, and whose gown it is by that. */
+export const setGownCard = (
+  store: Store,
+  accountId: string,
+  id: string,
+  card: Pick<LaidCard, 'id' | 'personId'>,
+) => set(store, accountId, id, { cardId: card.id, personId: card.personId });
+
+export type LaidCard = typeof measureCards.$inferSelect;
+
+/** A measure card of the account, held so that it stays until the transaction ends. */
+export async function findLaidCard(
+  store: Store,
+  accountId: string,
+  id: string,
+): Promise<LaidCard | undefined> {
+  const [row] = await store
+    .select()
+    .from(measureCards)
+    .where(and(eq(measureCards.id, id), eq(measureCards.accountId, accountId)))
+    .for('share');
+  return row;
+}

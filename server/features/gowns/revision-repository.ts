@@ -62,6 +62,26 @@ export async function isKept(store: Store, gownId: string, version: number): Pro
   return rows.length > 0;
 }
 
+/** The named revision of a version of a gown, if there is one. */
+export async function findNamed(
+  store: Store,
+  gownId: string,
+  version: number,
+): Promise<RevisionRow | undefined> {
+  const [row] = await store
+    .select()
+    .from(gownRevisions)
+    .where(
+      and(
+        eq(gownRevisions.gownId, gownId),
+        eq(gownRevisions.version, version),
+        eq(gownRevisions.automatic, false),
+      ),
+    )
+    .limit(1);
+  return row;
+}
+
 export async function insertRevision(store: Store, row: RevisionRow): Promise<void> {
   await store.insert(gownRevisions).values(row);
 }

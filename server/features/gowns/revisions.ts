@@ -36,6 +36,7 @@ const listed = (row: ListedRevisionRow): Listed => ({
   automatic: row.automatic,
   version: row.version,
   parentId: row.parentId,
+  cardId: row.cardId,
   createdAt: row.createdAt.toISOString(),
   drawnBy: row.engine,
 });
@@ -107,5 +108,6 @@ export const returnToRevision = (
       content: contentOf(revision),
       drawing: { engine, draftNumber, drawnFrom, pieces, picture, fresh },
       parentId: revisionId,
+      cardId: revision.cardId,
     };
   });

@@ -4,7 +4,9 @@ import {
   createGown,
   duplicateGown,
   listGowns,
+  noteCard,
   readGown,
+  regradeGown,
   renameGown,
   saveGown,
   unarchiveGown,
@@ -19,6 +21,7 @@ import { addressLimit } from '../../http/address-limit.ts';
 import { doneTo } from '../../http/conflict.ts';
 import { type Own, serveOwn } from '../../http/serve-own.ts';
 import { listedGown } from './gown-view.ts';
+import * as regrading from './regrading.ts';
 import { listGownRows, setGownArchived, setGownTitle } from './repository.ts';
 import * as revisions from './revisions.ts';
 import * as service from './service.ts';
@@ -39,6 +42,12 @@ export function gownsRouter(own: Own): Router {
   );
   serveOwn(router, sessions, saveGown, (body, { caller, params }) =>
     service.saveGown(own, caller, params.gownId, body),
+  );
+  serveOwn(router, sessions, noteCard, (body, { caller, params }) =>
+    regrading.noteCard(own, caller, params.gownId, body),
+  );
+  serveOwn(router, sessions, regradeGown, (body, { caller, params }) =>
+    regrading.regradeGown(own, caller, params.gownId, body),
   );
   serveOwn(router, sessions, duplicateGown, (body, { caller, params }) =>
     service.duplicateGown(own, caller, params.gownId, body),

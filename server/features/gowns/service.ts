@@ -18,13 +18,15 @@ import { RefusalError } from '../../http/refusal.ts';
 import { lastingTurn } from '../../http/turn-of.ts';
 import { kept, nothingDrawn } from './drawing.ts';
 import { contentOf, gownView } from './gown-view.ts';
-import { keepAsRevision } from './keep-as-revision.ts';
+import { keepAsRevision, keepForGood } from './keep-as-revision.ts';
 import {
   countGowns,
   findGown,
+  findLaidCard,
   type GownRow,
   holdGown,
   insertGown,
+  type LaidCard,
   replaceGown,
 } from './repository.ts';
 import {
@@ -66,12 +68,25 @@ async function putBefore(
   return savedAs(sameSave(before, gown?.id, 1));
 }
 
+/** The card a gown is drawn from; it stays while the transaction lasts. */
+export async function laidCard(turn: Store, accountId: string, id: string): Promise<LaidCard> {
+  const card = await findLaidCard(turn, accountId, id);
+  if (card === undefined) throw notFound('measure card');
+  return card;
+}
+
 /** Puts a gown on the server once, however often it is sent. */
 async function putGown(
   { database }: Workroom,
   maker: Maker,
   saveId: string,
-  parts: { readonly title: string; readonly content: GownContent; readonly drawing: Drawing },
+  parts: {
+    readonly title: string;
+    readonly content: GownContent;
+    readonly drawing: Drawing;
+    readonly cardId?: string | null | undefined;
+    readonly personId?: string | null;
+  },
 ): Promise<Saved> {
   const { accountId } = maker;
   const now = new Date();
@@ -82,6 +97,7 @@ async function putGown(
     }
     await holdAccount(turn, accountId);
     refuseOneTooMany('gowns', await countGowns(turn, accountId), mostKept.gowns);
+    const card = parts.cardId ? await laidCard(turn, accountId, parts.cardId) : undefined;
     await insertGown(turn, {
       id: save.record,
       accountId,
@@ -93,6 +109,8 @@ async function putGown(
       savedDevice: maker.device,
       savedSession: maker.sessionId,
       parentId: null,
+      cardId: card?.id ?? null,
+      personId: card?.personId ?? parts.personId ?? null,
       ...columnsOf(parts.content),
       ...parts.drawing,
     });
@@ -103,12 +121,17 @@ async function putGown(
 export async function createGown(
   workroom: Workroom,
   maker: Maker,
-  { saveId, title, content }: Received<typeof creation>,
+  { saveId, title, content, cardId }: Received<typeof creation>,
 ): Promise<Saved> {
   const before = await putBefore(workroom.database, maker, saveId);
   if (before !== undefined) return before;
   const drawing = await workroom.drafter.drawing(content, lastingTurn(maker.accountId));
-  return putGown(workroom, maker, saveId, { title, content, drawing: drawing ?? nothingDrawn });
+  return putGown(workroom, maker, saveId, {
+    title,
+    content,
+    drawing: drawing ?? nothingDrawn,
+    cardId,
+  });
 }
 
 export async function duplicateGown(
@@ -119,9 +142,10 @@ export async function duplicateGown(
 ): Promise<Saved> {
   const row = await findGown(workroom.database, maker.accountId, id);
   if (row === undefined) throw notFound('gown');
-  const { engine, draftNumber, drawnFrom, pieces, picture, fresh } = row;
+  const { engine, draftNumber, drawnFrom, pieces, picture, fresh, cardId, personId } = row;
   const drawing = { engine, draftNumber, drawnFrom, pieces, picture, fresh };
-  return putGown(workroom, maker, saveId, { title, content: contentOf(row), drawing });
+  const content = contentOf(row);
+  return putGown(workroom, maker, saveId, { title, content, drawing, cardId, personId });
 }
 
 /** What a save makes of the gown it finds. */
@@ -129,6 +153,10 @@ export type Change = {
   readonly content: GownContent;
   readonly drawing: Drawing;
   readonly parentId?: string;
+  readonly cardId?: string | null;
+  readonly personId?: string;
+  /** Keeps the gown as it then stands under this name, for good. */
+  readonly keepAs?: string;
 };
 
 /** What a save says of itself. */
@@ -163,16 +191,18 @@ export async function changeGown(
     if (row === undefined) throw notFound('gown');
     const before = await savedBefore(turn, row, save);
     if (before !== undefined) return before;
-    const { content, drawing, ...parent } = await change(turn, row);
+    const { content, drawing, keepAs, ...origin } = await change(turn, row);
     const savedAt = new Date();
-    const version = await replaceGown(turn, row, {
+    const changed = {
       ...columnsOf(content),
       ...drawing,
-      ...parent,
+      ...origin,
       savedAt,
       savedDevice: maker.device,
       savedSession: maker.sessionId,
-    });
+    };
+    const version = await replaceGown(turn, row, changed);
+    if (keepAs !== undefined) await keepForGood(turn, { ...row, ...changed, version }, keepAs);
     const acknowledged = { accountId, saveId: save.saveId, record: id, version, savedAt };
     await acknowledge(turn, acknowledged);
     return savedAs(acknowledged);
@@ -187,6 +217,21 @@ function refuseOtherEngine(engine: string, row: GownRow): void {
   );
 }
 
+/** A save done before; no answer where it is new, and a refusal where it may not be done at all. */
+export const lookAhead = (
+  workroom: Workroom,
+  maker: Maker,
+  id: string,
+  { engine, ...save }: Save & { readonly engine: string },
+): Promise<Saved | undefined> =>
+  savedOrConflict(workroom, maker, async (turn) => {
+    const row = await findGown(turn, maker.accountId, id);
+    if (row === undefined) throw notFound('gown');
+    const done = await savedBefore(turn, row, save);
+    if (done === undefined) refuseOtherEngine(engine, row);
+    return done;
+  });
+
 /**
  * Saves what is on the table, drawn by the engine the maker has agreed to. Whether it may be saved at
  * all is looked at before it is drawn, and once more with the gown held.
@@ -197,13 +242,7 @@ export async function saveGown(
   id: string,
   { engine, content, keepReplaced, ...save }: Received<typeof saving>,
 ): Promise<Saved> {
-  const before = await savedOrConflict(workroom, maker, async (turn) => {
-    const row = await findGown(turn, maker.accountId, id);
-    if (row === undefined) throw notFound('gown');
-    const done = await savedBefore(turn, row, save);
-    if (done === undefined) refuseOtherEngine(engine, row);
-    return done;
-  });
+  const before = await lookAhead(workroom, maker, id, { engine, ...save });
   if (before !== undefined) return before;
   const fresh =
     engine === engineVersion

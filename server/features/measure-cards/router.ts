@@ -3,26 +3,30 @@ import {
   archiveMeasureCard,
   createMeasureCard,
   duplicateMeasureCard,
+  giveMeasureCard,
   listMeasureCards,
   readMeasureCard,
   renameMeasureCard,
   saveMeasureCard,
+  startNextCard,
   unarchiveMeasureCard,
 } from '#shared/api/measure-cards.ts';
 import { addressLimit } from '../../http/address-limit.ts';
 import { doneTo } from '../../http/conflict.ts';
 import { type Own, serveOwn } from '../../http/serve-own.ts';
 import { listedCard } from './card-view.ts';
-import { listCardRows, setCardArchived, setCardName } from './repository.ts';
+import { listCardRows, listCardUses, setCardArchived, setCardName } from './repository.ts';
 import * as service from './service.ts';
 
 export function measureCardsRouter({ database, sessions, limits }: Own): Router {
   const router = Router();
   router.use('/api/measure-cards', addressLimit(limits.savesPerMinute));
 
-  serveOwn(router, sessions, listMeasureCards, async (_body, { caller }) => ({
-    cards: (await listCardRows(database, caller.accountId)).map(listedCard),
-  }));
+  serveOwn(router, sessions, listMeasureCards, async (_body, { caller }) => {
+    const uses = await listCardUses(database, caller.accountId);
+    const rows = await listCardRows(database, caller.accountId);
+    return { cards: rows.map((row) => listedCard(row, uses)) };
+  });
   serveOwn(router, sessions, createMeasureCard, (body, { caller }) =>
     service.createCard(database, caller, body),
   );
@@ -34,6 +38,12 @@ export function measureCardsRouter({ database, sessions, limits }: Own): Router 
   );
   serveOwn(router, sessions, duplicateMeasureCard, (body, { caller, params }) =>
     service.duplicateCard(database, caller, params.cardId, body),
+  );
+  serveOwn(router, sessions, startNextCard, (body, { caller, params }) =>
+    service.startNextCard(database, caller, params.cardId, body),
+  );
+  serveOwn(router, sessions, giveMeasureCard, (body, { caller, params }) =>
+    service.giveCard(database, caller, params.cardId, body),
   );
   serveOwn(router, sessions, renameMeasureCard, async ({ name }, { caller, params }) =>
     doneTo('measure card', await setCardName(database, caller.accountId, params.cardId, name)),

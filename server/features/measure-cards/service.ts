@@ -3,17 +3,33 @@ import type { Received } from '#shared/api/endpoint.ts';
 import type {
   CardContent,
   duplicateMeasureCard as duplication,
+  giveMeasureCard as giving,
   KeptCard,
   saveMeasureCard as saving,
+  startNextCard as starting,
 } from '#shared/api/measure-cards.ts';
 import { holdAccount } from '../../database/account-hold.ts';
-import type { Database } from '../../database/client.ts';
+import type { Database, Store } from '../../database/client.ts';
 import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
 import { conflict, notFound, sameSave } from '../../http/conflict.ts';
 import type { Caller } from '../../http/session.ts';
+import { RefusalError } from '../../http/refusal.ts';
 import { cardView } from './card-view.ts';
-import { countCards, findCard, holdCard, insertCard, replaceCard } from './repository.ts';
+import {
+  countCards,
+  countPeople,
+  findCard,
+  findPersonNamed,
+  giveCard as give,
+  holdCard,
+  insertCard,
+  insertPerson,
+  isPerson,
+  listCardUses,
+  type OwnedCardRow,
+  replaceCard,
+} from './repository.ts';
 
 type Saved = { readonly id: string; readonly version: number; readonly savedAt: string };
 
@@ -23,20 +39,57 @@ const savedAs = ({ record, version, savedAt }: Acknowledged): Saved => ({
   savedAt: savedAt.toISOString(),
 });
 
-export async function readCard(database: Database, caller: Caller, id: string): Promise<KeptCard> {
-  const row = await findCard(database, caller.accountId, id);
+async function ownCard(store: Store, accountId: string, id: string): Promise<OwnedCardRow> {
+  const row = await findCard(store, accountId, id);
   if (row === undefined) throw notFound('measure card');
-  return cardView(row, caller);
+  return row;
 }
+
+export async function readCard(database: Database, caller: Caller, id: string): Promise<KeptCard> {
+  const row = await ownCard(database, caller.accountId, id);
+  return cardView(row, await listCardUses(database, caller.accountId), caller);
+}
+
+/** Stands on the list for cards that name nobody. */
+const nobodyYet = 'Not named yet';
+
+/** Whose a new card is: who is asked for, or who is named on it, put on the list where nobody is called so. */
+async function personFor(
+  turn: Store,
+  accountId: string,
+  asked: string | undefined,
+  { card }: CardContent,
+): Promise<string> {
+  if (asked !== undefined) {
+    if (!(await isPerson(turn, accountId, asked))) throw notFound('person');
+    return asked;
+  }
+  const given = card.name?.trim() ?? '';
+  const name = given === '' ? nobodyYet : given;
+  const known = await findPersonNamed(turn, accountId, name);
+  if (known !== undefined) return known;
+  refuseOneTooMany('people', await countPeople(turn, accountId), mostKept.people);
+  return insertPerson(turn, { id: randomUUID(), accountId, name, createdAt: new Date() });
+}
+
+/** Today, by the clock of the server: for cards that bear no day. */
+const today = (): string => new Date().toISOString().slice(0, 10);
 
 /** Puts a card on the server once, however often it is sent. */
 export async function createCard(
   database: Database,
   caller: Caller,
-  parts: { readonly saveId: string; readonly name: string; readonly content: CardContent },
+  parts: {
+    readonly saveId: string;
+    readonly name: string;
+    readonly content: CardContent;
+    readonly personId?: string | undefined;
+    readonly startedFrom?: string;
+  },
 ): Promise<Saved> {
   const { accountId } = caller;
   const { saveId, name, content } = parts;
+  const takenOn = content.card.date ?? today();
   const now = new Date();
   const save = { accountId, saveId, record: randomUUID(), version: 1, savedAt: now };
   return database.transaction(async (turn) => {
@@ -52,12 +105,16 @@ export async function createCard(
       accountId,
       version: 1,
       name,
+      personId: await personFor(turn, accountId, parts.personId, content),
+      takenOn,
+      startedFrom: parts.startedFrom ?? null,
       archivedAt: null,
       createdAt: now,
       savedAt: now,
       savedDevice: caller.device,
       savedSession: caller.sessionId,
-      ...content,
+      typed: content.typed,
+      card: { ...content.card, date: takenOn },
     });
     return savedAs(save);
   });
@@ -69,10 +126,48 @@ export async function duplicateCard(
   id: string,
   wanted: Received<typeof duplication>,
 ): Promise<Saved> {
-  const row = await findCard(database, caller.accountId, id);
-  if (row === undefined) throw notFound('measure card');
-  const { typed, card } = row;
-  return createCard(database, caller, { ...wanted, content: { typed, card } });
+  const { typed, card, personId } = await ownCard(database, caller.accountId, id);
+  return createCard(database, caller, { ...wanted, personId, content: { typed, card } });
+}
+
+/** Starts the next card of the same person from this one, as it was taken, on another day. */
+export async function startNextCard(
+  database: Database,
+  caller: Caller,
+  id: string,
+  { takenOn, ...wanted }: Received<typeof starting>,
+): Promise<Saved> {
+  const { typed, card, personId } = await ownCard(database, caller.accountId, id);
+  const content = { typed, card: { ...card, date: takenOn } };
+  return createCard(database, caller, { ...wanted, personId, content, startedFrom: id });
+}
+
+/** Says whose a card is after all. */
+export async function giveCard(
+  database: Database,
+  { accountId }: Caller,
+  id: string,
+  { personId }: Received<typeof giving>,
+): Promise<Record<string, never>> {
+  return database.transaction(async (turn) => {
+    const row = await holdCard(turn, accountId, id);
+    if (row === undefined) throw notFound('measure card');
+    if (!(await isPerson(turn, accountId, personId))) throw notFound('person');
+    await give(turn, row, personId);
+    return {};
+  });
+}
+
+/** A card that a gown was drawn from stays what it was: measures taken anew go on the next card. */
+async function refuseUsed(turn: Store, accountId: string, id: string): Promise<void> {
+  const gowns = (await listCardUses(turn, accountId)).filter(({ cardId }) => cardId === id);
+  const [first] = gowns;
+  if (first === undefined) return;
+  const others = gowns.length > 1 ? ` and ${gowns.length - 1} more` : '';
+  throw new RefusalError(
+    'card-in-use',
+    `“${first.title}”${others} was drawn from this card, so its measures stay as they are. Start the next card from it and type the new ones there.`,
+  );
 }
 
 /** Saves a card as gowns are saved: in turn, once, and from the version it was made from. */
@@ -88,10 +183,16 @@ export async function saveCard(
     if (row === undefined) throw notFound('measure card');
     const before = await acknowledgedSave(turn, accountId, saveId);
     if (before !== undefined) return savedAs(sameSave(before, id, baseVersion + 1));
-    if (row.version !== baseVersion) throw conflict(row, cardView(row, caller));
+    await refuseUsed(turn, accountId, id);
+    if (row.version !== baseVersion) {
+      throw conflict(row, cardView(await ownCard(turn, accountId, id), [], caller));
+    }
+    const takenOn = content.card.date ?? row.takenOn;
     const savedAt = new Date();
     const version = await replaceCard(turn, row, {
-      ...content,
+      typed: content.typed,
+      card: { ...content.card, date: takenOn },
+      takenOn,
       savedAt,
       savedDevice: caller.device,
       savedSession: caller.sessionId,

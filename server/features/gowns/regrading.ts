@@ -1,0 +1,137 @@
+import type { Received } from '#shared/api/endpoint.ts';
+import type {
+  GownContent,
+  noteCard as noting,
+  regradeGown as regrading,
+} from '#shared/api/gowns.ts';
+import { measureCard } from '#shared/api/card.ts';
+import { engineVersion } from '#shared/engine/draft-gown.ts';
+import { dayInWords } from '#shared/exports/day.ts';
+import { error } from '#shared/units/problem.ts';
+import { said } from '#shared/units/said.ts';
+import type { Drawing } from '../../drafting/drawing.ts';
+import { notFound } from '../../http/conflict.ts';
+import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
+import { RefusalError, refusalFor } from '../../http/refusal.ts';
+import { lastingTurn } from '../../http/turn-of.ts';
+import { keepForGood } from './keep-as-revision.ts';
+import { findGown, type GownRow, holdGown, type LaidCard, setGownCard } from './repository.ts';
+import { countNamedRevisions } from './revision-repository.ts';
+import type { Maker, Workroom } from './saved-or-conflict.ts';
+import { changeGown, laidCard, lookAhead, type Saved } from './service.ts';
+
+/** A gown is one person's: her measures never stand in the past of somebody else's. */
+function refuseAnother(row: GownRow, card: LaidCard): void {
+  if (row.personId === null || row.personId === card.personId) return;
+  throw new RefusalError(
+    'another-person',
+    'This gown is made for somebody else than this card is. Keep it as a new gown for her instead; this one stays as it is.',
+  );
+}
+
+/** Notes that a card was laid on a gown. */
+export async function noteCard(
+  { database }: Workroom,
+  { accountId }: Maker,
+  gownId: string,
+  { cardId }: Received<typeof noting>,
+): Promise<Record<string, never>> {
+  return database.transaction(async (turn) => {
+    const row = await holdGown(turn, accountId, gownId);
+    if (row === undefined) throw notFound('gown');
+    const card = await laidCard(turn, accountId, cardId);
+    refuseAnother(row, card);
+    await setGownCard(turn, accountId, gownId, card);
+    return {};
+  });
+}
+
+/** The gown on another card: figures are written anew where card or depths change them. */
+function contentOn(
+  row: GownRow,
+  card: LaidCard,
+  style: GownContent['inputs']['style'],
+): GownContent {
+  const kept = Object.entries(row.typed.fields).filter(([field]) => {
+    if (field.startsWith('card.')) return false;
+    const key = field.replace(/^style\./, '');
+    return Reflect.get(row.style, key) === Reflect.get(style, key);
+  });
+  return {
+    typed: { unit: row.typed.unit, fields: Object.fromEntries(kept) },
+    unread: [],
+    inputs: { card: card.card, style, rules: row.rules },
+  };
+}
+
+/** Draws the regraded gown, or says why it cannot be. */
+async function drawnOrRefused(
+  { drafter }: Workroom,
+  { accountId }: Maker,
+  content: GownContent,
+): Promise<Drawing> {
+  const whole = measureCard.safeParse(content.inputs.card);
+  if (!whole.success) {
+    const field = `card.${String(whole.error.issues[0]?.path[0] ?? '')}`;
+    throw refusalFor(
+      'bad-input',
+      [
+        error({
+          code: 'missing',
+          field,
+          said: said`The measure card is not filled in yet: take the measures a gown needs, then regrade.`,
+        }),
+      ],
+      content.typed.unit,
+    );
+  }
+  const turn = lastingTurn(accountId);
+  const drawing = await drafter.drawing(content, turn);
+  if (drawing !== undefined) return drawing;
+  await drafter.reply({ ...content.inputs, card: whole.data }, turn);
+  throw new Error('A gown that gave no drawing gave a draft.');
+}
+
+const dayOf = ({ takenOn }: LaidCard): string => dayInWords(takenOn);
+
+/** Redraws a gown for another card; what stood there and what comes of it are both kept for good. */
+export async function regradeGown(
+  workroom: Workroom,
+  maker: Maker,
+  gownId: string,
+  { engine, cardId, style, ...save }: Received<typeof regrading>,
+): Promise<Saved> {
+  const { database } = workroom;
+  const before = await lookAhead(workroom, maker, gownId, { engine, ...save });
+  if (before !== undefined) return before;
+  if (engine !== engineVersion) {
+    throw new RefusalError(
+      'engine-changed',
+      'A gown is regraded by today’s rules only. Open it again and redraw it first.',
+    );
+  }
+  const row = await findGown(database, maker.accountId, gownId);
+  if (row === undefined) throw notFound('gown');
+  const card = await laidCard(database, maker.accountId, cardId);
+  refuseAnother(row, card);
+  const content = contentOn(row, card, style);
+  const drawing = await drawnOrRefused(workroom, maker, content);
+  return changeGown(workroom, maker, gownId, save, async (turn, held) => {
+    const laid = await laidCard(turn, maker.accountId, cardId);
+    refuseAnother(held, laid);
+    refuseOneTooMany(
+      'named revisions of one gown',
+      (await countNamedRevisions(turn, gownId)) + 1,
+      mostKept.namedRevisions,
+    );
+    const parent = await keepForGood(turn, held, `Before the card of ${dayOf(laid)}`);
+    return {
+      content,
+      drawing,
+      parentId: parent.id,
+      cardId,
+      personId: laid.personId,
+      keepAs: `For the card of ${dayOf(laid)}`,
+    };
+  });
+}
