@@ -13,6 +13,7 @@ export const handleKeys = [
   'kneeLevel',
   'kneeFinished',
   'flareLength',
+  'train',
 ] as const;
 
 /** A point a maker may move by hand, and the style-card key it stands for. */

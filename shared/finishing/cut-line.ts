@@ -5,6 +5,7 @@ import {
   type Joined,
   type Run,
   endAtLine,
+  joinAtFold,
   joinRuns,
   lines,
   startAtLine,
@@ -29,6 +30,9 @@ import { dartCap } from './dart-cap.ts';
 /** Inner angles wider than 98 and narrower than 140 degrees have their allowance end mirrored. */
 const leastMirrored = (40 * Math.PI) / 180;
 const mostMirrored = (82 * Math.PI) / 180;
+
+/** A corner at a fold sharper than 54 degrees is half of one across it, radians of turn. */
+const leastAtFold = 2.2;
 
 /** Ends no farther apart than this are one point: a tenth of a hair, mm. */
 const joint = 0.01;
@@ -85,7 +89,8 @@ function turnCorner(corner: Corner, first: Edge, second: Edge): Joined {
         : undefined;
     if (joined) return joined;
   }
-  return joinRuns(a, b, at);
+  const oneFold = (first.kind === 'fold') !== (second.kind === 'fold');
+  return oneFold && turn > leastAtFold ? joinAtFold(a, b, at) : joinRuns(a, b, at);
 }
 
 const endOf = (path: Path): Point | undefined => path.at(-1)?.to;

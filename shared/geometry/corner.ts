@@ -122,6 +122,24 @@ function squared(a: Run, b: Run, corner: Point, ends: readonly [Point, Point]): 
 }
 
 /**
+ * Brings a parallel to a corner in which one of the two runs is a fold, whose own distance is nothing: the
+ * corner is half of one that lies across the fold. Sharp ones are cut square across it.
+ */
+export function joinAtFold(a: Run, b: Run, corner: Point): Joined {
+  const foldFirst = a.distance === 0;
+  const [fold, seam] = foldFirst ? [a, b] : [b, a];
+  const out = foldFirst ? fold.along : scale(fold.along, -1);
+  const away = foldFirst ? scale(seam.along, -1) : seam.along;
+  const end = endOf(seam, corner);
+  const angle = Math.acos(Math.min(1, Math.max(-1, dot(out, away))));
+  const mitred = 2 * angle >= Math.PI - acute;
+  const reach = mitred ? seam.distance / Math.sin(angle) : seam.distance;
+  const onSeam = add(end, scale(away, (reach - dot(subtract(end, corner), out)) / dot(away, out)));
+  const between = [corner, add(corner, scale(out, reach)), onSeam, end];
+  return whole(a, b, lines(foldFirst ? between : between.toReversed()));
+}
+
+/**
  * Brings two parallels together at a corner of the line they accompany: lengthened straight to a
  * mitre where they part, cut where they cross, squared off where the corner is very sharp, stepped
  * where the distance changes on a straight run.

@@ -9,10 +9,12 @@ const straightBound = 2;
 /** Centre lines: what lies on the fold, or is sewn to its own mirror image. */
 const isCentre = (edge: Edge): boolean => edge.kind === 'fold' || edge.joins === 'self';
 
+/** Corners at the centre line, and those given in degrees. */
 function squareCorners(piece: Piece): readonly Finding[] {
   return piece.edges.flatMap((edge, index) => {
     const before = piece.edges.at(index - 1);
-    if (!before || isCentre(edge) === isCentre(before)) return [];
+    const atCentre = before !== undefined && isCentre(edge) !== isCentre(before);
+    if (!before || (edge.corner === undefined && !atCentre)) return [];
     const degrees = cornerBetween(before, edge);
     const expected = edge.corner ?? 90;
     const at = edge.path[0]?.from;

@@ -2,6 +2,7 @@ import type { Edge, FinishedPiece } from '../drafting/piece.ts';
 import { endTangent, startOf, startTangent } from '../geometry/curve.ts';
 import { type Point, add, distance, dot, scale, turnLeft } from '../geometry/point.ts';
 import { cornerBetween } from './joined-edges.ts';
+import { inside } from './look-out.ts';
 
 /** Corners blunter than this may have the end of an allowance folded back over the seam, degrees. */
 const blunt = 98;
@@ -26,6 +27,10 @@ function underCap(piece: FinishedPiece, mouth: Edge, end: Point, along: Point): 
   const lean = -dot(startTangent(leg), along);
   return lean <= 0 ? 0 : lean / Math.sqrt(Math.max(1e-6, 1 - lean * lean));
 }
+
+/** Near a sharp corner at a fold the cutting line along the fold lies within sight behind the edge. */
+const besideFold = (neighbour: Edge, degrees: number): number =>
+  neighbour.kind === 'fold' && degrees < sharp ? (1.1 * inside) / Math.tan(degrees * deg) : 0;
 
 /** A place to look from, and the direction away from the piece. */
 export type Look = { readonly at: Point; readonly out: Point };
@@ -52,7 +57,7 @@ function edgeEnd(
   const mitred = !neighbour.open && degrees >= sharp && degrees <= blunt && allowance > 0;
   return {
     at,
-    left: 1.1 * Math.max(own, allowance) * share,
+    left: Math.max(1.1 * Math.max(own, allowance) * share, besideFold(neighbour, degrees)),
     mitre: mitred ? { at: add(at, scale(outwards, 0.5 * allowance)), out } : undefined,
   };
 }

@@ -49,14 +49,24 @@ export const cornerBetween = (edge: Edge, next: Edge): number =>
 /** One end of a seam: the corner of each piece there, and the edge each runs on into. */
 export type SeamEnd = {
   readonly at: Point;
-  readonly first: { readonly degrees: number; readonly neighbour: Edge };
-  readonly second: { readonly degrees: number; readonly neighbour: Edge };
+  readonly first: EndCorner;
+  readonly second: EndCorner;
 };
 
-function cornerAt({ edge, before, after }: PlacedEdge, end: 'start' | 'end'): SeamEnd['first'] {
-  return end === 'start'
-    ? { degrees: cornerBetween(before, edge), neighbour: before }
-    : { degrees: cornerBetween(edge, after), neighbour: after };
+type EndCorner = {
+  readonly degrees: number;
+  readonly neighbour: Edge;
+  /** It is given in degrees, as at the point of a godet, and proven by itself. */
+  readonly given: boolean;
+};
+
+function cornerAt({ edge, before, after }: PlacedEdge, end: 'start' | 'end'): EndCorner {
+  const [one, next] = end === 'start' ? [before, edge] : [edge, after];
+  return {
+    degrees: cornerBetween(one, next),
+    neighbour: end === 'start' ? before : after,
+    given: next.corner !== undefined,
+  };
 }
 
 /**
@@ -90,6 +100,8 @@ function outerEnds(
   ];
   return ends.filter(
     (end) =>
+      !end.first.given &&
+      !end.second.given &&
       turnsCorner(end.first.neighbour, second.piece, placed) &&
       turnsCorner(end.second.neighbour, first.piece, placed),
   );

@@ -1,7 +1,10 @@
 import { describe, expect, test } from 'vitest';
 import type { Piece } from '#shared/drafting/piece.ts';
 import { openTable } from '#shared/drafting/drafting-table.ts';
-import { flareHem, flarePieces, flareRadius, planFlare } from '#shared/drafts/gown/flare.ts';
+import { flarePieces } from '#shared/drafts/gown/flare.ts';
+import { flareHem, flareRadius, planFlare } from '#shared/drafts/gown/flare-plan.ts';
+import { kneeStretches } from '#shared/drafts/gown/knee-stretches.ts';
+import { skirtPanels } from '#shared/drafts/gown/skirt-panel.ts';
 import { cutLine } from '#shared/finishing/cut-line.ts';
 import { pathLength } from '#shared/geometry/curve.ts';
 import { plainRules } from '../proof/straight-band.ts';
@@ -16,9 +19,18 @@ const cm = 10;
 
 /** All pieces of a flare, in cloth no seam of it is too wide for. */
 function flareOf(seam: number, fraction: number, depth: number): readonly Piece[] {
-  const plan = planFlare(seam / 4, flareRadius(seam, fraction), depth, 1e6);
+  const plan = planFlare({
+    seam: seam / 4,
+    inner: flareRadius(seam, fraction),
+    depth,
+    room: 1e6,
+  });
   const paper = openTable().part('Flare', 'flare');
-  return (['front', 'back'] as const).flatMap((side) => flarePieces(paper, side, plan, plan.gores));
+  const skirt = { axis: seam / 8, quarter: seam / 4, knee: 0 };
+  return (['front', 'back'] as const).flatMap((side) => {
+    const panels = skirtPanels(side, { waistSeam: 'raised', shaping: 'princess' }, skirt);
+    return flarePieces(paper, side, plan, plan.gores, kneeStretches(plan, panels));
+  });
 }
 
 /** Length round the whole flare of the edges whose names begin so. */

@@ -1,27 +1,25 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
-import type { Construction, Handle, TopOpening } from '../../drafting/construction.ts';
+import type { Construction, Handle, TopOpening, WantedGirth } from '../../drafting/construction.ts';
 import type { DraftingTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { LevelName, Piece, Side } from '../../drafting/piece.ts';
 import { xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
-import { type FlarePlan, flarePieces, flareRadius, planFlare } from './flare.ts';
+import { type BelowKnee, belowKnee } from './below-knee.ts';
 import { backEdgeIsHigh, drawTop } from './draw-top.ts';
 import { gownHandles } from './handles.ts';
 import type { Half } from './half.ts';
-import { kneeStretches, oneSkirt } from './knee-stretches.ts';
 import { middlePiece } from './middle.ts';
 import { narrateHalf, warnOfShift } from './narrate-halves.ts';
 import { type PairInputs, type PairedHalves, pairHalves } from './pair-halves.ts';
 import { finishedQuarters, wantedGirths } from './quarters.ts';
 import type { SideHeights } from './side-line.ts';
+import { skirtPanels } from './skirt-panel.ts';
 import type { GownStyle } from './style-card.ts';
 import { seamUnderBust } from './style-limits.ts';
 import { topPartner } from './top.ts';
-import { topNames } from './top-names.ts';
 import { type Walking, walking } from './walking.ts';
-import { wholeSkirt } from './whole.ts';
 
 /** A gown drawn: pieces without allowances, and what proof and screens need to know of them. */
 export type DrawnGown = {
@@ -72,25 +70,31 @@ export function drawGown(
     front: finishedQuarters('front', body, style, rules, bodyLevels, seam),
     back: finishedQuarters('back', body, style, rules, bodyLevels, seam),
   };
-  const acrossOf = halfAcross(body);
+  const acrossOf = halfAcross(body, rules);
   const pair = pairOpened(
     { quarters, levels, style, rules, frontAxis: bodyLevels.bustPointX },
     acrossOf.back,
   );
-  const depth = style.flareLength;
-  const inner = flareRadius(style.kneeFinished, style.flareFraction);
-  const gores = rules.counts?.gores;
-  const flare = {
-    front: planFlare(quarters.front.knee.value, inner, depth, style.clothWidth, gores?.front),
-    back: planFlare(quarters.back.knee.value, inner, depth, style.clothWidth, gores?.back),
+  const { front, back } = pair;
+  const panels = {
+    front: skirtPanels('front', style, kneeOf(front)),
+    back: skirtPanels('back', style, kneeOf(back)),
   };
+  const below = belowKnee(table, { style, rules, panels });
   const sides = (['front', 'back'] as const).map((side) =>
-    drawSide(table, side, { pair, quarters, flare, style, rules, acrossOf }),
+    drawSide(table, side, { pair, quarters, below, style, rules, acrossOf }),
   );
   warnOfShift(table, pair);
-  const { front, back } = pair;
+  const wanted = wantedGirths(
+    body,
+    style,
+    bodyLevels,
+    seam,
+    2 * (quarters.front.seam.value + quarters.back.seam.value),
+  );
+  const pieces = sides.flatMap((each) => [...each.pieces, ...below.pieces(each.side)]);
   return {
-    pieces: sides.flatMap((each) => each.pieces),
+    pieces,
     levels: {
       chest: bodyLevels.underarm,
       bust: bodyLevels.bust,
@@ -100,34 +104,49 @@ export function drawGown(
       'top-hip': bodyLevels.topHip,
       hip: bodyLevels.hip,
       'knee-seam': knee,
-      hem: knee + depth,
+      hem: knee + style.flareLength,
     },
     construction: {
-      wanted: wantedGirths(
-        body,
-        style,
-        bodyLevels,
-        seam,
-        2 * (quarters.front.seam.value + quarters.back.seam.value),
-      ),
+      wanted: rules.intakes ? withChestLeft(table, wanted, pair) : wanted,
       chestSide: { front: chestSide(front), back: chestSide(back) },
       topOpenings: sides.flatMap((each) => each.openings),
     },
-    handles: gownHandles(
-      sides.flatMap((each) => each.pieces),
-      style,
-    ),
+    handles: gownHandles(pieces, style),
     walking: walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style.kneeFinished),
   };
+}
+
+/**
+ * Where the openings above the bust are given outright, the chest is what they leave; how far that is
+ * from the body is said, not hidden.
+ */
+function withChestLeft(
+  table: DraftingTable,
+  wanted: readonly WantedGirth[],
+  { front, back, contour }: PairedHalves,
+): readonly WantedGirth[] {
+  const left =
+    2 * (chestSide(front) - contour.front.opening + chestSide(back) - contour.back.opening);
+  return wanted.map((row) => {
+    if (row.level !== 'chest') return row;
+    table.warn({
+      code: 'chest-not-held',
+      severity: 'warning',
+      field: 'rules.intakes.topLine',
+      with: ['card.upperChestGirth', 'style.ease.chest'],
+      said: said`The opening above the bust is given outright, so the chest is not held: with the openings closed the gown measures ${mm(left)} there, the upper chest with its ease ${mm(row.wanted)}. Try the edge in the toile, or let the opening be derived.`,
+    });
+    return { level: row.level, wanted: left, estimated: false };
+  });
 }
 
 /** Half the width of the body where a gown off the shoulder ends, front and back. */
 type Across = { readonly front: number; readonly back: number };
 
-const halfAcross = ({ measures }: Body): Across => ({
-  front: measures.acrossFront / 2,
-  back: measures.acrossBack / 2,
-});
+const halfAcross = ({ measures }: Body, { armholeAt }: HouseRules): Across =>
+  armholeAt === 'shoulder'
+    ? { front: measures.shoulderWidth / 2, back: measures.shoulderWidth / 2 }
+    : { front: measures.acrossFront / 2, back: measures.acrossBack / 2 };
 
 /** Opens the back above the bust where the top line then crosses high enough; else the front takes it. */
 function pairOpened(inputs: Omit<PairInputs, 'backOpens'>, halfAcrossBack: number): PairedHalves {
@@ -145,13 +164,20 @@ function pairOpened(inputs: Omit<PairInputs, 'backOpens'>, halfAcrossBack: numbe
 
 const chestSide = (half: Half): number => xAt(half.line, half.heights.underarm);
 
+/** Where a half comes to the knee line. */
+const kneeOf = ({ axis, line, heights: { knee } }: Half): Parameters<typeof skirtPanels>[2] => ({
+  axis,
+  quarter: xAt(line, knee),
+  knee,
+});
+
 type Shared = {
   readonly pair: PairedHalves;
   readonly quarters: {
     readonly front: ReturnType<typeof finishedQuarters>;
     readonly back: ReturnType<typeof finishedQuarters>;
   };
-  readonly flare: { readonly front: FlarePlan; readonly back: FlarePlan };
+  readonly below: BelowKnee;
   readonly style: GownStyle;
   readonly rules: HouseRules;
   readonly acrossOf: Across;
@@ -161,27 +187,27 @@ function drawSide(
   table: DraftingTable,
   side: Side,
   shared: Shared,
-): { readonly pieces: readonly Piece[]; readonly openings: readonly TopOpening[] } {
-  const { pair, style, rules, flare } = shared;
+): {
+  readonly side: Side;
+  readonly pieces: readonly Piece[];
+  readonly openings: readonly TopOpening[];
+} {
+  const { pair, style, rules, below } = shared;
   const half = pair[side];
   const contour = pair.contour[side];
   const paper = narrateHalf(table, half, shared.quarters[side], contour, pair.contour.moved);
-  const whole = style.waistSeam === 'none';
-  const knees = kneeStretches(
-    flare[side],
-    whole ? wholeSkirt(style, topNames(side, style), half.axis) : oneSkirt(side),
-  );
   const top = drawTop(table, paper, {
     half,
     front: pair.front,
     opening: contour.opening,
     halfAcross: shared.acrossOf[side],
-    knees,
+    footOf: below.footOf,
     style,
     rules,
   });
-  const middle = whole ? [] : [middlePiece(paper, half, knees, topPartner(side, style))];
-  const other = flare[side === 'front' ? 'back' : 'front'];
-  const gores = flarePieces(table.part('Flare', 'flare'), side, flare[side], other.gores, knees);
-  return { pieces: [...top.pieces, ...middle, ...gores], openings: top.openings };
+  const middle =
+    style.waistSeam === 'none'
+      ? []
+      : [middlePiece(paper, half, below.footOf(`${side}-middle`), topPartner(side, style))];
+  return { side, pieces: [...top.pieces, ...middle], openings: top.openings };
 }

@@ -11,8 +11,8 @@ import { princessAbove, topDart } from './contour.ts';
 import { refuseBluntDarts, tipOf } from './darts-reach.ts';
 import { type Half, heightOn } from './half.ts';
 import { topDarts } from './intakes.ts';
-import type { KneeStretch } from './knee-stretches.ts';
 import { narrateArmhole, narrateDarts, narratePrincess, narrateTop } from './narrate-top.ts';
+import type { FootOf } from './skirt-foot.ts';
 import { type GownStyle, isOffShoulder } from './style-card.ts';
 import { type TopParts, dartedTop, princessPanels } from './top.ts';
 import { type TopLine, notchCorner, topLine } from './top-line.ts';
@@ -28,8 +28,8 @@ export type TopInputs = {
   readonly opening: number;
   /** Half the width of the body where a gown off the shoulder ends. */
   readonly halfAcross: number;
-  /** The knee seam of the half, for pieces that reach down to it. */
-  readonly knees: readonly KneeStretch[];
+  /** How the pieces end that reach down to the knee. */
+  readonly footOf: FootOf;
   readonly style: GownStyle;
   readonly rules: HouseRules;
 };
@@ -46,7 +46,7 @@ export type DrawnTop = {
 
 /** Draws the top of a half: its top line, its princess panels or its one darted piece. */
 export function drawTop(table: DraftingTable, paper: PartTable, inputs: TopInputs): DrawnTop {
-  const { half, opening, style, rules, knees } = inputs;
+  const { half, opening, style, rules, footOf } = inputs;
   const { side, axis } = half;
   const points = topLinePoints(half, inputs.front, style, inputs);
   const bust = heightOn(half, 'bust', axis);
@@ -82,7 +82,7 @@ export function drawTop(table: DraftingTable, paper: PartTable, inputs: TopInput
     narratePrincess(paper, half, style, opening, above.height);
     return finish(
       parts,
-      whole ? wholePanels(parts, knees) : princessPanels(parts),
+      whole ? wholePanels(parts, footOf) : princessPanels(parts),
       openingOf(
         half,
         opening,
@@ -107,7 +107,7 @@ export function drawTop(table: DraftingTable, paper: PartTable, inputs: TopInput
   const on = { piece: names.one, edge: 'top-mouth' };
   return finish(
     parts,
-    whole ? wholeDarted(parts, knees) : dartedTop(parts),
+    whole ? wholeDarted(parts, footOf) : dartedTop(parts),
     openingOf(half, opening, dart.height, on, on),
   );
 }
@@ -131,7 +131,7 @@ function outerEnd(
 const backEdgeOver = 30;
 
 /** Whether the back's top line, drawn with its opening, crosses it high enough over bust level. */
-export function backEdgeIsHigh(inputs: Omit<TopInputs, 'knees'>): boolean {
+export function backEdgeIsHigh(inputs: Omit<TopInputs, 'footOf'>): boolean {
   const { half, front, opening, style, rules } = inputs;
   const points = topLinePoints(half, front, style, inputs);
   const bust = heightOn(half, 'bust', half.axis);

@@ -1,7 +1,7 @@
 import type { Handle } from '../../drafting/construction.ts';
 import type { Edge, Piece } from '../../drafting/piece.ts';
-import { endOf, endTangent, startOf } from '../../geometry/curve.ts';
-import { type Point, distance, point } from '../../geometry/point.ts';
+import { endOf, endTangent, startOf, startTangent } from '../../geometry/curve.ts';
+import { type Point, distance, point, scale } from '../../geometry/point.ts';
 import type { GownStyle } from './style-card.ts';
 
 type Held = { readonly piece: Piece; readonly edge: Edge };
@@ -12,7 +12,7 @@ const out = point(1, 0);
 
 /**
  * The points a maker moves by hand, each where it lies on a piece: neck depth, neck width and top drop
- * at the peak, side and back depth, waist seam, dart length, knee seam and its girth, flare length. A straight top
+ * at the peak, side and back depth, waist seam, dart length, knee line and its girth, flare length, train. A straight top
  * line has neither dip nor peak: its drop is moved at the centre.
  */
 export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonly Handle[] {
@@ -33,10 +33,11 @@ export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonl
       ? move('waistSeamRise', heldAt(middle, 'fold', endOf), up)
       : []),
     ...move('dartLength', dartTip(skirt, style), down),
-    ...move('kneeLevel', heldAt(middle, 'fold', startOf), up),
-    // A millimetre out at one of the four quarters of the knee seam is four round it.
-    ...move('kneeFinished', heldAt(middle, 'side', endOf), out, 4),
-    ...move('flareLength', heldAt(flare, 'fold', startOf), down),
+    ...move('kneeLevel', onKneeLine(skirt.slice(0, 1), 'from'), up),
+    // A millimetre out at one of the four quarters of the knee line is four round it.
+    ...move('kneeFinished', onKneeLine(skirt.slice(-1), 'to'), out, 4),
+    ...move('flareLength', heldAt(flare.length > 0 ? flare : middle, 'fold', startOf), down),
+    ...trainHandle(pieces),
   ];
 }
 
@@ -65,6 +66,27 @@ function heldAt(
 ): Placed | undefined {
   const held = edges.find(({ edge }) => edge.kind === kind);
   return held && placed(held, end);
+}
+
+/** An end of the knee line on a piece. */
+function onKneeLine([piece]: readonly Piece[], end: 'from' | 'to'): Placed | undefined {
+  const line = piece?.levels.find(({ level }) => level === 'knee-seam');
+  return piece && line && { piece: piece.name, at: line[end] };
+}
+
+/** The hem at the centre back, which moves down the way its centre seam or fold arrives there. */
+function trainHandle(pieces: readonly Piece[]): readonly Handle[] {
+  const back = pieces.filter(
+    ({ side, name, levels }) =>
+      side === 'back' &&
+      (name === 'flare-back' || levels.some(({ level }) => level === 'knee-seam')),
+  );
+  const piece = back.findLast(({ name }) => name === 'flare-back') ?? back[0];
+  const hem = piece?.edges.findIndex(({ kind }) => kind === 'hem') ?? -1;
+  const up = piece?.edges[hem + 1];
+  const at = up && startOf(up.path);
+  if (!piece || !up || !at) return [];
+  return move('train', { piece: piece.name, at }, scale(startTangent(up.path), -1));
 }
 
 /** Whether a piece reaches down to the knee seam. */

@@ -1,5 +1,5 @@
-import type { Side } from '../../drafting/piece.ts';
-import { type FlarePlan, kneeWidths } from './flare.ts';
+import { type FlarePlan, kneeWidths } from './flare-plan.ts';
+import type { SkirtPanel } from './skirt-panel.ts';
 
 /** A stretch of the knee seam between two seams of the flare or of the skirt above it, mm from the centre. */
 export type KneeStretch = {
@@ -12,14 +12,6 @@ export type KneeStretch = {
   /** The piece above it. */
   readonly skirt: string;
 };
-
-/** A piece above the knee seam and the distance from the centre at which it ends. */
-export type SkirtPanel = { readonly piece: string; readonly until: number };
-
-/** The skirt of a gown with a waist seam: one piece a quarter. */
-export const oneSkirt = (side: Side): readonly SkirtPanel[] => [
-  { piece: `${side}-middle`, until: Infinity },
-];
 
 /** Seams nearer than this on the knee seam are one: no stretch is shorter. */
 const speck = 1e-6;
@@ -36,8 +28,8 @@ export function kneeStretches(
   widths.forEach((width, gore) => {
     let from = goreFrom;
     const end = gore === widths.length - 1 ? whole : goreFrom + width;
-    for (const { piece: skirt, until } of panels) {
-      const stop = Math.min(end, until);
+    for (const { piece: skirt, outer, until } of panels) {
+      const stop = outer === 'side' ? end : Math.min(end, until);
       if (stop - from <= speck) continue;
       parts.push({ from, until: stop, gore, goreFrom, skirt });
       from = stop;

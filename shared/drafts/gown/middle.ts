@@ -14,10 +14,9 @@ import { type Path, line } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { profilePath, xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
-import { goreName } from './flare.ts';
 import { type Half, atSide, dartShares } from './half.ts';
 import { intakeEdge, middleDarts, seamStretches } from './intakes.ts';
-import type { KneeStretch } from './knee-stretches.ts';
+import { type PanelFoot, cornered } from './skirt-foot.ts';
 
 /** The zip ends this far above the hip at the highest. */
 const zipAboveHip = 20;
@@ -29,11 +28,11 @@ export const waistStretch = (k: number): string => `waist-${letters[k] ?? String
 /** Which piece of the top each stretch of the waist seam is sewn to. */
 export type TopPartner = (stretch: number) => string;
 
-/** Front or back from the waist seam to the knee seam: one quarter, with the darts of the waist. */
+/** Front or back from the waist seam down: one quarter, with the darts of the waist and its foot. */
 export function middlePiece(
   paper: PartTable,
   half: Half,
-  kneeSeam: readonly KneeStretch[],
+  foot: PanelFoot,
   topPartner: TopPartner,
 ): Piece {
   const { side, heights, levels, line: seam } = half;
@@ -59,27 +58,30 @@ export function middlePiece(
   const sideEdge = edge(
     'side',
     'side',
-    profilePath(seam, heights.seam, heights.knee),
+    [...profilePath(seam, heights.seam, heights.knee), ...foot.outer],
     to(side === 'front' ? 'back-middle' : 'front-middle', 'side'),
   );
   const kneeSide = point(xAt(seam, heights.knee), heights.knee);
   const kneeCentre = point(0, heights.knee);
   const centreTop = startOf(stretches[0] ?? []) ?? point(0, levels.seam);
-  const centre = edge(
-    'centre',
-    side === 'front' ? 'fold' : 'zip',
-    [line(kneeCentre, centreTop)],
-    side === 'front' ? undefined : 'self',
+  const centre = cornered(
+    edge(
+      'centre',
+      side === 'front' ? 'fold' : 'zip',
+      [...foot.inner, line(kneeCentre, centreTop)],
+      side === 'front' ? undefined : 'self',
+    ),
+    foot,
   );
-  const knees = kneeEdges(side, kneeSeam, heights.knee);
+  const seamed = foot.edges.some(({ kind }) => kind === 'hem') ? 'hem' : 'knee seam';
   narrateDarts(paper, half, sewn);
   paper.draw(
     'Skirt',
-    said`From the waist seam to the knee seam the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the knee seam.`,
+    said`From the waist seam to the ${seamed} the quarter is cut in one: side ${mm(pathLength(sideEdge.path))} long, ${mm(kneeSide.x)} wide at the ${seamed === 'hem' ? 'knee line' : seamed}.`,
     {
       lines: [
         sideEdge.path,
-        ...knees.map((knee) => knee.path),
+        ...foot.edges.map((each) => each.path),
         ...stretches,
         ...sewn.flatMap((dart) => [dart.centreLeg, dart.sideLeg]),
       ],
@@ -93,7 +95,7 @@ export function middlePiece(
     part: 'middle',
     cut: side === 'front' ? 'cut 1 on fold' : 'cut 2 (a pair)',
     copies: side === 'front' ? 1 : 2,
-    edges: [...waistEdges(stretches, sewn, topPartner), sideEdge, ...knees, centre],
+    edges: [...waistEdges(stretches, sewn, topPartner), sideEdge, ...foot.edges, centre],
     darts: sewn,
     levels: [
       // A seam in the waist itself is the waist; it is counted along the seam.
@@ -114,19 +116,13 @@ export function middlePiece(
         ? []
         : notchAtHeight('waist', sideEdge, heights.waist, strokes)),
       ...notchAtHeight('hip', sideEdge, heights.hip, strokes),
-      ...kneeMarks(knees, strokes),
+      ...foot.notches,
       ...centreMarks(half, centre),
     ],
     grain: grainIn(half),
     drills: drillPoints(sewn),
   };
 }
-
-/** Marks half way along each stretch of the knee seam. */
-export const kneeMarks = (knees: readonly Edge[], strokes: 1 | 2): Piece['notches'] =>
-  knees.flatMap((knee) =>
-    notchAtLength(`${knee.name}-half`, knee, pathLength(knee.path) / 2, strokes),
-  );
 
 /** Marks on the centre back: the waist, where it is no corner, and the end of the zip. */
 export const centreMarks = ({ side, levels }: Half, centre: Edge): Piece['notches'] =>
@@ -170,18 +166,6 @@ function secondDartMark(
   const own = edge(waistStretch(1), 'seam', before);
   return notchAtLength('second-dart', own, pathLength(before), strokes);
 }
-
-/** The knee seam from the side to the centre, in a stretch for each gore of the flare. */
-export const kneeEdges = (
-  side: Piece['side'],
-  stretches: readonly KneeStretch[],
-  y: number,
-): readonly Edge[] =>
-  stretches
-    .map(({ name, from, until, gore }) =>
-      edge(name, 'seam', [line(point(until, y), point(from, y))], to(goreName(side, gore), name)),
-    )
-    .reverse();
 
 /** Beside the darts, between hip and knee. */
 const grainIn = (half: Half): { readonly from: Point; readonly to: Point } => {

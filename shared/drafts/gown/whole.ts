@@ -6,9 +6,9 @@ import { point } from '../../geometry/point.ts';
 import { profilePath, xAt } from '../../geometry/profile.ts';
 import { atSide, heightOn } from './half.ts';
 import { type Intake, intakeEdge, princessWhole, wholeDarts } from './intakes.ts';
-import type { KneeStretch, SkirtPanel } from './knee-stretches.ts';
-import { centreMarks, kneeEdges, kneeMarks } from './middle.ts';
+import { centreMarks } from './middle.ts';
 import type { SideHeights } from './side-line.ts';
+import { type FootOf, type PanelFoot, cornered } from './skirt-foot.ts';
 import {
   type TopParts,
   armholeEdges,
@@ -19,8 +19,6 @@ import {
   topDartOf,
   topEdges,
 } from './top.ts';
-import type { TopNames } from './top-names.ts';
-import type { GownStyle } from './style-card.ts';
 
 /** Levels across a piece that reaches from the top edge to the knee seam. */
 const across: readonly (readonly [LevelName, keyof SideHeights])[] = [
@@ -31,21 +29,20 @@ const across: readonly (readonly [LevelName, keyof SideHeights])[] = [
   ['hip', 'hip'],
 ];
 
-/** The pieces above the knee seam of a gown without a waist seam, and where they end on it. */
-export const wholeSkirt = (
-  { shaping }: Pick<GownStyle, 'shaping'>,
-  names: TopNames,
-  axis: number,
-): readonly SkirtPanel[] =>
-  shaping === 'darts'
-    ? [{ piece: names.one, until: Infinity }]
-    : [
-        { piece: names.centre, until: axis },
-        { piece: names.side, until: Infinity },
-      ];
+const sideDown = ({ half, sideTop }: TopParts, partner: string, foot: PanelFoot): Edge =>
+  edge(
+    'side',
+    'side',
+    [...profilePath(half.line, sideTop, half.heights.knee), ...foot.outer],
+    to(partner, 'side'),
+  );
 
-const sideDown = ({ half, sideTop }: TopParts, partner: string): Edge =>
-  edge('side', 'side', profilePath(half.line, sideTop, half.heights.knee), to(partner, 'side'));
+/** The centre edge from the foot of the piece up to the top line. */
+function centreDown(parts: TopParts, foot: PanelFoot): Edge {
+  const { side, heights } = parts.half;
+  const above = centreEdge(side, point(0, heights.knee), topCentreOf(parts));
+  return cornered({ ...above, path: [...foot.inner, ...above.path] }, foot);
+}
 
 const sideMarks = ({ half }: TopParts, own: Edge): Piece['notches'] =>
   (['bust', 'waist', 'hip'] as const).flatMap((level) =>
@@ -66,7 +63,7 @@ const topCentreOf = ({ top }: TopParts) => startOf(top.centre) ?? point(0, 0);
  */
 export function wholePanels(
   parts: TopParts & { readonly above: Intake },
-  knees: readonly KneeStretch[],
+  footOf: FootOf,
 ): readonly Piece[] {
   const { half, top, above, names } = parts;
   const { side, heights, levels, axis } = half;
@@ -78,9 +75,23 @@ export function wholePanels(
     ...intakeEdge(below, towards),
     line(point(axis, below.foot), point(axis, heights.knee)),
   ];
-  const centrePrincess = edge('princess', 'seam', leg('centre'), to(names.side, 'princess'));
-  const sidePrincess = edge('princess', 'seam', reverse(leg('side')), to(names.centre, 'princess'));
-  const own = sideDown(parts, parts.partner.side);
+  const [centreFoot, sideFoot] = [footOf(names.centre), footOf(names.side)];
+  const centrePrincess = edge(
+    'princess',
+    'seam',
+    [...leg('centre'), ...centreFoot.outer],
+    to(names.side, 'princess'),
+  );
+  const sidePrincess = cornered(
+    edge(
+      'princess',
+      'seam',
+      [...sideFoot.inner, ...reverse(leg('side'))],
+      to(names.centre, 'princess'),
+    ),
+    sideFoot,
+  );
+  const own = sideDown(parts, parts.partner.side, sideFoot);
   const kneeLine = (from: number, until: number): LevelLine =>
     levelLine('knee-seam', point(from, heights.knee), point(until, heights.knee));
   const gapAt = (y: number): number => (y >= below.foot ? 0 : xAt(below.gap, y));
@@ -100,14 +111,7 @@ export function wholePanels(
       notchAtHeight(key, on, heightOn(half, key, axis), strokes),
     ),
   ];
-  const kneesOf = (piece: string): readonly Edge[] =>
-    kneeEdges(
-      side,
-      knees.filter(({ skirt }) => skirt === piece),
-      heights.knee,
-    );
-  const [centreKnees, sideKnees] = [kneesOf(names.centre), kneesOf(names.side)];
-  const centre = centreEdge(side, point(0, heights.knee), topCentreOf(parts));
+  const centre = centreDown(parts, centreFoot);
   const grain = (x: number): Piece['grain'] =>
     grainBetween(x, levels.hip, heights.knee, levels.waist);
   return [
@@ -120,16 +124,12 @@ export function wholePanels(
       edges: [
         notched(edge('top', 'top', top.centre), parts.topCorner),
         centrePrincess,
-        ...centreKnees,
+        ...centreFoot.edges,
         centre,
       ],
       darts: [],
       levels: [...across.map(([name, key]) => level(name, key, 'centre')), kneeLine(0, axis)],
-      notches: [
-        ...marks(centrePrincess),
-        ...kneeMarks(centreKnees, strokes),
-        ...centreMarks(half, centre),
-      ],
+      notches: [...marks(centrePrincess), ...centreFoot.notches, ...centreMarks(half, centre)],
       grain: grain(axis * 0.35),
       drills: [],
     },
@@ -144,7 +144,7 @@ export function wholePanels(
         edge('top', 'top', top.outer),
         ...armholeEdges(parts),
         own,
-        ...sideKnees,
+        ...sideFoot.edges,
         sidePrincess,
       ],
       darts: [],
@@ -152,7 +152,7 @@ export function wholePanels(
         ...across.map(([name, key]) => level(name, key, 'side')),
         kneeLine(axis, xAt(half.line, heights.knee)),
       ],
-      notches: [...sideMarks(parts, own), ...marks(sidePrincess), ...kneeMarks(sideKnees, strokes)],
+      notches: [...sideMarks(parts, own), ...marks(sidePrincess), ...sideFoot.notches],
       grain: grain((axis + xAt(half.line, heights.hip)) / 2),
       drills: [],
     },
@@ -160,10 +160,9 @@ export function wholePanels(
 }
 
 /** One piece from the top edge to the knee seam, its waist taken in by darts pointed at both ends. */
-export function wholeDarted(parts: TopParts, knees: readonly KneeStretch[]): readonly Piece[] {
+export function wholeDarted(parts: TopParts, footOf: FootOf): readonly Piece[] {
   const { half, top, names } = parts;
   const { side, heights, levels } = half;
-  const strokes = strokesOf(side);
   const shaped = half.gap.underbust > 0 || half.gap.waist > 0;
   const waistDarts = (shaped ? wholeDarts(half, parts.dartClearance) : []).map(
     (intake, k): Dart => ({
@@ -175,9 +174,9 @@ export function wholeDarted(parts: TopParts, knees: readonly KneeStretch[]): rea
     }),
   );
   const topDart = topDartOf(top, parts.topDartTip);
-  const own = sideDown(parts, parts.partner.one);
-  const centre = centreEdge(side, point(0, heights.knee), topCentreOf(parts));
-  const kneeSeam = kneeEdges(side, knees, heights.knee);
+  const foot = footOf(names.one);
+  const own = sideDown(parts, parts.partner.one, foot);
+  const centre = centreDown(parts, foot);
   return [
     {
       name: names.one,
@@ -189,7 +188,7 @@ export function wholeDarted(parts: TopParts, knees: readonly KneeStretch[]): rea
         ...topEdges(top, topDart, parts.topCorner),
         ...armholeEdges(parts),
         own,
-        ...kneeSeam,
+        ...foot.edges,
         centre,
       ],
       darts: [...topDart, ...waistDarts],
@@ -197,11 +196,7 @@ export function wholeDarted(parts: TopParts, knees: readonly KneeStretch[]): rea
         ...across.map(([name, key]) => levelLine(name, point(0, levels[key]), atSide(half, key))),
         levelLine('knee-seam', point(0, heights.knee), atSide(half, 'knee')),
       ],
-      notches: [
-        ...sideMarks(parts, own),
-        ...kneeMarks(kneeSeam, strokes),
-        ...centreMarks(half, centre),
-      ],
+      notches: [...sideMarks(parts, own), ...foot.notches, ...centreMarks(half, centre)],
       grain: grainBetween(half.axis * 0.35, levels.hip, heights.knee, levels.waist),
       drills: drillPoints([...waistDarts, ...topDart]),
     },

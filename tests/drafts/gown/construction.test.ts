@@ -6,7 +6,7 @@ import { contours, princessAbove } from '#shared/drafts/gown/contour.ts';
 import { gownLevels } from '#shared/drafts/gown/levels.ts';
 import { longestStep } from '#shared/drafts/gown/walking.ts';
 import { closedSeam, fallFor } from '#shared/drafts/gown/waist-seam.ts';
-import { planFlare } from '#shared/drafts/gown/flare.ts';
+import { planFlare } from '#shared/drafts/gown/flare-plan.ts';
 import { type StyleCard, topLineShapes } from '#shared/drafts/gown/style-card.ts';
 import type { Draft } from '#shared/engine/draft.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
@@ -119,7 +119,7 @@ describe('the waist seam', () => {
 
 describe('the flare', () => {
   it('is divided until each gore fits the cloth, all gores alike', () => {
-    const wide = planFlare(190, 120, 600, 900);
+    const wide = planFlare({ seam: 190, inner: 120, depth: 600, room: 900 });
     expect(wide.gores).toBeGreaterThan(1);
     expect(2 * wide.outer * Math.sin(wide.halfGore)).toBeLessThanOrEqual(900);
     expect(wide.halfGore * (2 * wide.gores - 1)).toBeCloseTo(wide.angle, 9);
