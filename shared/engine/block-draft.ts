@@ -19,6 +19,8 @@ import type { Proof } from '../proof/proof.ts';
 import type { Problem } from '../units/problem.ts';
 import { mm, said } from '../units/said.ts';
 import { draftNumber } from './draft-number.ts';
+import { sortedJson } from './sorted-json.ts';
+import { labelFacts } from './label-facts.ts';
 
 /** Version of the rules of the blocks: a change of any shape raises it. */
 const blockVersion = '1.0.0';
@@ -59,7 +61,7 @@ export type BlockDraft<Name extends BlockName, Card, Style> = {
 export type BlockKind<Name extends BlockName, Card, Style> = {
   readonly garment: Name;
   readonly check: (card: Card, body: Body, levels: BodyLevels) => readonly Problem[];
-  readonly resolve: (card: Card, body: Body, levels: BodyLevels) => Style;
+  readonly resolve: (card: Card, body: Body, levels: BodyLevels, rules: HouseRules) => Style;
   readonly draw: (
     table: DraftingTable,
     body: Body,
@@ -115,11 +117,11 @@ export function draftBlock<Name extends BlockName, Card, Style>(
   const bodyLevels = gownLevels(table, body);
   const aboutStyle = kind.check(style, body, bodyLevels);
   refuse(aboutStyle);
-  const resolved = kind.resolve(style, body, bodyLevels);
+  const resolved = kind.resolve(style, body, bodyLevels, rules);
   const drawn = kind.draw(table, body, bodyLevels, resolved, rules);
-  const number = draftNumber(JSON.stringify([garment, blockVersion, card, style, rules]));
+  const number = draftNumber(sortedJson([garment, blockVersion, card, style, rules]));
   narrateFinishing(table, drawn.pieces, rules);
-  const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'block' };
+  const label = labelFacts(garment, card, number);
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {
     garment,

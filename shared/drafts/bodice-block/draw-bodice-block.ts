@@ -141,12 +141,12 @@ export function drawBodiceBlock(
       shoulderEase: style.shoulderEase,
     }),
   };
-  const front = placeBustDart(asDrawn, style.bustDart, {
+  const { front, share } = placeBustDart(asDrawn, style.bustDart, {
     bustNotch,
     bustPoint,
     allowance: rules.allowance.top,
   });
-  narratePlace(papers.front, front, style.bustDart, angle.angle, bustPoint);
+  narratePlace(papers.front, front, style.bustDart, { angle: angle.angle, share, bustPoint });
   return {
     pieces: [front, backToMatch(backPiece(half('back'), style.shoulderEase), front)],
     levels: { chest: heights.underarm, bust: heights.bust, waist: heights.waist },

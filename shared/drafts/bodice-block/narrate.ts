@@ -189,6 +189,15 @@ const called: { readonly [P in BustDartPlace]: string } = {
   side: 'side seam',
   waist: 'waist seam',
   neck: 'neck',
+  topLine: 'upper edge, straight above it',
+};
+
+/** Height of a strapless top line above the bust line, where its peak lies (method section 6). */
+const strapless = 85;
+
+const whyMoved: { readonly [P in BustDartPlace]?: Said } = {
+  topLine: said`There the princess seam of a gown leaves its top line: draw the top line across the two legs and cut away what lies above.`,
+  armhole: said`The angle at the bust point stays, so does every seam; what a round edge cannot fold is sewn in the waist.`,
 };
 
 /** Records where the bust dart was turned to; nothing where it stayed in the shoulder. */
@@ -196,27 +205,40 @@ export function narratePlace(
   paper: PartTable,
   front: Piece,
   place: BustDartPlace,
-  angle: number,
-  bustPoint: Point,
+  {
+    angle,
+    share,
+    bustPoint,
+  }: { readonly angle: number; readonly share: number; readonly bustPoint: Point },
 ): void {
   if (place === 'shoulder') return;
   const own = front.darts.find(({ name }) => name === 'bust');
   const dart = own ?? front.darts[0];
   const mouthAt = dart?.centreLeg[0]?.from ?? bustPoint;
   const reach = distance(mouthAt, bustPoint);
+  const here = angle * share;
   const opening = own
-    ? said`${deg(angle)} there open it by ${mm(dartOpening(angle, reach))}`
+    ? said`${deg(here)} there open it by ${mm(dartOpening(here, reach))}`
     : said`the waist dart grows by its ${deg(angle)}`;
+  const rest: Said =
+    share === 1
+      ? said``
+      : said` The other ${deg(angle - here)} are sewn in the waist: so round an armhole folds no wider dart.`;
+  const atTopLine: Said =
+    place === 'topLine'
+      ? said` On a strapless top line, ${mm(strapless)} above the bust line, that is ${mm(2 * strapless * Math.tan((angle * Math.PI) / 360))}.`
+      : said``;
   paper.draw(
     'Dart moved',
-    said`The shoulder dart is closed and the paper cut from the bust point to the ${called[place]}: ${opening}.`,
+    said`The shoulder dart is closed and the paper cut from the bust point to the ${called[place]}: ${opening}.${rest}${atTopLine}`,
     {
-      why: said`The angle at the bust point stays, so does every seam; only the opening grows with its distance from the bust point.`,
+      why:
+        whyMoved[place] ??
+        said`The angle at the bust point stays, so does every seam; only the opening grows with its distance from the bust point.`,
       lines: [
         front.edges.flatMap((edge) => edge.path),
-        ...(dart ? [dart.centreLeg, dart.sideLeg] : []),
+        ...front.darts.flatMap((each) => [each.centreLeg, each.sideLeg]),
       ],
-      pieces: [bodiceFront],
     },
   );
 }

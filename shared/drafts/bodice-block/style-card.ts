@@ -6,7 +6,7 @@ export const bustDartRules = ['cup', 'shoulderTable', 'proportional', 'lengths']
 export type BustDartRule = (typeof bustDartRules)[number];
 
 /** Seams the bust dart may be sewn into. */
-export const dartPlaces = ['shoulder', 'armhole', 'side', 'waist', 'neck'] as const;
+export const dartPlaces = ['shoulder', 'armhole', 'side', 'waist', 'neck', 'topLine'] as const;
 export type BustDartPlace = (typeof dartPlaces)[number];
 
 /** Style card of a bodice block, millimetres. What is left out takes its initial value. */

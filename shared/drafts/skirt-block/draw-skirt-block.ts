@@ -4,7 +4,7 @@ import type { WantedGirth } from '../../drafting/construction.ts';
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
-import type { Quantity } from '../../drafting/quantity.ts';
+import { type Quantity, plus } from '../../drafting/quantity.ts';
 import { pathLength } from '../../geometry/curve.ts';
 import { line } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
@@ -28,12 +28,16 @@ function quartersOf(side: Side, body: Body, style: SkirtBlockStyle, rules: House
       ease: style.ease.waist,
       balance: 'waist',
     }),
-    hip: blockQuarter(side, body, rules, {
-      name: 'hip',
-      girth: 'hipGirth',
-      ease: style.ease.hip,
-      balance: 'hip',
-    }),
+    hip: plus(
+      blockQuarter(side, body, rules, {
+        name: 'hip',
+        girth: 'hipGirth',
+        ease: style.ease.hip,
+        balance: 'hip',
+      }),
+      'seat',
+      (side === 'front' ? -1 : 1) * (style.seat / 2),
+    ),
   };
 }
 
