@@ -67,8 +67,10 @@ export function narrateArmhole(
   const kept = halfAcross + opening - from.x;
   const how: Said =
     kept > 0.05
-      ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would reach past the side; it is kept ${mm(from.x)} out`
-      : said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} put its upper end ${mm(from.x)} out`;
+      ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would reach too near the side; its upper end is kept ${mm(from.x)} out`
+      : kept < -0.05
+        ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would end at the bust seam; its upper end is set ${mm(from.x)} out, clear of it`
+        : said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} put its upper end ${mm(from.x)} out`;
   paper.draw(
     'Armhole edge',
     said`${how}, ${mm(from.y)} down; from there square to the top line, down and out to the underarm, ${mm(until.x)} out, square to the side seam: ${mm(pathLength(armhole))} long.`,

@@ -6,8 +6,10 @@ import type { TopLinePoints } from './top-line.ts';
 import { heightAtArc } from './truing.ts';
 
 /** Off the shoulder the top line ends inside the side line by this, and by this part of the armhole's height (our rule). */
-const insideSide = 20;
-const hollowShare = 0.4;
+const insideSide = 12;
+const hollowShare = 0.35;
+/** It passes the princess line or dart by this at least, so that the seam ends in the top line (our rule). */
+export const outsideAxis = 35;
 
 /** What the top line of a half is drawn from: half the width of the body there, and its opening. */
 export type TopWidth = { readonly halfAcross: number; readonly opening: number };
@@ -39,7 +41,8 @@ function shoulderEnd(half: Half, style: GownStyle, { halfAcross, opening }: TopW
   const { underarm } = half.heights;
   const inside = Math.max(insideSide, hollowShare * (underarm - style.sideDepth));
   const most = xAt(half.line, underarm) - inside;
-  return { side: point(Math.min(halfAcross + opening, most), style.sideDepth) };
+  const wished = Math.max(halfAcross, half.axis + outsideAxis) + opening;
+  return { side: point(Math.min(wished, most), style.sideDepth) };
 }
 
 function frontTopLine(style: GownStyle, axis: number, end: End): TopLinePoints {
