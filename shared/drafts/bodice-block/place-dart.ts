@@ -2,7 +2,7 @@ import { type DartPlace, moveDart } from '../../drafting/move-dart.ts';
 import type { Piece } from '../../drafting/piece.ts';
 import { seamInStretches, seamOf } from '../../drafting/seam-stretches.ts';
 import { DraftingError } from '../../drafting/drafting-error.ts';
-import { endTangent, pathLength stationAtLength } from '../../geometry/curve.ts';
+import { endTangent, pathLength, stationAtLength } from '../../geometry/curve.ts';
 import type { Path } from '../../geometry/path.ts';
 import { type Point, distance, dot } from '../../geometry/point.ts';
 import { error } from '../../units/problem.ts';
