@@ -106,7 +106,7 @@ export const houseRuleFigures: readonly HouseRuleFigure[] = [
     label: 'Zip allowance',
     hint: 'Where the zip is set in, never counted in a girth.',
     min: 10,
-    max: 50,
+    max: 60,
   }),
   allowanceFor('top', {
     label: 'Top edge allowance',

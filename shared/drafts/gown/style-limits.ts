@@ -1,8 +1,10 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
-import { easeLevels, styleLengths } from './style-card.ts';
+import { type FlareChoices, longestTrainOf, widestHem } from './flare-limits.ts';
+import { easeLevels, styleChoices, styleLengths } from './style-card.ts';
 import { isOffShoulder } from './style-card.ts';
 import type { EaseLevel, StyleCard, StyleLength, TopLineShape } from './style-card.ts';
+import { outsideAxis } from './top-line-points.ts';
 
 /** Bounds of one style choice and what it is when left open, millimetres (the `plainNumbers` as they are). */
 export type Limit = { readonly min: number; readonly max: number; readonly initial: number };
@@ -22,6 +24,10 @@ const limit = (min: number, max: number, initial: number): Limit => {
   const top = Math.max(min, max);
   return { min, max: top, initial: Math.min(top, Math.max(min, initial)) };
 };
+
+/** A choice out of its own bounds must not bend the bounds of those that hang on it. */
+const within = (value: number | undefined, { min, max, initial }: Limit): number =>
+  value === undefined || Number.isNaN(value) ? initial : Math.min(max, Math.max(min, value));
 
 /** A back top line may not rise nearer to the nape than this (common practice, no source). */
 const belowNape = 90;
@@ -45,10 +51,15 @@ function kneeFinished(body: Body, levels: BodyLevels, kneeLevel: number, hipEase
 /** The back top line at the centre back, above the waist. */
 function backDepth(body: Body, levels: BodyLevels, initial: number): Limit {
   const least = Math.max(100, Math.ceil(levels.waist - levels.bust + 10));
-  const most = Math.min(Math.max(250, least + 60), body.measures.backWaistLength - belowNape);
+  const most = Math.min(
+    Math.max(250, least + 60, initial + 30),
+    body.measures.backWaistLength - belowNape,
+  );
   return limit(least, most, initial);
 }
 
+/** Off the shoulder the peak lies this far inside the end of the top line at least. */
+const insideEnd = 30;
 /** An armhole this deep at least lies between the band's edge and the underarm. */
 const leastArmhole = 30;
 /** Off the shoulder the back dips this much from the arms to the centre. */
@@ -58,9 +69,21 @@ const backDip = 10;
 const leastRise = 20;
 export const seamUnderBust = 20;
 
-/** The hem of an A-line, of godets or of seams that run on outwards: a fifth of a circle more than the knee. */
-const hemSweep = (knee: number, depth: number): Limit =>
-  limit(knee + 100, knee + 2 * Math.PI * depth, knee + 0.4 * Math.PI * depth);
+/** A train is at most this long, whatever the flare (our rule). */
+const longestOfAll = 1500;
+
+/** The hem of an A-line, of godets or of seams that run on outwards (a fifth of a circle more than the knee), and the train. */
+function hems(
+  flare: FlareChoices,
+  hemSweep: number | undefined,
+): { readonly hemSweep: Limit; readonly train: Limit } {
+  const { kneeFinished: knee, flareLength: depth } = flare;
+  // How long a train godets may have hangs on the knee alone, so their hem may look to it.
+  const longest = flare.flare === 'godets' ? longestTrainOf(flare, knee) : 0;
+  const sweep = limit(knee + 100, widestHem(flare, longest), knee + 0.4 * Math.PI * depth);
+  const train = Math.min(longestOfAll, longestTrainOf(flare, within(hemSweep, sweep)));
+  return { hemSweep: sweep, train: limit(0, Math.floor(train), 0) };
+}
 
 /** Ease the woven, boned gown takes at each level (method section 4), and how far a maker may go. */
 const easeLimits: { readonly [K in `ease.${EaseLevel}`]: Limit } = {
@@ -78,8 +101,8 @@ function neck(
   peak: number,
   bust: number,
   bustSpan: number,
+  widest: number,
 ): { readonly neckDepth: Limit; readonly neckWidth: Limit } {
-  const widest = bustSpan / 2 + 40;
   if (shape === 'straight') {
     return { neckDepth: limit(peak, peak, peak), neckWidth: limit(40, widest, 76) };
   }
@@ -98,32 +121,32 @@ function neck(
 export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {}): StyleLimits {
   const { bustSpan, waistToHip } = body.measures;
   const offShoulder = isOffShoulder(style);
+  // Off the shoulder the peak lies inside the end of the top line.
+  const outer = Math.max(body.measures.acrossFront / 2, bustSpan / 2 + outsideAxis);
+  const widestNeck = Math.min(bustSpan / 2 + 40, offShoulder ? outer - insideEnd : Infinity);
   const topDrop = offShoulder
     ? limit(90, levels.bust - 60, 127)
     : limit(levels.bust - 110, levels.bust - 60, levels.bust - 85);
-  // A choice out of its own bounds must not bend the bounds of those that hang on it.
-  const chosen = (value: number | undefined, { min, max, initial }: Limit): number =>
-    value === undefined || Number.isNaN(value) ? initial : Math.min(max, Math.max(min, value));
-  const peak = chosen(style.topDrop, topDrop);
+  const peak = within(style.topDrop, topDrop);
   const longestDart = Math.min(150, waistToHip - 45);
   const highestKnee = Math.min(250, levels.knee - levels.hip - leastHipToKneeSeam);
   const kneeLevel = limit(0, highestKnee, 100);
-  const seamAboveKnee = chosen(style.kneeLevel, kneeLevel);
+  const seamAboveKnee = within(style.kneeLevel, kneeLevel);
   const heelHeight = limit(0, 150, 50);
   const seamToFloor =
-    levels.floor - levels.knee + seamAboveKnee + chosen(style.heelHeight, heelHeight);
+    levels.floor - levels.knee + seamAboveKnee + within(style.heelHeight, heelHeight);
   const shortestFlare = 150;
   const floorClearance = limit(0, seamToFloor - shortestFlare, 20);
   const flareLength = limit(
     shortestFlare,
     seamToFloor,
-    seamToFloor - chosen(style.floorClearance, floorClearance),
+    seamToFloor - within(style.floorClearance, floorClearance),
   );
   const finishedKnee = kneeFinished(
     body,
     levels,
     seamAboveKnee,
-    chosen(style.ease?.hip, easeLimits['ease.hip']),
+    within(style.ease?.hip, easeLimits['ease.hip']),
   );
   const sideDepth = offShoulder
     ? limit(peak, levels.underarm - leastArmhole, 165)
@@ -132,35 +155,42 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
         levels.bust - 10,
         Math.min(levels.underarm + 10, levels.bust - 15),
       );
+  const flareFraction = limit(0.25, 1, 0.5);
+  const clothWidth = limit(700, 3000, 1450);
+  const flare: FlareChoices = {
+    flare: style.flare ?? styleChoices.flare[0],
+    waistSeam: style.waistSeam ?? styleChoices.waistSeam[0],
+    shaping: style.shaping ?? styleChoices.shaping[0],
+    kneeFinished: within(style.kneeFinished, finishedKnee),
+    flareLength: within(style.flareLength, flareLength),
+    flareFraction: within(style.flareFraction, flareFraction),
+    clothWidth: within(style.clothWidth, clothWidth),
+  };
   const highestSeam = Math.max(leastRise, levels.waist - levels.underbust - seamUnderBust);
   return {
     topDrop,
-    ...neck(style.topLine ?? 'sweetheart', peak, levels.bust, bustSpan),
+    ...neck(style.topLine ?? 'sweetheart', peak, levels.bust, bustSpan, widestNeck),
     sideDepth,
     backDepth: backDepth(
       body,
       levels,
-      offShoulder ? levels.waist - chosen(style.sideDepth, sideDepth) - backDip : 180,
+      offShoulder ? levels.waist - within(style.sideDepth, sideDepth) - backDip : 180,
     ),
     waistSeamRise: limit(leastRise, highestSeam, 76),
     dartLength: limit(Math.min(100, longestDart - 15), longestDart, 127),
     kneeLevel,
     kneeFinished: finishedKnee,
-    flareFraction: limit(0.25, 1, 0.5),
-    hemSweep: hemSweep(
-      chosen(style.kneeFinished, finishedKnee),
-      chosen(style.flareLength, flareLength),
-    ),
+    flareFraction,
+    ...hems(flare, style.hemSweep),
     flareLength,
     floorClearance,
     heelHeight,
-    train: limit(0, 1500, 0),
     bandHeight: limit(60, 200, 110),
     pleatRatio: limit(1, 3, 2),
     armEase: limit(-40, 60, 0),
     stretch: limit(0, 100, style.cloth === 'stretch' ? 20 : 0),
     shrinkage: limit(0, 10, 0),
-    clothWidth: limit(700, 3000, 1450),
+    clothWidth,
     ...easeLimits,
   };
 }
