@@ -39,7 +39,7 @@ export type HouseRules = {
   readonly dartClearance: number;
   readonly armholeAt: ArmholePlace;
   /** Intakes given outright, front and back alike: the side seam takes the rest. Absent, they are derived. */
-  readonly intakes?: { readonly [P in IntakePlace]: number } | undefined;
+  readonly intakes?: { readonly [P in IntakePlace]: number };
   /** Allowance beyond the seam line by kind of edge; a fold has none. */
   readonly allowance: {
     readonly seam: number;

@@ -62,8 +62,11 @@ function followed(
     case 'moved':
       return recorded(history, before, after, `${action.type} ${action.field}`);
     case 'named':
-      return recorded(history, before, after, 'named');
+    case 'overruled':
+      return recorded(history, before, after, action.type);
     case 'chosen':
+    case 'ruled':
+    case 'put':
     case 'gown laid':
     case 'cleared':
       return recorded(closed(history), before, after);

@@ -2,6 +2,7 @@ import type { CardContent } from '#shared/api/measure-cards.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { fieldKeys, rewritten } from './fields.ts';
+import { choicesFrom } from './style-choices.ts';
 import { choicesOf, contentOf, sameWork } from './gown-content.ts';
 import type { Choices } from './table-inputs.ts';
 
@@ -22,9 +23,12 @@ export function cardChoices(
     const entry = (field.startsWith('card.') ? laid : choices).entries[field];
     return entry === undefined ? [] : [[field, rewritten(field, entry, choices.unit)] as const];
   });
-  const { topLine, shaping, preset } = choices;
-  const { name, date } = laid;
-  return { name, date, topLine, shaping, preset, entries: Object.fromEntries(entries) };
+  const { name, date, overruled } = laid;
+  return {
+    ...choicesFrom((choice) => choices[choice]),
+    ...{ name, date, overruled, rules: choices.rules },
+    entries: Object.fromEntries(entries),
+  };
 }
 
 /** The gown a card alone would be. */

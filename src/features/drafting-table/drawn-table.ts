@@ -6,14 +6,8 @@ import type { Draft, DraftInputs } from '#shared/engine/draft.ts';
 import type { Problem } from '#shared/units/problem.ts';
 
 import { fieldKeys } from './fields.ts';
-import {
-  applies,
-  cardOf,
-  hasCoreMeasures,
-  rulesOf,
-  styleOf,
-  type Choices,
-} from './table-inputs.ts';
+import { applies } from './style-choices.ts';
+import { cardOf, hasCoreMeasures, rulesOf, styleOf, type Choices } from './table-inputs.ts';
 
 /** What lies on the table: the last draft that could be drawn, and what stands in the way of the next. */
 export type Drawn = {

@@ -1,23 +1,21 @@
 import type { GownContent } from '#shared/api/gowns.ts';
+import { houseRuleFigures } from '#shared/drafting/house-rule-figures.ts';
+import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
+import { intakePlaces, type HouseRules } from '#shared/drafting/house-rules.ts';
+import { sortedJson } from '#shared/engine/sorted-json.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import {
   fieldKeys,
   readEntry,
   rewritten,
+  ruleFields,
   writeValue,
   type Entry,
   type FieldKey,
 } from './fields.ts';
-import {
-  applies,
-  cardOf,
-  givenFor,
-  presetOf,
-  rulesOf,
-  styleOf,
-  type Choices,
-} from './table-inputs.ts';
+import { applies, choicesFrom } from './style-choices.ts';
+import { cardOf, givenFor, rulesOf, styleOf, type Choices } from './table-inputs.ts';
 
 /** The key the name of a card goes under in the letters typed. */
 const nameKey = 'card.name';
@@ -53,9 +51,12 @@ export function choicesOf({ typed, inputs }: GownContent): {
   const { unit, fields } = typed;
   const entry = (field: FieldKey): Entry | undefined => {
     const text = fields[field];
-    const value = givenFor(field, card, style);
-    if (value !== undefined) return { text: text ?? writeValue(field, value, unit), value };
-    return text === undefined ? undefined : readEntry(field, text, unit);
+    const read = text === undefined ? undefined : readEntry(field, text, unit);
+    const isRule = ruleFields.some((each) => each === field);
+    // A figure of the house rules is somebody's own where it was typed.
+    if (isRule && (read === undefined || 'unread' in read)) return read;
+    const value = isRule ? ruleIn(rules, field) : givenFor(field, card, style);
+    return value === undefined ? read : { text: text ?? writeValue(field, value, unit), value };
   };
   const entries = fieldKeys.flatMap((field) => {
     const found = entry(field);
@@ -66,12 +67,30 @@ export function choicesOf({ typed, inputs }: GownContent): {
     choices: {
       name: fields[nameKey] ?? card.name ?? '',
       date: card.date,
-      topLine: style.topLine ?? 'sweetheart',
-      shaping: style.shaping ?? 'princess',
-      preset: presetOf(rules),
+      overruled: card.overruled ?? [],
+      rules: begunWith(rules, (rule) => rule in fields),
+      ...choicesFrom((choice) => style[choice]),
       entries: Object.fromEntries(entries),
     },
   };
+}
+
+/** The value of a rule's field in these rules. */
+function ruleIn(rules: HouseRules, field: FieldKey): number | undefined {
+  const place = intakePlaces.find((each) => field === `rules.intakes.${each}`);
+  if (place !== undefined) return rules.intakes?.[place];
+  return houseRuleFigures.find(({ key }) => field === `rules.${key}`)?.value(rules);
+}
+
+/** The rules that figures were typed over: those of a preset, where the others are its own. */
+function begunWith(rules: HouseRules, isTyped: (field: FieldKey) => boolean): HouseRules {
+  const untyped = houseRuleFigures.filter(({ key }) => !isTyped(`rules.${key}`));
+  const preset = Object.values(houseRulePresets).find((each) =>
+    untyped.every(({ value }) => value(each) === value(rules)),
+  );
+  return preset === undefined
+    ? rules
+    : houseRuleFigures.reduce((now, { value, put }) => put(now, value(preset)), rules);
 }
 
 /** What a gown keeps, with its figures written in the reader's unit. */
@@ -86,12 +105,4 @@ export function choicesIn(content: GownContent, unit: Unit): Choices {
 
 /** Whether two contents are one gown, however its figures were written. */
 export const sameWork = (a: GownContent, b: GownContent): boolean =>
-  a.unread.length + b.unread.length === 0 && sorted(a.inputs) === sorted(b.inputs);
-
-/** JSON with keys in one order: the server's own order says nothing. */
-const sorted = (value: unknown): string =>
-  JSON.stringify(value, (_key, each: unknown) =>
-    typeof each === 'object' && each !== null && !Array.isArray(each)
-      ? Object.fromEntries(Object.entries(each).sort(([a], [b]) => (a < b ? -1 : 1)))
-      : each,
-  );
+  a.unread.length + b.unread.length === 0 && sortedJson(a.inputs) === sortedJson(b.inputs);

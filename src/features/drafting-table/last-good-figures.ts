@@ -1,9 +1,11 @@
+import { houseRuleFigures } from '#shared/drafting/house-rule-figures.ts';
 import type { Draft } from '#shared/engine/draft.ts';
 import { formatWithUnit } from '#shared/units/format-length.ts';
 
-import { fieldKeys, marked, valueOf, type FieldKey } from './fields.ts';
+import { cardFields, kindOf, marked, styleFields, valueOf, type FieldKey } from './fields.ts';
 import { partLabel, partWords } from './part-words.ts';
-import { applies, givenFor, presetOf } from './table-inputs.ts';
+import { applies, styleChoiceKeys } from './style-choices.ts';
+import { givenFor, rulesOf } from './table-inputs.ts';
 import type { TableState } from './table-state.ts';
 
 /** Nearer than this two figures are one: a field may hold what reading rounded, mm. */
@@ -14,8 +16,8 @@ const same = 0.01;
  * `Waist: prints with 28 1⁄2 in, the last good figure`.
  */
 export function lastGoodFigures(state: TableState, draft: Draft): readonly string[] {
-  const { card, style } = draft.inputs;
-  const figures = fieldKeys.flatMap((field) => {
+  const { card, style, rules } = draft.inputs;
+  const figures = [...cardFields, ...styleFields].flatMap((field) => {
     const was = givenFor(field, card, style);
     const now = valueOf(state.entries[field]);
     const unchanged = was === undefined ? state.entries[field] === undefined : near(was, now);
@@ -24,19 +26,24 @@ export function lastGoodFigures(state: TableState, draft: Draft): readonly strin
       `${partLabel(field)}: prints ${was === undefined ? 'as left open' : `with ${worded(field, was, state)}`}, the last good figure`,
     ];
   });
-  const chosen = { ...draft.style, preset: presetOf(draft.inputs.rules) };
-  const choices = (['topLine', 'shaping', 'preset'] as const).flatMap((key) => {
-    const was = chosen[key];
+  const choices = styleChoiceKeys.flatMap((key) => {
+    const was = draft.style[key];
     if (was === state[key]) return [];
     return [`${partLabel(key)}: prints ${partWords(key, was, state.unit)}, the last that held`];
   });
-  return [...figures, ...choices];
+  const now = rulesOf(state);
+  const ruled = houseRuleFigures.flatMap(({ key, label, value }) =>
+    near(value(rules), value(now))
+      ? []
+      : [
+          `${label}: prints with ${worded(`rules.${key}`, value(rules), state)}, the last good figure`,
+        ],
+  );
+  return [...figures, ...choices, ...ruled];
 }
 
 const near = (was: number, now: number | undefined): boolean =>
   now !== undefined && Math.abs(was - now) < same;
 
-const worded = (field: FieldKey, value: number, { unit }: TableState): string => {
-  const plain = field === 'style.flareFraction' || field === 'card.shoulderSlope';
-  return plain ? marked(field, value, unit) : formatWithUnit(value, unit);
-};
+const worded = (field: FieldKey, value: number, { unit }: TableState): string =>
+  kindOf(field) === 'length' ? formatWithUnit(value, unit) : marked(field, value, unit);

@@ -1,11 +1,18 @@
-import { topLineShapes } from '#shared/drafts/gown/style-card.ts';
+import { overruledWith, longestReason } from '#shared/api/card.ts';
+import { keptText } from '#shared/api/kept-text.ts';
+import { houseRules } from '#shared/api/rules.ts';
+import type { StyleChoice } from '#shared/drafts/gown/style-card.ts';
 
 import { fieldKeys, readEntry, rewritten, type Entry, type FieldKey } from './fields.ts';
 import type { Unit } from '#shared/units/said.ts';
+import { choicesFrom, styleChoiceKeys } from './style-choices.ts';
 import type { Choices } from './table-inputs.ts';
 
-const choiceKeys = ['name', 'date', 'topLine', 'shaping', 'preset'] as const;
-type ChoiceKey = (typeof choiceKeys)[number];
+/** Kept as JSON: they are compared and put back whole. */
+const writtenKeys = ['overruled', 'rules'] as const;
+type WrittenKey = (typeof writtenKeys)[number];
+type ChoiceKey = 'name' | 'date' | StyleChoice | WrittenKey;
+const choiceKeys: readonly ChoiceKey[] = ['name', 'date', ...styleChoiceKeys, ...writtenKeys];
 export type PartKey = FieldKey | ChoiceKey;
 
 /** One part of what lies on the table: a figure's entry or a choice's word; null where it is left open. */
@@ -18,8 +25,12 @@ export const partKeys: readonly PartKey[] = [...choiceKeys, ...fieldKeys];
 
 const isChoice = (key: PartKey): key is ChoiceKey => choiceKeys.some((each) => each === key);
 
-export const partOf = (choices: Choices, key: PartKey): Part =>
-  (isChoice(key) ? choices[key] : choices.entries[key]) ?? null;
+const isWritten = (key: PartKey): key is WrittenKey => writtenKeys.some((each) => each === key);
+
+export function partOf(choices: Choices, key: PartKey): Part {
+  if (isWritten(key)) return JSON.stringify(choices[key]);
+  return (isChoice(key) ? choices[key] : choices.entries[key]) ?? null;
+}
 
 /** Whether two parts mean the same; how a figure was written does not matter where it could be read. */
 export function samePart(a: Part, b: Part): boolean {
@@ -46,12 +57,27 @@ export function withParts(choices: Choices, parts: Parts, unit: Unit): Choices {
   return {
     name: word('name') ?? '',
     date: word('date'),
-    topLine: topLineShapes.find((each) => each === word('topLine')) ?? 'sweetheart',
-    shaping: word('shaping') === 'darts' ? 'darts' : 'princess',
-    preset: word('preset') === 'quarterRule' ? 'quarterRule' : 'balanced',
+    ...choicesFrom(word),
+    overruled: readOverruled(jsonIn(word('overruled'))) ?? choices.overruled,
+    rules: readRules(jsonIn(word('rules'))) ?? choices.rules,
     entries: Object.fromEntries(entries),
   };
 }
+
+function jsonIn(text: string | undefined): unknown {
+  try {
+    return JSON.parse(text ?? 'null');
+  } catch {
+    return undefined;
+  }
+}
+
+/** House rules as they were kept; no answer where they cannot be trusted. */
+export const readRules = (kept: unknown) => houseRules.safeParse(kept).data;
+
+/** Overruled warnings as they were kept; no answer where they cannot be trusted. */
+export const readOverruled = (kept: unknown) =>
+  overruledWith(keptText(longestReason)).safeParse(kept).data;
 
 /** Parts as a browser kept them: a value is trusted as a number, other text is read again. */
 export function keptParts(kept: unknown, unit: Unit): Parts {

@@ -1,5 +1,6 @@
 import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
+import { isPlainNumber } from '#shared/drafts/gown/style-card.ts';
 import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
 import { styleKeys, styleLimits } from '#shared/drafts/gown/style-limits.ts';
 import { formatWithUnit } from '#shared/units/format-length.ts';
@@ -18,7 +19,7 @@ export const problemWords = (problem: Problem, table: Told): string =>
 
 /** What stands under a field; a combination that cannot be is said once, under the one of its fields it names first. */
 export function messageFor(
-  field: FieldKey,
+  field: string,
   problems: readonly Problem[],
   table: Told,
 ): string | undefined {
@@ -55,7 +56,7 @@ function boundsOf(field: FieldKey, { drawn: { draft } }: Told): Bounds | undefin
     return measureGuide[measure].kind === 'length' ? measureGuide[measure] : undefined;
   }
   const style = styleKeys.find((key) => field === `style.${key}`);
-  if (draft === undefined || style === undefined || style === 'flareFraction') return undefined;
+  if (draft === undefined || style === undefined || isPlainNumber(style)) return undefined;
   const limits = styleLimits(draft.body, draft.bodyLevels, draft.inputs.style);
   return { label: styleLabels[style], ...limits[style] };
 }

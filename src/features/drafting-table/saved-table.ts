@@ -1,10 +1,11 @@
-import { topLineShapes } from '#shared/drafts/gown/style-card.ts';
+import { balanced, quarterRule } from '#shared/drafting/house-rule-presets.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { browserStorage } from '../../lib/browser-storage.ts';
 import { fieldKeys, readEntry, writeValue, type Entries, type FieldKey } from './fields.ts';
 import { keptHistory, noHistory, type History } from './history.ts';
-import { isRecord } from './parts.ts';
+import { isRecord, readOverruled, readRules } from './parts.ts';
+import { choicesFrom, styleChoiceKeys } from './style-choices.ts';
 import { emptyTable, redrawn, type TableState } from './table-state.ts';
 
 const key = 'ellwand.table';
@@ -33,12 +34,13 @@ export function keepTable(
   state: TableState,
   storage: Storage | undefined = browserStorage('local'),
 ): boolean {
-  const { unit, name, date, topLine, shaping, preset, entries } = state;
+  const { unit, name, date, overruled, rules, entries } = state;
+  const made = Object.fromEntries(styleChoiceKeys.map((choice) => [choice, state[choice]]));
   try {
     if (storage === undefined) return false;
     storage.setItem(
       key,
-      JSON.stringify({ version, unit, name, date, topLine, shaping, preset, entries }),
+      JSON.stringify({ version, unit, name, date, ...made, overruled, rules, entries }),
     );
     return true;
   } catch {
@@ -84,9 +86,10 @@ function fromKept(kept: unknown): TableState | undefined {
     unit,
     name: typeof kept['name'] === 'string' ? kept['name'].slice(0, 60) : '',
     date: typeof kept['date'] === 'string' ? kept['date'] : undefined,
-    topLine: topLineShapes.find((each) => each === kept['topLine']) ?? emptyTable.topLine,
-    shaping: kept['shaping'] === 'darts' ? 'darts' : 'princess',
-    preset: kept['preset'] === 'quarterRule' ? 'quarterRule' : 'balanced',
+    ...choicesFrom((choice) => kept[choice]),
+    overruled: readOverruled(kept['overruled']) ?? [],
+    // Tables kept before house rules could be typed name a preset.
+    rules: readRules(kept['rules']) ?? (kept['preset'] === 'quarterRule' ? quarterRule : balanced),
     entries: Object.fromEntries(
       fieldKeys.flatMap((field) => keptEntry(field, entries[field], unit)),
     ),

@@ -1,26 +1,34 @@
-import { coreMeasures, furtherMeasures, type MeasureCard } from '#shared/body/card.ts';
-import type { HouseRules } from '#shared/drafting/house-rules.ts';
+import {
+  coreMeasures,
+  furtherMeasures,
+  type MeasureCard,
+  type Overruled,
+} from '#shared/body/card.ts';
+import { houseRuleFigures } from '#shared/drafting/house-rule-figures.ts';
 import { houseRulePresets, type HouseRulePreset } from '#shared/drafting/house-rule-presets.ts';
+import { intakePlaces, type HouseRules, type IntakePlace } from '#shared/drafting/house-rules.ts';
 import {
   easeLevels,
+  styleChoices,
   styleLengths,
   type StyleCard,
-  type TopLineShape,
 } from '#shared/drafts/gown/style-card.ts';
 
-import { valueOf, type Entries, type FieldKey } from './fields.ts';
+import { ruleFields, valueOf, type Entries, type FieldKey } from './fields.ts';
+import { applies, styleChoiceKeys, type MadeChoices } from './style-choices.ts';
 
 const measures = [...coreMeasures, ...furtherMeasures];
 
 /** The card as far as it has been filled in. */
 export type PartCard = Partial<MeasureCard>;
 
-export type Choices = {
+export type Choices = MadeChoices & {
   readonly name: string;
   readonly date?: string | undefined;
-  readonly topLine: TopLineShape;
-  readonly shaping: 'princess' | 'darts';
-  readonly preset: HouseRulePreset;
+  /** Warnings about the card that the maker keeps, each with her reason. */
+  readonly overruled: readonly Overruled[];
+  /** The house rules the table was begun with; figures typed over them stand in the entries. */
+  readonly rules: HouseRules;
   readonly entries: Entries;
 };
 
@@ -33,16 +41,13 @@ export function cardOf(choices: Choices): PartCard {
   return {
     ...(choices.name.trim() === '' ? {} : { name: choices.name.trim() }),
     ...(choices.date === undefined ? {} : { date: choices.date }),
+    ...(choices.overruled.length === 0 ? {} : { overruled: choices.overruled }),
     ...Object.fromEntries(taken),
   };
 }
 
-/**
- * Whether a figure has a meaning beside the choices made: a straight top line has neither dip nor peak.
- * One that has none stays as it was typed until it has one again.
- */
-export const applies = (field: FieldKey, { topLine }: Pick<Choices, 'topLine'>): boolean =>
-  topLine !== 'straight' || (field !== 'style.neckDepth' && field !== 'style.neckWidth');
+/** These stood in every style card from the first gown on; the others only where they are not the first of their kind. */
+const written: ReadonlySet<string> = new Set(['topLine', 'shaping']);
 
 /** The style card standing in the fields; what is left empty takes the draft's default. */
 export function styleOf(choices: Choices): StyleCard {
@@ -55,15 +60,45 @@ export function styleOf(choices: Choices): StyleCard {
     const value = valueOf(choices.entries[`style.ease.${level}`]);
     return value === undefined ? [] : [[level, value] as const];
   });
+  const made = styleChoiceKeys.flatMap((choice) =>
+    written.has(choice) || choices[choice] !== styleChoices[choice][0]
+      ? [[choice, choices[choice]] as const]
+      : [],
+  );
   return {
     ...Object.fromEntries(lengths),
-    topLine: choices.topLine,
-    shaping: choices.shaping,
+    ...Object.fromEntries(made),
     ...(ease.length === 0 ? {} : { ease: Object.fromEntries(ease) }),
   };
 }
 
-export const rulesOf = (choices: Choices): HouseRules => houseRulePresets[choices.preset];
+/** The house rules with the figures typed over them. */
+export function rulesOf({ rules, entries }: Pick<Choices, 'rules' | 'entries'>): HouseRules {
+  const typed = houseRuleFigures.reduce((now, { key, put }) => {
+    const value = valueOf(entries[`rules.${key}`]);
+    return value === undefined ? now : put(now, value);
+  }, rules);
+  if (typed.intakes === undefined) return typed;
+  return intakePlaces.reduce((now, place) => {
+    const value = valueOf(entries[`rules.intakes.${place}`]);
+    return value === undefined ? now : withIntake(now, place, value);
+  }, typed);
+}
+
+const withIntake = (rules: HouseRules, place: IntakePlace, value: number): HouseRules =>
+  rules.intakes === undefined ? rules : { ...rules, intakes: { ...rules.intakes, [place]: value } };
+
+/** The entries without the figures of the house rules. */
+export const withoutRules = (entries: Entries): Entries =>
+  Object.fromEntries(
+    Object.entries(entries).filter(([key]) => !ruleFields.some((rule) => rule === key)),
+  );
+
+/** All of the table that is kept, part by part: where none of them is another there is nothing to keep. */
+export const workOf = (choices: Choices): readonly unknown[] => [
+  ...styleChoiceKeys.map((choice) => choices[choice]),
+  ...[choices.name, choices.date, choices.overruled, choices.rules, choices.entries],
+];
 
 export const hasCoreMeasures = (card: PartCard): card is MeasureCard =>
   coreMeasures.every((key) => card[key] !== undefined);
@@ -89,6 +124,12 @@ export function givenFor(
   return level === undefined ? undefined : style.ease?.[level];
 }
 
-/** The preset a gown's rules came from; rules of a workroom's own are not yet kept here. */
-export const presetOf = ({ balance }: HouseRules): HouseRulePreset =>
-  Object.values(balance).every((each) => each === 0) ? 'quarterRule' : 'balanced';
+/** The preset the rules are, figure for figure; rules of a workroom's own are none. */
+export const presetOf = (rules: HouseRules): HouseRulePreset | undefined =>
+  presets.find((preset) => {
+    const its = houseRulePresets[preset];
+    const words = rules.intakes === undefined && rules.armholeAt === its.armholeAt;
+    return words && houseRuleFigures.every(({ value }) => value(rules) === value(its));
+  });
+
+const presets: readonly HouseRulePreset[] = ['balanced', 'quarterRule'];

@@ -1,3 +1,6 @@
+import type { Overruled } from '#shared/body/card.ts';
+import { balanced } from '#shared/drafting/house-rule-presets.ts';
+import type { HouseRules } from '#shared/drafting/house-rules.ts';
 import type { EdgeRef } from '#shared/drafting/piece.ts';
 import type { Unit } from '#shared/units/said.ts';
 
@@ -10,7 +13,9 @@ import {
   type Entries,
   type FieldKey,
 } from './fields.ts';
-import { givenFor, presetOf, type Choices, type LaidGown } from './table-inputs.ts';
+import { withParts, type Parts } from './parts.ts';
+import { choicesFrom, type MadeChoices } from './style-choices.ts';
+import { givenFor, withoutRules, type Choices, type LaidGown } from './table-inputs.ts';
 
 export type Panel = 'measures' | 'style' | 'steps' | 'proof' | 'pieces';
 
@@ -23,15 +28,17 @@ export type TableState = Choices & {
   readonly drawn: Drawn;
 };
 
-/** A choice that is not a figure. */
-type Choice = Partial<Pick<Choices, 'topLine' | 'shaping' | 'preset'>>;
-
 export type TableAction =
   | { readonly type: 'typed'; readonly field: FieldKey; readonly text: string }
   | { readonly type: 'settled'; readonly field: FieldKey }
   | { readonly type: 'moved'; readonly field: FieldKey; readonly value: number }
   | { readonly type: 'named'; readonly name: string }
-  | { readonly type: 'chosen'; readonly choice: Choice }
+  | { readonly type: 'chosen'; readonly choice: Partial<MadeChoices> }
+  /** Other house rules: what was typed over the ones before goes with them. */
+  | { readonly type: 'ruled'; readonly rules: HouseRules }
+  | { readonly type: 'overruled'; readonly overruled: readonly Overruled[] }
+  /** Several parts at once, such as a way out of a combination that cannot be drawn. */
+  | { readonly type: 'put'; readonly parts: Parts }
   | { readonly type: 'unit'; readonly unit: Unit }
   | { readonly type: 'gown laid'; readonly gown: LaidGown }
   | { readonly type: 'cleared' }
@@ -42,9 +49,9 @@ export type TableAction =
 export const emptyTable: TableState = {
   unit: 'cm',
   name: '',
-  topLine: 'sweetheart',
-  shaping: 'princess',
-  preset: 'balanced',
+  ...choicesFrom(() => undefined),
+  overruled: [],
+  rules: balanced,
   entries: {},
   panel: 'measures',
   drawn: nothingDrawn,
@@ -72,6 +79,12 @@ export function tableState(state: TableState, action: TableAction): TableState {
       return redrawn({ ...state, name: action.name });
     case 'chosen':
       return redrawn({ ...state, ...action.choice });
+    case 'ruled':
+      return redrawn({ ...state, rules: action.rules, entries: withoutRules(state.entries) });
+    case 'overruled':
+      return redrawn({ ...state, overruled: action.overruled });
+    case 'put':
+      return redrawn({ ...state, ...withParts(state, action.parts, state.unit) });
     case 'unit':
       return { ...state, unit: action.unit, entries: inUnit(state.entries, action.unit) };
     case 'gown laid':
@@ -120,8 +133,8 @@ function withGown({ unit }: TableState, { card, style, rules }: LaidGown): Table
     entries,
     name: card.name ?? '',
     date: card.date,
-    topLine: style.topLine ?? emptyTable.topLine,
-    shaping: style.shaping ?? emptyTable.shaping,
-    preset: presetOf(rules),
+    overruled: card.overruled ?? [],
+    rules,
+    ...choicesFrom((choice) => style[choice]),
   };
 }

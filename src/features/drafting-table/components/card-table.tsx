@@ -36,7 +36,7 @@ export const CardTable = ({ cardId, card, place, signIn }: CardTableProps) => {
   const [signing, setSigning] = useState(false);
   useUndoKeys(dispatch);
   const { table, history } = state;
-  const { name, date, entries, unit } = table;
+  const { name, date, overruled, entries, unit } = table;
   const { saver, saving, kept } = useSaver<CardContent, KeptCard>({
     ...start,
     engine: '',
@@ -46,7 +46,7 @@ export const CardTable = ({ cardId, card, place, signIn }: CardTableProps) => {
     same: (a, b) => sameCard(table, a, b),
     place,
     history: closed(history),
-    work: [name, date, entries, unit],
+    work: [name, date, overruled, entries, unit],
   });
   const { standing, message, current } = saving;
   const takeTheirs = ({ version, content }: KeptCard) => {

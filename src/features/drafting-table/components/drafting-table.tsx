@@ -92,7 +92,13 @@ export const DraftingTable = (props: DraftingTableProps) => {
         told === undefined ? (
           waiting
         ) : (
-          <StepsPanel draft={told} chosen={calm.step} unit={calm.unit} dispatch={dispatch} />
+          <StepsPanel
+            draft={told}
+            chosen={calm.step}
+            unit={calm.unit}
+            dispatch={dispatch}
+            replay={place === 'try' ? '/try/replay' : `/gowns/${place}/replay`}
+          />
         ),
     },
     {

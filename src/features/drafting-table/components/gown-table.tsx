@@ -19,6 +19,7 @@ import { emptyTable, redrawn } from '../table-state.ts';
 import { useSaver } from '../use-saver.ts';
 import { CardTools } from './card-tools.tsx';
 import { ConflictDialog } from './conflict-dialog.tsx';
+import { workOf } from '../table-inputs.ts';
 import { DraftingTable } from './drafting-table.tsx';
 import { GownTitle } from './gown-title.tsx';
 import { RevisionsSheet } from './revisions-sheet.tsx';
@@ -47,7 +48,7 @@ export const GownTable = ({ gownId, start: opening, place, signIn }: GownTablePr
   const [title, setTitle] = useState(start.title);
   const [open, setOpen] = useState<'revisions' | 'sign-in'>();
   const { table, history } = state;
-  const { name, date, topLine, shaping, preset, entries, unit } = table;
+  const { unit } = table;
   const { saver, saving, kept } = useSaver<GownContent, Gown>({
     ...start,
     engine: engineVersion,
@@ -58,7 +59,7 @@ export const GownTable = ({ gownId, start: opening, place, signIn }: GownTablePr
     place,
     title,
     history: closed(history),
-    work: [name, date, topLine, shaping, preset, entries, unit],
+    work: [unit, ...workOf(table)],
   });
 
   /** Lays what the server has on the table; what lay there stays one step back. */

@@ -1,4 +1,5 @@
 import { memo, type Dispatch } from 'react';
+import { Link } from 'react-router-dom';
 
 import type { Draft } from '#shared/engine/draft.ts';
 import type { Unit } from '#shared/units/said.ts';
@@ -11,6 +12,8 @@ type StepsPanelProps = {
   readonly chosen: string | undefined;
   readonly unit: Unit;
   readonly dispatch: Dispatch<TableAction>;
+  /** Address of this draft's replay. */
+  readonly replay: string;
 };
 
 /** How the draft came about, step by step; a chosen step shows what it drew. */
@@ -19,12 +22,22 @@ export const StepsPanel = memo(function StepsPanel({
   chosen,
   unit,
   dispatch,
+  replay,
 }: StepsPanelProps) {
   const parts = [...new Set(draft.steps.map((step) => step.part))];
   const choose = (id: string | undefined) => dispatch({ type: 'step', step: id });
   return (
     <section className="space-y-6">
       <h2 className="sr-only">Steps</h2>
+      <p className="flex items-center justify-between gap-3">
+        <span className="text-sm text-slate">Step by step, with every number’s measure.</span>
+        <Link
+          to={chosen === undefined ? replay : `${replay}?step=${encodeURIComponent(chosen)}`}
+          className="inline-flex min-h-9 items-center rounded-one border border-rule bg-paper px-3 font-semibold"
+        >
+          Replay
+        </Link>
+      </p>
       {parts.map((part) => (
         <div key={part}>
           <h3 className="heading">{part}</h3>

@@ -1,44 +1,89 @@
 import { memo, type Dispatch } from 'react';
 
-import { easeLevels, type StyleLength } from '#shared/drafts/gown/style-card.ts';
+import { easeLevels, type StyleChoice, type StyleLength } from '#shared/drafts/gown/style-card.ts';
 import { styleHints, styleLabels } from '#shared/drafts/gown/style-labels.ts';
 
-import { Segmented } from '../../../ui/segmented.tsx';
-import { applies } from '../table-inputs.ts';
+import { messageFor } from '../problem-words.ts';
+import { applies } from '../style-choices.ts';
 import type { TableAction, TableState } from '../table-state.ts';
+import { ChoiceField } from './choice-field.tsx';
 import { FigureField, fieldProps } from './figure-field.tsx';
-import { TopLineChoice } from './top-line-choice.tsx';
+import { FlareFraction } from './flare-fraction.tsx';
+import { HouseRulesPanel } from './house-rules-panel.tsx';
 
 type StyleCardProps = {
   readonly state: TableState;
   readonly dispatch: Dispatch<TableAction>;
 };
 
-const topKeys = ['topDrop', 'neckDepth', 'neckWidth', 'sideDepth', 'backDepth'] as const;
-const middleKeys = ['dartLength', 'kneeLevel', 'kneeFinished'] as const;
-const flareKeys = ['flareLength', 'floorClearance', 'heelHeight', 'clothWidth'] as const;
+type Item = { readonly choice: StyleChoice } | { readonly figure: StyleLength };
 
-const circles = [
-  { value: 0.25, label: 'quarter circle' },
-  { value: 0.5, label: 'half circle' },
-  { value: 0.75, label: 'three quarters' },
-  { value: 1, label: 'full circle' },
-] as const;
+const choice = (each: StyleChoice): Item => ({ choice: each });
+const figures = (...keys: readonly StyleLength[]): readonly Item[] =>
+  keys.map((figure) => ({ figure }));
+
+/** The card from the top of the gown down; every choice stands before the figures it brings with it. */
+const parts: readonly { readonly title: string; readonly items: readonly Item[] }[] = [
+  {
+    title: 'Top',
+    items: [
+      choice('topLine'),
+      ...figures('topDrop', 'neckDepth', 'neckWidth', 'sideDepth', 'backDepth'),
+      choice('sleeve'),
+      ...figures('bandHeight', 'pleatRatio', 'armEase'),
+      choice('shaping'),
+      choice('waistSeam'),
+      ...figures('waistSeamRise'),
+    ],
+  },
+  {
+    title: 'Skirt',
+    items: [
+      ...figures('dartLength', 'kneeLevel', 'kneeFinished'),
+      choice('flare'),
+      ...figures('flareFraction', 'hemSweep', 'flareLength', 'floorClearance', 'heelHeight'),
+      ...figures('train'),
+    ],
+  },
+  {
+    title: 'Closing and inside',
+    items: [choice('closure'), choice('facing'), choice('lining'), choice('boning')],
+  },
+  { title: 'Cloth', items: [choice('cloth'), ...figures('stretch', 'shrinkage', 'clothWidth')] },
+];
 
 /** What the gown shall be; a figure left open takes the default that stands there in grey. */
 export const StyleCard = memo(function StyleCard({ state, dispatch }: StyleCardProps) {
   const style = state.drawn.draft?.style;
-  const row = (key: StyleLength) => (
-    <FigureField
-      key={key}
-      {...fieldProps(`style.${key}`, state)}
-      label={styleLabels[key]}
-      hint={styleHints[key]}
-      open={style?.[key]}
-      dispatch={dispatch}
-    />
-  );
-  const flare = state.entries['style.flareFraction']?.text ?? '0.5';
+  const figure = (key: StyleLength) =>
+    key === 'flareFraction' ? (
+      <FlareFraction
+        key={key}
+        text={state.entries['style.flareFraction']?.text}
+        dispatch={dispatch}
+      />
+    ) : (
+      <FigureField
+        key={key}
+        {...fieldProps(`style.${key}`, state)}
+        label={styleLabels[key]}
+        hint={styleHints[key]}
+        open={style?.[key]}
+        dispatch={dispatch}
+      />
+    );
+  const item = (each: Item) => {
+    if ('figure' in each) return applies(`style.${each.figure}`, state) && figure(each.figure);
+    return (
+      <ChoiceField
+        key={each.choice}
+        choice={each.choice}
+        value={state[each.choice]}
+        fault={messageFor(`style.${each.choice}`, state.drawn.problems, state)}
+        dispatch={dispatch}
+      />
+    );
+  };
   return (
     <section aria-labelledby="style-card">
       <h2 id="style-card" className="heading">
@@ -46,46 +91,13 @@ export const StyleCard = memo(function StyleCard({ state, dispatch }: StyleCardP
       </h2>
       <p className="pt-1 text-sm text-slate">Grey figures are the defaults for this body.</p>
       <form onSubmit={(event) => event.preventDefault()}>
-        <TopLineChoice
-          value={state.topLine}
-          onChoose={(topLine) => dispatch({ type: 'chosen', choice: { topLine } })}
-        />
-        <div className="flex items-center justify-between gap-3 border-b border-rule py-1">
-          <span>Shaping</span>
-          <Segmented
-            legend="Shaping"
-            choices={[
-              { value: 'princess', label: 'princess' },
-              { value: 'darts', label: 'darts' },
-            ]}
-            value={state.shaping}
-            onChoose={(shaping) => dispatch({ type: 'chosen', choice: { shaping } })}
-          />
-        </div>
-        {topKeys.filter((key) => applies(`style.${key}`, state)).map(row)}
-        {middleKeys.map(row)}
-        <label className="flex items-center justify-between gap-3 border-b border-rule py-1">
-          <span>{styleLabels.flareFraction}</span>
-          <select
-            name="style.flareFraction"
-            className="h-9 rounded-one border border-rule bg-paper px-2"
-            value={flare}
-            onChange={(event) =>
-              dispatch({
-                type: 'typed',
-                field: 'style.flareFraction',
-                text: event.currentTarget.value,
-              })
-            }
-          >
-            {circles.map(({ value, label }) => (
-              <option key={value} value={String(value)}>
-                {label}
-              </option>
-            ))}
-          </select>
-        </label>
-        {flareKeys.map(row)}
+        {parts.map(({ title, items }) => (
+          <div key={title} className="pt-3">
+            <h3 className="font-semibold">{title}</h3>
+            {items.map(item)}
+          </div>
+        ))}
+        <h3 className="pt-4 font-semibold">Ease</h3>
         {easeLevels.map((level) => (
           <FigureField
             key={level}
@@ -96,21 +108,8 @@ export const StyleCard = memo(function StyleCard({ state, dispatch }: StyleCardP
             dispatch={dispatch}
           />
         ))}
+        <HouseRulesPanel state={state} dispatch={dispatch} />
       </form>
-      <h3 className="pt-4 font-semibold">House rule for the side seam</h3>
-      <p className="py-1 text-sm text-slate">
-        Balanced gives the front a little more than a quarter at the bust; the quarter rule makes
-        front and back alike.
-      </p>
-      <Segmented
-        legend="House rule for the side seam"
-        choices={[
-          { value: 'balanced', label: 'balanced' },
-          { value: 'quarterRule', label: 'quarter rule' },
-        ]}
-        value={state.preset}
-        onChoose={(preset) => dispatch({ type: 'chosen', choice: { preset } })}
-      />
     </section>
   );
 });

@@ -19,6 +19,7 @@ import {
 } from '../saved-table.ts';
 import { triedGown } from '../tried-gown.ts';
 import { useKeeping } from '../use-keeping.ts';
+import { workOf } from '../table-inputs.ts';
 import { DraftingTable } from './drafting-table.tsx';
 
 /** The drafting table without an account: kept in this browser alone until somebody takes it along. */
@@ -30,13 +31,12 @@ export const TryTable = () => {
   const [kept, setKept] = useState(true);
   const taken = useRef(false);
   const { table, history } = state;
-  const { unit, name, date, topLine, shaping, preset, entries } = table;
   const keep = () => {
     if (taken.current) return;
     setKept(keepTable(table));
     keepTableHistory(history);
   };
-  useKeeping(keep, [unit, name, date, topLine, shaping, preset, entries, history]);
+  useKeeping(keep, [table.unit, ...workOf(table), history]);
   return (
     <DraftingTable
       bench={state}

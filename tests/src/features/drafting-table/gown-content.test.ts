@@ -2,6 +2,8 @@ import { describe, expect, it } from 'vitest';
 
 import { gownContent } from '#shared/api/gowns.ts';
 import { coreMeasures } from '#shared/body/card.ts';
+import { balanced } from '#shared/drafting/house-rule-presets.ts';
+import type { HouseRules } from '#shared/drafting/house-rules.ts';
 
 import {
   choicesIn,
@@ -9,6 +11,7 @@ import {
   contentOf,
   sameWork,
 } from '../../../../src/features/drafting-table/gown-content.ts';
+import { presetOf } from '../../../../src/features/drafting-table/table-inputs.ts';
 import {
   emptyTable,
   tableState,
@@ -52,6 +55,49 @@ describe('a gown as it is kept', () => {
     expect(content.inputs.style).not.toHaveProperty('neckDepth');
     const { choices } = choicesOf(content);
     expect(choices.entries['style.neckDepth']).toMatchObject({ value: 230 });
+  });
+
+  it('keeps house rules of a workroom’s own, figure for figure', () => {
+    const own: HouseRules = {
+      ...balanced,
+      sideShare: 0.3,
+      intakes: { topLine: 38, underbust: 50, waistSeam: 50, waist: 25 },
+    };
+    const laid = tableState(emptyTable, {
+      type: 'gown laid',
+      gown: { card: middleBody, style: {}, rules: own },
+    });
+    const content = contentOf(laid, 'cm');
+    expect(content.inputs.rules).toEqual(own);
+    const { choices } = choicesOf(content);
+    expect(contentOf(choices, 'in').inputs.rules).toEqual(own);
+    expect(presetOf(own)).toBeUndefined();
+  });
+
+  it('tells what was typed over a preset from the preset, which stands again once it is emptied', () => {
+    const wide = tableState(table, { type: 'typed', field: 'rules.sideShare', text: '60' });
+    const content = contentOf(wide, 'cm');
+    expect(content.inputs.rules).toEqual({ ...balanced, sideShare: 0.6 });
+    const { choices } = choicesOf(content);
+    expect(choices.rules).toEqual(balanced);
+    const emptied = tableState(
+      { ...emptyTable, ...choices },
+      { type: 'typed', field: 'rules.sideShare', text: '' },
+    );
+    expect(contentOf(emptied, 'cm').inputs.rules).toEqual(balanced);
+  });
+
+  it('leaves out figures of choices not made, and finds them again with the choice', () => {
+    const banded = tableState(table, { type: 'chosen', choice: { sleeve: 'pleatedBand' } });
+    const deep = tableState(banded, { type: 'typed', field: 'style.bandHeight', text: '12' });
+    expect(contentOf(deep, 'cm').inputs.style).toMatchObject({
+      sleeve: 'pleatedBand',
+      bandHeight: 120,
+    });
+    const bare = tableState(deep, { type: 'chosen', choice: { sleeve: 'none' } });
+    expect(contentOf(bare, 'cm').inputs.style).not.toHaveProperty('bandHeight');
+    const back = tableState(bare, { type: 'chosen', choice: { sleeve: 'plainBand' } });
+    expect(contentOf(back, 'cm').inputs.style).toMatchObject({ bandHeight: 120 });
   });
 
   it('is the same work however its figures were written', () => {

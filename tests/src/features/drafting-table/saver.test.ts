@@ -26,6 +26,8 @@ const gownAs = (name: string, version: number): Gown => ({
   drawn: null,
   lastSave: { savedAt: '2026-11-14T09:30:00.000Z', device: 'Firefox on Linux', here: false },
   redrawing: null,
+  personId: null,
+  cardId: null,
 });
 
 beforeEach(() => vi.useFakeTimers());

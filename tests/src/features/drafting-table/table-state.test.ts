@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 
 import { coreMeasures } from '#shared/body/card.ts';
+import { quarterRule } from '#shared/drafting/house-rule-presets.ts';
 
 import { keepTable, keptTable } from '../../../../src/features/drafting-table/saved-table.ts';
 import {
@@ -97,11 +98,11 @@ describe('the table kept in the browser', () => {
       field: 'style.heelHeight',
       text: 'high',
     });
-    const even = tableState(odd, { type: 'chosen', choice: { preset: 'quarterRule' } });
+    const even = tableState(odd, { type: 'ruled', rules: quarterRule });
     expect(keepTable(even, storage)).toBe(true);
     const back = keptTable('cm', storage);
     expect(back.unit).toBe('in');
-    expect(back.preset).toBe('quarterRule');
+    expect(back.rules).toEqual(quarterRule);
     expect(back.entries['style.heelHeight']?.text).toBe('high');
     const mended = tableState(back, { type: 'typed', field: 'style.heelHeight', text: '2' });
     expect(mended.drawn.draft?.number).toBe(
