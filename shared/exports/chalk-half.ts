@@ -23,7 +23,7 @@ type DrawnHalf = {
 };
 
 /** A path with each of its points, handles too, put on the page. */
-const pathOnPage = (path: Path, onPage: OnPage): Path =>
+export const pathOnPage = (path: Path, onPage: OnPage): Path =>
   path.map((each) =>
     each.kind === 'line'
       ? line(onPage(each.from), onPage(each.to))

@@ -22,7 +22,7 @@ export const typeWidth = (text: string, size: number): number =>
 export function wrap(text: string, size: number, width: number): readonly string[] {
   const lines: string[] = [];
   let current = '';
-  for (const word of text.split(/\s+/u).filter((each) => each !== '')) {
+  for (const word of text.split(/[ \t\n]+/u).filter((each) => each !== '')) {
     const longer = current === '' ? word : `${current} ${word}`;
     if (typeWidth(longer, size) <= width) {
       current = longer;

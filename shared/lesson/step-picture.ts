@@ -64,7 +64,9 @@ function roomy({ x, y, width, height }: Box): Box {
 
 /** Where a step is looked at: what it drew; a level with the point everything hangs from. */
 const nearOf = (step: Step, cut: readonly CutPiece[], whole: Box): Box => {
-  const now = cut.filter((each) => each.now).flatMap(({ piece }) => flatten(piece.cutLine, coarse));
+  const now = cut
+    .filter((each) => each.now)
+    .flatMap(({ piece }) => piece.edges.flatMap(({ path }) => flatten(path, coarse)));
   const seen = [...pointsOf(step), ...now];
   if (seen.length === 0) return roomy(whole);
   return roomy(boxOf(step.side === 'both' ? [point(0, 0), ...seen] : seen));

@@ -1,6 +1,7 @@
 import { answerOrders } from '../../http/thread-work.ts';
 import type { PrintTask } from './print-task.ts';
 import { chalkSheetOf, piecesOf, sheetsOf, sheetsSvgOf, tilesOf } from './service.ts';
+import { worksheetOf } from './worksheet-pdf.ts';
 
 answerOrders((posted) => {
   const task = taskIn(posted);
@@ -15,6 +16,8 @@ answerOrders((posted) => {
       return sheetsOf(task.wanted);
     case 'sheets-svg':
       return sheetsSvgOf(task.wanted);
+    case 'worksheet':
+      return worksheetOf(task.wanted);
   }
 });
 

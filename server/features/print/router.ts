@@ -8,6 +8,7 @@ import {
   printTiles,
 } from '#shared/api/drafts.ts';
 import type { PrintRequest, SheetsRequest } from '#shared/api/requests.ts';
+import { printWorksheet } from '#shared/api/worksheet.ts';
 import { paperOf } from '#shared/sheets/papers.ts';
 import { addressLimit } from '../../http/address-limit.ts';
 import { attachment, fileName } from '../../http/file-name.ts';
@@ -58,6 +59,13 @@ export function printRouter(limits: Limits, printer: Printer): Router {
   );
   serve(router, printSheetsSvg, (wanted, asked) =>
     download({ what: 'sheets-svg', wanted }, asked, sheetsNamed(wanted, 'svg')),
+  );
+  serve(router, printWorksheet, (wanted, asked) =>
+    download(
+      { what: 'worksheet', wanted },
+      asked,
+      fileName([wanted.inputs.card.name, 'worksheet', wanted.paper], 'pdf'),
+    ),
   );
   return router;
 }
