@@ -28,6 +28,20 @@ const router = createBrowserRouter([
         lazy: async () => ({ Component: (await import('./try-print-place.tsx')).TryPrintPlace }),
       },
       {
+        path: paths.tableReplay,
+        lazy: async () => ({ Component: (await import('./try-replay-place.tsx')).TryReplayPlace }),
+      },
+      {
+        path: paths.gownReplay,
+        lazy: async () => ({
+          Component: (await import('./gown-replay-place.tsx')).GownReplayPlace,
+        }),
+      },
+      {
+        path: paths.class,
+        lazy: async () => ({ Component: (await import('./class-place.tsx')).ClassPlace }),
+      },
+      {
         path: paths.gownPrint,
         lazy: async () => ({ Component: (await import('./gown-print-place.tsx')).GownPrintPlace }),
       },
@@ -64,6 +78,13 @@ const router = createBrowserRouter([
                 lazy: async () => ({
                   Component: (await import('../features/gowns/routes/measure-cards-page.tsx'))
                     .MeasureCardsPage,
+                }),
+              },
+              {
+                path: paths.classes,
+                lazy: async () => ({
+                  Component: (await import('../features/replay/routes/classes-page.tsx'))
+                    .ClassesPage,
                 }),
               },
               {

@@ -19,6 +19,11 @@ export const PlaceHeader = ({ signedIn }: { signedIn: boolean }) => (
           Gowns
         </NavLink>
       )}
+      {signedIn && (
+        <NavLink to={paths.classes} className={place}>
+          Classes
+        </NavLink>
+      )}
     </nav>
     <div className="ml-auto flex items-center gap-3">
       {signedIn ? (
