@@ -51,7 +51,14 @@ export type Window = {
   readonly marks: readonly Mark[];
 };
 
-export type Mark = Strokes | Area | Words | Use | Window;
+/** What belongs to a layer that a viewer can show and hide. */
+export type Layered = {
+  readonly kind: 'layer';
+  readonly layer: string;
+  readonly marks: readonly Mark[];
+};
+
+export type Mark = Strokes | Area | Words | Use | Window | Layered;
 
 /** A drawing that several pages use: written into the file once. */
 export type Drawing = { readonly name: string; readonly marks: readonly Mark[] };
@@ -63,5 +70,7 @@ export type PrintJob = {
   readonly date?: string;
   readonly paper: { readonly width: number; readonly height: number };
   readonly drawings: readonly Drawing[];
+  /** Names of the layers, in the order a viewer lists them; absent where there are none. */
+  readonly layers?: readonly string[];
   readonly pages: readonly (readonly Mark[])[];
 };

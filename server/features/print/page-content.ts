@@ -48,6 +48,7 @@ export function contentOf(
   marks: readonly Mark[],
   fonts: Fonts,
   names: ReadonlyMap<string, string>,
+  layers: ReadonlyMap<string, string> = new Map(),
 ): string {
   // A form starts in whatever state its page is in, so the first mark always says its own.
   let pen: Pen | undefined;
@@ -113,6 +114,11 @@ export function contentOf(
         return apart(
           () => `${f(cos)} ${f(sin)} ${f(-sin)} ${f(cos)} ${n(dx)} ${n(dy)} cm /${name} Do\n`,
         );
+      }
+      case 'layer': {
+        const layer = layers.get(mark.layer);
+        if (layer === undefined) throw new Error(`No layer is called ${mark.layer}.`);
+        return `/OC /${layer} BDC\n${apart(() => mark.marks.map(write).join(''))}EMC\n`;
       }
       case 'window': {
         const { x, y, width, height } = mark.box;

@@ -61,11 +61,21 @@ function reachOf(marks: readonly Mark[]): readonly number[] {
   return [left - 80, top - 80, right + 80, bottom + 80].map(Math.round);
 }
 
-function form(context: PDFContext, drawing: Drawing, fonts: Fonts, lettering: PDFRef): PDFRef {
-  return stream(context, contentOf(drawing.marks, fonts, new Map()), {
+/** Marks of layers beside all others. */
+const unlayered = (marks: readonly Mark[]): readonly Mark[] =>
+  marks.flatMap((mark) => (mark.kind === 'layer' ? unlayered(mark.marks) : [mark]));
+
+function form(
+  context: PDFContext,
+  drawing: Drawing,
+  fonts: Fonts,
+  lettering: PDFRef,
+  layers: ReadonlyMap<string, string>,
+): PDFRef {
+  return stream(context, contentOf(drawing.marks, fonts, new Map(), layers), {
     Type: 'XObject',
     Subtype: 'Form',
-    BBox: [...reachOf(drawing.marks)],
+    BBox: [...reachOf(unlayered(drawing.marks))],
     Resources: lettering,
   });
 }
@@ -89,9 +99,21 @@ export async function pdfBytes(job: PrintJob): Promise<Uint8Array> {
   const pageResources = context.nextRef();
   const tree = context.nextRef();
 
+  const layers = (job.layers ?? []).map((name, i) => ({
+    name,
+    key: `L${i}`,
+    group: context.register(context.obj({ Type: 'OCG', Name: PDFHexString.fromText(name) })),
+  }));
+  const keys = new Map(layers.map(({ name, key }) => [name, key]));
+  const properties =
+    layers.length === 0
+      ? {}
+      : { Properties: Object.fromEntries(layers.map(({ key, group }) => [key, group])) };
+  const groups = layers.map(({ group }) => group);
+
   const names = new Map(job.drawings.map((each, i) => [each.name, `D${i}`]));
   const forms = Object.fromEntries(
-    job.drawings.map((each, i) => [`D${i}`, form(context, each, fonts, lettering)]),
+    job.drawings.map((each, i) => [`D${i}`, form(context, each, fonts, lettering, keys)]),
   );
   const k = exact(toPoints(1));
   const height = exact(toPoints(job.paper.height));
@@ -102,14 +124,14 @@ export async function pdfBytes(job: PrintJob): Promise<Uint8Array> {
         Parent: tree,
         Contents: stream(
           context,
-          `${k} 0 0 -${k} 0 ${height} cm\n${contentOf(marks, fonts, names)}`,
+          `${k} 0 0 -${k} 0 ${height} cm\n${contentOf(marks, fonts, names, keys)}`,
         ),
       }),
     ),
   );
   const named = { R: await fonts.regular.embed(context), H: await fonts.heavy.embed(context) };
-  context.assign(lettering, context.obj({ Font: named }));
-  context.assign(pageResources, context.obj({ Font: named, XObject: forms }));
+  context.assign(lettering, context.obj({ Font: named, ...properties }));
+  context.assign(pageResources, context.obj({ Font: named, XObject: forms, ...properties }));
   context.assign(
     tree,
     context.obj({
@@ -126,6 +148,9 @@ export async function pdfBytes(job: PrintJob): Promise<Uint8Array> {
       Pages: tree,
       Lang: PDFString.of('en-GB'),
       ViewerPreferences: { PrintScaling: 'None', DisplayDocTitle: true },
+      ...(groups.length === 0
+        ? {}
+        : { OCProperties: { OCGs: groups, D: { Order: groups, ON: groups } } }),
     }),
   );
   context.trailerInfo.Info = context.register(
