@@ -35,7 +35,7 @@ export const PlanCount = ({ planning, leftOut, unit, onCancel, onAgain }: PlanCo
     );
   }
   return (
-    <div role="status" className="figures leading-snug">
+    <div role="status" className="figures min-w-0 leading-snug">
       {planning.kind === 'planned' && <Counted plan={planning.plan} leftOut={leftOut} />}
       {planning.kind === 'waiting' && (
         <p className="text-madder">Nothing to arrange yet: mend what is marked.</p>

@@ -83,7 +83,6 @@ export const PlanDrawing = memo(function PlanDrawing(props: PlanDrawingProps) {
           y={at.y * scale + letters}
           fontSize={letters}
           className="halo fill-slate"
-          textDecoration={leftOut.includes(name) ? 'line-through' : undefined}
         >
           {name}
         </text>

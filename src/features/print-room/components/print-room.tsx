@@ -9,13 +9,14 @@ import { keepChoices, keptChoices } from '../kept-choices.ts';
 import { orderOf } from '../order-of.ts';
 import { roomChoices } from '../room-choices.ts';
 import { planKey, usePlan } from '../use-plan.ts';
+import { useSheetsFiles } from '../use-sheets-files.ts';
 import { BeforeCutting } from './before-cutting.tsx';
 import { LinesCard } from './lines-card.tsx';
 import { PagePlan } from './page-plan.tsx';
 import { PaperCard } from './paper-card.tsx';
 import { PiecesCard } from './pieces-card.tsx';
 import { PlanCount } from './plan-count.tsx';
-import { PrintBar } from './print-bar.tsx';
+import { FileStates, PrintBar } from './print-bar.tsx';
 import { RoomHeader } from './room-header.tsx';
 
 /** What is brought from a table to be printed. */
@@ -52,6 +53,7 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
   const planned = planning.kind === 'planned' && planning.key === key;
   const everyOut = planned && leftOut.length >= planning.plan.plan.tiles.length;
   const { unit } = room;
+  const files = useSheetsFiles(draft, unit);
 
   const cards: readonly Tab<CardName>[] = [
     {
@@ -72,32 +74,32 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
 
   const plan = (
     <div id="content" className="flex min-h-0 min-w-0 grow flex-col">
-      <div className="flex shrink-0 flex-wrap items-start gap-x-4 gap-y-2 px-3 py-2 sm:px-4">
-        <PlanCount
-          planning={planning}
-          leftOut={leftOut}
-          unit={unit}
-          onCancel={cancel}
-          onAgain={again}
-        />
-        <PrintBar
-          draft={draft}
-          unit={unit}
-          order={planned && order && !everyOut ? { ...order, leftOut } : undefined}
-        />
+      <div className="shrink-0 px-3 py-2 sm:px-4">
+        <div className="flex items-start gap-x-3">
+          <PlanCount
+            planning={planning}
+            leftOut={leftOut}
+            unit={unit}
+            onCancel={cancel}
+            onAgain={again}
+          />
+          <PrintBar
+            files={files}
+            order={planned && order && !everyOut ? { ...order, leftOut } : undefined}
+          />
+        </div>
+        <FileStates files={files} unit={unit} />
         {!fresh && (
-          <p className="basis-full text-madder">
+          <p className="text-madder">
             The figures on the table cannot be drawn: this prints the last good draft.
           </p>
         )}
         {!proof.holds && (
-          <p className="basis-full font-semibold text-madder">
+          <p className="font-semibold text-madder">
             These pieces do not yet sew together: see Proof at the table before you cut.
           </p>
         )}
-        {everyOut && (
-          <p className="basis-full text-madder">Every sheet is left out: take one back.</p>
-        )}
+        {everyOut && <p className="text-madder">Every sheet is left out: take one back.</p>}
       </div>
       {last === undefined ? (
         <div className="grow bg-cloth" />
@@ -112,7 +114,7 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
         />
       )}
       <p className="shrink-0 px-3 py-1 text-sm text-slate sm:px-4">
-        Click a sheet to leave it out, again to take it back. Numbers are those of the pieces.
+        Click a sheet to leave it out or take it back.
       </p>
     </div>
   );
@@ -136,7 +138,7 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
       ) : (
         <main className="flex min-h-0 grow flex-col sm:landscape:flex-row">
           {plan}
-          <div className="h-[38dvh] shrink-0 border-t border-rule bg-cloth px-3 pt-2 sm:landscape:h-auto sm:landscape:w-[22rem] sm:landscape:border-t-0 sm:landscape:border-l">
+          <div className="h-[40dvh] shrink-0 border-t border-rule bg-cloth px-3 pt-2 sm:landscape:h-auto sm:landscape:w-[22rem] sm:landscape:border-t-0 sm:landscape:border-l">
             <Tabs label="What is printed" tabs={cards} value={card} onChoose={setCard} />
           </div>
         </main>

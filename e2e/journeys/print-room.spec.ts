@@ -1,0 +1,269 @@
+import AxeBuilder from '@axe-core/playwright';
+import type { Download, Page } from '@playwright/test';
+import { readFile } from 'node:fs/promises';
+
+import { walkTo } from '../fixtures/keyboard.ts';
+import { expect, test } from '../fixtures/maker.ts';
+import { pagesOf } from '../fixtures/pdf.ts';
+import { printRoom } from '../screens/print-room.ts';
+
+const faults = async (page: Page) => (await new AxeBuilder({ page }).analyze()).violations;
+
+const sideways = (page: Page) =>
+  page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
+
+async function downloaded(page: Page, act: () => Promise<void>): Promise<Download> {
+  const saved = page.waitForEvent('download');
+  await act();
+  return saved;
+}
+
+for (const width of [390, 1280]) {
+  test.describe(`at ${width} px`, () => {
+    test.use({ viewport: { width, height: 844 }, hasTouch: width < 500 });
+
+    test('the table leads to the print room, and the PDF has as many pages as its plan', async ({
+      page,
+      drawnTable,
+    }) => {
+      const room = printRoom(page);
+      await drawnTable.print.click();
+      await drawnTable.dialog.getByRole('link', { name: 'Print room' }).click();
+      await expect(room.heading).toBeVisible();
+      await expect(room.count).toBeVisible();
+      const sheets = await room.sheets();
+      expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(sheets);
+      await expect(page.getByText(/saved as .*whole-gown-a4\.pdf/)).toBeVisible();
+
+      await room.paper.selectOption('A3');
+      await expect(room.count).toContainText('of A3');
+      expect(await room.sheets()).toBeLessThan(sheets);
+      expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(
+        await room.sheets(),
+      );
+    });
+
+    test('a sheet is left out and taken back where it lies', async ({ page, drawnTable }) => {
+      await expect(drawnTable.drawing).toBeVisible();
+      await page.goto('/try/print');
+      const room = printRoom(page);
+      await expect(room.count).toBeVisible();
+      const sheets = await room.sheets();
+      await room.sheet('A1').click();
+      await room.sheet('A2').click();
+      await expect(room.count).toContainText(`${sheets - 2} sheets`);
+      await expect(page.getByText('2 left out')).toBeVisible();
+      await room.sheet('A2').click();
+      expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(sheets - 1);
+      await room.paper.selectOption('Letter');
+      await expect(room.count).toContainText('of Letter');
+      await expect(page.getByText('left out', { exact: false }).first()).toBeHidden();
+    });
+
+    test('pieces are ticked, copied and drawn otherwise; the SVG has only those', async ({
+      page,
+      drawnTable,
+    }) => {
+      await expect(drawnTable.drawing).toBeVisible();
+      await page.goto('/try/print');
+      const room = printRoom(page);
+      await expect(room.count).toBeVisible();
+      const all = await room.sheets();
+      await room.showCard('Pieces');
+      await page.getByRole('button', { name: 'Bodice only' }).click();
+      await expect(room.piece('Front skirt')).not.toBeChecked();
+      await expect.poll(() => room.sheets()).toBeLessThan(all);
+      const toile = await room.sheets();
+      await page.getByLabel('Copies of Front top, side panel').selectOption('6');
+      await expect.poll(() => room.sheets()).toBeGreaterThan(toile);
+      await page.getByLabel('How Front top, centre panel is drawn').selectOption('opened out');
+      await expect(room.count).toBeVisible();
+      expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(
+        await room.sheets(),
+      );
+      const svg = await readFile(
+        await (await downloaded(page, () => room.makeSvg.click())).path(),
+        'utf8',
+      );
+      expect(svg).toContain('data-piece="front-top');
+      expect(svg).not.toContain('data-piece="front-middle"');
+    });
+
+    test('a figure that cannot be is told with its bounds, and nothing typed is lost', async ({
+      page,
+      drawnTable,
+    }) => {
+      await expect(drawnTable.drawing).toBeVisible();
+      await page.goto('/try/print');
+      const room = printRoom(page);
+      await expect(room.count).toBeVisible();
+      await room.field('margin').fill('9');
+      await room.field('margin').blur();
+      await expect(page.getByText('must lie between 0.5 cm and 2.5 cm')).toBeVisible();
+      await expect(room.field('margin')).toHaveValue('9.0');
+      await expect(room.makePdf).toBeDisabled();
+      await page.getByRole('radio', { name: 'inch' }).check();
+      await expect(page.getByText(/must lie between .* in and 1 in/)).toBeVisible();
+      await room.field('margin').fill('a thumb');
+      await room.field('margin').blur();
+      await expect(room.field('margin')).toHaveValue('a thumb');
+      await expect(room.field('margin')).toHaveAttribute('aria-invalid', 'true');
+      await room.field('margin').fill('1/2');
+      await room.paper.selectOption('custom');
+      await room.field('paper.width').fill('12 in');
+      await room.field('paper.height').fill('18 in');
+      await room.field('paper.height').blur();
+      await expect(room.count).toContainText('custom');
+
+      await page.route('**/api/prints/sheets', (route) => route.abort());
+      await room.makePdf.click();
+      await expect(page.getByText('The server cannot be reached')).toBeVisible();
+      await expect(room.field('paper.width')).toHaveValue('12');
+      await page.unroute('**/api/prints/sheets');
+      expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(
+        await room.sheets(),
+      );
+
+      await page.reload();
+      await expect(room.field('margin')).toHaveValue('1⁄2');
+      await expect(room.field('paper.height')).toHaveValue('18');
+      await expect(room.count).toContainText('custom');
+    });
+
+    test('arranging and writing show that they go on, and both can be called off', async ({
+      page,
+      drawnTable,
+    }) => {
+      await expect(drawnTable.drawing).toBeVisible();
+      await page.route('**/plan-worker*', async (route) => {
+        await new Promise((later) => setTimeout(later, 1500));
+        await route.continue();
+      });
+      await page.goto('/try/print');
+      const room = printRoom(page);
+      await expect(page.getByRole('progressbar', { name: 'Arranging the pieces' })).toBeVisible();
+      await expect(room.makePdf).toBeDisabled();
+      await room.cancel.click();
+      await expect(page.getByText('Arranging was called off')).toBeVisible();
+      await page.waitForTimeout(2000);
+      await expect(room.count).toBeHidden();
+      await page.unroute('**/plan-worker*');
+      await page.getByRole('button', { name: 'Arrange again' }).click();
+      await expect(room.count).toBeVisible();
+
+      await page.route('**/api/prints/sheets', async (route) => {
+        await new Promise((later) => setTimeout(later, 3000));
+        await route.continue().catch(() => undefined);
+      });
+      await room.makePdf.click();
+      await expect(page.getByRole('progressbar', { name: 'Writing: Sheets' })).toBeVisible();
+      await room.cancel.click();
+      await expect(page.getByText('Writing…')).toBeHidden();
+      await page.unroute('**/api/prints/sheets');
+      expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(
+        await room.sheets(),
+      );
+    });
+
+    test('the page plan can be read: names, numbers and room for a finger', async ({
+      page,
+      drawnTable,
+    }) => {
+      await expect(drawnTable.drawing).toBeVisible();
+      await page.goto('/try/print');
+      const room = printRoom(page);
+      await expect(room.count).toBeVisible();
+      const sheets = await room.sheets();
+      await expect(room.plan.getByRole('checkbox')).toHaveCount(sheets - 1);
+      const sizes = await room.plan
+        .getByRole('checkbox')
+        .evaluateAll((all) => all.map((each) => each.getBoundingClientRect().width));
+      expect(Math.min(...sizes)).toBeGreaterThanOrEqual(32);
+      const letters = await page
+        .locator('svg text.halo')
+        .evaluateAll((all) => all.map((each) => Number(each.getAttribute('font-size'))));
+      expect(letters.length).toBeGreaterThan(sheets);
+      expect(Math.min(...letters)).toBeGreaterThanOrEqual(11);
+    });
+  });
+}
+
+test('the same by keyboard alone: paper, a sheet left out, the PDF', async ({
+  page,
+  drawnTable,
+}) => {
+  await expect(drawnTable.drawing).toBeVisible();
+  await page.goto('/try/print');
+  const room = printRoom(page);
+  await expect(room.count).toBeVisible();
+  await walkTo(page, room.paper);
+  await page.keyboard.press('L');
+  await expect(room.count).toContainText('of Le');
+  const sheets = await room.sheets();
+  await walkTo(page, room.sheet('A1'));
+  await page.keyboard.press('ArrowRight');
+  await expect(room.sheet('A2')).toBeFocused();
+  await page.keyboard.press('Space');
+  await expect(room.count).toContainText(`${sheets - 1} sheets`);
+  await walkTo(page, room.makePdf, 'Shift+Tab');
+  expect(await pagesOf(await downloaded(page, () => page.keyboard.press('Enter')))).toBe(
+    sheets - 1,
+  );
+});
+
+test('a kept gown is printed with what has just been changed on its table', async ({
+  page,
+  gown,
+  maker,
+}) => {
+  await gown.setStyle('flareLength', '30');
+  await page.getByRole('navigation', { name: 'Places' }).getByText('Print room').click();
+  const room = printRoom(page);
+  await expect(page).toHaveURL(new RegExp(`/gowns/${maker.gownId}/print$`));
+  await expect(room.count).toBeVisible();
+  const shorter = await room.sheets();
+  const asked = page.waitForRequest('**/api/prints/sheets');
+  expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(shorter);
+  expect((await asked).postDataJSON()).toMatchObject({ inputs: { style: { flareLength: 300 } } });
+  await page.getByRole('link', { name: 'To the table' }).click();
+  await gown.showStyle();
+  await expect(gown.field('style.flareLength')).toHaveValue('30.0');
+});
+
+test('without pieces there is a way back to the table', async ({ page }) => {
+  await page.goto('/try/print');
+  await page.getByRole('link', { name: 'To the table' }).click();
+  await expect(page).toHaveURL(/\/try$/);
+});
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  for (const width of [390, 1280]) {
+    test.describe(`${colorScheme}, ${width} px`, () => {
+      test.use({ colorScheme, viewport: { width, height: 844 } });
+
+      test('the print room has no fault that axe knows, refused or not', async ({
+        page,
+        drawnTable,
+      }) => {
+        await expect(drawnTable.drawing).toBeVisible();
+        await page.goto('/try/print');
+        const room = printRoom(page);
+        await expect(room.count).toBeVisible();
+        await room.sheet('A1').click();
+        expect(await faults(page)).toEqual([]);
+        for (const tab of await page.getByRole('tab').all()) {
+          await tab.click();
+          expect(await faults(page)).toEqual([]);
+          expect(await sideways(page)).toBe(0);
+        }
+        await room.showCard('Paper');
+        await room.field('overlap').fill('90');
+        await room.field('overlap').blur();
+        await expect(room.field('overlap')).toHaveAttribute('aria-invalid', 'true');
+        expect(await faults(page)).toEqual([]);
+        await page.setViewportSize({ width: 360, height: 740 });
+        expect(await sideways(page)).toBe(0);
+      });
+    });
+  }
+}
