@@ -69,7 +69,7 @@ export function narrateArmhole(
     kept > 0.05
       ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would reach too near the side; its upper end is kept ${mm(from.x)} out`
       : kept < -0.05
-        ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would end at the bust seam; its upper end is set ${mm(from.x)} out, clear of it`
+        ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would end too near the bust seam, or leave a flat armhole; its upper end is set ${mm(from.x)} out`
         : said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} put its upper end ${mm(from.x)} out`;
   paper.draw(
     'Armhole edge',

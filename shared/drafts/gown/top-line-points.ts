@@ -8,6 +8,8 @@ import { heightAtArc } from './truing.ts';
 /** Off the shoulder the top line ends inside the side line by this, and by this part of the armhole's height (our rule). */
 const insideSide = 12;
 const hollowShare = 0.35;
+/** A shallow armhole is not drawn wider than this many times its height (our rule). */
+const widestShare = 1.5;
 /** It passes the princess line or dart by this at least, so that the seam ends in the top line (our rule). */
 export const outsideAxis = 35;
 
@@ -39,10 +41,14 @@ function sideEnd(half: Half, front: Half, style: GownStyle): End {
 /** Off the shoulder: at the armhole, half the width across out, and the opening more. */
 function shoulderEnd(half: Half, style: GownStyle, { halfAcross, opening }: TopWidth): End {
   const { underarm } = half.heights;
-  const inside = Math.max(insideSide, hollowShare * (underarm - style.sideDepth));
-  const most = xAt(half.line, underarm) - inside;
-  const wished = Math.max(halfAcross, half.axis + outsideAxis) + opening;
-  return { side: point(Math.min(wished, most), style.sideDepth) };
+  const height = underarm - style.sideDepth;
+  const side = xAt(half.line, underarm);
+  const most = side - Math.max(insideSide, hollowShare * height);
+  const least = Math.max(
+    Math.max(halfAcross, half.axis + outsideAxis) + opening,
+    side - widestShare * height,
+  );
+  return { side: point(Math.min(least, most), style.sideDepth) };
 }
 
 function frontTopLine(style: GownStyle, axis: number, end: End): TopLinePoints {
