@@ -110,9 +110,13 @@ function monotoneSlopes(knots: readonly Knot[]): readonly number[] {
   });
 }
 
+/** A spline may swell over its widest knot by this part: more is no longer the line that was asked for. */
+const widestSwell = 1.15;
+
 /**
  * The spline through knots with given leans at its ends, for a width that must not turn negative:
- * where the curvature-continuous spline would dip below zero, the monotone one takes its place.
+ * where the curvature-continuous spline would dip below zero, or swell far over its knots, the monotone
+ * one takes its place.
  */
 export function positiveSpline(
   knots: readonly Knot[],
@@ -120,14 +124,18 @@ export function positiveSpline(
   slopeFoot: number,
 ): Profile {
   const smooth = clampedSpline(knots, slopeTop, slopeFoot);
-  const dips = smooth.some((piece) => leastWidth(piece) < -1e-6);
-  if (!dips) return smooth;
+  const most = widestSwell * Math.max(...knots.map(({ x }) => x));
+  const strays = smooth.some((piece) => {
+    const [least, widest] = widthRange(piece);
+    return least < -1e-6 || widest > most;
+  });
+  if (!strays) return smooth;
   const inner = monotoneSlopes(knots);
   return pieces(knots, [slopeTop, ...inner.slice(1, -1), slopeFoot]);
 }
 
-/** Least width of one cubic between its ends. */
-function leastWidth(piece: ProfilePiece): number {
+/** Least and greatest width of one cubic between its ends. */
+function widthRange(piece: ProfilePiece): readonly [number, number] {
   const { a, b, c, d } = piece;
   const height = piece.to - piece.from;
   const width = (u: number): number => a + u * (b + u * (c + u * d));
@@ -141,7 +149,8 @@ function leastWidth(piece: ProfilePiece): number {
       : under < 0
         ? []
         : [(-c - Math.sqrt(under)) / (3 * d), (-c + Math.sqrt(under)) / (3 * d)];
-  return Math.min(...[0, height, ...turns.filter((u) => u > 0 && u < height)].map(width));
+  const widths = [0, height, ...turns.filter((u) => u > 0 && u < height)].map(width);
+  return [Math.min(...widths), Math.max(...widths)];
 }
 
 const endSlope = (near: number, next: number): number => {

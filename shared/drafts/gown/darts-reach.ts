@@ -18,9 +18,16 @@ const degrees = (half: number, height: number): number =>
 
 /**
  * Refuses darts that would stand up in a cone instead of melting into the bust.
+ * `top` is the dart in the top line: degrees at its
+ * tip, mm of opening, and what the house sews in one.
  * @throws DraftingError on `style.shaping`, naming the princess seam as the remedy.
  */
-export function refuseBluntDarts(half: Half, darts: readonly Intake[], topTip: number): void {
+export function refuseBluntDarts(
+  half: Half,
+  darts: readonly Intake[],
+  top: { readonly tip: number; readonly opening: number; readonly widest: number },
+): void {
+  refuseWideTopDart(half, top);
   const below = darts.map((dart) => {
     const underbust = heightOn(half, 'underbust', dart.axis);
     return half.gap.underbust === 0
@@ -28,7 +35,7 @@ export function refuseBluntDarts(half: Half, darts: readonly Intake[], topTip: n
       : degrees(xAt(dart.gap, underbust) / 2, underbust - dart.top);
   });
   const blunt = Math.max(
-    topTip > widestTip ? topTip : 0,
+    top.tip > widestTip ? top.tip : 0,
     ...below.filter((tip) => tip > widestSwell),
   );
   if (blunt === 0) return;
@@ -39,6 +46,23 @@ export function refuseBluntDarts(half: Half, darts: readonly Intake[], topTip: n
       field: 'style.shaping',
       with: ['card.bustGirth', 'card.underbustGirth', 'card.upperChestGirth'],
       said: said`On the ${half.side} a dart would open at ${deg(blunt)} to take in ${mm(half.gap.underbust)} under the bust; a dart takes at most ${deg(widestTip)} at its tip. Choose the princess seam.`,
+    },
+  ]);
+}
+
+/** The dart in the top line is sewn in one: two would break the line. */
+function refuseWideTopDart(
+  half: Half,
+  { opening, widest }: { readonly opening: number; readonly widest: number },
+): void {
+  if (opening <= widest) return;
+  throw new DraftingError([
+    {
+      code: 'darts-too-wide',
+      severity: 'error',
+      field: 'style.shaping',
+      with: ['card.bustGirth', 'card.upperChestGirth', 'rules.dartWidest'],
+      said: said`On the ${half.side} a dart in the top line would take ${mm(opening)}; the house sews at most ${mm(widest)} in one. Choose the princess seam.`,
     },
   ]);
 }

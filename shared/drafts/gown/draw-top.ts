@@ -93,11 +93,11 @@ export function drawTop(table: DraftingTable, paper: PartTable, inputs: TopInput
     );
   }
   const dart = topDart(axis, bust, opening, peak, rules.dartClearance);
-  refuseBluntDarts(
-    half,
-    topDarts(half, rules.dartClearance),
-    opening > 0 ? tipOf(dart.legs.angle) : 0,
-  );
+  refuseBluntDarts(half, topDarts(half, rules.dartClearance), {
+    tip: opening > 0 ? tipOf(dart.legs.angle) : 0,
+    opening,
+    widest: rules.dartWidest,
+  });
   const parts: TopParts = {
     ...partsOf(topLine(points, dart.legs)),
     ...(opening > 0 ? { topDartTip: dart.legs.pivot } : {}),
