@@ -7,8 +7,10 @@ import type { Drafter } from './drafting/drafter.ts';
 import { draftsRouter } from './features/drafts/router.ts';
 import { gownsRouter } from './features/gowns/router.ts';
 import { createGown } from './features/gowns/service.ts';
+import { classVisitsRouter, lessonsRouter } from './features/lessons/router.ts';
 import { measureCardsRouter } from './features/measure-cards/router.ts';
 import { peopleRouter } from './features/people/router.ts';
+import { overlaysRouter } from './features/print/overlays-router.ts';
 import type { Printer } from './features/print/printer.ts';
 import { printRouter } from './features/print/router.ts';
 import { samplesRouter } from './features/samples/router.ts';
@@ -53,6 +55,7 @@ export function buildApp(parts: Parts): Express {
     await ping(parts.database);
     response.setHeader('Cache-Control', 'no-store').json({ name: 'ellwand', database: 'answers' });
   });
+  app.use(classVisitsRouter(parts.database, parts.limits));
   app.use(
     '/api',
     addressLimit(parts.limits.requestsPerMinute),
@@ -62,11 +65,13 @@ export function buildApp(parts: Parts): Express {
   app.use(samplesRouter(parts.database));
   app.use(draftsRouter(parts.limits, parts.drafter));
   app.use(printRouter(parts.limits, parts.printer));
+  app.use(overlaysRouter(parts.printer));
   const own: Own = { ...parts, sessions: openSessions(parts.database, parts.overHttps) };
   app.use(accountRouter(own, (maker, gown) => createGown(own, maker, gown)));
   app.use(gownsRouter(own));
   app.use(measureCardsRouter(own));
   app.use(peopleRouter(own));
+  app.use(lessonsRouter(own));
   app.use('/api', nothingHere);
   app.use(parts.screens);
   app.use(nothingHere);

@@ -20,6 +20,8 @@ export type Settings = {
 export type Limits = {
   /** Requests of any kind. */
   readonly requestsPerMinute: number;
+  /** Requests of those who follow a class: forty behind one address ask every other second. */
+  readonly classVisitsPerMinute: number;
   readonly draftsPerMinute: number;
   /** Drafts that may wait for their turn, those of saves among them; further ones come again in a moment. */
   readonly draftsWaiting: number;
@@ -71,6 +73,7 @@ export function readSettings(env: NodeJS.ProcessEnv): Settings {
     logLevel: env['LOG_LEVEL'] ?? 'info',
     limits: {
       requestsPerMinute: wholeNumber(env, 'REQUESTS_PER_MINUTE', 1200),
+      classVisitsPerMinute: wholeNumber(env, 'CLASS_VISITS_PER_MINUTE', 2400),
       draftsPerMinute: wholeNumber(env, 'DRAFTS_PER_MINUTE', 240),
       draftsWaiting: wholeNumber(env, 'DRAFTS_WAITING', 48),
       draftsFromOneAddress: wholeNumber(env, 'DRAFTS_FROM_ONE_ADDRESS', 6),

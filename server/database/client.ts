@@ -2,6 +2,7 @@ import { drizzle, type NodePgDatabase } from 'drizzle-orm/node-postgres';
 import { sql } from 'drizzle-orm';
 import { Pool } from 'pg';
 import { accounts } from './schema/accounts.ts';
+import { classes } from './schema/classes.ts';
 import { gownRevisions } from './schema/gown-revisions.ts';
 import { gowns } from './schema/gowns.ts';
 import { knownDevices } from './schema/known-devices.ts';
@@ -14,6 +15,7 @@ import { signInAttempts } from './schema/sign-in-attempts.ts';
 
 const schema = {
   accounts,
+  classes,
   gownRevisions,
   gowns,
   knownDevices,

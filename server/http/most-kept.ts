@@ -5,6 +5,7 @@ export const mostKept = {
   gowns: 500,
   measureCards: 500,
   people: 500,
+  openClasses: 50,
   /** Of one gown. */
   namedRevisions: 100,
   automaticRevisions: 50,
@@ -14,7 +15,7 @@ export const mostKept = {
 
 /** Refuses what would be one too many; nothing there is touched. */
 export function refuseOneTooMany(
-  what: 'gowns' | 'measure cards' | 'people' | 'named revisions of one gown',
+  what: 'gowns' | 'measure cards' | 'people' | 'open classes' | 'named revisions of one gown',
   present: number,
   most: number,
 ): void {

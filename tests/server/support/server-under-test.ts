@@ -24,6 +24,7 @@ export type ServerUnderTest = {
 
 const roomy: Limits = {
   requestsPerMinute: 100_000,
+  classVisitsPerMinute: 100_000,
   draftsPerMinute: 10_000,
   draftsWaiting: 100,
   draftsFromOneAddress: 100,
