@@ -17,6 +17,7 @@ const sharedArrows = {
     'regrade',
     'sheets',
     'engine',
+    'finishing',
     'proof',
     'narration',
     'drafts',
@@ -27,7 +28,18 @@ const sharedArrows = {
   ],
   compare: ['engine', 'proof', 'drafting', 'geometry', 'body', 'units'],
   regrade: ['compare', 'engine', 'proof', 'drafts', 'drafting', 'geometry', 'body', 'units'],
-  api: ['engine', 'sheets', 'compare', 'proof', 'drafts', 'drafting', 'geometry', 'body', 'units'],
+  api: [
+    'engine',
+    'sheets',
+    'compare',
+    'regrade',
+    'proof',
+    'drafts',
+    'drafting',
+    'geometry',
+    'body',
+    'units',
+  ],
 };
 
 /** Packages that only some folders may name. */

@@ -18,6 +18,8 @@ import type { Problem } from '../units/problem.ts';
 import { mm, said } from '../units/said.ts';
 import type { Draft, DraftInputs } from './draft.ts';
 import { draftNumber } from './draft-number.ts';
+import { sortedJson } from './sorted-json.ts';
+import { labelFacts } from './label-facts.ts';
 
 /** Version of the drafting rules: a saved gown keeps it, a change of any shape raises it. */
 export const engineVersion = '1.0.0';
@@ -66,9 +68,9 @@ export function draftGown(inputs: DraftInputs): Draft {
   refuse(aboutStyle);
   const resolved = resolveStyle(style, body, levels);
   const drawn = drawGown(table, body, levels, resolved, rules);
-  const number = draftNumber(JSON.stringify([engineVersion, card, style, rules]));
+  const number = draftNumber(sortedJson([engineVersion, card, style, rules]));
   narrateFinishing(table, rules);
-  const label = { cardName: card.name, date: card.date, draftNumber: number, cloth: 'cloth' };
+  const label = labelFacts('gown', card, number);
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {
     garment: 'gown',

@@ -1,3 +1,4 @@
+import type { SheetPlan } from '../sheets/sheet-plan.ts';
 import type { Unit } from '../units/said.ts';
 
 /** What can hurt at the cutting table and at the party; printed wherever somebody is about to cut. */
@@ -11,9 +12,15 @@ export const cuttingCautions =
 /** How sheets become a pattern, in three sentences. */
 export const assembly = [
   'Print at 100 % and measure both squares before cutting anything.',
-  'Trim each sheet along its left and top lines where they name a neighbour.',
+  'Trim each sheet along its left and top lines where they name a neighbour to lay it on.',
   'Lay it on that neighbour’s glue strip, lozenge on lozenge: first along the rows, then row to row.',
 ] as const;
+
+/** The same for a plan: where nothing is glued, the first sentence and that. */
+export const assemblyOf = ({ plan }: Pick<SheetPlan, 'plan'>): readonly string[] =>
+  plan.glueSeams > 0
+    ? assembly
+    : [assembly[0], 'No sheet is glued to another: every piece lies whole on its sheet.'];
 
 /** The same in few lines, for a page whose room belongs to the figures, and how to chalk from it. */
 export const chalkCautions = (unit: Unit): string =>

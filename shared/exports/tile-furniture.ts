@@ -1,8 +1,13 @@
 import { point } from '../geometry/point.ts';
-import { overlap, printerMargin } from '../sheets/tile-grid.ts';
 import type { TilePlan } from '../sheets/tile-plan.ts';
 import type { Drawing, Mark } from './drawing.ts';
-import { box, chainOf, outline, pens, stroke, strokes } from './marks.ts';
+import { box, chainOf, outline, pens, stroke, strokes, words } from './marks.ts';
+
+/** How sheets are dressed, beside what the plan says. */
+export type Dress = {
+  readonly glueMarks: boolean;
+  readonly inkSaving: boolean;
+};
 
 /** Half the breadth of a match mark, mm; it stands on the line where the next sheet begins. */
 const lozenge = 4;
@@ -10,8 +15,8 @@ const lozenge = 4;
 /** Shares of an edge at which its match marks stand. */
 const marked = [0.2, 0.5, 0.8];
 
-const left = printerMargin;
-const top = printerMargin;
+/** The small test square of every sheet, mm, and how far it stands from the corner of the printed area. */
+export const smallSquare = { side: 20, inset: 3 } as const;
 
 const lozengeAt = (x: number, y: number): Mark =>
   outline(
@@ -31,68 +36,86 @@ const crossAt = (x: number, y: number): Mark =>
     stroke(x, y - lozenge, x, y + lozenge),
   );
 
+/** A match mark: the lozenge with its cross, or the cross alone where ink is saved. */
+const matchAt = (x: number, y: number, { inkSaving }: Dress): readonly Mark[] =>
+  inkSaving ? [crossAt(x, y)] : [lozengeAt(x, y), crossAt(x, y)];
+
+/** Where the match marks along an edge of a sheet stand, mm from its corner. */
+const along = (length: number): readonly number[] => marked.map((share) => share * length);
+
 /** The strip that goes under the next sheet, with the line where that sheet begins. */
-function gluedRight({ use }: TilePlan): Drawing {
-  const x = left + use.width - overlap;
-  const rungs = marked.map((share) => top + share * use.height);
+function gluedRight({ use, margin, overlap }: TilePlan, dress: Dress): Drawing {
+  const x = margin + use.width - overlap;
   return {
     name: 'glue-right',
     marks: [
-      strokes(pens.trim, stroke(x, top, x, top + use.height)),
-      ...rungs.flatMap((y) => [lozengeAt(x, y), crossAt(x, y)]),
+      strokes(pens.trim, stroke(x, margin, x, margin + use.height)),
+      ...(dress.glueMarks ? along(use.height).flatMap((y) => matchAt(x, margin + y, dress)) : []),
     ],
   };
 }
 
-function gluedBelow({ use }: TilePlan): Drawing {
-  const y = top + use.height - overlap;
-  const rungs = marked.map((share) => left + share * use.width);
+function gluedBelow({ use, margin, overlap }: TilePlan, dress: Dress): Drawing {
+  const y = margin + use.height - overlap;
   return {
     name: 'glue-below',
     marks: [
-      strokes(pens.trim, stroke(left, y, left + use.width, y)),
-      ...rungs.flatMap((x) => [lozengeAt(x, y), crossAt(x, y)]),
+      strokes(pens.trim, stroke(margin, y, margin + use.width, y)),
+      ...(dress.glueMarks ? along(use.width).flatMap((x) => matchAt(margin + x, y, dress)) : []),
     ],
   };
 }
 
 /** The same marks where they land on the sheet that is laid on top: halves, cut by its trim line. */
-const trimmedLeft = ({ use }: TilePlan): Drawing => ({
+const trimmedLeft = ({ use, margin }: TilePlan, dress: Dress): Drawing => ({
   name: 'trim-left',
-  marks: marked
-    .map((share) => top + share * use.height)
-    .flatMap((y) => [lozengeAt(left, y), crossAt(left, y)]),
+  marks: dress.glueMarks
+    ? along(use.height).flatMap((y) => matchAt(margin, margin + y, dress))
+    : [],
 });
 
-const trimmedAbove = ({ use }: TilePlan): Drawing => ({
+const trimmedAbove = ({ use, margin }: TilePlan, dress: Dress): Drawing => ({
   name: 'trim-above',
-  marks: marked
-    .map((share) => left + share * use.width)
-    .flatMap((x) => [lozengeAt(x, top), crossAt(x, top)]),
+  marks: dress.glueMarks ? along(use.width).flatMap((x) => matchAt(margin + x, margin, dress)) : [],
 });
 
 /** The trim line round the printed area, with heavier corners to lay a ruler on. */
-function frame({ use }: TilePlan): Drawing {
-  const [right, bottom, arm] = [left + use.width, top + use.height, 8];
+function frame({ use, margin }: TilePlan): readonly Mark[] {
+  const [right, bottom, arm] = [margin + use.width, margin + use.height, 8];
   const corner = (x: number, y: number, dx: number, dy: number): Mark =>
     strokes({ width: 0.4 }, chainOf([point(x + dx * arm, y), point(x, y), point(x, y + dy * arm)]));
+  return [
+    box(pens.trim, margin, margin, use.width, use.height),
+    corner(margin, margin, 1, 1),
+    corner(right, margin, -1, 1),
+    corner(margin, bottom, 1, -1),
+    corner(right, bottom, -1, -1),
+  ];
+}
+
+/** Where the small square stands on a sheet: in the lower left corner, clear of the strip to be glued. */
+export function smallSquareAt({ use, margin, overlap }: TilePlan) {
+  const { side, inset } = smallSquare;
   return {
-    name: 'frame',
-    marks: [
-      box(pens.trim, left, top, use.width, use.height),
-      corner(left, top, 1, 1),
-      corner(right, top, -1, 1),
-      corner(left, bottom, 1, -1),
-      corner(right, bottom, -1, -1),
-    ],
+    x: margin + inset,
+    y: margin + use.height - overlap - inset - side,
+    side,
   };
 }
 
+function square(plan: TilePlan): readonly Mark[] {
+  const { x, y, side } = smallSquareAt(plan);
+  return [
+    box(pens.hairline, x, y, side, side),
+    words('20 mm', x + side / 2, y + side - 1.2, 2.6, { anchor: 'middle', grey: 0.35 }),
+  ];
+}
+
 /** The drawings that many tiles of a plan share. */
-export const tileFurniture = (plan: TilePlan): readonly Drawing[] => [
-  frame(plan),
-  gluedRight(plan),
-  gluedBelow(plan),
-  trimmedLeft(plan),
-  trimmedAbove(plan),
+export const tileFurniture = (plan: TilePlan, dress: Dress): readonly Drawing[] => [
+  { name: 'frame', marks: [...frame(plan), ...square(plan)] },
+  gluedRight(plan, dress),
+  gluedBelow(plan, dress),
+  trimmedLeft(plan, dress),
+  trimmedAbove(plan, dress),
 ];

@@ -1,54 +1,56 @@
 import { shift } from '../geometry/motion.ts';
 import { type Box, boxOf, placedChain } from '../sheets/layout.ts';
 import type { SheetPlan } from '../sheets/sheet-plan.ts';
-import { overlap, printerMargin } from '../sheets/tile-grid.ts';
-import type { Tile, TilePlan } from '../sheets/tile-plan.ts';
-import type { Mark } from './drawing.ts';
+import { type Tile, type TilePlan, printedTiles } from '../sheets/tile-plan.ts';
+import type { Mark, Words } from './drawing.ts';
+import { notToCut } from './line-style.ts';
 import { words } from './marks.ts';
-
-const left = printerMargin;
-const top = printerMargin;
+import { typeWidth } from './type-width.ts';
 
 const still = shift(0, 0);
 const use = (drawing: string): Mark => ({ kind: 'use', drawing, motion: still });
 
 /** What one edge of a sheet shows where a neighbour is printed: shared marks, and its name beside them. */
-type EdgeMarks = { readonly marks: Mark; readonly name: Mark };
+type EdgeMarks = { readonly marks?: Mark; readonly name: Mark };
 
 /** The edges of a sheet that have a neighbour; names stand between two match marks, clear of both. */
-function edgeMarks({ neighbours }: Tile, { use: area }: TilePlan): readonly EdgeMarks[] {
-  const [upright, level] = [top + area.height / 2 - 40, left + area.width / 2 - 25];
+function edgeMarks({ neighbours, glued }: Tile, plan: TilePlan): readonly EdgeMarks[] {
+  const { use: area, margin, overlap } = plan;
+  const [upright, level] = [margin + area.height * 0.35, margin + area.width * 0.35];
   const named = (text: string, x: number, y: number, turn: number): Mark =>
     words(text, x, y, 2.8, { anchor: 'middle', grey: 0.3, turn });
-  const { right, below, left: before, above } = neighbours;
   const strip = overlap / 2 - 1;
-  return [
-    right && {
-      marks: use('glue-right'),
-      name: named(`glue under ${right}`, left + area.width - strip, upright, -90),
-    },
-    below && {
-      marks: use('glue-below'),
-      name: named(`glue under ${below}`, level, top + area.height - strip, 0),
-    },
-    before && {
-      marks: use('trim-left'),
-      name: named(`trim, lay on ${before}`, left + 3.6, upright, -90),
-    },
-    above && {
-      marks: use('trim-above'),
-      name: named(`trim, lay on ${above}`, level, top + 3.6, 0),
-    },
-  ].flatMap((each) => each || []);
+  const places = {
+    right: { x: margin + area.width - strip, y: upright, turn: -90 },
+    below: { x: level, y: margin + area.height - strip, turn: 0 },
+    left: { x: margin + 3.6, y: upright, turn: -90 },
+    above: { x: level, y: margin + 3.6, turn: 0 },
+  } as const;
+  const ways = [
+    { side: 'right', drawing: 'glue-right', text: 'glue under' },
+    { side: 'below', drawing: 'glue-below', text: 'glue under' },
+    { side: 'left', drawing: 'trim-left', text: 'trim, lay on' },
+    { side: 'above', drawing: 'trim-above', text: 'trim, lay on' },
+  ] as const;
+  return ways.flatMap(({ side, drawing, text }): readonly EdgeMarks[] => {
+    const neighbour = neighbours[side];
+    if (neighbour === undefined) return [];
+    const { x, y, turn } = places[side];
+    return glued.includes(side)
+      ? [{ marks: use(drawing), name: named(`${text} ${neighbour}`, x, y, turn) }]
+      : [{ name: named(`beside ${neighbour}, no glue`, x, y, turn) }];
+  });
 }
 
-/** The name of a sheet, large and pale under the lines. */
-const nameMark = ({ name }: Tile): Mark =>
-  words(name, left + 14, top + 28, 20, { heavy: true, grey: 0.85 });
+/** The name of a sheet, large and pale under the lines; small where ink is saved. */
+const nameMark = ({ name }: Tile, { margin }: TilePlan, inkSaving: boolean): Mark =>
+  inkSaving
+    ? words(name, margin + 14, margin + 14, 6, { grey: 0.5 })
+    : words(name, margin + 14, margin + 28, 20, { heavy: true, grey: 0.85 });
 
 /** On a sheet with no line on it: which piece it is the inside of. */
-const insideMark = (piece: string, area: TilePlan['use']): Mark =>
-  words(`inside ${piece}`, left + area.width / 2, top + area.height / 2, 6, {
+const insideMark = (piece: string, { use: area, margin }: TilePlan): Mark =>
+  words(`inside ${piece}`, margin + area.width / 2, margin + area.height / 2, 6, {
     anchor: 'middle',
     grey: 0.5,
   });
@@ -60,40 +62,68 @@ const showsIn = (box: Box, { at }: Tile, area: TilePlan['use']): boolean =>
   box.y - 1 < at.y + area.height &&
   box.y + box.height + 1 > at.y;
 
+/** The box of a line of lettering, a little generous: the heavy face is wider than the light one. */
+const boxOfWords = ({ text, at, size }: Words): Box => ({
+  x: at.x,
+  y: at.y - size,
+  width: typeWidth(text, size) * 1.12,
+  height: size * 1.4,
+});
+
+/** What is written over a sheet whose drawing is not at true scale, or nothing. */
+function warning(sheets: SheetPlan): readonly Mark[] {
+  const text = notToCut(sheets.order);
+  const { use: area, margin } = sheets.plan;
+  return text === undefined
+    ? []
+    : [words(text, margin + area.width / 2, margin + 9, 5, { anchor: 'middle', heavy: true })];
+}
+
 /**
- * The pages of a tile plan, in its order: each shows its window of the drawing, the sheet's name, its
- * neighbours' names, the strip to glue under and match marks that land on both sheets of a seam.
+ * The pages of the printed tiles of a plan, in its order: each shows its window of the drawing, the sheet's
+ * name, its neighbours' names, the strip to glue under and match marks that land on both sheets of a seam.
  */
 export function drawTiles(
-  { layout, plan }: SheetPlan,
+  sheets: SheetPlan,
   titles: ReadonlyMap<string, string>,
+  labels: readonly Words[],
   legend: string,
 ): readonly (readonly Mark[])[] {
+  const { layout, plan, order } = sheets;
+  const { margin, overlap, use: area } = plan;
   const laid = layout.placements.map((each) => ({ ...each, box: boxOf(placedChain(each)) }));
-  return plan.tiles.map((tile, order) => {
+  const lettered = labels.map((each) => ({ each, box: boxOfWords(each) }));
+  const tiles = printedTiles(plan);
+  return tiles.map((tile, number) => {
     const edges = edgeMarks(tile, plan);
+    const [right, down] = [margin - tile.at.x, margin - tile.at.y];
     const pieces = laid
-      .filter(({ box }) => showsIn(box, tile, plan.use))
+      .filter(({ box }) => showsIn(box, tile, area))
       .map(({ shape, motion }): Mark => {
-        const [dx, dy] = [motion.dx + left - tile.at.x, motion.dy + top - tile.at.y];
-        return { kind: 'use', drawing: shape.piece, motion: { ...motion, dx, dy } };
+        const by = { ...motion, dx: motion.dx + right, dy: motion.dy + down };
+        return { kind: 'use', drawing: shape.piece, motion: by };
       });
-    const inside = tile.inside && insideMark(titles.get(tile.inside) ?? tile.inside, plan.use);
-    const foot = top + plan.use.height - overlap / 2 + 1;
+    const names = lettered
+      .filter(({ box }) => showsIn(box, tile, area))
+      .map(({ each }): Mark => ({ ...each, at: { x: each.at.x + right, y: each.at.y + down } }));
+    const inside = tile.inside && insideMark(titles.get(tile.inside) ?? tile.inside, plan);
+    const foot = margin + area.height - overlap / 2 + 1;
     return [
       {
         kind: 'window',
-        box: { x: left, y: top, ...plan.use },
+        box: { x: margin, y: margin, ...area },
         marks: [
-          nameMark(tile),
+          nameMark(tile, plan, order.inkSaving),
           ...pieces,
+          ...names,
           ...(inside ? [inside] : []),
-          ...edges.map((each) => each.marks),
+          ...edges.flatMap((each) => each.marks ?? []),
         ],
       },
       use('frame'),
       ...edges.map((each) => each.name),
-      words(`${legend} · sheet ${order + 1} of ${plan.tiles.length}`, left + 3, foot, 2.4, {
+      ...warning(sheets),
+      words(`${legend} · sheet ${number + 1} of ${tiles.length}`, margin + 3, foot, 2.4, {
         grey: 0.3,
       }),
     ];

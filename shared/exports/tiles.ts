@@ -1,33 +1,69 @@
-import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
+import { labelFacts } from '../engine/label-facts.ts';
+import { type DrawnPiece, drawnPieces } from '../sheets/drawn-pieces.ts';
 import type { PrintOrder } from '../sheets/print-order.ts';
-import { choosePieces } from '../sheets/selection.ts';
 import { refuseTooManySheets } from '../sheets/sheet-limit.ts';
-import { planSheets } from '../sheets/sheet-plan.ts';
+import { type SheetPlan, coverDrawing, coverSize, planSheets } from '../sheets/sheet-plan.ts';
 import type { Unit } from '../units/said.ts';
-import { coverPage, selectionTitles } from './cover.ts';
-import type { PrintJob } from './drawing.ts';
-import { drawPiece } from './piece-drawing.ts';
+import { coverMarks, printTitle } from './cover.ts';
+import type { Drawing, PrintJob } from './drawing.ts';
+import { penIn } from './line-style.ts';
+import { pens, stroke, strokes } from './marks.ts';
+import { pieceLines } from './piece-drawing.ts';
+import { placedLabels } from './placed-labels.ts';
 import { tileFurniture } from './tile-furniture.ts';
 import { drawTiles } from './tile-pages.ts';
 
-/**
- * A choice of pieces as pages of home paper at true scale: the cover, then the tiles row by row.
- * Throws `SheetLimitError` before a page is drawn where that takes more sheets than anybody would glue.
- */
-export function tilesJob(draft: Draft, order: PrintOrder, unit: Unit): PrintJob {
-  const selection = typeof order.pieces === 'string' ? order.pieces : 'whole-gown';
-  const pieces = choosePieces(draft.pieces, selection);
-  const sheets = planSheets(draft.pieces, order);
-  refuseTooManySheets(sheets);
-  const titles = new Map(pieces.map((each) => [each.name, each.title]));
+/** Margin of the cover where it lies among the pieces, mm. */
+const coverMargin = 10;
+
+function drawingOf({ drawing, piece, foldLine }: DrawnPiece, order: PrintOrder): Drawing {
+  const style = { lines: order.lines, inkSaving: order.inkSaving, scale: order.scale };
+  const fold = foldLine && [
+    strokes(
+      penIn({ ...pens.hairline, dash: [10, 2, 2, 2] }, style),
+      stroke(foldLine.from.x, foldLine.from.y, foldLine.to.x, foldLine.to.y),
+    ),
+  ];
+  return { name: drawing, marks: [...pieceLines(piece, style), ...(fold ?? [])] };
+}
+
+/** A plan as pages, for a draft and the pieces the plan was made of. */
+function pagesOf(draft: Drafted, sheets: SheetPlan, unit: Unit): PrintJob {
+  const { order, plan, cover } = sheets;
+  const { card } = draft.inputs;
+  const drawn = drawnPieces(draft.pieces, order);
+  const byName = new Map(drawn.map((each) => [each.drawing, each]));
+  const titles = new Map(drawn.map(({ drawing, piece }) => [drawing, piece.title]));
+  const labels = placedLabels(sheets, byName, labelFacts(draft.garment, card, draft.number));
+  const coverOn = (page: Parameters<typeof coverMarks>[4]) =>
+    coverMarks(draft, sheets, drawn, unit, page);
+  const among: readonly Drawing[] =
+    cover === 'among the pieces'
+      ? [{ name: coverDrawing, marks: coverOn({ ...coverSize, margin: coverMargin }) }]
+      : [];
   return {
-    title: `Ellwand ${selectionTitles[selection].toLowerCase()}, draft ${draft.number}`,
-    ...(draft.inputs.card.date === undefined ? {} : { date: draft.inputs.card.date }),
-    paper: sheets.plan.paper,
-    drawings: [...pieces.map(drawPiece), ...tileFurniture(sheets.plan)],
+    title: `Ellwand ${printTitle(draft, sheets).toLowerCase()}, draft ${draft.number}`,
+    ...(card.date === undefined ? {} : { date: card.date }),
+    paper: plan.paper,
+    drawings: [
+      ...drawn.map((each) => drawingOf(each, order)),
+      ...among,
+      ...tileFurniture(plan, order),
+    ],
     pages: [
-      coverPage(draft, sheets, pieces, { selection, unit }),
-      ...drawTiles(sheets, titles, `draft ${draft.number}`),
+      ...(cover === 'own sheet' ? [coverOn({ ...plan.paper, margin: order.margin })] : []),
+      ...drawTiles(sheets, titles, labels, `draft ${draft.number}`),
     ],
   };
+}
+
+/**
+ * An order as pages: the cover, then the sheets row by row. Throws `SheetLimitError` before a page is drawn
+ * where that takes more sheets than anybody would glue.
+ */
+export function tilesJob(draft: Drafted, order: PrintOrder, unit: Unit): PrintJob {
+  const sheets = planSheets(draft.pieces, order);
+  refuseTooManySheets(sheets);
+  return pagesOf(draft, sheets, unit);
 }

@@ -27,6 +27,12 @@ const drillMark = 3;
 
 type Chain = readonly Point[];
 
+/** Seams between sheets of paper that a label is not to lie across: upright and level lines, mm. */
+export type PaperSeams = { readonly x: readonly number[]; readonly y: readonly number[] };
+
+/** Kept clear of a seam between sheets on either side, mm. */
+const clearOfSeams = 2;
+
 /** Evenly spaced heights, mm. */
 type Heights = { readonly top: number; readonly spacing: number; readonly count: number };
 
@@ -49,15 +55,15 @@ function cross(chain: Chain, heights: Heights, visit: (row: number, x: number) =
 }
 
 /** The free stretches of each row inside a closed chain. */
-function insideOf(outline: Chain, heights: Heights): (readonly Span[])[] {
+function insideOf(outline: Chain, heights: Heights, clear: number): (readonly Span[])[] {
   const met: number[][] = Array.from({ length: heights.count }, () => []);
   cross(outline, heights, (row, x) => met[row]?.push(x));
   return met.map((row) => {
     row.sort((a, b) => a - b);
     const spans: Span[] = [];
     for (let i = 1; i < row.length; i += 2) {
-      const left = (row[i - 1] ?? 0) + clearOfOutline;
-      const right = (row[i] ?? 0) - clearOfOutline;
+      const left = (row[i - 1] ?? 0) + clear;
+      const right = (row[i] ?? 0) - clear;
       if (right > left) spans.push({ left, right });
     }
     return spans;
@@ -114,8 +120,29 @@ function marks(piece: Piece): readonly Chain[] {
   return [...darts, ...folds, strip(piece.grain.from, piece.grain.to, 4, 4), ...drills];
 }
 
-/** The stretches at evenly spaced heights that lie inside the finished outline and clear of its marks. */
-export function freeRows(piece: Piece): FreeRows {
+/** Takes seams between sheets out of the rows. */
+function partAtSeams(
+  rows: (readonly Span[])[],
+  seams: PaperSeams,
+  { top, spacing }: Heights,
+): void {
+  rows.forEach((spans, row) => {
+    const middle = top + (row + 0.5) * spacing;
+    const near = spacing / 2 + clearOfSeams;
+    rows[row] = seams.y.some((y) => Math.abs(y - middle) < near)
+      ? []
+      : seams.x.reduce<readonly Span[]>(
+          (left, x) => without(left, x - clearOfSeams, x + clearOfSeams),
+          spans,
+        );
+  });
+}
+
+/**
+ * The stretches at evenly spaced heights that lie inside the finished outline and clear of its marks;
+ * printed at `scale`, on sheets whose `seams` part them.
+ */
+export function freeRows(piece: Piece, seams?: PaperSeams, scale = 1): FreeRows {
   const outline = chainOf(piece.edges.map((edge) => edge.path));
   let top = Infinity;
   let foot = -Infinity;
@@ -123,10 +150,11 @@ export function freeRows(piece: Piece): FreeRows {
     if (y < top) top = y;
     if (y > foot) foot = y;
   }
-  const spacing = Math.max(leastSpacing, (foot - top) / rowsAtMost);
+  const spacing = Math.max(leastSpacing * scale, (foot - top) / rowsAtMost);
   const heights = { top, spacing, count: Math.max(0, Math.floor((foot - top) / spacing)) };
-  const rows = insideOf(outline, heights);
+  const rows = insideOf(outline, heights, clearOfOutline * scale);
   for (const mark of marks(piece)) takeOut(rows, mark, heights);
+  if (seams) partAtSeams(rows, seams, heights);
   return { top, spacing, rows };
 }
 

@@ -1,5 +1,5 @@
 import type { Lettering, Piece } from '../drafting/piece.ts';
-import { type FreePlace, freePlace, freeRows } from './free-run.ts';
+import { type FreePlace, type PaperSeams, freePlace, freeRows } from './free-run.ts';
 
 /** What the label of every piece of a draft says besides the piece's own name and cut. */
 export type LabelFacts = {
@@ -12,6 +12,19 @@ export type LabelFacts = {
   readonly cloth: string;
 };
 
+/** How a label is printed, where it is not the plain one at true scale. */
+export type LabelPrint = {
+  /** Seams between sheets of paper that it is not to lie across. */
+  readonly seams?: PaperSeams;
+  /** Its last lines, instead of what the lines mean and how to print. */
+  readonly notes?: readonly string[];
+  /** Scale of the drawing; below one the letters are smaller, and still legible. */
+  readonly scale?: number;
+};
+
+/** What the lines of a piece mean, and how it is printed. */
+const plainNotes = ['seam line dashed · cut on the solid line', 'print at 100 %'] as const;
+
 type Line = { readonly text: string; readonly size: number };
 
 /** How large the lettering is tried, from the best to the smallest: sizes in mm and widest line. */
@@ -22,6 +35,15 @@ const layouts = [
   { title: 4.5, text: 4, note: 4, width: 46 },
   { title: 4, text: 4, note: 4, width: 38 },
 ] as const;
+
+/** The same for drawings at a half and a quarter. */
+const smallLayouts = [
+  { title: 4, text: 3, note: 2.8, width: 60 },
+  { title: 3.2, text: 2.8, note: 2.6, width: 40 },
+  { title: 2.8, text: 2.4, note: 2.4, width: 26 },
+] as const;
+
+type Sizes = (typeof layouts)[number] | (typeof smallLayouts)[number];
 
 /** Longest name written out, characters. */
 const longestName = 40;
@@ -107,7 +129,12 @@ function wrapped({ text, size }: Line, width: number): readonly Line[] {
     .map((part) => ({ text: fitted(part, size, width), size }));
 }
 
-function label(piece: Piece, facts: LabelFacts, sizes: (typeof layouts)[number]): readonly Line[] {
+function label(
+  piece: Piece,
+  facts: LabelFacts,
+  sizes: Sizes,
+  notes: readonly string[],
+): readonly Line[] {
   const card = [facts.cardName, facts.date]
     .map((each) => shortened(plain(each ?? ''), longestName))
     .filter((each) => each !== '')
@@ -117,8 +144,7 @@ function label(piece: Piece, facts: LabelFacts, sizes: (typeof layouts)[number])
     { text: piece.cut, size: sizes.text },
     { text: card, size: sizes.text },
     { text: `draft ${facts.draftNumber} · ${plain(facts.cloth)}`, size: sizes.note },
-    { text: 'seam line dashed · cut on the solid line', size: sizes.note },
-    { text: 'print at 100 %', size: sizes.note },
+    ...notes.map((text) => ({ text, size: sizes.note })),
   ];
   return lines.filter((line) => line.text !== '').flatMap((line) => wrapped(line, sizes.width));
 }
@@ -135,13 +161,18 @@ function set(lines: readonly Line[], place: FreePlace, width: number): readonly 
 /**
  * The label of a piece, line by line, in letters 4 to 7 mm high: where it fits inside the finished
  * outline clear of darts, grain line and drill points. A piece too small for all of it carries as many
- * lines as it holds, its name first; none where not even a short name would lie inside.
+ * lines as it holds, its name first; none where not even a short name would lie inside. `print` says how
+ * it is printed on sheets of paper.
  */
-export function lettering(piece: Piece, facts: LabelFacts): readonly Lettering[] {
-  const free = freeRows(piece);
+export function lettering(
+  piece: Piece,
+  facts: LabelFacts,
+  { seams, notes = plainNotes, scale = 1 }: LabelPrint = {},
+): readonly Lettering[] {
+  const free = freeRows(piece, seams, scale);
   let lines: readonly Line[] = [];
-  for (const sizes of layouts) {
-    lines = label(piece, facts, sizes);
+  for (const sizes of scale < 1 ? smallLayouts : layouts) {
+    lines = label(piece, facts, sizes, notes);
     const width = Math.max(...lines.map((line) => textWidth(line.text, line.size)));
     const height = lines.reduce((sum, line) => sum + line.size * leading, 0);
     const place = freePlace(free, width, height);
@@ -149,7 +180,8 @@ export function lettering(piece: Piece, facts: LabelFacts): readonly Lettering[]
   }
   for (let count = lines.length - 1; count > 0; count -= 1) {
     for (const least of [36, 26, 16]) {
-      const place = freePlace(free, least, count * 4 * leading);
+      const tallest = Math.max(...lines.slice(0, count).map((line) => line.size));
+      const place = freePlace(free, least * Math.max(scale, 0.6), count * tallest * leading);
       if (!place) continue;
       const run = place.right - place.left;
       const short = lines

@@ -1,97 +1,82 @@
-import { type Motion, moved } from '../geometry/motion.ts';
-import { type Layout, type Placement, type Shape, boxOf } from './layout.ts';
-import { inkedTiles } from './inked-tiles.ts';
+import { rollField, sheetField } from './field.ts';
+import { type Layout, type Placement, type Shape, boxOf, placedChain } from './layout.ts';
+import { nest } from './nest.ts';
 import type { Paper } from './papers.ts';
-import { tileGrid } from './tile-grid.ts';
+import { edge } from './phases.ts';
+import type { PlanProgress } from './print-order.ts';
+import { partedIn } from './seam-crossings.ts';
+import { inRows, sheetsOf } from './shelves.ts';
+import { type SheetEdges, tileGrid } from './tile-grid.ts';
 
-/** Room between pieces, so that scissors get round each, and to the edge of the drawing. */
-const gap = 6;
-const edge = 2;
+/** Moves a search makes: about a second on a small machine for the pieces of a gown. */
+export const fullSearch = 1000;
 
-/** More sheets side by side than this do not fit a cutting table. */
-const widest = 10;
-
-type Turn = 'as drafted' | 'upright' | 'lying';
-type Laid = {
-  readonly shape: Shape;
-  readonly turned: boolean;
-  readonly width: number;
-  readonly height: number;
-};
-
-const size = (shape: Shape, turned: boolean): Laid => {
-  const box = boxOf(shape.chain);
-  return turned
-    ? { shape, turned, width: box.height, height: box.width }
-    : { shape, turned, width: box.width, height: box.height };
-};
-
-function lay(shape: Shape, turn: Turn, room: number): Laid {
-  const straight = size(shape, false);
-  const turned = size(shape, true);
-  const wish =
-    turn === 'as drafted' || (turn === 'upright') === straight.height >= straight.width
-      ? straight
-      : turned;
-  const other = wish.turned ? straight : turned;
-  return wish.width > room && other.width < wish.width ? other : wish;
+/** The drawing round some placements, its corner at 0, 0. */
+function drawingOf(placements: readonly Placement[]): Layout {
+  const { x, y, width, height } = boxOf(placements.flatMap(placedChain));
+  return placements.length === 0
+    ? { width: 0, height: 0, placements }
+    : { width: x + width + edge, height: y + height + edge, placements };
 }
 
-function motionTo({ shape, turned }: Laid, x: number, y: number): Motion {
-  const quarter: Motion = turned
-    ? { cos: 0, sin: 1, dx: 0, dy: 0 }
-    : { cos: 1, sin: 0, dx: 0, dy: 0 };
-  const box = boxOf(shape.chain.map((each) => moved(each, quarter)));
-  return { ...quarter, dx: x - box.x, dy: y - box.y };
-}
+const shifted = (placements: readonly Placement[], dx: number, dy: number): readonly Placement[] =>
+  placements.map(({ shape, motion }) => ({
+    shape,
+    motion: { ...motion, dx: motion.dx + dx, dy: motion.dy + dy },
+  }));
 
-/** Lays pieces on shelves: tallest first, each on the first shelf with room for it. */
-function shelve(shapes: readonly Shape[], turn: Turn, width: number): Layout {
-  const room = width - 2 * edge;
-  const sorted = shapes
-    .map((shape, order) => ({ laid: lay(shape, turn, room), order }))
-    .sort((a, b) => b.laid.height - a.laid.height || a.order - b.order);
-  const shelves: { y: number; filled: number }[] = [];
-  const placements: Placement[] = [];
-  let bottom = edge;
-  let right = 0;
-  for (const { laid } of sorted) {
-    let shelf = shelves.find((each) => each.filled + laid.width <= room + edge + 1e-9);
-    if (!shelf) {
-      shelf = { y: bottom, filled: edge };
-      shelves.push(shelf);
-      bottom += laid.height + gap;
-    }
-    placements.push({ shape: laid.shape, motion: motionTo(laid, shelf.filled, shelf.y) });
-    shelf.filled += laid.width + gap;
-    right = Math.max(right, shelf.filled - gap);
+/** Farthest a whole drawing is shifted, mm, and by what steps. */
+const slack = 12;
+
+/**
+ * The drawing shifted as a whole, as little as it takes, so that fewer notches lie on seams between
+ * sheets; only where it needs no sheet more.
+ */
+function settled(layout: Layout, paper: Paper, edges: SheetEdges): Layout {
+  const { step } = tileGrid(layout, paper, edges);
+  const parts = partedIn(layout.placements, step);
+  if (parts === 0) return layout;
+  const sheets = sheetsOf(layout, paper, edges);
+  const { x, y } = boxOf(layout.placements.flatMap(placedChain));
+  const ways = Array.from({ length: 2 * slack + 1 }, (_, i) => i - slack);
+  const tries = ways
+    .flatMap((dx) => ways.map((dy) => ({ dx, dy })))
+    .filter(({ dx, dy }) => x + dx >= edge && y + dy >= edge)
+    .map((by) => ({
+      ...by,
+      parts: partedIn(shifted(layout.placements, by.dx, by.dy), step),
+      away: Math.hypot(by.dx, by.dy),
+    }))
+    .filter((each) => each.parts < parts)
+    .sort((a, b) => a.parts - b.parts || a.away - b.away || a.dx - b.dx);
+  for (const { dx, dy } of tries) {
+    const moved = drawingOf(shifted(layout.placements, dx, dy));
+    if (sheetsOf(moved, paper, edges) <= sheets) return moved;
   }
-  return { width: right + edge, height: bottom - gap + edge, placements };
-}
-
-/** Fewer sheets first; of layouts with as many, the one that spreads least over the table. */
-function cost(layout: Layout, paper: Paper): number {
-  const grid = tileGrid(layout, paper);
-  const sheets = inkedTiles(layout, grid).filter((each) => each !== undefined).length;
-  return sheets + (grid.columns * grid.step.x + grid.rows * grid.step.y) / 1e6;
+  return layout;
 }
 
 /**
- * Lays pieces out on one drawing so that few sheets of the paper are needed: shelves of every width
- * from one sheet to ten, pieces as drafted, upright or lying; the first layout of least cost wins, so
- * the same pieces always give the same drawing.
+ * Lays pieces out on one drawing so that few sheets of the paper are needed, never more than row by row;
+ * pieces are turned by quarters and take each other's hollows. Says after every move how far it is. The
+ * same pieces, paper and moves always give the same drawing.
  */
-export function arrange(shapes: readonly Shape[], paper: Paper): Layout {
-  let best: Layout = { width: 0, height: 0, placements: [] };
-  let least = Infinity;
-  if (shapes.length === 0) return best;
-  const { use, step } = tileGrid(best, paper);
-  for (let columns = 1; columns <= widest; columns += 1) {
-    for (const turn of ['as drafted', 'upright', 'lying'] as const) {
-      const layout = shelve(shapes, turn, use.width + (columns - 1) * step.x);
-      const price = cost(layout, paper);
-      if (price < least) [best, least] = [layout, price];
-    }
+export function* arrange(
+  shapes: readonly Shape[],
+  paper: Paper,
+  edges: SheetEdges,
+  moves: number,
+): Generator<PlanProgress, Layout> {
+  if (shapes.length === 0) return { width: 0, height: 0, placements: [] };
+  const wanted = shapes.length === 1 ? 0 : moves;
+  if (paper.roll) {
+    const strip = yield* nest(shapes, rollField(paper, edges), wanted);
+    if (strip) return drawingOf(strip);
   }
-  return best;
+  const rows = inRows(shapes, paper, edges);
+  const placements = yield* nest(shapes, sheetField(shapes, paper, edges), wanted);
+  const nested = placements && drawingOf(placements);
+  const better =
+    nested && sheetsOf(nested, paper, edges) <= sheetsOf(rows, paper, edges) ? nested : rows;
+  return settled(better, paper, edges);
 }

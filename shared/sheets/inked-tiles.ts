@@ -1,27 +1,22 @@
-import { moved } from '../geometry/motion.ts';
 import type { Point } from '../geometry/point.ts';
-import { type Layout, boxOf } from './layout.ts';
-import { type TileGrid, overlap } from './tile-grid.ts';
+import { type Layout, boxOf, placedChain } from './layout.ts';
+import { inkReach } from './phases.ts';
+import type { TileGrid } from './tile-grid.ts';
+import { type Stride, sheetsShowing, zoneAt, zoneKey } from './tile-zones.ts';
 
-/** Half a cutting line, and a little: ink reaches this far beyond the line it is drawn on. */
-const inkReach = 0.5;
-
-/** Longest stretch of line looked at in one go; longer ones would claim sheets they only pass. */
-const stride = 8;
+/** Longest stretch of line looked at in one go, mm; longer ones would claim sheets they only pass. */
+const stride = 2;
 
 /** What a tile shows: a piece's outline, or the inside of a piece, by name. */
 export type Ink = { readonly inside?: string };
 
-type Span = { readonly first: number; readonly last: number };
-
-/** Which tile answers for a place: strips shared by two tiles belong to the one left of or above. */
-const ownerOf = (at: number, step: number, count: number): number =>
-  Math.min(count - 1, Math.max(0, Math.ceil((at - overlap) / step) - 1));
-
-const owners = (a: number, b: number, step: number, count: number): Span => ({
-  first: ownerOf(Math.min(a, b) - inkReach, step, count),
-  last: ownerOf(Math.max(a, b) + inkReach, step, count),
-});
+/** The tiles of a grid, row by row from the top left, and the seams between them that a piece runs across. */
+export type InkedTiles = {
+  readonly tiles: readonly (Ink | undefined)[];
+  /** Whether the seam at the right of, or below, a tile must be glued for some piece. */
+  readonly gluedRight: readonly boolean[];
+  readonly gluedBelow: readonly boolean[];
+};
 
 /** Whether a closed chain goes round a place. */
 function surrounds(chain: readonly Point[], at: Point): boolean {
@@ -37,63 +32,106 @@ function surrounds(chain: readonly Point[], at: Point): boolean {
   return within;
 }
 
-/** Marks the tiles that a straight stroke crosses. */
-function crossTiles(a: Point, b: Point, grid: TileGrid, mark: (tile: number) => void): void {
-  const parts = Math.max(1, Math.ceil(Math.hypot(b.x - a.x, b.y - a.y) / stride));
-  for (let i = 0; i < parts; i += 1) {
-    const [from, to] = [i / parts, (i + 1) / parts];
-    const across = owners(
-      a.x + (b.x - a.x) * from,
-      a.x + (b.x - a.x) * to,
-      grid.step.x,
-      grid.columns,
-    );
-    const down = owners(a.y + (b.y - a.y) * from, a.y + (b.y - a.y) * to, grid.step.y, grid.rows);
-    for (let row = down.first; row <= down.last; row += 1) {
-      for (let column = across.first; column <= across.last; column += 1) {
-        mark(row * grid.columns + column);
-      }
+type Axes = { readonly across: Stride; readonly down: Stride };
+
+/** The zones that the outline of a chain inks. */
+function outlineZones(chain: readonly Point[], { across, down }: Axes): ReadonlySet<number> {
+  const zones = new Set<number>();
+  let before = chain[chain.length - 1];
+  for (const here of chain) {
+    if (!before) continue;
+    const parts = Math.max(1, Math.ceil(Math.hypot(here.x - before.x, here.y - before.y) / stride));
+    for (let i = 0; i < parts; i += 1) {
+      const [ax, bx] = [i, i + 1].map(
+        (n) => (before?.x ?? 0) + ((here.x - (before?.x ?? 0)) * n) / parts,
+      );
+      const [ay, by] = [i, i + 1].map(
+        (n) => (before?.y ?? 0) + ((here.y - (before?.y ?? 0)) * n) / parts,
+      );
+      mark(zones, [ax ?? 0, bx ?? 0], [ay ?? 0, by ?? 0], { across, down });
     }
+    before = here;
+  }
+  return zones;
+}
+
+/** Adds the zones of a small box and of the ink round it. */
+function mark(
+  zones: Set<number>,
+  [ax, bx]: readonly [number, number],
+  [ay, by]: readonly [number, number],
+  { across, down }: Axes,
+): void {
+  const left = zoneAt(Math.max(0, Math.min(ax, bx) - inkReach), across);
+  const right = zoneAt(Math.max(ax, bx) + inkReach, across);
+  const top = zoneAt(Math.max(0, Math.min(ay, by) - inkReach), down);
+  const foot = zoneAt(Math.max(ay, by) + inkReach, down);
+  for (let y = top; y <= foot; y += 1) {
+    for (let x = left; x <= right; x += 1) zones.add(zoneKey(x, y));
   }
 }
 
-/**
- * The tiles of a grid that show something of a layout, row by row from the top left. A tile counts
- * when a piece reaches into the part of it that no tile before it shows; paper inside a piece counts
- * too, or the pattern would have holes.
- */
-export function inkedTiles(layout: Layout, grid: TileGrid): readonly (Ink | undefined)[] {
-  const found = new Array<Ink | undefined>(grid.rows * grid.columns).fill(undefined);
-  const chains = layout.placements.map(({ shape, motion }) => ({
-    name: shape.piece,
-    chain: shape.chain.map((each) => moved(each, motion)),
-  }));
-  const outlined: Ink = {};
-  for (const { chain } of chains) {
-    let before = chain[chain.length - 1];
-    for (const here of chain) {
-      if (before) {
-        crossTiles(before, here, grid, (tile) => {
-          found[tile] = outlined;
-        });
-      }
-      before = here;
-    }
-  }
-  for (const { name, chain } of chains) {
-    const { x, y, width, height } = boxOf(chain);
-    const across = owners(x, x + width, grid.step.x, grid.columns);
-    const down = owners(y, y + height, grid.step.y, grid.rows);
-    for (let row = down.first; row <= down.last; row += 1) {
-      for (let column = across.first; column <= across.last; column += 1) {
-        const tile = row * grid.columns + column;
-        const middle = {
-          x: column * grid.step.x + grid.use.width / 2,
-          y: row * grid.step.y + grid.use.height / 2,
-        };
-        if (found[tile] === undefined && surrounds(chain, middle)) found[tile] = { inside: name };
-      }
+/** The middle of a zone along an axis. */
+const middleOf = (zone: number, { step, overlap }: Stride): number =>
+  (zone >> 1) * step + (zone % 2 === 0 ? overlap / 2 : (overlap + step) / 2);
+
+/** The zones that lie inside a chain, its outline's zones left out. */
+function insideZones(
+  chain: readonly Point[],
+  outlined: ReadonlySet<number>,
+  { across, down }: Axes,
+): readonly number[] {
+  const { x, y, width, height } = boxOf(chain);
+  const found: number[] = [];
+  for (let row = zoneAt(y, down); row <= zoneAt(y + height, down); row += 1) {
+    for (let column = zoneAt(x, across); column <= zoneAt(x + width, across); column += 1) {
+      const key = zoneKey(column, row);
+      const middle = { x: middleOf(column, across), y: middleOf(row, down) };
+      if (!outlined.has(key) && surrounds(chain, middle)) found.push(key);
     }
   }
   return found;
+}
+
+/**
+ * The tiles that a layout needs. A piece takes every tile that alone shows some of it, paper inside it
+ * too, or the pattern would have holes; what two tiles share in their strip needs only one of them.
+ */
+export function inkedTiles(layout: Layout, grid: TileGrid): InkedTiles {
+  const { rows, columns, step, overlap } = grid;
+  const axes = { across: { step: step.x, overlap }, down: { step: step.y, overlap } };
+  const tiles = new Array<Ink | undefined>(rows * columns).fill(undefined);
+  const gluedRight = tiles.map(() => false);
+  const gluedBelow = tiles.map(() => false);
+  const already = new Set<number>();
+  const drawn = layout.placements.map((placement) => {
+    const chain = placedChain(placement);
+    const outlined = outlineZones(chain, axes);
+    const zones = new Set([...outlined, ...insideZones(chain, outlined, axes)]);
+    return { name: placement.shape.piece, outlined, zones };
+  });
+  const outlines = new Set(drawn.flatMap(({ outlined }) => [...outlined]));
+  const shows = (zones: ReadonlySet<number>, column: number, row: number): boolean =>
+    [0, 1, 2].some((dy) =>
+      [0, 1, 2].some((dx) => zones.has(zoneKey(2 * column + dx, 2 * row + dy))),
+    );
+  for (const { name, zones } of drawn) {
+    const sheets = sheetsShowing(zones, already);
+    const own = new Set(sheets.map(({ column, row }) => zoneKey(column, row)));
+    const strip = (x: number, y: number): boolean =>
+      [-1, 0, 1].some((by) => zones.has(x % 2 === 0 ? zoneKey(x, y + by) : zoneKey(x + by, y)));
+    for (const { column, row } of sheets) {
+      already.add(zoneKey(column, row));
+      if (column >= columns || row >= rows) continue;
+      const at = row * columns + column;
+      if (!tiles[at]) tiles[at] = shows(outlines, column, row) ? {} : { inside: name };
+      if (own.has(zoneKey(column + 1, row)) && strip(2 * column + 2, 2 * row + 1)) {
+        gluedRight[at] = true;
+      }
+      if (own.has(zoneKey(column, row + 1)) && strip(2 * column + 1, 2 * row + 2)) {
+        gluedBelow[at] = true;
+      }
+    }
+  }
+  return { tiles, gluedRight, gluedBelow };
 }

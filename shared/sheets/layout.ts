@@ -2,12 +2,26 @@ import { flatten } from '../geometry/curve.ts';
 import { type Motion, moved } from '../geometry/motion.ts';
 import type { Point } from '../geometry/point.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
+import type { LineChoice } from './print-order.ts';
 
 /** How far the chain of points may lie off a cutting line, mm: well inside a pencil line. */
 const tolerance = 0.1;
 
-/** A piece reduced to what arranging and tiling ask of it: its cutting line as a chain of points. */
-export type Shape = { readonly piece: string; readonly chain: readonly Point[] };
+/** Room between pieces, so that scissors get round each; mm. */
+export const gap = 6;
+
+/** A short line that no seam between sheets should part: a notch. */
+export type Spot = readonly [Point, Point];
+
+/** A piece reduced to what arranging and tiling ask of it: its outermost line as a chain of points. */
+export type Shape = {
+  /** Name of its drawing. */
+  readonly piece: string;
+  readonly chain: readonly Point[];
+  readonly spots?: readonly Spot[];
+  /** Never turned: it is read, not cut. */
+  readonly upright?: true;
+};
 
 export type Box = {
   readonly x: number;
@@ -26,10 +40,20 @@ export type Layout = {
   readonly placements: readonly Placement[];
 };
 
-/** The shape of a finished piece. */
-export const shapeOf = (piece: FinishedPiece): Shape => ({
-  piece: piece.name,
-  chain: flatten(piece.cutLine, tolerance),
+/** The shape of a finished piece: its cutting line, or its finished line where that alone is drawn. */
+export const shapeOf = (
+  piece: FinishedPiece,
+  lines: LineChoice = 'both',
+  name = piece.name,
+): Shape => ({
+  piece: name,
+  chain: flatten(
+    lines === 'finished' ? piece.edges.flatMap((each) => each.path) : piece.cutLine,
+    tolerance,
+  ),
+  spots: piece.notchMarks.flatMap(({ strokes }) =>
+    strokes.map((each): Spot => [each.from, each.to]),
+  ),
 });
 
 /** The smallest upright box round some points; a box without size at 0, 0 round none. */

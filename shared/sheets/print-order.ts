@@ -83,7 +83,7 @@ export const plainOrder: PrintOrder = {
  * is at least as wide as A4 and as long as Letter, whichever way it lies.
  */
 export const orderLimits = {
-  margin: { least: 5, most: 25 },
+  margin: { least: 5, most: 15 },
   overlap: { least: 5, most: 25 },
   shortSide: { least: 210, most: 1600 },
   longSide: { least: 275, most: 5000 },

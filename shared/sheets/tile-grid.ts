@@ -1,11 +1,14 @@
 import type { Paper } from './papers.ts';
+import { plainOrder } from './print-order.ts';
 
-/** What home printers leave white round a sheet, and what neighbouring sheets share, mm. */
-export const printerMargin = 10;
-export const overlap = 10;
+/** White that home printers leave round a sheet, mm, where no order says otherwise. */
+export const printerMargin = plainOrder.margin;
+
+/** What stays white round a sheet, and what neighbouring sheets share, mm. */
+export type SheetEdges = { readonly margin: number; readonly overlap: number };
 
 /** Sheets side by side and below one another over a drawing; mm. */
-export type TileGrid = {
+export type TileGrid = SheetEdges & {
   /** Printed area of one sheet. */
   readonly use: { readonly width: number; readonly height: number };
   /** From one sheet's left (top) edge to the next one's. */
@@ -14,23 +17,21 @@ export type TileGrid = {
   readonly columns: number;
 };
 
-/** How many printed areas of length `use`, sharing `overlap`, cover a length; mm, at least one. */
-export const tilesAlong = (length: number, use: number): number =>
-  Math.max(1, Math.ceil((length - overlap) / (use - overlap) - 1e-9));
-
 /** The sheets of a paper that cover a drawing of this size, blank ones counted. */
 export function tileGrid(
   drawing: { readonly width: number; readonly height: number },
   paper: Paper,
+  { margin, overlap }: SheetEdges = plainOrder,
 ): TileGrid {
-  const use = {
-    width: paper.width - 2 * printerMargin,
-    height: paper.height - 2 * printerMargin,
-  };
+  const use = { width: paper.width - 2 * margin, height: paper.height - 2 * margin };
+  const along = (length: number, area: number): number =>
+    Math.max(1, Math.ceil((length - overlap) / (area - overlap) - 1e-9));
   return {
+    margin,
+    overlap,
     use,
     step: { x: use.width - overlap, y: use.height - overlap },
-    rows: tilesAlong(drawing.height, use.height),
-    columns: tilesAlong(drawing.width, use.width),
+    rows: along(drawing.height, use.height),
+    columns: along(drawing.width, use.width),
   };
 }

@@ -5,6 +5,7 @@ import type { Mark } from '#shared/exports/drawing.ts';
 import { tilesJob } from '#shared/exports/tiles.ts';
 import { presetOrder } from '#shared/sheets/print-order.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
+import { sheetSides } from '#shared/sheets/tile-plan.ts';
 import { speak } from '#shared/units/speak.ts';
 import { middleBody } from '../support/middle-body.ts';
 
@@ -27,13 +28,16 @@ describe('the sheets of a gown', () => {
   it('each name themselves, their neighbours and the draft', () => {
     plan.tiles.forEach((tile, i) => {
       const said = texts(job.pages[i + 1] ?? []);
-      const { left, right, above, below } = tile.neighbours;
       expect(said).toContain(tile.name);
-      expect(said.filter((each) => each.startsWith('trim')).length).toBe(
-        [left, above].filter((each) => each).length,
-      );
-      for (const each of [right, below].filter((name) => name)) {
-        expect(said).toContain(`glue under ${each}`);
+      for (const side of sheetSides) {
+        const neighbour = tile.neighbours[side];
+        if (neighbour === undefined) continue;
+        const glued =
+          side === 'right' || side === 'below'
+            ? `glue under ${neighbour}`
+            : `trim, lay on ${neighbour}`;
+        const expected = tile.glued.includes(side) ? glued : `beside ${neighbour}, no glue`;
+        expect(said).toContain(expected);
       }
       expect(said).toContain(`draft ${draft.number} · sheet ${i + 1} of ${plan.tiles.length}`);
     });
@@ -45,14 +49,14 @@ describe('the sheets of a gown', () => {
   });
 
   it('carry each piece with its name, its cut and the grain', () => {
+    const onSheets = job.pages.slice(1).flatMap(texts);
     for (const piece of draft.pieces) {
-      const said = texts(job.drawings.find((each) => each.name === piece.name)?.marks ?? []).join(
-        ' ',
-      );
-      expect(said).toContain(piece.title);
-      expect(said).toContain(piece.cut);
-      expect(said).toContain('grain');
-      if (piece.edges.some((each) => each.kind === 'fold')) expect(said).toContain('place on fold');
+      const drawn = texts(job.drawings.find((each) => each.name === piece.name)?.marks ?? []);
+      expect(onSheets.join(' ')).toContain(piece.title);
+      expect(onSheets.join(' ')).toContain(piece.cut);
+      expect(drawn).toContain('grain');
+      if (piece.edges.some((each) => each.kind === 'fold'))
+        expect(drawn).toContain('place on fold');
     }
   });
 });

@@ -3,7 +3,8 @@ import { tilesPdf } from '#server/features/print/tiles-pdf.ts';
 import { testSquares } from '#shared/exports/cover.ts';
 import { presetOrder } from '#shared/sheets/print-order.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
-import { overlap, printerMargin } from '#shared/sheets/tile-grid.ts';
+import { papers as papersByName } from '#shared/sheets/papers.ts';
+import { printerMargin } from '#shared/sheets/tile-grid.ts';
 import { oblong } from '../support/paper-pieces.ts';
 import { paperDraft } from '../support/paper-draft.ts';
 import { type Picture, inkIn, renderPart, strokesAlong } from '../support/pgm.ts';
@@ -34,13 +35,19 @@ describe.each(papers)('on %s, printed and measured', (paper) => {
   const print = () => tilesPdf(draft, presetOrder(paper, 'bodice-toile'), 'cm');
 
   it('the 100 mm square is 100.0 mm both ways within a tenth', async () => {
-    const { across, down } = await sidesOf(await print(), testSquares.metric);
+    const { across, down } = await sidesOf(
+      await print(),
+      testSquares({ ...papersByName[paper], margin: 10 }).metric,
+    );
     expect(Math.abs(across - 100)).toBeLessThanOrEqual(0.1);
     expect(Math.abs(down - 100)).toBeLessThanOrEqual(0.1);
   });
 
   it('the 4 in square is 101.6 mm both ways within a tenth', async () => {
-    const { across, down } = await sidesOf(await print(), testSquares.inch);
+    const { across, down } = await sidesOf(
+      await print(),
+      testSquares({ ...papersByName[paper], margin: 10 }).inch,
+    );
     expect(Math.abs(across - 101.6)).toBeLessThanOrEqual(0.1);
     expect(Math.abs(down - 101.6)).toBeLessThanOrEqual(0.1);
   });
@@ -101,7 +108,7 @@ describe.each(papers)('two neighbouring %s sheets, trimmed and glued on their st
     let apart = 0;
     // Past the match marks and the small print, only the piece's own lines stand in the strip.
     for (let y = 25; y < 700; y += 1) {
-      for (let x = 45; x < overlap * 10 - 5; x += 1) {
+      for (let x = 45; x < plan.overlap * 10 - 5; x += 1) {
         apart = Math.max(apart, Math.abs(first.grey(from + x, y) - second.grey(x, y)));
       }
     }

@@ -41,7 +41,7 @@ describe('the sheets of a drawing', () => {
     expect(tiles.find((each) => each.name === 'A1')?.inside).toBeUndefined();
   });
 
-  it('name as neighbours only sheets that are printed', () => {
+  it('name as neighbours only sheets that are printed, and glue only where a piece runs on', () => {
     const layout = {
       width: 360,
       height: 530,
@@ -53,7 +53,8 @@ describe('the sheets of a drawing', () => {
       ['A2', { left: 'A1' }],
       ['B1', { above: 'A1' }],
     ]);
-    expect(plan.glueSeams).toBe(2);
+    expect(plan.tiles.map((each) => each.glued)).toEqual([['below'], [], ['above']]);
+    expect(plan.glueSeams).toBe(1);
   });
 
   it('need no sheet for a line that an earlier sheet shows in its glue strip', () => {

@@ -1,0 +1,7 @@
+/** The maker no longer waits for the plan. */
+export class PlanCancelledError extends Error {
+  constructor() {
+    super('The plan was cancelled.');
+    this.name = 'PlanCancelledError';
+  }
+}
