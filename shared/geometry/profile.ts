@@ -153,6 +153,10 @@ function widthRange(piece: ProfilePiece): readonly [number, number] {
   return [Math.min(...widths), Math.max(...widths)];
 }
 
+/** Greatest width of a profile between its ends. */
+export const widest = (profile: Profile): number =>
+  Math.max(...profile.map((piece) => widthRange(piece)[1]));
+
 const endSlope = (near: number, next: number): number => {
   const guess = 1.5 * near - 0.5 * next;
   return guess * near <= 0 ? 0 : Math.abs(guess) > 3 * Math.abs(near) ? 3 * near : guess;

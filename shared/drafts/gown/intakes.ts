@@ -9,6 +9,7 @@ import {
   positiveSpline,
   profilePath,
   slopeAt,
+  widest,
   xAt,
 } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
@@ -47,7 +48,8 @@ const clothBetween = 8;
  * @throws DraftingError naming the girths to measure again.
  */
 export function refuseCrowdedIntakes(half: Half): void {
-  const widest = Math.max(half.gap.underbust, half.gap.seam, half.gap.waist);
+  // Between its levels a seam may swell a little over them.
+  const most = Math.max(widest(princessBelow(half).gap), half.gap.waist);
   const bounds = dartShares(half.dartCount).flatMap((share, k) => {
     const axis = half.dartAxes[k] ?? half.axis;
     return [axis - (share * widest) / 2, axis + (share * widest) / 2];
@@ -58,11 +60,11 @@ export function refuseCrowdedIntakes(half: Half): void {
     xAt(half.line, half.heights.waist),
   );
   // A princess seam takes the whole intake about its own axis.
-  const places = [0, Math.min(half.axis - widest / 2, bounds[0] ?? 0), ...bounds.slice(1), side];
+  const places = [0, Math.min(half.axis - most / 2, bounds[0] ?? 0), ...bounds.slice(1), side];
   const crowded = places.some(
     (x, i) => i > 0 && i % 2 === 1 && x - (places[i - 1] ?? 0) < clothBetween,
   );
-  const overlong = half.axis + widest / 2 > side - clothBetween;
+  const overlong = half.axis + most / 2 > side - clothBetween;
   if (!crowded && !overlong) return;
   throw new DraftingError([
     {
@@ -70,7 +72,7 @@ export function refuseCrowdedIntakes(half: Half): void {
       severity: 'error',
       field: 'card.waistGirth',
       with: ['card.bustGirth', 'card.underbustGirth', 'card.hipGirth', 'card.waistSeamGirth'],
-      said: said`The ${half.side} would have to take in ${mm(widest)} in a half and no cloth is left beside the darts. Measure bust, under-bust, waist and hip again, or reduce the ease taken off.`,
+      said: said`The ${half.side} would have to take in ${mm(most)} in a half and no cloth is left beside the darts. Measure bust, under-bust, waist and hip again, or reduce the ease taken off.`,
     },
   ]);
 }
