@@ -61,8 +61,13 @@ const order: readonly StyleLength[] = [
   'heelHeight',
   'kneeLevel',
   'topDrop',
-  ...styleLengths.filter((key) => !['heelHeight', 'kneeLevel', 'topDrop'].includes(key)),
+  ...styleLengths.filter(
+    (key) => !['heelHeight', 'kneeLevel', 'topDrop', 'hemSweep', 'train'].includes(key),
+  ),
 ];
+
+/** Bounds of these hang on the seams there are, so on the shaping too. */
+const hems: readonly StyleLength[] = ['hemSweep', 'train'];
 
 const placed = ({ min, max }: Limit, at: number): number => min + (max - min) * at;
 
@@ -77,20 +82,27 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   const fits = (style: StyleCard): boolean =>
     checkStyle(style, body, levels).every(({ severity }) => severity === 'warning');
   const { shaping: wished, ...named } = draws.named;
-  let style: StyleCard = fits(eased) ? eased : {};
+  // Shaping first: how wide a hem may be hangs on the seams it leaves.
+  let style: StyleCard = {
+    ...(fits(eased) ? eased : {}),
+    ...(wished === undefined ? {} : { shaping: wished }),
+  };
   for (const [choice, name] of Object.entries(named)) {
     const more = { ...style, ...(name === undefined ? {} : { [choice]: name }) };
     // Choices that exclude each other are refused by name; what is drawn keeps the first of the two.
     if (fits(more)) style = more;
   }
-  for (const key of order) {
+  const put = (key: StyleLength): void => {
     const choice = given(key);
-    if (choice === undefined) continue;
+    if (choice === undefined) return;
     style = { ...style, [key]: placed(styleLimits(body, levels, style)[key], choice.at) };
-  }
+  };
+  order.forEach(put);
   const reaches = wished === 'darts' && dartsReach(style, body, levels);
   const shaping = wished === 'darts' && !reaches ? 'princess' : wished;
-  return shaping === undefined ? style : { ...style, shaping };
+  if (shaping !== undefined) style = { ...style, shaping };
+  hems.forEach(put);
+  return style;
 }
 
 /** Whether darts can shape this bust under either preset: what the draft refuses is not a style to draw. */
