@@ -52,7 +52,7 @@ export function refuseCrowdedIntakes(half: Half): void {
   const most = Math.max(widest(princessBelow(half).gap), half.gap.waist);
   const bounds = dartShares(half.dartCount).flatMap((share, k) => {
     const axis = half.dartAxes[k] ?? half.axis;
-    return [axis - (share * widest) / 2, axis + (share * widest) / 2];
+    return [axis - (share * most) / 2, axis + (share * most) / 2];
   });
   const side = Math.min(
     xAt(half.line, half.heights.underbust),

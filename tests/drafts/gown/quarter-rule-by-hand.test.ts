@@ -6,8 +6,8 @@ import type { LevelName, Piece, Side } from '#shared/drafting/piece.ts';
 import type { StyleCard } from '#shared/drafts/gown/style-card.ts';
 import { flareRadius } from '#shared/drafts/gown/flare-plan.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
-import { pathCrossings, pathLength } from '#shared/geometry/curve.ts';
-import { point } from '#shared/geometry/point.ts';
+import { pathCrossings, pathLength, stationAtLength } from '#shared/geometry/curve.ts';
+import { cross, distance, type Point, point, subtract } from '#shared/geometry/point.ts';
 import { speak } from '#shared/units/speak.ts';
 
 /*
@@ -68,6 +68,11 @@ function flatWidth(side: Side, level: LevelName): number {
     .flatMap(({ from, to }) => [from.x, to.x]);
   return Math.max(...ends) - Math.min(...ends);
 }
+
+/** Radius of the circle through three points: product of the sides over four times the area. */
+const radiusThrough = (a: Point, b: Point, c: Point): number =>
+  (distance(a, b) * distance(b, c) * distance(c, a)) /
+  (2 * Math.abs(cross(subtract(b, a), subtract(c, a))));
 
 const tenth = (found: number, wanted: number): void => {
   expect(Math.abs(found - wanted)).toBeLessThanOrEqual(0.1);
@@ -135,9 +140,12 @@ describe('the gown drawn by the plain quarter rule', () => {
 
   it('cuts a full-circle flare for the 30 inch knee at 30 / 2 pi', () => {
     tenth(flareRadius(inches(30), 1), inches(30 / (2 * Math.PI)));
-    const flare = draft.pieces.find(({ name }) => name === 'flare-front');
-    const [from] = flare?.edges.find(({ name }) => name.startsWith('knee'))?.path ?? [];
-    tenth(Math.hypot(from?.from.x ?? NaN, from?.from.y ?? NaN), inches(30 / (2 * Math.PI)));
+    const knee = pieceNamed('flare-front').edges.find(({ name }) => name.startsWith('knee'));
+    const path = knee?.path ?? [];
+    const [a, b, c] = [0, 0.5, 1].map(
+      (share) => stationAtLength(path, share * pathLength(path))?.at,
+    );
+    tenth(a && b && c ? radiusThrough(a, b, c) : NaN, inches(30 / (2 * Math.PI)));
   });
 
   it('holds the zip extension outside the seam line: no girth counts it', () => {
