@@ -1,13 +1,13 @@
-import { draftGownRequest } from '#shared/api/drafts.ts';
+import { draftGarment } from '#shared/api/drafts.ts';
 import { answerOrders } from '../http/thread-work.ts';
 import type { DraftOrder } from './draft-order.ts';
-import { draftOrRefuse } from './draft-or-refuse.ts';
+import { draftAnyOrRefuse } from './draft-or-refuse.ts';
 import { drawn } from './drawing.ts';
 import { redrawingOf } from './redrawing.ts';
 
 /** Written to its last letter here: a draft's JSON takes as long to write as some gowns to draw. */
-function replyTo(inputs: Parameters<typeof draftOrRefuse>[0]): Uint8Array {
-  const draft = draftGownRequest.reply.schema.parse(draftOrRefuse(inputs, 'cm'));
+function replyTo(inputs: Parameters<typeof draftAnyOrRefuse>[0]): Uint8Array {
+  const draft = draftGarment.reply.schema.parse(draftAnyOrRefuse(inputs, 'cm'));
   return new TextEncoder().encode(JSON.stringify(draft));
 }
 

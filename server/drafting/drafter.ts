@@ -1,5 +1,5 @@
 import type { DrawnPieces, Gown, GownContent } from '#shared/api/gowns.ts';
-import type { DraftInputs } from '#shared/engine/draft.ts';
+import type { DraftedInputs } from '#shared/engine/drafted.ts';
 import { firstComeQueue, type Turn } from '../http/first-come-queue.ts';
 import { openThread } from '../http/worker-thread.ts';
 import { type Limits, workerPaths } from '../settings.ts';
@@ -9,7 +9,7 @@ import type { Drawing } from './drawing.ts';
 /** Drafts in a thread of its own, so that everything else is answered meanwhile; each waits its turn. */
 export type Drafter = {
   /** A draft as the contract's JSON; throws RefusalError where it cannot be drawn or too many wait. */
-  readonly reply: (inputs: DraftInputs, turn: Turn) => Promise<Uint8Array>;
+  readonly reply: (inputs: DraftedInputs, turn: Turn) => Promise<Uint8Array>;
   /** What a gown keeps; none where it is incomplete or cannot be drawn. */
   readonly drawing: (content: GownContent, turn: Turn) => Promise<Drawing | undefined>;
   /** What the current engine would draw otherwise. */

@@ -1,10 +1,9 @@
 import { type InputFile, inputFiles, jsonSchema } from '#shared/api/json-schema.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
-import type { Draft } from '#shared/engine/draft.ts';
-import { draftGown } from '#shared/engine/draft-gown.ts';
+import { type Drafted, draftAny } from '#shared/engine/drafted.ts';
 import { draftJson, proofJson } from '#shared/exports/json.ts';
 import { piecesSvg } from '#shared/exports/svg.ts';
-import { presetOrder } from '#shared/sheets/print-order.ts';
+import { plainOrder } from '#shared/sheets/print-order.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
 import { speak } from '#shared/units/speak.ts';
 import { tilesPdf } from '../features/print/tiles-pdf.ts';
@@ -13,17 +12,22 @@ import {
   RefusedError,
   endOf,
   ends,
+  readGarment,
   readOptions,
   readOrder,
   refuse,
   refuseProblems,
-} from './draft-order.ts';
+} from './command-order.ts';
 import { writeFiles } from './write-files.ts';
 
-async function draw({ inputs, paper, unit }: Order): Promise<{ draft: Draft; tiles: Uint8Array }> {
+async function draw({
+  inputs,
+  paper,
+  unit,
+}: Order): Promise<{ draft: Drafted; tiles: Uint8Array }> {
   try {
-    const draft = draftGown(inputs);
-    return { draft, tiles: await tilesPdf(draft, presetOrder(paper, 'whole-gown'), unit) };
+    const draft = draftAny(inputs);
+    return { draft, tiles: await tilesPdf(draft, { ...plainOrder, paper }, unit) };
   } catch (error) {
     if (error instanceof DraftingError) return refuseProblems(error.problems, unit);
     if (error instanceof SheetLimitError) return refuseProblems([error.problem], unit);
@@ -41,15 +45,15 @@ function write(folder: string, files: Readonly<Record<string, string | Uint8Arra
 
 const isInputFile = (name: string): name is InputFile => inputFiles.some((each) => each === name);
 
-function tellSchema(name: string): void {
+function tellSchema(name: string, garment: string): void {
   if (!isInputFile(name)) return refuse(`--schema must be card, style or rules; it is “${name}”.`);
-  console.log(JSON.stringify(jsonSchema(name), undefined, 2));
+  console.log(JSON.stringify(jsonSchema(name, readGarment(garment)), undefined, 2));
 }
 
 async function main(args: readonly string[]): Promise<number> {
   const options = readOptions(args);
   if (options.schema !== undefined) {
-    tellSchema(options.schema);
+    tellSchema(options.schema, options.garment);
     return ends.proven;
   }
   const order = readOrder(options);

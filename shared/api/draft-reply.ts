@@ -7,7 +7,16 @@ import {
 } from '../body/card.ts';
 import { handleKeys } from '../drafting/construction.ts';
 import { levelNames, type LevelName } from '../drafting/piece.ts';
+import type { BodiceBlockDraft } from '../engine/draft-bodice-block.ts';
+import type { SkirtBlockDraft } from '../engine/draft-skirt-block.ts';
 import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
+import {
+  bodiceBlockCard,
+  bodiceBlockStyle,
+  skirtBlockCard,
+  skirtBlockStyle,
+} from './block-style.ts';
 import { measureCard } from './card.ts';
 import { pathSchema, pointSchema } from './geometry-reply.ts';
 import { pieceSchema } from './piece-reply.ts';
@@ -28,6 +37,11 @@ const rulesUsed = () =>
 const heights = () =>
   Object.fromEntries(levelNames.map((level) => [level, z.number()])) as {
     [L in LevelName]: z.ZodNumber;
+  };
+
+const someHeights = () =>
+  Object.fromEntries(levelNames.map((level) => [level, z.exactOptional(z.number())])) as {
+    [L in LevelName]: z.ZodExactOptional<z.ZodNumber>;
   };
 
 const bodyLevels = z.object({
@@ -59,16 +73,18 @@ const step = z.object({
 
 const edgeRef = z.object({ piece: z.string(), edge: z.string() });
 
+const wanted = z.array(
+  z.object({
+    level: z.enum(levelNames),
+    body: z.exactOptional(z.number()),
+    ease: z.exactOptional(z.number()),
+    wanted: z.number(),
+    estimated: z.boolean(),
+  }),
+);
+
 const construction = z.object({
-  wanted: z.array(
-    z.object({
-      level: z.enum(levelNames),
-      body: z.exactOptional(z.number()),
-      ease: z.exactOptional(z.number()),
-      wanted: z.number(),
-      estimated: z.boolean(),
-    }),
-  ),
+  wanted,
   chestSide: z.object({ front: z.number(), back: z.number() }),
   topOpenings: z.array(
     z.object({
@@ -89,29 +105,76 @@ const handle = z.object({
   perMillimetre: z.number(),
 });
 
+const completed = z.object({
+  measures: z.object(measures()),
+  estimated: z.object(rulesUsed()),
+});
+
+/** What every draft tells, whatever its garment. */
+const drafted = {
+  engine: z.string(),
+  number: z.string(),
+  body: completed,
+  bodyLevels,
+  pieces: z.array(pieceSchema),
+  steps: z.array(step),
+  warnings: z.array(problemSchema),
+  proof: proofSchema,
+};
+
 /** A gown drafted, finished and proven, as it goes over the wire and into `draft.json`. */
 export const draftSchema = z.object({
   garment: z.literal('gown'),
-  engine: z.string(),
-  number: z.string(),
+  ...drafted,
   inputs: z.object({
     garment: z.literal('gown').optional(),
     card: measureCard,
     style: styleCard,
     rules: houseRules,
   }),
-  body: z.object({
-    measures: z.object(measures()),
-    estimated: z.object(rulesUsed()),
-  }),
-  bodyLevels,
   style: gownStyle,
   levels: z.object(heights()),
-  pieces: z.array(pieceSchema),
-  steps: z.array(step),
   handles: z.array(handle),
   construction,
   walking: z.object({ step: z.number(), caution: z.boolean(), said: saidSchema }),
-  warnings: z.array(problemSchema),
-  proof: proofSchema,
 }) satisfies z.ZodType<Draft>;
+
+const block = {
+  ...drafted,
+  levels: z.object(someHeights()),
+  wanted,
+  bustPoint: z.exactOptional(pointSchema),
+};
+
+/** A bodice block, as a gown's draft. */
+const bodiceBlockDraft = z.object({
+  garment: z.literal('bodice-block'),
+  ...block,
+  inputs: z.object({
+    garment: z.literal('bodice-block'),
+    card: measureCard,
+    style: bodiceBlockCard,
+    rules: houseRules,
+  }),
+  style: bodiceBlockStyle,
+}) satisfies z.ZodType<BodiceBlockDraft>;
+
+/** A skirt block, as a gown's draft. */
+const skirtBlockDraft = z.object({
+  garment: z.literal('skirt-block'),
+  ...block,
+  inputs: z.object({
+    garment: z.literal('skirt-block'),
+    card: measureCard,
+    style: skirtBlockCard,
+    rules: houseRules,
+  }),
+  style: skirtBlockStyle,
+}) satisfies z.ZodType<SkirtBlockDraft>;
+
+/** Whatever was drafted, told apart by its garment. */
+export const draftedSchema = z.discriminatedUnion('garment', [
+  draftSchema,
+  bodiceBlockDraft,
+  skirtBlockDraft,
+]) satisfies z.ZodType<Drafted>;

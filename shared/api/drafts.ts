@@ -1,13 +1,13 @@
 import { endpoint } from './endpoint.ts';
-import { draftSchema } from './draft-reply.ts';
+import { draftedSchema } from './draft-reply.ts';
 import { draftRequest, printRequest, sheetsRequest } from './requests.ts';
 
-/** A gown drafted and proven, as JSON. */
-export const draftGownRequest = endpoint({
+/** A gown or a block drafted and proven, as JSON. */
+export const draftGarment = endpoint({
   method: 'POST',
   path: '/api/drafts',
   body: draftRequest,
-  reply: { kind: 'json', schema: draftSchema },
+  reply: { kind: 'json', schema: draftedSchema },
 });
 
 /** True-scale pages to glue together. */

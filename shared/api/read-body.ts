@@ -3,7 +3,7 @@ import { coreMeasures, furtherMeasures, type MeasureKey } from '../body/card.ts'
 import { measureGuide } from '../body/measure-guide.ts';
 import { styleLabels } from '../drafts/gown/style-labels.ts';
 import { styleKeys } from '../drafts/gown/style-limits.ts';
-import type { DraftInputs } from '../engine/draft.ts';
+import { type DraftedInputs, garments } from '../engine/drafted.ts';
 import { sheetNames } from '../sheets/print-order.ts';
 import { selections } from '../sheets/selection.ts';
 import { error, type Problem } from '../units/problem.ts';
@@ -127,6 +127,10 @@ function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
   if (issue.code === 'invalid_union' && unions[field] !== undefined) {
     return said`${name} must be ${unions[field]}.`;
   }
+  if (issue.code === 'invalid_union' && field.endsWith('garment')) {
+    const choices = garments.map((each) => `“${each}”`).join(', ');
+    return said`The garment must be one of ${choices}; left out, it is a gown.`;
+  }
   if (issue.code === 'invalid_value') {
     const choices = quoted(issue.values);
     return said`${name} must be one of ${choices}.`;
@@ -173,7 +177,7 @@ export function readBody<S extends z.ZodType>(schema: S, value: unknown): Readin
  */
 export function readInputs(
   value: unknown,
-): { readonly inputs: DraftInputs } | { readonly problems: readonly Problem[] } {
+): { readonly inputs: DraftedInputs } | { readonly problems: readonly Problem[] } {
   const reading = readBody(draftRequest, value);
   return 'value' in reading ? { inputs: reading.value } : reading;
 }

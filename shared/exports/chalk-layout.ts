@@ -1,6 +1,6 @@
 import { flatten } from '../geometry/curve.ts';
 import type { Piece, Side } from '../drafting/piece.ts';
-import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
 import type { Paper } from '../sheets/papers.ts';
 import { printerMargin } from '../sheets/tile-grid.ts';
 import { type OnPage, quarter } from './chalk-half.ts';
@@ -42,7 +42,7 @@ export type ChalkLayout = {
 /** A half before it has a place on the page. */
 export type Bare = Pick<Half, 'title' | 'pieces' | 'points'>;
 
-function halfOf(draft: Draft, side: Side, first: number): Bare {
+function halfOf(draft: Drafted, side: Side, first: number): Bare {
   const pieces = draft.pieces.filter((each) => each.side === side && each.part !== 'flare');
   const title = side === 'front' ? 'Front, from the fold' : 'Back, from centre back';
   return { title, pieces, points: chalkPoints(pieces, draft.levels, first) };
@@ -54,16 +54,17 @@ const widthOf = ({ points }: Bare): number =>
 /** The room inside a half: below its darts, above the knee seam, left of its side seam. */
 function insideOf(
   half: Bare,
-  draft: Draft,
+  draft: Drafted,
   x: number,
   yOf: (y: number) => number,
 ): readonly Column[] {
   const middle = half.pieces.find((each) => each.part === 'middle');
   const side = middle?.edges.find((each) => each.kind === 'side');
-  if (!middle || !side) return [];
+  const { 'top-hip': topHip, 'knee-seam': knee, hem } = draft.levels;
+  const until = knee ?? hem;
+  if (!middle || !side || topHip === undefined || until === undefined) return [];
   const legs = middle.darts.flatMap((dart) => [...dart.centreLeg, ...dart.sideLeg]);
-  const from = Math.max(draft.levels['top-hip'], ...legs.map((each) => each.to.y));
-  const until = draft.levels['knee-seam'];
+  const from = Math.max(topHip, ...legs.map((each) => each.to.y));
   const reach = flatten(side.path, 1).filter((each) => each.y >= from && each.y <= until + 5);
   const room = (to: number): number =>
     Math.min(...reach.filter((each) => each.y <= to + 5).map((each) => each.x)) * quarter - 9;
@@ -101,7 +102,7 @@ function columnsBetween(from: number, to: number, y: number, bottom: number): re
 }
 
 /** Front and back with their points, numbered on from one to the other. */
-export function chalkHalves(draft: Draft): readonly [front: Bare, back: Bare] {
+export function chalkHalves(draft: Drafted): readonly [front: Bare, back: Bare] {
   const front = halfOf(draft, 'front', 1);
   return [front, halfOf(draft, 'back', front.points.length + 1)];
 }
@@ -113,7 +114,7 @@ export function chalkHalves(draft: Draft): readonly [front: Bare, back: Bare] {
  * knee is drawn shorter; the figures stay.
  */
 export function layChalkSheet(
-  draft: Draft,
+  draft: Drafted,
   [front, back]: readonly [Bare, Bare],
   paper: Paper,
   bottom: number,
@@ -123,8 +124,8 @@ export function layChalkSheet(
   const edge = paper.width - printerMargin;
   const heights = [...front.points, ...back.points].map((each) => each.at.y);
   const top = Math.min(...heights);
-  const { hip } = draft.levels;
   const lowest = Math.max(...heights);
+  const { hip = lowest } = draft.levels;
   const plain = (y: number): number => drawingsTop + (y - top) * quarter;
   const below = Math.min(1, (bottom - reserve - plain(hip)) / (plain(lowest) - plain(hip)));
   const yOf = (y: number): number =>

@@ -11,7 +11,7 @@ import type { Path } from '../geometry/path.ts';
 import { type Point, distance, dot, point, subtract, turnRight, unit } from '../geometry/point.ts';
 import { type Edge, type LevelName, type Piece, levelNames } from '../drafting/piece.ts';
 
-export type Levels = { readonly [L in LevelName]: number };
+export type Levels = { readonly [L in LevelName]?: number };
 
 /** A place to chalk: how far from the centre line, and how far from a level (positive below it); mm. */
 export type ChalkPoint = {
@@ -33,19 +33,20 @@ const hollow = 4;
 /** Points along one line stand at least so far from each other, mm. */
 const apart = 15;
 
-/** Levels that are lines on the table: the chest and the hem are not struck. */
-export const struckLevels: readonly LevelName[] = levelNames.filter(
-  (each) => each !== 'chest' && each !== 'hem',
-);
+/** Levels that are lines on the table with their heights: the chest and the hem are not struck. */
+export const struckLevels = (levels: Levels): readonly (readonly [LevelName, number])[] =>
+  levelNames.flatMap((level) => {
+    const y = levels[level];
+    return y === undefined || level === 'chest' || level === 'hem' ? [] : [[level, y] as const];
+  });
 
 const spoken = (name: string): string => name.replaceAll('-', ' ');
 
-/** The level nearest to a height. */
-function nearestLevel(y: number, levels: Levels): LevelName {
-  return struckLevels.reduce((best, each) =>
-    Math.abs(levels[each] - y) < Math.abs(levels[best] - y) - 1e-9 ? each : best,
+/** The level nearest to a height, with its own. */
+const nearestLevel = (y: number, levels: Levels): readonly [LevelName, number] =>
+  struckLevels(levels).reduce((best, each) =>
+    Math.abs(each[1] - y) < Math.abs(best[1] - y) - 1e-9 ? each : best,
   );
-}
 
 type Found = { readonly what: string; readonly at: Point; readonly aside: Point };
 
@@ -57,8 +58,8 @@ const beside = (tangent: Point): Point => {
 
 /** Lengths along a path at which it crosses the levels. */
 const onLevels = (path: Path, levels: Levels): readonly number[] =>
-  struckLevels.flatMap((level) =>
-    pathCrossings(path, point(0, levels[level]), point(1, levels[level]))
+  struckLevels(levels).flatMap(([, y]) =>
+    pathCrossings(path, point(0, y), point(1, y))
       .slice(0, 1)
       .map((each) => lengthBefore(path, each)),
   );
@@ -151,13 +152,13 @@ export function chalkPoints(
   const kept: ChalkPoint[] = [];
   for (const { what, at, aside } of pieces.flatMap((each) => pointsOf(each, levels))) {
     if (kept.some((each) => distance(each.at, at) < same)) continue;
-    const level = nearestLevel(at.y, levels);
+    const [level, height] = nearestLevel(at.y, levels);
     kept.push({
       number: first + kept.length,
       what,
       at,
       level,
-      offLevel: at.y - levels[level],
+      offLevel: at.y - height,
       aside,
     });
   }

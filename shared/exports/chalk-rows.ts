@@ -1,7 +1,5 @@
-import { endOf, pathLength, startOf } from '../geometry/curve.ts';
-import { distance, point } from '../geometry/point.ts';
 import type { Piece } from '../drafting/piece.ts';
-import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
 import { formatInches, formatLength } from '../units/format-length.ts';
 import type { Unit } from '../units/said.ts';
 import { levelLetters } from './chalk-half.ts';
@@ -20,12 +18,12 @@ export const chalked = (mm: number, unit: Unit): string =>
   unit === 'cm' ? formatLength(mm, 'cm') : formatInches(mm, 8);
 
 /** Levels from the waist, which is chalked first. */
-export function levelRows(draft: Draft, unit: Unit): readonly Row[] {
-  const { levels } = draft;
+export function levelRows(draft: Drafted, unit: Unit): readonly Row[] {
+  const { levels, bodyLevels } = draft;
   return [
     { kind: 'heading', text: `Levels, ${unit} from the waist` },
-    ...struckLevels.map((level): Row => {
-      const off = levels[level] - levels.waist;
+    ...struckLevels(levels).map(([level, y]): Row => {
+      const off = y - bodyLevels.waist;
       return {
         kind: 'pair',
         name: `${levelLetters[level]}  ${levelTitles[level]}`,
@@ -56,76 +54,8 @@ export const pointRows = (
   }),
 ];
 
-type Sector = {
-  readonly title: string;
-  readonly inner: number;
-  readonly outer: number;
-  readonly knee: number;
-  readonly hem: number;
-  readonly chord: number;
-};
-
-/** A flare piece as it is struck with chalk on a string; no answer for a piece without knee and hem. */
-function sectorOf(piece: Piece): readonly Sector[] {
-  const hem = piece.edges.find((each) => each.kind === 'hem');
-  const knee = piece.edges.find((each) => each.name.startsWith('knee'));
-  const [from, to] = hem ? [startOf(hem.path), endOf(hem.path)] : [];
-  const start = knee ? startOf(knee.path) : undefined;
-  if (!hem || !knee || !from || !to || !start) return [];
-  const apex = point(0, 0);
-  return [
-    {
-      title: piece.title,
-      inner: distance(apex, start),
-      outer: distance(apex, from),
-      knee: pathLength(knee.path),
-      hem: pathLength(hem.path),
-      chord: distance(from, to),
-    },
-  ];
-}
-
-/** The flare: two arcs struck from one point, then how far along them each piece goes. */
-export function flareRows(pieces: readonly Piece[], unit: Unit): readonly Row[] {
-  const pair = (name: string, mm: number): Row => ({
-    kind: 'pair',
-    name,
-    value: chalked(mm, unit),
-  });
-  const sectors = pieces.flatMap(sectorOf);
-  const near = (a: Sector, b: Sector): boolean =>
-    Math.abs(a.hem - b.hem) < 0.1 && Math.abs(a.inner - b.inner) < 0.1;
-  const different = sectors.filter(
-    (each, i) => sectors.findIndex((other) => near(each, other)) === i,
-  );
-  return different.flatMap((sector, i): readonly Row[] => {
-    const before = different[i - 1];
-    const same = sectors
-      .filter((each) => near(each, sector))
-      .map((each) => each.title.replace('Flare, ', ''));
-    const struck: readonly Row[] =
-      before &&
-      Math.abs(before.inner - sector.inner) < 0.1 &&
-      Math.abs(before.outer - sector.outer) < 0.1
-        ? []
-        : [
-            { kind: 'heading', text: `Flare, struck from one point, ${unit}` },
-            pair('radius to the knee seam', sector.inner),
-            pair('length, knee to hem', sector.outer - sector.inner),
-            pair('radius to the hem', sector.outer),
-          ];
-    return [
-      ...struck,
-      { kind: 'note', text: same.join('; ') },
-      pair('along the knee seam', sector.knee),
-      pair('along the hem', sector.hem),
-      pair('straight across the hem', sector.chord),
-    ];
-  });
-}
-
 /** What the lines are, and what is added outside them. */
-export function allowanceRows(draft: Draft, unit: Unit): readonly Row[] {
+export function allowanceRows(draft: Drafted, unit: Unit): readonly Row[] {
   const { allowance } = draft.inputs.rules;
   const pair = (name: string, mm: number): Row => ({
     kind: 'pair',

@@ -1,4 +1,4 @@
-import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
 import { type Paper, type PaperName, papers } from '../sheets/papers.ts';
 import { printerMargin } from '../sheets/tile-grid.ts';
 import type { Unit } from '../units/said.ts';
@@ -19,9 +19,9 @@ export type ChalkChoice = { readonly paper: PaperName; readonly unit: Unit };
 const cautionSize = 2.4;
 
 /** Levels as ticks at both edges of a half, and their letters before the front. */
-function levelTicks(draft: Draft, { front, back, yOf }: ChalkLayout): readonly Mark[] {
-  return struckLevels.flatMap((level) => {
-    const y = yOf(draft.levels[level]);
+function levelTicks(draft: Drafted, { front, back, yOf }: ChalkLayout): readonly Mark[] {
+  return struckLevels(draft.levels).flatMap(([level, height]) => {
+    const y = yOf(height);
     const ticks = [front, back].flatMap(({ x, right }) => [
       stroke(x, y, x + 2.5, y),
       stroke(right - 12, y, right, y),
@@ -33,7 +33,7 @@ function levelTicks(draft: Draft, { front, back, yOf }: ChalkLayout): readonly M
   });
 }
 
-function sheet(draft: Draft, paper: Paper, unit: Unit): readonly Mark[] {
+function sheet(draft: Drafted, paper: Paper, unit: Unit): readonly Mark[] {
   const left = printerMargin;
   const width = paper.width - 2 * printerMargin;
   const cautions = wrap(chalkCautions(unit), cautionSize, width).length * cautionSize * 1.32;
@@ -65,7 +65,7 @@ function sheet(draft: Draft, paper: Paper, unit: Unit): readonly Mark[] {
  * line and from its level, the flare as radius and length; one page at quarter scale, enough to draft
  * straight onto cloth with tape and chalk.
  */
-export function chalkSheetJob(draft: Draft, { paper, unit }: ChalkChoice): PrintJob {
+export function chalkSheetJob(draft: Drafted, { paper, unit }: ChalkChoice): PrintJob {
   return {
     title: `Ellwand chalk sheet, draft ${draft.number}`,
     ...(draft.inputs.card.date === undefined ? {} : { date: draft.inputs.card.date }),

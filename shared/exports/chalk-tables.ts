@@ -1,15 +1,9 @@
-import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
 import type { Paper } from '../sheets/papers.ts';
 import type { Unit } from '../units/said.ts';
+import { flareRows } from './chalk-flare.ts';
 import { type ChalkLayout, chalkHalves, layChalkSheet } from './chalk-layout.ts';
-import {
-  type Row,
-  allowanceRows,
-  flareRows,
-  levelRows,
-  pieceRows,
-  pointRows,
-} from './chalk-rows.ts';
+import { type Row, allowanceRows, levelRows, pieceRows, pointRows } from './chalk-rows.ts';
 import type { Mark } from './drawing.ts';
 import { type Column, drawRows, flowRows } from './row-flow.ts';
 
@@ -78,7 +72,7 @@ export type ChalkTables = { readonly layout: ChalkLayout; readonly marks: readon
  * what the pieces and the cover repeat. Any draft fits; a plain error would be a fault of ours.
  */
 export function layChalkTables(
-  draft: Draft,
+  draft: Drafted,
   paper: Paper,
   bottom: number,
   unit: Unit,

@@ -1,4 +1,4 @@
-import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
 
 /** Numbers to a thousandth of a millimetre (or degree), so that the file is the same everywhere. */
 const rounded = (_key: string, value: unknown): unknown =>
@@ -7,7 +7,7 @@ const rounded = (_key: string, value: unknown): unknown =>
 const written = (value: unknown): string => `${JSON.stringify(value, rounded, 2)}\n`;
 
 /** A draft as JSON by the contract of the README: inputs, levels, pieces, steps and proof; mm. */
-export const draftJson = (draft: Draft): string => written(draft);
+export const draftJson = (draft: Drafted): string => written(draft);
 
 /** The proof of a draft alone, as JSON. */
-export const proofJson = (draft: Draft): string => written(draft.proof);
+export const proofJson = (draft: Drafted): string => written(draft.proof);

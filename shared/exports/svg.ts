@@ -1,7 +1,8 @@
 import { formatWithUnit } from '../units/format-length.ts';
 import type { Unit } from '../units/said.ts';
 import { speak } from '../units/speak.ts';
-import type { Draft } from '../engine/draft.ts';
+import type { Drafted } from '../engine/drafted.ts';
+import { garmentTitles } from './garment-titles.ts';
 import { pieceSvg } from './piece-svg.ts';
 import { spread } from './spread.ts';
 import { element, escapeXml } from './xml.ts';
@@ -10,7 +11,7 @@ import { element, escapeXml } from './xml.ts';
 const foot = 30;
 
 /** The legend: scale, what the lines mean, and the allowances in the reader's unit. */
-function legend(draft: Draft, unit: Unit): readonly string[] {
+function legend(draft: Drafted, unit: Unit): readonly string[] {
   const { seam, side, zip, top, hem } = draft.inputs.rules.allowance;
   const allowances = Object.entries({ seams: seam, side, zip, 'top edge': top, hem })
     .map(([name, mm]) => `${name} ${formatWithUnit(mm, unit)}`)
@@ -25,13 +26,13 @@ function legend(draft: Draft, unit: Unit): readonly string[] {
  * All pieces of a draft as one SVG by the contract of the README: one unit is 1 mm, pieces beside each
  * other, each in its own coordinates under one shift. Text is escaped; `unit` words the legend.
  */
-export function piecesSvg(draft: Draft, unit: Unit): string {
+export function piecesSvg(draft: Drafted, unit: Unit): string {
   const { placed, width, height } = spread(draft.pieces);
   const whole = height + foot;
   const [w, h] = [width, whole].map((each) => Math.ceil(each));
   const body = [
-    `<title>${escapeXml(`Gown, draft ${draft.number}`)}</title>`,
-    `<desc>${escapeXml(speak(draft.walking.said, unit))}</desc>`,
+    `<title>${escapeXml(`${garmentTitles[draft.garment]}, draft ${draft.number}`)}</title>`,
+    `<desc>${escapeXml(speak('walking' in draft ? draft.walking.said : draft.proof.verdict, unit))}</desc>`,
     ...placed.map(({ piece, translate }) => pieceSvg(piece, translate)),
     ...legend(draft, unit).map((text, line) =>
       element(

@@ -2,12 +2,13 @@ import { execFile } from 'node:child_process';
 import { mkdir, mkdtemp, readFile, readdir, rm, symlink, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { PDFDocument } from 'pdf-lib';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { draftSchema } from '#shared/api/draft-reply.ts';
 import { refusal } from '#shared/api/problem-codes.ts';
 import { prove } from '#shared/proof/prove.ts';
 import { point } from '#shared/geometry/point.ts';
-import { endOf } from '#server/ops/draft-order.ts';
+import { endOf } from '#server/ops/command-order.ts';
 import { moveSeamPoint, withPiece } from '../support/tamper.ts';
 import { card, post } from './support/request-bodies.ts';
 import { type ServerUnderTest, startServer } from './support/server-under-test.ts';
@@ -68,7 +69,10 @@ describe('bad input ends with 2, and stderr names the field', () => {
     expect(await draft('--colour', 'red')).toMatchObject({ code: 2 });
     const { code, told } = await draft(...(await order(card)), '--paper', 'A9');
     expect(code).toBe(2);
-    expect(told).toContain('--paper must be A4 or Letter');
+    expect(told).toContain('--paper must be one of A4, A3, Letter');
+    const thin = await draft(...(await order(card)), '--paper', '5x30cm');
+    expect(thin).toMatchObject({ code: 2, said: '' });
+    expect(thin.told).toContain('--paper: The width 5.0 cm must lie between');
   });
 
   it.each([
@@ -160,6 +164,20 @@ describe('a gown whose every proof line holds ends with 0', () => {
     const drawn = draftSchema.parse(JSON.parse(await readFile(join(out, 'draft.json'), 'utf8')));
     expect(JSON.parse(await readFile(join(out, 'proof.json'), 'utf8'))).toEqual(drawn.proof);
     expect((await readFile(join(out, 'tiles.pdf'))).subarray(0, 5).toString()).toBe('%PDF-');
+  });
+});
+
+describe('every paper is printed by its name, and a sheet of one’s own by its sides', () => {
+  it.each([
+    ['A0', 841, 1189],
+    ['Tabloid', 279.4, 431.8],
+    ['12x18in', 304.8, 457.2],
+  ])('%s', async (paper, width, height) => {
+    expect((await draft(...(await order(card)), '--paper', paper)).code).toBe(0);
+    const pdf = await PDFDocument.load(await readFile(join(folder, 'out', 'tiles.pdf')));
+    const page = pdf.getPage(0);
+    expect((page.getWidth() / 72) * 25.4).toBeCloseTo(width, 2);
+    expect((page.getHeight() / 72) * 25.4).toBeCloseTo(height, 2);
   });
 });
 

@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { draftGownRequest } from '#shared/api/drafts.ts';
+import { draftGarment } from '#shared/api/drafts.ts';
 import { listSamples } from '#shared/api/samples.ts';
 import { checkCard } from '#shared/body/check-card.ts';
 import { card, post, print } from './support/request-bodies.ts';
@@ -13,7 +13,7 @@ afterAll(() => server.close());
 
 const readDraft = async (reply: Response) => {
   expect(reply.status).toBe(200);
-  return draftGownRequest.reply.schema.parse(await reply.json());
+  return draftGarment.reply.schema.parse(await reply.json());
 };
 
 describe('a card becomes a draft', () => {

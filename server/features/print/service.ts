@@ -1,12 +1,12 @@
 import type { PrintRequest, SheetsRequest } from '#shared/api/requests.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import { piecesSvg } from '#shared/exports/svg.ts';
 import { checkOrder } from '#shared/sheets/check-order.ts';
 import { type PrintOrder, presetOrder } from '#shared/sheets/print-order.ts';
 import { choosePieces } from '#shared/sheets/selection.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
 import type { Unit } from '#shared/units/said.ts';
-import { draftOrRefuse } from '../../drafting/draft-or-refuse.ts';
+import { draftAnyOrRefuse } from '../../drafting/draft-or-refuse.ts';
 import { refusalFor } from '../../http/refusal.ts';
 import { chalkSheetPdf } from './chalk-sheet-pdf.ts';
 import { tilesPdf } from './tiles-pdf.ts';
@@ -18,7 +18,7 @@ export async function tilesOf({
   pieces,
   ...inputs
 }: PrintRequest): Promise<Uint8Array> {
-  return pdfOf(draftOrRefuse(inputs, unit), presetOrder(paper, pieces), unit);
+  return pdfOf(draftAnyOrRefuse(inputs, unit), presetOrder(paper, pieces), unit);
 }
 
 /** The sheets of an order. */
@@ -32,14 +32,14 @@ export async function sheetsSvgOf({ inputs, unit, order }: SheetsRequest): Promi
 }
 
 /** The draft an order is for, once nothing in the order is wrong. */
-function draftFor(inputs: SheetsRequest['inputs'], order: PrintOrder, unit: Unit): Draft {
-  const draft = draftOrRefuse(inputs, unit);
+function draftFor(inputs: SheetsRequest['inputs'], order: PrintOrder, unit: Unit): Drafted {
+  const draft = draftAnyOrRefuse(inputs, unit);
   const problems = checkOrder(order, draft.pieces);
   if (problems.length > 0) throw refusalFor('bad-input', problems, unit);
   return draft;
 }
 
-async function pdfOf(draft: Draft, order: PrintOrder, unit: Unit): Promise<Uint8Array> {
+async function pdfOf(draft: Drafted, order: PrintOrder, unit: Unit): Promise<Uint8Array> {
   try {
     return await tilesPdf(draft, order, unit);
   } catch (error) {
@@ -55,7 +55,7 @@ export function chalkSheetOf({
   pieces: _,
   ...inputs
 }: PrintRequest): Promise<Uint8Array> {
-  return chalkSheetPdf(draftOrRefuse(inputs, unit), { paper, unit });
+  return chalkSheetPdf(draftAnyOrRefuse(inputs, unit), { paper, unit });
 }
 
 /** The pieces asked for as SVG. */
@@ -65,10 +65,14 @@ export async function piecesOf({
   pieces: selection,
   ...inputs
 }: PrintRequest): Promise<Uint8Array> {
-  return svgOf(draftOrRefuse(inputs, unit), selection, unit);
+  return svgOf(draftAnyOrRefuse(inputs, unit), selection, unit);
 }
 
-async function svgOf(draft: Draft, chosen: PrintOrder['pieces'], unit: Unit): Promise<Uint8Array> {
+async function svgOf(
+  draft: Drafted,
+  chosen: PrintOrder['pieces'],
+  unit: Unit,
+): Promise<Uint8Array> {
   const pieces =
     typeof chosen === 'string'
       ? choosePieces(draft.pieces, chosen)

@@ -37,6 +37,22 @@ const seatOf = (hip: number, waist: number): number =>
 const leastUnderHip = 80;
 const leastOffFloor = 20;
 
+/** What each length is called, and one sentence beside it. */
+export const skirtLengthWords: {
+  readonly [K in SkirtLength]: { readonly label: string; readonly hint: string };
+} = {
+  'ease.waist': {
+    label: 'Ease at the waist',
+    hint: 'Room in the waistband, round the whole body.',
+  },
+  'ease.hip': { label: 'Ease at the hip', hint: 'Room to sit and step, round the whole body.' },
+  seat: {
+    label: 'Seat',
+    hint: 'How much wider the back is than the front at the hip; its darts take that much more.',
+  },
+  length: { label: 'Skirt length', hint: 'From the waist down to the hem.' },
+};
+
 /**
  * Bounds and initial values on this body. Ease 10 at the waist and 30 at the hip: Aldrich's straight skirt
  * (from memory); the length is to the middle of the knee (common practice, no source).
@@ -49,29 +65,25 @@ export function skirtBlockLengths(
   const most = levels.floor - levels.waist - leastOffFloor;
   return {
     'ease.waist': {
-      label: 'Ease at the waist',
-      hint: 'Room in the waistband, round the whole body.',
+      ...skirtLengthWords['ease.waist'],
       min: 0,
       max: 60,
       initial: 10,
     },
     'ease.hip': {
-      label: 'Ease at the hip',
-      hint: 'Room to sit and step, round the whole body.',
+      ...skirtLengthWords['ease.hip'],
       min: 10,
       max: 120,
       initial: 30,
     },
     seat: {
-      label: 'Seat',
-      hint: 'How much wider the back is than the front at the hip; its darts take that much more.',
+      ...skirtLengthWords.seat,
       min: 0,
       max: 30,
       initial: seatOf(measures.hipGirth, measures.waistGirth),
     },
     length: {
-      label: 'Skirt length',
-      hint: 'From the waist down to the hem.',
+      ...skirtLengthWords.length,
       min: least,
       max: most,
       initial: Math.min(most, Math.max(least, measures.waistToKnee)),

@@ -1,17 +1,19 @@
 import { readFileSync } from 'node:fs';
 import { parseArgs } from 'node:util';
 import { readInputs } from '#shared/api/read-body.ts';
-import type { DraftInputs } from '#shared/engine/draft.ts';
+import { type DraftedInputs, type Garment, garments } from '#shared/engine/drafted.ts';
 import type { Proof } from '#shared/proof/proof.ts';
-import { type PaperName, papers } from '#shared/sheets/papers.ts';
+import type { PrintOrder } from '#shared/sheets/print-order.ts';
 import type { Problem } from '#shared/units/problem.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
+import { readPaper } from './paper-option.ts';
 
 const usage = [
   'Use: npm run --silent draft -- --measures card.json --style style.json',
-  '       [--rules rules.json] [--paper A4|Letter] [--unit cm|in] --out DIR',
-  '     npm run --silent draft -- --schema card|style|rules',
+  `       [--garment ${garments.join('|')}] [--rules rules.json]`,
+  '       [--paper A4|A3|Letter|Legal|Tabloid|A1|A0|roll-36in|roll-90cm|WIDTHxHEIGHT] [--unit cm|in] --out DIR',
+  '     npm run --silent draft -- --schema card|style|rules [--garment …]',
 ];
 
 /** What the command ends with: every proof line holds, drawn but a line fails, or bad input. */
@@ -45,6 +47,7 @@ export function readOptions(args: readonly string[]) {
       options: {
         measures: { type: 'string' },
         style: { type: 'string' },
+        garment: { type: 'string', default: 'gown' },
         rules: { type: 'string' },
         paper: { type: 'string', default: 'A4' },
         unit: { type: 'string', default: 'cm' },
@@ -71,13 +74,20 @@ function readJson(option: string, path: string): unknown {
   }
 }
 
-const isPaper = (name: string): name is PaperName => Object.hasOwn(papers, name);
+const isGarment = (name: string): name is Garment => garments.some((each) => each === name);
+
+/** The garment named, or a refusal that names all of them. */
+export const readGarment = (name: string): Garment =>
+  isGarment(name)
+    ? name
+    : refuse(`--garment must be one of ${garments.join(', ')}; it is “${name}”.`);
+
 const isUnit = (name: string): name is Unit => name === 'cm' || name === 'in';
 
 /** What is to be drawn, and how it is printed and told. */
 export type Order = {
-  readonly inputs: DraftInputs;
-  readonly paper: PaperName;
+  readonly inputs: DraftedInputs;
+  readonly paper: PrintOrder['paper'];
   readonly unit: Unit;
   readonly out: string;
 };
@@ -85,17 +95,20 @@ export type Order = {
 /** Reads the three files and the choices, or refuses by name what cannot be right. */
 export function readOrder(options: ReturnType<typeof readOptions>): Order {
   const { measures, style, rules, paper, unit, out } = options;
+  const garment = readGarment(options.garment);
   if (measures === undefined)
     return refuse('--measures is missing: name the measure card.', ...usage);
   if (style === undefined) return refuse('--style is missing: name the style card.', ...usage);
   if (out === undefined) return refuse('--out is missing: name a folder for the files.', ...usage);
-  if (!isPaper(paper)) return refuse(`--paper must be A4 or Letter; it is “${paper}”.`);
   if (!isUnit(unit)) return refuse(`--unit must be cm or in; it is “${unit}”.`);
+  const sheet = readPaper(paper, unit);
+  if ('refused' in sheet) return refuse(sheet.refused);
   const reading = readInputs({
+    ...(garment === 'gown' ? {} : { garment }),
     card: readJson('measures', measures),
     style: readJson('style', style),
     ...(rules === undefined ? {} : { rules: readJson('rules', rules) }),
   });
   if ('problems' in reading) return refuseProblems(reading.problems, unit);
-  return { inputs: reading.inputs, paper, unit, out };
+  return { inputs: reading.inputs, paper: sheet.paper, unit, out };
 }
