@@ -72,7 +72,7 @@ function alongLevel(pieces: readonly Piece[], level: LevelName): Look {
   let half: number | undefined = 0;
   for (const piece of pieces) {
     const line = piece.levels.find((each) => each.level === level);
-    if (line === undefined || (piece.part === 'flare' && level !== 'hem')) continue;
+    if (line === undefined || piece.part === 'flare') continue;
     where.push({ piece: piece.name, at: line.to });
     const width = widthAtLevel(piece, line);
     half = half === undefined || width === undefined ? undefined : half + width;
@@ -105,6 +105,21 @@ function alongWaistEdges(pieces: readonly Piece[], own: 'top' | 'middle'): Look 
   };
 }
 
+/** Length of the hem all round: it is curved, so it is taped and not read across. */
+function alongHem(pieces: readonly Piece[]): Look {
+  const hems = pieces
+    .filter(({ part, cloth }) => cloth === undefined && part !== 'sleeve' && part !== 'inner')
+    .flatMap((piece) =>
+      piece.edges.filter(({ kind }) => kind === 'hem').map((edge) => ({ piece, edge })),
+    );
+  const half = hems.reduce((sum, { edge }) => sum + pathLength(edge.path), 0);
+  return {
+    girth: hems.length === 0 ? undefined : 2 * half,
+    where: hems.map(({ piece, edge }) => ({ piece: piece.name, edge: edge.name })),
+    of: 'pieces',
+  };
+}
+
 function acrossChest(pieces: readonly Piece[], construction: Construction): Look {
   const openings = measureOpenings(pieces, construction);
   const { front, back } = construction.chestSide;
@@ -125,6 +140,7 @@ function looksAt(
   construction: Construction,
 ): readonly Look[] {
   if (level === 'chest') return [acrossChest(pieces, construction)];
+  if (level === 'hem') return [alongHem(pieces)];
   if (level === 'waist-seam') {
     return [alongWaistEdges(pieces, 'top'), alongWaistEdges(pieces, 'middle')];
   }

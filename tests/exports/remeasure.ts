@@ -12,7 +12,7 @@ export type MeasuredEdge = {
   readonly difference: number;
 };
 
-/** A whole-body girth, mm, of the pieces of one part; `waist edges` is the waist seam's own length. */
+/** A whole-body girth, mm, of the pieces of one part; `waist edges` and `hem edges` are those seams' own length. */
 export type MeasuredGirth = {
   readonly level: string;
   readonly part: string;
@@ -59,7 +59,7 @@ const lengthOf = (read: Read): number =>
   new svgPathProperties(read.attributes.d ?? '').getTotalLength();
 
 const partOf = (piece: string): string =>
-  ['flare', 'middle', 'top'].find((part) => piece.split('-').includes(part)) ?? piece;
+  ['flare', 'godet', 'middle', 'top'].find((part) => piece.split('-').includes(part)) ?? 'whole';
 
 /** Length at which an edge meets its partner: gathers drawn in, ease taken away. */
 const sewn = (edge: Read): number =>
@@ -114,6 +114,7 @@ function measureGirths(pieces: readonly Read[]): readonly MeasuredGirth[] {
       if (waist && edge.attributes['data-open'] === undefined) {
         addHalf('waist edges', part, lengthOf(edge));
       }
+      if (edge.attributes['data-edge'] === 'hem') addHalf('hem edges', 'all', lengthOf(edge));
     }
   }
   return [...sums.values()];

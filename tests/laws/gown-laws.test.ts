@@ -88,7 +88,7 @@ describe('on any body within the limits, in any style within its limits', () => 
       expect(edges.filter((each) => !(Math.abs(each.difference) <= 0.5))).toEqual([]);
       for (const { level, wanted } of draft.construction.wanted) {
         if (level === 'chest') continue;
-        const name = level === 'waist-seam' ? 'waist edges' : level;
+        const name = level === 'waist-seam' ? 'waist edges' : level === 'hem' ? 'hem edges' : level;
         const found = girths.filter((each) => each.level === name);
         expect(found.length, level).toBeGreaterThan(0);
         for (const { girth } of found) expect(Math.abs(girth - wanted)).toBeLessThanOrEqual(0.5);

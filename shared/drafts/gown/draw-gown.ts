@@ -85,13 +85,19 @@ export function drawGown(
     drawSide(table, side, { pair, quarters, below, style, rules, acrossOf }),
   );
   warnOfShift(table, pair);
-  const wanted = wantedGirths(
-    body,
-    style,
-    bodyLevels,
-    seam,
-    2 * (quarters.front.seam.value + quarters.back.seam.value),
-  );
+  const wanted = [
+    ...wantedGirths(
+      body,
+      style,
+      bodyLevels,
+      seam,
+      2 * (quarters.front.seam.value + quarters.back.seam.value),
+    ),
+    // With a train the hem is longer than the level one that was asked for.
+    ...(style.train === 0
+      ? [{ level: 'hem', wanted: below.sweep, estimated: false } as const]
+      : []),
+  ];
   const pieces = sides.flatMap((each) => [...each.pieces, ...below.pieces(each.side)]);
   return {
     pieces,

@@ -1,6 +1,6 @@
 import { arc } from '../../geometry/arc.ts';
 import type { Path } from '../../geometry/path.ts';
-import { point } from '../../geometry/point.ts';
+import { type Point, point } from '../../geometry/point.ts';
 import { trainShare, trainedHem } from './train.ts';
 
 /**
@@ -84,16 +84,19 @@ function widestGore(plan: FlarePlan): number {
   return widest;
 }
 
-/** The hem from one angle off the centre to another, struck from the origin and turned by `by`. */
+/** The point a half is struck from: over the middle of a gore's knee seam, which lies at the origin. */
+export const apexOf = ({ inner }: Pick<FlarePlan, 'inner'>): Point => point(0, -inner);
+
+/** The hem from one angle off the centre to another, turned by `by`. */
 export function hemPath(plan: FlarePlan, from: number, until: number, by: number): Path {
-  const origin = point(0, 0);
+  const apex = apexOf(plan);
   const { outer, angle, train } = plan;
-  if (train === 0) return arc(origin, outer, from - by, until - by);
+  if (train === 0) return arc(apex, outer, from - by, until - by);
   return trainedHem(
     (share) => {
       const at = share * angle - by;
       return {
-        at: point(outer * Math.sin(at), outer * Math.cos(at)),
+        at: point(outer * Math.sin(at), apex.y + outer * Math.cos(at)),
         along: point(outer * angle * Math.cos(at), -outer * angle * Math.sin(at)),
         fall: at,
         turn: angle,

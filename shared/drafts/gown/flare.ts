@@ -6,14 +6,14 @@ import { pathLength, reverse } from '../../geometry/curve.ts';
 import { line } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { deg, mm, said } from '../../units/said.ts';
-import { type FlarePlan, goreFrom, hemPath, hemRadius } from './flare-plan.ts';
+import { type FlarePlan, apexOf, goreFrom, hemPath, hemRadius } from './flare-plan.ts';
 import type { KneeStretch } from './knee-stretches.ts';
 
 /** Name of a gore, from the centre out. */
 export const goreName = (side: Side, k: number): string =>
   k === 0 ? `flare-${side}` : `flare-${side}-${k + 1}`;
 
-/** The pieces of one half of the flare, each in a frame of its own: the apex at the origin. */
+/** The pieces of one half of the flare, each in a frame of its own: the middle of its knee seam at the origin. */
 export function flarePieces(
   paper: PartTable,
   side: Side,
@@ -48,7 +48,7 @@ function narrateHalf(
     said`From one point strike an inner arc at ${mm(inner)} and the hem at ${mm(outer)}; the ${side} half takes ${deg((angle * 180) / Math.PI)} of it, knee quarter ${mm(inner * angle)} over the radius${divided}.${trained} Its hem is ${mm(hem)} long.`,
     {
       why: said`Both arcs have one centre, so every seam is as long as the flare is deep and meets seam and hem squarely.`,
-      lines: [hemPath(plan, 0, angle, 0), arc(point(0, 0), inner, 0, angle)],
+      lines: [hemPath(plan, 0, angle, 0), arc(apexOf(plan), inner, 0, angle)],
       pieces: pieces.map(({ name }) => name),
     },
   );
@@ -68,9 +68,9 @@ function gore(
   // The gore lies upright about its own middle, this far round from the centre of the half.
   const middle = 2 * k * halfGore;
   const [begin, end] = [goreFrom(plan, k), goreFrom(plan, k + 1)];
-  const origin = point(0, 0);
+  const apex = apexOf(plan);
   const rim = (radius: number, angle: number): Point =>
-    point(radius * Math.sin(angle), radius * Math.cos(angle));
+    point(radius * Math.sin(angle), apex.y + radius * Math.cos(angle));
   const other = side === 'front' ? 'back' : 'front';
   const strokes = side === 'front' ? 1 : 2;
   const angleAt = (along: number, start: number): number => from + (along - start) / inner;
@@ -80,7 +80,7 @@ function gore(
       edge(
         name,
         'seam',
-        arc(origin, inner, angleAt(start, first), angleAt(until, first)),
+        arc(apex, inner, angleAt(start, first), angleAt(until, first)),
         to(skirt, name),
       ),
     );
@@ -129,7 +129,7 @@ const grainOf = (
 ): { readonly from: Point; readonly to: Point } => {
   const x = (inner + (outer - inner) * 0.3) * Math.sin(angle);
   return {
-    from: point(x, inner + (outer - inner) * 0.2),
-    to: point(x, inner + (outer - inner) * 0.85),
+    from: point(x, (outer - inner) * 0.2),
+    to: point(x, (outer - inner) * 0.85),
   };
 };

@@ -12,6 +12,7 @@ import {
   godetCount,
   halfName,
   isDivided,
+  kindOf,
   markOn,
   radiusOf,
 } from './godets.ts';
@@ -96,7 +97,7 @@ function godet(plan: GodetPlan, place: GodetPlace): readonly Piece[] {
   const title = titles[place];
   const seam = (name: string, joins: EdgeRef): Omit<Edge, 'path'> => ({
     name,
-    kind: 'seam',
+    kind: name === 'middle' ? 'seam' : kindOf(place),
     joins,
   });
   if (place === 'centre-back') {

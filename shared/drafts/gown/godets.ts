@@ -56,6 +56,9 @@ export type GodetPlan = {
   readonly panels: readonly SkirtPanel[];
 };
 
+/** A godet in a side seam may be let out as far as the seam above it. */
+export const kindOf = (place: GodetPlace): 'side' | 'seam' => (place === 'side' ? 'side' : 'seam');
+
 /** The godet in an edge of a panel; none in the centre front, or where none is asked for. */
 function placeOf(
   { places }: GodetPlan,
@@ -144,7 +147,7 @@ export function godetFoot(plan: GodetPlan, panel: SkirtPanel): PanelFoot {
         {
           ...edge(
             `godet-${panel.outer}`,
-            'seam',
+            kindOf(outer),
             down(panel.until),
             slitPartner(plan, panel, outer, 'outer'),
           ),
@@ -156,7 +159,7 @@ export function godetFoot(plan: GodetPlan, panel: SkirtPanel): PanelFoot {
     ? [
         edge(
           `godet-${panel.inner}`,
-          'seam',
+          kindOf(inner),
           reverse(down(panel.from)),
           slitPartner(plan, panel, inner, 'inner'),
         ),

@@ -1,4 +1,5 @@
 import { edge } from '../../drafting/outline.ts';
+import type { Piece } from '../../drafting/piece.ts';
 import { pathLength, reverse, stationAtLength } from '../../geometry/curve.ts';
 import { type Path, cubic, line } from '../../geometry/path.ts';
 import { type Point, between, point, scale } from '../../geometry/point.ts';
@@ -184,6 +185,21 @@ function seamRun(
   return profilePath(profile, knee, knee + y);
 }
 
+/** Marks on the seams of a panel where they leave the upright, at the knee line. */
+function kneeMarks(panel: SkirtPanel): Piece['notches'] {
+  const mark = (edge: string, x: number, outward: 1 | -1): Piece['notches'][number] => ({
+    name: 'knee',
+    edge,
+    at: point(x, panel.knee),
+    outward: point(outward, 0),
+    strokes: panel.side === 'front' ? 1 : 2,
+  });
+  return [
+    mark(panel.outer, panel.until, 1),
+    ...(runsOut(panel, 'inner') ? [mark(panel.inner, panel.from, -1)] : []),
+  ];
+}
+
 /** A panel whose seams run on outwards from the knee line to a hem that is square to them. */
 export function integralFoot(plan: IntegralPlan, panel: SkirtPanel): PanelFoot {
   const { hem, reach } = hemOf(plan, panel);
@@ -194,6 +210,6 @@ export function integralFoot(plan: IntegralPlan, panel: SkirtPanel): PanelFoot {
     outer: seamRun(plan, panel, panel.until, 1, reach.outer),
     edges: [edge('hem', 'hem', reverse(hem))],
     inner: reverse(inner),
-    notches: [],
+    notches: kneeMarks(panel),
   };
 }

@@ -12,7 +12,7 @@ import { styleKeys, styleLimits, type Limit, type StyleKey } from './style-limit
 const hangsOn: { readonly [K in StyleKey]?: readonly string[] } = {
   topDrop: ['card.sideNeckToBustPoint'],
   neckDepth: ['style.topDrop', 'card.sideNeckToBustPoint'],
-  neckWidth: ['card.bustSpan'],
+  neckWidth: ['style.neckDepth', 'card.bustSpan'],
   sideDepth: ['style.topDrop', 'card.underarmToWaist'],
   backDepth: ['card.frontWaistLength', 'card.sideNeckToBustPoint'],
   dartLength: ['card.waistToHip'],
@@ -20,6 +20,8 @@ const hangsOn: { readonly [K in StyleKey]?: readonly string[] } = {
   kneeFinished: ['style.kneeLevel', 'card.hipGirth', 'card.kneeGirth'],
   flareLength: ['style.kneeLevel', 'style.heelHeight', 'card.waistToFloor'],
   floorClearance: ['style.kneeLevel', 'style.heelHeight', 'card.waistToFloor'],
+  hemSweep: ['style.flare', 'style.flareLength', 'style.kneeFinished', 'style.waistSeam'],
+  train: ['style.flare', 'style.flareFraction', 'style.hemSweep', 'style.flareLength'],
 };
 
 /** Why a bound is where it is, below and above, for those where a number alone does not say it. */
@@ -38,6 +40,13 @@ const because: {
     more: ' A longer flare would lie on the floor: shorten it, or set higher heels.',
   },
   dartLength: { more: ' The back dart is longer and must end above the hip.' },
+  hemSweep: {
+    less: ' A narrower hem would hardly show below the knee: widen it, or narrow the knee.',
+    more: ' This kind of flare makes no wider hem: choose a circle, or give it more seams by leaving out the waist seam.',
+  },
+  train: {
+    more: ' The hem would fall away to it too steeply: give the flare more of a circle or a wider hem, or shorten the train.',
+  },
 };
 
 const valueOf = (style: StyleCard, key: StyleKey): number | undefined => {
