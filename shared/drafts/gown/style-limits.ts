@@ -95,6 +95,12 @@ const easeLimits: { readonly [K in `ease.${EaseLevel}`]: Limit } = {
   'ease.hip': limit(-20, 120, 20),
 };
 
+/**
+ * A dip this wide for the root of its depth bends no tighter than 12 mm at the centre, which an enclosed
+ * allowance still turns round (our rule; the radius of the curve `top-line` draws).
+ */
+const narrowestDip = 3.4;
+
 /** Centre and peak of the top line: a straight one lies level with its peak, a scooped one is wide and deep. */
 function neck(
   shape: TopLineShape,
@@ -102,16 +108,20 @@ function neck(
   bust: number,
   bustSpan: number,
   widest: number,
+  chosenDepth: number | undefined,
 ): { readonly neckDepth: Limit; readonly neckWidth: Limit } {
   if (shape === 'straight') {
     return { neckDepth: limit(peak, peak, peak), neckWidth: limit(40, widest, 76) };
   }
   const scooped = shape === 'scooped';
-  return {
-    // A notch needs some depth to be one.
-    neckDepth: limit(shape === 'notched' ? peak + 15 : peak, bust - 20, peak + (scooped ? 50 : 35)),
-    neckWidth: limit(40, widest, scooped ? bustSpan / 2 : 76),
-  };
+  // A notch needs some depth to be one.
+  const neckDepth = limit(
+    shape === 'notched' ? peak + 15 : peak,
+    bust - 20,
+    peak + (scooped ? 50 : 35),
+  );
+  const narrowest = Math.max(40, narrowestDip * Math.sqrt(within(chosenDepth, neckDepth) - peak));
+  return { neckDepth, neckWidth: limit(narrowest, widest, scooped ? bustSpan / 2 : 76) };
 }
 
 /**
@@ -169,7 +179,14 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
   const highestSeam = Math.max(leastRise, levels.waist - levels.underbust - seamUnderBust);
   return {
     topDrop,
-    ...neck(style.topLine ?? 'sweetheart', peak, levels.bust, bustSpan, widestNeck),
+    ...neck(
+      style.topLine ?? 'sweetheart',
+      peak,
+      levels.bust,
+      bustSpan,
+      widestNeck,
+      style.neckDepth,
+    ),
     sideDepth,
     backDepth: backDepth(
       body,
