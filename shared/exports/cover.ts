@@ -1,5 +1,6 @@
 import type { Drafted } from '../engine/drafted.ts';
 import type { DrawnPiece } from '../sheets/drawn-pieces.ts';
+import { squareSides } from '../sheets/scale-check.ts';
 import type { SheetPlan } from '../sheets/sheet-plan.ts';
 import { printedTiles } from '../sheets/tile-plan.ts';
 import type { Unit } from '../units/said.ts';
@@ -25,8 +26,7 @@ export type CoverPage = {
 /** A page lower than this has its squares side by side, mm. */
 const lowPage = 275;
 
-/** Sides of the squares to measure, and the white between them, mm. */
-const sides = { metric: 100, inch: 101.6 } as const;
+/** White between the squares to measure, mm. */
 const betweenSquares = 4;
 
 /** From the top of the printed area to the squares, mm: rod, title, whose it is, how to print. */
@@ -37,11 +37,11 @@ export function testSquares({ height, margin }: CoverPage) {
   const [x, y] = [margin, margin + headRoom];
   const low = height < lowPage;
   return {
-    metric: { x, y, side: sides.metric },
+    metric: { x, y, side: squareSides.metric },
     inch: {
-      x: low ? x + sides.metric + betweenSquares : x,
-      y: low ? y : y + sides.metric + betweenSquares,
-      side: sides.inch,
+      x: low ? x + squareSides.metric + betweenSquares : x,
+      y: low ? y : y + squareSides.metric + betweenSquares,
+      side: squareSides.inch,
     },
   };
 }
