@@ -100,6 +100,8 @@ const easeLimits: { readonly [K in `ease.${EaseLevel}`]: Limit } = {
  * allowance still turns round (our rule; the radius of the curve `top-line` draws).
  */
 const narrowestDip = 3.4;
+/** A notch is wider for its depth: its edge must not stand so steep that the fold cuts its allowance. */
+const narrowestNotch = 6;
 
 /** Centre and peak of the top line: a straight one lies level with its peak, a scooped one is wide and deep. */
 function neck(
@@ -120,7 +122,8 @@ function neck(
     bust - 20,
     peak + (scooped ? 50 : 35),
   );
-  const narrowest = Math.max(40, narrowestDip * Math.sqrt(within(chosenDepth, neckDepth) - peak));
+  const dip = shape === 'notched' ? narrowestNotch : narrowestDip;
+  const narrowest = Math.max(40, dip * Math.sqrt(within(chosenDepth, neckDepth) - peak));
   return { neckDepth, neckWidth: limit(narrowest, widest, scooped ? bustSpan / 2 : 76) };
 }
 
