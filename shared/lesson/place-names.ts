@@ -19,8 +19,8 @@ const letterWidth = 0.54;
 const beside = 0.6;
 
 /**
- * Names beside their points so that none covers another: this step's first, then those of earlier
- * levels on the centre line as far as there is room. Points outside the drawing have none.
+ * Names beside their points so that none covers another, those on the centre line outside of it: this
+ * step's first, then earlier levels as far as there is room. Points outside the drawing have none.
  */
 export function placeNames(
   points: readonly NamedPoint[],
@@ -38,7 +38,8 @@ export function placeNames(
     if (placed.some((each) => each.name === name)) continue;
     const long = name.length * letters * letterWidth;
     const off = letters * beside;
-    const anchor = dot.x + off + long > width ? 'end' : 'start';
+    const onCentre = at.x === 0 && dot.x - off - long > 0;
+    const anchor = onCentre || dot.x + off + long > width ? 'end' : 'start';
     const x = anchor === 'start' ? dot.x + off : dot.x - off;
     const tries = [-0.45, 1.15, -1.5, 2.2].map((lines) =>
       Math.min(height - letters * 0.3, Math.max(letters, dot.y + lines * letters)),

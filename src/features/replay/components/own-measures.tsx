@@ -35,7 +35,13 @@ export const OwnMeasures = (props: OwnMeasuresProps) => {
         sent to nobody.
       </p>
       <Picker card={card} onCard={onCard} onTable={onTable} />
-      <div className="mt-2 border-t border-rule">
+      <form
+        className="mt-2 border-t border-rule"
+        onSubmit={(event) => {
+          event.preventDefault();
+          if (drawn !== undefined && 'draft' in drawn) onClose();
+        }}
+      >
         {coreMeasures.map((measure) => (
           <Field
             key={measure}
@@ -55,7 +61,7 @@ export const OwnMeasures = (props: OwnMeasuresProps) => {
             )}
           </Field>
         ))}
-      </div>
+      </form>
       <div className="py-3" role="status">
         {drawn === undefined && <p className="text-slate">Drawn as soon as all ten are in.</p>}
         {drawn !== undefined && 'refused' in drawn && <Notice>{drawn.refused}</Notice>}
