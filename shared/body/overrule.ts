@@ -9,7 +9,7 @@ const sameFields = (one: readonly string[] = [], other: readonly string[] = []):
   one.length === other.length && one.every((field) => other.includes(field));
 
 /** Whether an entry of the card is about this very warning. */
-const isAbout = (entry: Overruled, { code, field, with: others }: Problem): boolean =>
+export const isAbout = (entry: Overruled, { code, field, with: others }: Problem): boolean =>
   entry.code === code && entry.field === field && sameFields(entry.with, others);
 
 /** What the card keeps when a maker overrules a warning. */

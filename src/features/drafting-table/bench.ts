@@ -62,11 +62,11 @@ function followed(
     case 'moved':
       return recorded(history, before, after, `${action.type} ${action.field}`);
     case 'named':
-    case 'overruled':
-      return recorded(history, before, after, action.type);
+      return recorded(history, before, after, 'named');
     case 'chosen':
     case 'ruled':
     case 'put':
+    case 'overruled':
     case 'gown laid':
     case 'cleared':
       return recorded(closed(history), before, after);
@@ -76,6 +76,7 @@ function followed(
     case 'step':
       return history.open === undefined ? history : closed(history);
     case 'seam':
+    case 'looked':
       return history;
   }
 }

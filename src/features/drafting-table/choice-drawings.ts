@@ -28,7 +28,9 @@ const toKnee = `${toHip}C27.5 31 25.5 32 25 35`;
 const gown = `${torso}${toKnee}`;
 const trumpet = `${gown}L33 46C28 47.4 24 47.6 20 47.6`;
 const knee = seam('M20 35.8C22 35.8 24 35.5 25 35');
-const waist = hair('M20 16.2H24.5');
+/** From bust to hip, near to. */
+const waisted = 'M20 10C22 5 27.5 5 29.5 7L31 10C31 18 26 20 26 26C26 33 31 35 31 46';
+const waist = hair('M20 26.2H26');
 
 /** Neck, shoulders and arms, right half. */
 const shoulders = 'M22 2V6C24 8 31 8 33 11L35 30M30 18L31 30';
@@ -40,7 +42,7 @@ const back = 'M20 10C26 9 30 8 33 7C33 18 29 20 29 26C29 34 34 36 34 46L20 46';
 export const choiceDrawings: Drawings = {
   topLine: {
     sweetheart: [cut(bodice)],
-    straight: [cut(`M20 11C26 11 31 12 36 16${side}`)],
+    straight: [cut(`M20 10H28C32 10.4 34 13 36 16${side}`)],
     scooped: [cut(`M20 21C29 21 28 9 31 9C33 9 34 13 36 16${side}`)],
     notched: [cut(`M20 19L26 9C28 7 30 7 31 8C33 9 34 13 36 16${side}`)],
   },
@@ -49,9 +51,9 @@ export const choiceDrawings: Drawings = {
     darts: [cut(bodice), thin('M24.5 40L27 21L29 40')],
   },
   waistSeam: {
-    raised: [cut(`${torso}${toHip}L27.5 30`), seam('M20 13.4C22 13.4 24 13 25 12.6'), waist],
-    natural: [cut(`${torso}${toHip}L27.5 30`), seam('M20 16.4C22 16.4 23.5 16.2 24.5 16')],
-    none: [cut(`${torso}${toHip}L27.5 30`), waist],
+    raised: [cut(waisted), seam('M20 21.6C23 21.6 26 21 27.6 20.4'), waist],
+    natural: [cut(waisted), seam('M20 26.6C22 26.6 24.6 26.4 26 26')],
+    none: [cut(waisted), waist],
   },
   flare: {
     circle: [cut(trumpet), knee, hair('M21.5 36L24 47M24 35.4L29.5 46.6')],

@@ -9,6 +9,7 @@ import {
   type EaseLevel,
   type StyleLength,
 } from '#shared/drafts/gown/style-card.ts';
+import type { Garment } from '#shared/engine/drafted.ts';
 import { formatLength } from '#shared/units/format-length.ts';
 import { parseAngle } from '#shared/units/parse-angle.ts';
 import { parseLength } from '#shared/units/parse-length.ts';
@@ -16,21 +17,39 @@ import type { Said, Unit } from '#shared/units/said.ts';
 
 import { parseNumber } from './parse-number.ts';
 
+/** Figures of the blocks' style cards that no gown has. */
+export const blockLengths = ['armholeDrop', 'shoulderEase', 'seat', 'length'] as const;
+export type BlockLength = (typeof blockLengths)[number];
+
 /** The dotted key of a figure, the same as in the contract's problems. */
 export type FieldKey =
   | `card.${MeasureKey}`
   | `style.${StyleLength}`
   | `style.ease.${EaseLevel}`
+  | `style.${BlockLength}`
   | `rules.${HouseRuleKey}`
   | `rules.intakes.${IntakePlace}`;
 
 export const cardFields = [...coreMeasures, ...furtherMeasures].map(
   (key) => `card.${key}` as const,
 );
-export const styleFields = [
+const gownFields = [
   ...styleLengths.map((key) => `style.${key}` as const),
   ...easeLevels.map((level) => `style.ease.${level}` as const),
 ];
+export const styleFields = [...gownFields, ...blockLengths.map((key) => `style.${key}` as const)];
+
+/** The figures of each garment's style card. */
+export const fieldsOf: { readonly [G in Garment]: ReadonlySet<FieldKey> } = {
+  gown: new Set(gownFields),
+  'bodice-block': new Set([
+    'style.ease.bust',
+    'style.ease.waist',
+    'style.armholeDrop',
+    'style.shoulderEase',
+  ]),
+  'skirt-block': new Set(['style.ease.waist', 'style.ease.hip', 'style.seat', 'style.length']),
+};
 export const intakeFields = intakeFigures.map(({ place }) => `rules.intakes.${place}` as const);
 export const ruleFields = [
   ...houseRuleFigures.map(({ key }) => `rules.${key}` as const),

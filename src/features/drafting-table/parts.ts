@@ -1,18 +1,18 @@
 import { overruledWith, longestReason } from '#shared/api/card.ts';
 import { keptText } from '#shared/api/kept-text.ts';
 import { houseRules } from '#shared/api/rules.ts';
-import type { StyleChoice } from '#shared/drafts/gown/style-card.ts';
 
 import { fieldKeys, readEntry, rewritten, type Entry, type FieldKey } from './fields.ts';
 import type { Unit } from '#shared/units/said.ts';
-import { choicesFrom, styleChoiceKeys } from './style-choices.ts';
+import { isRecord } from './is-record.ts';
+import { choicesFrom, tableChoiceKeys, type TableChoice } from './style-choices.ts';
 import type { Choices } from './table-inputs.ts';
 
 /** Kept as JSON: they are compared and put back whole. */
 const writtenKeys = ['overruled', 'rules'] as const;
 type WrittenKey = (typeof writtenKeys)[number];
-type ChoiceKey = 'name' | 'date' | StyleChoice | WrittenKey;
-const choiceKeys: readonly ChoiceKey[] = ['name', 'date', ...styleChoiceKeys, ...writtenKeys];
+type ChoiceKey = 'name' | 'date' | TableChoice | WrittenKey;
+const choiceKeys: readonly ChoiceKey[] = ['name', 'date', ...tableChoiceKeys, ...writtenKeys];
 export type PartKey = FieldKey | ChoiceKey;
 
 /** One part of what lies on the table: a figure's entry or a choice's word; null where it is left open. */
@@ -94,6 +94,3 @@ export function keptParts(kept: unknown, unit: Unit): Parts {
     }),
   );
 }
-
-export const isRecord = (value: unknown): value is Readonly<Record<string, unknown>> =>
-  typeof value === 'object' && value !== null;

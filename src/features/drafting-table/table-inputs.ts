@@ -4,6 +4,7 @@ import {
   type MeasureCard,
   type Overruled,
 } from '#shared/body/card.ts';
+import type { DraftedInputs } from '#shared/engine/drafted.ts';
 import { houseRuleFigures } from '#shared/drafting/house-rule-figures.ts';
 import { houseRulePresets, type HouseRulePreset } from '#shared/drafting/house-rule-presets.ts';
 import { intakePlaces, type HouseRules, type IntakePlace } from '#shared/drafting/house-rules.ts';
@@ -14,8 +15,9 @@ import {
   type StyleCard,
 } from '#shared/drafts/gown/style-card.ts';
 
+import { isRecord } from './is-record.ts';
 import { ruleFields, valueOf, type Entries, type FieldKey } from './fields.ts';
-import { applies, styleChoiceKeys, type MadeChoices } from './style-choices.ts';
+import { applies, styleChoiceKeys, tableChoiceKeys, type MadeChoices } from './style-choices.ts';
 
 const measures = [...coreMeasures, ...furtherMeasures];
 
@@ -72,6 +74,38 @@ export function styleOf(choices: Choices): StyleCard {
   };
 }
 
+/** What the fields ask to be drafted for a body. */
+export function inputsOf(choices: Choices, card: MeasureCard): DraftedInputs {
+  const rules = rulesOf(choices);
+  const { garment, bustDart, bustDartRule, entries } = choices;
+  const waist = valueOf(entries['style.ease.waist']);
+  switch (garment) {
+    case 'gown':
+      return { card, style: styleOf(choices), rules };
+    case 'bodice-block': {
+      const style = {
+        ease: { bust: valueOf(entries['style.ease.bust']), waist },
+        armholeDrop: valueOf(entries['style.armholeDrop']),
+        shoulderEase: valueOf(entries['style.shoulderEase']),
+        bustDart,
+        bustDartRule,
+      };
+      return { garment, card, style: given(style), rules };
+    }
+    case 'skirt-block': {
+      const style = {
+        ease: { waist, hip: valueOf(entries['style.ease.hip']) },
+        seat: valueOf(entries['style.seat']),
+        length: valueOf(entries['style.length']),
+      };
+      return { garment, card, style: given(style), rules };
+    }
+  }
+}
+
+/** A style card without what is left open: the same card has one draft number however it came about. */
+const given = <S extends object>(style: S): S => JSON.parse(JSON.stringify(style)) as S;
+
 /** The house rules with the figures typed over them. */
 export function rulesOf({ rules, entries }: Pick<Choices, 'rules' | 'entries'>): HouseRules {
   const typed = houseRuleFigures.reduce((now, { key, put }) => {
@@ -96,7 +130,7 @@ export const withoutRules = (entries: Entries): Entries =>
 
 /** All of the table that is kept, part by part: where none of them is another there is nothing to keep. */
 export const workOf = (choices: Choices): readonly unknown[] => [
-  ...styleChoiceKeys.map((choice) => choices[choice]),
+  ...tableChoiceKeys.map((choice) => choices[choice]),
   ...[choices.name, choices.date, choices.overruled, choices.rules, choices.entries],
 ];
 
@@ -114,14 +148,15 @@ export type LaidGown = {
 export function givenFor(
   field: FieldKey,
   card: { readonly [K in keyof MeasureCard]?: MeasureCard[K] | undefined },
-  style: StyleCard,
+  style: DraftedInputs['style'],
 ): number | undefined {
   const measure = measures.find((key) => field === `card.${key}`);
   if (measure !== undefined) return card[measure];
-  const length = styleLengths.find((key) => field === `style.${key}`);
-  if (length !== undefined) return style[length];
-  const level = easeLevels.find((key) => field === `style.ease.${key}`);
-  return level === undefined ? undefined : style.ease?.[level];
+  const [of, first = '', second] = field.split('.');
+  if (of !== 'style') return undefined;
+  const found: unknown = Reflect.get(style, first);
+  const value = second === undefined || !isRecord(found) ? found : found[second];
+  return typeof value === 'number' ? value : undefined;
 }
 
 /** The preset the rules are, figure for figure; rules of a workroom's own are none. */

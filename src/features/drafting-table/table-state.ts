@@ -2,6 +2,7 @@ import type { Overruled } from '#shared/body/card.ts';
 import { balanced } from '#shared/drafting/house-rule-presets.ts';
 import type { HouseRules } from '#shared/drafting/house-rules.ts';
 import type { EdgeRef } from '#shared/drafting/piece.ts';
+import type { Finding } from '#shared/proof/proof.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { drawn, nothingDrawn, type Drawn } from './drawn-table.ts';
@@ -25,6 +26,8 @@ export type TableState = Choices & {
   readonly panel: Panel;
   readonly step?: string | undefined;
   readonly seam?: EdgeRef | undefined;
+  /** Places of the proof that are pointed at. */
+  readonly looked?: Finding['where'] | undefined;
   readonly drawn: Drawn;
 };
 
@@ -44,7 +47,8 @@ export type TableAction =
   | { readonly type: 'cleared' }
   | { readonly type: 'panel'; readonly panel: Panel }
   | { readonly type: 'step'; readonly step: string | undefined }
-  | { readonly type: 'seam'; readonly seam: EdgeRef | undefined };
+  | { readonly type: 'seam'; readonly seam: EdgeRef | undefined }
+  | { readonly type: 'looked'; readonly at: Finding['where'] };
 
 export const emptyTable: TableState = {
   unit: 'cm',
@@ -92,11 +96,13 @@ export function tableState(state: TableState, action: TableAction): TableState {
     case 'cleared':
       return { ...emptyTable, unit: state.unit };
     case 'panel':
-      return { ...state, panel: action.panel, seam: undefined };
+      return { ...state, panel: action.panel, seam: undefined, looked: undefined };
     case 'step':
       return { ...state, step: action.step };
     case 'seam':
       return { ...state, seam: action.seam };
+    case 'looked':
+      return { ...state, looked: action.at };
   }
 }
 

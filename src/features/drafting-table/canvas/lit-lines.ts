@@ -2,6 +2,7 @@ import type { LevelName } from '#shared/drafting/piece.ts';
 import type { Step } from '#shared/drafting/step.ts';
 import type { Draft } from '#shared/engine/draft.ts';
 import { line, type Path } from '#shared/geometry/path.ts';
+import type { Finding } from '#shared/proof/proof.ts';
 import type { Point } from '#shared/geometry/point.ts';
 
 import type { LitSeam } from '../seams.ts';
@@ -18,6 +19,7 @@ export function litLines(
   layout: Layout,
   seam: LitSeam | undefined,
   step: Step | undefined,
+  looked: Finding['where'] = [],
 ): Lit {
   const faults = draft.proof.lines
     .flatMap((line) => line.findings)
@@ -27,9 +29,33 @@ export function litLines(
   return {
     seams: seam?.edges ?? [],
     faults,
-    lines: step === undefined ? [] : stepLines(step, layout),
+    lines: [
+      ...(step === undefined ? [] : stepLines(step, layout)),
+      ...looked.flatMap((place) => placeLines(place, layout)),
+    ],
   };
 }
+
+/** Half the width of the cross at a place the proof looked at, mm. */
+const cross = 12;
+
+/** A place the proof looked at: the point itself, or its edge, or the whole piece. */
+function placeLines({ piece, edge, at }: Finding['where'][number], layout: Layout): Lit['lines'] {
+  const placed = layout.placed.find((each) => each.piece.name === piece);
+  if (placed === undefined) return [];
+  const edges = placed.piece.edges.filter(({ name }) => name === edge);
+  const paths = at === undefined && edges.length === 0 ? [placed.piece.cutLine] : [];
+  const point = at === undefined ? [] : [crossAt(at)];
+  return [...edges.map(({ path }) => path), ...paths, ...point.flat()].map((path) => ({
+    path,
+    at: placed.at,
+  }));
+}
+
+const crossAt = ({ x, y }: Point): readonly Path[] => [
+  [line({ x: x - cross, y: y - cross }, { x: x + cross, y: y + cross })],
+  [line({ x: x - cross, y: y + cross }, { x: x + cross, y: y - cross })],
+];
 
 /** The level a girth is taken at, or a height leads to. */
 const levelOf: Readonly<Record<string, LevelName>> = {

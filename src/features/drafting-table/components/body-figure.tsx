@@ -113,7 +113,7 @@ type BodyFigureProps = { readonly tape: Tape | undefined; readonly label: string
 export const BodyFigure = ({ tape, label }: BodyFigureProps) => (
   <svg
     viewBox="-76 -6 152 412"
-    className="h-full shrink-0"
+    className="h-30 shrink-0 lg:h-40"
     role="img"
     aria-label={
       tape === undefined

@@ -142,7 +142,7 @@ export const DraftingTable = (props: DraftingTableProps) => {
       ) : (
         <>
           <Drawing draft={draft} state={state} place={place} dispatch={dispatch} onPrint={print} />
-          <Foot draft={calm.drawn.draft ?? draft} state={calm} />
+          <Foot draft={calm.drawn.draft ?? draft} state={calm} dispatch={dispatch} />
         </>
       )}
     </div>

@@ -77,7 +77,10 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
     () => litSeam(draft, state.seam, state.unit),
     [draft, state.seam, state.unit],
   );
-  const lit = useMemo(() => litLines(draft, layout, seam, step), [draft, layout, seam, step]);
+  const lit = useMemo(
+    () => litLines(draft, layout, seam, step, state.looked),
+    [draft, layout, seam, step, state.looked],
+  );
   const sheet = useSheet(canvas, { layout, lit, view, size, allowances: !drafting, theme });
 
   const walkSeams = (by: number) => {

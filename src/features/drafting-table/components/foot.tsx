@@ -1,17 +1,24 @@
-import { memo } from 'react';
+import { memo, type Dispatch } from 'react';
 
 import type { Draft } from '#shared/engine/draft.ts';
 import { coreMeasures } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
 import { speak } from '#shared/units/speak.ts';
 
+import { Button } from '../../../ui/button.tsx';
 import { problemWords } from '../problem-words.ts';
-import type { TableState } from '../table-state.ts';
+import type { TableAction, TableState } from '../table-state.ts';
+import { useNearest } from '../use-nearest.ts';
 
-type FootProps = { readonly draft: Draft; readonly state: TableState };
+type FootProps = {
+  readonly draft: Draft;
+  readonly state: TableState;
+  readonly dispatch: Dispatch<TableAction>;
+};
 
-/** Under the drawing: whether it is that of the figures typed, what the knee allows, and each warning once. */
-export const Foot = memo(function Foot({ draft, state }: FootProps) {
+/** Under the drawing: whether it is that of the figures typed, what the knee allows, and each warning once that nobody has answered. */
+export const Foot = memo(function Foot({ draft, state, dispatch }: FootProps) {
+  const wayOut = useNearest(state);
   const { drawn, unit } = state;
   const fault = drawn.problems.find((problem) => problem.severity === 'error');
   return (
@@ -25,10 +32,20 @@ export const Foot = memo(function Foot({ draft, state }: FootProps) {
           </p>
         )}
       </div>
+      {wayOut !== undefined && (
+        <p className="flex flex-wrap items-center gap-x-3">
+          The nearest that can be drawn:
+          <Button slim onClick={() => dispatch({ type: 'put', parts: wayOut.parts })}>
+            {wayOut.words}
+          </Button>
+        </p>
+      )}
       {drawn.fresh &&
-        drawn.problems.map((problem) => (
-          <p key={`${problem.field} ${problem.code}`}>{speak(problem.said, unit)}</p>
-        ))}
+        drawn.problems
+          .filter(({ overruled }) => overruled === undefined)
+          .map((problem) => (
+            <p key={`${problem.field} ${problem.code}`}>{speak(problem.said, unit)}</p>
+          ))}
       <p
         className={`${draft.walking.caution ? '' : 'text-slate'} ${drawn.fresh ? '' : 'max-sm:hidden'}`}
       >

@@ -9,6 +9,8 @@ import type { FieldKey } from '../fields.ts';
 import type { TableState } from '../table-state.ts';
 import { BodyFigure } from './body-figure.tsx';
 import { ClearCard } from './clear-card.tsx';
+import { Doubts } from './doubts.tsx';
+import { HowTaken } from './how-taken.tsx';
 import { FigureField, fieldProps } from './figure-field.tsx';
 
 type MeasureCardProps = {
@@ -64,21 +66,9 @@ export const MeasureCard = memo(function MeasureCard({
       <h2 id="measure-card" className="heading">
         Measure card
       </h2>
-      <div className="sticky -top-4 z-10 -mx-1 flex h-34 gap-3 border-b border-rule bg-cloth px-1 py-2 lg:h-44">
+      <div className="sticky -top-4 z-10 -mx-1 flex min-h-34 gap-3 border-b border-rule bg-cloth px-1 py-2 lg:min-h-44">
         <BodyFigure tape={guide?.tape} label={guide?.label ?? ''} />
-        <p id="how-taken" className="text-sm leading-snug">
-          {guide === undefined ? (
-            <span className="text-slate">
-              Ten measures make a gown. Type them as you read them off the tape: 36 1/2, 36.5 in,
-              92.7 cm. Enter goes to the next.
-            </span>
-          ) : (
-            <>
-              <strong className="block font-semibold">{guide.term}</strong>
-              {guide.how}
-            </>
-          )}
-        </p>
+        <HowTaken measure={key} unit={state.unit} />
       </div>
       <form
         onSubmit={(event) => {
@@ -104,6 +94,7 @@ export const MeasureCard = memo(function MeasureCard({
           />
         </label>
         {coreMeasures.map(row)}
+        <Doubts state={state} dispatch={dispatch} />
         <button
           type="button"
           aria-expanded={all}

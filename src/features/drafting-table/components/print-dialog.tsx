@@ -1,18 +1,18 @@
-import { useMemo, useState } from 'react';
+import { useState } from 'react';
 import { Link } from 'react-router-dom';
 
 import type { Draft } from '#shared/engine/draft.ts';
 import { presetOrder } from '#shared/sheets/print-order.ts';
-import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import type { PaperName } from '#shared/sheets/papers.ts';
 
 import { printsOnLetter } from '../../../lib/reader.ts';
+import { usePlan, type Planning } from '../../../lib/use-plan.ts';
 import { Dialog } from '../../../ui/dialog.tsx';
 import { Segmented } from '../../../ui/segmented.tsx';
 import { lastGoodFigures } from '../last-good-figures.ts';
 import type { TableState } from '../table-state.ts';
 import { FilesToKeep } from './files-to-keep.tsx';
-import { PrintRow } from './print-row.tsx';
+import { countedSheets, PrintRow } from './print-row.tsx';
 
 type PrintDialogProps = {
   readonly draft: Draft;
@@ -30,13 +30,8 @@ export const PrintDialog = ({ open, onClose, ...rest }: PrintDialogProps) => (
 
 const PrintChoices = ({ draft, state }: Omit<PrintDialogProps, 'open' | 'onClose'>) => {
   const [paper, setPaper] = useState<PaperName>(() => (printsOnLetter() ? 'Letter' : 'A4'));
-  const sheets = useMemo(
-    () => ({
-      toile: planSheets(draft.pieces, presetOrder(paper, 'bodice-toile')).sheets,
-      gown: planSheets(draft.pieces, presetOrder(paper, 'whole-gown')).sheets,
-    }),
-    [draft, paper],
-  );
+  const toile = usePlan(draft.pieces, draft.number, presetOrder(paper, 'bodice-toile'));
+  const gown = usePlan(draft.pieces, draft.number, presetOrder(paper, 'whole-gown'));
   const { unit, drawn } = state;
   const order = { draft, unit, paper };
   return (
@@ -72,19 +67,19 @@ const PrintChoices = ({ draft, state }: Omit<PrintDialogProps, 'open' | 'onClose
         <PrintRow
           title="Chalk sheet"
           note="Every point as a distance, at quarter scale: draft straight onto paper or cloth."
-          sheets={1}
+          sheets={countedSheets(1)}
           order={{ ...order, kind: 'chalk-sheet' }}
         />
         <PrintRow
           title="Bodice toile"
           note="The top at true scale, to try on in calico first."
-          sheets={sheets.toile}
+          sheets={sheetsIn(toile.planning)}
           order={{ ...order, kind: 'bodice-toile' }}
         />
         <PrintRow
           title="Whole gown"
           note="Every piece at true scale, to glue together."
-          sheets={sheets.gown}
+          sheets={sheetsIn(gown.planning)}
           order={{ ...order, kind: 'whole-gown' }}
         />
       </div>
@@ -106,3 +101,9 @@ const PrintChoices = ({ draft, state }: Omit<PrintDialogProps, 'open' | 'onClose
     </>
   );
 };
+
+/** Sheets of a plan in words, once they are counted; a print can be ordered before. */
+function sheetsIn(planning: Planning): string | undefined {
+  if (planning.kind === 'planned') return countedSheets(planning.plan.sheets);
+  return planning.kind === 'refused' ? 'too many sheets' : undefined;
+}

@@ -2,14 +2,15 @@ import { memo, type Dispatch } from 'react';
 
 import type { EdgeRef } from '#shared/drafting/piece.ts';
 import type { Draft } from '#shared/engine/draft.ts';
-import type { ProofLine, SeamRow } from '#shared/proof/proof.ts';
-import { formatLength, formatWithUnit } from '#shared/units/format-length.ts';
+import type { SeamRow } from '#shared/proof/proof.ts';
+import { formatLength } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 
 import { seamIndex, seamPieces, seamWord } from '../seams.ts';
 import type { TableAction } from '../table-state.ts';
 import { GirthAudit } from './girth-audit.tsx';
+import { ProofCheck } from './proof-check.tsx';
 
 type ProofPanelProps = {
   readonly draft: Draft;
@@ -101,7 +102,7 @@ export const ProofPanel = memo(function ProofPanel({
       <div>
         <h3 className="heading">Checks</h3>
         {proof.lines.map((line) => (
-          <Check key={line.number} line={line} unit={unit} />
+          <ProofCheck key={line.number} line={line} unit={unit} dispatch={dispatch} />
         ))}
       </div>
     </section>
@@ -114,31 +115,6 @@ function partnerWords(row: SeamRow, unit: Unit): string {
   if (!row.holds) return `${formatLength(row.second.length, unit)}: does not meet`;
   return row.ease === 0 ? 'equal' : `eased ${formatLength(Math.abs(row.ease), unit)}`;
 }
-
-const Check = ({ line, unit }: { line: ProofLine; unit: Unit }) => {
-  const failing = line.findings.filter((finding) => !finding.holds);
-  return (
-    <details className="border-b border-rule" open={failing.length > 0}>
-      <summary className="flex justify-between gap-3 py-2">
-        <span>{line.title}</span>
-        <span className={line.holds ? 'text-verdigris' : 'font-semibold text-madder'}>
-          {line.holds ? 'holds' : `${failing.length} of ${line.findings.length} fail`}
-        </span>
-      </summary>
-      <ul className="figures pb-2 text-sm">
-        {[...failing, ...line.findings.filter((finding) => finding.holds)].map((finding) => (
-          <li
-            key={speak(finding.said, unit)}
-            className={`py-px ${finding.holds ? 'text-slate' : 'text-madder'}`}
-          >
-            {speak(finding.said, unit)}
-            {!finding.holds && ` (within ${formatWithUnit(finding.bound, unit)})`}
-          </li>
-        ))}
-      </ul>
-    </details>
-  );
-};
 
 /** A tick where it holds, a mark of exclamation where not; neither speaks for figures that are not drawn. */
 const VerdictMark = ({ holds, fresh }: { holds: boolean; fresh: boolean }) => {

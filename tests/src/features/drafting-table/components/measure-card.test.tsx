@@ -84,3 +84,32 @@ test('the measures of an arm stand last, for sleeves', () => {
     'card.wristGirth',
   ]);
 });
+
+test('an unlikely measure is kept with a reason, which can be taken back', () => {
+  render(<Card />);
+  for (const [label, text] of Object.entries(middle)) type(label, text);
+  expect(screen.queryByText('Look again')).toBeNull();
+  type('Waist', '98');
+  expect(screen.getByText(/Waist 98\.0 cm is not smaller than bust/)).toBeDefined();
+  fireEvent.click(screen.getAllByRole('button', { name: 'Keep it, with a reason' })[0] ?? document);
+  const keep = screen.getByRole<HTMLButtonElement>('button', { name: 'Keep' });
+  expect(keep.disabled).toBe(true);
+  type('Why it is right', 'measured twice, eight months gone');
+  fireEvent.click(keep);
+  expect(screen.getByText(/✓ Kept: measured twice, eight months gone/)).toBeDefined();
+  fireEvent.click(screen.getByRole('button', { name: 'Ask again' }));
+  expect(screen.queryByText(/✓ Kept/)).toBeNull();
+});
+
+const middle = {
+  Bust: '92',
+  'Under-bust': '78',
+  Waist: '73.8',
+  Hip: '99',
+  'Bust span': '19',
+  'Side neck to bust point': '27.5',
+  'Side neck to under-bust': '34.5',
+  'Front waist length': '44',
+  'Waist to hip': '20.5',
+  'Waist to floor': '105',
+};
