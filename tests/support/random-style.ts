@@ -10,6 +10,7 @@ import { checkStyle } from '#shared/drafts/gown/style-check.ts';
 import { easeLevels, styleChoices, styleLengths } from '#shared/drafts/gown/style-card.ts';
 import type {
   EaseLevel,
+  GownStyle,
   StyleCard,
   StyleChoice,
   StyleLength,
@@ -84,7 +85,7 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   const { shaping: wished, ...named } = draws.named;
   // Shaping first: how wide a hem may be hangs on the seams it leaves.
   let style: StyleCard = {
-    ...(fits(eased) ? eased : {}),
+    ...(fits(eased) && sideIsFair(eased, body, levels) ? eased : {}),
     ...(wished === undefined ? {} : { shaping: wished }),
   };
   for (const [choice, name] of Object.entries(named)) {
@@ -105,19 +106,27 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   return style;
 }
 
+/** Whether the side seam passes the girths this ease makes: what the draft refuses is not a style to draw. */
+const sideIsFair = (style: StyleCard, body: Body, levels: BodyLevels): boolean =>
+  !refusedFor('side-bends', resolveStyle(style, body, levels), body, levels);
+
 /** Whether darts can shape this bust under either preset: what the draft refuses is not a style to draw. */
 function dartsReach(style: StyleCard, body: Body, levels: BodyLevels): boolean {
   const darted = resolveStyle({ ...style, shaping: 'darts' }, body, levels);
-  return Object.values(houseRulePresets).every((rules) => {
+  return !refusedFor('darts-too-wide', darted, body, levels);
+}
+
+/** Whether either preset refuses a style for this reason. */
+const refusedFor = (reason: string, style: GownStyle, body: Body, levels: BodyLevels): boolean =>
+  Object.values(houseRulePresets).some((rules) => {
     try {
-      drawGown(openTable(), body, levels, darted, rules);
-      return true;
+      drawGown(openTable(), body, levels, style, rules);
+      return false;
     } catch (error) {
       if (!(error instanceof DraftingError)) throw error;
-      return !error.problems.some(({ code }) => code === 'darts-too-wide');
+      return error.problems.some(({ code }) => code === reason);
     }
   });
-}
 
 function easeOf(limits: StyleLimits, given: (key: StyleKey) => Draw | undefined): StyleCard {
   const ease: { [L in EaseLevel]?: number } = {};

@@ -11,7 +11,7 @@ import {
   shareSuppression,
   sideLine,
 } from './side-line.ts';
-import type { SideHeights, SideWidths, Suppression } from './side-line.ts';
+import type { SideHeights, SideLeans, SideWidths, Suppression } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
 import { type SideArcs, towards, truedHeights } from './truing.ts';
 import { closedSeam, fallFor, seamAt } from './waist-seam.ts';
@@ -19,7 +19,9 @@ import { closedSeam, fallFor, seamAt } from './waist-seam.ts';
 const sideLevels = ['underarm', 'bust', 'underbust', 'seam', 'topHip', 'hip', 'knee'] as const;
 
 /** Quarter widths at the levels, millimetres. */
-export type QuarterWidths = { readonly [L in keyof SideWidths as Exclude<L, 'lean'>]-?: number };
+export type QuarterWidths = {
+  readonly [L in keyof SideWidths as Exclude<L, 'lean' | 'leans'>]-?: number;
+};
 
 /** What a half is drawn from. */
 export type HalfInputs = {
@@ -40,6 +42,8 @@ export type HalfInputs = {
   readonly sideHelps: boolean;
   readonly waistSeam: GownStyle['waistSeam'];
   readonly fading: Fading;
+  /** Leans of the side at bust and hip, where upright it would bend too often. */
+  readonly leans?: SideLeans;
   /** Slope (dy/dx) at which the waist seam arrives at the side; the half's own square where absent. */
   readonly seamSlope?: number;
   /** An earlier drawing of the same half to start from. */
@@ -178,7 +182,7 @@ type DartRun = { readonly from: number; readonly topHip: number };
  * they still hold there.
  */
 function widthsAt(
-  { quarters, lean, fading }: HalfInputs,
+  { quarters, lean, leans, fading }: HalfInputs,
   darts: DartPlan,
   waist: number,
   intake: number,
@@ -195,6 +199,7 @@ function widthsAt(
     hip: quarters.hip,
     knee: quarters.knee,
     lean,
+    ...(leans && { leans }),
   };
 }
 

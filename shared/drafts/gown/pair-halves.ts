@@ -1,14 +1,16 @@
 import { DraftingError } from '../../drafting/drafting-error.ts';
+import { mostSideChanges } from '../../drafting/fair-bends.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import { slopeAt } from '../../geometry/profile.ts';
 import { said } from '../../units/said.ts';
 import { type Contour, contours, outrightContours } from './contour.ts';
 import { fadingOf } from './fading.ts';
+import { fairSide, isFair } from './fair-side.ts';
 import { type Half, type HalfInputs, type QuarterWidths, drawHalf } from './half.ts';
 import { refuseCrowdedIntakes } from './intakes.ts';
 import type { Quarters } from './quarters.ts';
 import { sideArcs } from './truing.ts';
-import type { SideHeights } from './side-line.ts';
+import type { SideHeights, SideLeans } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
 
 /** Both halves of the body in lines, the back trued to the front, with what each takes above the bust. */
@@ -90,13 +92,34 @@ const cannotBeDrawn = (): DraftingError =>
 export function pairHalves(inputs: PairInputs): PairedHalves {
   // Where the side cannot help the darts and still be trued, the darts take all of it.
   const darted = inputs.style.shaping === 'darts';
-  const pair = (darted ? pairWith(inputs, true) : undefined) ?? pairWith(inputs, false);
+  const pair = drawFairly(inputs, darted);
   if (!pair || (inputs.style.waistSeam !== 'none' && cornersAtSeam(pair) > crookedCorner))
     throw cannotBeDrawn();
   refuseCrowdedIntakes(pair.front);
   refuseCrowdedIntakes(pair.back);
   return pair;
 }
+
+/** Finished girths from the chest to the knee seam, mm. */
+const finishedGirths = ({ front, back }: PairInputs['quarters']): readonly number[] =>
+  (['chest', 'bust', 'underbust', 'seam', 'waist', 'topHip', 'hip', 'knee'] as const).map(
+    (level) => 2 * (front[level].value + back[level].value),
+  );
+
+/** Girths that no fair side seam passes, whatever its share and its leans. */
+const bendsTooOften = (most: number): DraftingError =>
+  new DraftingError([
+    {
+      code: 'side-bends',
+      severity: 'error',
+      field: 'card.waistGirth',
+      with: ['card.bustGirth', 'card.topHipGirth', 'card.hipGirth', 'style.ease.waist'],
+      said: said`A side seam through these finished girths would change its bend more than ${most} times between arm and knee, and show it. Bring the eases at bust, waist, top hip and hip nearer to each other, or measure these girths again.`,
+    },
+  ]);
+
+/** Shares of the suppression that are tried where a side seam bends too often with the house's own. */
+const otherShares = [0.7, 1, 0.25, 0];
 
 /** A waist seam may meet a side seam this far from square, degrees: more, and the corner cannot be sewn fair. */
 const crookedCorner = 25;
@@ -110,7 +133,45 @@ const cornersAtSeam = ({ front, back }: Drawn): number => {
 type DartCounts = { readonly front: 1 | 2; readonly back: 1 | 2 };
 type Drawn = { readonly front: Half; readonly back: Half };
 
-function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefined {
+/**
+ * Both halves with side seams that bend no oftener than their girths ask, by the house's share of the
+ * suppression or the nearest that will do. Intakes given outright are drawn as they come.
+ * @throws DraftingError where the side would bend too often whatever its share.
+ */
+function drawFairly(inputs: PairInputs, darted: boolean): PairedHalves | undefined {
+  const outright = inputs.rules.intakes !== undefined;
+  const most = outright ? Infinity : mostSideChanges(finishedGirths(inputs.quarters));
+  const shares = outright ? [] : otherShares;
+  let drawable = false;
+  for (const sideShare of [inputs.rules.sideShare, ...shares]) {
+    const shared = { ...inputs, rules: { ...inputs.rules, sideShare } };
+    for (const helps of darted ? [true, false] : [false]) {
+      const pair = fairPair(shared, helps, most);
+      if (pair && isFair(pair.front, most) && isFair(pair.back, most)) return pair;
+      drawable ||= pair !== undefined;
+    }
+  }
+  if (drawable) throw bendsTooOften(most);
+  return undefined;
+}
+
+/** Both halves, with sides that lean at bust or hip where upright they would bend too often. */
+function fairPair(inputs: PairInputs, sideHelps: boolean, most: number): PairedHalves | undefined {
+  const upright = pairWith(inputs, sideHelps, {});
+  const leans = upright && fairLeans(upright, most);
+  return (leans && pairWith(inputs, sideHelps, leans)) ?? upright;
+}
+
+/** Leans of the two sides where upright they would bend too often. */
+type Leans = { readonly front?: SideLeans; readonly back?: SideLeans };
+
+function fairLeans({ front, back }: Drawn, most: number): Leans | undefined {
+  const leans = { front: fairSide(front, most), back: fairSide(back, most) };
+  if (!leans.front && !leans.back) return undefined;
+  return { ...(leans.front && { front: leans.front }), ...(leans.back && { back: leans.back }) };
+}
+
+function pairWith(inputs: PairInputs, sideHelps: boolean, leans: Leans): PairedHalves | undefined {
   const { levels, style, rules, quarters } = inputs;
   const widths = { front: widthsOf(quarters.front), back: widthsOf(quarters.back) };
   const contour = (rules.intakes ? outrightContours(rules.intakes.topLine) : contours)(
@@ -131,6 +192,7 @@ function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefi
     lean: contour.front.lean,
     axis: inputs.frontAxis,
     dartTip: tip(0),
+    ...(leans.front && { leans: leans.front }),
   };
   const backInputs: HalfInputs = {
     ...base,
@@ -139,6 +201,7 @@ function pairWith(inputs: PairInputs, sideHelps: boolean): PairedHalves | undefi
     lean: contour.back.lean,
     axis: widths.back.underbust / 2,
     dartTip: tip(backLonger),
+    ...(leans.back && { leans: leans.back }),
   };
   const draw = (count: DartCounts, last?: Drawn, seamSlope?: number): Drawn | undefined => {
     const slope = seamSlope === undefined ? {} : { seamSlope };

@@ -37,9 +37,13 @@ export type SideWidths = {
   /** Held only where a dart would turn negative there. */
   readonly underbust?: number;
   readonly seam?: number;
+  readonly leans?: SideLeans;
 };
 
-/** Bust to hip: the curvature-continuous spline, upright at both ends. */
+/** Leans (dx/dy) of a side seam at bust and hip; upright where absent. */
+export type SideLeans = { readonly bust?: number; readonly hip?: number };
+
+/** Bust to hip: the curvature-continuous spline, upright at both ends where it has no lean of its own. */
 export function bustToHip(heights: SideHeights, widths: SideWidths): Profile {
   const knots: Knot[] = [{ y: heights.bust, x: widths.bust }];
   if (widths.underbust !== undefined) knots.push({ y: heights.underbust, x: widths.underbust });
@@ -49,7 +53,7 @@ export function bustToHip(heights: SideHeights, widths: SideWidths): Profile {
     { y: heights.topHip, x: widths.topHip },
     { y: heights.hip, x: widths.hip },
   );
-  return clampedSpline(knots, 0, 0);
+  return clampedSpline(knots, widths.leans?.bust ?? 0, widths.leans?.hip ?? 0);
 }
 
 /**
@@ -58,15 +62,21 @@ export function bustToHip(heights: SideHeights, widths: SideWidths): Profile {
  */
 export function sideLine(heights: SideHeights, widths: SideWidths): Profile {
   const rise = heights.bust - heights.underarm;
+  const { bust: bustLean = 0, hip: hipLean = 0 } = widths.leans ?? {};
   return [
     ...cubicProfile(
       { y: heights.underarm, x: widths.bust - widths.lean },
       { y: heights.bust, x: widths.bust },
-      (2 * widths.lean) / rise,
-      0,
+      (2 * widths.lean) / rise - bustLean,
+      bustLean,
     ),
     ...bustToHip(heights, widths),
-    ...cubicProfile({ y: heights.hip, x: widths.hip }, { y: heights.knee, x: widths.knee }, 0, 0),
+    ...cubicProfile(
+      { y: heights.hip, x: widths.hip },
+      { y: heights.knee, x: widths.knee },
+      hipLean,
+      0,
+    ),
   ];
 }
 
