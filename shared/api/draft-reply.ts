@@ -7,6 +7,7 @@ import {
 } from '../body/card.ts';
 import { handleKeys } from '../drafting/construction.ts';
 import { levelNames, type LevelName } from '../drafting/piece.ts';
+import { styleChoices } from '../drafts/gown/style-card.ts';
 import type { BodiceBlockDraft } from '../engine/draft-bodice-block.ts';
 import type { SkirtBlockDraft } from '../engine/draft-skirt-block.ts';
 import type { Draft } from '../engine/draft.ts';
@@ -95,6 +96,16 @@ const construction = z.object({
       outer: edgeRef,
     }),
   ),
+  opening: z.object({
+    closure: z.enum(styleChoices.closure),
+    hips: z.number(),
+    least: z.number(),
+    give: z.number(),
+    closedTop: z.exactOptional(z.number()),
+  }),
+  knees: z.object({ standing: z.number(), step: z.number(), caution: z.boolean() }),
+  gaps: z.exactOptional(z.object(someHeights())),
+  intakesGiven: z.exactOptional(z.boolean()),
 });
 
 const handle = z.object({

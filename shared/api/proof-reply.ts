@@ -6,6 +6,7 @@ import { saidSchema } from './problem.ts';
 
 const finding = z.object({
   holds: z.boolean(),
+  reported: z.exactOptional(z.literal(true)),
   said: saidSchema,
   value: z.number(),
   expected: z.number(),

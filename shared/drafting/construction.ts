@@ -48,10 +48,30 @@ export type TopOpening = {
   readonly outer: { readonly piece: string; readonly edge: string };
 };
 
+/** How the garment is got into, whole-body mm. */
+export type Opening = {
+  readonly closure: 'centreBackZip' | 'sideZip' | 'laced';
+  /** What must pass where it stays closed: the hips, as it is stepped into. */
+  readonly hips: number;
+  /** The least of hips and shoulders, which a closed upper edge must pass. */
+  readonly least: number;
+  /** Part by which the cloth may be stretched for that; none in a woven one. */
+  readonly give: number;
+  /** Girth of an upper edge that stays closed all round; absent where the opening reaches it. */
+  readonly closedTop?: number;
+};
+
 /** What the proof needs to know of the construction that the pieces alone do not tell. */
 export type Construction = {
   readonly wanted: readonly WantedGirth[];
   /** x of the side seam lines carried up to chest level, front and back. */
   readonly chestSide: { readonly front: number; readonly back: number };
   readonly topOpenings: readonly TopOpening[];
+  readonly opening: Opening;
+  /** Girth of both knees standing, the longest step the knee seam allows, and whether that is short; mm. */
+  readonly knees: { readonly standing: number; readonly step: number; readonly caution: boolean };
+  /** What lacing leaves open between the two centre back edges, by level, mm. */
+  readonly gaps?: { readonly [L in LevelName]?: number };
+  /** The house rules give intakes outright: the side seam takes the rest, and its bends are only said. */
+  readonly intakesGiven?: boolean;
 };

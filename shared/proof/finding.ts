@@ -12,6 +12,34 @@ export const finding = (
   where: readonly Place[],
 ): Finding => ({ holds: Math.abs(value - expected) <= bound, said, value, expected, bound, where });
 
+/** A finding that holds while the value is at least as much as asked, or less by the bound. */
+export const atLeast = (
+  value: number,
+  least: number,
+  bound: number,
+  said: Said,
+  where: readonly Place[],
+): Finding => ({ holds: value >= least - bound, said, value, expected: least, bound, where });
+
+/** A finding that holds while the value is at most as much as asked. */
+export const atMost = (
+  value: number,
+  most: number,
+  said: Said,
+  where: readonly Place[],
+): Finding => ({ holds: value <= most, said, value, expected: most, bound: 0, where });
+
+/** Something measured for the maker to know and compared with nothing: it can neither hold nor fail. */
+export const reported = (value: number, said: Said, where: readonly Place[]): Finding => ({
+  holds: true,
+  reported: true,
+  said,
+  value,
+  expected: value,
+  bound: 0,
+  where,
+});
+
 /** A finding about something that is not there to be measured. */
 export const missing = (said: Said, where: readonly Place[]): Finding => ({
   holds: false,
@@ -22,7 +50,7 @@ export const missing = (said: Said, where: readonly Place[]): Finding => ({
   where,
 });
 
-/** A line of the proof: it holds when every finding does, and something was looked at. */
+/** A line of the proof: it holds when every finding does, and something was compared. */
 export const proofLine = (
   number: ProofLine['number'],
   title: string,
@@ -30,6 +58,6 @@ export const proofLine = (
 ): ProofLine => ({
   number,
   title,
-  holds: findings.length > 0 && findings.every((each) => each.holds),
+  holds: findings.some((each) => each.reported !== true) && findings.every((each) => each.holds),
   findings,
 });

@@ -61,18 +61,22 @@ export function widthAtLevel(piece: Piece, level: LevelLine): number | undefined
   return Math.abs(to.x - from.x) - taken;
 }
 
+/** Pieces that no level of the body crosses: those inside, and the flare below. */
+const isBeside = ({ part }: Piece): boolean => part === 'inner' || part === 'flare';
+
 type Look = {
   readonly girth: number | undefined;
   readonly where: Finding['where'];
   readonly of: string;
 };
 
-function alongLevel(pieces: readonly Piece[], level: LevelName): Look {
+/** Twice the widths of the pieces along a level, mm; no answer where a piece does not reach it. */
+export function levelGirth(pieces: readonly Piece[], level: LevelName): Look {
   const where: { piece: string; at: Point }[] = [];
   let half: number | undefined = 0;
   for (const piece of pieces) {
     const line = piece.levels.find((each) => each.level === level);
-    if (line === undefined || piece.part === 'flare') continue;
+    if (line === undefined || isBeside(piece)) continue;
     where.push({ piece: piece.name, at: line.to });
     const width = widthAtLevel(piece, line);
     half = half === undefined || width === undefined ? undefined : half + width;
@@ -144,12 +148,17 @@ function looksAt(
   if (level === 'waist-seam') {
     return [alongWaistEdges(pieces, 'top'), alongWaistEdges(pieces, 'middle')];
   }
-  return [alongLevel(pieces, level)];
+  return [levelGirth(pieces, level)];
 }
 
-function girthFinding(wanted: WantedGirth, { girth, where, of }: Look): Finding {
+function girthFinding(
+  wanted: WantedGirth,
+  { girth: cloth, where, of }: Look,
+  gap: number,
+): Finding {
   const title = levelTitles[wanted.level];
-  if (girth === undefined) return missing([`${title}: not found on the ${of}.`], where);
+  if (cloth === undefined) return missing([`${title}: not found on the ${of}.`], where);
+  const girth = cloth + gap;
   const asked: Said =
     wanted.body === undefined
       ? [`${title}: asked `, fine(wanted.wanted)]
@@ -164,7 +173,12 @@ function girthFinding(wanted: WantedGirth, { girth, where, of }: Look): Finding 
     girth,
     wanted.wanted,
     bound,
-    [...asked, `; the ${of} measure `, fine(girth), '.'],
+    [
+      ...asked,
+      `; the ${of} measure `,
+      fine(cloth),
+      ...(gap === 0 ? ['.'] : [' and the lacing gap ', fine(gap), '.']),
+    ],
     where,
   );
 }
@@ -183,7 +197,7 @@ export function proveGirths(
   const rows: GirthRow[] = [];
   for (const wanted of construction.wanted) {
     const own = looksAt(wanted.level, pieces, construction).map((look) =>
-      girthFinding(wanted, look),
+      girthFinding(wanted, look, construction.gaps?.[wanted.level] ?? 0),
     );
     findings.push(...own);
     if (wanted.level === 'chest') chest.push(...own);

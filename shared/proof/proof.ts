@@ -5,6 +5,8 @@ import type { Said } from '../units/said.ts';
 /** One place the proof looked at: what was measured there, and what it had to be. */
 export type Finding = {
   readonly holds: boolean;
+  /** Nothing was compared: it is said for the maker to know. */
+  readonly reported?: true;
   /** In plain words, with the numbers: `Side seam: front 565.2, back 565.2`. */
   readonly said: Said;
   readonly value: number;

@@ -2,11 +2,13 @@ import type { Construction } from '../drafting/construction.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
 import type { Said } from '../units/said.ts';
+import { proveBends } from './bends.ts';
 import { proveCorners } from './corners.ts';
 import { proveDarts } from './darts.ts';
 import { proveGirths } from './girths.ts';
 import { hasLength } from './crossing-itself.ts';
 import { joinedPairs, placeEdges } from './joined-edges.ts';
+import { proveOpening } from './opening.ts';
 import { proveOutlines } from './outlines.ts';
 import type { Proof, ProofLine } from './proof.ts';
 import { proveSeams } from './seams.ts';
@@ -38,7 +40,7 @@ const measurable = (piece: FinishedPiece): FinishedPiece => ({
   ),
 });
 
-/** The proof of a gown (method section 8, lines 1 to 5 and 8), measured from the pieces themselves. */
+/** The proof of a gown (method section 8, all eight lines), measured from the pieces themselves. */
 export function prove({ pieces: drawn, construction, rules }: ProofInput): Proof {
   const pieces = drawn.map(measurable);
   const placed = placeEdges(pieces);
@@ -51,6 +53,8 @@ export function prove({ pieces: drawn, construction, rules }: ProofInput): Proof
     proveDarts(pieces, pairs),
     proveCorners(pieces, pairs),
     proveOutlines(pieces, rules),
+    proveBends(pieces, construction.wanted, construction.intakesGiven === true),
+    proveOpening(pieces, construction),
     proveTopEdge(pieces, construction, girths.chest),
   ];
   return {

@@ -1,7 +1,7 @@
 import type { Edge, Notch, Piece } from '../drafting/piece.ts';
 import { lengthBefore, pathLength } from '../geometry/curve.ts';
 import { fine } from '../units/said.ts';
-import { finding, missing, proofLine } from './finding.ts';
+import { finding, missing, proofLine, reported } from './finding.ts';
 import { type JoinedPair, type Placed, type PlacedEdge, keyOf, spoken } from './joined-edges.ts';
 import { nearestPlace } from './nearest-place.ts';
 import type { Finding, ProofLine, SeamRow } from './proof.ts';
@@ -120,15 +120,26 @@ function walk(pair: JoinedPair): { readonly row: SeamRow; readonly findings: rea
   };
 }
 
+/**
+ * A centre seam, whose two sides are cut from one drawing: they cannot differ, so its length is said and
+ * only its notches are looked at.
+ */
 function walkSelf({ piece, edge }: PlacedEdge): { row: SeamRow; findings: readonly Finding[] } {
   const length = pathLength(edge.path);
   const side = { piece: piece.name, edge: edge.name, length };
   const title = `${piece.title}, ${spoken(edge.name)}, left to right`;
-  const said = [`${title}: `, fine(length), ' on both, cut as a pair.'];
   const where = [{ piece: piece.name, edge: edge.name }];
+  const astray = notchesOf(piece, edge)
+    .filter((notch) => arcOfNotch(edge, notch) === undefined)
+    .map((notch) =>
+      missing([`${title}: the notch “${spoken(notch.name)}” is not on its seam.`], where),
+    );
   return {
-    row: { title, first: side, second: side, ease: 0, holds: true },
-    findings: [finding(length, length, bound, said, where)],
+    row: { title, first: side, second: side, ease: 0, holds: astray.length === 0 },
+    findings: [
+      reported(length, [`${title}: `, fine(length), ', cut as a pair from one drawing.'], where),
+      ...astray,
+    ],
   };
 }
 

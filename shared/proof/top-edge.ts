@@ -2,7 +2,7 @@ import type { Construction } from '../drafting/construction.ts';
 import type { Piece } from '../drafting/piece.ts';
 import { pathLength } from '../geometry/curve.ts';
 import { fine } from '../units/said.ts';
-import { finding, missing, proofLine } from './finding.ts';
+import { finding, missing, proofLine, reported } from './finding.ts';
 import type { Finding, ProofLine } from './proof.ts';
 import { type MeasuredOpening, measureOpenings } from './top-openings.ts';
 
@@ -23,16 +23,20 @@ function openingFinding({ asked, width }: MeasuredOpening): Finding {
   );
 }
 
-/** Length of the finished top edge, darts and seams closed, round the whole body. */
+/** Length of the finished top edge, darts and seams closed, round the whole body: said, compared with nothing. */
 function edgeFinding(pieces: readonly Piece[]): Finding {
-  const tops = pieces.flatMap((piece) =>
-    piece.edges.filter((edge) => edge.kind === 'top').map((edge) => ({ piece: piece.name, edge })),
-  );
+  const tops = pieces
+    .filter(({ part }) => part !== 'inner')
+    .flatMap((piece) =>
+      piece.edges
+        .filter((edge) => edge.kind === 'top')
+        .map((edge) => ({ piece: piece.name, edge })),
+    );
   const length = 2 * tops.reduce((sum, { edge }) => sum + pathLength(edge.path), 0);
   const where = tops.map(({ piece, edge }) => ({ piece, edge: edge.name }));
   return tops.length === 0
     ? missing(['No top edge is drawn.'], [])
-    : finding(length, length, bound, ['The closed top edge is ', fine(length), ' long.'], where);
+    : reported(length, ['The closed top edge is ', fine(length), ' long.'], where);
 }
 
 /** Proof line 8: the edge above the bust has had its share taken out, so it cannot gape. */

@@ -4,6 +4,7 @@ import type { Edge, FinishedPiece } from '#shared/drafting/piece.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
 import { finishPiece } from '#shared/finishing/finish-piece.ts';
 import { endOf, endTangent, startOf } from '#shared/geometry/curve.ts';
+import { type Path, cubic } from '#shared/geometry/path.ts';
 import { type Point, distance, point, scale } from '#shared/geometry/point.ts';
 import { prove } from '#shared/proof/prove.ts';
 import { middleBody } from '../support/middle-body.ts';
@@ -48,6 +49,20 @@ const afterMoving = (name: string, place: Point, by: Point): readonly number[] =
   const redrawn = withPiece(draft.pieces, name, () => finishPiece(moved, balanced, label));
   return failedLines(redrawn);
 };
+
+/** A straight edge as an S that swings so far to either side, upright to its ends as before. */
+function wave(path: Path, by: number): Path {
+  const [from, until] = [placeOf(startOf(path)), placeOf(endOf(path))];
+  const at = (share: number, off: number): Point => ({
+    x: from.x + share * (until.x - from.x),
+    y: from.y + share * (until.y - from.y) + off,
+  });
+  const hill = (start: number, off: number): Path => [
+    cubic(at(start, 0), at(start + 0.08, 0), at(start + 0.17, off), at(start + 0.25, off)),
+    cubic(at(start + 0.25, off), at(start + 0.33, off), at(start + 0.42, 0), at(start + 0.5, 0)),
+  ];
+  return [...hill(0, by), ...hill(0.5, -by)];
+}
 
 describe('one point of the sample gown moved by a millimetre', () => {
   test('nothing fails before anything is moved', () => {
@@ -102,6 +117,50 @@ describe('one point of the sample gown moved by a millimetre', () => {
       }
     },
   );
+
+  test('line 6: a knee seam that waves by three millimetres is found by its bends', () => {
+    const waved = withPiece(draft.pieces, 'front-middle', (piece) =>
+      finishPiece(
+        {
+          ...piece,
+          edges: piece.edges.map((edge) =>
+            edge.name === 'knee' ? { ...edge, path: wave(edge.path, 3) } : edge,
+          ),
+        },
+        balanced,
+        label,
+      ),
+    );
+    expect(failedLines(waved)).toEqual([6]);
+  });
+
+  test('line 7: a zip that ends too high is found by the hips it has to pass', () => {
+    const short = withPiece(draft.pieces, 'back-middle', (piece) => ({
+      ...piece,
+      notches: piece.notches.map((notch) =>
+        notch.name === 'zip-end' ? { ...notch, at: point(notch.at.x, notch.at.y - 60) } : notch,
+      ),
+    }));
+    expect(failedLines(short)).toEqual([7]);
+  });
+
+  test('line 7: a gown without the mark of its zip cannot be known to open', () => {
+    const shut = withPiece(draft.pieces, 'back-middle', (piece) => ({
+      ...piece,
+      notches: piece.notches.filter(({ name }) => name !== 'zip-end'),
+    }));
+    expect(failedLines(shut)).toEqual([7]);
+  });
+
+  test('line 7: a knee seam that does not reach round both knees is found', () => {
+    const knees = { ...draft.construction.knees, standing: 900 };
+    const { lines } = prove({
+      pieces: draft.pieces,
+      construction: { ...draft.construction, knees },
+      rules: balanced,
+    });
+    expect(lines.filter(({ holds }) => !holds).map(({ number }) => number)).toEqual([7]);
+  });
 
   test('line 8: a leg moved at the top edge is found by its opening, and so by the chest girth', () => {
     const { path } = edgeNamed('front-top-centre', 'top');

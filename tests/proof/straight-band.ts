@@ -162,9 +162,20 @@ function bandMiddle(side: Side): FinishedPiece {
       centreEdge(side, run(point(0, 900), point(0, 300))),
     ],
     darts: [],
-    levels: [levelAt('hip', 500, width)],
+    levels: [levelAt('hip', 500, width), levelAt('knee-seam', 800, width)],
     notches: [
       { name: 'hip', edge: 'side', at: point(width, 500), outward: point(1, 0), strokes: 1 },
+      ...(side === 'back'
+        ? [
+            {
+              name: 'zip-end',
+              edge: 'centre',
+              at: point(0, 480),
+              outward: point(-1, 0),
+              strokes: 2,
+            } as const,
+          ]
+        : []),
     ],
     grain: { from: point(50, 350), to: point(50, 850) },
     cutLine: cutRound(
@@ -200,4 +211,6 @@ export const bandConstruction: Construction = {
     centre: { piece: `${side}-top`, edge: 'top' },
     outer: { piece: `${side}-top`, edge: 'top' },
   })),
+  opening: { closure: 'centreBackZip', hips: 892, least: 892, give: 0 },
+  knees: { standing: 590, step: 700, caution: false },
 };

@@ -7,6 +7,7 @@ import type { LevelName, Piece, Side } from '../../drafting/piece.ts';
 import { xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
 import { type BelowKnee, belowKnee } from './below-knee.ts';
+import { closeGown } from './closure.ts';
 import { backEdgeIsHigh, drawTop } from './draw-top.ts';
 import { gownHandles } from './handles.ts';
 import type { Half } from './half.ts';
@@ -99,8 +100,10 @@ export function drawGown(
       : []),
   ];
   const pieces = sides.flatMap((each) => [...each.pieces, ...below.pieces(each.side)]);
+  const closed = closeGown(table, pieces, { body, levels: bodyLevels, pair, style });
+  const walked = walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style.kneeFinished);
   return {
-    pieces,
+    pieces: closed.pieces,
     levels: {
       chest: bodyLevels.underarm,
       bust: bodyLevels.bust,
@@ -116,9 +119,17 @@ export function drawGown(
       wanted: rules.intakes ? withChestLeft(table, wanted, pair) : wanted,
       chestSide: { front: chestSide(front), back: chestSide(back) },
       topOpenings: sides.flatMap((each) => each.openings),
+      opening: closed.opening,
+      ...(closed.gaps && { gaps: closed.gaps }),
+      knees: {
+        standing: body.measures.bothKneesGirth,
+        step: walked.step,
+        caution: walked.caution,
+      },
+      ...(rules.intakes && { intakesGiven: true }),
     },
-    handles: gownHandles(pieces, style),
-    walking: walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style.kneeFinished),
+    handles: gownHandles(style.closure === 'laced' ? closed.pieces : pieces, style),
+    walking: walked,
   };
 }
 
