@@ -143,12 +143,13 @@ function listsBeside(
   drawn: readonly DrawnPiece[],
   unit: Unit,
   { x, y: top, width }: Column,
-  foot: number,
+  { foot, numbered }: { readonly foot: number; readonly numbered: boolean },
 ): readonly Mark[] {
   const note = 'est. = estimated, not taken on the body: measure it when you can.';
-  const pieces = drawn.map(({ piece, copies }) =>
-    copies === 1 ? piece : { title: `${piece.title}, ${copies} times`, cut: piece.cut },
-  );
+  const pieces = drawn.map(({ piece: { title, cut }, copies }, i) => ({
+    title: `${numbered ? `${i + 1}  ` : ''}${title}${copies === 1 ? '' : `, ${copies} times`}`,
+    cut,
+  }));
   const lists = (size: number, columns: 1 | 2): Block =>
     stack(
       [
@@ -225,7 +226,7 @@ export function coverMarks(
       drawn,
       unit,
       { x: aside, y: metric.y, width: left + width - aside },
-      foot,
+      { foot, numbered: small !== undefined },
     ),
     ...cautions(foot + 4).marks,
   ];

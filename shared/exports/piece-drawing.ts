@@ -36,7 +36,13 @@ function arrowhead(tip: Point, way: Point, style: LineStyle): Mark {
 }
 
 /** Text along a line, upright or read from the right, never upside down. */
-function lettersAlong(text: string, from: Point, to: Point, size: number, off: number): Mark {
+export function lettersAlong(
+  text: string,
+  from: Point,
+  to: Point,
+  size: number,
+  off: number,
+): Mark {
   const way = unit(subtract(to, from));
   const readable = way.x < -1e-6 || (Math.abs(way.x) <= 1e-6 && way.y > 0) ? scale(way, -1) : way;
   const at = add(between(from, to, 0.5), scale(turnRight(readable), -off));
@@ -77,6 +83,9 @@ function foldMarks(path: Path, style: LineStyle): readonly Mark[] {
   ];
 }
 
+/** Smaller drawings than this have no room for the names of their levels. */
+const namedFrom = 0.5;
+
 /** Ticks at the two ends of a level, its name beside the outer one. */
 function levelMarks({ level, from, to }: LevelLine, style: LineStyle): readonly Mark[] {
   const way = unit(subtract(to, from));
@@ -88,10 +97,9 @@ function levelMarks({ level, from, to }: LevelLine, style: LineStyle): readonly 
       straight(from, add(from, scale(way, length))),
       straight(to, subtract(to, scale(way, length))),
     ),
-    words(levelTitles[level], inner.x, inner.y + 0.9, 2.6 * Math.max(0.85, markScale(style)), {
-      anchor: 'end',
-      grey: 0.35,
-    }),
+    ...(style.scale < namedFrom
+      ? []
+      : [words(levelTitles[level], inner.x, inner.y + 0.9, 2.6, { anchor: 'end', grey: 0.35 })]),
   ];
 }
 

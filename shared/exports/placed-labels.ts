@@ -32,6 +32,17 @@ function seamsOf(
   return { x: [...lines(columns, step.x), ...upright], y: [...lines(rows, step.y), ...level] };
 }
 
+/** Whether a label gives the whole name of its piece. */
+const isNamed = ({ title }: FinishedPiece, label: FinishedPiece['lettering']): boolean =>
+  label
+    .map(({ text }) => text)
+    .join(' ')
+    .startsWith(title);
+
+/** The number that stands for a piece too small for its name; the cover lists the pieces by it. */
+const numberOf = (piece: DrawnPiece, drawn: ReadonlyMap<string, DrawnPiece>): string =>
+  `no. ${[...drawn.values()].indexOf(piece) + 1}`;
+
 /**
  * The labels of all pieces on the drawing, upright on the paper whichever way a piece is turned, and clear
  * of the seams between sheets wherever the piece has room for that.
@@ -50,6 +61,8 @@ export function placedLabels(
     const seams = seamsOf(sheets, found.foldLine, placement.motion);
     const clear = lettering(piece, facts, { ...print, seams });
     const label = clear.length > 1 ? clear : lettering(piece, facts, print);
-    return labelMarks(piece, label);
+    if (order.scale === 1 || isNamed(piece, label)) return labelMarks(piece, label);
+    const numbered = { ...piece, title: numberOf(found, drawn), cut: '' };
+    return labelMarks(numbered, lettering(numbered, facts, { ...print, seams }).slice(0, 1));
   });
 }

@@ -1,7 +1,8 @@
 import { point } from '../geometry/point.ts';
 import type { TilePlan } from '../sheets/tile-plan.ts';
 import type { Drawing, Mark } from './drawing.ts';
-import { box, chainOf, outline, pens, stroke, strokes, words } from './marks.ts';
+import { box, chainOf, outline, pens, stroke, strokes } from './marks.ts';
+import { smallSquare } from './small-square.ts';
 
 /** How sheets are dressed, beside what the plan says. */
 export type Dress = {
@@ -14,9 +15,6 @@ const lozenge = 4;
 
 /** Shares of an edge at which its match marks stand. */
 const marked = [0.2, 0.5, 0.8];
-
-/** The small test square of every sheet, mm, and how far it stands from the corner of the printed area. */
-export const smallSquare = { side: 20, inset: 3 } as const;
 
 const lozengeAt = (x: number, y: number): Mark =>
   outline(
@@ -93,27 +91,10 @@ function frame({ use, margin }: TilePlan): readonly Mark[] {
   ];
 }
 
-/** Where the small square stands on a sheet: in the lower left corner, clear of the strip to be glued. */
-export function smallSquareAt({ use, margin, overlap }: TilePlan) {
-  const { side, inset } = smallSquare;
-  return {
-    x: margin + inset,
-    y: margin + use.height - overlap - inset - side,
-    side,
-  };
-}
-
-function square(plan: TilePlan): readonly Mark[] {
-  const { x, y, side } = smallSquareAt(plan);
-  return [
-    box(pens.hairline, x, y, side, side),
-    words('20 mm', x + side / 2, y + side - 1.2, 2.6, { anchor: 'middle', grey: 0.35 }),
-  ];
-}
-
 /** The drawings that many tiles of a plan share. */
 export const tileFurniture = (plan: TilePlan, dress: Dress): readonly Drawing[] => [
-  { name: 'frame', marks: [...frame(plan), ...square(plan)] },
+  { name: 'frame', marks: frame(plan) },
+  smallSquare,
   gluedRight(plan, dress),
   gluedBelow(plan, dress),
   trimmedLeft(plan, dress),

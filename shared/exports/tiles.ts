@@ -1,5 +1,6 @@
 import type { Drafted } from '../engine/drafted.ts';
 import { labelFacts } from '../engine/label-facts.ts';
+import { between } from '../geometry/point.ts';
 import { type DrawnPiece, drawnPieces } from '../sheets/drawn-pieces.ts';
 import type { PrintOrder } from '../sheets/print-order.ts';
 import { refuseTooManySheets } from '../sheets/sheet-limit.ts';
@@ -9,7 +10,7 @@ import { coverMarks, printTitle } from './cover.ts';
 import type { Drawing, PrintJob } from './drawing.ts';
 import { penIn } from './line-style.ts';
 import { pens, stroke, strokes } from './marks.ts';
-import { pieceLines } from './piece-drawing.ts';
+import { lettersAlong, pieceLines } from './piece-drawing.ts';
 import { placedLabels } from './placed-labels.ts';
 import { tileFurniture } from './tile-furniture.ts';
 import { drawTiles } from './tile-pages.ts';
@@ -24,6 +25,7 @@ function drawingOf({ drawing, piece, foldLine }: DrawnPiece, order: PrintOrder):
       penIn({ ...pens.hairline, dash: [10, 2, 2, 2] }, style),
       stroke(foldLine.from.x, foldLine.from.y, foldLine.to.x, foldLine.to.y),
     ),
+    lettersAlong('centre', foldLine.from, between(foldLine.from, foldLine.to, 0.4), 3, 1.2),
   ];
   return { name: drawing, marks: [...pieceLines(piece, style), ...(fold ?? [])] };
 }
@@ -53,7 +55,7 @@ function pagesOf(draft: Drafted, sheets: SheetPlan, unit: Unit): PrintJob {
     ],
     pages: [
       ...(cover === 'own sheet' ? [coverOn({ ...plan.paper, margin: order.margin })] : []),
-      ...drawTiles(sheets, titles, labels, `draft ${draft.number}`),
+      ...drawTiles(sheets, titles, labels, `draft ${draft.number}`, byName),
     ],
   };
 }

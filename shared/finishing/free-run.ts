@@ -105,19 +105,24 @@ function strip(from: Point, to: Point, left: number, right: number): Chain {
 }
 
 /** What lettering keeps clear of: darts, the grain line and its word, fold brackets, drill points. */
-function marks(piece: Piece): readonly Chain[] {
+function marks(piece: Piece, scale: number): readonly Chain[] {
   const darts = piece.darts.map((dart) => [
     ...flatten(dart.centreLeg, 2),
     ...flatten(dart.sideLeg, 2).toReversed(),
   ]);
   const folds = piece.edges.flatMap(({ kind, path }) => {
     const [from, to] = [path[0]?.from, path.at(-1)?.to];
-    return kind === 'fold' && from && to ? [strip(from, to, 0, foldBracket)] : [];
+    return kind === 'fold' && from && to ? [strip(from, to, 0, foldBracket * scale)] : [];
   });
   const drills = piece.drills.map(({ x, y }) =>
     strip({ x, y: y - drillMark }, { x, y: y + drillMark }, drillMark, drillMark),
   );
-  return [...darts, ...folds, strip(piece.grain.from, piece.grain.to, 4, 4), ...drills];
+  return [
+    ...darts,
+    ...folds,
+    strip(piece.grain.from, piece.grain.to, 4 * scale, 4 * scale),
+    ...drills,
+  ];
 }
 
 /** Takes seams between sheets out of the rows. */
@@ -153,7 +158,7 @@ export function freeRows(piece: Piece, seams?: PaperSeams, scale = 1): FreeRows 
   const spacing = Math.max(leastSpacing * scale, (foot - top) / rowsAtMost);
   const heights = { top, spacing, count: Math.max(0, Math.floor((foot - top) / spacing)) };
   const rows = insideOf(outline, heights, clearOfOutline * scale);
-  for (const mark of marks(piece)) takeOut(rows, mark, heights);
+  for (const mark of marks(piece, Math.max(scale, 0.6))) takeOut(rows, mark, heights);
   if (seams) partAtSeams(rows, seams, heights);
   return { top, spacing, rows };
 }

@@ -40,7 +40,9 @@ const layouts = [
 const smallLayouts = [
   { title: 4, text: 3, note: 2.8, width: 60 },
   { title: 3.2, text: 2.8, note: 2.6, width: 40 },
-  { title: 2.8, text: 2.4, note: 2.4, width: 26 },
+  { title: 2.8, text: 2.4, note: 2.4, width: 30 },
+  { title: 2.4, text: 2.2, note: 2.2, width: 21 },
+  { title: 2.2, text: 2.2, note: 2.2, width: 14 },
 ] as const;
 
 type Sizes = (typeof layouts)[number] | (typeof smallLayouts)[number];
@@ -134,17 +136,20 @@ function label(
   facts: LabelFacts,
   sizes: Sizes,
   notes: readonly string[],
+  small: boolean,
 ): readonly Line[] {
   const card = [facts.cardName, facts.date]
     .map((each) => shortened(plain(each ?? ''), longestName))
     .filter((each) => each !== '')
     .join(' · ');
+  const said = notes.map((text) => ({ text, size: sizes.note }));
   const lines: readonly Line[] = [
     { text: piece.title, size: sizes.title },
+    ...(small ? said : []),
     { text: piece.cut, size: sizes.text },
     { text: card, size: sizes.text },
     { text: `draft ${facts.draftNumber} · ${plain(facts.cloth)}`, size: sizes.note },
-    ...notes.map((text) => ({ text, size: sizes.note })),
+    ...(small ? [] : said),
   ];
   return lines.filter((line) => line.text !== '').flatMap((line) => wrapped(line, sizes.width));
 }
@@ -172,16 +177,16 @@ export function lettering(
   const free = freeRows(piece, seams, scale);
   let lines: readonly Line[] = [];
   for (const sizes of scale < 1 ? smallLayouts : layouts) {
-    lines = label(piece, facts, sizes, notes);
+    lines = label(piece, facts, sizes, notes, scale < 1);
     const width = Math.max(...lines.map((line) => textWidth(line.text, line.size)));
     const height = lines.reduce((sum, line) => sum + line.size * leading, 0);
     const place = freePlace(free, width, height);
     if (place) return set(lines, place, width);
   }
   for (let count = lines.length - 1; count > 0; count -= 1) {
-    for (const least of [36, 26, 16]) {
+    for (const least of scale < 1 ? [14, 7] : [36, 26, 16]) {
       const tallest = Math.max(...lines.slice(0, count).map((line) => line.size));
-      const place = freePlace(free, least * Math.max(scale, 0.6), count * tallest * leading);
+      const place = freePlace(free, least, count * tallest * leading);
       if (!place) continue;
       const run = place.right - place.left;
       const short = lines

@@ -8,7 +8,11 @@ import { type Stride, sheetsShowing, zoneAt, zoneKey } from './tile-zones.ts';
 const stride = 2;
 
 /** What a tile shows: a piece's outline, or the inside of a piece, by name. */
-export type Ink = { readonly inside?: string };
+export type Ink = {
+  readonly inside?: string;
+  /** The placements of the layout that need this tile, by their number. */
+  readonly shows: readonly number[];
+};
 
 /** The tiles of a grid, row by row from the top left, and the seams between them that a piece runs across. */
 export type InkedTiles = {
@@ -100,7 +104,9 @@ function insideZones(
 export function inkedTiles(layout: Layout, grid: TileGrid): InkedTiles {
   const { rows, columns, step, overlap } = grid;
   const axes = { across: { step: step.x, overlap }, down: { step: step.y, overlap } };
-  const tiles = new Array<Ink | undefined>(rows * columns).fill(undefined);
+  const tiles = new Array<{ inside?: string; shows: number[] } | undefined>(rows * columns).fill(
+    undefined,
+  );
   const gluedRight = tiles.map(() => false);
   const gluedBelow = tiles.map(() => false);
   const already = new Set<number>();
@@ -115,7 +121,7 @@ export function inkedTiles(layout: Layout, grid: TileGrid): InkedTiles {
     [0, 1, 2].some((dy) =>
       [0, 1, 2].some((dx) => zones.has(zoneKey(2 * column + dx, 2 * row + dy))),
     );
-  for (const { name, zones } of drawn) {
+  for (const [which, { name, zones }] of drawn.entries()) {
     const sheets = sheetsShowing(zones, already);
     const own = new Set(sheets.map(({ column, row }) => zoneKey(column, row)));
     const strip = (x: number, y: number): boolean =>
@@ -124,7 +130,11 @@ export function inkedTiles(layout: Layout, grid: TileGrid): InkedTiles {
       already.add(zoneKey(column, row));
       if (column >= columns || row >= rows) continue;
       const at = row * columns + column;
-      if (!tiles[at]) tiles[at] = shows(outlines, column, row) ? {} : { inside: name };
+      const tile = (tiles[at] ??= {
+        ...(shows(outlines, column, row) ? {} : { inside: name }),
+        shows: [],
+      });
+      tile.shows.push(which);
       if (own.has(zoneKey(column + 1, row)) && strip(2 * column + 2, 2 * row + 1)) {
         gluedRight[at] = true;
       }

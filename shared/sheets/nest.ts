@@ -1,10 +1,11 @@
+import { clearOfSeams } from './clear-of-seams.ts';
 import { type Field, turnsOf } from './field.ts';
+import { gathered } from './gathered.ts';
 import { type Laid, bestPlace, clearTable, putDown, sheetsUsed, takeUp } from './laying.ts';
 import { type Placement, type Shape, boxOf } from './layout.ts';
 import { edge } from './phases.ts';
 import type { PlanProgress } from './print-order.ts';
 import { seeded } from './seeded.ts';
-import { clearOfSeams } from './clear-of-seams.ts';
 
 /** Pieces lifted in one move, at most. */
 const liftedAtMost = 4;
@@ -111,7 +112,7 @@ export function* nest(shapes: readonly Shape[], field: Field, moves: number): Se
     yield { moves: move, of: moves, sheets: Math.floor(best.cost) };
   }
   restore(best.laid);
-  return clearOfSeams(shapes, laid, table).map((there, which) =>
+  return gathered(clearOfSeams(shapes, laid, table), table).map((there, which) =>
     placementOf(shapes[which] ?? { piece: '', chain: [] }, there, field),
   );
 }

@@ -19,6 +19,8 @@ export type Tile = {
   readonly neighbours: Neighbours;
   /** Edges across which a piece runs on: there the two sheets are glued. */
   readonly glued: readonly SheetSide[];
+  /** What is drawn on it: placements of the layout, by their number. */
+  readonly shows: readonly number[];
   /** The piece this sheet lies wholly inside of, where none of its outline crosses it. */
   readonly inside?: string;
   /** Not printed, as the order says; nobody's neighbour. */
