@@ -99,26 +99,26 @@ for (const width of [390, 1280]) {
       await expect(room.count).toBeVisible();
       await room.field('margin').fill('9');
       await room.field('margin').blur();
-      await expect(page.getByText('must lie between 0.5 cm and 2.5 cm')).toBeVisible();
+      await expect(page.getByText('must lie between 0.5 cm and 1.5 cm')).toBeVisible();
       await expect(room.field('margin')).toHaveValue('9.0');
       await expect(room.makePdf).toBeDisabled();
       await page.getByRole('radio', { name: 'inch' }).check();
-      await expect(page.getByText(/must lie between .* in and 1 in/)).toBeVisible();
+      await expect(page.getByText(/must lie between .* in and 9⁄16 in/)).toBeVisible();
       await room.field('margin').fill('a thumb');
       await room.field('margin').blur();
       await expect(room.field('margin')).toHaveValue('a thumb');
       await expect(room.field('margin')).toHaveAttribute('aria-invalid', 'true');
       await room.field('margin').fill('1/2');
       await room.paper.selectOption('custom');
-      await room.field('paper.width').fill('12 in');
-      await room.field('paper.height').fill('18 in');
-      await room.field('paper.height').blur();
+      await room.field('width').fill('12 in');
+      await room.field('height').fill('18 in');
+      await room.field('height').blur();
       await expect(room.count).toContainText('custom');
 
       await page.route('**/api/prints/sheets', (route) => route.abort());
       await room.makePdf.click();
       await expect(page.getByText('The server cannot be reached')).toBeVisible();
-      await expect(room.field('paper.width')).toHaveValue('12');
+      await expect(room.field('width')).toHaveValue('12');
       await page.unroute('**/api/prints/sheets');
       expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(
         await room.sheets(),
@@ -126,8 +126,34 @@ for (const width of [390, 1280]) {
 
       await page.reload();
       await expect(room.field('margin')).toHaveValue('1⁄2');
-      await expect(room.field('paper.height')).toHaveValue('18');
+      await expect(room.field('height')).toHaveValue('18');
       await expect(room.count).toContainText('custom');
+    });
+
+    test('what the printed square measures tells what went wrong, in either unit', async ({
+      page,
+      drawnTable,
+    }) => {
+      await expect(drawnTable.drawing).toBeVisible();
+      await page.goto('/try/print');
+      const room = printRoom(page);
+      await room.showCard('Scale');
+      await room.field('across').fill('10');
+      await room.field('down').fill('10,0');
+      await expect(page.getByText('True to scale')).toBeVisible();
+      await room.field('across').fill('94.1 mm');
+      await room.field('down').fill('94 mm');
+      await expect(page.getByText(/Everything came out at 94\.\d %/)).toBeVisible();
+      await expect(page.getByText(/“actual size” or 100 %/)).toBeVisible();
+      await page.getByRole('radio', { name: 'inch' }).check();
+      await expect(room.field('across')).toHaveValue('3.705');
+      await room.field('across').fill('a lot');
+      await expect(page.getByText(/came out at/)).toBeHidden();
+      await room.field('across').blur();
+      await expect(room.field('across')).toHaveAttribute('aria-invalid', 'true');
+      await room.field('across').fill('3 7/8');
+      await room.field('down').fill('4');
+      await expect(page.getByText('The square is no square')).toBeVisible();
     });
 
     test('arranging and writing show that they go on, and both can be called off', async ({

@@ -17,10 +17,10 @@ export function printRoom(page: Page) {
     makeSvg: page.getByRole('button', { name: 'SVG of the pieces' }),
     cancel: page.getByRole('button', { name: 'Cancel' }),
     paper: page.getByRole('combobox', { name: 'Paper' }),
-    field: (name: string): Locator => page.locator(`input[name="order.${name}"]`),
+    field: (name: string): Locator => page.locator(`input[name="${name}"]`),
     piece: (title: string): Locator => page.getByRole('checkbox', { name: title }),
     /** On a phone the cards lie behind tabs. */
-    showCard: async (name: 'Paper' | 'Pieces' | 'Lines' | 'Scale check') => {
+    showCard: async (name: 'Paper' | 'Pieces' | 'Lines' | 'Scale') => {
       const tab = page.getByRole('tab', { name });
       if ((await tab.count()) > 0) await tab.click();
     },

@@ -118,3 +118,11 @@ export function planSheets(
   }
   return step.value;
 }
+
+/** The same plan with other sheets left out, as `planSheets` would make it; nothing is arranged anew. */
+export function leavingOut(sheets: SheetPlan, leftOut: readonly string[]): SheetPlan {
+  const { order, layout, cover } = sheets;
+  const plan = planTiles(layout, sheets.plan.paper, order, leftOut);
+  const printed = printedTiles(plan).length + (cover === 'own sheet' ? 1 : 0);
+  return { ...sheets, order: { ...order, leftOut }, plan, sheets: printed };
+}

@@ -11,8 +11,8 @@ import type { Unit } from '#shared/units/said.ts';
 
 import { browserStorage } from '../../lib/browser-storage.ts';
 import { printsOnLetter } from '../../lib/reader.ts';
-import { lengthFields, plainChoices, type LengthField, type RoomChoices } from './room-choices.ts';
-import { readLength } from './typed-length.ts';
+import { paperFields, plainChoices, type PaperField, type RoomChoices } from './room-choices.ts';
+import { readLength, writtenLength, type TypedLength } from './typed-length.ts';
 
 /** What a maker's printer and habits ask for, whatever is printed; kept for good. */
 const habits = z.object({
@@ -22,7 +22,9 @@ const habits = z.object({
   orientation: z.enum(orientations),
   glueMarks: z.boolean(),
   inkSaving: z.boolean(),
-  typed: z.object(fromFields(() => z.string().max(24))),
+  typed: z.object(
+    fromFields(() => z.object({ text: z.string().max(24), mm: z.number().optional() })),
+  ),
 });
 
 /** What was chosen for one draft, kept while the tab is open: a scale for teaching is not for the next gown. */
@@ -61,7 +63,10 @@ export function keptChoices({ maker, place }: Keeping, unit: Unit): RoomChoices 
           orientation: kept.orientation,
           glueMarks: kept.glueMarks,
           inkSaving: kept.inkSaving,
-          lengths: fromFields((field) => readLength(kept.typed[field], kept.unit)),
+          lengths: {
+            ...plain.lengths,
+            ...fromFields((field) => lengthOf(kept.typed[field], kept.unit)),
+          },
         };
   if (own === undefined) return settled;
   const { lines, scale, pieces, leftOut } = own;
@@ -72,7 +77,10 @@ export function keptChoices({ maker, place }: Keeping, unit: Unit): RoomChoices 
 export function keepChoices({ maker, place }: Keeping, room: RoomChoices): void {
   const { unit, paper, orientation, glueMarks, inkSaving, lengths } = room;
   const { lines, scale, pieces, leftOut } = room;
-  const typed = fromFields((field) => lengths[field].text);
+  const typed = fromFields((field) => {
+    const { text, read } = lengths[field];
+    return 'mm' in read ? { text, mm: read.mm } : { text };
+  });
   write('local', habitsKey(maker), {
     ...{ version: 1, unit, paper, orientation, glueMarks, inkSaving, typed },
   } satisfies z.input<typeof habits>);
@@ -81,8 +89,14 @@ export function keepChoices({ maker, place }: Keeping, room: RoomChoices): void 
   });
 }
 
-function fromFields<T>(value: (field: LengthField) => T): { readonly [F in LengthField]: T } {
-  const [margin, overlap, width, height] = lengthFields;
+/** A kept length is trusted as a number and written anew; text that was never read is read again. */
+const lengthOf = (
+  { text, mm }: { readonly text: string; readonly mm?: number | undefined },
+  unit: Unit,
+): TypedLength => (mm === undefined ? readLength(text, unit) : writtenLength(mm, unit));
+
+function fromFields<T>(value: (field: PaperField) => T): { readonly [F in PaperField]: T } {
+  const [margin, overlap, width, height] = paperFields;
   return {
     margin: value(margin),
     overlap: value(overlap),

@@ -5,10 +5,10 @@ import { selections, choosePieces } from '#shared/sheets/selection.ts';
 import { waysToDraw } from '#shared/sheets/ways-to-draw.ts';
 import { error, type Problem } from '#shared/units/problem.ts';
 
-import { choiceFor, type LengthField, type RoomChoices } from './room-choices.ts';
+import { choiceFor, type PaperField, type RoomChoices } from './room-choices.ts';
 
 /** The contract's names of what is typed. */
-export const fieldOf: { readonly [F in LengthField]: string } = {
+export const fieldOf: { readonly [F in PaperField]: string } = {
   margin: 'order.margin',
   overlap: 'order.overlap',
   width: 'order.paper.width',
@@ -19,7 +19,7 @@ export type OrderOrProblems =
   { readonly order: PrintOrder } | { readonly problems: readonly Problem[] };
 
 /** What is typed that has a meaning beside the paper chosen. */
-export const typedFields = ({ paper }: Pick<RoomChoices, 'paper'>): readonly LengthField[] =>
+export const typedFields = ({ paper }: Pick<RoomChoices, 'paper'>): readonly PaperField[] =>
   paper === 'custom' ? ['margin', 'overlap', 'width', 'height'] : ['margin', 'overlap'];
 
 /** The choices as an order for these pieces, with every sheet in it, or what stands in its way, field by field. */
@@ -31,7 +31,7 @@ export function orderOf(room: RoomChoices, pieces: readonly Piece[]): OrderOrPro
       ? [error({ code: 'not-read', field: fieldOf[field], said: read.said })]
       : [];
   });
-  const mm = (field: LengthField): number => {
+  const mm = (field: PaperField): number => {
     const { read } = lengths[field];
     return 'mm' in read ? read.mm : Number.NaN;
   };

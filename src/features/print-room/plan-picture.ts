@@ -55,13 +55,3 @@ export function sheetBeside(tiles: readonly Tile[], from: Tile, { x, y }: Point)
     undefined,
   );
 }
-
-/** Seams to glue once some sheets are left out. */
-export const seamsToGlue = ({ plan }: SheetPlan, leftOut: readonly string[]): number => {
-  const printed = (name: string | undefined): boolean =>
-    name !== undefined && !leftOut.includes(name);
-  return plan.tiles
-    .filter(({ name }) => printed(name))
-    .flatMap(({ neighbours }) => [neighbours.right, neighbours.below])
-    .filter(printed).length;
-};

@@ -7,14 +7,25 @@ import {
   type SheetName,
   plainOrder,
 } from '#shared/sheets/print-order.ts';
+import type { SquareName } from '#shared/sheets/scale-check.ts';
 import { type Selection, choosePieces } from '#shared/sheets/selection.ts';
 import { waysToDraw } from '#shared/sheets/ways-to-draw.ts';
 import type { Unit } from '#shared/units/said.ts';
 
-import { readLength, rewrittenLength, writtenLength, type TypedLength } from './typed-length.ts';
+import {
+  nothingTyped,
+  readLength,
+  rewrittenFine,
+  rewrittenLength,
+  writtenLength,
+  type TypedLength,
+} from './typed-length.ts';
 
-export const lengthFields = ['margin', 'overlap', 'width', 'height'] as const;
-export type LengthField = (typeof lengthFields)[number];
+export const paperFields = ['margin', 'overlap', 'width', 'height'] as const;
+export type PaperField = (typeof paperFields)[number];
+
+/** What is typed: about the paper, and what the printed square measures. */
+export type LengthField = PaperField | 'across' | 'down';
 
 /** How one piece is printed. */
 export type PieceChoice = {
@@ -36,20 +47,26 @@ export type RoomChoices = {
   readonly lines: LineChoice;
   readonly scale: PrintScale;
   readonly lengths: { readonly [F in LengthField]: TypedLength };
+  /** Which printed square is measured; that of the reader's unit where none is chosen. */
+  readonly square?: SquareName;
   /** By the piece's name; a piece nothing was chosen for is printed once, as drafted. */
   readonly pieces: { readonly [piece: string]: PieceChoice };
   readonly leftOut: LeftOut;
 };
 
 export type Chosen = Partial<
-  Pick<RoomChoices, 'paper' | 'orientation' | 'glueMarks' | 'inkSaving' | 'lines' | 'scale'>
+  Pick<
+    RoomChoices,
+    'square' | 'paper' | 'orientation' | 'glueMarks' | 'inkSaving' | 'lines' | 'scale'
+  >
 >;
 
 export type RoomAction =
   | { readonly type: 'unit'; readonly unit: Unit }
   | { readonly type: 'chosen'; readonly choice: Chosen }
   | { readonly type: 'typed'; readonly field: LengthField; readonly text: string }
-  | { readonly type: 'settled'; readonly field: LengthField }
+  /** A figure is typed to its end: it is written as the unit has it. */
+  | { readonly type: 'settled'; readonly field: PaperField }
   | { readonly type: 'piece'; readonly piece: Piece; readonly choice: Partial<PieceChoice> }
   | {
       readonly type: 'selected';
@@ -76,6 +93,8 @@ export const plainChoices = (unit: Unit, paper: SheetName): RoomChoices => ({
     overlap: writtenLength(plainOrder.overlap, unit),
     width: writtenLength(customSize.width, unit),
     height: writtenLength(customSize.height, unit),
+    across: nothingTyped,
+    down: nothingTyped,
   },
   pieces: {},
   leftOut: { plan: '', names: [] },
@@ -123,6 +142,8 @@ const inUnit = (lengths: RoomChoices['lengths'], unit: Unit): RoomChoices['lengt
   overlap: rewrittenLength(lengths.overlap, unit),
   width: rewrittenLength(lengths.width, unit),
   height: rewrittenLength(lengths.height, unit),
+  across: rewrittenFine(lengths.across, unit),
+  down: rewrittenFine(lengths.down, unit),
 });
 
 function selected(

@@ -1,4 +1,4 @@
-import { formatLength } from '#shared/units/format-length.ts';
+import { formatFine, formatLength } from '#shared/units/format-length.ts';
 import { parseLength } from '#shared/units/parse-length.ts';
 import type { Said, Unit } from '#shared/units/said.ts';
 
@@ -7,6 +7,9 @@ export type TypedLength = {
   readonly text: string;
   readonly read: { readonly mm: number } | { readonly said: Said };
 };
+
+/** A field nobody has typed in yet. */
+export const nothingTyped: TypedLength = { text: '', read: parseLength('', 'cm') };
 
 /** Letters as a length in the reader's unit. */
 export const readLength = (text: string, unit: Unit): TypedLength => ({
@@ -23,3 +26,7 @@ export const writtenLength = (mm: number, unit: Unit): TypedLength => ({
 /** The same field for a reader of another unit; what could not be read stays as it was typed. */
 export const rewrittenLength = (typed: TypedLength, unit: Unit): TypedLength =>
   'mm' in typed.read ? writtenLength(typed.read.mm, unit) : typed;
+
+/** The same for what was read off a ruler, which counts to the half millimetre. */
+export const rewrittenFine = (typed: TypedLength, unit: Unit): TypedLength =>
+  'mm' in typed.read ? { ...typed, text: formatFine(typed.read.mm, unit) } : typed;

@@ -13,7 +13,6 @@ import { PlanDrawing } from './plan-drawing.tsx';
 type PagePlanProps = {
   readonly plan: SheetPlan;
   readonly pieces: readonly FinishedPiece[];
-  readonly leftOut: readonly string[];
   readonly unit: Unit;
   /** Another plan is on its way: this one can be looked at, not changed. */
   readonly passing: boolean;
@@ -35,7 +34,7 @@ const ways: Readonly<Record<string, { readonly x: number; readonly y: number }>>
 };
 
 /** Which sheet goes where, with the pieces over it; a sheet is left out, and taken back, where it lies. */
-export const PagePlan = ({ plan, pieces, leftOut, unit, passing, onSheet }: PagePlanProps) => {
+export const PagePlan = ({ plan, pieces, unit, passing, onSheet }: PagePlanProps) => {
   const frame = useRef<HTMLDivElement>(null);
   const sheets = useRef<HTMLDivElement>(null);
   const help = useId();
@@ -74,13 +73,7 @@ export const PagePlan = ({ plan, pieces, leftOut, unit, passing, onSheet }: Page
       {room.width > 0 && (
         <div className="relative" style={size}>
           <svg {...size} className="absolute inset-0" aria-hidden="true">
-            <PlanDrawing
-              plan={plan}
-              pieces={pieces}
-              leftOut={leftOut}
-              scale={scale}
-              corner={corner}
-            />
+            <PlanDrawing plan={plan} pieces={pieces} scale={scale} corner={corner} />
             <Rod view={{ scale, x: corner, y: corner }} size={size} unit={unit} />
           </svg>
           <div
@@ -91,15 +84,14 @@ export const PagePlan = ({ plan, pieces, leftOut, unit, passing, onSheet }: Page
             className={passing ? 'pointer-events-none' : ''}
           >
             {tiles.map((tile) => {
-              const { name, at } = tile;
-              const printed = !leftOut.includes(name);
+              const { name, at, leftOut } = tile;
               return (
                 <button
                   key={name}
                   type="button"
                   role="checkbox"
                   data-sheet={name}
-                  aria-checked={printed}
+                  aria-checked={leftOut !== true}
                   aria-label={`Sheet ${name}`}
                   disabled={passing}
                   tabIndex={tile === stop ? 0 : -1}

@@ -1,15 +1,14 @@
-import { useState, type Dispatch } from 'react';
+import type { Dispatch } from 'react';
 
 import type { Problem } from '#shared/units/problem.ts';
-import { speak } from '#shared/units/speak.ts';
 
 import { Field } from '../../../ui/field.tsx';
-import { LengthInput } from '../../../ui/length-input.tsx';
 import { Segmented } from '../../../ui/segmented.tsx';
 import { Select } from '../../../ui/select.tsx';
 import { fieldOf, typedFields } from '../order-of.ts';
 import { orientationChoices, paperChoices } from '../paper-words.ts';
-import type { LengthField, RoomAction, RoomChoices } from '../room-choices.ts';
+import type { PaperField, RoomAction, RoomChoices } from '../room-choices.ts';
+import { LengthField } from './length-field.tsx';
 import { Tick } from './tick.tsx';
 
 export type CardProps = {
@@ -18,7 +17,7 @@ export type CardProps = {
   readonly dispatch: Dispatch<RoomAction>;
 };
 
-const labels: { readonly [F in LengthField]: string } = {
+const labels: { readonly [F in PaperField]: string } = {
   margin: 'Margin of the printer',
   overlap: 'Overlap to glue',
   width: 'Width',
@@ -29,8 +28,16 @@ const labels: { readonly [F in LengthField]: string } = {
 export const PaperCard = ({ room, problems, dispatch }: CardProps) => {
   const { paper, orientation, glueMarks } = room;
   const lengths = typedFields(room);
-  const field = (each: LengthField) => (
-    <LengthField key={each} {...{ field: each, room, problems, dispatch }} />
+  const field = (each: PaperField) => (
+    <LengthField
+      key={each}
+      field={each}
+      label={labels[each]}
+      room={room}
+      message={problems.find(({ field: at }) => at === fieldOf[each])?.said}
+      dispatch={dispatch}
+      onSettled={() => dispatch({ type: 'settled', field: each })}
+    />
   );
   return (
     <section aria-labelledby="paper-card">
@@ -65,35 +72,5 @@ export const PaperCard = ({ room, problems, dispatch }: CardProps) => {
         onTick={(chosen) => dispatch({ type: 'chosen', choice: { glueMarks: chosen } })}
       />
     </section>
-  );
-};
-
-type LengthFieldProps = CardProps & { readonly field: LengthField };
-
-/** One length; its message waits until the maker has finished typing. */
-const LengthField = ({ field, room, problems, dispatch }: LengthFieldProps) => {
-  const [typing, setTyping] = useState(false);
-  const found = problems.find((problem) => problem.field === fieldOf[field]);
-  return (
-    <Field
-      label={`${labels[field]}, ${room.unit}`}
-      message={typing || found === undefined ? undefined : speak(found.said, room.unit)}
-    >
-      {(wiring) => (
-        <LengthInput
-          wiring={wiring}
-          name={fieldOf[field]}
-          text={room.lengths[field].text}
-          onType={(text) => {
-            setTyping(true);
-            dispatch({ type: 'typed', field, text });
-          }}
-          onDone={() => {
-            setTyping(false);
-            dispatch({ type: 'settled', field });
-          }}
-        />
-      )}
-    </Field>
   );
 };

@@ -1,22 +1,23 @@
 import type { SheetPlan } from '#shared/sheets/sheet-plan.ts';
+import { printedTiles } from '#shared/sheets/tile-plan.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 
 import { Button } from '../../../ui/button.tsx';
 import { RodProgress } from '../../../ui/rod-progress.tsx';
-import { seamsToGlue } from '../plan-picture.ts';
-import type { Planning } from '../use-plan.ts';
+import type { Planning } from '../../../lib/use-plan.ts';
 
 type PlanCountProps = {
   readonly planning: Planning;
-  readonly leftOut: readonly string[];
+  /** The plan as it lies there, with what is left out. */
+  readonly plan: SheetPlan | undefined;
   readonly unit: Unit;
   readonly onCancel: () => void;
   readonly onAgain: () => void;
 };
 
 /** The plan in one sentence, or how it comes about. */
-export const PlanCount = ({ planning, leftOut, unit, onCancel, onAgain }: PlanCountProps) => {
+export const PlanCount = ({ planning, plan, unit, onCancel, onAgain }: PlanCountProps) => {
   if (planning.kind === 'arranging') {
     const { progress } = planning;
     return (
@@ -36,7 +37,7 @@ export const PlanCount = ({ planning, leftOut, unit, onCancel, onAgain }: PlanCo
   }
   return (
     <div role="status" className="figures min-w-0 leading-snug">
-      {planning.kind === 'planned' && <Counted plan={planning.plan} leftOut={leftOut} />}
+      {planning.kind === 'planned' && plan !== undefined && <Counted plan={plan} />}
       {planning.kind === 'waiting' && (
         <p className="text-madder">Nothing to arrange yet: mend what is marked.</p>
       )}
@@ -57,20 +58,20 @@ export const PlanCount = ({ planning, leftOut, unit, onCancel, onAgain }: PlanCo
   );
 };
 
-type CountedProps = { readonly plan: SheetPlan; readonly leftOut: readonly string[] };
-
-const Counted = ({ plan, leftOut }: CountedProps) => {
-  const { paper, tiles } = plan.plan;
-  const laid = tiles.filter(({ name }) => !leftOut.includes(name)).length;
-  const seams = seamsToGlue(plan, leftOut);
+const Counted = ({ plan }: { readonly plan: SheetPlan }) => {
+  const { paper, tiles, glueSeams } = plan.plan;
+  const laid = printedTiles(plan.plan).length;
+  const out = tiles.length - laid;
   return (
     <>
-      <p className="text-lg font-semibold">{`${counted(laid + 1, 'sheet')} of ${paper.name}`}</p>
+      <p className="text-lg font-semibold">{`${counted(plan.sheets, 'sheet')} of ${paper.name}`}</p>
       <p className="text-sm text-slate">
         {[
-          `the cover and ${laid} to lay out`,
-          `${counted(seams, 'seam')} to glue`,
-          ...(leftOut.length === 0 ? [] : [`${leftOut.length} left out`]),
+          plan.cover === 'own sheet'
+            ? `the cover and ${laid} to lay out`
+            : 'the cover among the pieces',
+          `${counted(glueSeams, 'seam')} to glue`,
+          ...(out === 0 ? [] : [`${out} left out`]),
         ].join(' · ')}
       </p>
     </>

@@ -8,7 +8,6 @@ import { laidOutlines } from '../plan-picture.ts';
 type PlanDrawingProps = {
   readonly plan: SheetPlan;
   readonly pieces: readonly FinishedPiece[];
-  readonly leftOut: readonly string[];
   /** Pixels a millimetre on paper. */
   readonly scale: number;
   /** Where the first sheet stands, pixels from the top left. */
@@ -17,11 +16,11 @@ type PlanDrawingProps = {
 
 /** The sheets with their names, the pieces' outlines over them, and the pieces' numbers of the list. */
 export const PlanDrawing = memo(function PlanDrawing(props: PlanDrawingProps) {
-  const { plan, pieces, leftOut, scale, corner } = props;
+  const { plan, pieces, scale, corner } = props;
   const hatch = useId();
   const { use, tiles } = plan.plan;
   const outlines = laidOutlines(plan);
-  const numbers = new Map(pieces.map(({ name }, index) => [name, index + 1]));
+  const numbers = numbersOf(pieces);
   const letters = Math.min(18, Math.max(11, use.width * scale * 0.22));
   return (
     <g transform={`translate(${corner} ${corner})`}>
@@ -38,21 +37,18 @@ export const PlanDrawing = memo(function PlanDrawing(props: PlanDrawingProps) {
         {tiles.map(({ name, at }) => (
           <rect key={name} {...at} {...use} className="fill-paper" />
         ))}
-        {tiles.map(({ name, at }) => {
-          const out = leftOut.includes(name);
-          return (
-            <rect
-              key={name}
-              {...at}
-              {...use}
-              vectorEffect="non-scaling-stroke"
-              className="fill-none stroke-slate"
-              strokeWidth={out ? 1.5 : 1}
-              strokeOpacity={0.6}
-              strokeDasharray={out ? '5 4' : undefined}
-            />
-          );
-        })}
+        {tiles.map(({ name, at, leftOut: out }) => (
+          <rect
+            key={name}
+            {...at}
+            {...use}
+            vectorEffect="non-scaling-stroke"
+            className="fill-none stroke-slate"
+            strokeWidth={out ? 1.5 : 1}
+            strokeOpacity={0.6}
+            strokeDasharray={out ? '5 4' : undefined}
+          />
+        ))}
         {outlines.map(({ path }, index) => (
           <path
             key={index}
@@ -64,7 +60,7 @@ export const PlanDrawing = memo(function PlanDrawing(props: PlanDrawingProps) {
         ))}
       </g>
       {tiles
-        .filter(({ name }) => leftOut.includes(name))
+        .filter(({ leftOut }) => leftOut === true)
         .map(({ name, at }) => (
           <rect
             key={name}
@@ -96,9 +92,16 @@ export const PlanDrawing = memo(function PlanDrawing(props: PlanDrawingProps) {
           textAnchor="middle"
           className="halo figures fill-ink font-semibold"
         >
-          {numbers.get(piece)}
+          {numbers(piece)}
         </text>
       ))}
     </g>
   );
 });
+
+/** The number of a drawing in the list of pieces; a mirror image has that of its piece, the cover is called so. */
+const numbersOf = (pieces: readonly FinishedPiece[]) => {
+  const numbers = new Map(pieces.map(({ name }, index) => [name, String(index + 1)]));
+  return (drawing: string): string =>
+    numbers.get(drawing) ?? numbers.get(drawing.split(' ')[0] ?? '') ?? drawing;
+};

@@ -1,6 +1,8 @@
 import { useEffect, useMemo, useReducer, useState } from 'react';
 
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
+import { leavingOut } from '#shared/sheets/sheet-plan.ts';
+import { printedTiles } from '#shared/sheets/tile-plan.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { useMedia } from '../../../lib/use-media.ts';
@@ -8,7 +10,7 @@ import { Tabs, type Tab } from '../../../ui/tabs.tsx';
 import { keepChoices, keptChoices } from '../kept-choices.ts';
 import { orderOf } from '../order-of.ts';
 import { roomChoices } from '../room-choices.ts';
-import { planKey, usePlan } from '../use-plan.ts';
+import { planKey, usePlan } from '../../../lib/use-plan.ts';
 import { useSheetsFiles } from '../use-sheets-files.ts';
 import { BeforeCutting } from './before-cutting.tsx';
 import { LinesCard } from './lines-card.tsx';
@@ -18,10 +20,11 @@ import { PiecesCard } from './pieces-card.tsx';
 import { PlanCount } from './plan-count.tsx';
 import { FileStates, PrintBar } from './print-bar.tsx';
 import { RoomHeader } from './room-header.tsx';
+import { ScaleCheckCard } from './scale-check-card.tsx';
 
 /** What is brought from a table to be printed. */
 export type ToPrint = {
-  readonly draft: Draft;
+  readonly draft: Drafted;
   /** Whether the draft is that of the figures on the table. */
   readonly fresh: boolean;
   readonly title: string;
@@ -33,7 +36,10 @@ export type ToPrint = {
   readonly maker: string;
 };
 
-type CardName = 'paper' | 'pieces' | 'lines' | 'cutting';
+/** No sheet is left out. */
+const none: readonly string[] = [];
+
+type CardName = 'paper' | 'pieces' | 'lines' | 'scale' | 'cutting';
 
 /** The print room: what is printed and on what, the page plan of it, and the file. */
 export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }: ToPrint) => {
@@ -49,12 +55,14 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
   const problems = 'problems' in asked ? asked.problems : [];
   const { planning, last, cancel, again } = usePlan(pieces, number, order);
   const key = order && planKey(number, order);
-  const leftOut = room.leftOut.plan === key ? room.leftOut.names : [];
+  const leftOut = room.leftOut.plan === key ? room.leftOut.names : none;
   const planned = planning.kind === 'planned' && planning.key === key;
-  const everyOut = planned && leftOut.length >= planning.plan.plan.tiles.length;
+  const shown = useMemo(() => last && leavingOut(last, leftOut), [last, leftOut]);
+  const everyOut = planned && shown !== undefined && printedTiles(shown.plan).length === 0;
   const { unit } = room;
   const files = useSheetsFiles(draft, unit);
 
+  const scaleCheck = <ScaleCheckCard room={room} paper={order?.paper} dispatch={dispatch} />;
   const cards: readonly Tab<CardName>[] = [
     {
       value: 'paper',
@@ -69,6 +77,7 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
       ),
     },
     { value: 'lines', label: 'Lines', render: () => <LinesCard room={room} dispatch={dispatch} /> },
+    { value: 'scale', label: 'Scale', render: () => scaleCheck },
     { value: 'cutting', label: 'Cutting', render: () => <BeforeCutting /> },
   ];
 
@@ -78,7 +87,7 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
         <div className="flex items-start gap-x-3">
           <PlanCount
             planning={planning}
-            leftOut={leftOut}
+            plan={shown}
             unit={unit}
             onCancel={cancel}
             onAgain={again}
@@ -101,13 +110,12 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
         )}
         {everyOut && <p className="text-madder">Every sheet is left out: take one back.</p>}
       </div>
-      {last === undefined ? (
+      {shown === undefined ? (
         <div className="grow bg-cloth" />
       ) : (
         <PagePlan
-          plan={last}
+          plan={shown}
           pieces={pieces}
-          leftOut={leftOut}
           unit={unit}
           passing={!planned}
           onSheet={(name) => key !== undefined && dispatch({ type: 'sheet', plan: key, name })}
@@ -132,6 +140,7 @@ export const PrintRoom = ({ draft, fresh, title, table, maker, unit: tableUnit }
           </div>
           {plan}
           <div className="w-[19rem] shrink-0 space-y-8 overflow-y-auto border-l border-rule bg-cloth px-4 py-4">
+            {scaleCheck}
             <BeforeCutting />
           </div>
         </main>

@@ -20,9 +20,12 @@ export type Planning =
 /** Choices often come in twos and threes; only the last is arranged, ms. */
 const pause = 200;
 
-/** What tells plans apart: the draft's number stands for its pieces. */
+/**
+ * What tells plans apart: the draft's number stands for its pieces. How lines are drawn, and whether there
+ * are marks to glue by, moves no piece.
+ */
 export const planKey = (draftNumber: string, order: PrintOrder): string =>
-  JSON.stringify([draftNumber, order]);
+  JSON.stringify([draftNumber, { ...order, glueMarks: true, inkSaving: false, leftOut: [] }]);
 
 /**
  * The plan for an order, arranged in a thread of its own as soon as the order is settled; a new order ends
