@@ -42,8 +42,11 @@ export function fade(fading: Fading, waist: number, tip: number): Profile | unde
 
 /** Part of the intake at the waist that is left at a height below it, 0 to 1. */
 export const heldBelow = (fading: Fading, waist: number, tip: number, y: number): number => {
+  if (tip <= waist || y >= tip) return 0;
+  // Asked for in every round of every half: the straight one needs no profile.
+  if (fading === 'straight') return (tip - y) / (tip - waist);
   const profile = fade(fading, waist, tip);
-  return profile === undefined || y >= tip ? 0 : xAt(profile, y);
+  return profile === undefined ? 0 : xAt(profile, y);
 };
 
 /** A profile of parts made one of millimetres. */
