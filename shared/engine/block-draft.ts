@@ -88,12 +88,12 @@ function narrateFinishing(table: DraftingTable, pieces: readonly Piece[], rules:
   const used = new Set(pieces.flatMap((piece) => piece.edges.map((edge) => edge.kind)));
   const allowances = allowanceWords
     .filter(([kind]) => used.has(kind))
-    .map(([kind, words]) => said`, ${words} ${mm(rules.allowance[kind])}`);
+    .map(([kind, words]) => said`${words} ${mm(rules.allowance[kind])}`);
   table
     .part('Finishing', 'both')
     .draw(
       'Allowances',
-      said`Added outside the seam line, last of all${allowances.flat()}; a fold has none.`,
+      said`Added outside the seam line, last of all: ${allowances.flatMap((each, k) => (k === 0 ? each : [', ', ...each]))}; a fold has none.`,
       {
         why: said`A block is kept as its seam line: trace that to design from it.`,
       },

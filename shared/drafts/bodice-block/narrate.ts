@@ -8,6 +8,7 @@ import { line } from '../../geometry/path.ts';
 import { type Point, distance } from '../../geometry/point.ts';
 import { type Said, deg, mm, said } from '../../units/said.ts';
 import type { BustDartAngle } from './bust-dart.ts';
+import { backWidthEase } from './pair-armholes.ts';
 import { type BodiceHalf, type BodiceQuarters, bodiceBack, bodiceFront, sideOf } from './pieces.ts';
 import { type OpenedShoulder, shoulderTilt } from './shoulder.ts';
 import type { BustDartPlace } from './style-card.ts';
@@ -169,10 +170,10 @@ function narrateArmhole(
   const note: Said =
     Math.abs(shift) < 0.5
       ? said``
-      : said` It stands ${mm(Math.abs(shift))} farther ${shift < 0 ? 'in' : 'out'} than half the ${name} asks, so that the arm has room and the curve bends one way.`;
+      : said` It stands ${mm(Math.abs(shift))} farther ${shift < 0 ? 'in' : 'out'} than that, so that the arm has room and the curve bends one way.`;
   paper.draw(
     'Armhole',
-    said`From the shoulder down past an upright ${mm(armhole.upright.x)} from the centre, from half the ${name} ${mm(body.measures[key])}${estimate(body, key)}, to the underarm: ${mm(pathLength(armhole.path))} long.${note}`,
+    said`From the shoulder down past an upright ${mm(armhole.upright.x)} from the centre, from half the ${name} ${mm(body.measures[key])}${estimate(body, key)}${plan.side === 'front' ? said` turned out with the bust dart` : said` and ${mm(backWidthEase)} of ease`}, to the underarm: ${mm(pathLength(armhole.path))} long.${note}`,
     {
       why: said`It is square to the shoulder and to the side seam, so that front and back run on as one curve when they are sewn.`,
       points: { upright: armhole.upright },

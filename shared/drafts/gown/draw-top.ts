@@ -1,6 +1,7 @@
 import type { TopOpening } from '../../drafting/construction.ts';
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
+import type { Quantity } from '../../drafting/quantity.ts';
 import type { Piece } from '../../drafting/piece.ts';
 import { pathLength } from '../../geometry/curve.ts';
 import type { Path } from '../../geometry/path.ts';
@@ -26,7 +27,8 @@ export type TopInputs = {
   /** The front half, whose side seam is master. */
   readonly front: Half;
   readonly opening: number;
-  /** Half the width of the body where a gown off the shoulder ends. */
+  /** The width of the body where a gown off the shoulder ends, and half of it. */
+  readonly across: Quantity;
   readonly halfAcross: number;
   /** How the pieces end that reach down to the knee. */
   readonly footOf: FootOf;
@@ -131,7 +133,7 @@ function outerEnd(
 const backEdgeOver = 30;
 
 /** Whether the back's top line, drawn with its opening, crosses it high enough over bust level. */
-export function backEdgeIsHigh(inputs: Omit<TopInputs, 'footOf'>): boolean {
+export function backEdgeIsHigh(inputs: Omit<TopInputs, 'footOf' | 'across'>): boolean {
   const { half, front, opening, style, rules } = inputs;
   const points = topLinePoints(half, front, style, inputs);
   const bust = heightOn(half, 'bust', half.axis);

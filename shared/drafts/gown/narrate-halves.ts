@@ -8,6 +8,7 @@ import type { Contour } from './contour.ts';
 import { type Half, dartShares } from './half.ts';
 import type { PairedHalves } from './pair-halves.ts';
 import type { Quarters } from './quarters.ts';
+import type { GownStyle } from './style-card.ts';
 
 const levelRows = [
   ['bust', 'Bust line'],
@@ -30,6 +31,7 @@ export function narrateHalf(
   quarters: Quarters,
   contour: Contour,
   moved: number,
+  waistSeam: GownStyle['waistSeam'],
 ): PartTable {
   const paper = table.part(half.side === 'front' ? 'Front' : 'Back', half.side);
   for (const [level, title] of levelRows) {
@@ -43,7 +45,7 @@ export function narrateHalf(
   narrateSuppression(table, paper, half);
   narrateSide(paper, half);
   narrateContour(paper, half, quarters, contour, moved);
-  narrateWaistSeam(paper, half, quarters);
+  narrateWaistSeam(paper, half, quarters, waistSeam !== 'none');
   return paper;
 }
 
@@ -170,17 +172,19 @@ function narrateContour(
   );
 }
 
-function narrateWaistSeam(paper: PartTable, half: Half, quarters: Quarters): void {
+function narrateWaistSeam(paper: PartTable, half: Half, quarters: Quarters, sewn: boolean): void {
   const fall = half.seam.to.y - half.seam.from.y;
   const way =
     Math.abs(fall) < leastSaid
       ? said`stays level`
       : said`${fall > 0 ? 'falls' : 'rises'} ${mm(Math.abs(fall))}`;
   paper.draw(
-    'Waist seam',
+    sewn ? 'Waist seam' : 'Waist, closed',
     said`Drawn with its intake closed, ${mm(quarters.seam.value, quarters.seam.measures)} long (${quarters.seam.how}): square at the centre, it ${way} at the side, then ${half.gap.seam < leastSaid ? said`needs no opening` : said`is opened by ${mm(half.gap.seam)}`}.`,
     {
-      why: said`Top and middle are cut from this one line, so they are equal by construction.`,
+      why: sewn
+        ? said`Top and middle are cut from this one line, so they are equal by construction.`
+        : said`No seam is cut here: the line only holds the waist, which darts and panel seams take in.`,
       lines: [[half.seam]],
       measures: quarters.seam.measures,
     },

@@ -1,4 +1,5 @@
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
+import type { Quantity } from '../../drafting/quantity.ts';
 import { pathLength } from '../../geometry/curve.ts';
 import type { Path } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
@@ -21,11 +22,15 @@ export function narrateTop(
   points: TopLinePoints,
   top: TopLine,
 ): void {
-  const { centre, peak, side, sideLean } = points;
+  const { centre, peak, side, sideLean, shape } = points;
   const off = sideLean === undefined;
-  const start = peak
-    ? said`From ${mm(centre.y)} down at the centre up to the peak, ${mm(peak.x)} out and ${mm(peak.y)} down, and on`
-    : said`From ${mm(half.levels.waist - centre.y)} above the waist at the centre`;
+  const start = !peak
+    ? said`From ${mm(half.levels.waist - centre.y)} above the waist at the centre`
+    : shape === undefined
+      ? said`Level from the centre, ${mm(centre.y)} down, to ${mm(peak.x)} out, and on`
+      : said`From ${mm(centre.y)} down at the centre up to the peak, ${mm(peak.x)} out and ${mm(peak.y)} down, and on`;
+  const leaves =
+    shape === 'notched' ? 'meets the centre in a notch' : 'sets out square to the centre';
   const end = off
     ? said` to the end of the band's edge, ${mm(side.x)} out and ${mm(side.y)} down`
     : peak
@@ -36,8 +41,8 @@ export function narrateTop(
     said`${start}${end}; drawn with the opening closed so that it crosses the seam without a kink, ${mm(pathLength(top.centre) + pathLength(top.outer))} long when sewn.`,
     {
       why: off
-        ? said`It sets out square to the centre and bends one way only to the armhole, so that the band can carry it on.`
-        : said`It sets out square to the centre and arrives square to the side seam, so front and back join without a corner.`,
+        ? said`It ${leaves} and bends one way only to the armhole, so that the band can carry it on.`
+        : said`It ${leaves} and arrives square to the side seam, so front and back join without a corner.`,
       points: { 'top-centre': centre, ...(peak ? { 'top-peak': peak } : {}), 'top-side': side },
       lines: [top.centre, top.outer],
     },
@@ -59,18 +64,19 @@ export function narrateArmhole(
   paper: PartTable,
   top: TopLine,
   armhole: Path,
-  { halfAcross, opening }: TopWidth,
+  { across, halfAcross, opening }: TopWidth & { readonly across: Quantity },
 ): void {
   const from = top.outer.at(-1)?.to;
   const until = armhole.at(-1)?.to;
   if (!from || !until) return;
   const kept = halfAcross + opening - from.x;
+  const half = said`Half of ${across.how}${opening < 0.5 ? '' : said` and the opening ${mm(opening)}`}`;
   const how: Said =
     kept > 0.05
-      ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would reach too near the side; its upper end is kept ${mm(from.x)} out`
+      ? said`${half} would reach too near the side; its upper end is kept ${mm(from.x)} out`
       : kept < -0.05
-        ? said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} would end too near the bust seam, or leave a flat armhole; its upper end is set ${mm(from.x)} out`
-        : said`Half the width across ${mm(halfAcross)} and the opening ${mm(opening)} put its upper end ${mm(from.x)} out`;
+        ? said`${half} would end too near the bust seam, or leave a flat armhole; its upper end is set ${mm(from.x)} out`
+        : said`${half} put its upper end ${mm(from.x, across.measures)} out`;
   paper.draw(
     'Armhole edge',
     said`${how}, ${mm(from.y)} down; from there square to the top line, down and out to the underarm, ${mm(until.x)} out, square to the side seam: ${mm(pathLength(armhole))} long.`,
@@ -78,6 +84,7 @@ export function narrateArmhole(
       why: said`The band is set in along its upper part; under the arm the edge stays free, so that the arm can be lifted.`,
       points: { 'armhole-top': from, underarm: until },
       lines: [armhole],
+      measures: across.measures,
     },
   );
 }

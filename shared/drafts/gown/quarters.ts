@@ -113,7 +113,11 @@ export function finishedQuarters(
         }
       : plus(
           quarterOf(
-            plus(measured('waist seam', 'waistSeamGirth', body), 'ease', seamEase(style, share)),
+            plus(
+              measured('waist seam girth', 'waistSeamGirth', body),
+              'ease',
+              seamEase(style, share),
+            ),
           ),
           'balance',
           sign *

@@ -66,7 +66,7 @@ function warnOfTopHip(table: DraftingTable, body: Body, half: number): void {
   );
 }
 
-const countWords = ['no dart', 'one dart of', 'two darts, together'] as const;
+const countWords = ['no dart', 'one dart', 'two darts together'] as const;
 
 function narrateQuarter(
   table: DraftingTable,
@@ -81,7 +81,10 @@ function narrateQuarter(
   const { side, darts } = plan.intake;
   const { stretches, mouths } = plan.waist;
   const count = mouths.length === 0 ? countWords[0] : countWords[mouths.length === 1 ? 1 : 2];
-  const taken: Said = darts === 0 ? said`${count}` : said`${count} ${mm(darts)}`;
+  const taken: Said =
+    darts === 0
+      ? said`${count}`
+      : said`${count} ${mouths.length === 1 ? 'takes' : 'take'} ${mm(darts)}`;
   paper.draw(
     'Suppression',
     said`Hip quarter ${mm(plan.figures.hip, ['hipGirth'])} less waist quarter ${mm(plan.figures.waist, ['waistGirth'])} is ${mm(plan.figures.hip - plan.figures.waist, ['hipGirth', 'waistGirth'])}: the side takes ${mm(side)}, ${taken}.`,
