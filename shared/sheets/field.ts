@@ -20,7 +20,16 @@ export type Field = {
 export type Turned = {
   readonly motion: Motion;
   readonly raster: Raster;
-  readonly groups: readonly PhaseGroup[];
+  readonly groups: readonly FieldGroup[];
+  /** The fewest sheets it takes alone. */
+  readonly alone: number;
+};
+
+/** Places of a piece with what is asked of them most often, in the field's own numbers. */
+export type FieldGroup = PhaseGroup & {
+  /** Its sheets, counted row by row from the one it starts on. */
+  readonly offsets: Int32Array;
+  readonly needs: Int32Array;
 };
 
 /** Side of a cell: small against the room that pieces leave, mm; on large sheets a part of the sheet. */
@@ -82,7 +91,7 @@ const quarters = [
 ] as const;
 
 /** The ways of laying a shape, each quarter turn with its cells; none so wide that its sheets cannot be counted. */
-export function turnsOf(shape: Shape, { lattice }: Field): readonly Turned[] {
+export function turnsOf(shape: Shape, { lattice, columns }: Field): readonly Turned[] {
   return (shape.upright ? quarters.slice(0, 1) : quarters).flatMap((quarter) => {
     const turn: Motion = { ...quarter, dx: 0, dy: 0 };
     const chain = shape.chain.map((each) => moved(each, turn));
@@ -91,6 +100,13 @@ export function turnsOf(shape: Shape, { lattice }: Field): readonly Turned[] {
     const onCorner = chain.map((each): Point => ({ x: each.x - box.x, y: each.y - box.y }));
     const raster = rasterOf(onCorner, box, lattice.cell, gap / 2);
     const motion = { ...turn, dx: -box.x, dy: -box.y };
-    return [{ motion, raster, groups: phaseGroups(raster, lattice) }];
+    const groups = phaseGroups(raster, lattice).map((group) => ({
+      ...group,
+      offsets: Int32Array.from(group.sheets, (each) => each.row * columns + each.column),
+      needs: Int32Array.from(group.least),
+    }));
+    return [
+      { motion, raster, groups, alone: Math.min(...groups.map((each) => each.sheets.length)) },
+    ];
   });
 }

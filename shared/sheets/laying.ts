@@ -1,11 +1,11 @@
 import { type Board, emptyBoard } from './board.ts';
-import type { Field, Turned } from './field.ts';
-import { type PhaseGroup, takenOn } from './phases.ts';
+import type { Field, FieldGroup, Turned } from './field.ts';
+import { takenOn } from './phases.ts';
 
 /** A piece where it lies: which way turned, from which sheet on, at which cell. */
 export type Laid = {
   readonly turned: Turned;
-  readonly group: PhaseGroup;
+  readonly group: FieldGroup;
   readonly column: number;
   readonly row: number;
   readonly x: number;
@@ -76,48 +76,70 @@ export function sheetsUsed(table: Table): number {
 
 type Wish = {
   readonly turned: Turned;
-  readonly group: PhaseGroup;
+  readonly group: FieldGroup;
   readonly column: number;
   readonly row: number;
 };
 
+/** Places as numbers in one list a price, threaded through each other: thousands are listed a move. */
+type Wishes = {
+  readonly wish: (which: number) => Wish | undefined;
+  /** The last place of each price, and how many there are. */
+  readonly last: readonly number[];
+  readonly count: readonly number[];
+  /** The place of the same price before a place; below zero where there is none. */
+  readonly before: readonly number[];
+};
+
 /** Where a piece could go, by how many sheets more that takes; only where its cells may find room. */
-function wishes(table: Table, ways: readonly Turned[]): readonly (readonly Wish[] | undefined)[] {
+function wishes(table: Table, ways: readonly Turned[]): Wishes {
   const { field, used, free } = table;
-  const byCost: Wish[][] = [];
   const long = reach(table);
   // On sheets of its own a piece always finds a place, so nothing dearer is looked at.
-  const alone = Math.min(...ways.flatMap(({ groups }) => groups.map((each) => each.sheets.length)));
-  for (const turned of ways) {
-    for (const group of turned.groups) {
+  const alone = Math.min(...ways.map((each) => each.alone));
+  const [turnedOf, groupOf, cornerOf]: [number[], number[], number[]] = [[], [], []];
+  const [last, count, before]: [number[], number[], number[]] = [[], [], []];
+  for (let way = 0; way < ways.length; way += 1) {
+    const groups = ways[way]?.groups ?? [];
+    for (let which = 0; which < groups.length; which += 1) {
+      const group = groups[which];
+      if (!group) continue;
       let fresh = false;
-      const { sheets, least } = group;
+      const { offsets, needs } = group;
       const lastRow = Math.min(field.rows - group.rows, long);
       for (let row = 0; row <= lastRow; row += 1) {
         for (let column = 0; column + group.columns <= field.columns; column += 1) {
           let cost = 0;
           let room = true;
           const corner = row * field.columns + column;
-          for (let i = 0; room && i < sheets.length; i += 1) {
-            const sheet = sheets[i];
-            if (!sheet) continue;
-            const at = corner + sheet.row * field.columns + sheet.column;
+          for (let i = 0; room && i < offsets.length; i += 1) {
+            const at = corner + (offsets[i] ?? 0);
             if (used[at] === 0) cost += 1;
-            room = (free[at] ?? 0) >= (least[i] ?? 0) && (field.asLong || cost <= alone);
+            room = (free[at] ?? 0) >= (needs[i] ?? 0) && (field.asLong || cost <= alone);
           }
           if (!room) continue;
-          const untouched = !field.asLong && cost === sheets.length;
+          const untouched = !field.asLong && cost === offsets.length;
           if (untouched && fresh) continue;
           fresh ||= untouched;
-          const price = field.asLong ? Math.max(0, row + group.rows - long) : cost;
-          (byCost[price] ??= []).push({ turned, group, column, row });
+          const price = field.asLong ? row + group.rows : cost;
+          before.push(last[price] ?? -1);
+          last[price] = cornerOf.length;
+          count[price] = (count[price] ?? 0) + 1;
+          turnedOf.push(way);
+          groupOf.push(which);
+          cornerOf.push(corner);
         }
       }
     }
   }
-  // Off a roll the nearest to its start is the best of equals.
-  if (field.asLong) byCost.forEach((equal) => equal.sort((a, b) => a.row - b.row));
-  return byCost;
+  const wish = (which: number): Wish | undefined => {
+    const turned = ways[turnedOf[which] ?? -1];
+    const group = turned?.groups[groupOf[which] ?? -1];
+    const corner = cornerOf[which] ?? 0;
+    const row = Math.floor(corner / field.columns);
+    return turned && group && { turned, group, column: corner - row * field.columns, row };
+  };
+  return { wish, last, count, before };
 }
 
 /** The first free place of a wish, looked for from some place in its list. */
@@ -131,9 +153,9 @@ function place(
   const [left, top] = [column * lattice.across.cells, row * lattice.down.cells];
   for (let i = 0; i < phases.length; i += 1) {
     const phase = phases[(start + i) % phases.length];
-    if (!phase) continue;
-    const [x, y] = [left + phase.x, top + phase.y];
-    if (board.free(turned.raster, x, y)) return { turned, group, column, row, x, y };
+    if (phase && board.free(turned.raster, left + phase.x, top + phase.y)) {
+      return { turned, group, column, row, x: left + phase.x, y: top + phase.y };
+    }
   }
   return undefined;
 }
@@ -148,13 +170,18 @@ export function bestPlace(
   lot: () => number,
 ): Laid | undefined {
   const draw = table.field.asLong ? () => 0 : lot;
-  for (const equal of wishes(table, ways)) {
-    if (!equal) continue;
-    const start = Math.floor(draw() * equal.length);
-    for (let i = 0; i < equal.length; i += 1) {
-      const wish = equal[(start + i) % equal.length];
-      const laid = wish && place(table, wish, draw());
+  const { wish, last, count, before } = wishes(table, ways);
+  for (let price = 0; price < last.length; price += 1) {
+    const equal = count[price] ?? 0;
+    const end = last[price] ?? -1;
+    let at = end;
+    for (let skipped = Math.floor(draw() * equal); skipped > 0; skipped -= 1) at = before[at] ?? -1;
+    for (let i = 0; i < equal; i += 1) {
+      const wanted = wish(at);
+      const laid = wanted && place(table, wanted, draw());
       if (laid) return laid;
+      at = before[at] ?? -1;
+      if (at < 0) at = end;
     }
   }
   return undefined;
