@@ -44,6 +44,16 @@ export const houseRules = z.strictObject({
   sideShare: z.number().describe('Part of the waist suppression that the side seam takes, 0 to 1.'),
   dartWidest: z.number().describe('Widest intake sewn in one dart, mm.'),
   dartClearance: z.number().describe('Darts stop this short of the bust point, mm.'),
+  peakOverBust: z
+    .number()
+    .describe(
+      "Height of a strapless top line's peak over the bust where the style leaves it open, mm.",
+    ),
+  shoulderDrop: z
+    .number()
+    .describe(
+      'Side neck level down to the peak, off the shoulder, where the style leaves it open, mm.',
+    ),
   armholeAt: z
     .enum(armholePlaces)
     .describe('Where a gown off the shoulder ends: width across, or shoulder width.'),
@@ -70,6 +80,8 @@ export function fillRules(card: z.output<typeof rulesCard>): HouseRules {
     sideShare: card.sideShare ?? base.sideShare,
     dartWidest: card.dartWidest ?? base.dartWidest,
     dartClearance: card.dartClearance ?? base.dartClearance,
+    peakOverBust: card.peakOverBust ?? base.peakOverBust,
+    shoulderDrop: card.shoulderDrop ?? base.shoulderDrop,
     armholeAt: card.armholeAt ?? base.armholeAt,
     ...(card.intakes === undefined ? {} : { intakes: card.intakes }),
     allowance: merged(base.allowance, card.allowance),

@@ -1,7 +1,8 @@
 import { balanceLevels, type BalanceLevel, type HouseRules } from './house-rules.ts';
 
 type Allowance = keyof HouseRules['allowance'];
-type Single = 'cupShare' | 'sideShare' | 'dartWidest' | 'dartClearance';
+type Single =
+  'cupShare' | 'sideShare' | 'dartWidest' | 'dartClearance' | 'peakOverBust' | 'shoulderDrop';
 
 /** Keys of the house rules' figures as the contract writes them. */
 export type HouseRuleKey = `balance.${BalanceLevel}` | Single | `allowance.${Allowance}`;
@@ -89,6 +90,18 @@ export const houseRuleFigures: readonly HouseRuleFigure[] = [
     hint: 'Darts stop this short of the bust point.',
     min: 10,
     max: 40,
+  }),
+  single('peakOverBust', {
+    label: 'Drop of a strapless gown',
+    hint: 'How high its peak stands over the bust where the style card leaves it open.',
+    min: 60,
+    max: 110,
+  }),
+  single('shoulderDrop', {
+    label: 'Drop off the shoulder',
+    hint: 'From the side neck level down to the peak where the style card leaves it open.',
+    min: 90,
+    max: 200,
   }),
   allowanceFor('seam', {
     label: 'Seam allowance',

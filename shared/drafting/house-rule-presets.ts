@@ -4,6 +4,8 @@ const shared = {
   sideShare: 0.45,
   dartWidest: 40,
   dartClearance: 25,
+  peakOverBust: 85,
+  shoulderDrop: 127,
   allowance: { seam: 15, side: 25, zip: 25, top: 10, hem: 10 },
 } as const;
 

@@ -37,6 +37,10 @@ export type HouseRules = {
   readonly dartWidest: number;
   /** Darts stop this short of the bust point. */
   readonly dartClearance: number;
+  /** Height of a strapless top line's peak over the bust, where the style leaves it open. */
+  readonly peakOverBust: number;
+  /** Side-neck level down to the peak of a gown off the shoulder, where the style leaves it open. */
+  readonly shoulderDrop: number;
   readonly armholeAt: ArmholePlace;
   /** Intakes given outright, front and back alike: the side seam takes the rest. Absent, they are derived. */
   readonly intakes?: { readonly [P in IntakePlace]: number };

@@ -1,6 +1,7 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
-import { styleChoices } from './style-card.ts';
+import type { HouseRules } from '../../drafting/house-rules.ts';
+import { isOffShoulder, styleChoices } from './style-card.ts';
 import type { EaseLevel, GownStyle, StyleCard, StyleLength } from './style-card.ts';
 import { styleLimits } from './style-limits.ts';
 
@@ -57,4 +58,17 @@ export function resolveStyle(style: StyleCard, body: Body, levels: BodyLevels): 
       hip: ease('hip'),
     },
   };
+}
+
+/** A style card with the house's drop where it leaves the peak open; kept within this body's limits. */
+export function withHouseDrop(
+  style: StyleCard,
+  body: Body,
+  levels: BodyLevels,
+  { peakOverBust, shoulderDrop }: Pick<HouseRules, 'peakOverBust' | 'shoulderDrop'>,
+): StyleCard {
+  if (style.topDrop !== undefined) return style;
+  const wished = isOffShoulder(style) ? shoulderDrop : levels.bust - peakOverBust;
+  const { min, max } = styleLimits(body, levels, style).topDrop;
+  return { ...style, topDrop: Math.min(max, Math.max(min, wished)) };
 }

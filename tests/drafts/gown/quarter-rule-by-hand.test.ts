@@ -154,7 +154,7 @@ describe('the gown drawn by the plain quarter rule', () => {
       style,
       rules: { ...rules, allowance: quarterRule.allowance },
     });
-    expect(draft.proof.audit).toEqual(narrow.proof.audit);
+    expect(draft.proof.girths).toEqual(narrow.proof.girths);
     const back = draft.pieces.find(({ name }) => name === 'back-middle');
     tenth(Math.min(...(back?.cutLine ?? []).map(({ to }) => to.x)), -inches(2));
   });

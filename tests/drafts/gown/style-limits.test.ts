@@ -1,10 +1,12 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { completeCard } from '#shared/body/complete-card.ts';
+import { balanced } from '#shared/drafting/house-rule-presets.ts';
 import { resolveStyle } from '#shared/drafts/gown/resolve-style.ts';
 import type { StyleCard } from '#shared/drafts/gown/style-card.ts';
 import { checkStyle } from '#shared/drafts/gown/style-check.ts';
 import { styleKeys, styleLimits } from '#shared/drafts/gown/style-limits.ts';
+import { draftGown } from '#shared/engine/draft-gown.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 import { middleBody } from '../../support/middle-body.ts';
@@ -164,5 +166,24 @@ describe('a style that is only unlikely', () => {
     expect(problems.map(({ code, severity }) => [code, severity])).toEqual([
       ['narrow-knee', 'warning'],
     ]);
+  });
+});
+
+describe('the drop of the house', () => {
+  it('is the peak where the style card leaves it open, and gives way where it does not', () => {
+    const open = draftGown({
+      card: middleBody,
+      style: {},
+      rules: { ...balanced, peakOverBust: 70 },
+    });
+    expect(open.style.topDrop).toBeCloseTo(open.levels.bust - 70, 9);
+    const off = draftGown({
+      card: middleBody,
+      style: { sleeve: 'plainBand' },
+      rules: { ...balanced, shoulderDrop: 140 },
+    });
+    expect(off.style.topDrop).toBe(140);
+    const chosen = { card: middleBody, style: { topDrop: 190 }, rules: balanced };
+    expect(draftGown(chosen).style.topDrop).toBe(190);
   });
 });
