@@ -3,7 +3,7 @@ import { type LevelFigure, levelFigures } from '../compare/level-figures.ts';
 import { seamOutline } from '../compare/moved-piece.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
 import { reverse } from '../geometry/curve.ts';
-import { hatch } from '../geometry/region.ts';
+import { type Region, hatch } from '../geometry/region.ts';
 import { formatFine } from '../units/format-length.ts';
 import type { Unit } from '../units/said.ts';
 import { levelTitles } from './level-titles.ts';
@@ -15,7 +15,7 @@ const ink = '#1E2A32';
 const slate = '#5B6A72';
 
 /** Strokes of the shading stand this far apart, mm. */
-export const hatchApart = 4;
+export const hatchApart = 3;
 
 /** What two drafts over each other are called in legends. */
 export type CompareNames = { readonly first: string; readonly second: string };
@@ -46,16 +46,27 @@ function outline(piece: FinishedPiece | undefined, which: 'first' | 'second'): s
   );
 }
 
+/** A region as closed paths. */
+export const regionData = (region: Region): string =>
+  region.map((rim) => `M${rim.map(({ x, y }) => `${figure(x)} ${figure(y)}`).join('L')}Z`).join('');
+
 function shading({ between }: PiecePair): string {
   if (!between) return '';
-  const strokes = (region: typeof between.first, way: 'rising' | 'falling') =>
-    hatch(region, way, hatchApart)
-      .map((each) => pathData([each]))
-      .join('');
-  return (
-    element('path', { class: 'only-first', d: strokes(between.first, 'falling'), ...pen(0.2) }) +
-    element('path', { class: 'only-second', d: strokes(between.second, 'rising'), ...pen(0.2) })
-  );
+  const shade = (which: 'first' | 'second', way: 'rising' | 'falling') =>
+    element('path', {
+      class: `only-${which}`,
+      d: regionData(between[which]),
+      fill: '#D8D1C1',
+      'fill-rule': 'evenodd',
+    }) +
+    element('path', {
+      class: `only-${which}-strokes`,
+      d: hatch(between[which], way, hatchApart)
+        .map((each) => pathData([each]))
+        .join(''),
+      ...pen(0.35),
+    });
+  return shade('first', 'falling') + shade('second', 'rising');
 }
 
 /** A level's widths in both drafts, as they are written on it. */

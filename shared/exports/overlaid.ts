@@ -2,17 +2,18 @@ import { seamOutline } from '../compare/moved-piece.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
 import { flatten } from '../geometry/curve.ts';
 import { type Point, point } from '../geometry/point.ts';
+import { outerRims } from '../geometry/region.ts';
 import { boxOf } from '../sheets/layout.ts';
 import { spread } from './spread.ts';
 
 /** One piece drawn several times over itself: in two drafts, or in the sizes of a nest. */
 export type Stack = { readonly name: string; readonly pieces: readonly FinishedPiece[] };
 
-/** A stack as one piece with all its seam lines, for whatever lays pieces out by their outline. */
+/** A stack as one piece, its outer rim as the line to cut, for whatever lays pieces out by their outline. */
 export function stackOutline({ pieces }: Stack): FinishedPiece {
   const [first] = pieces;
   if (!first) throw new Error('A stack has at least one piece.');
-  return { ...first, cutLine: pieces.flatMap(seamOutline), notchMarks: [] };
+  return { ...first, cutLine: outerRims(pieces.map(seamOutline)), notchMarks: [] };
 }
 
 /** Stacks side by side on a sheet whose top left corner is 0, 0; mm. */

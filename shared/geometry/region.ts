@@ -42,6 +42,14 @@ export const areaOf = (region: Region): number =>
 /** Area inside a closed path, mm². */
 export const areaInside = (outline: Path): number => areaOf([flatten(outline, tolerance)]);
 
+/** The outer rim round closed outlines that lie over each other, clockwise; several rims where they lie apart. */
+export function outerRims(outlines: readonly Path[]): Path {
+  const chains = outlines.map((each) => plain(flatten(each, tolerance)));
+  return Clipper.unionD(chains, [], FillRule.NonZero, 4)
+    .filter((rim) => Clipper.areaD(rim) > 0)
+    .flatMap((rim) => rim.map((from, index) => line(from, rim[(index + 1) % rim.length] ?? from)));
+}
+
 /** What lies in one of two closed outlines and not in the other. */
 export function overlapOf(first: Path, second: Path): Overlap {
   const [a, b] = [flatten(first, tolerance), flatten(second, tolerance)];

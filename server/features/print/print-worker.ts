@@ -1,4 +1,5 @@
 import { answerOrders } from '../../http/thread-work.ts';
+import { comparisonOf, comparisonSvgOf, nestPdfOf, nestSvgOf } from './overlays.ts';
 import type { PrintTask } from './print-task.ts';
 import { chalkSheetOf, piecesOf, sheetsOf, sheetsSvgOf, tilesOf } from './service.ts';
 import { worksheetOf } from './worksheet-pdf.ts';
@@ -16,6 +17,14 @@ answerOrders((posted) => {
       return sheetsOf(task.wanted);
     case 'sheets-svg':
       return sheetsSvgOf(task.wanted);
+    case 'comparison':
+      return comparisonOf(task.wanted);
+    case 'comparison-svg':
+      return comparisonSvgOf(task.wanted);
+    case 'nest':
+      return nestPdfOf(task.wanted);
+    case 'nest-svg':
+      return nestSvgOf(task.wanted);
     case 'worksheet':
       return worksheetOf(task.wanted);
   }
