@@ -65,8 +65,40 @@ const router = createBrowserRouter([
             lazy: async () => ({ Component: (await import('./sign-up-place.tsx')).SignUpPlace }),
           },
           {
+            path: paths.compare,
+            lazy: async () => ({
+              Component: (await import('../features/compare/routes/compare-page.tsx')).ComparePage,
+            }),
+          },
+          {
             lazy: async () => ({ Component: (await import('./own-places.tsx')).OwnPlaces }),
             children: [
+              {
+                path: paths.clients,
+                lazy: async () => ({
+                  Component: (await import('../features/people/routes/clients-page.tsx'))
+                    .ClientsPage,
+                }),
+              },
+              {
+                path: paths.client,
+                lazy: async () => ({
+                  Component: (await import('../features/people/routes/client-page.tsx')).ClientPage,
+                }),
+              },
+              {
+                path: paths.gownRegrade,
+                lazy: async () => ({
+                  Component: (await import('../features/compare/routes/regrade-page.tsx'))
+                    .RegradePage,
+                }),
+              },
+              {
+                path: paths.gownNest,
+                lazy: async () => ({
+                  Component: (await import('../features/compare/routes/nest-page.tsx')).NestPage,
+                }),
+              },
               {
                 path: paths.gowns,
                 lazy: async () => ({

@@ -11,8 +11,13 @@ export const paths = {
   gown: '/gowns/:gownId',
   gownPrint: '/gowns/:gownId/print',
   gownReplay: '/gowns/:gownId/replay',
+  gownRegrade: '/gowns/:gownId/regrade',
+  gownNest: '/gowns/:gownId/nest',
   cards: '/gowns/measure-cards',
   card: '/gowns/measure-cards/:cardId',
   classes: '/classes',
   class: '/class/:token',
+  clients: '/clients',
+  client: '/clients/:personId',
+  compare: '/compare',
 } as const;

@@ -13,12 +13,20 @@ export const PlaceHeader = ({ signedIn }: { signedIn: boolean }) => (
     <Link to={paths.landing} aria-label="Ellwand, to the front page">
       <Wordmark compact={signedIn} />
     </Link>
-    <nav aria-label="Places" className="flex gap-5">
+    <nav aria-label="Places" className="flex flex-wrap gap-x-5">
       {signedIn && (
         <NavLink to={paths.gowns} className={place}>
           Gowns
         </NavLink>
       )}
+      {signedIn && (
+        <NavLink to={paths.clients} className={place}>
+          Clients
+        </NavLink>
+      )}
+      <NavLink to={paths.compare} className={place}>
+        Compare
+      </NavLink>
       {signedIn && (
         <NavLink to={paths.classes} className={place}>
           Classes

@@ -1,6 +1,7 @@
 import { queryOptions } from '@tanstack/react-query';
 
 import type { Sent } from '#shared/api/endpoint.ts';
+import { noteCard } from '#shared/api/gowns.ts';
 import {
   createMeasureCard,
   keptCardSchema,
@@ -34,7 +35,11 @@ export const cardQuery = (cardId: string) =>
 
 export const keepCard = (card: Sent<typeof createMeasureCard>) => call(createMeasureCard, card);
 
-export const sendCard = (cardId: string, { saveId, baseVersion, content }: Unsent<CardContent>) =>
-  callOf(saveMeasureCard, { cardId }, { saveId, baseVersion, content });
+export const sendCard = (cardId: string, { engine: _, ...save }: Unsent<CardContent>) =>
+  callOf(saveMeasureCard, { cardId }, save);
 
 export const readCurrentCard = (current: unknown) => keptCardSchema.safeParse(current).data;
+
+/** Notes which card is laid on a gown: it stays as it is from then on. */
+export const noteLaid = (gownId: string, cardId: string) =>
+  callOf(noteCard, { gownId }, { cardId });

@@ -1,12 +1,13 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { useRef, useState, type Dispatch } from 'react';
+import { useParams } from 'react-router-dom';
 
 import { failureWords } from '../../../lib/failure-words.ts';
 import { newId } from '../../../lib/new-id.ts';
 import { Button } from '../../../ui/button.tsx';
 import type { BenchAction } from '../bench.ts';
 import { cardChoices, cardContentOf } from '../card-content.ts';
-import { fetchCard, keepCard, keptCardsQuery } from '../card-queries.ts';
+import { fetchCard, keepCard, keptCardsQuery, noteLaid } from '../card-queries.ts';
 import type { TableState } from '../table-state.ts';
 
 type CardToolsProps = {
@@ -17,6 +18,7 @@ type CardToolsProps = {
 /** From this table to the measure cards kept by themselves, and from them onto the table. */
 export const CardTools = ({ table, dispatch }: CardToolsProps) => {
   const [choosing, setChoosing] = useState(false);
+  const { gownId } = useParams();
   const client = useQueryClient();
   const cards = useQuery({ ...keptCardsQuery, enabled: choosing });
   const saveId = useRef(newId());
@@ -36,7 +38,10 @@ export const CardTools = ({ table, dispatch }: CardToolsProps) => {
     },
   });
   const laying = useMutation({
-    mutationFn: (cardId: string) => fetchCard(cardId),
+    mutationFn: async (cardId: string) => {
+      if (gownId !== undefined) await noteLaid(gownId, cardId);
+      return fetchCard(cardId);
+    },
     onSuccess: ({ content }) => {
       setChoosing(false);
       dispatch({ type: 'work laid', work: cardChoices(table, content) });

@@ -48,12 +48,33 @@ export const GownsPage = () => {
             {`saved ${momentWords(gown.savedAt)}`}
             <span className="block">{stateWords(gown)}</span>
           </p>
+          {gown.drawnBy !== null && <GownLinks gown={gown} />}
           <RecordActions record={gown} name={gown.title} label="Name of the gown" deed={deed} />
         </>
       )}
     />
   );
 };
+
+/** From a drawn gown to what it can be laid over, redrawn for, and stepped to. */
+const GownLinks = ({ gown: { id, title } }: { gown: ListedGown }) => (
+  <p className="flex flex-wrap gap-x-4 text-sm">
+    {[
+      { to: `/compare?first=gown:${id}`, label: 'Compare' },
+      { to: `/gowns/${id}/regrade`, label: 'Regrade' },
+      { to: `/gowns/${id}/nest`, label: 'Nest' },
+    ].map(({ to, label }) => (
+      <Link
+        key={label}
+        to={to}
+        aria-label={`${label}: ${title}`}
+        className="py-1 text-brass underline underline-offset-4"
+      >
+        {label}
+      </Link>
+    ))}
+  </p>
+);
 
 const dayOf = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long' });
 const newTitle = (): string => `Gown of ${dayOf.format(new Date())}`;
