@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, gt, lt } from 'drizzle-orm';
 import type { Store } from './client.ts';
 import { saves } from './schema/saves.ts';
 
@@ -17,6 +17,26 @@ export async function acknowledgedSave(
   return row;
 }
 
+/** A number is remembered for so long, ms: thirty days. */
+const remembered = 30 * 24 * 60 * 60 * 1000;
+
+/**
+ * Forgets the numbers of a record's changes that are older than any browser sends again. One that comes
+ * later still is a change from a version long gone: a conflict, never done twice. What made a record is
+ * not forgotten: sent again it would make another.
+ */
+const forgetOld = (store: Store, { accountId, record, savedAt }: Acknowledged) =>
+  store
+    .delete(saves)
+    .where(
+      and(
+        eq(saves.accountId, accountId),
+        eq(saves.record, record),
+        gt(saves.version, 1),
+        lt(saves.savedAt, new Date(savedAt.getTime() - remembered)),
+      ),
+    );
+
 /**
  * Writes down that a save is acknowledged; false where another request just did so under the same
  * number (it waits for that one to end).
@@ -27,5 +47,6 @@ export async function acknowledge(store: Store, save: Acknowledged): Promise<boo
     .values(save)
     .onConflictDoNothing()
     .returning({ saveId: saves.saveId });
+  if (save.version > 1) await forgetOld(store, save);
   return written.length > 0;
 }

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { bodiceBlockCard, skirtBlockCard } from './block-style.ts';
 import { longestReason, measureCard, overruledWith } from './card.ts';
 import { endpoint } from './endpoint.ts';
 import { givenName, keptText } from './kept-text.ts';
@@ -14,6 +15,14 @@ export const partCard = measureCard.partial().extend({
   overruled: overruledWith(keptText(longestReason)),
 });
 
+/** The garment of what is kept, and its style card; gowns kept before there were blocks name none. */
+const ofGown = { garment: z.literal('gown').optional(), style: styleCard };
+const ofBodiceBlock = { garment: z.literal('bodice-block'), style: bodiceBlockCard };
+const ofSkirtBlock = { garment: z.literal('skirt-block'), style: skirtBlockCard };
+
+const onTable = { card: partCard, rules: houseRules };
+const drawnFrom = { card: measureCard, rules: houseRules };
+
 /**
  * What a maker has put on the table: the letters in the fields, and what they mean where they can be
  * read. It may be incomplete or impossible; it is kept all the same. While a field is `unread` nothing
@@ -22,7 +31,11 @@ export const partCard = measureCard.partial().extend({
 export const gownContent = z.strictObject({
   typed,
   unread: z.array(fieldKey).max(120),
-  inputs: z.strictObject({ card: partCard, style: styleCard, rules: houseRules }),
+  inputs: z.discriminatedUnion('garment', [
+    z.strictObject({ ...onTable, ...ofGown }),
+    z.strictObject({ ...onTable, ...ofBodiceBlock }),
+    z.strictObject({ ...onTable, ...ofSkirtBlock }),
+  ]),
 });
 export type GownContent = z.output<typeof gownContent>;
 
@@ -60,7 +73,11 @@ export const drawnPieces = z.object({
   engine: z.string(),
   /** Number printed on every piece. */
   number: z.string(),
-  inputs: z.object({ card: measureCard, style: styleCard, rules: houseRules }),
+  inputs: z.discriminatedUnion('garment', [
+    z.object({ ...drawnFrom, ...ofGown }),
+    z.object({ ...drawnFrom, ...ofBodiceBlock }),
+    z.object({ ...drawnFrom, ...ofSkirtBlock }),
+  ]),
   pieces: z.array(pieceSchema),
 });
 export type DrawnPieces = z.output<typeof drawnPieces>;
@@ -177,6 +194,15 @@ export const duplicateGown = endpoint({
 export const archiveGown = endpoint({
   method: 'POST',
   path: '/api/gowns/:gownId/archive',
+  params,
+  body: undefined,
+  reply: doneReply,
+});
+
+/** The gown for good, with its pieces, its revisions and what is shared of it. */
+export const deleteGown = endpoint({
+  method: 'POST',
+  path: '/api/gowns/:gownId/delete',
   params,
   body: undefined,
   reply: doneReply,

@@ -85,12 +85,20 @@ export const readMeasureCard = endpoint({
   reply: { kind: 'json', schema: keptCardSchema },
 });
 
-/** Saves a card; refused as `card-in-use` once it was laid on a gown. */
+/**
+ * Saves a card; refused as `card-in-use` once it was laid on a gown. `keepReplaced` puts what is
+ * overwritten into the archive as a card of its own (the maker chose hers in a conflict).
+ */
 export const saveMeasureCard = endpoint({
   method: 'POST',
   path: '/api/measure-cards/:cardId/save',
   params,
-  body: z.strictObject({ saveId, baseVersion, content: cardContent }),
+  body: z.strictObject({
+    saveId,
+    baseVersion,
+    content: cardContent,
+    keepReplaced: z.boolean().default(false),
+  }),
   reply: { kind: 'json', schema: saved },
 });
 
@@ -100,6 +108,15 @@ export const renameMeasureCard = endpoint({
   path: '/api/measure-cards/:cardId/rename',
   params,
   body: z.strictObject({ name: givenName }),
+  reply: doneReply,
+});
+
+/** The card for good; refused as `card-in-use` once it was laid on a gown. */
+export const deleteMeasureCard = endpoint({
+  method: 'POST',
+  path: '/api/measure-cards/:cardId/delete',
+  params,
+  body: undefined,
   reply: doneReply,
 });
 

@@ -92,7 +92,7 @@ afterAll(() => server.close());
 
 describe('everything with a number in its address', () => {
   it('is walked here', () => {
-    expect(withId.length).toBe(23);
+    expect(withId.length).toBe(25);
   });
 
   it.each(withId)('$method $path: nobody signed in is told nothing', async (line) => {

@@ -1,6 +1,14 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { createGown, duplicateGown, gownSchema, readGown, saveGown } from '#shared/api/gowns.ts';
+import { Client } from 'pg';
+import {
+  createGown,
+  deleteGown,
+  duplicateGown,
+  gownSchema,
+  readGown,
+  saveGown,
+} from '#shared/api/gowns.ts';
 import { signIn } from '#shared/api/accounts.ts';
 import {
   listRevisions,
@@ -26,6 +34,52 @@ beforeAll(async () => {
   maker = await openMaker(server.address);
 });
 afterAll(() => server.close());
+
+describe('numbers of saves', () => {
+  it('are forgotten after thirty days but the one that made the gown, and none is done twice', async () => {
+    const made = { saveId: randomUUID(), title: 'Old', content: content() };
+    const { id: gownId } = await maker.call(createGown, made);
+    const first = save(1, { waistGirth: 700 });
+    await maker.call(saveGown, first, { gownId });
+    const client = new Client({ connectionString: server.databaseUrl });
+    await client.connect();
+    const numbers = async () => {
+      const { rows } = await client.query<{ version: number }>(
+        'select version from saves where record = $1 order by version',
+        [gownId],
+      );
+      return rows.map(({ version }) => version);
+    };
+    const second = save(2, { waistGirth: 710 });
+    await maker.call(saveGown, second, { gownId });
+    expect(await numbers()).toEqual([1, 2, 3]);
+    await client.query("update saves set saved_at = now() - interval '31 days' where record = $1", [
+      gownId,
+    ]);
+    await maker.call(saveGown, save(3, { waistGirth: 720 }), { gownId });
+    expect(await numbers()).toEqual([1, 4]);
+    await client.end();
+    expect((await maker.call(createGown, made)).id).toBe(gownId);
+    const late = await maker.refused(409, saveGown, first, { gownId });
+    expect(late.code).toBe('conflict');
+    expect((await read(maker, { gownId })).version).toBe(4);
+  });
+});
+
+describe('a gown that is deleted', () => {
+  it('goes with its revisions, for its maker alone, and a late save finds nothing', async () => {
+    const gown = await newGown(maker);
+    const revision = { saveId: randomUUID(), baseVersion: 1, name: 'Before the fitting' };
+    const { id: revisionId } = await maker.call(nameRevision, revision, gown);
+    const stranger = await openMaker(server.address);
+    await stranger.refused(404, deleteGown, undefined, gown);
+    await maker.call(deleteGown, undefined, gown);
+    await maker.refused(404, readGown, undefined, gown);
+    await maker.refused(404, readRevision, undefined, { ...gown, revisionId });
+    await maker.refused(404, saveGown, save(1), gown);
+    await maker.refused(404, deleteGown, undefined, gown);
+  });
+});
 
 describe('two tabs or two people on one gown', () => {
   it('the later save is refused, and is told what stands there, since when and from where', async () => {

@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
   archiveMeasureCard,
+  deleteMeasureCard,
   createMeasureCard,
   duplicateMeasureCard,
   keptCardSchema,
@@ -11,6 +12,7 @@ import {
   saveMeasureCard,
   unarchiveMeasureCard,
 } from '#shared/api/measure-cards.ts';
+import { createGown, deleteGown } from '#shared/api/gowns.ts';
 import { type Browser, content, openBrowser, openMaker } from './support/maker.ts';
 import { type ServerUnderTest, startServer } from './support/server-under-test.ts';
 
@@ -68,6 +70,38 @@ describe('a measure card that cannot be kept is refused', () => {
 });
 
 describe('a measure card', () => {
+  it('that is saved over in a conflict stays findable, put away as a card of its own', async () => {
+    const card = await newCard();
+    await maker.call(saveMeasureCard, save(1, 700), card);
+    const mine = { ...save(2, 720), keepReplaced: true };
+    await maker.call(saveMeasureCard, mine, card);
+    await maker.call(saveMeasureCard, mine, card);
+    expect((await maker.call(readMeasureCard, undefined, card)).content.card.waistGirth).toBe(720);
+    const { cards } = await maker.call(listMeasureCards, undefined);
+    const kept = cards.filter(
+      ({ name }) => name === 'Judith, October, as saved from Firefox on Linux',
+    );
+    expect(kept).toMatchObject([{ archived: true, version: 1 }]);
+    const { content: before } = await maker.call(readMeasureCard, undefined, {
+      cardId: kept[0]?.id ?? '',
+    });
+    expect(before.card.waistGirth).toBe(700);
+    await maker.call(deleteMeasureCard, undefined, { cardId: kept[0]?.id ?? '' });
+  });
+
+  it('is deleted for good, unless a gown was drawn from it', async () => {
+    const card = await newCard();
+    const gown = { saveId: randomUUID(), title: 'From the card', content: content(), ...card };
+    const { id: gownId } = await maker.call(createGown, gown);
+    const { code, message } = await maker.refused(409, deleteMeasureCard, undefined, card);
+    expect(code).toBe('card-in-use');
+    expect(message).toContain('“From the card” was drawn from this card');
+    await maker.call(deleteGown, undefined, { gownId });
+    await maker.call(deleteMeasureCard, undefined, card);
+    await maker.refused(404, readMeasureCard, undefined, card);
+    await maker.refused(404, deleteMeasureCard, undefined, card);
+  });
+
   it('is kept as far as it is filled in, and counts what is taken', async () => {
     const { typed } = filled();
     const begun = { typed, card: { bustGirth: 920, neckGirth: 360 } };

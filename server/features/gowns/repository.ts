@@ -84,6 +84,12 @@ export async function replaceGown(
 export const countGowns = (store: Store, accountId: string): Promise<number> =>
   store.$count(gowns, eq(gowns.accountId, accountId));
 
+/** False where the account has no such gown; its revisions and what is shared of it go with it. */
+export async function deleteGownRow(store: Store, accountId: string, id: string): Promise<boolean> {
+  const gone = await store.delete(gowns).where(owned(accountId, id)).returning({ id: gowns.id });
+  return gone.length > 0;
+}
+
 /** False where the account has no such gown. */
 async function set(
   store: Store,

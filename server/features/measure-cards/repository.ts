@@ -71,6 +71,10 @@ export async function replaceCard(
   return row.version;
 }
 
+export async function deleteCardRow(store: Store, { accountId, id }: CardRow): Promise<void> {
+  await store.delete(measureCards).where(owned(accountId, id));
+}
+
 export const countCards = (store: Store, accountId: string): Promise<number> =>
   store.$count(measureCards, eq(measureCards.accountId, accountId));
 

@@ -2,6 +2,7 @@ import { Router } from 'express';
 import {
   archiveMeasureCard,
   createMeasureCard,
+  deleteMeasureCard,
   duplicateMeasureCard,
   giveMeasureCard,
   listMeasureCards,
@@ -44,6 +45,9 @@ export function measureCardsRouter({ database, sessions, limits }: Own): Router 
   );
   serveOwn(router, sessions, giveMeasureCard, (body, { caller, params }) =>
     service.giveCard(database, caller, params.cardId, body),
+  );
+  serveOwn(router, sessions, deleteMeasureCard, (_body, { caller, params }) =>
+    service.deleteCard(database, caller, params.cardId),
   );
   serveOwn(router, sessions, renameMeasureCard, async ({ name }, { caller, params }) =>
     doneTo('measure card', await setCardName(database, caller.accountId, params.cardId, name)),

@@ -17,8 +17,10 @@ import type { Caller } from '../../http/session.ts';
 import { RefusalError } from '../../http/refusal.ts';
 import { cardView } from './card-view.ts';
 import {
+  type CardRow,
   countCards,
   countPeople,
+  deleteCardRow,
   findCard,
   findPersonNamed,
   giveCard as give,
@@ -158,16 +160,53 @@ export async function giveCard(
   });
 }
 
-/** A card that a gown was drawn from stays what it was: measures taken anew go on the next card. */
-async function refuseUsed(turn: Store, accountId: string, id: string): Promise<void> {
+/** A card that a gown was drawn from stays; what is to be done instead stands in the refusal. */
+async function refuseUsed(
+  turn: Store,
+  accountId: string,
+  id: string,
+  instead: string,
+): Promise<void> {
   const gowns = (await listCardUses(turn, accountId)).filter(({ cardId }) => cardId === id);
   const [first] = gowns;
   if (first === undefined) return;
   const others = gowns.length > 1 ? ` and ${gowns.length - 1} more` : '';
   throw new RefusalError(
     'card-in-use',
-    `“${first.title}”${others} was drawn from this card, so its measures stay as they are. Start the next card from it and type the new ones there.`,
+    `“${first.title}”${others} was drawn from this card, ${instead}`,
   );
+}
+
+/** Deletes a card nobody drew from. */
+export async function deleteCard(
+  database: Database,
+  { accountId }: Caller,
+  id: string,
+): Promise<Record<string, never>> {
+  return database.transaction(async (turn) => {
+    const row = await holdCard(turn, accountId, id);
+    if (row === undefined) throw notFound('measure card');
+    await refuseUsed(turn, accountId, id, 'so it stays. Archive it to have it out of the way.');
+    await deleteCardRow(turn, row);
+    return {};
+  });
+}
+
+/** Measures taken anew after a gown was drawn go on another card. */
+const onTheNext =
+  'so its measures stay as they are. Start the next card from it and type the new ones there.';
+
+/** A card as it stands, put away as another one: a save is about to overwrite it. */
+async function keepReplacedCard(turn: Store, row: CardRow): Promise<void> {
+  refuseOneTooMany('measure cards', await countCards(turn, row.accountId), mostKept.measureCards);
+  await insertCard(turn, {
+    ...row,
+    id: randomUUID(),
+    version: 1,
+    name: `${row.name}, as saved from ${row.savedDevice}`.slice(0, 80),
+    startedFrom: null,
+    archivedAt: new Date(),
+  });
 }
 
 /** Saves a card as gowns are saved: in turn, once, and from the version it was made from. */
@@ -175,7 +214,7 @@ export async function saveCard(
   database: Database,
   caller: Caller,
   id: string,
-  { saveId, baseVersion, content }: Received<typeof saving>,
+  { saveId, baseVersion, content, keepReplaced }: Received<typeof saving>,
 ): Promise<Saved> {
   const { accountId } = caller;
   return database.transaction(async (turn) => {
@@ -183,10 +222,11 @@ export async function saveCard(
     if (row === undefined) throw notFound('measure card');
     const before = await acknowledgedSave(turn, accountId, saveId);
     if (before !== undefined) return savedAs(sameSave(before, id, baseVersion + 1));
-    await refuseUsed(turn, accountId, id);
+    await refuseUsed(turn, accountId, id, onTheNext);
     if (row.version !== baseVersion) {
       throw conflict(row, cardView(await ownCard(turn, accountId, id), [], caller));
     }
+    if (keepReplaced) await keepReplacedCard(turn, row);
     const takenOn = content.card.date ?? row.takenOn;
     const savedAt = new Date();
     const version = await replaceCard(turn, row, {
