@@ -1,11 +1,16 @@
-import { balanceLevels, type BalanceLevel, type HouseRules } from './house-rules.ts';
+import {
+  type AllowanceKind,
+  type BalanceLevel,
+  type HouseRules,
+  allowanceFor,
+  balanceLevels,
+} from './house-rules.ts';
 
-type Allowance = keyof HouseRules['allowance'];
 type Single =
   'cupShare' | 'sideShare' | 'dartWidest' | 'dartClearance' | 'peakOverBust' | 'shoulderDrop';
 
 /** Keys of the house rules' figures as the contract writes them. */
-export type HouseRuleKey = `balance.${BalanceLevel}` | Single | `allowance.${Allowance}`;
+export type HouseRuleKey = `balance.${BalanceLevel}` | Single | `allowance.${AllowanceKind}`;
 
 /** One figure of the house rules: its name, what it does, and its bounds (both allowed). */
 export type HouseRuleFigure = {
@@ -52,13 +57,13 @@ const single = (
   put: (rules, value) => ({ ...rules, [key]: value }),
 });
 
-const allowanceFor = (
-  kind: Allowance,
+const allowance = (
+  kind: AllowanceKind,
   figure: Pick<HouseRuleFigure, 'label' | 'hint' | 'min' | 'max'>,
 ): HouseRuleFigure => ({
   key: `allowance.${kind}`,
   ...figure,
-  value: (rules) => rules.allowance[kind],
+  value: (rules) => allowanceFor(kind, rules),
   put: (rules, value) => ({ ...rules, allowance: { ...rules.allowance, [kind]: value } }),
 });
 
@@ -103,34 +108,64 @@ export const houseRuleFigures: readonly HouseRuleFigure[] = [
     min: 90,
     max: 200,
   }),
-  allowanceFor('seam', {
+  allowance('seam', {
     label: 'Seam allowance',
     hint: 'Outside every seam that has no allowance of its own.',
     min: 6,
     max: 30,
   }),
-  allowanceFor('side', {
+  allowance('side', {
     label: 'Side seam allowance',
     hint: 'Wide enough that the gown can be let out.',
     min: 6,
     max: 50,
   }),
-  allowanceFor('zip', {
+  allowance('zip', {
     label: 'Zip allowance',
     hint: 'Where the zip is set in, never counted in a girth.',
     min: 10,
     max: 60,
   }),
-  allowanceFor('top', {
+  allowance('top', {
     label: 'Top edge allowance',
     hint: 'Enclosed by lining or facing.',
     min: 5,
     max: 20,
   }),
-  allowanceFor('hem', {
-    label: 'Hem allowance',
-    hint: 'What is turned up; a circular hem takes little.',
+  allowance('armhole', {
+    label: 'Armhole allowance',
+    hint: 'Of an armhole edge off the shoulder, enclosed like the top edge.',
+    min: 5,
+    max: 20,
+  }),
+  allowance('waist', {
+    label: 'Waist seam allowance',
+    hint: 'Of the seam between top and skirt.',
     min: 6,
-    max: 60,
+    max: 30,
+  }),
+  allowance('princess', {
+    label: 'Princess seam allowance',
+    hint: 'Wider, the bodice can be let out over the bust.',
+    min: 6,
+    max: 40,
+  }),
+  allowance('hem', {
+    label: 'Circular hem allowance',
+    hint: 'What is turned up of a hem that bends; it takes little.',
+    min: 6,
+    max: 20,
+  }),
+  allowance('straightHem', {
+    label: 'Straight hem allowance',
+    hint: 'What is turned up of a hem that hardly bends.',
+    min: 10,
+    max: 80,
+  }),
+  allowance('facing', {
+    label: 'Facing edge allowance',
+    hint: 'Beyond the free edge of a facing, neatened and not sewn down.',
+    min: 0,
+    max: 20,
   }),
 ];

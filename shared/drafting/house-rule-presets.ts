@@ -6,7 +6,18 @@ const shared = {
   dartClearance: 25,
   peakOverBust: 85,
   shoulderDrop: 127,
-  allowance: { seam: 15, side: 25, zip: 25, top: 10, hem: 10 },
+  allowance: {
+    seam: 15,
+    side: 25,
+    zip: 25,
+    top: 10,
+    hem: 10,
+    waist: 15,
+    princess: 15,
+    armhole: 10,
+    facing: 6,
+    straightHem: 40,
+  },
 } as const;
 
 /** The default: the side seam stands a little behind the plain quarter at the bust, before it at the under-bust (method section 4). */

@@ -11,8 +11,35 @@ export const balanceLevels = [
 export type BalanceLevel = (typeof balanceLevels)[number];
 
 /** What the edge of a piece becomes, which decides its allowance. */
-export const edgeKinds = ['seam', 'side', 'zip', 'top', 'hem', 'armhole', 'fold', 'mouth'] as const;
+export const edgeKinds = [
+  'seam',
+  'side',
+  'zip',
+  'top',
+  'hem',
+  'armhole',
+  'facing',
+  'fold',
+  'mouth',
+] as const;
 export type EdgeKind = (typeof edgeKinds)[number];
+
+/** The allowances every workroom has, and those it may give beside them, each with the one it else follows. */
+export const plainAllowances = ['seam', 'side', 'zip', 'top', 'hem'] as const;
+export const allowanceFollows = {
+  waist: 'seam',
+  princess: 'seam',
+  armhole: 'top',
+  facing: 'top',
+  straightHem: 'hem',
+} as const;
+type PlainAllowance = (typeof plainAllowances)[number];
+type OwnAllowance = keyof typeof allowanceFollows;
+export type AllowanceKind = PlainAllowance | OwnAllowance;
+
+/** Lines of a piece's label that a workroom may leave out; its name and what to cut stand on every piece. */
+export const labelLines = ['card', 'size', 'draft', 'lines', 'scale'] as const;
+export type LabelLine = (typeof labelLines)[number];
 
 /** How many darts or gores a half has, for each half that is not to decide by its own measures. */
 type Counts<N extends number> = { readonly front?: N; readonly back?: N };
@@ -45,19 +72,18 @@ export type HouseRules = {
   /** Intakes given outright, front and back alike: the side seam takes the rest. Absent, they are derived. */
   readonly intakes?: { readonly [P in IntakePlace]: number };
   /** Allowance beyond the seam line by kind of edge; a fold has none. */
-  readonly allowance: {
-    readonly seam: number;
-    readonly side: number;
-    readonly zip: number;
-    readonly top: number;
-    readonly hem: number;
+  readonly allowance: { readonly [K in PlainAllowance]: number } & {
+    readonly [K in OwnAllowance]?: number;
   };
+  /** What the label of a piece says; all of it where the rules say nothing. */
+  readonly label?: readonly LabelLine[];
   /** Numbers settled beforehand, as the sizes of a nest have them from the largest; absent, each draft decides. */
   readonly counts?: { readonly darts?: Counts<1 | 2>; readonly gores?: Counts<number> };
 };
 
-/** Cloth beyond the seam line by kind of edge, mm: an armhole edge is enclosed like the top edge it carries on. */
-export const allowanceFor = (
-  kind: Exclude<EdgeKind, 'fold' | 'mouth'>,
-  { allowance }: HouseRules,
-): number => allowance[kind === 'armhole' ? 'top' : kind];
+const isPlain = (kind: AllowanceKind): kind is PlainAllowance =>
+  plainAllowances.some((plain) => plain === kind);
+
+/** Cloth beyond the seam line by kind of edge, mm; an edge the rules do not name takes what it follows. */
+export const allowanceFor = (kind: AllowanceKind, { allowance }: HouseRules): number =>
+  isPlain(kind) ? allowance[kind] : (allowance[kind] ?? allowance[allowanceFollows[kind]]);

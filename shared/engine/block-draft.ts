@@ -8,7 +8,7 @@ import type { WantedGirth } from '../drafting/construction.ts';
 import { DraftingError } from '../drafting/drafting-error.ts';
 import { type DraftingTable, openTable } from '../drafting/drafting-table.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
-import type { FinishedPiece, LevelName, Piece } from '../drafting/piece.ts';
+import type { FinishedPiece, LevelName } from '../drafting/piece.ts';
 import type { Step } from '../drafting/step.ts';
 import type { DrawnBlock } from '../drafts/drawn-block.ts';
 import { gownLevels } from '../drafts/gown/levels.ts';
@@ -17,10 +17,11 @@ import type { Point } from '../geometry/point.ts';
 import { proveBlock } from '../proof/prove-block.ts';
 import type { Proof } from '../proof/proof.ts';
 import type { Problem } from '../units/problem.ts';
-import { mm, said } from '../units/said.ts';
+import { said } from '../units/said.ts';
 import { draftNumber } from './draft-number.ts';
 import { sortedJson } from './sorted-json.ts';
 import { labelFacts } from './label-facts.ts';
+import { narrateFinishing } from './narrate-finishing.ts';
 
 /** Version of the rules of the blocks: a change of any shape raises it. */
 const blockVersion = '1.0.0';
@@ -76,30 +77,6 @@ function refuse(problems: readonly Problem[]): void {
   if (errors.length > 0) throw new DraftingError(errors);
 }
 
-const allowanceWords = [
-  ['seam', 'seams'],
-  ['side', 'side seams'],
-  ['zip', 'centre back'],
-  ['top', 'neck and armhole'],
-  ['hem', 'hem'],
-] as const;
-
-function narrateFinishing(table: DraftingTable, pieces: readonly Piece[], rules: HouseRules): void {
-  const used = new Set(pieces.flatMap((piece) => piece.edges.map((edge) => edge.kind)));
-  const allowances = allowanceWords
-    .filter(([kind]) => used.has(kind))
-    .map(([kind, words]) => said`${words} ${mm(rules.allowance[kind])}`);
-  table
-    .part('Finishing', 'both')
-    .draw(
-      'Allowances',
-      said`Added outside the seam line, last of all: ${allowances.flatMap((each, k) => (k === 0 ? each : [', ', ...each]))}; a fold has none.`,
-      {
-        why: said`A block is kept as its seam line: trace that to design from it.`,
-      },
-    );
-}
-
 /**
  * Drafts a block: checks the three inputs, draws on a clean table, finishes the pieces and proves them.
  * Pure: the same inputs give the same draft, byte for byte.
@@ -120,8 +97,13 @@ export function draftBlock<Name extends BlockName, Card, Style>(
   const resolved = kind.resolve(style, body, bodyLevels, rules);
   const drawn = kind.draw(table, body, bodyLevels, resolved, rules);
   const number = draftNumber(sortedJson([garment, blockVersion, card, style, rules]));
-  narrateFinishing(table, drawn.pieces, rules);
-  const label = labelFacts(garment, card, number);
+  narrateFinishing(
+    table,
+    drawn.pieces,
+    rules,
+    said`A block is kept as its seam line: trace that to design from it.`,
+  );
+  const label = labelFacts(garment, card, number, rules);
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {
     garment,

@@ -5,8 +5,7 @@ import { withReasons } from '../body/overrule.ts';
 import { checkRules } from '../drafting/check-rules.ts';
 import type { Construction } from '../drafting/construction.ts';
 import { DraftingError } from '../drafting/drafting-error.ts';
-import { type DraftingTable, openTable } from '../drafting/drafting-table.ts';
-import type { HouseRules } from '../drafting/house-rules.ts';
+import { openTable } from '../drafting/drafting-table.ts';
 import { drawGown } from '../drafts/gown/draw-gown.ts';
 import { gownLevels } from '../drafts/gown/levels.ts';
 import { resolveStyle, withHouseDrop } from '../drafts/gown/resolve-style.ts';
@@ -15,11 +14,12 @@ import { checkStyle } from '../drafts/gown/style-check.ts';
 import { finishPiece } from '../finishing/finish-piece.ts';
 import { prove } from '../proof/prove.ts';
 import type { Problem } from '../units/problem.ts';
-import { mm, said } from '../units/said.ts';
+import { said } from '../units/said.ts';
 import type { Draft, DraftInputs } from './draft.ts';
 import { draftNumber } from './draft-number.ts';
 import { sortedJson } from './sorted-json.ts';
 import { labelFacts } from './label-facts.ts';
+import { narrateFinishing } from './narrate-finishing.ts';
 
 /** Version of the drafting rules: a saved gown keeps it, a change of any shape raises it. */
 export const engineVersion = '1.0.0';
@@ -40,18 +40,6 @@ function withDrawnSeam(body: Body, { wanted }: Construction, { waistSeam }: Gown
   return { ...body, measures: { ...body.measures, waistSeamGirth: seam } };
 }
 
-function narrateFinishing(table: DraftingTable, { allowance }: HouseRules): void {
-  table
-    .part('Finishing', 'both')
-    .draw(
-      'Allowances',
-      said`Added outside the seam line, last of all: seams ${mm(allowance.seam)}, side seams ${mm(allowance.side)}, centre back for the zip ${mm(allowance.zip)}, enclosed top edge ${mm(allowance.top)}, hem ${mm(allowance.hem)}; a fold has none.`,
-      {
-        why: said`Every girth and seam was drawn and proven on the seam line, so an allowance can never be counted twice.`,
-      },
-    );
-}
-
 /**
  * Drafts a gown: checks the three inputs, draws on a clean table, finishes the pieces and proves
  * them. Pure: the same inputs give the same draft, byte for byte.
@@ -70,8 +58,13 @@ export function draftGown(inputs: DraftInputs): Draft {
   const resolved = resolveStyle(dropped, body, levels);
   const drawn = drawGown(table, body, levels, resolved, rules);
   const number = draftNumber(sortedJson([engineVersion, card, style, rules]));
-  narrateFinishing(table, rules);
-  const label = labelFacts('gown', card, number);
+  narrateFinishing(
+    table,
+    drawn.pieces,
+    rules,
+    said`Every girth and seam was drawn and proven on the seam line, so an allowance can never be counted twice.`,
+  );
+  const label = labelFacts('gown', card, number, rules);
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {
     garment: 'gown',

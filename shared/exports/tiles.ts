@@ -37,7 +37,11 @@ function pagesOf(draft: Drafted, sheets: SheetPlan, unit: Unit): PrintJob {
   const drawn = drawnPieces(draft.pieces, order);
   const byName = new Map(drawn.map((each) => [each.drawing, each]));
   const titles = new Map(drawn.map(({ drawing, piece }) => [drawing, piece.title]));
-  const labels = placedLabels(sheets, byName, labelFacts(draft.garment, card, draft.number));
+  const labels = placedLabels(
+    sheets,
+    byName,
+    labelFacts(draft.garment, card, draft.number, draft.inputs.rules),
+  );
   const coverOn = (page: Parameters<typeof coverMarks>[4]) =>
     coverMarks(draft, sheets, drawn, unit, page);
   const among: readonly Drawing[] =

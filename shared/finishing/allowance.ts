@@ -1,13 +1,13 @@
-import { type EdgeKind, type HouseRules, allowanceFor } from '../drafting/house-rules.ts';
+import { edgeAllowance } from '../drafting/edge-allowance.ts';
+import type { HouseRules } from '../drafting/house-rules.ts';
 import type { Edge } from '../drafting/piece.ts';
 
 /**
  * Cloth beyond the seam line of an edge, mm: none at a fold. The mouth of a dart has none of its
  * own: its cap follows the edges beside it (`dart-cap.ts`).
  */
-export function allowanceOf(kind: EdgeKind, rules: HouseRules): number {
-  return kind === 'fold' || kind === 'mouth' ? 0 : allowanceFor(kind, rules);
-}
+export const allowanceOf = (edge: Edge, rules: HouseRules): number =>
+  edgeAllowance(edge, rules) ?? 0;
 
 /** First words of the names of seams that run round the body and are sewn after the long ones. */
 const roundTheBody = /^(waist|knee|hem|top|neck)\b/;

@@ -137,7 +137,7 @@ function closed(parts: readonly Path[]): Path {
  */
 export function cutLine(piece: Piece, rules: HouseRules): Path {
   const count = piece.edges.length;
-  const own = piece.edges.map((edge) => allowanceOf(edge.kind, rules));
+  const own = piece.edges.map((edge) => allowanceOf(edge, rules));
   const reach = piece.edges.map((edge, index) =>
     edge.kind === 'mouth'
       ? Math.max(own[(index + count - 1) % count] ?? 0, own[(index + 1) % count] ?? 0)

@@ -1,3 +1,4 @@
+import type { LabelLine } from '../drafting/house-rules.ts';
 import type { Lettering, Piece } from '../drafting/piece.ts';
 import { type FreePlace, type PaperSeams, freePlace, freeRows } from './free-run.ts';
 
@@ -10,6 +11,10 @@ export type LabelFacts = {
   readonly draftNumber: string;
   /** What it is cut from: `cloth`, `lining`. */
   readonly cloth: string;
+  /** The size it is cut in: `made to measure`, or the size of a nest. */
+  readonly size?: string;
+  /** Lines the house wants beside name and cut; all of them where it says nothing. */
+  readonly says?: readonly LabelLine[];
 };
 
 /** How a label is printed, where it is not the plain one at true scale. */
@@ -23,7 +28,14 @@ export type LabelPrint = {
 };
 
 /** What the lines of a piece mean, and how it is printed. */
-const plainNotes = ['seam line dashed · cut on the solid line', 'print at 100 %'] as const;
+const plainNotes = { lines: 'seam line dashed · cut on the solid line', scale: 'print at 100 %' };
+
+const wants = ({ says }: LabelFacts, line: LabelLine): boolean => says?.includes(line) ?? true;
+
+const notesFor = (facts: LabelFacts): readonly string[] =>
+  (['lines', 'scale'] as const)
+    .filter((line) => wants(facts, line))
+    .map((line) => plainNotes[line]);
 
 type Line = { readonly text: string; readonly size: number };
 
@@ -131,6 +143,9 @@ function wrapped({ text, size }: Line, width: number): readonly Line[] {
     .map((part) => ({ text: fitted(part, size, width), size }));
 }
 
+/** What a piece is cut from: the gown's own cloth, unless it says another. */
+const clothOf = ({ cloth }: Piece, facts: LabelFacts): string => cloth ?? plain(facts.cloth);
+
 function label(
   piece: Piece,
   facts: LabelFacts,
@@ -142,13 +157,15 @@ function label(
     .map((each) => shortened(plain(each ?? ''), longestName))
     .filter((each) => each !== '')
     .join(' · ');
+  const size = wants(facts, 'size') && facts.size !== undefined ? [plain(facts.size)] : [];
+  const number = wants(facts, 'draft') ? [`draft ${facts.draftNumber}`] : [];
   const said = notes.map((text) => ({ text, size: sizes.note }));
   const lines: readonly Line[] = [
     { text: piece.title, size: sizes.title },
     ...(small ? said : []),
     { text: piece.cut, size: sizes.text },
-    { text: card, size: sizes.text },
-    { text: `draft ${facts.draftNumber} · ${plain(facts.cloth)}`, size: sizes.note },
+    { text: wants(facts, 'card') ? card : '', size: sizes.text },
+    { text: [...size, ...number, clothOf(piece, facts)].join(' · '), size: sizes.note },
     ...(small ? [] : said),
   ];
   return lines.filter((line) => line.text !== '').flatMap((line) => wrapped(line, sizes.width));
@@ -172,7 +189,7 @@ function set(lines: readonly Line[], place: FreePlace, width: number): readonly 
 export function lettering(
   piece: Piece,
   facts: LabelFacts,
-  { seams, notes = plainNotes, scale = 1 }: LabelPrint = {},
+  { seams, notes = notesFor(facts), scale = 1 }: LabelPrint = {},
 ): readonly Lettering[] {
   const free = freeRows(piece, seams, scale);
   let lines: readonly Line[] = [];

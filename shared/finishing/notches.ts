@@ -57,7 +57,7 @@ function plainReach(notch: Notch, edge: Edge | undefined, rules: HouseRules): nu
   const [start, end] = [edge?.path[0]?.from, edge?.path.at(-1)?.to];
   if (!edge || !start || !end || edge.kind === 'mouth') return undefined;
   const nearer = Math.min(distance(notch.at, start), distance(notch.at, end));
-  return nearer > clearOfCorners ? allowanceOf(edge.kind, rules) : undefined;
+  return nearer > clearOfCorners ? allowanceOf(edge, rules) : undefined;
 }
 
 /**

@@ -1,5 +1,6 @@
 import type { Edge, FinishedPiece } from '../drafting/piece.ts';
-import { type HouseRules, allowanceFor } from '../drafting/house-rules.ts';
+import { edgeAllowance } from '../drafting/edge-allowance.ts';
+import type { HouseRules } from '../drafting/house-rules.ts';
 import { endOf, endTangent, pointAt, startOf, startTangent, tangentAt } from '../geometry/curve.ts';
 import {
   type Point,
@@ -25,10 +26,8 @@ const lookOut = {
 export const clearBound = 0.2;
 
 /** What the house rules ask beyond an edge; a fold is cut on the line, a mouth follows its cap. */
-export const allowanceOf = (edge: Edge, rules: HouseRules): number | undefined => {
-  if (edge.kind === 'mouth' || edge.open === true) return undefined;
-  return edge.kind === 'fold' ? 0 : allowanceFor(edge.kind, rules);
-};
+export const allowanceOf = (edge: Edge, rules: HouseRules): number | undefined =>
+  edge.kind === 'fold' ? 0 : edgeAllowance(edge, rules);
 
 /** Where the cutting line stands off an edge least rightly: measured square to the seam line. */
 export type Clearance = {

@@ -94,7 +94,7 @@ function expectCuttable(piece: Piece): void {
   expect(clockwiseArea(chain)).toBeGreaterThan(0);
   const own = piece.edges.filter((edge) => edge.kind !== 'mouth');
   for (const edge of own) {
-    const wanted = allowanceOf(edge.kind, sampleRules);
+    const wanted = allowanceOf(edge, sampleRules);
     const seam = finely(edge.path);
     const beside = chain.map((place) => nearest(seam, place)).filter(({ inside }) => inside);
     const closest = Math.min(...beside.map(({ away }) => away));

@@ -1,0 +1,31 @@
+import { pathLength } from '../geometry/curve.ts';
+import type { Path } from '../geometry/path.ts';
+import { turnsAlong } from '../geometry/turns.ts';
+import { type AllowanceKind, type HouseRules, allowanceFor } from './house-rules.ts';
+import type { Edge } from './piece.ts';
+
+/**
+ * A hem that bends no more tightly than this is turned up like a straight one: its edge is then at most
+ * three hundredths longer than where it is sewn, which can be eased in (common practice, no source).
+ */
+const straightFrom = 1330;
+
+function bendsLittle(path: Path): boolean {
+  const turned = turnsAlong(path).reduce((sum, { degrees }) => sum + Math.abs(degrees), 0);
+  return pathLength(path) >= (straightFrom * turned * Math.PI) / 180;
+}
+
+/** Which of the house's allowances an edge takes; none at a fold or across the mouth of a dart. */
+export function allowanceKind({ kind, name, path, open }: Edge): AllowanceKind | undefined {
+  if (kind === 'fold' || kind === 'mouth' || open === true) return undefined;
+  if (kind === 'hem') return bendsLittle(path) ? 'straightHem' : 'hem';
+  if (kind !== 'seam') return kind;
+  if (/^waist\b/.test(name)) return 'waist';
+  return /princess/.test(name) ? 'princess' : 'seam';
+}
+
+/** Cloth beyond the seam line of an edge by the house's rules, mm; no answer where it has none of its own. */
+export function edgeAllowance(edge: Edge, rules: HouseRules): number | undefined {
+  const kind = allowanceKind(edge);
+  return kind === undefined ? undefined : allowanceFor(kind, rules);
+}
