@@ -42,7 +42,9 @@ for (const width of [390, 1280]) {
       await table.printButton('Chalk sheet').click();
       expect(await pagesOf(await chalk)).toBe(1);
 
-      await expect(table.printRow('Bodice toile')).toContainText(/\d sheet/);
+      await expect(table.printRow('Bodice toile')).toContainText(/\d sheet/, {
+        timeout: 45_000,
+      });
       const sheets = sheetsIn(await table.printRow('Bodice toile').textContent());
       const toile = page.waitForEvent('download');
       await table.printButton('Bodice toile').click();

@@ -5,7 +5,10 @@ import { readFile } from 'node:fs/promises';
 import { walkTo } from '../fixtures/keyboard.ts';
 import { expect, test } from '../fixtures/maker.ts';
 import { pagesOf } from '../fixtures/pdf.ts';
-import { printRoom } from '../screens/print-room.ts';
+import { patience, printRoom } from '../screens/print-room.ts';
+
+// A plan is a second of work; where many browsers share a small machine it waits for its turn.
+test.describe.configure({ timeout: 4 * patience });
 
 const faults = async (page: Page) => (await new AxeBuilder({ page }).analyze()).violations;
 
@@ -29,14 +32,14 @@ for (const width of [390, 1280]) {
       const room = printRoom(page);
       await drawnTable.print.click();
       await drawnTable.dialog.getByRole('link', { name: 'Print room' }).click();
-      await expect(room.heading).toBeVisible();
-      await expect(room.count).toBeVisible();
+      await room.heading.waitFor();
+      await room.arranged();
       const sheets = await room.sheets();
       expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(sheets);
       await expect(page.getByText(/saved as .*whole-gown-a4\.pdf/)).toBeVisible();
 
       await room.paper.selectOption('A3');
-      await expect(room.count).toContainText('of A3');
+      await expect(room.count).toContainText('of A3', { timeout: patience });
       expect(await room.sheets()).toBeLessThan(sheets);
       expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(
         await room.sheets(),
@@ -47,16 +50,16 @@ for (const width of [390, 1280]) {
       await expect(drawnTable.drawing).toBeVisible();
       await page.goto('/try/print');
       const room = printRoom(page);
-      await expect(room.count).toBeVisible();
+      await room.arranged();
       const sheets = await room.sheets();
       await room.sheet('A1').click();
       await room.sheet('A2').click();
-      await expect(room.count).toContainText(`${sheets - 2} sheets`);
+      await expect(room.count).toContainText(`${sheets - 2} sheets`, { timeout: patience });
       await expect(page.getByText('2 left out')).toBeVisible();
       await room.sheet('A2').click();
       expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(sheets - 1);
       await room.paper.selectOption('Letter');
-      await expect(room.count).toContainText('of Letter');
+      await expect(room.count).toContainText('of Letter', { timeout: patience });
       await expect(page.getByText('left out', { exact: false }).first()).toBeHidden();
     });
 
@@ -67,17 +70,17 @@ for (const width of [390, 1280]) {
       await expect(drawnTable.drawing).toBeVisible();
       await page.goto('/try/print');
       const room = printRoom(page);
-      await expect(room.count).toBeVisible();
+      await room.arranged();
       const all = await room.sheets();
       await room.showCard('Pieces');
       await page.getByRole('button', { name: 'Bodice only' }).click();
       await expect(room.piece('Front skirt')).not.toBeChecked();
-      await expect.poll(() => room.sheets()).toBeLessThan(all);
+      await expect.poll(() => room.sheets(), { timeout: patience }).toBeLessThan(all);
       const toile = await room.sheets();
       await page.getByLabel('Copies of Front top, side panel').selectOption('6');
-      await expect.poll(() => room.sheets()).toBeGreaterThan(toile);
+      await expect.poll(() => room.sheets(), { timeout: patience }).toBeGreaterThan(toile);
       await page.getByLabel('How Front top, centre panel is drawn').selectOption('opened out');
-      await expect(room.count).toBeVisible();
+      await room.arranged();
       expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(
         await room.sheets(),
       );
@@ -96,7 +99,7 @@ for (const width of [390, 1280]) {
       await expect(drawnTable.drawing).toBeVisible();
       await page.goto('/try/print');
       const room = printRoom(page);
-      await expect(room.count).toBeVisible();
+      await room.arranged();
       await room.field('margin').fill('9');
       await room.field('margin').blur();
       await expect(page.getByText('must lie between 0.5 cm and 1.5 cm')).toBeVisible();
@@ -113,7 +116,7 @@ for (const width of [390, 1280]) {
       await room.field('width').fill('12 in');
       await room.field('height').fill('18 in');
       await room.field('height').blur();
-      await expect(room.count).toContainText('custom');
+      await expect(room.count).toContainText('custom', { timeout: patience });
 
       await page.route('**/api/prints/sheets', (route) => route.abort());
       await room.makePdf.click();
@@ -127,7 +130,7 @@ for (const width of [390, 1280]) {
       await page.reload();
       await expect(room.field('margin')).toHaveValue('1⁄2');
       await expect(room.field('height')).toHaveValue('18');
-      await expect(room.count).toContainText('custom');
+      await expect(room.count).toContainText('custom', { timeout: patience });
     });
 
     test('what the printed square measures tells what went wrong, in either unit', async ({
@@ -175,7 +178,7 @@ for (const width of [390, 1280]) {
       await expect(room.count).toBeHidden();
       await page.unroute('**/plan-worker*');
       await page.getByRole('button', { name: 'Arrange again' }).click();
-      await expect(room.count).toBeVisible();
+      await room.arranged();
 
       await page.route('**/api/prints/sheets', async (route) => {
         await new Promise((later) => setTimeout(later, 3000));
@@ -198,7 +201,7 @@ for (const width of [390, 1280]) {
       await expect(drawnTable.drawing).toBeVisible();
       await page.goto('/try/print');
       const room = printRoom(page);
-      await expect(room.count).toBeVisible();
+      await room.arranged();
       const sheets = await room.sheets();
       await expect(room.plan.getByRole('checkbox')).toHaveCount(sheets - 1);
       const sizes = await room.plan
@@ -221,16 +224,16 @@ test('the same by keyboard alone: paper, a sheet left out, the PDF', async ({
   await expect(drawnTable.drawing).toBeVisible();
   await page.goto('/try/print');
   const room = printRoom(page);
-  await expect(room.count).toBeVisible();
+  await room.arranged();
   await walkTo(page, room.paper);
   await page.keyboard.press('L');
-  await expect(room.count).toContainText('of Le');
+  await expect(room.count).toContainText('of Le', { timeout: patience });
   const sheets = await room.sheets();
   await walkTo(page, room.sheet('A1'));
   await page.keyboard.press('ArrowRight');
   await expect(room.sheet('A2')).toBeFocused();
   await page.keyboard.press('Space');
-  await expect(room.count).toContainText(`${sheets - 1} sheets`);
+  await expect(room.count).toContainText(`${sheets - 1} sheets`, { timeout: patience });
   await walkTo(page, room.makePdf, 'Shift+Tab');
   expect(await pagesOf(await downloaded(page, () => page.keyboard.press('Enter')))).toBe(
     sheets - 1,
@@ -246,7 +249,7 @@ test('a kept gown is printed with what has just been changed on its table', asyn
   await page.getByRole('navigation', { name: 'Places' }).getByText('Print room').click();
   const room = printRoom(page);
   await expect(page).toHaveURL(new RegExp(`/gowns/${maker.gownId}/print$`));
-  await expect(room.count).toBeVisible();
+  await room.arranged();
   const shorter = await room.sheets();
   const asked = page.waitForRequest('**/api/prints/sheets');
   expect(await pagesOf(await downloaded(page, () => room.makePdf.click()))).toBe(shorter);
@@ -274,7 +277,7 @@ for (const colorScheme of ['light', 'dark'] as const) {
         await expect(drawnTable.drawing).toBeVisible();
         await page.goto('/try/print');
         const room = printRoom(page);
-        await expect(room.count).toBeVisible();
+        await room.arranged();
         await room.sheet('A1').click();
         expect(await faults(page)).toEqual([]);
         for (const tab of await page.getByRole('tab').all()) {

@@ -1,15 +1,21 @@
 import type { Locator, Page } from '@playwright/test';
 
+/** How long a plan may take where many browsers share a small machine, ms. */
+export const patience = 90_000;
+
 export type PrintRoomScreen = ReturnType<typeof printRoom>;
 
 /** Where things are in the print room. */
 export function printRoom(page: Page) {
+  const heading = page.getByRole('heading', { level: 1, name: 'Print room' });
   const count = page.getByText(/^\d+ sheets? of /);
   return {
     page,
-    heading: page.getByRole('heading', { level: 1, name: 'Print room' }),
+    heading,
     /** The plan in words, shown once it is arranged. */
     count,
+    /** Waits until the pieces are arranged: a second of work, on a busy machine many. */
+    arranged: () => count.waitFor({ timeout: patience }),
     sheets: async (): Promise<number> => Number(/\d+/.exec((await count.textContent()) ?? '')?.[0]),
     plan: page.getByRole('group', { name: 'Page plan' }),
     sheet: (name: string): Locator => page.getByRole('checkbox', { name: `Sheet ${name}` }),
@@ -21,6 +27,7 @@ export function printRoom(page: Page) {
     piece: (title: string): Locator => page.getByRole('checkbox', { name: title }),
     /** On a phone the cards lie behind tabs. */
     showCard: async (name: 'Paper' | 'Pieces' | 'Lines' | 'Scale') => {
+      await heading.waitFor();
       const tab = page.getByRole('tab', { name });
       if ((await tab.count()) > 0) await tab.click();
     },
