@@ -42,16 +42,16 @@ function column(pieces: readonly Boxed[], side: Side, left: number, lift: number
   });
 }
 
-/** Flares in columns as high as the rest of the gown, or as the highest flare. */
-function flareColumns(
-  flares: readonly Boxed[],
+/** What belongs to no half in columns as high as the rest of the gown, or as the highest of them. */
+function columnsBeside(
+  others: readonly Boxed[],
   left: number,
   top: number,
   height: number,
 ): SpreadPiece[] {
-  const high = Math.max(height, ...flares.map(({ box }) => box.height));
+  const high = Math.max(height, ...others.map(({ box }) => box.height));
   let [x, y, right] = [left, top, left];
-  return flares.map((each) => {
+  return others.map((each) => {
     if (y > top && y + each.box.height > top + high) [x, y] = [right + gap, top];
     const translate = point(x - each.box.x, y - each.box.y);
     y += each.box.height + gap;
@@ -74,7 +74,7 @@ function round(placed: readonly SpreadPiece[], boxes: ReadonlyMap<FinishedPiece,
 
 /**
  * How the pieces of a draft lie beside each other on the drafting table and in the SVG: front, back,
- * then flares; tops lifted off their middles, every level at one height across front and back. The
+ * then flares, bands and what lies inside; tops lifted off their middles, every level at one height across front and back. The
  * same pieces always lie the same way.
  */
 export function spread(pieces: readonly FinishedPiece[]): Spread {
@@ -82,7 +82,9 @@ export function spread(pieces: readonly FinishedPiece[]): Spread {
   const boxes = new Map(boxed.map(({ piece, box }) => [piece, box]));
   const tops = boxed.filter(({ piece }) => piece.part === 'top');
   const middles = boxed.filter(({ piece }) => piece.part === 'middle');
-  const flares = boxed.filter(({ piece }) => piece.part === 'flare');
+  const others = (['flare', 'sleeve', 'inner'] as const).flatMap((part) =>
+    boxed.filter(({ piece }) => piece.part === part),
+  );
   const overlap =
     tops.length > 0 && middles.length > 0
       ? Math.max(...tops.map(footOf)) - Math.min(...middles.map(({ box }) => box.y)) + gap
@@ -95,7 +97,7 @@ export function spread(pieces: readonly FinishedPiece[]): Spread {
   }
   const bodies = round(placed, boxes);
   const left = placed.length > 0 ? rightEdge(bodies) + gap : 0;
-  placed.push(...flareColumns(flares, left, bodies.y, bodies.height));
+  placed.push(...columnsBeside(others, left, bodies.y, bodies.height));
   const all = round(placed, boxes);
   return {
     placed: placed.map(({ piece, translate }) => ({

@@ -20,16 +20,18 @@ const sideNames = /^side(-|$)/;
 const princessNames = /^(back-)?princess(-|$)/;
 
 /**
- * How often an edge may change its bend (house table, method section 8): a side seam as the girths ask; a
- * princess seam out over the bust and in below it, and where it runs on to the knee it follows the waist
- * and the hip as a side seam does, and to the hem it turns out once more; a lacing closes in one S; a hem
- * bends once.
+ * How often an edge may change its bend (house table, method section 8): a side seam as the girths ask, and
+ * where it runs on to the hem it turns out once more; a princess seam out over the bust and in below it, and
+ * where it runs on to the knee it follows the waist and the hip as a side seam does; a lacing closes in one S;
+ * a hem bends once, and once more where it runs into a train between two seams that turn outwards; an
+ * armhole may level out before it meets the side.
  */
 function mostChanges(piece: Piece, edge: Edge, ofSides: number): number {
-  if (sideNames.test(edge.name)) return ofSides;
+  if (sideNames.test(edge.name)) return runsToTheHem(piece) ? ofSides + 1 : ofSides;
   if (princessNames.test(edge.name)) return !runsToTheKnee(piece) ? 2 : runsToTheHem(piece) ? 5 : 4;
   if (edge.name === 'lacing') return 1;
-  return edge.kind === 'hem' || edge.kind === 'top' ? 1 : 0;
+  if (edge.kind === 'hem') return piece.edges.some(({ name }) => princessNames.test(name)) ? 2 : 1;
+  return edge.kind === 'top' || edge.kind === 'armhole' ? 1 : 0;
 }
 
 const runsToTheKnee = (piece: Piece): boolean =>
@@ -86,7 +88,7 @@ function runsOf(pieces: readonly Piece[], ofSides: number): readonly Run[] {
     const half = piece.side === 'front' ? 'Front' : 'Back';
     runs.push({
       title: below ? `${half}, side seam` : title(piece, edge),
-      most: mostChanges(piece, edge, ofSides),
+      most: mostChanges(below?.piece ?? piece, edge, ofSides),
       edges,
     });
   }

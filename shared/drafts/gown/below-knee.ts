@@ -1,12 +1,20 @@
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
+import { leastSaid } from '../../drafting/quantity.ts';
 import type { Piece, Side } from '../../drafting/piece.ts';
 import { pathLength } from '../../geometry/curve.ts';
 import { deg, mm, said } from '../../units/said.ts';
 import { flarePieces } from './flare.ts';
-import { flareHem, flareRadius, partOfCircle, planFlare } from './flare-plan.ts';
+import { flareHem, flareRadius, hemPath, partOfCircle, planFlare } from './flare-plan.ts';
 import { godetPieces, narrateGodets } from './godet-pieces.ts';
-import { type GodetPlan, godetAngle, godetCount, godetFoot, godetPlaces } from './godets.ts';
+import {
+  type GodetPlan,
+  godetAngle,
+  godetCount,
+  godetFoot,
+  godetPlaces,
+  sumOfRadii,
+} from './godets.ts';
 import { integralFoot, planIntegral } from './integral.ts';
 import { kneeStretches } from './knee-stretches.ts';
 import { type FootOf, type PanelFoot, kneeFoot } from './skirt-foot.ts';
@@ -19,8 +27,8 @@ export type BelowKnee = {
   readonly footOf: FootOf;
   /** Draws the pieces of one side that are sewn on below. */
   readonly pieces: (side: Side) => readonly Piece[];
-  /** Girth of the level hem all round that was asked for, mm, the train left out. */
-  readonly sweep: number;
+  /** Length of the hem all round, mm: what was asked for, and what a train adds to it. */
+  readonly hem: number;
 };
 
 /** What it is drawn from. */
@@ -82,8 +90,10 @@ function sectors(paper: PartTable, { style, rules, panels }: BelowKneeInputs): B
     back: kneeStretches(plans.back, panels.back),
   };
   const sweep = flareHem(knee, fraction, depth);
+  const trained = pathLength(hemPath(plans.back, 0, plans.back.angle, 0));
+  const hem = sweep + (train === 0 ? 0 : 2 * (trained - plans.back.outer * plans.back.angle));
   return {
-    sweep,
+    hem,
     footOf: feetOf(panels, (panel) => kneeFoot(panel, stretches[panel.side])),
     pieces: (side) => {
       if (side === 'front') {
@@ -96,7 +106,7 @@ function sectors(paper: PartTable, { style, rules, panels }: BelowKneeInputs): B
             why: said`The seam line keeps this radius; allowances are added outside it. Let the flare hang a day or two before the hem is levelled from the floor, for its bias drops.`,
           },
         );
-        narrateTrain(paper, style);
+        narrateTrain(paper, style, hem);
       }
       const other = side === 'front' ? 'back' : 'front';
       return flarePieces(paper, side, plans[side], plans[other].gores, stretches[side]);
@@ -107,16 +117,23 @@ function sectors(paper: PartTable, { style, rules, panels }: BelowKneeInputs): B
 /** How full a hem is, to a tenth. */
 const fullness = (sweep: number, knee: number): string => (sweep / knee).toFixed(1);
 
-function narrateTrain(paper: PartTable, { train }: GownStyle): void {
-  if (train === 0) return;
+function narrateTrain(paper: PartTable, { train }: GownStyle, hem: number): void {
+  if (train < leastSaid) return;
   paper.draw(
     'Train',
-    said`The hem at the centre back is ${mm(train)} longer than the level hem, growing from nothing at the side seams; the front stays level.`,
+    said`The hem at the centre back is ${mm(train)} longer than the level hem, growing from nothing at the side seams; the front stays level. With it the hem is ${mm(hem)} all round.`,
     {
       why: said`A train catches on stairs, doors and other people's feet: sew a wrist loop, or a button and loop that hold it up, and have her walk with both before the day.`,
     },
   );
 }
+
+/** Length of the hems of all panels all round. */
+const hemOf = ({ front, back }: BelowKneeInputs['panels'], footOf: FootOf): number =>
+  2 *
+  [...front, ...back]
+    .flatMap(({ piece }) => footOf(piece).edges.filter(({ kind }) => kind === 'hem'))
+    .reduce((sum, { path }) => sum + pathLength(path), 0);
 
 /** No seam at the knee: the skirt runs on upright, with sectors set into its seams. */
 function godets(paper: PartTable, { style, rules, panels }: BelowKneeInputs): BelowKnee {
@@ -131,13 +148,15 @@ function godets(paper: PartTable, { style, rules, panels }: BelowKneeInputs): Be
     panels: [...panels.front, ...panels.back],
   };
   const drawn = godetPieces(plan);
+  const footOf = feetOf(panels, (panel) => godetFoot(plan, panel));
+  const hem = train === 0 ? sweep : hemOf(panels, footOf) + plan.angle * sumOfRadii(plan);
   return {
-    sweep,
-    footOf: feetOf(panels, (panel) => godetFoot(plan, panel)),
+    hem,
+    footOf,
     pieces: (side) => {
       if (side === 'back') {
         narrateGodets(paper, plan, sweep - knee, drawn);
-        narrateTrain(paper, style);
+        narrateTrain(paper, style, hem);
       }
       return drawn.filter((piece) => piece.side === side);
     },
@@ -150,8 +169,9 @@ function integral(paper: PartTable, { style, panels }: BelowKneeInputs): BelowKn
   const both = [...panels.front, ...panels.back];
   const plan = planIntegral(both, { depth, train, hemSweep: sweep });
   const footOf = feetOf(panels, (panel) => integralFoot(plan, panel));
+  const hem = train === 0 ? sweep : hemOf(panels, footOf);
   return {
-    sweep,
+    hem,
     footOf,
     pieces: (side) => {
       if (side === 'back') {
@@ -161,12 +181,12 @@ function integral(paper: PartTable, { style, panels }: BelowKneeInputs): BelowKn
         const raised = first && end ? first.knee + depth - end.y : 0;
         paper.draw(
           'Seams run on',
-          said`Below the knee line every seam but the centre front turns outwards, upright at first, then straight, ${deg((Math.atan(plan.lean) * 180) / Math.PI)} off upright, until the hem is ${mm(sweep)} all round, ${fullness(sweep, knee)} times the knee. Each is ${mm(pathLength(run))} long below the knee, as long as the skirt is deep there, so its end lies ${mm(raised)} higher than the level middle of the hem; the hem curves up to meet it squarely.`,
+          said`Below the knee line every seam but the centre front turns outwards, upright at first, then straight, ${deg((Math.atan(plan.lean) * 180) / Math.PI)} off upright, until the hem is ${mm(sweep)} all round, ${fullness(sweep, knee)} times the knee. Each is ${mm(pathLength(run))} long below the knee, as long as the skirt is deep there, ${raised < leastSaid ? said`so its end lies as low as the middle of the hem, which it meets squarely` : said`so its end lies ${mm(raised)} higher than the level middle of the hem; the hem curves up to meet it squarely`}.`,
           {
             why: said`A slanting seam is longer than an upright one of the same height: cut to one length, all of them end the same way over the floor.`,
           },
         );
-        narrateTrain(paper, style);
+        narrateTrain(paper, style, hem);
       }
       return [];
     },

@@ -1,9 +1,12 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
+import { measureGuide } from '../../body/measure-guide.ts';
 import type { Construction, Handle, TopOpening, WantedGirth } from '../../drafting/construction.ts';
 import type { DraftingTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
+import { type Quantity, taken } from '../../drafting/quantity.ts';
 import type { LevelName, Piece, Side } from '../../drafting/piece.ts';
+import { pathLength } from '../../geometry/curve.ts';
 import { xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
 import { type BelowKnee, belowKnee } from './below-knee.ts';
@@ -17,7 +20,8 @@ import { type PairInputs, type PairedHalves, pairHalves } from './pair-halves.ts
 import { finishedQuarters, wantedGirths } from './quarters.ts';
 import type { SideHeights } from './side-line.ts';
 import { skirtPanels } from './skirt-panel.ts';
-import type { GownStyle } from './style-card.ts';
+import { type TopEdges, setInBands } from './sleeve.ts';
+import { type GownStyle, isOffShoulder } from './style-card.ts';
 import { seamUnderBust } from './style-limits.ts';
 import { topPartner } from './top.ts';
 import { type Walking, walking } from './walking.ts';
@@ -42,9 +46,10 @@ function waistSeamLevel(table: DraftingTable, levels: BodyLevels, style: GownSty
     ? paper.level('Waist seam', said`Raised ${mm(style.waistSeamRise)} above the waist`, raised, [])
     : paper.level(
         'Waist seam',
-        said`${mm(seamUnderBust)} under the under-bust, as high as a seam may lie: ${mm(levels.waist - highest)} above the waist`,
+        said`${mm(seamUnderBust)} under the under-bust, as high as a seam may lie, which is ${mm(levels.waist - highest)} above the waist`,
         highest,
-        ['sideNeckToUnderbust', 'frontWaistLength'],
+        [],
+        ['sideNeckToUnderbust'],
       );
 }
 
@@ -61,7 +66,7 @@ export function drawGown(
     .part('Levels', 'both')
     .level(
       'Knee seam',
-      style.kneeLevel === 0 ? said`At the knee` : said`${mm(style.kneeLevel)} above the knee`,
+      style.kneeLevel < 0.5 ? said`At the knee` : said`${mm(style.kneeLevel)} above the knee`,
       bodyLevels.knee - style.kneeLevel,
       [],
       ['waistToKnee'],
@@ -71,10 +76,10 @@ export function drawGown(
     front: finishedQuarters('front', body, style, rules, bodyLevels, seam),
     back: finishedQuarters('back', body, style, rules, bodyLevels, seam),
   };
-  const acrossOf = halfAcross(body, rules);
+  const across = acrossWhereItEnds(body, rules);
   const pair = pairOpened(
     { quarters, levels, style, rules, frontAxis: bodyLevels.bustPointX },
-    acrossOf.back,
+    across.back.value / 2,
   );
   const { front, back } = pair;
   const panels = {
@@ -82,9 +87,8 @@ export function drawGown(
     back: skirtPanels('back', style, kneeOf(back)),
   };
   const below = belowKnee(table, { style, rules, panels });
-  const sides = (['front', 'back'] as const).map((side) =>
-    drawSide(table, side, { pair, quarters, below, style, rules, acrossOf }),
-  );
+  const shared: Shared = { pair, quarters, below, style, rules, across };
+  const sides = [drawSide(table, 'front', shared), drawSide(table, 'back', shared)] as const;
   warnOfShift(table, pair);
   const wanted = [
     ...wantedGirths(
@@ -94,12 +98,13 @@ export function drawGown(
       seam,
       2 * (quarters.front.seam.value + quarters.back.seam.value),
     ),
-    // With a train the hem is longer than the level one that was asked for.
-    ...(style.train === 0
-      ? [{ level: 'hem', wanted: below.sweep, estimated: false } as const]
-      : []),
+    { level: 'hem', wanted: below.hem, estimated: false } as const,
   ];
-  const pieces = sides.flatMap((each) => [...each.pieces, ...below.pieces(each.side)]);
+  const sewn = sides.flatMap((each) => [...each.pieces, ...below.pieces(each.side)]);
+  const [{ edges: frontEdges }, { edges: backEdges }] = sides;
+  const pieces = isOffShoulder(style)
+    ? setInBands(table, body, style, { front: frontEdges, back: backEdges }, sewn)
+    : sewn;
   const closed = closeGown(table, pieces, { body, levels: bodyLevels, pair, style });
   const walked = walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style.kneeFinished);
   return {
@@ -157,13 +162,16 @@ function withChestLeft(
   });
 }
 
-/** Half the width of the body where a gown off the shoulder ends, front and back. */
-type Across = { readonly front: number; readonly back: number };
+/** The width of the body where a gown off the shoulder ends, front and back. */
+type Across = { readonly front: Quantity; readonly back: Quantity };
 
-const halfAcross = ({ measures }: Body, { armholeAt }: HouseRules): Across =>
-  armholeAt === 'shoulder'
-    ? { front: measures.shoulderWidth / 2, back: measures.shoulderWidth / 2 }
-    : { front: measures.acrossFront / 2, back: measures.acrossBack / 2 };
+function acrossWhereItEnds(body: Body, { armholeAt }: HouseRules): Across {
+  const measured = (key: 'shoulderWidth' | 'acrossFront' | 'acrossBack'): Quantity =>
+    taken(measureGuide[key].label.toLowerCase(), key, body.measures[key], key in body.estimated);
+  return armholeAt === 'shoulder'
+    ? { front: measured('shoulderWidth'), back: measured('shoulderWidth') }
+    : { front: measured('acrossFront'), back: measured('acrossBack') };
+}
 
 /** Opens the back above the bust where the top line then crosses high enough; else the front takes it. */
 function pairOpened(inputs: Omit<PairInputs, 'backOpens'>, halfAcrossBack: number): PairedHalves {
@@ -197,7 +205,7 @@ type Shared = {
   readonly below: BelowKnee;
   readonly style: GownStyle;
   readonly rules: HouseRules;
-  readonly acrossOf: Across;
+  readonly across: Across;
 };
 
 function drawSide(
@@ -208,16 +216,25 @@ function drawSide(
   readonly side: Side;
   readonly pieces: readonly Piece[];
   readonly openings: readonly TopOpening[];
+  readonly edges: TopEdges;
 } {
   const { pair, style, rules, below } = shared;
   const half = pair[side];
   const contour = pair.contour[side];
-  const paper = narrateHalf(table, half, shared.quarters[side], contour, pair.contour.moved);
+  const paper = narrateHalf(
+    table,
+    half,
+    shared.quarters[side],
+    contour,
+    pair.contour.moved,
+    style.waistSeam,
+  );
   const top = drawTop(table, paper, {
     half,
     front: pair.front,
     opening: contour.opening,
-    halfAcross: shared.acrossOf[side],
+    across: shared.across[side],
+    halfAcross: shared.across[side].value / 2,
     footOf: below.footOf,
     style,
     rules,
@@ -226,5 +243,10 @@ function drawSide(
     style.waistSeam === 'none'
       ? []
       : [middlePiece(paper, half, below.footOf(`${side}-middle`), topPartner(side, style))];
-  return { side, pieces: [...top.pieces, ...middle], openings: top.openings };
+  return {
+    side,
+    pieces: [...top.pieces, ...middle],
+    openings: top.openings,
+    edges: { topEdge: top.topEdge, armhole: pathLength(top.armhole ?? []) },
+  };
 }

@@ -124,6 +124,10 @@ export const halfName = (plan: GodetPlan, place: GodetPlace, towards: 'near' | '
 export const radiusOf = (plan: GodetPlan, place: GodetPlace): number =>
   plan.depth + (place === 'centre-back' ? plan.train : 0);
 
+/** Radii of all the godets of the skirt, added: times their angle it is the length of their hems, mm. */
+export const sumOfRadii = (plan: GodetPlan): number =>
+  plan.places.reduce((sum, place) => sum + howMany[place] * radiusOf(plan, place), 0);
+
 /** Whether a godet is wider than the cloth and gets a seam down its middle. */
 export const isDivided = (plan: GodetPlan, place: GodetPlace): boolean =>
   2 * radiusOf(plan, place) * Math.sin(plan.angle / 2) > plan.room;

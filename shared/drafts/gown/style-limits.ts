@@ -138,7 +138,7 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
   const outer = Math.max(body.measures.acrossFront / 2, bustSpan / 2 + outsideAxis);
   const widestNeck = Math.min(bustSpan / 2 + 40, offShoulder ? outer - insideEnd : Infinity);
   const topDrop = offShoulder
-    ? limit(90, levels.bust - 60, 127)
+    ? limit(90, Math.min(levels.bust - 60, levels.underarm - leastArmhole), 127)
     : limit(levels.bust - 110, levels.bust - 60, levels.bust - 85);
   const peak = within(style.topDrop, topDrop);
   const longestDart = Math.min(150, waistToHip - 45);

@@ -42,12 +42,15 @@ export function zipCentreBack(pieces: readonly Piece[], end: number): Closed {
   return { pieces: closed, length };
 }
 
-/** A centre back that runs straight down can lie on a fold; one that runs outwards below stays a seam. */
+/** A centre back that runs straight down can lie on a fold; one that runs outwards below, or takes a godet, stays a seam. */
 const isStraight = (pieces: readonly Piece[]): boolean =>
   pieces
     .filter(isBody)
     .flatMap((piece) => piece.edges.filter(isCentreBack))
-    .every(({ path }) => path.every(({ from, to }) => from.x === 0 && to.x === 0));
+    .every(
+      ({ path, corner }) =>
+        corner === undefined && path.every(({ from, to }) => from.x === 0 && to.x === 0),
+    );
 
 function withoutZip(piece: Piece, fold: boolean): Piece {
   const centre = piece.edges.find(isCentreBack);
