@@ -1,4 +1,4 @@
-import type { Dart, Edge, FinishedPiece, LevelLine } from '../drafting/piece.ts';
+import type { Dart, Edge, FinishedPiece, InnerLine, LevelLine } from '../drafting/piece.ts';
 import { endOf, reverse, startOf } from '../geometry/curve.ts';
 import { type Path, line } from '../geometry/path.ts';
 import { type Point, add, distance, scale, subtract, turnRight, unit } from '../geometry/point.ts';
@@ -91,6 +91,24 @@ function foldBracket(edge: Edge): string {
   return element('path', { class: 'fold-bracket', d: [bracket, ...heads].join(''), ...pen(0.3) });
 }
 
+/** Lines inside a piece, told apart by their strokes: bones dashed long, folds dotted, places to lay them on plain. */
+const innerDashes: { readonly [K in InnerLine['kind']]: string | undefined } = {
+  boning: '12 4',
+  'pleat-fold': '2 3',
+  'pleat-place': undefined,
+  stay: '8 3 2 3',
+  stitching: '4 2',
+};
+
+const innerLine = ({ name, kind, path }: InnerLine): string =>
+  element('path', {
+    class: 'inner-line',
+    'data-line': name,
+    'data-kind': kind,
+    d: pathData(path),
+    ...pen(0.25, ink, innerDashes[kind]),
+  });
+
 const drillPoint = ({ x, y }: Point): string =>
   element('circle', { class: 'drill', cx: x, cy: y, r: 1.5, ...pen(0.25) });
 
@@ -112,6 +130,7 @@ export function pieceSvg(piece: FinishedPiece, translate: Point): string {
         ...pen(0.4),
       }),
     ),
+    ...(piece.lines ?? []).map(innerLine),
     ...piece.drills.map(drillPoint),
     ...piece.lettering.map(({ text, at, size }) =>
       element('text', { x: at.x, y: at.y, 'font-size': size, fill: ink, ...halo }, escapeXml(text)),

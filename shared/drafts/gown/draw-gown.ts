@@ -69,7 +69,6 @@ export function drawGown(
       style.kneeLevel < 0.5 ? said`At the knee` : said`${mm(style.kneeLevel)} above the knee`,
       bodyLevels.knee - style.kneeLevel,
       [],
-      ['waistToKnee'],
     );
   const levels: SideHeights = { ...bodyLevels, seam, knee };
   const quarters = {
@@ -106,7 +105,7 @@ export function drawGown(
     ? setInBands(table, body, style, { front: frontEdges, back: backEdges }, sewn)
     : sewn;
   const closed = closeGown(table, pieces, { body, levels: bodyLevels, pair, style });
-  const walked = walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style.kneeFinished);
+  const walked = walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style);
   return {
     pieces: closed.pieces,
     levels: {

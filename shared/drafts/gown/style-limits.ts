@@ -206,7 +206,7 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
     floorClearance,
     heelHeight,
     bandHeight: limit(60, 200, 110),
-    pleatRatio: limit(1, 3, 2),
+    pleatRatio: limit(1, 3, 2.5),
     armEase: limit(-40, 60, 0),
     stretch: limit(0, 100, style.cloth === 'stretch' ? 20 : 0),
     shrinkage: limit(0, 10, 0),

@@ -4,13 +4,14 @@ import { measureGuide } from '../../body/measure-guide.ts';
 import type { PartTable } from '../../drafting/drafting-table.ts';
 import { taken } from '../../drafting/quantity.ts';
 import { type Said, mm, said } from '../../units/said.ts';
+import type { GownStyle } from './style-card.ts';
 
 /** The hip joint lies at this part of waist to hip under the waist [named estimate, method section 6]. */
 const hipJointShare = 0.8;
 /** A shorter step than this is a caution, in plain words. */
 const easyStep = 600;
 
-/** What the knee seam lets the wearer do. */
+/** What the knee line lets the wearer do. */
 export type Walking = { readonly step: number; readonly caution: boolean; readonly said: Said };
 
 /**
@@ -21,24 +22,32 @@ export type Walking = { readonly step: number; readonly caution: boolean; readon
 export const longestStep = (skirt: number, knee: number, leg: number, depth: number): number =>
   Math.max(0, ((skirt - knee) / 2) * (leg / depth));
 
-/** The step the knee seam allows, stated on every gown. */
+/** What opens with the step where the skirt has no seam at the knee. */
+const opensBelow: { readonly [F in GownStyle['flare']]: string } = {
+  circle: '',
+  aLine: '',
+  godets: ' Below the knee the godets open with the step.',
+  integral: ' Below the knee the seams run out and open with the step.',
+};
+
+/** The step the knee line allows, stated on every gown. */
 export function walking(
   paper: PartTable,
   body: Body,
   levels: BodyLevels,
-  kneeSeam: number,
-  kneeFinished: number,
+  kneeLine: number,
+  { kneeFinished, flare }: Pick<GownStyle, 'kneeFinished' | 'flare'>,
 ): Walking {
   const joint = levels.waist + hipJointShare * (levels.hip - levels.waist);
   const step = longestStep(
     kneeFinished,
     body.measures.kneeGirth,
     levels.floor - joint,
-    kneeSeam - joint,
+    kneeLine - joint,
   );
   const caution = step < easyStep;
   const of = ['kneeGirth', 'waistToHip', 'waistToFloor'] as const;
-  const sentence = said`Finished knee ${mm(kneeFinished)} lets her step about ${mm(step, of)}.${
+  const sentence = said`Finished knee ${mm(kneeFinished)} lets her step about ${mm(step, of)}.${opensBelow[flare]}${
     caution ? ' Stairs, kerbs and getting into a car need care: try it at the fitting.' : ''
   }`;
   const [knee, waistToHip, waistToFloor] = of.map(
@@ -48,7 +57,7 @@ export function walking(
     'Walking',
     said`${knee ?? []}; ${waistToHip ?? []}; ${waistToFloor ?? []}. ${sentence}`,
     {
-      why: said`The knees open as the foot goes forward, and the seam must reach round both. An unhurried step is about ${mm(650)}. Between hip and knee seam the side falls in: tape round both thighs together there, seated and standing, against the toile.`,
+      why: said`The knees open as the foot goes forward, and the gown must reach round both there. An unhurried step is about ${mm(650)}. Between hip and knee line the side falls in: tape round both thighs together there, seated and standing, against the toile.`,
       measures: of,
     },
   );
