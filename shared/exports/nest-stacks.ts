@@ -19,13 +19,18 @@ export type SizedPiece = {
 /** A piece in all sizes of a nest that have it, smallest first. */
 export type NestStack = Stack & { readonly title: string; readonly sized: readonly SizedPiece[] };
 
-/** The longest edge of a piece has most room for labels. */
-function labelPlace(piece: FinishedPiece, share: number): Point {
-  const longest = piece.edges
-    .map(({ path }) => ({ path, length: pathLength(path) }))
-    .toSorted((a, b) => b.length - a.length)[0];
-  const outline = longest?.path ?? seamOutline(piece);
-  return stationAtLength(outline, (longest?.length ?? 0) * share)?.at ?? { x: 0, y: 0 };
+/** The edge with most room for labels: the longest that is not a centre line, where sizes lie on each other. */
+function labelEdge(piece: FinishedPiece): string | undefined {
+  const free = piece.edges.filter(({ kind }) => kind !== 'fold' && kind !== 'zip');
+  return free
+    .map(({ name, path }) => ({ name, length: pathLength(path) }))
+    .toSorted((a, b) => b.length - a.length)[0]?.name;
+}
+
+/** Where a size is lettered: at its own share of the edge that all sizes are lettered on. */
+function labelPlace(piece: FinishedPiece, edge: string | undefined, share: number): Point {
+  const path = piece.edges.find(({ name }) => name === edge)?.path ?? seamOutline(piece);
+  return stationAtLength(path, pathLength(path) * share)?.at ?? { x: 0, y: 0 };
 }
 
 /** The pieces of a nest, sizes over each other, aligned on a point or a seam. */
@@ -35,6 +40,8 @@ export function nestStacks({ sizes }: Nest, align: Alignment): readonly NestStac
   const names = new Set(sizes.flatMap(({ draft }) => draft.pieces.map(({ name }) => name)));
   return [...names].map((name) => {
     const own = base.draft.pieces.find((each) => each.name === name);
+    const sample = own ?? sizes.at(-1)?.draft.pieces.find((each) => each.name === name);
+    const edge = sample && labelEdge(sample);
     const sized = sizes.flatMap(({ step, draft }, index): readonly SizedPiece[] => {
       const piece = draft.pieces.find((each) => each.name === name);
       if (!piece) return [];
@@ -45,7 +52,9 @@ export function nestStacks({ sizes }: Nest, align: Alignment): readonly NestStac
           ? movedPiece(piece, frameMotion(drafts, piece.side, align))
           : piece;
       const share = (index + 1) / (sizes.length + 1);
-      return [{ step, label: sizeLabel(step), piece: laid, labelAt: labelPlace(laid, share) }];
+      return [
+        { step, label: sizeLabel(step), piece: laid, labelAt: labelPlace(laid, edge, share) },
+      ];
     });
     const title = own?.title ?? sized[0]?.piece.title ?? name;
     return { name, title, sized, pieces: sized.map((each) => each.piece) };

@@ -85,7 +85,7 @@ export async function deletePerson(
     if (!sameIds(named.cards, current.cards) || !sameIds(named.gowns, current.gowns)) {
       throw new RefusalError(
         'conflict',
-        'Cards or gowns of hers have come or gone meanwhile. Nothing has been deleted: look at what goes, and delete again.',
+        'Cards or gowns have come or gone meanwhile. Nothing has been deleted: look at what goes, and delete again.',
         { current },
       );
     }

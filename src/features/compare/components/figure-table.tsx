@@ -30,7 +30,12 @@ export const FigureTable = ({ rows, titles, names, unit }: FigureTableProps) => 
           Figures
         </h2>
         <label className="flex items-center gap-2">
-          <input type="checkbox" checked={all} onChange={() => setAll(!all)} />
+          <input
+            type="checkbox"
+            className="accent-brass"
+            checked={all}
+            onChange={() => setAll(!all)}
+          />
           Also what is the same in both
         </label>
       </div>
@@ -58,11 +63,13 @@ export const FigureTable = ({ rows, titles, names, unit }: FigureTableProps) => 
                       {figureTitle(row, titles)}
                     </th>
                     {[row.first, row.second].map((value, index) => (
-                      <td key={index} className="px-2 text-right whitespace-nowrap">
+                      <td key={index} className="px-2 py-1 text-right whitespace-nowrap">
                         {value === undefined ? 'none' : formatFigure(kind, value, unit)}
                       </td>
                     ))}
-                    <td className="pl-2 text-right whitespace-nowrap">{changeOf(row, unit)}</td>
+                    <td className="py-1 pl-2 text-right whitespace-nowrap">
+                      {changeOf(row, unit)}
+                    </td>
                   </tr>
                 ))}
               </tbody>

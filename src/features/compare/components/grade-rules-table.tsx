@@ -3,7 +3,7 @@ import { useState } from 'react';
 import type { MeasureKey } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
 import { checkGradeRules, type GradeRules, starterRules } from '#shared/regrade/grade-rules.ts';
-import { formatLength } from '#shared/units/format-length.ts';
+import { formatFine } from '#shared/units/format-length.ts';
 import { parseAngle } from '#shared/units/parse-angle.ts';
 import { parseLength } from '#shared/units/parse-length.ts';
 import type { Unit } from '#shared/units/said.ts';
@@ -24,7 +24,8 @@ const isAngle = (key: MeasureKey): boolean => measureGuide[key].kind === 'angle'
 
 const written = (key: MeasureKey, step: number | undefined, unit: Unit): string => {
   if (step === undefined) return '';
-  return isAngle(key) ? String(step) : formatLength(step, unit).replace('\u2212', '-');
+  // As short as it can be: a quarter of a centimetre is a common step.
+  return String(isAngle(key) ? step : Number(formatFine(step, unit).replace('\u2212', '-')));
 };
 
 /** What was typed as a step, or the sentence that says what to type; an empty field has no step. */

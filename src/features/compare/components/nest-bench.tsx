@@ -11,7 +11,7 @@ import type { Unit } from '#shared/units/said.ts';
 
 import { Segmented } from '../../../ui/segmented.tsx';
 import { fetchNest } from '../queries.ts';
-import { NestDrawing } from './nest-drawing.tsx';
+import { NestDrawing, SizeSample } from './nest-drawing.tsx';
 import { NestReportView } from './nest-report-view.tsx';
 import { AlignTools, PieceChoice } from './overlay-tools.tsx';
 import { TakeAway } from './take-away.tsx';
@@ -61,8 +61,14 @@ export const NestBench = ({ base, nest, order, unit }: NestBenchProps) => {
         <legend className="text-sm text-slate">Sizes shown</legend>
         {steps.map((step) => (
           <label key={step} className="flex items-center gap-1">
-            <input type="checkbox" checked={!hidden.has(step)} onChange={() => turn(step)} />
+            <input
+              type="checkbox"
+              className="accent-brass"
+              checked={!hidden.has(step)}
+              onChange={() => turn(step)}
+            />
             {sizeLabel(step)}
+            <SizeSample step={step} steps={steps} />
           </label>
         ))}
       </fieldset>

@@ -20,6 +20,23 @@ type NestDrawingProps = {
 /** Dashes are drawn this much larger than on paper, pixels a millimetre. */
 const dashScale = 1.2;
 const lettering = 13;
+/** Below this scale, pixels a millimetre, labels would hide the lines: their key tells the sizes. */
+const roomForLabels = 0.3;
+
+/** How a size is drawn, in a little. */
+export const SizeSample = ({ step, steps }: { step: number; steps: readonly number[] }) => {
+  const { width = 0.35, dash } = sizePens(steps).get(step) ?? {};
+  return (
+    <svg viewBox="0 0 36 6" className="h-2 w-12 text-ink" aria-hidden="true">
+      <path
+        d="M0 3H36"
+        stroke="currentColor"
+        strokeWidth={width * 3}
+        strokeDasharray={dash?.join(' ')}
+      />
+    </svg>
+  );
+};
 
 /** The sizes of a nest over each other, a line style and a label for each. */
 export const NestDrawing = ({ stacks, steps, shown, cut }: NestDrawingProps) => {
@@ -29,7 +46,11 @@ export const NestDrawing = ({ stacks, steps, shown, cut }: NestDrawingProps) => 
   const pens = sizePens(steps);
   const scale = size.width === 0 ? 0 : Math.min(size.width / laid.width, size.height / laid.height);
   return (
-    <div ref={holder} className="h-[min(70dvh,44rem)] w-full">
+    <div
+      ref={holder}
+      className="max-h-[min(75dvh,48rem)] w-full"
+      style={{ aspectRatio: laid.width / laid.height }}
+    >
       <svg
         role="img"
         aria-label={`${shown.size} sizes over each other`}
@@ -54,7 +75,7 @@ export const NestDrawing = ({ stacks, steps, shown, cut }: NestDrawingProps) => 
                   <g key={step}>
                     <path d={pathData(cut ? piece.cutLine : seamOutline(piece), true)} {...line} />
                     <path d={dartLines(piece)} {...line} />
-                    {scale > 0 && (
+                    {scale >= roomForLabels && (
                       <text
                         x={labelAt.x}
                         y={labelAt.y}

@@ -67,7 +67,7 @@ export const NestReportView = (props: NestReportProps) => {
                 {nest.sizes.map(({ step }) => {
                   const found = girths.find((each) => each.step === step);
                   return (
-                    <td key={step} className="px-2 text-right whitespace-nowrap">
+                    <td key={step} className="px-2 py-1 text-right whitespace-nowrap">
                       {found === undefined ? 'none' : formatFine(found.girth, unit)}
                     </td>
                   );

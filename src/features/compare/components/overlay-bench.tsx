@@ -19,10 +19,13 @@ type OverlayBenchProps = {
   readonly names: { readonly first: string; readonly second: string };
   readonly unit: Unit;
   readonly onAlign?: (align: Alignment) => void;
+  /** Whether the figures of both stand below: not where they are told otherwise. */
+  readonly figures?: boolean;
 };
 
 /** Two drafts over each other with all that belongs to them: tools, drawing, files, figures. */
-export const OverlayBench = ({ first, second, names, unit, onAlign }: OverlayBenchProps) => {
+export const OverlayBench = (props: OverlayBenchProps) => {
+  const { first, second, names, unit, onAlign, figures = true } = props;
   const [view, setView] = useState<OverlayView>({ align: atCentreWaist, share: 0 });
   const { align } = view;
   const comparison = useMemo(() => compareDrafts(first, second, align), [first, second, align]);
@@ -79,7 +82,7 @@ export const OverlayBench = ({ first, second, names, unit, onAlign }: OverlayBen
           })
         }
       />
-      <FigureTable rows={comparison.rows} titles={titles} names={names} unit={unit} />
+      {figures && <FigureTable rows={comparison.rows} titles={titles} names={names} unit={unit} />}
     </div>
   );
 };

@@ -1,11 +1,12 @@
 import { useMemo, useRef } from 'react';
 
 import type { Comparison, PiecePair } from '#shared/compare/compare-drafts.ts';
-import { levelFigures } from '#shared/compare/level-figures.ts';
+import { type LevelFigure, levelFigures } from '#shared/compare/level-figures.ts';
 import { morphAt, tracksOf } from '#shared/compare/morph.ts';
 import { seamOutline } from '#shared/compare/moved-piece.ts';
 import type { FinishedPiece } from '#shared/drafting/piece.ts';
 import { dartLines, hatchApart, levelWords, regionData } from '#shared/exports/compare-svg.ts';
+import { formatChange } from '#shared/exports/figure-words.ts';
 import { layStacks } from '#shared/exports/overlaid.ts';
 import { pathData } from '#shared/exports/path-data.ts';
 import { hatch } from '#shared/geometry/region.ts';
@@ -31,9 +32,18 @@ const line = {
   strokeLinejoin: 'round',
 } as const;
 
-/** Lettering of the levels: pixels on the screen, and the least scale (pixels a millimetre) it has room at. */
+/** Lettering of the levels, pixels on the screen. */
 const lettering = 13;
-const roomFrom = 0.42;
+/** From this scale on, pixels a millimetre, there is room for both widths; below, for what changes. */
+const roomFrom = 0.8;
+const roomForChange = 0.25;
+
+/** What is written on a level at a scale: both widths, or their difference where there is one. */
+function writtenAt(scale: number, figure: LevelFigure, unit: Unit): string {
+  if (scale >= roomFrom) return levelWords(figure, unit);
+  const change = formatChange('quarter', figure.second - figure.first, unit);
+  return scale < roomForChange || change === '0' ? '' : change;
+}
 
 const Outline = ({ piece, dash }: { piece: FinishedPiece; dash?: string }) => (
   <>
@@ -103,7 +113,11 @@ export const OverlayDrawing = (props: OverlayDrawingProps) => {
   const figures = useMemo(() => levelFigures(comparison), [comparison]);
   const scale = size.width === 0 ? 0 : Math.min(size.width / laid.width, size.height / laid.height);
   return (
-    <div ref={holder} className="h-[min(70dvh,44rem)] w-full">
+    <div
+      ref={holder}
+      className="max-h-[min(75dvh,48rem)] w-full"
+      style={{ aspectRatio: laid.width / laid.height }}
+    >
       <svg
         role="img"
         aria-label={`${names.first}, solid, and ${names.second}, dashed, over each other`}
@@ -117,7 +131,7 @@ export const OverlayDrawing = (props: OverlayDrawingProps) => {
             {pair.first && <Outline piece={pair.first} />}
             {pair.second && <Outline piece={pair.second} dash="7 4" />}
             {share > 0 && <Morph pair={pair} share={share} />}
-            {scale >= roomFrom &&
+            {scale > 0 &&
               figures
                 .filter(({ piece }) => piece === pair.name)
                 .map((each) => (
@@ -130,7 +144,7 @@ export const OverlayDrawing = (props: OverlayDrawingProps) => {
                     className="halo fill-ink"
                     style={{ strokeWidth: 3 / scale }}
                   >
-                    {levelWords(each, unit)}
+                    {writtenAt(scale, each, unit)}
                   </text>
                 ))}
           </g>

@@ -48,7 +48,7 @@ const pointBecause = ({ by }: MovedPoint, unit: Unit): string =>
         )
         .join(', ');
 
-const cell = 'px-2 text-right whitespace-nowrap';
+const cell = 'px-2 py-1 text-right whitespace-nowrap';
 
 /** The measures that changed, and those that no draft can be made of alone. */
 const Causes = ({ causes, unit }: { causes: readonly Cause[]; unit: Unit }) => (
@@ -83,7 +83,7 @@ const FigureRows = ({
       <td className={cell}>{formatFigure(row.kind, row.first, unit)}</td>
       <td className={cell}>{formatFigure(row.kind, row.second, unit)}</td>
       <td className={cell}>{formatChange(row.kind, row.second - row.first, unit)}</td>
-      <td className="pl-2">{becauseOf(row, unit)}</td>
+      <td className="py-1 pl-2">{becauseOf(row, unit)}</td>
     </tr>
   ));
 
@@ -161,7 +161,7 @@ export const WhatMoved = ({ regrade, titles, unit }: WhatMovedProps) => {
                     <td className={cell}>
                       {formatChange('seam', point.to.y - point.from.y, unit)}
                     </td>
-                    <td className="pl-2">{pointBecause(point, unit)}</td>
+                    <td className="py-1 pl-2">{pointBecause(point, unit)}</td>
                   </tr>
                 ))}
               </tbody>

@@ -175,14 +175,15 @@ const Regraded = ({ before, gown, card, measures, choice, unit }: RegradedProps)
   return (
     <>
       <KeepRegrade key={choice} gown={gown} card={card} after={regrade.after} />
-      <WhatMoved regrade={regrade} titles={pieceTitles(before, regrade.after)} unit={unit} />
       <OverlayBench
         first={before}
         second={regrade.after}
         names={{ first: 'as it was', second: `card of ${dayInWords(card.takenOn)}` }}
         unit={unit}
         onAlign={setAlign}
+        figures={false}
       />
+      <WhatMoved regrade={regrade} titles={pieceTitles(before, regrade.after)} unit={unit} />
     </>
   );
 };

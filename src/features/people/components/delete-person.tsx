@@ -17,7 +17,7 @@ type DeletePersonProps = {
   readonly gowns: readonly ListedGown[];
 };
 
-/** Deletes a person after saying by name what goes with her. */
+/** Deletes a person after saying by name what goes with them. */
 export const DeletePerson = ({ person, cards, gowns }: DeletePersonProps) => {
   const [asking, setAsking] = useState(false);
   const client = useQueryClient();
@@ -57,10 +57,10 @@ export const DeletePerson = ({ person, cards, gowns }: DeletePersonProps) => {
       <Dialog title={`Delete ${person.name}?`} open={asking} onClose={() => setAsking(false)}>
         <div className="mt-4 space-y-4">
           {goes.length === 0 ? (
-            <p>Nothing else goes: she has no measure card and no gown.</p>
+            <p>Nothing else goes: there is no measure card and no gown.</p>
           ) : (
             <>
-              <p>With her go, for good:</p>
+              <p>With this name go, for good:</p>
               <ul className="list-disc pl-5">
                 {goes.map(({ id, text }) => (
                   <li key={id}>{text}</li>
@@ -69,15 +69,15 @@ export const DeletePerson = ({ person, cards, gowns }: DeletePersonProps) => {
             </>
           )}
           <p className="text-slate">
-            Gowns that no card of hers was laid on are not among them, nor is what you have printed
-            or saved as a file.
+            Gowns that none of these cards was laid on are not among them, nor is what you have
+            printed or saved as a file.
           </p>
           {deleting.isError && <Notice>{failureWords(deleting.error)}</Notice>}
           <div className="flex flex-wrap gap-3">
             <Button kind="primary" disabled={deleting.isPending} onClick={() => deleting.mutate()}>
               Delete all of it
             </Button>
-            <Button onClick={() => setAsking(false)}>Keep her</Button>
+            <Button onClick={() => setAsking(false)}>Keep everything</Button>
           </div>
         </div>
       </Dialog>

@@ -70,7 +70,7 @@ const ClientBench = ({ person, cards, gowns }: ClientBenchProps) => (
           <CardRow key={card.id} card={card} />
         ))}
       </ul>
-      {cards.length === 0 && <p>No card yet: start one with the day you measure her.</p>}
+      {cards.length === 0 && <p>No card yet: start one with the day the measures are taken.</p>}
     </section>
     <section aria-labelledby="gowns" className="mt-8">
       <h2 id="gowns" className="heading">
@@ -81,7 +81,7 @@ const ClientBench = ({ person, cards, gowns }: ClientBenchProps) => (
           <GownRow key={gown.id} gown={gown} cards={cards} />
         ))}
       </ul>
-      {gowns.length === 0 && <p>No gown was drawn from a card of hers yet.</p>}
+      {gowns.length === 0 && <p>No gown was drawn from one of these cards yet.</p>}
     </section>
     <div className="mt-10 border-t border-rule pt-4">
       <DeletePerson person={person} cards={cards} gowns={gowns} />
