@@ -1,3 +1,4 @@
+import AxeBuilder from '@axe-core/playwright';
 import type { Page } from '@playwright/test';
 
 import { gownSchema } from '#shared/api/gowns.ts';
@@ -71,6 +72,7 @@ for (const width of [390, 1280]) {
       await gown.signIn.getByLabel('Password').fill('not the password');
       await gown.signIn.getByRole('button', { name: 'Sign in' }).click();
       await expect(gown.signIn.getByRole('alert')).toContainText('do not belong together');
+      expect((await new AxeBuilder({ page }).analyze()).violations).toEqual([]);
       await expect(gown.signIn.getByLabel('E-mail')).toHaveValue(maker.email);
       await gown.signIn.getByLabel('Password').fill(maker.password);
       await gown.signIn.getByRole('button', { name: 'Sign in' }).click();

@@ -1,7 +1,12 @@
+import AxeBuilder from '@axe-core/playwright';
+import type { Page } from '@playwright/test';
+
 import { gownSchema } from '#shared/api/gowns.ts';
 
 import { walkTo } from '../fixtures/keyboard.ts';
 import { expect, test } from '../fixtures/maker.ts';
+
+const faults = async (page: Page) => (await new AxeBuilder({ page }).analyze()).violations;
 
 for (const width of [390, 1280]) {
   test.describe(`at ${width} px`, () => {
@@ -17,7 +22,7 @@ for (const width of [390, 1280]) {
 
       await page.getByRole('link', { name: 'Gowns' }).click();
       await expect(page.getByRole('heading', { level: 1, name: 'Gowns' })).toBeVisible();
-      await page.getByRole('link', { name: 'Evening gown' }).click();
+      await page.getByRole('link', { name: 'Evening gown', exact: true }).click();
       // The last pieces that could be drawn lie there, although a figure cannot be read.
       await expect(gown.stale).toBeVisible();
       await gown.showStyle();
@@ -29,7 +34,9 @@ for (const width of [390, 1280]) {
       expect(maker.gownId).not.toBe('');
       await page.goto('/gowns');
       await page.getByRole('button', { name: 'Duplicate Evening gown' }).click();
-      await expect(page.getByRole('link', { name: 'Copy of Evening gown' })).toBeVisible();
+      await expect(
+        page.getByRole('link', { name: 'Copy of Evening gown', exact: true }),
+      ).toBeVisible();
       await page.getByRole('button', { name: 'Rename Evening gown' }).click();
       const name = page.getByRole('textbox', { name: 'Name of the gown' });
       await name.fill('');
@@ -37,13 +44,26 @@ for (const width of [390, 1280]) {
       await expect(page.getByRole('dialog')).toContainText('too short');
       await name.fill('Ball gown');
       await name.press('Enter');
-      await expect(page.getByRole('link', { name: 'Ball gown' })).toBeVisible();
+      await expect(page.getByRole('link', { name: 'Ball gown', exact: true })).toBeVisible();
       await page.getByRole('button', { name: 'Archive Ball gown' }).click();
-      await expect(page.getByRole('link', { name: 'Ball gown' })).toHaveCount(0);
+      await expect(page.getByRole('link', { name: 'Ball gown', exact: true })).toHaveCount(0);
       await page.getByRole('button', { name: 'Archive (1)' }).click();
+      await page.getByRole('button', { name: 'Delete Ball gown' }).click();
+      await expect(page.getByRole('dialog')).toContainText('every revision');
+      expect(await faults(page)).toEqual([]);
+      await page.getByRole('button', { name: 'Keep it' }).click();
       await page.getByRole('button', { name: 'Take back Ball gown' }).click();
       await page.getByRole('button', { name: 'Back to those in use' }).click();
-      await expect(page.getByRole('link', { name: 'Ball gown' })).toBeVisible();
+      await expect(page.getByRole('link', { name: 'Ball gown', exact: true })).toBeVisible();
+
+      await page.getByRole('button', { name: 'Archive Copy of Evening gown' }).click();
+      await page.getByRole('button', { name: 'Archive (1)' }).click();
+      await page.getByRole('button', { name: 'Delete Copy of Evening gown' }).click();
+      await page.getByRole('button', { name: 'Delete for good' }).click();
+      await expect(page.getByText('Nothing has been put away.')).toBeVisible();
+      await page.reload();
+      await expect(page.getByRole('link', { name: 'Ball gown', exact: true })).toBeVisible();
+      await expect(page.getByText('Copy of Evening gown')).toHaveCount(0);
     });
 
     test('a state is named, looked at, and returned to', async ({ gown }) => {
@@ -81,7 +101,7 @@ test('the same by keyboard alone: open, change, name a state, go back to the lis
 }) => {
   expect(maker.gownId).not.toBe('');
   await page.goto('/gowns');
-  const link = page.getByRole('link', { name: 'Evening gown' });
+  const link = page.getByRole('link', { name: 'Evening gown', exact: true });
   await expect(link).toBeVisible();
   await walkTo(page, link);
   await page.keyboard.press('Enter');
@@ -144,10 +164,11 @@ test('a gown drawn by older rules shows what would change before it changes', as
   await page.goto(`/gowns/${maker.gownId}`);
   const sheet = page.getByRole('dialog', { name: 'Drawn by older rules' });
   await expect(sheet.getByRole('img')).toHaveCount(2);
+  expect(await faults(page)).toEqual([]);
   await sheet.getByRole('button', { name: 'Leave it as it was drawn' }).click();
   await expect(page).toHaveURL(/\/gowns$/);
   expect(saves).toEqual([]);
-  await page.getByRole('link', { name: 'Evening gown' }).click();
+  await page.getByRole('link', { name: 'Evening gown', exact: true }).click();
   await sheet.getByRole('button', { name: 'Redraw by today’s rules' }).click();
   await expect(page.locator('[data-standing="saved"]')).toBeVisible();
   expect(saves).toHaveLength(1);

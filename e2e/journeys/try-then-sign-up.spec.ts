@@ -51,7 +51,7 @@ for (const width of [390, 1280]) {
       await page.getByLabel('E-mail').fill(maker.email);
       await page.getByLabel('Password').fill(maker.password);
       await page.getByRole('button', { name: 'Sign in' }).click();
-      await expect(page.getByRole('link', { name: 'Evening gown' })).toBeVisible();
+      await expect(page.getByRole('link', { name: 'Evening gown', exact: true })).toBeVisible();
     });
 
     test('the password is changed, and signing out everywhere ends every session', async ({
@@ -75,7 +75,7 @@ for (const width of [390, 1280]) {
       await page.getByLabel('E-mail').fill(maker.email);
       await page.getByLabel('Password').fill(password);
       await page.getByRole('button', { name: 'Sign in' }).click();
-      await expect(page.getByRole('link', { name: 'Evening gown' })).toBeVisible();
+      await expect(page.getByRole('link', { name: 'Evening gown', exact: true })).toBeVisible();
     });
   });
 }

@@ -5,6 +5,7 @@ import type { Answer } from '#shared/api/endpoint.ts';
 import {
   archiveGown,
   createGown,
+  deleteGown,
   duplicateGown,
   listGowns,
   renameGown,
@@ -13,6 +14,7 @@ import {
 import {
   archiveMeasureCard,
   createMeasureCard,
+  deleteMeasureCard,
   duplicateMeasureCard,
   listMeasureCards,
   renameMeasureCard,
@@ -40,7 +42,7 @@ export const cardsQuery = queryOptions({
 export type Deed =
   | { readonly kind: 'new'; readonly name: string }
   | { readonly kind: 'rename' | 'duplicate'; readonly id: string; readonly name: string }
-  | { readonly kind: 'archive' | 'unarchive'; readonly id: string };
+  | { readonly kind: 'archive' | 'unarchive' | 'delete'; readonly id: string };
 
 type Done = { readonly id?: string };
 
@@ -61,6 +63,8 @@ function doToGown(deed: Deed, saveId: string): Promise<Done> {
       return callOf(archiveGown, { gownId: deed.id }, undefined);
     case 'unarchive':
       return callOf(unarchiveGown, { gownId: deed.id }, undefined);
+    case 'delete':
+      return callOf(deleteGown, { gownId: deed.id }, undefined);
   }
 }
 
@@ -76,6 +80,8 @@ function doToCard(deed: Deed, saveId: string): Promise<Done> {
       return callOf(archiveMeasureCard, { cardId: deed.id }, undefined);
     case 'unarchive':
       return callOf(unarchiveMeasureCard, { cardId: deed.id }, undefined);
+    case 'delete':
+      return callOf(deleteMeasureCard, { cardId: deed.id }, undefined);
   }
 }
 

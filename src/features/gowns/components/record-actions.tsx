@@ -2,18 +2,26 @@ import { useState } from 'react';
 
 import { Button } from '../../../ui/button.tsx';
 import type { DeedDoer } from '../queries.ts';
+import { DeletingDialog } from './deleting-dialog.tsx';
 import { NamingDialog } from './naming-dialog.tsx';
 
 type RecordActionsProps = {
   readonly record: { readonly id: string; readonly archived: boolean };
   readonly name: string;
   readonly label: string;
+  /** What goes with it when it is deleted, one sentence. */
+  readonly goes: string;
   readonly deed: DeedDoer;
 };
 
 /** What can be done to one record of a list, in words; its name goes along for those who listen. */
-export const RecordActions = ({ record, name, label, deed }: RecordActionsProps) => {
-  const [renaming, setRenaming] = useState(false);
+export const RecordActions = ({ record, name, label, goes, deed }: RecordActionsProps) => {
+  const [open, setOpen] = useState<'renaming' | 'deleting'>();
+  const close = () => setOpen(undefined);
+  const begin = (what: 'renaming' | 'deleting') => {
+    deed.reset();
+    setOpen(what);
+  };
   const { id, archived } = record;
   return (
     <div className="-mx-2 flex flex-wrap">
@@ -22,10 +30,7 @@ export const RecordActions = ({ record, name, label, deed }: RecordActionsProps)
         slim
         className="text-sm"
         aria-label={`Rename ${name}`}
-        onClick={() => {
-          deed.reset();
-          setRenaming(true);
-        }}
+        onClick={() => begin('renaming')}
       >
         Rename
       </Button>
@@ -49,19 +54,34 @@ export const RecordActions = ({ record, name, label, deed }: RecordActionsProps)
       >
         {archived ? 'Take back' : 'Archive'}
       </Button>
-      {renaming && (
+      {archived && (
+        <Button
+          kind="quiet"
+          slim
+          className="text-sm"
+          aria-label={`Delete ${name}`}
+          onClick={() => begin('deleting')}
+        >
+          Delete
+        </Button>
+      )}
+      {open === 'deleting' && (
+        <DeletingDialog
+          name={name}
+          goes={goes}
+          deed={deed}
+          onClose={close}
+          onDelete={() => deed.mutate({ kind: 'delete', id }, { onSuccess: close })}
+        />
+      )}
+      {open === 'renaming' && (
         <NamingDialog
           title={`Rename ${name}`}
           label={label}
           now={name}
           deed={deed}
-          onClose={() => setRenaming(false)}
-          onName={(given) =>
-            deed.mutate(
-              { kind: 'rename', id, name: given },
-              { onSuccess: () => setRenaming(false) },
-            )
-          }
+          onClose={close}
+          onName={(given) => deed.mutate({ kind: 'rename', id, name: given }, { onSuccess: close })}
         />
       )}
     </div>

@@ -49,7 +49,13 @@ export const GownsPage = () => {
             <span className="block">{stateWords(gown)}</span>
           </p>
           {gown.drawnBy !== null && <GownLinks gown={gown} />}
-          <RecordActions record={gown} name={gown.title} label="Name of the gown" deed={deed} />
+          <RecordActions
+            record={gown}
+            name={gown.title}
+            label="Name of the gown"
+            goes="Its measures, style and pieces go for good, with every revision and whatever is shared of it."
+            deed={deed}
+          />
         </>
       )}
     />

@@ -52,7 +52,13 @@ export const MeasureCardsPage = () => {
             {`saved ${momentWords(card.savedAt)}`}
             <span className="block">{takenWords(card.taken)}</span>
           </p>
-          <RecordActions record={card} name={card.name} label="Name of the card" deed={deed} />
+          <RecordActions
+            record={card}
+            name={card.name}
+            label="Name of the card"
+            goes="Its measures go for good. A card that a gown was drawn from stays."
+            deed={deed}
+          />
         </>
       )}
     />
