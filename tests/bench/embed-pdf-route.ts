@@ -150,7 +150,9 @@ export async function embedPdfRoute(job: PrintJob, sheets: SheetPlan): Promise<U
     const flat = marks.flatMap((mark) => (isWindow(mark) ? mark.marks : [mark]));
     for (const mark of flat) {
       const form = mark.kind === 'use' ? rest[furniture.indexOf(mark.drawing)] : undefined;
-      if (form) page.drawPage(form, { x: 0, y: 0 });
+      if (form && mark.kind === 'use') {
+        page.drawPage(form, { x: toPoints(mark.motion.dx), y: -toPoints(mark.motion.dy) });
+      }
     }
     page.pushOperators(popGraphicsState());
     draw(page, flat, fonts, shift(0, 0), height);

@@ -3,6 +3,7 @@ import { benchBrowser } from './browser.ts';
 import { benchDrag } from './drag.ts';
 import { benchPdf } from './pdf.ts';
 import type { Measured } from './redraw.ts';
+import type { SheetBench } from './sheets.ts';
 
 /*
  * `npm run bench`: one JSON object a line. What runs in Node alone is bundled first, as it ships: run
@@ -11,8 +12,11 @@ import type { Measured } from './redraw.ts';
 
 type RedrawBench = { readonly benchRedraw: () => Promise<readonly Measured[]> };
 
+type SheetsBench = { readonly benchSheets: () => readonly SheetBench[] };
+
 /** The bundle exports what its source does. */
 const asRedrawBench = (loaded: unknown): RedrawBench => loaded as RedrawBench;
+const asSheetsBench = (loaded: unknown): SheetsBench => loaded as SheetsBench;
 
 const write = (lines: readonly object[]): void => {
   for (const line of lines) process.stdout.write(`${JSON.stringify(line)}\n`);
@@ -21,4 +25,6 @@ const write = (lines: readonly object[]): void => {
 const redraw = asRedrawBench(await import(await bundle(new URL('redraw.ts', import.meta.url))));
 write(await redraw.benchRedraw());
 write(await benchPdf());
+const sheets = asSheetsBench(await import(await bundle(new URL('sheets.ts', import.meta.url))));
+write(sheets.benchSheets());
 write([await benchBrowser(), await benchDrag()]);
