@@ -25,7 +25,7 @@ function refuseAnother(row: GownRow, card: LaidCard): void {
   if (row.personId === null || row.personId === card.personId) return;
   throw new RefusalError(
     'another-person',
-    'This gown is made for somebody else than this card is. Keep it as a new gown for her instead; this one stays as it is.',
+    'This gown is made for somebody else than this card is. Keep it as a new gown instead; this one stays as it is.',
   );
 }
 
