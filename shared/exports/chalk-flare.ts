@@ -17,7 +17,7 @@ type Sector = {
 };
 
 /** Where two straight edges would meet, carried on; no answer for edges that run alike. */
-function meetingOf(one: Edge, other: Edge): Point | undefined {
+export function meetingOf(one: Edge, other: Edge): Point | undefined {
   const [a, b] = [startOf(one.path), startOf(other.path)];
   const [along, across] = [startTangent(one.path), startTangent(other.path)];
   const turn = cross(along, across);
@@ -59,7 +59,8 @@ function sectorOf(piece: Piece): readonly Sector[] {
   ];
 }
 
-const pairIn =
+/** A row of one length under its name. */
+export const pairIn =
   (unit: Unit) =>
   (name: string, mm: number): Row => ({ kind: 'pair', name, value: chalked(mm, unit) });
 
@@ -81,8 +82,8 @@ function struckRows(sector: Sector, unit: Unit): readonly Row[] {
   const outer = sector.radii[4] ?? 0;
   if (sector.inner < same) {
     return [
-      { kind: 'heading', text: `Godets, struck from their point, ${unit}` },
-      pair('sides, and radius to the hem', outer),
+      { kind: 'heading', text: `Godets, from their point, ${unit}` },
+      pair('sides, to the hem', outer),
     ];
   }
   return [
@@ -98,7 +99,7 @@ function hemRows(sector: Sector, unit: Unit): readonly Row[] {
   const pair = pairIn(unit);
   const trained: readonly Row[] = isTrained(sector)
     ? [
-        pair('hem radius at the inner edge', sector.radii[0] ?? 0),
+        pair('radius, inner edge', sector.radii[0] ?? 0),
         pair('a quarter round', sector.radii[1] ?? 0),
         pair('half round', sector.radii[2] ?? 0),
         pair('three quarters round', sector.radii[3] ?? 0),

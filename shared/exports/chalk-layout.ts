@@ -43,13 +43,19 @@ export type ChalkLayout = {
 export type Bare = Pick<Half, 'title' | 'pieces' | 'points'>;
 
 function halfOf(draft: Drafted, side: Side, first: number): Bare {
-  const pieces = draft.pieces.filter((each) => each.side === side && each.part !== 'flare');
+  const pieces = draft.pieces.filter(
+    (each) => each.side === side && (each.part === 'top' || each.part === 'middle'),
+  );
   const title = side === 'front' ? 'Front, from the fold' : 'Back, from centre back';
   return { title, pieces, points: chalkPoints(pieces, draft.levels, first) };
 }
 
 const widthOf = ({ points }: Bare): number =>
   Math.max(0, ...points.map((each) => each.at.x)) * quarter;
+
+/** How far a half reaches over its centre line, where its centre seam runs outwards below the knee. */
+const overCentre = ({ points }: Bare): number =>
+  Math.max(0, ...points.map((each) => -each.at.x)) * quarter;
 
 /** The room inside a half: below its darts, above the knee seam, left of its side seam. */
 function insideOf(
@@ -133,9 +139,9 @@ export function layChalkSheet(
   const onPageFrom =
     (x: number): OnPage =>
     (at) => ({ x: x + at.x * quarter, y: yOf(at.y) });
-  const room = edge - left - lettersRoom - widthOf(front) - widthOf(back);
+  const room = edge - left - lettersRoom - widthOf(front) - widthOf(back) - overCentre(back);
   const frontX = left + lettersRoom;
-  const backX = frontX + widthOf(front) + Math.min(between, room);
+  const backX = frontX + widthOf(front) + overCentre(back) + Math.min(between, room);
   const right = backX + widthOf(back);
   const drawingsBottom = yOf(lowest);
   return {

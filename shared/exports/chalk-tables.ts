@@ -1,6 +1,7 @@
 import type { Drafted } from '../engine/drafted.ts';
 import type { Paper } from '../sheets/papers.ts';
 import type { Unit } from '../units/said.ts';
+import { bandRows } from './chalk-band.ts';
 import { flareRows } from './chalk-flare.ts';
 import { type ChalkLayout, chalkHalves, layChalkSheet } from './chalk-layout.ts';
 import { type Row, allowanceRows, levelRows, pieceRows, pointRows } from './chalk-rows.ts';
@@ -78,7 +79,8 @@ export function layChalkTables(
   unit: Unit,
 ): ChalkTables {
   const flare = draft.pieces.filter((each) => each.part === 'flare');
-  const needed = [...levelRows(draft, unit), ...flareRows(flare, unit)];
+  const bands = draft.pieces.filter((each) => each.part === 'sleeve');
+  const needed = [...levelRows(draft, unit), ...flareRows(flare, unit), ...bandRows(bands, unit)];
   const facts = [...needed, ...pieceRows(draft.pieces), ...allowanceRows(draft, unit)];
   const halves = chalkHalves(draft);
   const points = halves.map((half) => pointRows(half.title, half.points, unit));
