@@ -2,7 +2,7 @@ import { measureCard } from '#shared/api/card.ts';
 import type { DrawnPieces, GownContent, Picture } from '#shared/api/gowns.ts';
 import { pieceSchema } from '#shared/api/piece-reply.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
-import { draftGown } from '#shared/engine/draft-gown.ts';
+import { draftAny } from '#shared/engine/drafted.ts';
 import { picturePath } from '#shared/exports/picture.ts';
 
 /** The last pieces drawn of a gown, as they are kept. */
@@ -21,7 +21,7 @@ export function drawn({ unread, inputs }: GownContent): Drawing | undefined {
   if (unread.length > 0 || !card.success) return undefined;
   try {
     const drawnFrom = { ...inputs, card: card.data };
-    const draft = draftGown(drawnFrom);
+    const draft = draftAny(drawnFrom);
     return {
       engine: draft.engine,
       draftNumber: draft.number,

@@ -18,13 +18,11 @@ import { proveBlock } from '../proof/prove-block.ts';
 import type { Proof } from '../proof/proof.ts';
 import type { Problem } from '../units/problem.ts';
 import { said } from '../units/said.ts';
+import { engineVersion } from './draft-gown.ts';
 import { draftNumber } from './draft-number.ts';
 import { sortedJson } from './sorted-json.ts';
 import { labelFacts } from './label-facts.ts';
 import { narrateFinishing } from './narrate-finishing.ts';
-
-/** Version of the rules of the blocks: a change of any shape raises it. */
-const blockVersion = '1.0.0';
 
 /** The garments that are blocks. */
 export type BlockName = 'bodice-block' | 'skirt-block';
@@ -96,7 +94,7 @@ export function draftBlock<Name extends BlockName, Card, Style>(
   refuse(aboutStyle);
   const resolved = kind.resolve(style, body, bodyLevels, rules);
   const drawn = kind.draw(table, body, bodyLevels, resolved, rules);
-  const number = draftNumber(sortedJson([garment, blockVersion, card, style, rules]));
+  const number = draftNumber(sortedJson([garment, engineVersion, card, style, rules]));
   narrateFinishing(
     table,
     drawn.pieces,
@@ -107,7 +105,7 @@ export function draftBlock<Name extends BlockName, Card, Style>(
   const pieces = drawn.pieces.map((piece) => finishPiece(piece, rules, label));
   return {
     garment,
-    engine: blockVersion,
+    engine: engineVersion,
     number,
     inputs: { garment, card, style, rules },
     body,

@@ -5,8 +5,7 @@ import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
 import { balanced } from '#shared/drafting/house-rule-presets.ts';
 import { easeLevels, styleLengths } from '#shared/drafts/gown/style-card.ts';
-import { draftGown } from '#shared/engine/draft-gown.ts';
-import type { DraftInputs } from '#shared/engine/draft.ts';
+import { draftAny, type DraftedInputs } from '#shared/engine/drafted.ts';
 import type { Problem } from '#shared/units/problem.ts';
 import { speak } from '#shared/units/speak.ts';
 import { middleBody } from '../support/middle-body.ts';
@@ -109,9 +108,9 @@ function expectSentences(problems: readonly Problem[]): void {
 }
 
 /** Drafts whatever came through; the refusal is the only thing that may be thrown. */
-function expectDraftOrRefusal(inputs: DraftInputs): 'drafted' | 'refused' {
+function expectDraftOrRefusal(inputs: DraftedInputs): 'drafted' | 'refused' {
   try {
-    const draft = draftGown(inputs);
+    const draft = draftAny(inputs);
     expect(JSON.stringify(draft.pieces)).not.toContain('null');
     return 'drafted';
   } catch (error) {

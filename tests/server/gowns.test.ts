@@ -15,7 +15,8 @@ import {
   readRevision,
   returnToRevision,
 } from '#shared/api/revisions.ts';
-import { draftGown, engineVersion } from '#shared/engine/draft-gown.ts';
+import { engineVersion } from '#shared/engine/draft-gown.ts';
+import { draftAny } from '#shared/engine/drafted.ts';
 import { type Browser, content, openMaker } from './support/maker.ts';
 import { card } from './support/request-bodies.ts';
 import { type ServerUnderTest, startServer } from './support/server-under-test.ts';
@@ -32,7 +33,7 @@ afterAll(() => server.close());
 describe('a gown', () => {
   it('keeps its three inputs, what was typed, and the pieces as the engine draws them', async () => {
     const gown = await read(maker, await newGown(maker));
-    const draft = draftGown({ ...content().inputs, card });
+    const draft = draftAny({ ...content().inputs, card });
     expect(gown.content).toEqual(content());
     expect(gown).toMatchObject({
       title: 'Gala gown',

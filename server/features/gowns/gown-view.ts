@@ -10,12 +10,27 @@ import type { GownRow, ListedGownRow } from './repository.ts';
 type Summary = Answer<typeof listGowns>['gowns'][number];
 
 export const contentOf = (
-  row: Pick<GownRow, 'typed' | 'unread' | 'card' | 'style' | 'rules'>,
+  row: Pick<GownRow, 'typed' | 'unread' | 'garment' | 'card' | 'style' | 'rules'>,
 ): GownContent => ({
   typed: row.typed,
   unread: row.unread,
-  inputs: { card: row.card, style: row.style, rules: row.rules },
+  inputs: keptInputs(row),
 });
+
+/** The style was kept beside the garment it is of. */
+function keptInputs({
+  garment,
+  card,
+  style,
+  rules,
+}: Pick<GownRow, 'garment' | 'card' | 'style' | 'rules'>): GownContent['inputs'] {
+  return {
+    ...(garment === 'gown' ? {} : { garment }),
+    card,
+    style,
+    rules,
+  };
+}
 
 const summaryOf = (row: ListedGownRow) => ({
   id: row.id,

@@ -22,6 +22,7 @@ export const copyOf = (row: GownRow, name: string, automatic: boolean): Revision
   createdAt: new Date(),
   typed: row.typed,
   unread: row.unread,
+  garment: row.garment,
   card: row.card,
   style: row.style,
   rules: row.rules,

@@ -44,7 +44,12 @@ export const savedAs = ({ record, version, savedAt }: Acknowledged): Saved => ({
   savedAt: savedAt.toISOString(),
 });
 
-const columnsOf = ({ typed, unread, inputs }: GownContent) => ({ typed, unread, ...inputs });
+const columnsOf = ({ typed, unread, inputs }: GownContent) => ({
+  typed,
+  unread,
+  ...inputs,
+  garment: inputs.garment ?? 'gown',
+});
 
 export async function readGown(
   { database, drafter }: Workroom,

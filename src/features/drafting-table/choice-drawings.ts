@@ -1,4 +1,4 @@
-import type { StyleChoice, StyleChoices } from '#shared/drafts/gown/style-card.ts';
+import type { TableChoice, TableChoices } from './style-choices.ts';
 
 /** How a line is drawn, by the trade's convention: cut solid, seam dashed, dart legs thin, what only helps hairline. */
 export type Look = 'cut' | 'seam' | 'thin' | 'hair';
@@ -7,7 +7,7 @@ export type Look = 'cut' | 'seam' | 'thin' | 'hair';
 export type Line = { readonly look: Look; readonly d: string; readonly once?: true };
 
 type Drawings = {
-  readonly [C in StyleChoice]: { readonly [O in StyleChoices[C][number]]: readonly Line[] };
+  readonly [C in TableChoice]: { readonly [O in TableChoices[C][number]]: readonly Line[] };
 };
 
 const cut = (d: string): Line => ({ look: 'cut', d });
@@ -38,6 +38,11 @@ const offShoulder = 'M20 22C24 18 28 19 30 21C30 30 28 34 28 42L20 42';
 
 /** The back from waist to hip, near to. */
 const back = 'M20 10C26 9 30 8 33 7C33 18 29 20 29 26C29 34 34 36 34 46L20 46';
+
+/** The front of a bodice block, its bust dart closed, and the bust point in it. */
+const blockFront = once(cut('M8 10C11 10 14 8 15 4L26 7C24 12 25 18 31 21L29 42H8Z'));
+const dart = (mouth: string, back: string): Line => once(thin(`M${mouth}L18 24L${back}`));
+const shoulderDart = dart('18.6 5', '22 6');
 
 export const choiceDrawings: Drawings = {
   topLine: {
@@ -134,5 +139,27 @@ export const choiceDrawings: Drawings = {
       once(thin('M10 24H30M10 24L13.5 21.5M10 24L13.5 26.5M30 24L26.5 21.5M30 24L26.5 26.5')),
       once(hair('M11 8V40M17 8V18M17 30V40M23 8V18M23 30V40M29 8V40')),
     ],
+  },
+  garment: {
+    gown: [cut(trumpet)],
+    'bodice-block': [blockFront, shoulderDart, dart('16 42', '20 42')],
+    'skirt-block': [
+      once(cut('M9 9C15 9 21 8.4 26 6C29 12 31 18 31 26V46H9Z')),
+      once(thin('M18.6 8.6L20 19L21.8 8')),
+    ],
+  },
+  bustDart: {
+    shoulder: [blockFront, shoulderDart],
+    armhole: [blockFront, dart('25 14.5', '26.4 18')],
+    side: [blockFront, dart('30.5 27', '30 31')],
+    waist: [blockFront, dart('14.5 42', '21.5 42')],
+    neck: [blockFront, dart('11 9.8', '13.4 8')],
+    topLine: [blockFront, dart('16.4 4.4', '19.6 5.2'), once(hair('M8 17H24.4'))],
+  },
+  bustDartRule: {
+    cup: [blockFront, shoulderDart, once(hair('M18 24C14 22 12 28 15 31C18 33 24 32 25 28'))],
+    shoulderTable: [blockFront, shoulderDart, once(hair('M18.6 2.5L22 3.5'))],
+    proportional: [blockFront, shoulderDart, once(hair('M8 24H30.6'))],
+    lengths: [blockFront, shoulderDart, once(hair('M15 4L18 24V42M34 7V42'))],
   },
 };

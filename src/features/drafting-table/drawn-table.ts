@@ -1,17 +1,16 @@
 import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
 import { checkMeasure } from '#shared/body/check-card.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
-import { draftGown } from '#shared/engine/draft-gown.ts';
-import type { Draft, DraftInputs } from '#shared/engine/draft.ts';
+import { draftAny, type Drafted, type DraftedInputs } from '#shared/engine/drafted.ts';
 import type { Problem } from '#shared/units/problem.ts';
 
 import { fieldKeys } from './fields.ts';
 import { applies } from './style-choices.ts';
-import { cardOf, hasCoreMeasures, rulesOf, styleOf, type Choices } from './table-inputs.ts';
+import { cardOf, hasCoreMeasures, inputsOf, type Choices } from './table-inputs.ts';
 
 /** What lies on the table: the last draft that could be drawn, and what stands in the way of the next. */
 export type Drawn = {
-  readonly draft?: Draft;
+  readonly draft?: Drafted;
   /** Whether the draft is that of the figures now in the fields. */
   readonly fresh: boolean;
   readonly problems: readonly Problem[];
@@ -35,7 +34,7 @@ export function drawn(choices: Choices, last: Drawn): Drawn {
   const card = cardOf(choices);
   if (!hasCoreMeasures(card)) return stale(measures.flatMap((key) => checkMeasure(key, card[key])));
   try {
-    const draft = draftGown({ card, style: styleOf(choices), rules: rulesOf(choices) });
+    const draft = draftAny(inputsOf(choices, card));
     return { draft, fresh: true, problems: draft.warnings };
   } catch (error) {
     if (error instanceof DraftingError) return stale(error.problems);
@@ -44,9 +43,9 @@ export function drawn(choices: Choices, last: Drawn): Drawn {
 }
 
 /** What lay on the table last, drawn anew from the inputs it was drawn from; nothing where it no longer can be. */
-export function lastDrawing(inputs: DraftInputs): Drawn {
+export function lastDrawing(inputs: DraftedInputs): Drawn {
   try {
-    return { draft: draftGown(inputs), fresh: false, problems: [] };
+    return { draft: draftAny(inputs), fresh: false, problems: [] };
   } catch (error) {
     if (error instanceof DraftingError) return nothingDrawn;
     throw error;

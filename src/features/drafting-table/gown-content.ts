@@ -15,7 +15,7 @@ import {
   type FieldKey,
 } from './fields.ts';
 import { applies, choicesFrom } from './style-choices.ts';
-import { cardOf, givenFor, rulesOf, styleOf, type Choices } from './table-inputs.ts';
+import { cardOf, givenFor, inputsOf, type Choices } from './table-inputs.ts';
 
 /** The key the name of a card goes under in the letters typed. */
 const nameKey = 'card.name';
@@ -38,7 +38,7 @@ export function contentOf(choices: Choices, unit: Unit): GownContent {
       const entry = choices.entries[field];
       return entry !== undefined && 'unread' in entry && applies(field, choices);
     }),
-    inputs: { card: cardOf(choices), style: styleOf(choices), rules: rulesOf(choices) },
+    inputs: inputsOf(choices, cardOf(choices)),
   };
 }
 
@@ -69,7 +69,9 @@ export function choicesOf({ typed, inputs }: GownContent): {
       date: card.date,
       overruled: card.overruled ?? [],
       rules: begunWith(rules, (rule) => rule in fields),
-      ...choicesFrom((choice) => style[choice]),
+      ...choicesFrom((choice): unknown =>
+        choice === 'garment' ? inputs.garment : Reflect.get(style, choice),
+      ),
       entries: Object.fromEntries(entries),
     },
   };

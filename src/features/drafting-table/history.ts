@@ -1,8 +1,8 @@
 import type { Unit } from '#shared/units/said.ts';
 
+import { isRecord } from './is-record.ts';
 import {
   differingParts,
-  isRecord,
   keptParts,
   partOf,
   samePart,

@@ -1,10 +1,11 @@
 import { houseRuleFigures } from '#shared/drafting/house-rule-figures.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
+import { garmentTitles } from '#shared/exports/garment-titles.ts';
 import { formatWithUnit } from '#shared/units/format-length.ts';
 
 import { cardFields, kindOf, marked, styleFields, valueOf, type FieldKey } from './fields.ts';
 import { partLabel, partWords } from './part-words.ts';
-import { applies, styleChoiceKeys } from './style-choices.ts';
+import { applies, tableChoiceKeys } from './style-choices.ts';
 import { givenFor, rulesOf } from './table-inputs.ts';
 import type { TableState } from './table-state.ts';
 
@@ -15,7 +16,8 @@ const same = 0.01;
  * While the last good draft stands, what it was drawn with wherever the fields now say something else:
  * `Waist: prints with 28 1⁄2 in, the last good figure`.
  */
-export function lastGoodFigures(state: TableState, draft: Draft): readonly string[] {
+export function lastGoodFigures(state: TableState, draft: Drafted): readonly string[] {
+  if (draft.garment !== state.garment) return [`${garmentTitles[draft.garment]}, as last drawn`];
   const { card, style, rules } = draft.inputs;
   const figures = [...cardFields, ...styleFields].flatMap((field) => {
     const was = givenFor(field, card, style);
@@ -26,9 +28,9 @@ export function lastGoodFigures(state: TableState, draft: Draft): readonly strin
       `${partLabel(field)}: prints ${was === undefined ? 'as left open' : `with ${worded(field, was, state)}`}, the last good figure`,
     ];
   });
-  const choices = styleChoiceKeys.flatMap((key) => {
-    const was = draft.style[key];
-    if (was === state[key]) return [];
+  const choices = tableChoiceKeys.flatMap((key) => {
+    const was: unknown = Reflect.get(draft.style, key);
+    if (typeof was !== 'string' || was === state[key]) return [];
     return [`${partLabel(key)}: prints ${partWords(key, was, state.unit)}, the last that held`];
   });
   const now = rulesOf(state);

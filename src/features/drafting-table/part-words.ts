@@ -3,15 +3,18 @@ import { measureGuide } from '#shared/body/measure-guide.ts';
 import { houseRuleFigures } from '#shared/drafting/house-rule-figures.ts';
 import type { HouseRulePreset } from '#shared/drafting/house-rule-presets.ts';
 import { intakeFigures } from '#shared/drafting/intake-figures.ts';
-import { choiceWords, type OptionWords } from '#shared/drafts/gown/choice-words.ts';
+import { bodiceBlockLengths } from '#shared/drafts/bodice-block/style-card.ts';
+import type { OptionWords } from '#shared/drafts/gown/choice-words.ts';
 import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
 import { styleKeys } from '#shared/drafts/gown/style-limits.ts';
+import { skirtLengthWords } from '#shared/drafts/skirt-block/style-card.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { rewritten, type FieldKey } from './fields.ts';
 import type { Change } from './history.ts';
 import { partKeys, readRules, type Part, type PartKey } from './parts.ts';
-import { styleChoiceKeys } from './style-choices.ts';
+import { tableChoiceKeys } from './style-choices.ts';
+import { tableChoiceWords } from './table-choice-words.ts';
 import { presetOf } from './table-inputs.ts';
 
 const cardWords = {
@@ -23,11 +26,17 @@ const cardWords = {
 
 const words = new Map<string, string>([
   ...Object.entries(cardWords),
-  ...styleChoiceKeys.map((choice) => [choice, choiceWords[choice].label] as const),
+  ...tableChoiceKeys.map((choice) => [choice, tableChoiceWords[choice].label] as const),
   ...[...coreMeasures, ...furtherMeasures].map(
     (key) => [`card.${key}`, measureGuide[key].label] as const,
   ),
   ...styleKeys.map((key) => [`style.${key}`, styleLabels[key]] as const),
+  ...(['armholeDrop', 'shoulderEase'] as const).map(
+    (key) => [`style.${key}`, bodiceBlockLengths[key].label] as const,
+  ),
+  ...(['seat', 'length'] as const).map(
+    (key) => [`style.${key}`, skirtLengthWords[key].label] as const,
+  ),
   ...houseRuleFigures.map(({ key, label }) => [`rules.${key}`, label] as const),
   ...intakeFigures.map(({ place, label }) => [`rules.intakes.${place}`, label] as const),
 ]);
@@ -58,15 +67,15 @@ export const presetWords: { readonly [P in HouseRulePreset]: string } = {
 };
 
 const options = new Map(
-  styleChoiceKeys.map((choice) => [
+  tableChoiceKeys.map((choice) => [
     choice,
-    new Map(Object.entries<OptionWords>(choiceWords[choice].options)),
+    new Map(Object.entries<OptionWords>(tableChoiceWords[choice].options)),
   ]),
 );
 
 /** A choice's option as the style card calls it. */
 const optionWord = (key: PartKey, option: string): string =>
-  styleChoiceKeys
+  tableChoiceKeys
     .filter((choice) => choice === key)
     .map((choice) => options.get(choice)?.get(option)?.word)[0] ?? option;
 

@@ -56,7 +56,7 @@ function boundsOf(field: FieldKey, { drawn: { draft } }: Told): Bounds | undefin
     return measureGuide[measure].kind === 'length' ? measureGuide[measure] : undefined;
   }
   const style = styleKeys.find((key) => field === `style.${key}`);
-  if (draft === undefined || style === undefined || isPlainNumber(style)) return undefined;
+  if (draft?.garment !== 'gown' || style === undefined || isPlainNumber(style)) return undefined;
   const limits = styleLimits(draft.body, draft.bodyLevels, draft.inputs.style);
   return { label: styleLabels[style], ...limits[style] };
 }

@@ -3,7 +3,7 @@ import { queryOptions } from '@tanstack/react-query';
 import { printChalkSheet, printPieces, printTiles } from '#shared/api/drafts.ts';
 import type { Sent } from '#shared/api/endpoint.ts';
 import { listSamples } from '#shared/api/samples.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import type { Unit } from '#shared/units/said.ts';
 import type { PaperName } from '#shared/sheets/papers.ts';
 
@@ -19,7 +19,7 @@ export type PrintKind = 'chalk-sheet' | 'bodice-toile' | 'whole-gown' | 'pieces.
 
 export type PrintOrder = {
   readonly kind: PrintKind;
-  readonly draft: Draft;
+  readonly draft: Drafted;
   readonly unit: Unit;
   readonly paper: PaperName;
 };
@@ -28,8 +28,7 @@ export type PrintOrder = {
 export function fetchPrint(order: PrintOrder, signal: AbortSignal): Promise<SentFile> {
   const { kind, draft, unit, paper } = order;
   const pieces = kind === 'bodice-toile' ? 'bodice-toile' : 'whole-gown';
-  const { card, style, rules } = draft.inputs;
-  const request: Sent<typeof printTiles> = { card, style, rules, unit, paper, pieces };
+  const request: Sent<typeof printTiles> = { ...draft.inputs, unit, paper, pieces };
   const endpoint =
     kind === 'chalk-sheet' ? printChalkSheet : kind === 'pieces.svg' ? printPieces : printTiles;
   return callForFile(endpoint, request, signal);

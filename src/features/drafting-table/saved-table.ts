@@ -4,8 +4,9 @@ import type { Unit } from '#shared/units/said.ts';
 import { browserStorage } from '../../lib/browser-storage.ts';
 import { fieldKeys, readEntry, writeValue, type Entries, type FieldKey } from './fields.ts';
 import { keptHistory, noHistory, type History } from './history.ts';
-import { isRecord, readOverruled, readRules } from './parts.ts';
-import { choicesFrom, styleChoiceKeys } from './style-choices.ts';
+import { isRecord } from './is-record.ts';
+import { readOverruled, readRules } from './parts.ts';
+import { choicesFrom, tableChoiceKeys } from './style-choices.ts';
 import { emptyTable, redrawn, type TableState } from './table-state.ts';
 
 const key = 'ellwand.table';
@@ -35,7 +36,7 @@ export function keepTable(
   storage: Storage | undefined = browserStorage('local'),
 ): boolean {
   const { unit, name, date, overruled, rules, entries } = state;
-  const made = Object.fromEntries(styleChoiceKeys.map((choice) => [choice, state[choice]]));
+  const made = Object.fromEntries(tableChoiceKeys.map((choice) => [choice, state[choice]]));
   try {
     if (storage === undefined) return false;
     storage.setItem(

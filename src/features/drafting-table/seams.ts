@@ -1,5 +1,5 @@
 import type { EdgeRef } from '#shared/drafting/piece.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import type { SeamRow } from '#shared/proof/proof.ts';
 import { formatLength } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
@@ -14,7 +14,7 @@ export type LitSeam = {
 const same = (a: EdgeRef, b: EdgeRef): boolean => a.piece === b.piece && a.edge === b.edge;
 
 /** The seam in trade words: `Princess seam`, `Side seam`; a stretch of one by where it lies: `Waist seam, at the side`. */
-export function seamWord({ first, second }: SeamRow, draft: Draft): string {
+export function seamWord({ first, second }: SeamRow, draft: Drafted): string {
   const [, seam = first.edge, letter] = stretch.exec(first.edge) ?? [];
   const name = `${seam === 'centre' ? 'centre back' : seam.replaceAll('-', ' ')} seam`;
   const places = Math.max(...[first, second].map((each) => stretchesOf(each.piece, seam, draft)));
@@ -25,7 +25,7 @@ export function seamWord({ first, second }: SeamRow, draft: Draft): string {
 /** A seam parted by darts or gores is lettered from the centre line out. */
 const stretch = /^(.*)-([a-z])$/;
 
-const stretchesOf = (piece: string, seam: string, draft: Draft): number =>
+const stretchesOf = (piece: string, seam: string, draft: Drafted): number =>
   draft.pieces
     .find(({ name }) => name === piece)
     ?.edges.filter((edge) => edge.open !== true && stretch.exec(edge.name)?.[1] === seam).length ??
@@ -41,7 +41,7 @@ function placeWords(letter: string, places: number): string {
 }
 
 /** The pieces a seam joins, as the maker reads them. */
-export function seamPieces({ first, second }: SeamRow, draft: Draft): string {
+export function seamPieces({ first, second }: SeamRow, draft: Drafted): string {
   const titles = [first, second].map(
     ({ piece }) => draft.pieces.find((each) => each.name === piece)?.title ?? piece,
   );
@@ -49,13 +49,17 @@ export function seamPieces({ first, second }: SeamRow, draft: Draft): string {
 }
 
 /** Place of the seam an edge belongs to among the seams walked; -1 where the edge is sewn to no other. */
-export const seamIndex = (draft: Draft, edge: EdgeRef | undefined): number =>
+export const seamIndex = (draft: Drafted, edge: EdgeRef | undefined): number =>
   edge === undefined
     ? -1
     : draft.proof.seams.findIndex(({ first, second }) => same(first, edge) || same(second, edge));
 
 /** The seam an edge belongs to with both lengths; an edge sewn to no other has none. */
-export function litSeam(draft: Draft, edge: EdgeRef | undefined, unit: Unit): LitSeam | undefined {
+export function litSeam(
+  draft: Drafted,
+  edge: EdgeRef | undefined,
+  unit: Unit,
+): LitSeam | undefined {
   const row = draft.proof.seams[seamIndex(draft, edge)];
   if (row === undefined) return undefined;
   const titleOf = (name: string) => draft.pieces.find((each) => each.name === name)?.title ?? name;

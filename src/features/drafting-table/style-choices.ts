@@ -1,10 +1,6 @@
 import { bustDartRules, dartPlaces } from '#shared/drafts/bodice-block/style-card.ts';
 import type { HouseRules } from '#shared/drafting/house-rules.ts';
-import {
-  isOffShoulder,
-  styleChoices,
-  type StyleLength,
-} from '#shared/drafts/gown/style-card.ts';
+import { isOffShoulder, styleChoices, type StyleLength } from '#shared/drafts/gown/style-card.ts';
 import { garments } from '#shared/engine/drafted.ts';
 
 import { fieldsOf, intakeFields, styleFields, type FieldKey } from './fields.ts';

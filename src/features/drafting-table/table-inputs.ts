@@ -75,7 +75,7 @@ export function styleOf(choices: Choices): StyleCard {
 }
 
 /** What the fields ask to be drafted for a body. */
-export function inputsOf(choices: Choices, card: MeasureCard): DraftedInputs {
+export function inputsOf<Card extends PartCard>(choices: Choices, card: Card) {
   const rules = rulesOf(choices);
   const { garment, bustDart, bustDartRule, entries } = choices;
   const waist = valueOf(entries['style.ease.waist']);

@@ -141,6 +141,6 @@ function withGown({ unit }: TableState, { card, style, rules }: LaidGown): Table
     date: card.date,
     overruled: card.overruled ?? [],
     rules,
-    ...choicesFrom((choice) => style[choice]),
+    ...choicesFrom((choice): unknown => Reflect.get(style, choice)),
   };
 }

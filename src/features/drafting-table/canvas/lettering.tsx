@@ -1,4 +1,4 @@
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import { levelTitles } from '#shared/exports/level-titles.ts';
 
 import { rodWidth } from '../../../ui/rod.tsx';
@@ -7,7 +7,7 @@ import { pieceLabels, type PieceLabel } from './piece-labels.ts';
 import { toScreen, type Size, type View } from './view.ts';
 
 type LetteringProps = {
-  readonly draft: Draft;
+  readonly draft: Drafted;
   readonly layout: Layout;
   readonly view: View;
   readonly size: Size;
@@ -83,7 +83,7 @@ const PieceName = ({ label }: { label: PieceLabel }) => {
 };
 
 /** The first line of the proof that fails on a piece, so that it stands beside the piece and not only in the table. */
-function faultOn(draft: Draft, piece: string): string | undefined {
+function faultOn(draft: Drafted, piece: string): string | undefined {
   const failing = draft.proof.lines.find((line) =>
     line.findings.some((each) => !each.holds && each.where.some((at) => at.piece === piece)),
   );

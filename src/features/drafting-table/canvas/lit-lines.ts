@@ -1,6 +1,6 @@
 import type { LevelName } from '#shared/drafting/piece.ts';
 import type { Step } from '#shared/drafting/step.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import { line, type Path } from '#shared/geometry/path.ts';
 import type { Finding } from '#shared/proof/proof.ts';
 import type { Point } from '#shared/geometry/point.ts';
@@ -15,7 +15,7 @@ export const framesOf = (step: Step, layout: Layout): readonly Point[] =>
 
 /** What stands out on the drawing now. */
 export function litLines(
-  draft: Draft,
+  draft: Drafted,
   layout: Layout,
   seam: LitSeam | undefined,
   step: Step | undefined,

@@ -3,7 +3,7 @@ import { useEffect, useMemo, useState } from 'react';
 import { add, point, type Point } from '#shared/geometry/point.ts';
 
 import { browserStorage } from '../../../lib/browser-storage.ts';
-import { isRecord } from '../parts.ts';
+import { isRecord } from '../is-record.ts';
 import type { Layout } from './layout.ts';
 import { shifted, type Shifts } from './moved-pieces.ts';
 

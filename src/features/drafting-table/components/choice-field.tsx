@@ -1,16 +1,16 @@
 import { memo, useId, useState, type Dispatch } from 'react';
 
-import { choiceWords, type OptionWords } from '#shared/drafts/gown/choice-words.ts';
-import type { StyleChoice } from '#shared/drafts/gown/style-card.ts';
+import type { OptionWords } from '#shared/drafts/gown/choice-words.ts';
 
 import { choiceDrawings, type Line, type Look } from '../choice-drawings.ts';
-import { choiceMade } from '../style-choices.ts';
+import { choiceMade, type TableChoice } from '../style-choices.ts';
+import { tableChoiceWords } from '../table-choice-words.ts';
 import type { TableAction } from '../table-state.ts';
 
 type ChoiceFieldProps = {
-  readonly choice: StyleChoice;
+  readonly choice: TableChoice;
   readonly value: string;
-  /** Why the gown cannot be drawn as it is chosen here. */
+  /** Why it cannot be drawn as it is chosen here. */
   readonly fault?: string | undefined;
   readonly dispatch: Dispatch<TableAction>;
 };
@@ -20,8 +20,8 @@ export const ChoiceField = memo(function ChoiceField(props: ChoiceFieldProps) {
   const { choice, value, fault, dispatch } = props;
   const id = useId();
   const [looked, setLooked] = useState<string>();
-  const { label } = choiceWords[choice];
-  const options = Object.entries<OptionWords>(choiceWords[choice].options);
+  const { label } = tableChoiceWords[choice];
+  const options = Object.entries<OptionWords>(tableChoiceWords[choice].options);
   const drawings = new Map(Object.entries<readonly Line[]>(choiceDrawings[choice]));
   const told = options.find(([option]) => option === (looked ?? value))?.[1];
   return (

@@ -1,7 +1,7 @@
 import { memo, useMemo, useRef, useState, type Dispatch } from 'react';
 
 import type { Handle } from '#shared/drafting/construction.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import { scale, type Point } from '#shared/geometry/point.ts';
 
 import { useSize } from '../../../lib/use-size.ts';
@@ -32,7 +32,7 @@ import { SeamCallout } from './seam-callout.tsx';
 import { TableTools, type Tool } from './table-tools.tsx';
 
 type DrawingProps = {
-  readonly draft: Draft;
+  readonly draft: Drafted;
   readonly state: TableState;
   readonly place: string;
   readonly dispatch: Dispatch<BenchAction>;
@@ -132,7 +132,7 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
   }[tool];
 
   const hold = (handle: Handle['key']) => {
-    if (frame.current === null) return;
+    if (frame.current === null || draft.garment !== 'gown') return;
     drag.hold({
       inputs: draft.inputs,
       key: handle,
@@ -202,7 +202,7 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
         <svg className="pointer-events-none absolute inset-0 h-full w-full">
           <Lettering draft={draft} layout={layout} view={view} size={size} named={!drafting} />
           {step !== undefined && <StepPoints step={step} layout={layout} view={view} />}
-          {tool === 'look' && !drafting && (
+          {tool === 'look' && !drafting && draft.garment === 'gown' && (
             <Handles
               draft={draft}
               layout={layout}
@@ -261,7 +261,7 @@ export const Drawing = memo(function Drawing(props: DrawingProps) {
   );
 });
 
-const titleOf = (draft: Draft, piece: string | undefined): string =>
+const titleOf = (draft: Drafted, piece: string | undefined): string =>
   draft.pieces.find(({ name }) => name === piece)?.title ?? '';
 
 /** Where the tape is held and what it reads, for who does not see it. */

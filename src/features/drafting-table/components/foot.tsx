@@ -1,6 +1,6 @@
 import { memo, type Dispatch } from 'react';
 
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import { coreMeasures } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
 import { speak } from '#shared/units/speak.ts';
@@ -11,7 +11,7 @@ import type { TableAction, TableState } from '../table-state.ts';
 import { useNearest } from '../use-nearest.ts';
 
 type FootProps = {
-  readonly draft: Draft;
+  readonly draft: Drafted;
   readonly state: TableState;
   readonly dispatch: Dispatch<TableAction>;
 };
@@ -46,11 +46,13 @@ export const Foot = memo(function Foot({ draft, state, dispatch }: FootProps) {
           .map((problem) => (
             <p key={`${problem.field} ${problem.code}`}>{speak(problem.said, unit)}</p>
           ))}
-      <p
-        className={`${draft.walking.caution ? '' : 'text-slate'} ${drawn.fresh ? '' : 'max-sm:hidden'}`}
-      >
-        {speak(draft.walking.said, unit)}
-      </p>
+      {'walking' in draft && (
+        <p
+          className={`${draft.walking.caution ? '' : 'text-slate'} ${drawn.fresh ? '' : 'max-sm:hidden'}`}
+        >
+          {speak(draft.walking.said, unit)}
+        </p>
+      )}
     </div>
   );
 });

@@ -1,13 +1,13 @@
 import { memo } from 'react';
 
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import { cuttingCautions } from '#shared/exports/cautions.ts';
 import { formatLength } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { asDrafted } from '../canvas/layout.ts';
 
-type PiecesPanelProps = { readonly draft: Draft; readonly unit: Unit };
+type PiecesPanelProps = { readonly draft: Drafted; readonly unit: Unit };
 
 /** The pieces in words and figures: what the drawing shows, for those who do not see it. */
 export const PiecesPanel = memo(function PiecesPanel({ draft, unit }: PiecesPanelProps) {
@@ -37,7 +37,7 @@ export const PiecesPanel = memo(function PiecesPanel({ draft, unit }: PiecesPane
   );
 });
 
-function joins(piece: Draft['pieces'][number], draft: Draft): string[] {
+function joins(piece: Drafted['pieces'][number], draft: Drafted): string[] {
   const partners = piece.edges.flatMap(({ joins: to }) =>
     to === undefined ? [] : to === 'self' ? [piece.name] : [to.piece],
   );

@@ -1,7 +1,8 @@
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
 
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
+import { garmentTitles } from '#shared/exports/garment-titles.ts';
 import { presetOrder } from '#shared/sheets/print-order.ts';
 import type { PaperName } from '#shared/sheets/papers.ts';
 
@@ -15,7 +16,7 @@ import { FilesToKeep } from './files-to-keep.tsx';
 import { countedSheets, PrintRow } from './print-row.tsx';
 
 type PrintDialogProps = {
-  readonly draft: Draft;
+  readonly draft: Drafted;
   readonly state: TableState;
   readonly open: boolean;
   readonly onClose: () => void;
@@ -70,18 +71,29 @@ const PrintChoices = ({ draft, state }: Omit<PrintDialogProps, 'open' | 'onClose
           sheets={countedSheets(1)}
           order={{ ...order, kind: 'chalk-sheet' }}
         />
-        <PrintRow
-          title="Bodice toile"
-          note="The top at true scale, to try on in calico first."
-          sheets={sheetsIn(toile.planning)}
-          order={{ ...order, kind: 'bodice-toile' }}
-        />
-        <PrintRow
-          title="Whole gown"
-          note="Every piece at true scale, to glue together."
-          sheets={sheetsIn(gown.planning)}
-          order={{ ...order, kind: 'whole-gown' }}
-        />
+        {draft.garment === 'gown' ? (
+          <>
+            <PrintRow
+              title="Bodice toile"
+              note="The top at true scale, to try on in calico first."
+              sheets={sheetsIn(toile.planning)}
+              order={{ ...order, kind: 'bodice-toile' }}
+            />
+            <PrintRow
+              title="Whole gown"
+              note="Every piece at true scale, to glue together."
+              sheets={sheetsIn(gown.planning)}
+              order={{ ...order, kind: 'whole-gown' }}
+            />
+          </>
+        ) : (
+          <PrintRow
+            title={garmentTitles[draft.garment]}
+            note="Front and back at true scale, to glue together."
+            sheets={sheetsIn(gown.planning)}
+            order={{ ...order, kind: 'whole-gown' }}
+          />
+        )}
       </div>
       <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1 border-b border-rule py-3 sm:flex-nowrap">
         <p className="basis-full text-sm text-slate sm:basis-auto">

@@ -1,7 +1,7 @@
 import { memo, type Dispatch } from 'react';
 
 import type { EdgeRef } from '#shared/drafting/piece.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import type { SeamRow } from '#shared/proof/proof.ts';
 import { formatLength } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
@@ -13,7 +13,7 @@ import { GirthAudit } from './girth-audit.tsx';
 import { ProofCheck } from './proof-check.tsx';
 
 type ProofPanelProps = {
-  readonly draft: Draft;
+  readonly draft: Drafted;
   /** Whether the draft is that of the figures now in the fields. */
   readonly fresh: boolean;
   /** The edge whose seam is lit. */

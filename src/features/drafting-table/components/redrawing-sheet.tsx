@@ -1,6 +1,5 @@
 import type { Gown } from '#shared/api/gowns.ts';
-import { draftGown } from '#shared/engine/draft-gown.ts';
-import type { Draft } from '#shared/engine/draft.ts';
+import { draftAny, type Drafted } from '#shared/engine/drafted.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
 import { speak } from '#shared/units/speak.ts';
 
@@ -60,9 +59,9 @@ export const RedrawingSheet = ({ gown, onRedraw, onLeave }: RedrawingSheetProps)
   );
 };
 
-function drawnToday(inputs: NonNullable<Gown['drawn']>['inputs']): Draft | undefined {
+function drawnToday(inputs: NonNullable<Gown['drawn']>['inputs']): Drafted | undefined {
   try {
-    return draftGown(inputs);
+    return draftAny(inputs);
   } catch (error) {
     if (error instanceof DraftingError) return undefined;
     throw error;

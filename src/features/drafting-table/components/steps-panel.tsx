@@ -1,14 +1,14 @@
 import { memo, type Dispatch } from 'react';
 import { Link } from 'react-router-dom';
 
-import type { Draft } from '#shared/engine/draft.ts';
+import type { Drafted } from '#shared/engine/drafted.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 
 import type { TableAction } from '../table-state.ts';
 
 type StepsPanelProps = {
-  readonly draft: Draft;
+  readonly draft: Drafted;
   readonly chosen: string | undefined;
   readonly unit: Unit;
   readonly dispatch: Dispatch<TableAction>;

@@ -6,6 +6,7 @@ import { styleHints, styleLabels } from '#shared/drafts/gown/style-labels.ts';
 import { messageFor } from '../problem-words.ts';
 import { applies } from '../style-choices.ts';
 import type { TableAction, TableState } from '../table-state.ts';
+import { BlockStyle } from './block-style.tsx';
 import { ChoiceField } from './choice-field.tsx';
 import { FigureField, fieldProps } from './figure-field.tsx';
 import { FlareFraction } from './flare-fraction.tsx';
@@ -54,7 +55,8 @@ const parts: readonly { readonly title: string; readonly items: readonly Item[] 
 
 /** What the gown shall be; a figure left open takes the default that stands there in grey. */
 export const StyleCard = memo(function StyleCard({ state, dispatch }: StyleCardProps) {
-  const style = state.drawn.draft?.style;
+  const draft = state.drawn.draft;
+  const style = draft?.garment === 'gown' ? draft.style : undefined;
   const figure = (key: StyleLength) =>
     key === 'flareFraction' ? (
       <FlareFraction
@@ -84,6 +86,27 @@ export const StyleCard = memo(function StyleCard({ state, dispatch }: StyleCardP
       />
     );
   };
+  const gownParts = () => (
+    <>
+      {parts.map(({ title, items }) => (
+        <div key={title} className="pt-3">
+          <h3 className="font-semibold">{title}</h3>
+          {items.map(item)}
+        </div>
+      ))}
+      <h3 className="pt-4 font-semibold">Ease</h3>
+      {easeLevels.map((level) => (
+        <FigureField
+          key={level}
+          {...fieldProps(`style.ease.${level}`, state)}
+          label={styleLabels[`ease.${level}`]}
+          hint={styleHints[`ease.${level}`]}
+          open={style?.ease[level]}
+          dispatch={dispatch}
+        />
+      ))}
+    </>
+  );
   return (
     <section aria-labelledby="style-card">
       <h2 id="style-card" className="heading">
@@ -91,23 +114,8 @@ export const StyleCard = memo(function StyleCard({ state, dispatch }: StyleCardP
       </h2>
       <p className="pt-1 text-sm text-slate">Grey figures are the defaults for this body.</p>
       <form onSubmit={(event) => event.preventDefault()}>
-        {parts.map(({ title, items }) => (
-          <div key={title} className="pt-3">
-            <h3 className="font-semibold">{title}</h3>
-            {items.map(item)}
-          </div>
-        ))}
-        <h3 className="pt-4 font-semibold">Ease</h3>
-        {easeLevels.map((level) => (
-          <FigureField
-            key={level}
-            {...fieldProps(`style.ease.${level}`, state)}
-            label={styleLabels[`ease.${level}`]}
-            hint={styleHints[`ease.${level}`]}
-            open={style?.ease[level]}
-            dispatch={dispatch}
-          />
-        ))}
+        <ChoiceField choice="garment" value={state.garment} dispatch={dispatch} />
+        {state.garment === 'gown' ? gownParts() : <BlockStyle state={state} dispatch={dispatch} />}
         <HouseRulesPanel state={state} dispatch={dispatch} />
       </form>
     </section>

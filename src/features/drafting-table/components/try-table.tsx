@@ -3,6 +3,7 @@ import { useReducer, useRef, useState } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 
 import { createGown } from '#shared/api/gowns.ts';
+import { garmentTitles } from '#shared/exports/garment-titles.ts';
 
 import { call } from '../../../lib/call.ts';
 import { newId } from '../../../lib/new-id.ts';
@@ -52,7 +53,9 @@ export const TryTable = () => {
       heading={
         <>
           <p className="min-w-0 truncate">
-            {table.name === '' ? 'A gown to try' : `${table.name} · gown`}
+            {table.name === ''
+              ? `A ${garmentTitles[table.garment].toLowerCase()} to try`
+              : `${table.name} · ${garmentTitles[table.garment].toLowerCase()}`}
           </p>
           <p
             className={`hidden shrink-0 text-sm sm:block ${kept ? 'text-verdigris' : 'text-madder'}`}

@@ -79,7 +79,7 @@ describe('typing on the drafting table', () => {
       value: 800.1,
     });
     expect(moved.entries['style.kneeFinished']).toEqual({ text: '31\u00a01⁄2', value: 800.1 });
-    expect(moved.drawn.draft?.style.kneeFinished).toBe(800.1);
+    expect(moved.drawn.draft?.style).toMatchObject({ kneeFinished: 800.1 });
   });
 
   test('an emptied style figure takes its default again', () => {
