@@ -107,6 +107,10 @@ function outerEnds(
   );
 }
 
+/** Whether one of two pieces is laid on the other, as a facing is: their edges then run alike. */
+const isLaidOn = (one: Piece, other: Piece): boolean =>
+  (one.part === 'inner') !== (other.part === 'inner');
+
 /**
  * Each seam between two different edges once. Pieces of one side lie beside each other as they are
  * sewn, so their edges, both clockwise, run against each other; a front and a back lie mirrored, so
@@ -121,8 +125,10 @@ export function joinedPairs(placed: Placed): readonly JoinedPair[] {
     const second = placed.get(keyOf(joins));
     if (second === undefined || second === first) continue;
     taken.add(first).add(second);
-    const opposite = first.piece.side === second.piece.side;
-    pairs.push({ first, second, opposite, outerEnds: outerEnds(first, second, opposite, placed) });
+    const laidOn = isLaidOn(first.piece, second.piece);
+    const opposite = first.piece.side === second.piece.side && !laidOn;
+    const ends = laidOn ? [] : outerEnds(first, second, opposite, placed);
+    pairs.push({ first, second, opposite, outerEnds: ends });
   }
   return pairs;
 }

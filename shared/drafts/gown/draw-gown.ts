@@ -14,6 +14,7 @@ import { closeGown } from './closure.ts';
 import { backEdgeIsHigh, drawTop } from './draw-top.ts';
 import { gownHandles } from './handles.ts';
 import type { Half } from './half.ts';
+import { fitOut } from './inner.ts';
 import { middlePiece } from './middle.ts';
 import { narrateHalf, warnOfShift } from './narrate-halves.ts';
 import { type PairInputs, type PairedHalves, pairHalves } from './pair-halves.ts';
@@ -107,7 +108,7 @@ export function drawGown(
   const closed = closeGown(table, pieces, { body, levels: bodyLevels, pair, style });
   const walked = walking(table.part('Flare', 'flare'), body, bodyLevels, knee, style);
   return {
-    pieces: closed.pieces,
+    pieces: fitOut(table, closed.pieces, { body, levels: bodyLevels, style }),
     levels: {
       chest: bodyLevels.underarm,
       bust: bodyLevels.bust,
