@@ -16,8 +16,12 @@ export const taken = (name: string, key: string, value: number, estimated: boole
   measures: [key],
 });
 
-/** An amount that would read as nothing is added in silence, mm. */
-const leastSaid = 0.5;
+/** Less reads as nothing in either unit, mm: such an amount is added in silence. */
+export const leastSaid = 0.5;
+
+/** An amount for a sentence, mm; the word where there is none to speak of. */
+export const amount = (value: number, of: readonly string[] = []): Said =>
+  Math.abs(value) < leastSaid ? said`nothing` : said`${mm(value, of)}`;
 
 /** The same length with a named amount added; a taken-off amount is negative. */
 export const plus = (quantity: Quantity, name: string, amount: number): Quantity => ({

@@ -44,7 +44,8 @@ function onEveryDraft(
         if (draft) holds(draft, inputs);
       }
     }),
-    lawParameters(law, runs),
+    // A body that breaks a law is as good as the smallest one, and is found much sooner.
+    { ...lawParameters(law, runs), endOnFailure: true },
   );
 }
 
@@ -53,8 +54,9 @@ const partsOf = (step: Step, { body }: Drafted): readonly SpokenPart[] =>
 const numbersOf = (step: Step, draft: Drafted): readonly SpokenNumber[] =>
   partsOf(step, draft).filter((part) => typeof part !== 'string');
 
-/** Steps that speak of what is drawn already; every other one puts something on the paper. */
-const speaksOnly = (step: Step): boolean => step.part === 'Finishing' || step.title === 'Walking';
+/** A step at a half or at the levels puts something on the paper; others may speak of what is drawn already. */
+const draws = ({ side, part }: Step): boolean =>
+  side === 'front' || side === 'back' || part === 'Levels';
 
 describe('on any body in any style, every draft can be taught from', () => {
   test('no step is without a sentence, each has an address of its own, and each draws something', () => {
@@ -66,7 +68,7 @@ describe('on any body in any style, every draft can be taught from', () => {
           expect(speak(step.said, unit)).toMatch(/^[A-Z0-9].{18,}[.]$/su);
           if (step.why) expect(speak(step.why, unit)).toMatch(/^[A-Z].{18,}[.]$/su);
         }
-        if (speaksOnly(step)) continue;
+        if (!draws(step)) continue;
         const drew = step.lines.length + Object.keys(step.points).length;
         expect(drew, `${step.id} draws nothing`).toBeGreaterThan(0);
       }

@@ -3,6 +3,7 @@ import type { BodyLevels } from '../../body/levels.ts';
 import { dartOpening } from '../../drafting/dart-angle.ts';
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
 import type { Piece } from '../../drafting/piece.ts';
+import { amount, leastSaid } from '../../drafting/quantity.ts';
 import { pathLength } from '../../geometry/curve.ts';
 import { line } from '../../geometry/path.ts';
 import { type Point, distance } from '../../geometry/point.ts';
@@ -70,10 +71,13 @@ export function narrateHalf(
 function narrateSide(paper: PartTable, { plan, rules }: BodiceHalf): void {
   const { side, darts } = plan.intake;
   const path = sideOf(plan);
-  const way = side >= 0 ? 'in' : 'out';
+  const way =
+    Math.abs(side) < leastSaid
+      ? said`hangs straight`
+      : said`runs ${side > 0 ? 'in' : 'out'} by ${mm(Math.abs(side))}`;
   paper.draw(
     'Side seam',
-    said`Bust quarter ${mm(plan.figures.bust, ['bustGirth'])} less waist quarter ${mm(plan.figures.waist, ['waistGirth'])} is ${mm(plan.figures.bust - plan.figures.waist, ['bustGirth', 'waistGirth'])}: the side seam runs ${way} by ${mm(Math.abs(side))}, ${darts === 0 ? 'nothing is left for a dart' : said`waist darts take ${mm(darts)}`}. It is straight and ${mm(pathLength(path))} long.`,
+    said`Bust quarter ${mm(plan.figures.bust, ['bustGirth'])} less waist quarter ${mm(plan.figures.waist, ['waistGirth'])} is ${amount(plan.figures.bust - plan.figures.waist, ['bustGirth', 'waistGirth'])}: the side seam ${way}, ${darts === 0 ? 'nothing is left for a dart' : said`waist darts take ${mm(darts)}`}. It is straight and ${mm(pathLength(path))} long.`,
     {
       why: said`The side seam takes about ${Math.round(rules.sideShare * 100)} % of what goes out, alike in front and back, so that both sides fall together.`,
       points: { underarm: plan.underarm, 'side-waist': plan.waistEnd },
@@ -115,15 +119,19 @@ function narrateShoulder(
   { plan, shoulder }: BodiceHalf,
   own: Own,
 ): void {
-  const { neckGirth, shoulderLength, shoulderSlope } = body.measures;
+  const { neckGirth, shoulderLength, shoulderSlope, backWaistLength } = body.measures;
   const front = plan.side === 'front';
   const neck: Said = front
     ? said`A fifth of the neck girth ${mm(neckGirth)}${estimate(body, 'neckGirth')} less ${mm(2)} gives the depth ${mm(shoulder.centreNeck.y, ['neckGirth'])} at the centre front`
-    : said`A fifth of the neck girth ${mm(neckGirth)}${estimate(body, 'neckGirth')} less ${mm(2)} gives the width ${mm(shoulder.sideNeck.x, ['neckGirth'])}; the side neck lies a third of it above the nape`;
+    : said`Back waist length ${mm(backWaistLength)}${estimate(body, 'backWaistLength')} up from the waist lies the nape. A fifth of the neck girth ${mm(neckGirth)}${estimate(body, 'neckGirth')} less ${mm(2)} gives the width ${mm(shoulder.sideNeck.x, ['neckGirth'])}; the side neck lies a third of it above the nape`;
   paper.draw(
     'Neck',
     said`${neck}; the curve leaves the centre line and meets the shoulder squarely, ${mm(pathLength(shoulder.neck))} long.`,
-    { points: { 'side-neck': shoulder.sideNeck }, lines: [shoulder.neck], measures: ['neckGirth'] },
+    {
+      points: { 'side-neck': shoulder.sideNeck },
+      lines: [shoulder.neck],
+      measures: front ? ['neckGirth'] : ['backWaistLength', 'neckGirth'],
+    },
   );
   const ease = 'shoulderEase' in own ? own.shoulderEase : 0;
   paper.draw(

@@ -48,7 +48,7 @@ export function plainBand(shape: BandShape, partners: BandPartners): readonly Pi
       title: 'Sleeve band',
       side: 'front',
       part: 'sleeve',
-      cut: 'cut 4 (two pairs: outside and facing)',
+      cut: 'cut 4 (two pairs)',
       copies: 4,
       edges: [
         upper,

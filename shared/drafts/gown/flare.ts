@@ -1,4 +1,5 @@
 import type { PartTable } from '../../drafting/drafting-table.ts';
+import { leastSaid } from '../../drafting/quantity.ts';
 import { edge, notchAtLength, to } from '../../drafting/outline.ts';
 import type { Edge, Piece, Side } from '../../drafting/piece.ts';
 import { arc } from '../../geometry/arc.ts';
@@ -40,7 +41,7 @@ function narrateHalf(
     .reduce((sum, each) => sum + pathLength(each.path), 0);
   const divided = gores > 1 ? said`, in ${gores} gores so that each fits the cloth` : said``;
   const trained =
-    train > 0
+    train >= leastSaid
       ? said` From the side seam to the centre back the hem grows longer by ${mm(train)}, level where it leaves both.`
       : said``;
   paper.draw(

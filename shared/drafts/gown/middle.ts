@@ -8,6 +8,7 @@ import {
   notchAtLength,
   to,
 } from '../../drafting/outline.ts';
+import { amount } from '../../drafting/quantity.ts';
 import type { Dart, Edge, Piece } from '../../drafting/piece.ts';
 import { endOf, pathLength, startOf } from '../../geometry/curve.ts';
 import { type Path, line } from '../../geometry/path.ts';
@@ -147,7 +148,7 @@ function narrateDarts(paper: PartTable, half: Half, darts: readonly Dart[]): voi
         : said`ending ${mm(first)} and ${mm(second)} below it`;
   paper.draw(
     'Waist darts',
-    said`${darts.length === 1 ? 'One dart' : 'Two darts, 60 to 40,'} upright at the waist seam with ${mm(half.gap.seam)}, ${mm(half.gap.waist)} at the waist, ${reach}.`,
+    said`${darts.length === 1 ? 'One dart:' : 'Two darts, sharing 60 to 40:'} ${amount(half.gap.seam)} at the waist seam, which the legs cross upright, ${amount(half.gap.waist)} at the waist, ${reach}.`,
     {
       why: said`The legs cross the waist seam upright, so sewing the dart only shifts the seam and leaves no kink.`,
       lines: darts.flatMap((dart) => [dart.centreLeg, dart.sideLeg]),

@@ -1,5 +1,5 @@
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
-import { worked } from '../../drafting/quantity.ts';
+import { amount, leastSaid, worked } from '../../drafting/quantity.ts';
 import { line } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
 import { profilePath, steepest, xAt } from '../../geometry/profile.ts';
@@ -18,9 +18,6 @@ const levelRows = [
   ['hip', 'Hip line'],
   ['knee', 'Knee seam line'],
 ] as const;
-
-/** What is less is left unsaid: it reads as nothing in either unit. */
-const leastSaid = 0.5;
 
 const balanceWhy = said`The balance moves the side seam between front and back: what the front gains, the back gives.`;
 
@@ -63,7 +60,7 @@ function narrateSuppression(table: DraftingTable, paper: PartTable, half: Half):
   paper.draw(
     'Waist suppression',
     said`Mean of bust and hip quarters ${mm(mean, ['bustGirth', 'hipGirth'])} less the waist quarter ${mm(quarters.waist, ['waistGirth'])} ${
-      suppression.whole > 0
+      suppression.whole >= leastSaid
         ? said`leaves ${mm(suppression.whole, ['bustGirth', 'hipGirth', 'waistGirth'])} to take in. The side seam ${
             Math.abs(inwards) < leastSaid
               ? said`takes none of it`
@@ -138,12 +135,14 @@ function narrateContour(
   moved: number,
 ): void {
   const { side, heights } = half;
+  const both = ['bustGirth', 'upperChestGirth'];
+  const less = quarters.bust.value - quarters.chest.value;
   const shared =
-    moved > leastSaid
-      ? side === 'front'
-        ? said` ${mm(moved)} of it comes from the back, whose side would lean too far.`
-        : said` ${mm(moved)} more than the side can lean goes to the front.`
-      : said``;
+    Math.abs(contour.reduction - less) < leastSaid
+      ? said``
+      : side === 'front'
+        ? said`; with ${mm(moved)} from the back, whose side would lean too far, it is ${amount(contour.reduction)}`
+        : said`; what its side cannot lean, ${mm(moved)}, goes to the front and ${amount(contour.reduction)} stays`;
   const lean =
     Math.abs(contour.lean) < leastSaid
       ? said`the side stays upright`
@@ -154,7 +153,7 @@ function narrateContour(
       : said`the opening at the top edge takes ${mm(contour.opening)}`;
   paper.draw(
     'Above the bust',
-    said`Bust quarter ${mm(quarters.bust.value, quarters.bust.measures)} less upper chest quarter (${worked(quarters.chest)}) leaves ${mm(contour.reduction, ['bustGirth', 'upperChestGirth'])}: ${lean}, ${opening}.${shared}`,
+    said`Bust quarter ${mm(quarters.bust.value, quarters.bust.measures)} less upper chest quarter (${worked(quarters.chest)}) leaves ${amount(less, both)}${shared}: ${lean}, ${opening}.`,
     {
       why: said`This is the only amount taken out above the bust: with it the top edge lies on the upper chest and cannot gape.`,
       points: { 'side-chest': point(xAt(half.line, heights.underarm), heights.underarm) },
@@ -167,7 +166,7 @@ function narrateContour(
         ],
         profilePath(half.line, heights.underarm, heights.bust),
       ],
-      measures: ['bustGirth', 'upperChestGirth'],
+      measures: both,
     },
   );
 }

@@ -1,5 +1,5 @@
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
-import type { Quantity } from '../../drafting/quantity.ts';
+import { type Quantity, amount, leastSaid } from '../../drafting/quantity.ts';
 import { pathLength } from '../../geometry/curve.ts';
 import type { Path } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
@@ -70,7 +70,7 @@ export function narrateArmhole(
   const until = armhole.at(-1)?.to;
   if (!from || !until) return;
   const kept = halfAcross + opening - from.x;
-  const half = said`Half of ${across.how}${opening < 0.5 ? '' : said` and the opening ${mm(opening)}`}`;
+  const half = said`Half of ${across.how}${opening < leastSaid ? '' : said` and the opening ${mm(opening)}`}`;
   const how: Said =
     kept > 0.05
       ? said`${half} would reach too near the side; its upper end is kept ${mm(from.x)} out`
@@ -91,9 +91,10 @@ export function narrateArmhole(
 
 /** What an intake takes at the levels it passes, and how it ends. */
 const taking = (half: Half, { waistSeam }: GownStyle): Said => {
-  const underbust = said`${mm(half.gap.underbust)} at the under-bust`;
-  if (waistSeam !== 'none') return said`${underbust} and ${mm(half.gap.seam)} at the waist seam`;
-  return said`${underbust} and ${mm(half.gap.waist)} at the waist, running out ${mm((half.dartTips[0] ?? half.levels.waist) - half.levels.waist)} below it`;
+  const underbust = said`${amount(half.gap.underbust)} at the under-bust`;
+  if (waistSeam !== 'none')
+    return said`${underbust} and ${amount(half.gap.seam)} at the waist seam`;
+  return said`${underbust} and ${amount(half.gap.waist)} at the waist, running out ${mm((half.dartTips[0] ?? half.levels.waist) - half.levels.waist)} below it`;
 };
 
 /** Records a princess seam. */

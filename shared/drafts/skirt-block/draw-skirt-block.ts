@@ -4,7 +4,7 @@ import type { WantedGirth } from '../../drafting/construction.ts';
 import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
-import { type Quantity, plus } from '../../drafting/quantity.ts';
+import { type Quantity, amount, leastSaid, plus } from '../../drafting/quantity.ts';
 import { pathLength } from '../../geometry/curve.ts';
 import { line } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
@@ -87,7 +87,7 @@ function narrateQuarter(
       : said`${count} ${mouths.length === 1 ? 'takes' : 'take'} ${mm(darts)}`;
   paper.draw(
     'Suppression',
-    said`Hip quarter ${mm(plan.figures.hip, ['hipGirth'])} less waist quarter ${mm(plan.figures.waist, ['waistGirth'])} is ${mm(plan.figures.hip - plan.figures.waist, ['hipGirth', 'waistGirth'])}: the side takes ${mm(side)}, ${taken}.`,
+    said`Hip quarter ${mm(plan.figures.hip, ['hipGirth'])} less waist quarter ${mm(plan.figures.waist, ['waistGirth'])} is ${amount(plan.figures.hip - plan.figures.waist, ['hipGirth', 'waistGirth'])}: the side takes ${amount(side)}, ${taken}.`,
     {
       points: {
         'waist-quarter': point(plan.figures.waist, heights.waist),
@@ -103,7 +103,7 @@ function narrateQuarter(
   const path = sideOf(plan, heights);
   paper.draw(
     'Side seam',
-    said`A fair curve from the waist to the hip, upright there, and straight down to the hem: ${mm(pathLength(path))} long, and ${mm(heights.waist - plan.sideTop)} above the waist line at its top.`,
+    said`A fair curve from the waist to the hip, upright there, and straight down to the hem: ${mm(pathLength(path))} long, its top ${heights.waist - plan.sideTop < leastSaid ? said`level with` : said`${mm(heights.waist - plan.sideTop)} above`} the waist line.`,
     {
       why: said`The waist rises at the side so that it meets the slanting seam squarely, in front and back alike.`,
       points: { 'side-waist': point(xAt(plan.curve, plan.sideTop), plan.sideTop) },
