@@ -12,10 +12,13 @@ import type { SheetBench } from './sheets.ts';
 
 type RedrawBench = { readonly benchRedraw: () => Promise<readonly Measured[]> };
 
+type OverlaysBench = { readonly benchOverlays: () => readonly Measured[] };
+
 type SheetsBench = { readonly benchSheets: () => readonly SheetBench[] };
 
 /** The bundle exports what its source does. */
 const asRedrawBench = (loaded: unknown): RedrawBench => loaded as RedrawBench;
+const asOverlaysBench = (loaded: unknown): OverlaysBench => loaded as OverlaysBench;
 const asSheetsBench = (loaded: unknown): SheetsBench => loaded as SheetsBench;
 
 const write = (lines: readonly object[]): void => {
@@ -25,6 +28,10 @@ const write = (lines: readonly object[]): void => {
 const redraw = asRedrawBench(await import(await bundle(new URL('redraw.ts', import.meta.url))));
 write(await redraw.benchRedraw());
 write(await benchPdf());
+const overlays = asOverlaysBench(
+  await import(await bundle(new URL('overlays.ts', import.meta.url))),
+);
+write(overlays.benchOverlays());
 const sheets = asSheetsBench(await import(await bundle(new URL('sheets.ts', import.meta.url))));
 write(sheets.benchSheets());
 write([await benchBrowser(), await benchDrag()]);
