@@ -11,7 +11,7 @@ import {
   pushGraphicsState,
   rectangle,
 } from 'pdf-lib';
-import type { Mark, PrintJob, Window } from '#shared/exports/drawing.ts';
+import type { Mark, PrintJob, Window, Words } from '#shared/exports/drawing.ts';
 import { type Motion, moved, movedPath, shift } from '#shared/geometry/motion.ts';
 import type { Path } from '#shared/geometry/path.ts';
 import { toPoints } from '#shared/sheets/papers.ts';
@@ -97,6 +97,7 @@ async function sourcePages(
   job: PrintJob,
   { layout }: SheetPlan,
   furniture: readonly string[],
+  labels: readonly Words[] = [],
 ): Promise<Uint8Array> {
   const pdf = await PDFDocument.create({ updateMetadata: false });
   const fonts = await fontsIn(pdf);
@@ -105,6 +106,7 @@ async function sourcePages(
   for (const { shape, motion } of layout.placements) {
     draw(page, drawings.get(shape.piece) ?? [], fonts, motion, layout.height);
   }
+  draw(page, labels, fonts, shift(0, 0), layout.height);
   const { width, height } = job.paper;
   for (const name of furniture) {
     const sheet = pdf.addPage([toPoints(width), toPoints(height)]);
@@ -113,9 +115,12 @@ async function sourcePages(
   return pdf.save();
 }
 
-/** The whole drawing on one large page. */
-export const largePage = (job: PrintJob, sheets: SheetPlan): Promise<Uint8Array> =>
-  sourcePages(job, sheets, []);
+/** The whole drawing on one large page, the labels of the pieces too. */
+export const largePage = (
+  job: PrintJob,
+  sheets: SheetPlan,
+  labels: readonly Words[],
+): Promise<Uint8Array> => sourcePages(job, sheets, [], labels);
 
 const isWindow = (mark: Mark): mark is Window => mark.kind === 'window';
 

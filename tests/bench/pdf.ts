@@ -6,8 +6,11 @@ import { promisify } from 'node:util';
 import { pdfBytes } from '#server/features/print/pdf-document.ts';
 import { balanced } from '#shared/drafting/house-rule-presets.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
+import { labelFacts } from '#shared/engine/label-facts.ts';
 import type { PrintJob } from '#shared/exports/drawing.ts';
+import { placedLabels } from '#shared/exports/placed-labels.ts';
 import { tilesJob } from '#shared/exports/tiles.ts';
+import { drawnPieces } from '#shared/sheets/drawn-pieces.ts';
 import { presetOrder } from '#shared/sheets/print-order.ts';
 import { planSheets } from '#shared/sheets/sheet-plan.ts';
 import { middleBody } from '../support/middle-body.ts';
@@ -123,6 +126,8 @@ export async function benchPdf(): Promise<readonly PdfBench[]> {
   const draft = draftGown({ card: middleBody, style: {}, rules: balanced });
   const sheets = planSheets(draft.pieces, order);
   const whole = tilesJob(draft, order, 'cm');
+  const drawn = new Map(drawnPieces(draft.pieces, order).map((each) => [each.drawing, each]));
+  const labels = placedLabels(sheets, drawn, labelFacts('gown', middleBody, draft.number, balanced));
   const job: PrintJob = { ...whole, pages: whole.pages.slice(1) };
   const what = `PDF of the demo gown, ${job.pages.length} A4 tiles`;
   const ours = () => pdfBytes(job);
@@ -140,5 +145,5 @@ export async function benchPdf(): Promise<readonly PdfBench[]> {
     );
     return beside;
   }
-  return [...beside, ...(await besidePdfposter(job, await largePage(job, sheets), what))];
+  return [...beside, ...(await besidePdfposter(job, await largePage(job, sheets, labels), what))];
 }
