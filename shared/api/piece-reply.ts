@@ -15,6 +15,7 @@ const edge = z.object({
   ratio: z.exactOptional(z.number()),
   corner: z.exactOptional(z.number()),
   open: z.exactOptional(z.boolean()),
+  narrow: z.exactOptional(z.boolean()),
 });
 
 const dart = z.object({

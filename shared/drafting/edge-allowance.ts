@@ -16,9 +16,9 @@ function bendsLittle(path: Path): boolean {
 }
 
 /** Which of the house's allowances an edge takes; none at a fold or across the mouth of a dart. */
-export function allowanceKind({ kind, name, path, open }: Edge): AllowanceKind | undefined {
+export function allowanceKind({ kind, name, path, open, narrow }: Edge): AllowanceKind | undefined {
   if (kind === 'fold' || kind === 'mouth' || open === true) return undefined;
-  if (kind === 'hem') return bendsLittle(path) ? 'straightHem' : 'hem';
+  if (kind === 'hem') return narrow !== true && bendsLittle(path) ? 'straightHem' : 'hem';
   if (kind !== 'seam') return kind;
   if (/^waist\b/.test(name)) return 'waist';
   return /princess/.test(name) ? 'princess' : 'seam';

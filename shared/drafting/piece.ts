@@ -41,6 +41,8 @@ export type Edge = {
   readonly corner?: number;
   /** The mouth of a dart: part of the outline, closed by sewing the dart. */
   readonly open?: boolean;
+  /** A hem turned up narrowly though it lies straight, because the hem beside it bends. */
+  readonly narrow?: boolean;
 };
 
 /** What a dart takes out. Legs run from the mouth (or the upper tip) to the tip. */

@@ -155,7 +155,7 @@ function godets(paper: PartTable, { style, rules, panels }: BelowKneeInputs): Be
     footOf,
     pieces: (side) => {
       if (side === 'back') {
-        narrateGodets(paper, plan, sweep - knee, drawn);
+        narrateGodets(paper, plan, sweep, sweep - knee, drawn);
         narrateTrain(paper, style, hem);
       }
       return drawn.filter((piece) => piece.side === side);

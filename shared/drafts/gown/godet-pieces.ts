@@ -182,6 +182,7 @@ const listed = (words: readonly string[]): string =>
 export function narrateGodets(
   paper: PartTable,
   plan: GodetPlan,
+  hem: number,
   sweep: number,
   pieces: readonly Piece[],
 ): void {
@@ -198,7 +199,7 @@ export function narrateGodets(
       : said``;
   paper.draw(
     'Godets',
-    said`The hem is to be ${mm(sweep)} more than the knee: over ${count} godets of ${mm(depth)} that is ${mm(sweep / count)} of arc and ${deg((angle * 180) / Math.PI)} each. Strike a sector at ${mm(depth)} for ${listed(places.map((place) => spokenPlaces[place]))}.${longer}${seamed}`,
+    said`The hem is to be ${mm(hem)} all round, ${mm(sweep)} more than the knee and ${(hem / (hem - sweep)).toFixed(1)} times it: over ${count} godets of ${mm(depth)} that is ${mm(sweep / count)} of arc and ${deg((angle * 180) / Math.PI)} each. Strike a sector at ${mm(depth)} for ${listed(places.map((place) => spokenPlaces[place]))}.${longer}${seamed}`,
     {
       why: said`A godet's sides are as long as the slit and its grain runs down its middle, so its hem hangs level with the skirt's.`,
       lines: [arc(point(0, 0), depth, -angle / 2, angle / 2)],
