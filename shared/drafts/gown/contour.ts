@@ -1,6 +1,9 @@
 import type { Point } from '../../geometry/point.ts';
 import { type Profile, straightProfile } from '../../geometry/profile.ts';
+import type { HouseRules } from '../../drafting/house-rules.ts';
+import type { Half } from './half.ts';
 import type { Intake } from './intakes.ts';
+import type { GownStyle } from './style-card.ts';
 
 /** Share of the front's reduction that the princess or dart takes at least. */
 const openingShare = 0.6;
@@ -10,6 +13,19 @@ const leanIn = Math.tan((8 * Math.PI) / 180);
 const leanOut = Math.tan((3 * Math.PI) / 180);
 /** Above the bust point the opening widens by a square over this height, then straight. */
 const rounding = 30;
+/** Where the straight legs of an opening would meet, so far above the bust point. */
+const legsMeet = (axis: number, bust: number, above: number): Point => ({
+  x: axis,
+  y: bust - above,
+});
+
+/** What the cloth outside turns about as the opening above the bust closes. */
+export const openingTurns = (
+  { axis, heights: { bust } }: Pick<Half, 'axis' | 'heights'>,
+  shaping: GownStyle['shaping'],
+  { dartClearance }: HouseRules,
+): Point => legsMeet(axis, bust, shaping === 'darts' ? dartClearance : rounding / 2);
+
 /** The opening reaches its amount at least this high above the bust point. */
 const lowestPeak = 60;
 /** A narrower opening is not worth sewing: the side takes it. */
@@ -93,7 +109,7 @@ export function princessAbove(
   ];
   return {
     intake: { axis, gap, top: top.y, foot: bust },
-    legs: { pivot: { x: axis, y: bust - rounding / 2 }, angle: Math.atan(square * rounding) },
+    legs: { pivot: legsMeet(axis, bust, rounding / 2), angle: Math.atan(square * rounding) },
     height: bust - height,
   };
 }
@@ -109,7 +125,7 @@ export function topDart(
   const height = Math.max(lowestPeak, bust - peak);
   return {
     legs: {
-      pivot: { x: axis, y: bust - clearance },
+      pivot: legsMeet(axis, bust, clearance),
       angle: Math.atan(opening / 2 / (height - clearance)),
     },
     height: bust - height,

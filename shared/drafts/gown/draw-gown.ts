@@ -12,6 +12,8 @@ import { mm, said } from '../../units/said.ts';
 import { type BelowKnee, belowKnee } from './below-knee.ts';
 import { closeGown } from './closure.ts';
 import { backEdgeIsHigh, drawTop } from './draw-top.ts';
+import { openingTurns } from './contour.ts';
+import { evenHems } from './even-hems.ts';
 import { gownHandles } from './handles.ts';
 import type { Half } from './half.ts';
 import { fitOut } from './inner.ts';
@@ -100,7 +102,7 @@ export function drawGown(
     ),
     { level: 'hem', wanted: below.hem, estimated: false } as const,
   ];
-  const sewn = sides.flatMap((each) => [...each.pieces, ...below.pieces(each.side)]);
+  const sewn = evenHems(sides.flatMap((each) => [...each.pieces, ...below.pieces(each.side)]));
   const [{ edges: frontEdges }, { edges: backEdges }] = sides;
   const pieces = isOffShoulder(style)
     ? setInBands(table, body, style, { front: frontEdges, back: backEdges }, sewn)
@@ -133,7 +135,11 @@ export function drawGown(
       },
       ...(rules.intakes && { intakesGiven: true }),
     },
-    handles: gownHandles(style.closure === 'laced' ? closed.pieces : pieces, style),
+    handles: gownHandles(
+      style.closure === 'laced' ? closed.pieces : pieces,
+      style,
+      openingTurns(pair.front, style.shaping, rules),
+    ),
     walking: walked,
   };
 }

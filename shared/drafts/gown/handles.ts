@@ -13,9 +13,13 @@ const out = point(1, 0);
 /**
  * The points a maker moves by hand, each where it lies on a piece: neck depth, neck width and top drop
  * at the peak, side and back depth, waist seam, dart length, knee line and its girth, flare length, train. A straight top
- * line has neither dip nor peak: its drop is moved at the centre.
+ * line has neither dip nor peak: its drop is moved at the centre. The opening above the bust turns about `turns`.
  */
-export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonly Handle[] {
+export function gownHandles(
+  pieces: readonly Piece[],
+  style: GownStyle,
+  turns: Point,
+): readonly Handle[] {
   const front = edgesOf(pieces, (piece) => piece.side === 'front' && piece.part === 'top');
   const back = edgesOf(pieces, (piece) => piece.side === 'back' && piece.part === 'top');
   const centre = heldAt(front, 'top', startOf);
@@ -26,7 +30,7 @@ export function gownHandles(pieces: readonly Piece[], style: GownStyle): readonl
   return [
     ...(style.topLine === 'straight'
       ? move('topDrop', centre, down)
-      : [...move('neckDepth', centre, down), ...peakHandles(front, style)]),
+      : [...move('neckDepth', centre, down), ...peakHandles(front, style, turns)]),
     ...move('sideDepth', outer && placed(outer, endOf), down),
     ...move('backDepth', heldAt(back, 'top', startOf), up),
     ...(style.waistSeam === 'raised'
@@ -117,10 +121,10 @@ const waistOf = (piece: Piece): number | undefined =>
 
 /**
  * Where the peak came to lie once the opening above the bust was laid flat: out along the top line it
- * widens the neck, across it the line drops. The line climbs to the peak in one curve and falls in
+ * widens the neck. The line climbs to the peak in one curve and falls in
  * another, so the peak is where two curves meet within an edge; failing that, where the line is cut.
  */
-function peakHandles(front: readonly Held[], style: GownStyle): readonly Handle[] {
+function peakHandles(front: readonly Held[], style: GownStyle, turns: Point): readonly Handle[] {
   const peak = point(style.neckWidth, style.topDrop);
   const places = front
     .filter(({ edge }) => edge.kind === 'top')
@@ -138,8 +142,29 @@ function peakHandles(front: readonly Held[], style: GownStyle): readonly Handle[
   )[0];
   if (!found) return [];
   const { piece, at, along } = found;
+  const { direction, travel } = dropOfPeak(along, style, turns);
   return [
     ...move('neckWidth', { piece, at }, along),
-    ...move('topDrop', { piece, at }, point(-along.y, along.x)),
+    ...move('topDrop', { piece, at }, direction, 1 / travel),
   ];
+}
+
+/**
+ * Where the peak goes, and how far, for a millimetre of drop. On the outer panel it lies turned by the
+ * opening, which keeps its amount at the peak's height: the lower the peak, the wider its angle.
+ */
+function dropOfPeak(
+  along: Point,
+  { neckWidth, topDrop }: GownStyle,
+  turns: Point,
+): { readonly direction: Point; readonly travel: number } {
+  const { x: cos, y: sin } = along;
+  const [out, height] = [neckWidth - turns.x, turns.y - topDrop];
+  // The turn grows by sin / height a millimetre; the peak is carried round by it, and down by the drop.
+  const moved = point(
+    -sin + (sin / height) * (height * cos - out * sin),
+    cos + (sin / height) * (out * cos + height * sin),
+  );
+  const travel = distance(moved, point(0, 0));
+  return { direction: scale(moved, 1 / travel), travel };
 }
