@@ -12,7 +12,7 @@ import { readPaper } from './paper-option.ts';
 const usage = [
   'Use: npm run --silent draft -- --measures card.json --style style.json',
   `       [--garment ${garments.join('|')}] [--rules rules.json]`,
-  '       [--paper A4|A3|Letter|Legal|Tabloid|A1|A0|roll-36in|roll-90cm|WIDTHxHEIGHT] [--unit cm|in] --out DIR',
+  '       [--paper A4|A3|Letter|Legal|Tabloid|A1|A0|roll-36in|roll-90cm|WIDTHxHEIGHT] [--unit cm|in] [--worksheet] --out DIR',
   '     npm run --silent draft -- --schema card|style|rules [--garment …]',
 ];
 
@@ -51,6 +51,7 @@ export function readOptions(args: readonly string[]) {
         rules: { type: 'string' },
         paper: { type: 'string', default: 'A4' },
         unit: { type: 'string', default: 'cm' },
+        worksheet: { type: 'boolean', default: false },
         out: { type: 'string' },
         schema: { type: 'string' },
       },
@@ -89,12 +90,14 @@ export type Order = {
   readonly inputs: DraftedInputs;
   readonly paper: PrintOrder['paper'];
   readonly unit: Unit;
+  /** Whether every step is written too, with its figure, for a learner's folder. */
+  readonly worksheet: boolean;
   readonly out: string;
 };
 
 /** Reads the three files and the choices, or refuses by name what cannot be right. */
 export function readOrder(options: ReturnType<typeof readOptions>): Order {
-  const { measures, style, rules, paper, unit, out } = options;
+  const { measures, style, rules, paper, unit, worksheet, out } = options;
   const garment = readGarment(options.garment);
   if (measures === undefined)
     return refuse('--measures is missing: name the measure card.', ...usage);
@@ -110,5 +113,5 @@ export function readOrder(options: ReturnType<typeof readOptions>): Order {
     ...(rules === undefined ? {} : { rules: readJson('rules', rules) }),
   });
   if ('problems' in reading) return refuseProblems(reading.problems, unit);
-  return { inputs: reading.inputs, paper: sheet.paper, unit, out };
+  return { inputs: reading.inputs, paper: sheet.paper, unit, worksheet, out };
 }

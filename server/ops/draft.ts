@@ -7,6 +7,7 @@ import { plainOrder } from '#shared/sheets/print-order.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
 import { speak } from '#shared/units/speak.ts';
 import { tilesPdf } from '../features/print/tiles-pdf.ts';
+import { worksheetPdf } from '../features/print/worksheet-pdf.ts';
 import {
   type Order,
   RefusedError,
@@ -50,6 +51,10 @@ function tellSchema(name: string, garment: string): void {
   console.log(JSON.stringify(jsonSchema(name, readGarment(garment)), undefined, 2));
 }
 
+/** A worksheet is for a folder: on Letter where that is printed on, else on A4. */
+const worksheetOn = ({ paper, unit }: Order, draft: Drafted): Promise<Uint8Array> =>
+  worksheetPdf(draft, { paper: paper === 'Letter' ? 'Letter' : 'A4', unit });
+
 async function main(args: readonly string[]): Promise<number> {
   const options = readOptions(args);
   if (options.schema !== undefined) {
@@ -63,6 +68,7 @@ async function main(args: readonly string[]): Promise<number> {
     'draft.json': draftJson(draft),
     'proof.json': proofJson(draft),
     'tiles.pdf': tiles,
+    ...(order.worksheet ? { 'worksheet.pdf': await worksheetOn(order, draft) } : {}),
   });
   for (const each of draft.warnings) {
     console.error(`${each.field}: ${speak(each.said, order.unit)}`);

@@ -3,15 +3,10 @@ import { draftGown } from '#shared/engine/draft-gown.ts';
 import { stepPicture } from '#shared/lesson/step-picture.ts';
 import { spoken } from '#shared/lesson/spoken.ts';
 import { middleBody } from '../support/middle-body.ts';
-import type { Measured } from './redraw.ts';
+import { type Measured, rounded, share } from './redraw.ts';
 
 const warmUp = 100;
 const rounds = 300;
-
-const share = (sorted: readonly number[], part: number): number =>
-  sorted[Math.floor((sorted.length - 1) * part)] ?? 0;
-
-const rounded = (value: number): number => Math.round(value * 1000) / 1000;
 
 /**
  * Replaying to any step of the demo gown (its picture from nothing, and its sentence with the sources of

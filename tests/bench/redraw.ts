@@ -16,10 +16,10 @@ export type Measured = {
 const warmUp = 300;
 const rounds = 600;
 
-const share = (sorted: readonly number[], part: number): number =>
+export const share = (sorted: readonly number[], part: number): number =>
   sorted[Math.floor((sorted.length - 1) * part)] ?? 0;
 
-const rounded = (value: number): number => Math.round(value * 1000) / 1000;
+export const rounded = (value: number): number => Math.round(value * 1000) / 1000;
 
 /**
  * A full redraft of the demo gown (checks, drawing, finishing, proof), one measure changed each time,

@@ -14,11 +14,14 @@ type RedrawBench = { readonly benchRedraw: () => Promise<readonly Measured[]> };
 
 type OverlaysBench = { readonly benchOverlays: () => readonly Measured[] };
 
+type ReplayBench = { readonly benchReplay: () => readonly Measured[] };
+
 type SheetsBench = { readonly benchSheets: () => readonly SheetBench[] };
 
 /** The bundle exports what its source does. */
 const asRedrawBench = (loaded: unknown): RedrawBench => loaded as RedrawBench;
 const asOverlaysBench = (loaded: unknown): OverlaysBench => loaded as OverlaysBench;
+const asReplayBench = (loaded: unknown): ReplayBench => loaded as ReplayBench;
 const asSheetsBench = (loaded: unknown): SheetsBench => loaded as SheetsBench;
 
 const write = (lines: readonly object[]): void => {
@@ -32,6 +35,8 @@ const overlays = asOverlaysBench(
   await import(await bundle(new URL('overlays.ts', import.meta.url))),
 );
 write(overlays.benchOverlays());
+const replay = asReplayBench(await import(await bundle(new URL('lesson.ts', import.meta.url))));
+write(replay.benchReplay());
 const sheets = asSheetsBench(await import(await bundle(new URL('sheets.ts', import.meta.url))));
 write(sheets.benchSheets());
 write([await benchBrowser(), await benchDrag()]);

@@ -167,6 +167,14 @@ describe('a gown whose every proof line holds ends with 0', () => {
   });
 });
 
+describe('a worksheet', () => {
+  it('is written beside the others when it is asked for', async () => {
+    expect((await draft(...(await order(card)), '--worksheet')).code).toBe(0);
+    const bytes = await readFile(join(folder, 'out', 'worksheet.pdf'));
+    expect(bytes.subarray(0, 5).toString()).toBe('%PDF-');
+  });
+});
+
 describe('every paper is printed by its name, and a sheet of one’s own by its sides', () => {
   it.each([
     ['A0', 841, 1189],
