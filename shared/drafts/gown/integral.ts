@@ -1,12 +1,12 @@
 import { edge } from '../../drafting/outline.ts';
 import type { Piece } from '../../drafting/piece.ts';
-import { pathLength, reverse, stationAtLength } from '../../geometry/curve.ts';
+import { pathLength, reverse } from '../../geometry/curve.ts';
 import { type Path, cubic, line } from '../../geometry/path.ts';
 import { type Point, between, point, scale } from '../../geometry/point.ts';
 import { type Profile, profilePath, xAt } from '../../geometry/profile.ts';
 import type { PanelFoot } from './skirt-foot.ts';
 import type { SkirtPanel } from './skirt-panel.ts';
-import { type HemPlace, trainShare, trainedHem } from './train.ts';
+import { type HemPlace, fallingHem, trainShare, trainedHem } from './train.ts';
 
 /** Part of the depth over which a seam turns outwards below the knee line; then it runs straight (our rule). */
 const turning = 0.4;
@@ -116,20 +116,6 @@ export function planIntegral(
 /** Length of a seam below the knee line, at an end of a panel's hem: longer where the train begins. */
 type Reach = { readonly inner: number; readonly outer: number };
 
-/** How the cloth falls across a panel: upright on the fold, along each seam, turning smoothly between. */
-function fallAcross(
-  plan: IntegralPlan,
-  panel: SkirtPanel,
-  share: number,
-): readonly [number, number] {
-  const most = Math.atan(plan.lean);
-  const from = runsOut(panel, 'inner') ? -most : 0;
-  return [
-    from + (most - from) * (3 * share ** 2 - 2 * share ** 3),
-    (most - from) * 6 * share * (1 - share),
-  ];
-}
-
 /** The hem of a panel and how long the seams at its ends are, with its part of the train in the back. */
 function hemOf(
   plan: IntegralPlan,
@@ -144,16 +130,13 @@ function hemOf(
   const index = half.findIndex(({ piece }) => piece === panel.piece);
   const before = lengths.slice(0, index).reduce((sum, length) => sum + length, 0);
   const length = lengths[index] ?? 0;
+  const most = Math.atan(plan.lean);
+  const places = fallingHem(own, runsOut(panel, 'inner') ? -most : 0, most);
+  const part = whole / length;
   const level = (share: number): HemPlace => {
-    const along = share * whole - before;
-    const station = stationAtLength(own, along);
-    const [fall, turn] = fallAcross(plan, panel, Math.min(1, Math.max(0, along / length)));
-    return {
-      at: station?.at ?? point(0, 0),
-      along: scale(station?.tangent ?? point(1, 0), whole),
-      fall,
-      turn: (turn * whole) / length,
-    };
+    const within = Math.min(1, Math.max(0, share * part - before / length));
+    const { at, along, fall, turn } = places(within);
+    return { at, along: scale(along, part), fall, turn: turn * part };
   };
   const [from, until] = [before / whole, (before + length) / whole];
   return {

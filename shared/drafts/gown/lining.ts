@@ -2,18 +2,20 @@ import type { PartTable } from '../../drafting/drafting-table.ts';
 import { to } from '../../drafting/outline.ts';
 import type { Edge, Notch, Piece } from '../../drafting/piece.ts';
 import {
+  endOf,
   endTangent,
   flatten,
   pathLength,
   reverse,
   splitPath,
+  startOf,
   startTangent,
   stationAtLength,
 } from '../../geometry/curve.ts';
-import { parallel } from '../../geometry/offset.ts';
-import type { Path, Segment } from '../../geometry/path.ts';
+import type { Path } from '../../geometry/path.ts';
 import { type Point, add, distance, scale } from '../../geometry/point.ts';
 import { mm, said } from '../../units/said.ts';
+import { droppedHem, fallingHem } from './train.ts';
 
 /** The lining's hem hangs this much above the gown's (reference.md 3h, common practice: 20 to 30). */
 const hemShorter = 25;
@@ -32,16 +34,12 @@ function cutShort(path: Path, by: number, end: 'start' | 'end'): Path {
   return end === 'end' ? kept : reverse(kept);
 }
 
-/** A hem moved up by the same, with its ends brought to where the shortened seams end. */
+/** A hem moved up by the same, the way its cloth falls, between the ends of the shortened seams. */
 function raised(hem: Path, from: Point, until: Point): Path {
-  const moved = [...parallel(hem, -hemShorter).path];
-  const place = (index: number, change: (segment: Segment) => Segment): void => {
-    const at = moved.at(index);
-    if (at) moved[index < 0 ? moved.length + index : index] = change(at);
-  };
-  place(0, (segment) => ({ ...segment, from }));
-  place(-1, (segment) => ({ ...segment, to: until }));
-  return moved;
+  const [first, last] = [startOf(hem) ?? from, endOf(hem) ?? until];
+  const fallTo = (at: Point, up: Point): number => Math.atan2(at.x - up.x, at.y - up.y);
+  const level = fallingHem(hem, fallTo(first, from), fallTo(last, until));
+  return droppedHem(level, () => [-hemShorter, 0], 0, 1);
 }
 
 /** The edges of a piece with its hem raised and the seams that run into it shortened. */

@@ -1,3 +1,4 @@
+import { pathLength, stationAtLength } from '../../geometry/curve.ts';
 import { type Cubic, type Path, cubic } from '../../geometry/path.ts';
 import { type Point, add, scale } from '../../geometry/point.ts';
 
@@ -26,17 +27,19 @@ export type HemPlace = {
   readonly turn: number;
 };
 
+/** What a place of a hem is moved by, the way the cloth falls there, mm, and how fast that changes. */
+type Drop = readonly [by: number, slope: number];
+
 /** Stretches drawn for a whole half. */
 const stretchesAHalf = 16;
 
 /**
- * A level hem lengthened into a train: every place moves down the way the cloth falls there, by its
- * part of the train. It leaves centre and side as squarely as the level hem did. From one share of
- * the half to another, outwards.
+ * A level hem with every place moved the way the cloth falls there, from one share to another. Where the move does
+ * not change it leaves its ends as squarely as the level hem did.
  */
-export function trainedHem(
+export function droppedHem(
   level: (share: number) => HemPlace,
-  train: number,
+  drop: (share: number) => Drop,
   from: number,
   until: number,
 ): Path {
@@ -47,13 +50,10 @@ export function trainedHem(
     const { at, along, fall, turn } = level(share);
     const down: Point = { x: Math.sin(fall), y: Math.cos(fall) };
     const aside: Point = { x: Math.cos(fall), y: -Math.sin(fall) };
-    const more = train * trainShare(share);
+    const [by, slope] = drop(share);
     return {
-      at: add(at, scale(down, more)),
-      handle: scale(
-        add(add(along, scale(down, train * trainSlope(share))), scale(aside, more * turn)),
-        third,
-      ),
+      at: add(at, scale(down, by)),
+      handle: scale(add(add(along, scale(down, slope)), scale(aside, by * turn)), third),
     };
   });
   return stations.slice(1).flatMap((to, i): readonly Cubic[] => {
@@ -61,4 +61,30 @@ export function trainedHem(
     if (!start) return [];
     return [cubic(start.at, add(start.at, start.handle), add(to.at, scale(to.handle, -1)), to.at)];
   });
+}
+
+/** A level hem lengthened into a train, from one share of the half to another, outwards. */
+export const trainedHem = (
+  level: (share: number) => HemPlace,
+  train: number,
+  from: number,
+  until: number,
+): Path =>
+  droppedHem(level, (share) => [train * trainShare(share), train * trainSlope(share)], from, until);
+
+/**
+ * A hem as places: the cloth falls one way at its start and another at its end, turning smoothly between (radians from
+ * straight down towards +x), so that it stays square to both.
+ */
+export function fallingHem(path: Path, start: number, end: number): (share: number) => HemPlace {
+  const whole = pathLength(path);
+  return (share) => {
+    const station = stationAtLength(path, share * whole);
+    return {
+      at: station?.at ?? { x: 0, y: 0 },
+      along: scale(station?.tangent ?? { x: 1, y: 0 }, whole),
+      fall: start + (end - start) * (3 * share ** 2 - 2 * share ** 3),
+      turn: (end - start) * 6 * share * (1 - share),
+    };
+  };
 }
