@@ -3,6 +3,7 @@ import type { BodyLevels } from '../../body/levels.ts';
 import { readingGrace } from '../../units/format-length.ts';
 import { error, warning, type Problem } from '../../units/problem.ts';
 import { mm, said, type Said } from '../../units/said.ts';
+import { aboutCloth, closedEdge } from './cloth-check.ts';
 import { resolveStyle } from './resolve-style.ts';
 import { isPlainNumber, type EaseLevel, type GownStyle, type StyleCard } from './style-card.ts';
 import { styleLabels } from './style-labels.ts';
@@ -175,6 +176,8 @@ export function checkStyle(style: StyleCard, body: Body, levels: BodyLevels): re
   return [
     ...checkEase(body, resolved),
     ...checkChest(body, resolved),
+    ...closedEdge(body, resolved),
+    ...aboutCloth(resolved),
     ...unlikely(resolved, style),
   ];
 }

@@ -1,5 +1,6 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
+import { easeLimits, usualStretch } from './ease-limits.ts';
 import { type FlareChoices, longestTrainOf, widestHem } from './flare-limits.ts';
 import { easeLevels, styleChoices, styleLengths } from './style-card.ts';
 import { isOffShoulder } from './style-card.ts';
@@ -85,16 +86,6 @@ function hems(
   return { hemSweep: sweep, train: limit(0, Math.floor(train), 0) };
 }
 
-/** Ease the woven, boned gown takes at each level (method section 4), and how far a maker may go. */
-const easeLimits: { readonly [K in `ease.${EaseLevel}`]: Limit } = {
-  'ease.chest': limit(-60, 60, -20),
-  'ease.bust': limit(-40, 100, 0),
-  'ease.underbust': limit(-60, 80, -15),
-  'ease.waist': limit(-60, 100, -10),
-  'ease.topHip': limit(-40, 100, 5),
-  'ease.hip': limit(-20, 120, 20),
-};
-
 /**
  * A dip this wide for the root of its depth bends no tighter than 12 mm at the centre, which an enclosed
  * allowance still turns round (our rule; the radius of the curve `top-line` draws).
@@ -132,6 +123,7 @@ function neck(
  * our own rules named above). Bounds that hang on another choice take it from `style`, or its own initial value.
  */
 export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {}): StyleLimits {
+  const eases = easeLimits(body, style);
   const { bustSpan, waistToHip } = body.measures;
   const offShoulder = isOffShoulder(style);
   // Off the shoulder the peak lies inside the end of the top line.
@@ -159,7 +151,7 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
     body,
     levels,
     seamAboveKnee,
-    within(style.ease?.hip, easeLimits['ease.hip']),
+    within(style.ease?.hip, eases['ease.hip']),
   );
   const sideDepth = offShoulder
     ? limit(peak, levels.underarm - leastArmhole, 165)
@@ -208,9 +200,9 @@ export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {
     bandHeight: limit(60, 200, 110),
     pleatRatio: limit(1, 3, 2.5),
     armEase: limit(-40, 60, 0),
-    stretch: limit(0, 100, style.cloth === 'stretch' ? 20 : 0),
+    stretch: limit(0, 100, style.cloth === 'stretch' ? usualStretch : 0),
     shrinkage: limit(0, 10, 0),
     clothWidth,
-    ...easeLimits,
+    ...eases,
   };
 }
