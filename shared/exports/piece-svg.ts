@@ -142,6 +142,8 @@ export function pieceSvg(piece: FinishedPiece, translate: Point): string {
       class: 'piece',
       'data-piece': piece.name,
       'data-side': piece.side,
+      'data-part': piece.part,
+      'data-cloth': piece.cloth,
       'data-cut': piece.cut.replace(/^cut /, ''),
       'data-copies': piece.copies,
       transform: `translate(${figure(translate.x)} ${figure(translate.y)})`,

@@ -104,7 +104,8 @@ function measureGirths(pieces: readonly Read[]): readonly MeasuredGirth[] {
     const before = sums.get(key)?.girth ?? 0;
     sums.set(key, { level, part, girth: before + 2 * half });
   };
-  for (const piece of pieces) {
+  // What lies inside is no part of the gown's girth.
+  for (const piece of pieces.filter(({ attributes }) => attributes['data-part'] !== 'inner')) {
     const part = partOf(piece.attributes['data-piece'] ?? '');
     for (const level of ofClass(piece, 'level')) {
       addHalf(level.attributes['data-level'] ?? '', part, halfWidth(piece, level));

@@ -85,7 +85,7 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   const { shaping: wished, ...named } = draws.named;
   // Shaping first: how wide a hem may be hangs on the seams it leaves.
   let style: StyleCard = {
-    ...(fits(eased) && sideIsFair(eased, body, levels) ? eased : {}),
+    ...(fits(eased) ? eased : {}),
     ...(wished === undefined ? {} : { shaping: wished }),
   };
   for (const [choice, name] of Object.entries(named)) {
@@ -103,7 +103,10 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   const shaping = wished === 'darts' && !reaches ? 'princess' : wished;
   if (shaping !== undefined) style = { ...style, shaping };
   hems.forEach(put);
-  return style;
+  if (fits(style) && sideIsFair(style, body, levels)) return style;
+  // Ease, stretch and bands that do not go together, or that no fair side seam passes, are left open.
+  const { ease: _ease, stretch: _stretch, armEase: _armEase, ...rest } = style;
+  return rest;
 }
 
 /** Whether the side seam passes the girths this ease makes: what the draft refuses is not a style to draw. */
