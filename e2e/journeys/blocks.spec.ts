@@ -37,7 +37,9 @@ for (const width of [390, 1280]) {
       await drawnTable.tab('Proof').click();
       await expect(drawnTable.panel.getByText('These pieces sew together.')).toBeVisible();
       await drawnTable.tab('Pieces').click();
-      await expect(drawnTable.panel.getByText('Bodice block, front')).toBeVisible();
+      await expect(
+        drawnTable.panel.getByText('Bodice block, front', { exact: true }),
+      ).toBeVisible();
       await drawnTable.tab('Steps').click();
       await expect(drawnTable.panel.getByText('Dart moved')).toBeVisible();
       expect(await faults(page)).toEqual([]);

@@ -87,10 +87,16 @@ function measureEdges(pieces: readonly Read[]): readonly MeasuredEdge[] {
   });
 }
 
+/** A level that a turned dart bends is drawn in stretches, each counted along itself; any other by its x-extent. */
 function halfWidth(piece: Read, level: Read): number {
   const line = new svgPathProperties(level.attributes.d ?? '');
   const from = line.getPointAtLength(0);
   const to = line.getPointAtLength(line.getTotalLength());
+  const name = level.attributes['data-level'];
+  const stretches = ofClass(piece, 'level').filter(
+    (each) => each.attributes['data-level'] === name,
+  );
+  if (stretches.length > 1) return line.getTotalLength();
   const taken = ofClass(piece, 'dart')
     .map((dart) => widthTaken(pointsAlong(dart.attributes.d ?? ''), from, to))
     .reduce((sum, width) => sum + width, 0);

@@ -14,6 +14,7 @@ import type { SkirtBlockCard } from '#shared/drafts/skirt-block/style-card.ts';
 import { type BodiceBlockDraft, draftBodiceBlock } from '#shared/engine/draft-bodice-block.ts';
 import { type SkirtBlockDraft, draftSkirtBlock } from '#shared/engine/draft-skirt-block.ts';
 import { pieceSvg } from '#shared/exports/piece-svg.ts';
+import { piecesSvg } from '#shared/exports/svg.ts';
 import { speak } from '#shared/units/speak.ts';
 import { remeasure } from '../exports/remeasure.ts';
 import { bodyArbitrary } from '../support/random-body.ts';
@@ -50,6 +51,7 @@ const skirtCards: fc.Arbitrary<SkirtBlockCard> = fc.record({
     waist: fc.integer({ min: 0, max: 60 }),
     hip: fc.integer({ min: 10, max: 120 }),
   }),
+  seat: fc.option(fc.integer({ min: 0, max: 30 }), { nil: undefined }),
 });
 
 const rules = fc.constantFrom(...Object.values(houseRulePresets));
@@ -105,6 +107,16 @@ function measuredAnew(draft: Drafted): readonly number[] {
   return remeasure(svg).edges.map((each) => Math.abs(each.difference));
 }
 
+/** How far the girths taken from the SVG with a tape of its own lie from body and ease, mm. */
+function girthsOff(draft: Drafted): readonly number[] {
+  const { girths } = remeasure(piecesSvg(draft, 'cm'));
+  const found = (level: string): number =>
+    girths.filter((each) => each.level === level).reduce((sum, { girth }) => sum + girth, 0);
+  return draft.wanted.map(({ level, wanted }) =>
+    Math.abs(found(level === 'waist' ? 'waist edges' : level) - wanted),
+  );
+}
+
 describe.each(kinds)('a $name block on any body within the limits', ({ name, draw }) => {
   test('every line of the proof holds, no number is lost, and its seams agree when measured anew', () => {
     fc.assert(
@@ -117,7 +129,7 @@ describe.each(kinds)('a $name block on any body within the limits', ({ name, dra
         expect(lostNumbers(draft)).toEqual([]);
         for (const off of measuredAnew(draft)) expect(off).toBeLessThanOrEqual(0.5);
       }),
-      lawParameters(`${name} block: every line holds`),
+      lawParameters(`${name} block: every line holds`, 2 * lawRuns),
     );
   });
 
@@ -140,19 +152,57 @@ describe.each(kinds)('a $name block on any body within the limits', ({ name, dra
     );
     for (const [reason, count] of reasons)
       process.stdout.write(`  ${count} of ${asked}: ${reason}\n`);
-    // A wide dart cannot be folded in a round armhole, whoever wears it: that choice is counted apart.
-    const body = [...reasons].filter(([reason]) => !reason.includes('dart-too-wide-for-armhole'));
-    const share = body.reduce((sum, [, count]) => sum + count, 0) / asked;
-    expect(share).toBeLessThanOrEqual(0.05);
+    const refused = [...reasons.values()].reduce((sum, count) => sum + count, 0);
+    expect(refused / asked).toBeLessThanOrEqual(0.05);
+  });
+
+  test('what a level or the waist holds is body and ease, measured anew from the SVG', () => {
+    fc.assert(
+      fc.property(given, (from) => {
+        const draft = draw(from);
+        if (draft instanceof DraftingError) return;
+        for (const off of girthsOff(draft)) expect(off).toBeLessThanOrEqual(0.5);
+      }),
+      lawParameters(`${name} block: girths measured anew`, Math.min(200, lawRuns)),
+    );
   });
 });
 
-test('of 130 measured women every one gets both blocks, and they sew together', () => {
-  const ends = women().flatMap((card) => [
-    orRefusal(() => draftBodiceBlock({ card, style: {}, rules: houseRulePresets.balanced })),
-    orRefusal(() => draftSkirtBlock({ card, style: {}, rules: houseRulePresets.balanced })),
-  ]);
-  const sewn = ends.filter((end) => !(end instanceof DraftingError) && end.proof.holds);
-  process.stdout.write(`women with blocks: ${sewn.length} of ${ends.length} sewn\n`);
-  expect(sewn).toHaveLength(260);
-});
+/** Every choice of the blocks' style cards. */
+const bodiceChoices: readonly BodiceBlockCard[] = [
+  ...dartPlaces.map((bustDart) => ({ bustDart })),
+  ...bustDartRules.map((bustDartRule) => ({ bustDartRule })),
+];
+const skirtChoices: readonly SkirtBlockCard[] = [
+  {},
+  { seat: 0 },
+  { seat: 30 },
+  { ease: { hip: 100 } },
+];
+
+/** How many of the women get what is drawn, with every line of the proof holding. */
+function sewnFor(what: string, draw: (card: MeasureCard) => Drafted): number {
+  const ends = women().map((card) => orRefusal(() => draw(card)));
+  const sewn = ends.filter((end) => !(end instanceof DraftingError) && end.proof.holds).length;
+  process.stdout.write(`women with ${what}: ${sewn} of ${ends.length} sewn\n`);
+  return sewn;
+}
+
+describe.each(Object.values(houseRulePresets))(
+  'of 130 measured women, by either preset',
+  (house) => {
+    test.each(bodiceChoices)('at least 125 get a bodice block that sews together: %j', (style) => {
+      const sewn = sewnFor(JSON.stringify(style), (card) =>
+        draftBodiceBlock({ card, style, rules: house }),
+      );
+      expect(sewn).toBeGreaterThanOrEqual(125);
+    });
+
+    test.each(skirtChoices)('at least 125 get a skirt block that sews together: %j', (style) => {
+      const sewn = sewnFor(JSON.stringify(style), (card) =>
+        draftSkirtBlock({ card, style, rules: house }),
+      );
+      expect(sewn).toBeGreaterThanOrEqual(125);
+    });
+  },
+);

@@ -41,7 +41,7 @@ export const angleByLengths = (front: number, back: number, bustPointToSide: num
   dartAngle(Math.max(0, front - back), bustPointToSide);
 
 /** Angles a front can be drawn with (our rule). */
-const least = 5;
+export const leastAngle = 5;
 const most = 35;
 
 /** The angle of the bust dart by the rule chosen by name; a handbook's is kept within 5 to 35 degrees. */
@@ -54,7 +54,7 @@ export function bustDartAngle(
   const { bustGirth, underbustGirth, sideNeckToBustPoint, frontWaistLength, backWaistLength } =
     body.measures;
   const kept = (angle: number, how: Said, measures: readonly string[]): BustDartAngle => {
-    const held = within(least, most, angle);
+    const held = within(leastAngle, most, angle);
     const note = held === angle ? said`` : said`, kept at ${deg(held)}`;
     return { angle: held, how: said`${how} makes ${deg(angle)}${note}`, measures };
   };

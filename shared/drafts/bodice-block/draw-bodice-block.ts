@@ -1,19 +1,28 @@
 import type { Body } from '../../body/card.ts';
 import type { BodyLevels } from '../../body/levels.ts';
+import { DraftingError } from '../../drafting/drafting-error.ts';
 import type { DraftingTable } from '../../drafting/drafting-table.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
 import { type Point, point } from '../../geometry/point.ts';
+import { deg, said } from '../../units/said.ts';
 import { blockQuarter } from '../block-quarter.ts';
 import type { DrawnBlock } from '../drawn-block.ts';
 import { warnOfEstimates } from '../lean-on.ts';
-import { type BustDartAngle, bustDartAngle } from './bust-dart.ts';
+import { type BustDartAngle, bustDartAngle, leastAngle } from './bust-dart.ts';
 import { blockUnderarm, narrateHalf, narratePlace } from './narrate.ts';
 import { backWidthEase, pairArmholes, warnOfTightArmhole } from './pair-armholes.ts';
 import { type BodiceHalf, type BodiceQuarters, backPiece, frontPiece } from './pieces.ts';
 import { backToMatch, placeBustDart } from './place-dart.ts';
 import { type BlockHeights, type HalfFigures, planHalves } from './plan-halves.ts';
-import { backNeckRise, backShoulder, frontShoulder, openShoulder } from './shoulder.ts';
+import {
+  type OpenedShoulder,
+  type Shoulder,
+  backNeckRise,
+  backShoulder,
+  frontShoulder,
+  openShoulder,
+} from './shoulder.ts';
 import type { BodiceBlockStyle } from './style-card.ts';
 
 const leansOn = [
@@ -80,6 +89,38 @@ function figuresOf(
   };
 }
 
+/** A dart is narrowed by a degree at a time, at most by so many, where it would turn the shoulder out over the arm. */
+const mostNarrowed = 12;
+
+/**
+ * The shoulder opened by as much of the bust dart as leaves room for an armhole beside it; where even twelve
+ * degrees less do not, the refusal of the whole dart stands (our rule).
+ */
+function openedToFit<Armholes>(
+  wished: BustDartAngle,
+  shoulder: Shoulder,
+  bustPoint: Point,
+  armholesFor: (opened: OpenedShoulder) => Armholes,
+): { readonly opened: OpenedShoulder; readonly armholes: Armholes; readonly angle: BustDartAngle } {
+  let refusal: DraftingError | undefined;
+  for (let less = 0; less <= Math.min(mostNarrowed, wished.angle - leastAngle); less += 1) {
+    const angle = wished.angle - less;
+    const opened = openShoulder(shoulder, bustPoint, angle);
+    try {
+      const armholes = armholesFor(opened);
+      const how =
+        less === 0
+          ? wished.how
+          : said`${wished.how}, narrowed to ${deg(angle)} so that an armhole fits beside it`;
+      return { opened, armholes, angle: { ...wished, angle, how } };
+    } catch (error) {
+      if (!(error instanceof DraftingError)) throw error;
+      refusal ??= error;
+    }
+  }
+  throw refusal ?? new Error('a bust dart has an angle');
+}
+
 /**
  * Draws the bodice block on the table (method section 5): quarters, side seam and waist darts, neck and
  * shoulder, the bust dart opened outwards at the shoulder, armholes; last, the dart is turned to its seam.
@@ -104,7 +145,7 @@ export function drawBodiceBlock(
     back: quartersOf('back', body, style, rules),
   };
   const plans = planHalves(figuresOf(quarters, body, bustPoint, heights, rules), heights, rules);
-  const angle: BustDartAngle = bustDartAngle(style.bustDartRule, body, levels, {
+  const wished: BustDartAngle = bustDartAngle(style.bustDartRule, body, levels, {
     backRise: backNeckRise(body.measures.neckGirth),
     bustQuarter: quarters.front.bust.value,
   });
@@ -112,13 +153,14 @@ export function drawBodiceBlock(
     front: frontShoulder(body, levels),
     back: backShoulder(body, levels, style.shoulderEase),
   };
-  const opened = openShoulder(shoulders.front, bustPoint, angle.angle);
-  const armholes = pairArmholes(
-    body,
-    levels.underarm,
-    rules.allowance.top,
-    { plan: plans.front, shoulder: shoulders.front, opened },
-    { plan: plans.back, shoulder: shoulders.back },
+  const { opened, armholes, angle } = openedToFit(wished, shoulders.front, bustPoint, (dart) =>
+    pairArmholes(
+      body,
+      levels.underarm,
+      rules.allowance.top,
+      { plan: plans.front, shoulder: shoulders.front, opened: dart },
+      { plan: plans.back, shoulder: shoulders.back },
+    ),
   );
   warnOfTightArmhole(table, body, armholes);
   const bustNotch = (heights.bust - heights.underarm) * Math.hypot(1, plans.front.lean);
