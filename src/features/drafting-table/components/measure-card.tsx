@@ -93,6 +93,25 @@ export const MeasureCard = memo(function MeasureCard({
             }}
           />
         </label>
+        {alone && (
+          <label className="flex items-center justify-between gap-3 border-b border-rule py-1">
+            <span className="shrink-0">Measured on</span>
+            <input
+              name="card.date"
+              type="date"
+              className="h-9 rounded-one border border-rule bg-paper px-2"
+              value={state.date ?? ''}
+              onChange={(event) =>
+                dispatch({ type: 'put', parts: { date: event.currentTarget.value || null } })
+              }
+              onKeyDown={(event) => {
+                if (event.key !== 'Enter') return;
+                event.preventDefault();
+                focusNext(event.currentTarget);
+              }}
+            />
+          </label>
+        )}
         {coreMeasures.map(row)}
         <Doubts state={state} dispatch={dispatch} />
         <button
