@@ -22,7 +22,7 @@ import type { GownStyle } from './style-card.ts';
 export type TopEdges = { readonly topEdge: number; readonly armhole: number };
 
 /** A ring longer than the tape by more than this, mm, lies too loose to stay on the arms (our rule): it is refused. */
-const loosest = 300;
+const loosest = 450;
 
 /** The pieces of a gown off the shoulder with its bands set in. */
 export function setInBands(
