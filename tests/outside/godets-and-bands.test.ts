@@ -6,7 +6,6 @@ import { flareRadius, partOfCircle } from '#shared/drafts/gown/flare-plan.ts';
 import { godetPieces } from '#shared/drafts/gown/godet-pieces.ts';
 import { godetAngle } from '#shared/drafts/gown/godets.ts';
 import { skirtPanels } from '#shared/drafts/gown/skirt-panel.ts';
-import { longestStep } from '#shared/drafts/gown/walking.ts';
 import { endOf, pathLength, startOf } from '#shared/geometry/curve.ts';
 import { distance } from '#shared/geometry/point.ts';
 
@@ -74,12 +73,6 @@ describe('an A-line', () => {
     const part = partOfCircle(92 * cm, 233.4 * cm, 45 * cm);
     near(part, 0.5, 0.001);
     near(flareRadius(92 * cm, part) / cm, 29.28, 0.05);
-  });
-});
-
-describe('walking', () => {
-  test('32: one knee 36, leg 82, 40 under the hip joint: a step of 40 needs 75.0 of skirt (± 0.1)', () => {
-    near(longestStep(75 * cm, 36 * cm, 82 * cm, 40 * cm) / cm, 40, 0.1);
   });
 });
 
