@@ -6,16 +6,19 @@ import type { ThreadAnswer } from './thread-work.ts';
 
 /** A thread beside the one that answers requests; asked for one thing at a time. */
 export type WorkerThread<Order> = {
-  /** Throws RefusalError where the thread refuses. */
-  readonly ask: (order: Order) => Promise<unknown>;
+  /** Throws RefusalError where the thread refuses. Ends the thread when nobody waits for the answer any more. */
+  readonly ask: (order: Order, gone?: AbortSignal) => Promise<unknown>;
   readonly close: () => Promise<void>;
 };
 
-/** No gown takes a second; a thread that takes so long is lost, and a new one begun. */
-const patience = 30_000;
+/** No gown takes a second; a thread that takes so long is lost, and a new one begun, ms. */
+const usualPatience = 30_000;
 
 /** A thread that runs a program, begun when it is first asked and again when it is lost. */
-export function openThread<Order>(program: string): WorkerThread<Order> {
+export function openThread<Order>(
+  program: string,
+  patience: number = usualPatience,
+): WorkerThread<Order> {
   let worker: Worker | undefined;
 
   async function drop(): Promise<void> {
@@ -25,12 +28,12 @@ export function openThread<Order>(program: string): WorkerThread<Order> {
   }
 
   return {
-    ask: async (order) => {
+    ask: async (order, gone) => {
       worker ??= new Worker(program);
       try {
-        return madeIn(await nextAnswer(worker, order));
+        return madeIn(await nextAnswer(worker, order, { patience, gone }));
       } catch (error) {
-        if (!(error instanceof RefusalError)) await drop();
+        if (gone?.aborted === true || !(error instanceof RefusalError)) await drop();
         throw error;
       }
     },
@@ -38,7 +41,13 @@ export function openThread<Order>(program: string): WorkerThread<Order> {
   };
 }
 
-async function nextAnswer(worker: Worker, order: unknown): Promise<ThreadAnswer<unknown>> {
+type Waiting = { readonly patience: number; readonly gone: AbortSignal | undefined };
+
+async function nextAnswer(
+  worker: Worker,
+  order: unknown,
+  { patience, gone }: Waiting,
+): Promise<ThreadAnswer<unknown>> {
   const settled = new AbortController();
   const { signal } = settled;
   try {
@@ -49,12 +58,21 @@ async function nextAnswer(worker: Worker, order: unknown): Promise<ThreadAnswer<
     const late = pause(patience, undefined, { signal }).then(() => {
       throw new Error('The thread did not answer.');
     });
+    const left = gone && leaving(gone, signal);
     worker.postMessage(order);
-    return answerIn(await Promise.race([answered, ended, late]));
+    return answerIn(await Promise.race([answered, ended, late, ...(left ? [left] : [])]));
   } finally {
     settled.abort();
   }
 }
+
+/** Fails when whoever waits leaves; never settles otherwise. */
+const leaving = (gone: AbortSignal, until: AbortSignal): Promise<never> =>
+  new Promise((_, fail) => {
+    const leave = () => fail(new RefusalError('busy', 'Nobody waits for this any more.'));
+    if (gone.aborted) leave();
+    gone.addEventListener('abort', leave, { once: true, signal: until });
+  });
 
 /** The thread posts nothing else. */
 function answerIn([posted]: readonly unknown[]): ThreadAnswer<unknown> {

@@ -127,7 +127,7 @@ describe('under load', () => {
     const answered: number[] = [];
     const asked: Promise<void>[] = [];
     for (let turn = 0; turn < 8; turn += 1) {
-      const reply = post(`${address}/api/prints/tiles`, { ...print, pieces: 'whole-gown' });
+      const reply = post(`${address}/api/prints/tiles`, print);
       asked.push(
         reply.then(async (each) => {
           expect(each.status).toBe(200);
@@ -144,9 +144,7 @@ describe('under load', () => {
   it('who finds the line full is told so at once, and the others still get their pages', async () => {
     const address = await open({ printsWaiting: 1 });
     const replies = await Promise.all(
-      Array.from({ length: 12 }, () =>
-        post(`${address}/api/prints/tiles`, { ...print, pieces: 'whole-gown' }),
-      ),
+      Array.from({ length: 12 }, () => post(`${address}/api/prints/tiles`, print)),
     );
     const statuses = replies.map((each) => each.status);
     expect(new Set(statuses)).toEqual(new Set([200, 503]));
@@ -157,9 +155,7 @@ describe('under load', () => {
 
   it('the health route answers while prints wait', async () => {
     const address = await open({});
-    const prints = Array.from({ length: 6 }, () =>
-      post(`${address}/api/prints/tiles`, { ...print, pieces: 'whole-gown' }),
-    );
+    const prints = Array.from({ length: 6 }, () => post(`${address}/api/prints/tiles`, print));
     const order: string[] = [];
     const health = fetch(`${address}/api/health`).then((reply) => {
       order.push('health');

@@ -49,7 +49,10 @@ export function printRouter(limits: Limits, printer: Printer): Router {
     download({ what: 'pieces', wanted }, asked, named(wanted, [wanted.pieces], 'svg')),
   );
   const sheetsNamed = ({ inputs, order }: SheetsRequest, extension: 'pdf' | 'svg') => {
-    const pieces = typeof order.pieces === 'string' ? order.pieces : 'pieces';
+    const all =
+      inputs.garment === undefined || inputs.garment === 'gown' ? 'whole-gown' : inputs.garment;
+    const chosen = order.pieces === 'whole-gown' ? all : order.pieces;
+    const pieces = typeof chosen === 'string' ? chosen : 'pieces';
     const scale = order.scale === 1 ? [] : [`scale 1 ${1 / order.scale}`];
     const onPaper = extension === 'svg' ? [] : [paperOf(order.paper).name, ...scale];
     return fileName([inputs.card.name, pieces, ...onPaper], extension);
