@@ -43,6 +43,21 @@ export const levelLetters: { readonly [L in LevelName]: string } = {
   hem: 'E',
 };
 
+/** A notch as strokes of this length out of the seam line, two of them so far apart, mm on the page. */
+const notchLength = 2;
+const notchApart = 0.9;
+
+const notchesOf = ({ notches }: Piece, onPage: OnPage): readonly Path[] =>
+  notches.flatMap(({ at, outward, strokes: count }) => {
+    const { x, y } = onPage(at);
+    const offsets = count === 1 ? [0] : [-notchApart / 2, notchApart / 2];
+    return offsets.map((off) => {
+      const [fromX, fromY] = [x - outward.y * off, y + outward.x * off];
+      const [toX, toY] = [fromX + outward.x * notchLength, fromY + outward.y * notchLength];
+      return stroke(fromX, fromY, toX, toY);
+    });
+  });
+
 /** One half of the gown at quarter scale, its points dotted and numbered. */
 export function drawHalf({ title, pieces, points, onPage }: DrawnHalf): readonly Mark[] {
   const small = (path: Path): Path => pathOnPage(path, onPage);
@@ -65,6 +80,7 @@ export function drawHalf({ title, pieces, points, onPage }: DrawnHalf): readonly
         return stroke(x - 0.45, y, x + 0.45, y);
       }),
     ),
+    strokes(pens.notch, ...pieces.flatMap((each) => notchesOf(each, onPage))),
     ...points.map(({ number, at, aside }) => {
       const { x, y } = onPage(at);
       return words(

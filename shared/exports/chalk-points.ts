@@ -20,6 +20,8 @@ export type ChalkPoint = {
   readonly at: Point;
   readonly level: LevelName;
   readonly offLevel: number;
+  /** Strokes of the notch to make there, where there is one: one in front, two at the back. */
+  readonly notch?: 1 | 2;
   /** Direction from the point in which its number stands clear of the line. */
   readonly aside: Point;
 };
@@ -48,7 +50,12 @@ const nearestLevel = (y: number, levels: Levels): readonly [LevelName, number] =
     Math.abs(each[1] - y) < Math.abs(best[1] - y) - 1e-9 ? each : best,
   );
 
-type Found = { readonly what: string; readonly at: Point; readonly aside: Point };
+type Found = {
+  readonly what: string;
+  readonly at: Point;
+  readonly aside: Point;
+  readonly notch?: 1 | 2;
+};
 
 /** Clear of a line that runs in `tangent`, to its right, and lifted off the level it may stand on. */
 const beside = (tangent: Point): Point => {
@@ -137,12 +144,19 @@ function pointsOf(piece: Piece, levels: Levels): readonly Found[] {
       ...leg(dart.sideLeg, unit(point(1, -0.7))),
     ];
   });
-  return [...corners, ...along, ...darts];
+  const notches = piece.notches.map(({ name, at, outward, strokes }): Found => ({
+    what: name === 'zip-end' ? 'zip ends' : spoken(name),
+    at,
+    aside: unit(subtract(point(0, 0), outward)),
+    notch: strokes,
+  }));
+  return [...corners, ...along, ...darts, ...notches];
 }
 
 /**
  * Every point of some pieces that stand in one half-body frame, numbered from `first` in reading order
- * round each piece; a place that two pieces share is named once.
+ * round each piece; a place that two pieces share is named once, and a notch on a place that has a name
+ * is marked there.
  */
 export function chalkPoints(
   pieces: readonly Piece[],
@@ -150,8 +164,13 @@ export function chalkPoints(
   first: number,
 ): readonly ChalkPoint[] {
   const kept: ChalkPoint[] = [];
-  for (const { what, at, aside } of pieces.flatMap((each) => pointsOf(each, levels))) {
-    if (kept.some((each) => distance(each.at, at) < same)) continue;
+  for (const { what, at, aside, notch } of pieces.flatMap((each) => pointsOf(each, levels))) {
+    const there = kept.findIndex((each) => distance(each.at, at) < same);
+    const known = kept[there];
+    if (known) {
+      if (notch) kept[there] = { ...known, notch };
+      continue;
+    }
     const [level, height] = nearestLevel(at.y, levels);
     kept.push({
       number: first + kept.length,
@@ -160,6 +179,7 @@ export function chalkPoints(
       level,
       offLevel: at.y - height,
       aside,
+      ...(notch ? { notch } : {}),
     });
   }
   return kept;

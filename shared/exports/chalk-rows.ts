@@ -43,13 +43,18 @@ export const pointRows = (
   unit: Unit,
 ): readonly Row[] => [
   { kind: 'heading', text: `${title}, ${unit}` },
-  { kind: 'point', cells: ['', 'point', 'from centre', 'level'] },
-  ...points.map(({ number, what, at, level, offLevel }): Row => {
+  { kind: 'point', cells: ['', 'point, N a notch', 'from centre', 'level'] },
+  ...points.map(({ number, what, at, level, offLevel, notch }): Row => {
     const off = chalked(Math.abs(offLevel), unit);
     const shown = off === chalked(0, unit) ? '' : ` ${offLevel < 0 ? '↑' : '↓'} ${off}`;
     return {
       kind: 'point',
-      cells: [String(number), what, chalked(at.x, unit), `${levelLetters[level]}${shown}`],
+      cells: [
+        String(number),
+        notch ? `N ${what}` : what,
+        chalked(at.x, unit),
+        `${levelLetters[level]}${shown}`,
+      ],
     };
   }),
 ];

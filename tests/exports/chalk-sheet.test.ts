@@ -41,6 +41,20 @@ describe.each(['princess', 'darts'] as const)('the chalk sheet of a gown with %s
     }
   });
 
+  it('names where the zip ends, and marks every notch of its pieces', () => {
+    for (const pieces of halves) {
+      const points = chalkPoints(pieces, draft.levels, 1);
+      const notches = pieces.flatMap((each) => each.notches);
+      expect(notches.length).toBeGreaterThan(2);
+      for (const { at, strokes } of notches) {
+        const near = points.filter((each) => distance(each.at, at) < 2);
+        expect(near.map((each) => each.notch)).toContain(strokes);
+      }
+    }
+    const texts = lettered(draft, { paper: 'A4', unit: 'cm' }).map((each) => each.text);
+    expect(texts).toContain('N zip ends');
+  });
+
   it('gives each as its distance from the centre line and from a level struck on the table', () => {
     for (const pieces of halves) {
       for (const { at, level, offLevel } of chalkPoints(pieces, draft.levels, 1)) {
