@@ -4,7 +4,13 @@ import { readInputs } from '#shared/api/read-body.ts';
 import { coreMeasures, furtherMeasures } from '#shared/body/card.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
 import { balanced } from '#shared/drafting/house-rule-presets.ts';
-import { easeLevels, styleLengths } from '#shared/drafts/gown/style-card.ts';
+import {
+  bodiceBlockLengths,
+  bustDartRules,
+  dartPlaces,
+} from '#shared/drafts/bodice-block/style-card.ts';
+import { easeLevels, styleChoices, styleLengths } from '#shared/drafts/gown/style-card.ts';
+import { skirtLengthKeys } from '#shared/drafts/skirt-block/style-card.ts';
 import { draftAny, type DraftedInputs } from '#shared/engine/drafted.ts';
 import type { Problem } from '#shared/units/problem.ts';
 import { speak } from '#shared/units/speak.ts';
@@ -43,7 +49,10 @@ const mishap = fc.oneof(
 );
 
 const measureKeys = [...coreMeasures, ...furtherMeasures];
-const styleKeys = [...styleLengths, ...easeLevels.map((level) => `ease.${level}`)];
+const styleKeys: readonly string[] = [
+  ...styleLengths,
+  ...easeLevels.map((level) => `ease.${level}`),
+];
 const rulesKeys = [
   'sideShare',
   'dartWidest',
@@ -80,7 +89,7 @@ const exchanged = fc
   .tuple(fc.constantFrom(...coreMeasures), fc.constantFrom(...coreMeasures))
   .map(([a, b]) => (old: Figures): Figures => ({ ...old, [a]: old[b], [b]: old[a] }));
 
-const cards = fc
+const spoiledCards = fc
   .tuple(
     mishaps(measureKeys, 4),
     fc.oneof(
@@ -90,11 +99,64 @@ const cards = fc
   )
   .map(([spoil, exchange]) => spoil(exchange({ ...middleBody })));
 
-const sent = fc.record({
-  card: cards,
-  style: mishaps(styleKeys, 3).map((spoil) => spoil({})),
-  rules: mishaps(rulesKeys, 2).map((spoil) => spoil({ ...balanced })),
-});
+/** As often a card without fault, so that what is wrong with the style is reached. */
+const cards = fc.oneof(fc.constant<Figures>({ ...middleBody }), spoiledCards);
+
+/** Rules that may be hit, each of them. */
+const rules = mishaps(rulesKeys, 2).map((spoil) => spoil({ ...balanced }));
+
+/** Options of a style card by name, now and then one that does not exist. */
+const named = (choices: Readonly<Record<string, readonly string[]>>): fc.Arbitrary<Figures> =>
+  fc
+    .array(
+      fc
+        .constantFrom(...Object.entries(choices))
+        .chain(([key, options]) =>
+          fc
+            .oneof({ weight: 9, arbitrary: fc.constantFrom(...options) }, fc.constant('none such'))
+            .map((option) => [key, option] as const),
+        ),
+      { maxLength: 4 },
+    )
+    .map((pairs) => Object.fromEntries(pairs));
+
+const styled = (
+  choices: Readonly<Record<string, readonly string[]>>,
+  keys: readonly string[],
+): fc.Arbitrary<Figures> =>
+  fc.tuple(named(choices), mishaps(keys, 3)).map(([chosen, spoil]) => spoil(chosen));
+
+const blockEase = ['ease.bust', 'ease.waist', 'ease.hip'];
+const bodiceStyle = styled({ bustDart: dartPlaces, bustDartRule: bustDartRules }, [
+  ...Object.keys(bodiceBlockLengths),
+  ...blockEase,
+]);
+const skirtStyle = mishaps([...skirtLengthKeys, ...blockEase], 3).map((spoil) => spoil({}));
+
+const sent = fc.oneof(
+  {
+    weight: 4,
+    arbitrary: fc.record({ card: cards, style: styled(styleChoices, styleKeys), rules }),
+  },
+  {
+    weight: 1,
+    arbitrary: fc.record({
+      garment: fc.constant('bodice-block'),
+      card: cards,
+      style: bodiceStyle,
+      rules,
+    }),
+  },
+  {
+    weight: 1,
+    arbitrary: fc.record({
+      garment: fc.constantFrom('skirt-block', 'skirt-block', 'cape'),
+      card: cards,
+      style: skirtStyle,
+      rules,
+    }),
+  },
+);
 
 function expectSentences(problems: readonly Problem[]): void {
   expect(problems.length).toBeGreaterThan(0);
