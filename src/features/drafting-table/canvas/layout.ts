@@ -17,87 +17,88 @@ export type Layout = {
   readonly placed: readonly Placed[];
   readonly frames: Readonly<Record<Side | 'flare', Point>>;
   readonly levels: readonly { readonly name: LevelName; readonly y: number }[];
-  /** Where the lines of the levels stop: a flare lies in a frame of its own, which they say nothing about. */
+  /** Where the lines of the levels stop: what is no body lies apart, where they say nothing. */
   readonly levelsEnd: number;
   readonly box: Box;
 };
 
-/** Room between the frames of front, back and flare, mm. */
+/** Room between the frames of front and back and what lies beside, mm. */
 const gap = 90;
 
-/** Room between flares, mm. */
+/** Room between pieces that are no body, mm. */
 const apart = 40;
 
-/** Further room before the flares, for the names of the levels at the end of their lines, mm. */
+/** Further room before them, for the names of the levels at the end of their lines, mm. */
 const nameRoom = 140;
 
-/** The levels stop so far before the flares, mm. */
-const beforeFlares = 20;
+/** The levels stop so far before them, mm. */
+const beforeOthers = 20;
 
-/** The pieces as they were drafted: each side in one frame, front, back and flare side by side. */
+/** Whether a piece lies on the body's own levels: flares, bands and what goes inside lie beside. */
+export const isBody = ({ part }: FinishedPiece): boolean => part === 'top' || part === 'middle';
+
+/** The pieces as they were drafted: each side in one frame, front and back side by side, the others beside them. */
 export function asDrafted(pieces: readonly FinishedPiece[], aspect = 1): Layout {
-  const groups = [
-    pieces.filter((each) => each.part !== 'flare' && each.side === 'front'),
-    pieces.filter((each) => each.part !== 'flare' && each.side === 'back'),
-    pieces.filter((each) => each.part === 'flare'),
-  ];
+  const bodies = pieces.filter(isBody);
   let x = 0;
-  const [front, back, flare] = groups.map((group) => {
-    // The gores lie beside the first of them, wherever in their frame they were struck.
-    const box = around((group === groups[2] ? group.slice(0, 1) : group).map(boxOf));
+  const [front, back] = (['front', 'back'] as const).map((half) => {
+    const group = bodies.filter(({ side }) => side === half);
+    const box = around(group.map(boxOf));
     const at = point(x - box.left, 0);
-    x += box.right - box.left + gap + (group === groups[1] ? nameRoom : 0);
+    x += box.right - box.left + gap;
     return { at, placed: group.map((piece) => place(piece, at)) };
   });
   const origin = point(0, 0);
+  // The gores lie beside the first of them, wherever in their frame they were struck.
+  const struck = pieces.filter(({ part }) => part === 'flare').slice(0, 1);
   const frames = {
     front: front?.at ?? origin,
     back: back?.at ?? origin,
-    flare: flare?.at ?? origin,
+    flare: point(x + nameRoom - around(struck.map(boxOf)).left, 0),
   };
-  return withFlares(
-    [...(front?.placed ?? []), ...(back?.placed ?? [])],
-    flare?.placed ?? [],
-    frames,
-    aspect,
-  );
+  return withOthers([...(front?.placed ?? []), ...(back?.placed ?? [])], pieces, frames, aspect);
 }
 
-/** The pieces cut apart, as they lie in the SVG too, but with the flares so stacked that a screen shows all large. */
+/** The pieces cut apart, as they lie in the SVG too, but with what is no body so stacked that a screen shows all large. */
 export function asCut(pieces: readonly FinishedPiece[], aspect = 1): Layout {
-  const placed = spread(pieces).placed.map(({ piece, translate }) => place(piece, translate));
-  const bodies = placed.filter(({ piece }) => piece.part !== 'flare');
-  const flares = placed
-    .filter(({ piece }) => piece.part === 'flare')
-    .map(({ piece, at }) => place(piece, add(at, point(nameRoom, 0))));
+  const bodies = spread(pieces.filter(isBody)).placed.map(({ piece, translate }) =>
+    place(piece, translate),
+  );
   const origin = point(0, 0);
-  return withFlares(bodies, flares, { front: origin, back: origin, flare: origin }, aspect);
+  return withOthers(bodies, pieces, { front: origin, back: origin, flare: origin }, aspect);
 }
 
-/** Every gore in a place of its own, in so many columns that the whole fits a canvas of this width over height best. */
-function withFlares(
+/** What is no body in columns beside, so high that the whole fits a canvas of this width over height best. */
+function withOthers(
   bodies: readonly Placed[],
-  flares: readonly Placed[],
+  pieces: readonly FinishedPiece[],
   frames: Layout['frames'],
   aspect: number,
 ): Layout {
-  const all = laid([...bodies, ...inColumns(flares, 1)], frames);
-  return flares
-    .map((_, index) => laid([...bodies, ...inColumns(flares, index + 1)], frames))
-    .reduce((best, each) => (side(each.box, aspect) < side(best.box, aspect) ? each : best), all);
+  const others = pieces.filter((piece) => !isBody(piece)).map((piece) => place(piece, point(0, 0)));
+  const { right, top } = around(bodies.map(({ box }) => box));
+  const from = point(right + gap + nameRoom, top);
+  const heights = others.map(({ box }) => box.bottom - box.top);
+  const highest = Math.max(0, ...heights);
+  // As high as the highest alone, as with the next under it, and so on.
+  const tries = heights.map((_, index) =>
+    heights.slice(0, index + 1).reduce((sum, each) => sum + each + apart, 0),
+  );
+  return [highest, ...tries.filter((each) => each > highest)]
+    .map((most) => laid([...bodies, ...inColumns(others, from, most)], frames))
+    .reduce((best, each) => (side(each.box, aspect) < side(best.box, aspect) ? each : best));
 }
 
 /** Height of the canvas a box fits on. */
 const side = (box: Box, aspect: number): number =>
   Math.max((box.right - box.left) / aspect, box.bottom - box.top);
 
-/** Pieces from the first one's place on, so many under each other, then a further column. */
-function inColumns(pieces: readonly Placed[], rows: number): Placed[] {
-  let [x, y] = [pieces[0]?.box.left ?? 0, pieces[0]?.box.top ?? 0];
-  const top = y;
+/** Pieces under each other up to a height, then in a further column. */
+function inColumns(pieces: readonly Placed[], from: Point, most: number): Placed[] {
+  let { x, y } = from;
   let right = x;
-  return pieces.map(({ piece, at, box }, index) => {
-    if (index > 0 && index % rows === 0) [x, y] = [right + apart, top];
+  return pieces.map(({ piece, at, box }) => {
+    if (y > from.y && y + box.bottom - box.top > from.y + most) [x, y] = [right + apart, from.y];
     const placed = place(piece, add(at, point(x - box.left, y - box.top)));
     y += box.bottom - box.top + apart;
     right = Math.max(right, placed.box.right);
@@ -115,13 +116,12 @@ function laid(placed: readonly Placed[], frames: Layout['frames']): Layout {
   const levels = levelNames.flatMap((name) => {
     for (const { piece, at } of placed) {
       const found = piece.levels.find((each) => each.level === name);
-      if (found !== undefined && piece.part !== 'flare')
-        return [{ name, y: add(found.from, at).y }];
+      if (found !== undefined && isBody(piece)) return [{ name, y: add(found.from, at).y }];
     }
     return [];
   });
-  const flares = placed.filter(({ piece }) => piece.part === 'flare');
-  const levelsEnd = Math.min(...flares.map(({ box }) => box.left)) - beforeFlares;
+  const others = placed.filter(({ piece }) => !isBody(piece));
+  const levelsEnd = Math.min(...others.map(({ box }) => box.left)) - beforeOthers;
   return { placed, frames, levels, levelsEnd, box: around(placed.map((each) => each.box)) };
 }
 

@@ -2,7 +2,7 @@ import type { Drafted } from '#shared/engine/drafted.ts';
 import { levelTitles } from '#shared/exports/level-titles.ts';
 
 import { rodWidth } from '../../../ui/rod.tsx';
-import type { Layout } from './layout.ts';
+import { isBody, type Layout } from './layout.ts';
 import { pieceLabels, type PieceLabel } from './piece-labels.ts';
 import { toScreen, type Size, type View } from './view.ts';
 
@@ -48,7 +48,7 @@ export const Lettering = ({ draft, layout, view, size, named }: LetteringProps) 
 };
 
 const bodies = ({ placed }: Layout): Layout['placed'] =>
-  placed.filter(({ piece }) => piece.part !== 'flare');
+  placed.filter(({ piece }) => isBody(piece));
 
 const PieceName = ({ label }: { label: PieceLabel }) => {
   const { title, cut, fault, small, at, hairline } = label;

@@ -8,6 +8,9 @@ type Named = Pick<Piece, 'name' | 'title' | 'side' | 'part'>;
  */
 export function shortTitle({ name, title, side, part }: Named): string {
   const front = side === 'front';
+  if (name.startsWith('lining-')) return `Lining ${shortTitle(lined({ name, title, side, part }))}`;
+  if (part === 'sleeve' || part === 'inner') return title.split(',')[0] ?? title;
+  if (name.startsWith('godet')) return `Godet ${front ? 'F' : 'B'}`;
   if (part === 'flare') {
     const gore = /-(\d+)$/.exec(name)?.[1];
     const centre = title.includes('centre gore') ? ' centre' : '';
@@ -17,4 +20,11 @@ export function shortTitle({ name, title, side, part }: Named): string {
   if (part === 'middle') return `${half} skirt`;
   if (name.endsWith('-centre')) return `${half} ${front ? 'CF' : 'CB'}`;
   return name.endsWith('-side') ? `${half} side` : `${half} top`;
+}
+
+/** The piece of the gown a lining lies under. */
+function lined({ name, ...piece }: Named): Named {
+  const under = name.slice('lining-'.length);
+  const part = under.startsWith('flare') ? 'flare' : under.endsWith('middle') ? 'middle' : 'top';
+  return { ...piece, name: under, part };
 }

@@ -29,10 +29,14 @@ export function useFraming(key: string, box: Box, size: Size) {
 const seen = (framing: Framing, size: Size): View =>
   'view' in framing ? framing.view : fitted(framing.box, size, framing.place);
 
-/** Whether pieces have grown or shrunk so far that the fitted box no longer frames them. */
+/** Whether pieces have grown out of the fitted box, or shrunk so far that it no longer frames them. */
 function outgrows(now: Box, framed: Box): boolean {
-  const reach = 0.08 * Math.max(framed.right - framed.left, framed.bottom - framed.top, 1);
-  return (['left', 'right', 'top', 'bottom'] as const).some(
-    (side) => Math.abs(now[side] - framed[side]) > reach,
-  );
+  const size = Math.max(framed.right - framed.left, framed.bottom - framed.top, 1);
+  const grown = [
+    framed.left - now.left,
+    now.right - framed.right,
+    framed.top - now.top,
+    now.bottom - framed.bottom,
+  ];
+  return grown.some((by) => by > 0.01 * size || by < -0.08 * size);
 }
