@@ -93,9 +93,9 @@ function halfMarks(picture: StepPicture, frame: Frame): readonly Mark[] {
   ];
 }
 
-/** All pieces apart, as after the last step: cutting line outside the dashed seam line. */
-function piecesMarks({ pieces }: Told, frame: Frame): readonly Mark[] {
-  const { placed, width, height } = spread(pieces);
+/** Pieces apart: the cutting line outside the dashed seam line. */
+function piecesMarks({ laid }: StepPicture, frame: Frame): readonly Mark[] {
+  const { placed, width, height } = spread(laid);
   const { at } = pageOf({ x: 0, y: 0, width, height }, frame);
   return placed.flatMap(({ piece, translate }) => {
     const small = (path: Path): Path => pathOnPage(path, (p) => at(add(p, translate)));
@@ -114,6 +114,7 @@ export function worksheetFigure(told: Told, place: number, frame: Frame): readon
   const picture = stepPicture(told, place);
   if (!picture) return [];
   const { x, y, width, height } = frame;
-  const marks = picture.frame === 'pieces' ? piecesMarks(told, frame) : halfMarks(picture, frame);
+  const marks =
+    picture.frame === 'pieces' ? piecesMarks(picture, frame) : halfMarks(picture, frame);
   return [{ kind: 'window', box: frame, marks }, box(pens.hairline, x, y, width, height)];
 }

@@ -8,6 +8,7 @@ import { speak } from '../units/speak.ts';
 import { cuttingCautions } from './cautions.ts';
 import { draftLine } from './cover.ts';
 import type { Mark, PrintJob } from './drawing.ts';
+import { garmentTitles } from './garment-titles.ts';
 import { pens, stroke, strokes, words } from './marks.ts';
 import { paragraph, stack } from './text-block.ts';
 import { shorten } from './type-width.ts';
@@ -27,12 +28,6 @@ const headingHeight = 9;
 
 /** Something that stands in one place of a page: it says how high it is, and draws itself at a height. */
 type Item = { readonly height: number; readonly draw: (y: number) => readonly Mark[] };
-
-const titles = {
-  gown: 'Worksheet: a gown, step by step',
-  'bodice-block': 'Worksheet: a bodice block, step by step',
-  'skirt-block': 'Worksheet: a skirt block, step by step',
-} as const;
 
 /** A sentence in which no number is parted from its unit at the end of a line. */
 const held = (sentence: Said, unit: Unit): string =>
@@ -122,7 +117,13 @@ function furniture(draft: Drafted, paper: Paper, page: number, pages: number): r
   const bottom = paper.height - printerMargin;
   const line = shorten(draftLine(draft), 3.2, right - left - 30);
   return [
-    words(titles[draft.garment], left, printerMargin + 5, 5.4, { heavy: true }),
+    words(
+      `Worksheet: ${garmentTitles[draft.garment].toLowerCase()}, step by step`,
+      left,
+      printerMargin + 5,
+      5.4,
+      { heavy: true },
+    ),
     words('Ellwand', right, printerMargin + 5, 5, { anchor: 'end', heavy: true, grey: 0.3 }),
     words(line, left, printerMargin + 10, 3.2),
     words(`page ${page} of ${pages}`, right, printerMargin + 10, 3.2, { anchor: 'end' }),

@@ -25,6 +25,8 @@ export type StepPicture = {
   /** Points of this step, and of earlier ones. */
   readonly points: readonly NamedPoint[];
   readonly cut: readonly CutPiece[];
+  /** Where the step is about pieces: which, to be laid beside each other. */
+  readonly laid: readonly FinishedPiece[];
   /** Where to look at this step. */
   readonly near: Box;
   /** All of the frame that is drawn by the end. */
@@ -38,11 +40,19 @@ const closest = 190;
 /** Room about what is looked at, as a part of its size. */
 const margin = 0.14;
 
-/** Levels stand in both halves and are first seen on the front. */
+/** Levels stand in both halves and are first seen on the front; what draws nothing speaks of pieces. */
 const frameOf = (step: Step): StepPicture['frame'] => {
-  if (step.side !== 'both') return step.side;
-  return drawsNothing(step) ? 'pieces' : 'front';
+  if (drawsNothing(step)) return 'pieces';
+  return step.side === 'both' ? 'front' : step.side;
 };
+
+/** The pieces a step is about: those it completes, those below the knee, or all. */
+function laidFor({ pieces }: Told, step: Step): readonly FinishedPiece[] {
+  const own = pieces.filter(({ name }) => step.pieces?.includes(name) === true);
+  if (own.length > 0) return own;
+  const flares = step.side === 'flare' ? pieces.filter(({ part }) => part === 'flare') : [];
+  return flares.length > 0 ? flares : pieces;
+}
 
 const drawsNothing = ({ lines, points }: Step): boolean =>
   lines.length === 0 && Object.keys(points).length === 0;
@@ -104,6 +114,7 @@ export function stepPicture(told: Told, place: number): StepPicture | undefined 
     now: step.lines,
     points: [...earlier.flatMap((each) => named(each, false)), ...named(step, true)],
     cut,
+    laid: frame === 'pieces' ? laidFor(told, step) : [],
     near: nearOf(step, cut, whole),
     whole: roomy(whole),
   };

@@ -36,7 +36,7 @@ export const Stage = memo(function Stage({ told, place, whole, far, label }: Sta
   const frame = useRef<HTMLDivElement>(null);
   const size = useSize(frame);
   const picture = useMemo(() => stepPicture(told, place), [told, place]);
-  const laid = useMemo(() => spread(told.pieces), [told.pieces]);
+  const laid = useMemo(() => spread(picture?.laid ?? []), [picture]);
   const table: Box = { x: 0, y: 0, width: laid.width, height: laid.height };
   const wanted = wantedLook(picture, whole, table);
   const look = useLook(wanted, picture?.frame ?? 'pieces');
@@ -168,11 +168,12 @@ const frameWords = {
   front: 'front half',
   back: 'back half',
   flare: 'flare',
-  pieces: 'all pieces',
+  pieces: 'pieces',
 } as const;
 
-function altOf({ steps }: Told, place: number, { frame, now, points }: StepPicture): string {
+function altOf({ steps }: Told, place: number, { frame, now, points, laid }: StepPicture): string {
   const named = points.filter((each) => each.now).map(({ name }) => name);
+  if (frame === 'pieces') return `${steps[place]?.title ?? ''}, ${String(laid.length)} pieces`;
   const lines = now.length === 1 ? '1 new line' : `${String(now.length)} new lines`;
   const lit = named.length === 0 ? '' : `; points ${named.join(', ')}`;
   return `${steps[place]?.title ?? ''}, ${frameWords[frame]}, ${lines}${lit}`;
