@@ -10,7 +10,6 @@ import { createGown } from './features/gowns/service.ts';
 import { classVisitsRouter, lessonsRouter } from './features/lessons/router.ts';
 import { measureCardsRouter } from './features/measure-cards/router.ts';
 import { peopleRouter } from './features/people/router.ts';
-import { overlaysRouter } from './features/print/overlays-router.ts';
 import type { Printer } from './features/print/printer.ts';
 import { printRouter } from './features/print/router.ts';
 import { samplesRouter } from './features/samples/router.ts';
@@ -65,7 +64,6 @@ export function buildApp(parts: Parts): Express {
   app.use(samplesRouter(parts.database));
   app.use(draftsRouter(parts.limits, parts.drafter));
   app.use(printRouter(parts.limits, parts.printer));
-  app.use(overlaysRouter(parts.printer));
   const own: Own = { ...parts, sessions: openSessions(parts.database, parts.overHttps) };
   app.use(accountRouter(own, (maker, gown) => createGown(own, maker, gown)));
   app.use(gownsRouter(own));

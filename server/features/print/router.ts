@@ -17,6 +17,7 @@ import { turnOf } from '../../http/turn-of.ts';
 import type { Limits } from '../../settings.ts';
 import type { PrintTask } from './print-task.ts';
 import type { Printer } from './printer.ts';
+import { serveOverlays } from './serve-overlays.ts';
 
 /** Prints share one limit per address and one line to wait in, whatever is printed. */
 export function printRouter(limits: Limits, printer: Printer): Router {
@@ -70,5 +71,6 @@ export function printRouter(limits: Limits, printer: Printer): Router {
       fileName([wanted.inputs.card.name, 'worksheet', wanted.paper], 'pdf'),
     ),
   );
+  serveOverlays(router, download);
   return router;
 }

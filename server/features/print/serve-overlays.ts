@@ -1,4 +1,3 @@
-import { Router } from 'express';
 import {
   printComparison,
   printComparisonSvg,
@@ -6,24 +5,19 @@ import {
   printNestSvg,
 } from '#shared/api/comparing.ts';
 import type { Endpoint } from '#shared/api/endpoint.ts';
-import { attachment, fileName } from '../../http/file-name.ts';
+import { fileName } from '../../http/file-name.ts';
 import { type Asked, type Download, serve } from '../../http/serve.ts';
-import { turnOf } from '../../http/turn-of.ts';
 import type { PrintTask } from './print-task.ts';
-import type { Printer } from './printer.ts';
+
+/** How a task becomes a file that is offered under a name. */
+type Downloads = (
+  task: PrintTask,
+  asked: Pick<Asked<Endpoint>, 'request' | 'response'>,
+  name: string,
+) => Promise<Download>;
 
 /** Drafts over each other, and nests; they wait in the line of all prints. */
-export function overlaysRouter(printer: Printer): Router {
-  const router = Router();
-
-  const download = async (
-    task: PrintTask,
-    { request, response }: Pick<Asked<Endpoint>, 'request' | 'response'>,
-    name: string,
-  ): Promise<Download> => ({
-    bytes: await printer.print(task, turnOf(request, response)),
-    disposition: attachment(name),
-  });
+export function serveOverlays(router: Parameters<typeof serve>[0], download: Downloads): void {
   const onPaper = ({ paper, scale }: { readonly paper: string; readonly scale: number }) =>
     scale === 1 ? [paper] : [`scale 1 to ${1 / scale}`, paper];
 
@@ -52,5 +46,4 @@ export function overlaysRouter(printer: Printer): Router {
       fileName([wanted.inputs.card.name, 'nest'], 'svg'),
     ),
   );
-  return router;
 }
