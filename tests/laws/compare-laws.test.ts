@@ -69,15 +69,26 @@ describe('on any body, in any style', () => {
           compared += 1;
           const rows = figureRows(bare, eased);
           for (const level of easeLevels) {
-            const row = rows.find((each) => each.key === `girth:${levelOf[level]}`);
+            // Where the waist seam lies at the waist, the waist is counted along it.
+            const atWaist = level === 'waist' && inputs.style.waistSeam === 'natural';
+            const key = `girth:${atWaist ? 'waist-seam' : levelOf[level]}`;
+            const row = rows.find((each) => each.key === key);
             const apart = (row?.second ?? Number.NaN) - (row?.first ?? Number.NaN);
-            expect(Math.abs(apart - eased.style.ease[level]), level).toBeLessThan(0.5);
+            // Each of the two girths is proven to half a millimetre on the pieces, and promised exactly.
+            expect(Math.abs(apart - eased.style.ease[level]), level).toBeLessThan(1);
+            const promised = [eased, bare].map(
+              ({ proof }) => proof.girths.find((each) => key === `girth:${each.level}`)?.wanted,
+            );
+            expect((promised[0] ?? Number.NaN) - (promised[1] ?? Number.NaN)).toBeCloseTo(
+              eased.style.ease[level],
+              6,
+            );
           }
         }
       }),
-      lawParameters('eased less un-eased', runs),
+      lawParameters('eased less un-eased', Math.ceil(runs / 2)),
     );
-    expect(compared).toBeGreaterThan(runs / 2);
+    expect(compared).toBeGreaterThan(runs / 4);
   });
 
   test('finished girths of a nest differ by the summed steps, and every size proves', () => {
