@@ -35,7 +35,7 @@ const aside = [0, 9, -9];
 /**
  * A name for every piece at this zoom. First the cut line gives way, then the long title to the short one, then
  * one line to two; where a piece is too small for any, its name stands beside it at the end of a hairline, if there
- * is a free place.
+ * is a free place; linings and stays go without where there is none.
  */
 export function pieceLabels(
   layout: Layout,
@@ -44,7 +44,7 @@ export function pieceLabels(
 ): readonly PieceLabel[] {
   const boxes = layout.placed.map(({ box }) => onScreen(box, view));
   const taken: Box[] = [];
-  return layout.placed.map((placed, index): PieceLabel => {
+  return layout.placed.flatMap((placed, index): PieceLabel[] => {
     const { piece } = placed;
     const box = boxes[index] ?? onScreen(placed.box, view);
     const fault = faultOf(piece.name);
@@ -56,13 +56,16 @@ export function pieceLabels(
         within.title.length > 1 ? lowShares[piece.part] : shares[piece.part],
       );
       taken.push(around(within, at));
-      return { piece: piece.name, ...within, at };
+      return [{ piece: piece.name, ...within, at }];
     }
     const words: Words = { title: stacked(piece), small: true, ...(fault && { fault }) };
     const others = [...taken, ...boxes.filter((_, other) => other !== index)];
-    const place = beside(words, box, others) ?? { at: centred(words, box, 0.5) };
+    const free = beside(words, box, others);
+    // From afar names would lie over each other: what goes inside gives way, unless it has a fault.
+    if (free === undefined && fault === undefined && piece.part === 'inner') return [];
+    const place = free ?? { at: centred(words, box, 0.5) };
     taken.push(around(words, place.at));
-    return { piece: piece.name, ...words, ...place };
+    return [{ piece: piece.name, ...words, ...place }];
   });
 }
 

@@ -5,6 +5,7 @@ import { coreMeasures } from '#shared/body/card.ts';
 import { measureGuide } from '#shared/body/measure-guide.ts';
 import { speak } from '#shared/units/speak.ts';
 
+import { useMedia } from '../../../lib/use-media.ts';
 import { Button } from '../../../ui/button.tsx';
 import { problemWords } from '../problem-words.ts';
 import type { TableAction, TableState } from '../table-state.ts';
@@ -19,8 +20,17 @@ type FootProps = {
 /** Under the drawing: whether it is that of the figures typed, what the knee allows, and each warning once that nobody has answered. */
 export const Foot = memo(function Foot({ draft, state, dispatch }: FootProps) {
   const wayOut = useNearest(state);
+  const narrow = useMedia('(max-width: 639px)');
   const { drawn, unit } = state;
   const fault = drawn.problems.find((problem) => problem.severity === 'error');
+  const doubts = drawn.fresh
+    ? drawn.problems.filter(({ overruled }) => overruled === undefined)
+    : [];
+  const notes = doubts.map((problem) => (
+    <p key={`${problem.field} ${problem.code}`}>{speak(problem.said, unit)}</p>
+  ));
+  // On a phone several notes would leave no room for what they are about.
+  const folded = narrow && doubts.length > 1;
   return (
     <div className="figures max-h-[30dvh] min-h-15 shrink-0 space-y-1 overflow-y-auto border-t border-rule px-4 py-2 text-sm sm:max-h-none sm:pl-10">
       <div role="status">
@@ -40,12 +50,14 @@ export const Foot = memo(function Foot({ draft, state, dispatch }: FootProps) {
           </Button>
         </p>
       )}
-      {drawn.fresh &&
-        drawn.problems
-          .filter(({ overruled }) => overruled === undefined)
-          .map((problem) => (
-            <p key={`${problem.field} ${problem.code}`}>{speak(problem.said, unit)}</p>
-          ))}
+      {folded ? (
+        <details>
+          <summary>{`${doubts.length} notes on this drawing`}</summary>
+          {notes}
+        </details>
+      ) : (
+        notes
+      )}
       {'walking' in draft && (
         <p
           className={`${draft.walking.caution ? '' : 'text-slate'} ${drawn.fresh ? '' : 'max-sm:hidden'}`}
