@@ -29,6 +29,9 @@ export type ChalkPoint = {
 /** Points nearer than this are one place to a piece of chalk, mm. */
 const same = 2;
 
+/** A notch is marked on a point as near as this: chalk lines are two millimetres wide, mm. */
+const onNotch = 4;
+
 /** A curve that leaves the straight line between two points by more than this gets one more point, mm. */
 const hollow = 4;
 
@@ -165,7 +168,8 @@ export function chalkPoints(
 ): readonly ChalkPoint[] {
   const kept: ChalkPoint[] = [];
   for (const { what, at, aside, notch } of pieces.flatMap((each) => pointsOf(each, levels))) {
-    const there = kept.findIndex((each) => distance(each.at, at) < same);
+    const near = notch ? onNotch : same;
+    const there = kept.findIndex((each) => distance(each.at, at) < near);
     const known = kept[there];
     if (known) {
       if (notch) kept[there] = { ...known, notch };

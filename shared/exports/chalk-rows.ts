@@ -42,8 +42,8 @@ export const pointRows = (
   points: readonly ChalkPoint[],
   unit: Unit,
 ): readonly Row[] => [
-  { kind: 'heading', text: `${title}, ${unit}` },
-  { kind: 'point', cells: ['', 'point, N a notch', 'from centre', 'level'] },
+  { kind: 'heading', text: `${title}, ${unit} · N notch` },
+  { kind: 'point', cells: ['', 'point', 'from centre', 'level'] },
   ...points.map(({ number, what, at, level, offLevel, notch }): Row => {
     const off = chalked(Math.abs(offLevel), unit);
     const shown = off === chalked(0, unit) ? '' : ` ${offLevel < 0 ? '↑' : '↓'} ${off}`;

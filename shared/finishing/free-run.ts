@@ -104,7 +104,7 @@ function strip(from: Point, to: Point, left: number, right: number): Chain {
   return [shifted(from, -left), shifted(to, -left), shifted(to, right), shifted(from, right)];
 }
 
-/** What lettering keeps clear of: darts, the grain line and its word, fold brackets, drill points. */
+/** What lettering keeps clear of: lines inside a piece, darts, the grain line and its word, fold brackets, drill points. */
 function marks(piece: Piece, scale: number): readonly Chain[] {
   const darts = piece.darts.map((dart) => [
     ...flatten(dart.centreLeg, 2),
@@ -117,7 +117,12 @@ function marks(piece: Piece, scale: number): readonly Chain[] {
   const drills = piece.drills.map(({ x, y }) =>
     strip({ x, y: y - drillMark }, { x, y: y + drillMark }, drillMark, drillMark),
   );
+  const inner = (piece.lines ?? []).flatMap(({ path }) => {
+    const [from, to] = [path[0]?.from, path.at(-1)?.to];
+    return from && to ? [strip(from, to, 0.5, 0.5)] : [];
+  });
   return [
+    ...inner,
     ...darts,
     ...folds,
     strip(piece.grain.from, piece.grain.to, 4 * scale, 4 * scale),

@@ -47,7 +47,7 @@ describe.each(['princess', 'darts'] as const)('the chalk sheet of a gown with %s
       const notches = pieces.flatMap((each) => each.notches);
       expect(notches.length).toBeGreaterThan(2);
       for (const { at, strokes } of notches) {
-        const near = points.filter((each) => distance(each.at, at) < 2);
+        const near = points.filter((each) => distance(each.at, at) < 4);
         expect(near.map((each) => each.notch)).toContain(strokes);
       }
     }
