@@ -43,6 +43,7 @@ const bodiceRules = bustDartRules.map((bustDartRule): ContactStyle => ({
 const skirtEases = [
   { title: 'As the style card stands when it is left open', style: {} },
   { title: 'Ease at the hip: 60 mm', style: { ease: { hip: 60 } } },
+  { title: 'Seat: none, front and back alike', style: { seat: 0 } },
 ];
 
 const skirts = skirtEases.map(({ title, style }): ContactStyle => ({

@@ -19,7 +19,13 @@ const border = 24;
 const titleSize = 15;
 const rowHead = 26;
 const gap = 18;
-const cellWidth = 330;
+const cellWidth = 460;
+/** A row is drawn no larger than this and no higher, so that small garments do not swell. */
+const largest = 0.6;
+const highest = 330;
+/** Lettering of a piece, and its breadth a letter. */
+const nameSize = 6.5;
+const letter = 0.52;
 
 const ink = '#1E2A32';
 const slate = '#5B6A72';
@@ -79,13 +85,22 @@ function inks(pieces: readonly FinishedPiece[], by: number): readonly Ink[] {
   ].filter(({ d }) => d !== '');
 }
 
-/** Names the pieces where their centre lines end, so that the halves can be told apart. */
+/** Part of the way down a piece at which its name stands clear of darts. */
+const clearOfDarts = 0.62;
+
+/** Names the pieces inside their centre lines, where a piece is wide enough to hold its name. */
 const pieceNames = (pieces: readonly FinishedPiece[], by: number): string =>
   spread(pieces)
     .placed.map(({ piece, translate }) => {
       const end = endOf(piece.edges.at(-1)?.path ?? []) ?? point(0, 0);
-      const [x, y] = [(end.x + translate.x) * by + 3, (end.y + translate.y) * by + 11];
-      return words(piece.title.replace(/^Bodice block, |^Skirt block, /, ''), x, y, 5, slate);
+      const title = piece.title.replace(/^(Bodice|Skirt) block, /, '');
+      const xs = piece.cutLine.map(({ to }) => to.x);
+      const ys = piece.cutLine.map(({ to }) => to.y);
+      const down = Math.min(...ys) + clearOfDarts * (Math.max(...ys) - Math.min(...ys));
+      const room = (Math.max(...xs) - end.x) * by - 8;
+      if (title.length * letter * nameSize > room) return '';
+      const [x, y] = [(end.x + translate.x) * by + 5, (down + translate.y) * by];
+      return words(title, x, y, nameSize, slate);
     })
     .join('');
 
@@ -116,7 +131,7 @@ const style =
   `.dart{fill:none;stroke:${ink};stroke-width:.6}.inner{fill:none;stroke:${slate};stroke-width:.5;stroke-dasharray:3 2}`;
 
 /**
- * A contact sheet as SVG: a row a choice, a column a body, every drawing at one scale; cutting and seam
+ * A contact sheet as SVG: a row a choice, a column a body, one scale a row; cutting and seam
  * lines, darts and inner lines. What could not be drawn, or does not hold, says so in its place.
  */
 export function contactSheet(
@@ -124,12 +139,16 @@ export function contactSheet(
   columns: readonly string[],
   rows: readonly ContactRow[],
 ): string {
-  const sizes = rows.flatMap((row) => row.contacts.map(sizeOf));
-  const by = cellWidth / Math.max(1, ...sizes.map(({ width }) => width));
   const width = 2 * border + columns.length * (cellWidth + gap) - gap;
   const left = (column: number): number => border + column * (cellWidth + gap);
   let y = border + 62;
   const drawn = rows.flatMap((row) => {
+    const sizes = row.contacts.map(sizeOf);
+    const by = Math.min(
+      largest,
+      cellWidth / Math.max(1, ...sizes.map(({ width }) => width)),
+      highest / Math.max(1, ...sizes.map(({ height }) => height)),
+    );
     const high = Math.max(40, ...row.contacts.map((contact) => sizeOf(contact).height * by));
     const head = words(row.title, border, y + titleSize, titleSize, ink, 600);
     const cells = row.contacts.map((contact, column) => {

@@ -1,7 +1,6 @@
 import type { Construction } from '../drafting/construction.ts';
 import type { HouseRules } from '../drafting/house-rules.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
-import type { Said } from '../units/said.ts';
 import { proveBends } from './bends.ts';
 import { proveCorners } from './corners.ts';
 import { proveDarts } from './darts.ts';
@@ -10,9 +9,10 @@ import { hasLength } from './crossing-itself.ts';
 import { joinedPairs, placeEdges } from './joined-edges.ts';
 import { proveOpening } from './opening.ts';
 import { proveOutlines } from './outlines.ts';
-import type { Proof, ProofLine } from './proof.ts';
+import type { Proof } from './proof.ts';
 import { proveSeams } from './seams.ts';
 import { proveTopEdge } from './top-edge.ts';
+import { verdictOf } from './verdict.ts';
 
 /** What a proof is made from: the pieces as cut, what they were meant to be, the allowances. */
 export type ProofInput = {
@@ -20,17 +20,6 @@ export type ProofInput = {
   readonly construction: Construction;
   readonly rules: HouseRules;
 };
-
-function verdictOf(lines: readonly ProofLine[]): Said {
-  const failed = lines.flatMap((line) => line.findings.filter((each) => !each.holds));
-  const [first, ...others] = failed;
-  if (first === undefined) return ['These pieces sew together.'];
-  const more =
-    others.length === 0
-      ? ''
-      : ` ${others.length} more ${others.length === 1 ? 'place does' : 'places do'} not hold.`;
-  return ['These pieces do not sew together yet. ', ...first.said, more];
-}
 
 /** A piece whose edges are rid of stretches without length, which have no direction to be measured. */
 const measurable = (piece: FinishedPiece): FinishedPiece => ({

@@ -143,7 +143,7 @@ function inArmhole(front: Piece, share: number, figures: DartFigures): Piece {
 }
 
 /** A narrower dart in the armhole is not worth sewing, mm (our rule). */
-const leastInArmhole = 8;
+const leastInArmhole = 12;
 
 /**
  * As much of the dart as a round armhole can fold, the rest in the waist (common practice, no source: a wide

@@ -1,16 +1,11 @@
+import { narrowestDart } from '../../drafting/suppression.ts';
 import type { HouseRules } from '../../drafting/house-rules.ts';
 import type { Side } from '../../drafting/piece.ts';
 import type { Cubic } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { type Profile, slopeAt, xAt } from '../../geometry/profile.ts';
 import { type Fading, heldBelow } from './fading.ts';
-import {
-  bustToHip,
-  narrowestDart,
-  outrightSuppression,
-  shareSuppression,
-  sideLine,
-} from './side-line.ts';
+import { bustToHip, outrightSuppression, shareSuppression, sideLine } from './side-line.ts';
 import type { SideHeights, SideLeans, SideWidths, Suppression } from './side-line.ts';
 import type { GownStyle } from './style-card.ts';
 import { type SideArcs, towards, truedHeights } from './truing.ts';

@@ -1,3 +1,4 @@
+import { narrowestDart } from '../../drafting/suppression.ts';
 import {
   type Knot,
   type Profile,
@@ -10,8 +11,6 @@ import {
 export const steepestLean = Math.tan((25 * Math.PI) / 180);
 /** The side stays at least this inside the bust at the waist, where the bust is the larger. */
 const insideBust = 3;
-/** A narrower dart is not worth sewing: the side seam takes it. */
-export const narrowestDart = 4;
 
 /** Heights of the levels at the side seam of one half, millimetres below the side neck. */
 export type SideHeights = {
