@@ -28,7 +28,7 @@ for (const colorScheme of ['light', 'dark'] as const) {
 
       test('the lists, a card and the account have none', async ({ page, maker }) => {
         expect(maker.email).not.toBe('');
-        for (const path of ['/gowns', '/gowns/measure-cards', '/account']) {
+        for (const path of ['/gowns', '/gowns/measure-cards', '/clients', '/compare', '/account']) {
           await page.goto(path);
           await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
           await expect(page.getByText(/^Fetching/)).toHaveCount(0);
