@@ -91,7 +91,13 @@ export const paperDraft = (
   pieces,
   steps: [],
   handles: [],
-  construction: { wanted: [], chestSide: { front: 236, back: 224 }, topOpenings: [] },
+  construction: {
+    wanted: [],
+    chestSide: { front: 236, back: 224 },
+    topOpenings: [],
+    opening: { closure: 'centreBackZip', hips: 990, least: 990, give: 0 },
+    knees: { standing: 590, step: 480, caution: true },
+  },
   walking: {
     step: 480,
     caution: false,

@@ -7,7 +7,12 @@ import { houseRulePresets } from '#shared/drafting/house-rule-presets.ts';
 import { drawGown } from '#shared/drafts/gown/draw-gown.ts';
 import { resolveStyle } from '#shared/drafts/gown/resolve-style.ts';
 import { checkStyle } from '#shared/drafts/gown/style-check.ts';
-import { easeLevels, styleChoices, styleLengths } from '#shared/drafts/gown/style-card.ts';
+import {
+  easeLevels,
+  isOffShoulder,
+  styleChoices,
+  styleLengths,
+} from '#shared/drafts/gown/style-card.ts';
 import type {
   EaseLevel,
   GownStyle,
@@ -103,11 +108,23 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
   const shaping = wished === 'darts' && !reaches ? 'princess' : wished;
   if (shaping !== undefined) style = { ...style, shaping };
   hems.forEach(put);
+  if (!bandFits(style, body, levels))
+    return styleOn({ ...draws, named: { ...draws.named, sleeve: 'none' } }, body, levels);
   if (fits(style) && sideIsFair(style, body, levels)) return style;
   // Ease, stretch and bands that do not go together, or that no fair side seam passes, are left open.
   const { ease: _ease, stretch: _stretch, armEase: _armEase, ...rest } = style;
-  return rest;
+  // Without its ease a bust may be fuller than darts reach.
+  return rest.shaping === 'darts' && !dartsReach(rest, body, levels)
+    ? { ...rest, shaping: 'princess' }
+    : rest;
 }
+
+/** Whether bands hold these top edges on the arms: what the draft refuses is not a style to draw. */
+const bandFits = (style: StyleCard, body: Body, levels: BodyLevels): boolean =>
+  !isOffShoulder(style) ||
+  !['band-loose', 'band-too-full'].some((reason) =>
+    refusedFor(reason, resolveStyle(style, body, levels), body, levels),
+  );
 
 /** Whether the side seam passes the girths this ease makes: what the draft refuses is not a style to draw. */
 const sideIsFair = (style: StyleCard, body: Body, levels: BodyLevels): boolean =>
@@ -115,7 +132,8 @@ const sideIsFair = (style: StyleCard, body: Body, levels: BodyLevels): boolean =
 
 /** Whether darts can shape this bust under either preset: what the draft refuses is not a style to draw. */
 function dartsReach(style: StyleCard, body: Body, levels: BodyLevels): boolean {
-  const darted = resolveStyle({ ...style, shaping: 'darts' }, body, levels);
+  // Below the knee nothing hangs on the darts, and a refusal there would hide theirs.
+  const darted = resolveStyle({ ...style, shaping: 'darts', flare: 'circle' }, body, levels);
   return !refusedFor('darts-too-wide', darted, body, levels);
 }
 

@@ -11,6 +11,9 @@ export const sampleRules: HouseRules = {
   sideShare: 0.45,
   dartWidest: 40,
   dartClearance: 25,
+  peakOverBust: 85,
+  shoulderDrop: 127,
+  armholeAt: 'across',
   allowance: { seam: 15, side: 25, zip: 25, top: 10, hem: 10 },
 };
 
