@@ -18,6 +18,9 @@ export const plainRules: HouseRules = {
   sideShare: 0.45,
   dartWidest: 40,
   dartClearance: 25,
+  peakOverBust: 85,
+  shoulderDrop: 127,
+  armholeAt: 'across',
   allowance,
 };
 

@@ -173,7 +173,7 @@ describe('the gown drawn by the plain quarter rule', () => {
     expect(told).toContain('a quarter of (hip 40 in) = 10 in');
     expect(told).toMatch(/gap is 2 in at the under-bust and 2 in at the waist seam/);
     expect(told).toMatch(
-      /upright at the waist seam with 2 in, 1 in at the waist, ending 4\s1⁄2 in below/,
+      /One dart: 2 in at the waist seam, which the legs cross upright, 1 in at the waist, ending 4\s1⁄2 in below/,
     );
     expect(told).toMatch(/opens to 1\s1⁄2 in at/);
   });
