@@ -1,6 +1,7 @@
 import type { Piece } from '#shared/drafting/piece.ts';
 import { checkOrder } from '#shared/sheets/check-order.ts';
-import type { PieceOrder, PrintOrder } from '#shared/sheets/print-order.ts';
+import { sheetPapers } from '#shared/sheets/papers.ts';
+import { type PieceOrder, plainOrder, type PrintOrder } from '#shared/sheets/print-order.ts';
 import { selections, choosePieces } from '#shared/sheets/selection.ts';
 import { waysToDraw } from '#shared/sheets/ways-to-draw.ts';
 import { error, type Problem } from '#shared/units/problem.ts';
@@ -13,6 +14,14 @@ export const fieldOf: { readonly [F in PaperField]: string } = {
   overlap: 'order.overlap',
   width: 'order.paper.width',
   height: 'order.paper.height',
+};
+
+/** What is looked at in place of a figure that cannot be read, so that it alone is told, mm. */
+const standIns: { readonly [F in PaperField]: number } = {
+  margin: plainOrder.margin,
+  overlap: plainOrder.overlap,
+  width: sheetPapers.A4.width,
+  height: sheetPapers.A4.height,
 };
 
 export type OrderOrProblems =
@@ -33,7 +42,7 @@ export function orderOf(room: RoomChoices, pieces: readonly Piece[]): OrderOrPro
   });
   const mm = (field: PaperField): number => {
     const { read } = lengths[field];
-    return 'mm' in read ? read.mm : Number.NaN;
+    return 'mm' in read ? read.mm : standIns[field];
   };
   const order: PrintOrder = {
     paper: paper === 'custom' ? { width: mm('width'), height: mm('height') } : paper,
@@ -47,11 +56,7 @@ export function orderOf(room: RoomChoices, pieces: readonly Piece[]): OrderOrPro
     scale,
     leftOut: [],
   };
-  const known = new Set(unread.map(({ field }) => field));
-  const problems = [
-    ...unread,
-    ...checkOrder(order, pieces).filter(({ field }) => !known.has(field)),
-  ];
+  const problems = [...unread, ...checkOrder(order, pieces)];
   return problems.length === 0 ? { order } : { problems };
 }
 

@@ -13,7 +13,6 @@ import { waysToDraw } from '#shared/sheets/ways-to-draw.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import {
-  nothingTyped,
   readLength,
   rewrittenFine,
   rewrittenLength,
@@ -93,8 +92,8 @@ export const plainChoices = (unit: Unit, paper: SheetName): RoomChoices => ({
     overlap: writtenLength(plainOrder.overlap, unit),
     width: writtenLength(customSize.width, unit),
     height: writtenLength(customSize.height, unit),
-    across: nothingTyped,
-    down: nothingTyped,
+    across: readLength('', unit),
+    down: readLength('', unit),
   },
   pieces: {},
   leftOut: { plan: '', names: [] },

@@ -8,9 +8,6 @@ export type TypedLength = {
   readonly read: { readonly mm: number } | { readonly said: Said };
 };
 
-/** A field nobody has typed in yet. */
-export const nothingTyped: TypedLength = { text: '', read: parseLength('', 'cm') };
-
 /** Letters as a length in the reader's unit. */
 export const readLength = (text: string, unit: Unit): TypedLength => ({
   text,
@@ -25,8 +22,10 @@ export const writtenLength = (mm: number, unit: Unit): TypedLength => ({
 
 /** The same field for a reader of another unit; what could not be read stays as it was typed. */
 export const rewrittenLength = (typed: TypedLength, unit: Unit): TypedLength =>
-  'mm' in typed.read ? writtenLength(typed.read.mm, unit) : typed;
+  'mm' in typed.read ? writtenLength(typed.read.mm, unit) : readLength(typed.text, unit);
 
 /** The same for what was read off a ruler, which counts to the half millimetre. */
 export const rewrittenFine = (typed: TypedLength, unit: Unit): TypedLength =>
-  'mm' in typed.read ? { ...typed, text: formatFine(typed.read.mm, unit) } : typed;
+  'mm' in typed.read
+    ? { ...typed, text: formatFine(typed.read.mm, unit) }
+    : readLength(typed.text, unit);
