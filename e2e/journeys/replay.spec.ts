@@ -78,11 +78,15 @@ for (const { name, ...viewport } of sizes) {
       await expect(told.measures).toContainText('✓ drawn beside');
       expect((await new AxeBuilder({ page }).analyze()).violations).toEqual([]);
       await told.measures.getByRole('button', { name: 'To the drawing' }).click();
+      await expect(told.number('92.0 cm')).toBeVisible();
+      const narrow = viewport.width < 700;
+      if (narrow) await page.getByRole('button', { name: 'My drawing' }).click();
       await expect(told.ownTelling).toBeVisible();
       await expect(told.number('96.0 cm')).toBeVisible();
-      await expect(told.number('92.0 cm')).toBeVisible();
-      if (viewport.width > 700) await expect(told.drawing(/^Your measures/)).toBeVisible();
+      await expect(told.drawing(/^Your measures/)).toBeVisible();
+      await expect(told.drawing(/^Tutor/)).toHaveCount(narrow ? 0 : 1);
       await page.reload();
+      if (narrow) await page.getByRole('button', { name: 'My drawing' }).click();
       await expect(told.ownTelling).toBeVisible();
     });
 

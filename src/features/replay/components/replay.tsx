@@ -68,10 +68,18 @@ export const Replay = (props: ReplayProps) => {
     () => own && { told: own, ...sameStep(draft.steps, place, own.steps) },
     [own, draft.steps, place],
   );
+  const tutors = useMemo(() => ({ told: draft, place }), [draft, place]);
   const stages = (
     <div className={`grid h-full min-h-0 ${ownPlace && beside ? 'grid-cols-2' : 'grid-cols-1'}`}>
       {(ownPlace === undefined || beside || !mine) && (
-        <Stage told={draft} place={place} whole={whole} far={far} label={own ? 'Tutor' : title} />
+        <Stage
+          told={draft}
+          place={place}
+          whole={whole}
+          far={far}
+          label={own ? 'Tutor' : title}
+          other={ownPlace}
+        />
       )}
       {ownPlace !== undefined && (beside || mine) && (
         <div className="min-h-0 border-l border-rule">
@@ -81,6 +89,7 @@ export const Replay = (props: ReplayProps) => {
             whole={whole}
             far={far}
             label="Your measures"
+            other={tutors}
           />
         </div>
       )}
@@ -92,7 +101,8 @@ export const Replay = (props: ReplayProps) => {
       place={place}
       unit={unit}
       far={far}
-      own={ownPlace}
+      own={beside || mine ? ownPlace : undefined}
+      alone={!beside && mine}
       why={why}
       onWhy={() => setWhy(!why)}
     />

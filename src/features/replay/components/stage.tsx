@@ -17,8 +17,9 @@ type StageProps = {
   readonly whole: boolean;
   /** Heavier lines and larger letters, for the back of a room. */
   readonly far: boolean;
-  /** Whose draft it is, where two stand side by side. */
   readonly label: string;
+  /** The draft beside it: both are seen at one scale, and each says whose it is. */
+  readonly other?: { readonly told: Told; readonly place: number } | undefined;
 };
 
 /** Room about the drawing, pixels. */
@@ -32,13 +33,17 @@ const centreNames = {
 } as const;
 
 /** The drawing of a step: what was there before as hairlines, what is new drawn in, its points lit. */
-export const Stage = memo(function Stage({ told, place, whole, far, label }: StageProps) {
+export const Stage = memo(function Stage(props: StageProps) {
+  const { told, place, whole, far, label, other } = props;
   const frame = useRef<HTMLDivElement>(null);
   const size = useSize(frame);
   const picture = useMemo(() => stepPicture(told, place), [told, place]);
   const laid = useMemo(() => spread(picture?.laid ?? []), [picture]);
-  const table: Box = { x: 0, y: 0, width: laid.width, height: laid.height };
-  const wanted = wantedLook(picture, whole, table);
+  const beside = useMemo(() => other && stepPicture(other.told, other.place), [other]);
+  const wanted = asLargeAs(
+    wantedLook(picture, whole, laid),
+    beside && wantedLook(beside, whole, spread(beside.laid)),
+  );
   const look = useLook(wanted, picture?.frame ?? 'pieces');
   if (picture === undefined) return null;
   const inner = {
@@ -59,6 +64,11 @@ export const Stage = memo(function Stage({ told, place, whole, far, label }: Sta
   const id = told.steps[place]?.id ?? '';
   return (
     <div ref={frame} className="relative h-full min-h-0 min-w-0 overflow-hidden">
+      {other !== undefined && (
+        <p className={`absolute top-1 right-3 text-slate ${far ? 'text-xl' : 'text-sm'}`}>
+          {label}
+        </p>
+      )}
       {size.width > 0 && (
         <svg
           role="img"
@@ -159,9 +169,19 @@ export const Stage = memo(function Stage({ told, place, whole, far, label }: Sta
   );
 });
 
-const wantedLook = (picture: StepPicture | undefined, whole: boolean, table: Box): Box => {
-  if (picture === undefined || picture.frame === 'pieces') return table;
+type Extent = { readonly width: number; readonly height: number };
+
+const wantedLook = (picture: StepPicture | undefined, whole: boolean, laid: Extent): Box => {
+  if (picture === undefined || picture.frame === 'pieces') {
+    return { x: 0, y: 0, width: laid.width, height: laid.height };
+  }
   return whole ? picture.whole : picture.near;
+};
+
+/** A look grown about its middle to another's size, so that two bodies are seen at one scale. */
+const asLargeAs = ({ x, y, width, height }: Box, other: Extent = { width, height }): Box => {
+  const [w, h] = [Math.max(width, other.width), Math.max(height, other.height)];
+  return { x: x - (w - width) / 2, y: y - (h - height) / 2, width: w, height: h };
 };
 
 const frameWords = {

@@ -12,16 +12,21 @@ type TellingProps = {
   /** The same step of a learner's own draft, and whether that body needs it. */
   readonly own?:
     { readonly told: Told; readonly place: number; readonly exact: boolean } | undefined;
+  /** Whether only the learner's own sentence has room. */
+  readonly alone: boolean;
   readonly why: boolean;
   readonly onWhy: () => void;
 };
 
 /** The step in words: what was done with this body's numbers and, asked for, why. */
-export const Telling = ({ told, place, unit, far, own, why, onWhy }: TellingProps) => {
+export const Telling = (props: TellingProps) => {
+  const { told, place, unit, far, own, alone, why, onWhy } = props;
   const step = told.steps[place];
   if (step === undefined) return null;
   const ownStep = own?.told.steps[own.place];
-  const size = far ? 'text-[clamp(1.35rem,2.5vw,2.6rem)] leading-snug' : 'text-lg leading-snug';
+  // Two sentences share the room of one, and are still read from the back of it.
+  const afar = own ? 'text-[clamp(1.2rem,1.9vw,2rem)]' : 'text-[clamp(1.35rem,2.5vw,2.6rem)]';
+  const size = `leading-snug ${far ? afar : 'text-lg'}`;
   return (
     <section aria-label="This step" className={far ? 'space-y-2' : 'space-y-1'}>
       <div aria-live="polite">
@@ -29,14 +34,16 @@ export const Telling = ({ told, place, unit, far, own, why, onWhy }: TellingProp
           <span className="font-normal text-slate">{step.part} · </span>
           {step.title}
         </h1>
-        <Sentence
-          key={step.id}
-          step={step}
-          sentence={step.said}
-          body={told.body}
-          unit={unit}
-          className={size}
-        />
+        {(!alone || ownStep === undefined) && (
+          <Sentence
+            key={step.id}
+            step={step}
+            sentence={step.said}
+            body={told.body}
+            unit={unit}
+            className={size}
+          />
+        )}
       </div>
       {own !== undefined && ownStep !== undefined && (
         <div className="border-l-2 border-verdigris pl-3">
