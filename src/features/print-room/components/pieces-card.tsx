@@ -22,7 +22,7 @@ const copyChoices = Array.from({ length: most - least + 1 }, (_, index) => {
 /** Which pieces, how often, and how each is drawn; their numbers stand on the page plan. */
 export const PiecesCard = ({ room, problems, pieces, dispatch }: PiecesCardProps) => {
   const none = problems.find(({ field }) => field === 'order.pieces');
-  const hasTop = pieces.some(({ part }) => part === 'top');
+  const tops = pieces.filter(({ part }) => part === 'top').length;
   return (
     <section aria-labelledby="pieces-card">
       <h2 id="pieces-card" className="heading">
@@ -36,7 +36,7 @@ export const PiecesCard = ({ room, problems, pieces, dispatch }: PiecesCardProps
         >
           All pieces
         </Button>
-        {hasTop && (
+        {tops > 0 && tops < pieces.length && (
           <Button
             kind="quiet"
             slim
