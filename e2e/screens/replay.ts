@@ -1,7 +1,5 @@
 import type { Locator, Page } from '@playwright/test';
 
-export type ReplayScreen = ReturnType<typeof replay>;
-
 /** A replay, wherever it is seen: of the table, of a gown, or in a class. */
 export function replay(page: Page) {
   const telling = page.getByRole('region', { name: 'This step' });

@@ -59,7 +59,8 @@ export const Stage = memo(function Stage(props: StageProps) {
   const names = placeNames(
     picture.points,
     ({ x, y }) => ({ x: left + x * scale, y: top + y * scale }),
-    { width: size.width, height: size.height, letters },
+    // Below stands whose centre line it is.
+    { width: size.width, height: size.height - letters * 1.3, letters },
   );
   const id = told.steps[place]?.id ?? '';
   return (
