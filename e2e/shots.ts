@@ -7,6 +7,7 @@ import { chromium, type Page } from '@playwright/test';
 import { tenMeasures } from './fixtures/measures.ts';
 import { ownScenes } from './own-shots.ts';
 import { draftingTable } from './screens/drafting-table.ts';
+import { printRoom } from './screens/print-room.ts';
 
 const address = process.env['E2E_URL'] ?? 'http://127.0.0.1:4173';
 const folder = 'test-results/shots';
@@ -42,6 +43,11 @@ async function scenes(page: Page, keep: (name: string) => Promise<void>): Promis
   await keep('pieces');
   await table.print.click();
   await keep('print');
+  await page.goto('/try/print');
+  const room = printRoom(page);
+  await room.arranged();
+  await room.sheet('A1').click();
+  await keep('print-room');
 }
 
 for (const width of widths) {

@@ -3,8 +3,6 @@ import type { Locator, Page } from '@playwright/test';
 /** How long a plan may take where many browsers share a small machine, ms. */
 export const patience = 90_000;
 
-export type PrintRoomScreen = ReturnType<typeof printRoom>;
-
 /** Where things are in the print room. */
 export function printRoom(page: Page) {
   const heading = page.getByRole('heading', { level: 1, name: 'Print room' });
