@@ -9,7 +9,9 @@ import {
 } from '#shared/api/drafts.ts';
 import type { PrintRequest, SheetsRequest } from '#shared/api/requests.ts';
 import { printWorksheet } from '#shared/api/worksheet.ts';
+import type { Garment } from '#shared/engine/drafted.ts';
 import { paperOf } from '#shared/sheets/papers.ts';
+import type { Selection } from '#shared/sheets/selection.ts';
 import { addressLimit } from '../../http/address-limit.ts';
 import { attachment, fileName } from '../../http/file-name.ts';
 import { type Asked, type Download, serve } from '../../http/serve.ts';
@@ -33,11 +35,17 @@ export function printRouter(limits: Limits, printer: Printer): Router {
     disposition: attachment(name),
   });
 
+  const whatOf = (garment: Garment | undefined, pieces: Selection): string =>
+    garment === undefined || garment === 'gown' ? pieces : garment;
   const named = ({ card }: PrintRequest, words: readonly string[], extension: string) =>
     fileName([card.name, ...words], extension);
 
   serve(router, printTiles, (wanted, asked) =>
-    download({ what: 'tiles', wanted }, asked, named(wanted, [wanted.pieces, wanted.paper], 'pdf')),
+    download(
+      { what: 'tiles', wanted },
+      asked,
+      named(wanted, [whatOf(wanted.garment, wanted.pieces), wanted.paper], 'pdf'),
+    ),
   );
   serve(router, printChalkSheet, (wanted, asked) =>
     download(
@@ -47,16 +55,18 @@ export function printRouter(limits: Limits, printer: Printer): Router {
     ),
   );
   serve(router, printPieces, (wanted, asked) =>
-    download({ what: 'pieces', wanted }, asked, named(wanted, [wanted.pieces], 'svg')),
+    download(
+      { what: 'pieces', wanted },
+      asked,
+      named(wanted, [whatOf(wanted.garment, wanted.pieces)], 'svg'),
+    ),
   );
   const sheetsNamed = ({ inputs, order }: SheetsRequest, extension: 'pdf' | 'svg') => {
-    const all =
-      inputs.garment === undefined || inputs.garment === 'gown' ? 'whole-gown' : inputs.garment;
-    const chosen = order.pieces === 'whole-gown' ? all : order.pieces;
-    const pieces = typeof chosen === 'string' ? chosen : 'pieces';
+    const { pieces } = order;
+    const what = typeof pieces === 'string' ? whatOf(inputs.garment, pieces) : 'pieces';
     const scale = order.scale === 1 ? [] : [`scale 1 ${1 / order.scale}`];
     const onPaper = extension === 'svg' ? [] : [paperOf(order.paper).name, ...scale];
-    return fileName([inputs.card.name, pieces, ...onPaper], extension);
+    return fileName([inputs.card.name, what, ...onPaper], extension);
   };
   serve(router, printSheets, (wanted, asked) =>
     download({ what: 'sheets', wanted }, asked, sheetsNamed(wanted, 'pdf')),

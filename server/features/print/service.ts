@@ -3,13 +3,17 @@ import type { Drafted } from '#shared/engine/drafted.ts';
 import { piecesSvg } from '#shared/exports/svg.ts';
 import { checkOrder } from '#shared/sheets/check-order.ts';
 import { type PrintOrder, presetOrder } from '#shared/sheets/print-order.ts';
-import { choosePieces } from '#shared/sheets/selection.ts';
+import { type Selection, choosePieces } from '#shared/sheets/selection.ts';
 import { SheetLimitError } from '#shared/sheets/sheet-limit.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { draftAnyOrRefuse } from '../../drafting/draft-or-refuse.ts';
 import { refusalFor } from '../../http/refusal.ts';
 import { chalkSheetPdf } from './chalk-sheet-pdf.ts';
 import { tilesPdf } from './tiles-pdf.ts';
+
+/** A block is printed whole: it has no toile but itself. */
+const selectionOf = ({ garment }: Drafted, asked: Selection): Selection =>
+  garment === 'gown' ? asked : 'whole-gown';
 
 /** The pieces asked for as pages to glue together. */
 export async function tilesOf({
@@ -18,7 +22,8 @@ export async function tilesOf({
   pieces,
   ...inputs
 }: PrintRequest): Promise<Uint8Array> {
-  return pdfOf(draftAnyOrRefuse(inputs, unit), presetOrder(paper, pieces), unit);
+  const draft = draftAnyOrRefuse(inputs, unit);
+  return pdfOf(draft, presetOrder(paper, selectionOf(draft, pieces)), unit);
 }
 
 /** The sheets of an order. */
@@ -65,7 +70,8 @@ export async function piecesOf({
   pieces: selection,
   ...inputs
 }: PrintRequest): Promise<Uint8Array> {
-  return svgOf(draftAnyOrRefuse(inputs, unit), selection, unit);
+  const draft = draftAnyOrRefuse(inputs, unit);
+  return svgOf(draft, selectionOf(draft, selection), unit);
 }
 
 async function svgOf(
