@@ -70,13 +70,13 @@ export function narrateArmhole(
   const until = armhole.at(-1)?.to;
   if (!from || !until) return;
   const kept = halfAcross + opening - from.x;
-  const half = said`Half of ${across.how}${opening < leastSaid ? '' : said` and the opening ${mm(opening)}`}`;
+  const half = said`Half of the measure ${across.how}${opening < leastSaid ? '' : said` and the opening ${mm(opening)}`}`;
   const how: Said =
     kept > 0.05
       ? said`${half} would reach too near the side; its upper end is kept ${mm(from.x)} out`
       : kept < -0.05
         ? said`${half} would end too near the bust seam, or leave a flat armhole; its upper end is set ${mm(from.x)} out`
-        : said`${half} put its upper end ${mm(from.x, across.measures)} out`;
+        : said`${half} ${opening < leastSaid ? 'puts' : 'put'} its upper end ${mm(from.x, across.measures)} out`;
   paper.draw(
     'Armhole edge',
     said`${how}, ${mm(from.y)} down; from there square to the top line, down and out to the underarm, ${mm(until.x)} out, square to the side seam: ${mm(pathLength(armhole))} long.`,
