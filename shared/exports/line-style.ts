@@ -13,7 +13,7 @@ export type LineStyle = {
 export const plainLines: LineStyle = { lines: 'both', inkSaving: false, scale: 1 };
 
 /** Parts of a line's width, and of the white in its dashes, where ink is saved. */
-const thinner = 0.6;
+const thinner = 0.5;
 const sparser = 1.5;
 
 /** A pen as this style draws with it: its width where ink is plentiful, thinner and sparser where not. */

@@ -60,7 +60,8 @@ export function placedLabels(
     const print = { notes: labelNotes(order), scale: order.scale };
     const seams = seamsOf(sheets, found.foldLine, placement.motion);
     const clear = lettering(piece, facts, { ...print, seams });
-    const label = clear.length > 1 ? clear : lettering(piece, facts, print);
+    const label =
+      clear.length > 1 && isNamed(piece, clear) ? clear : lettering(piece, facts, print);
     if (order.scale === 1 || isNamed(piece, label)) return labelMarks(piece, label);
     const numbered = { ...piece, title: numberOf(found, drawn), cut: '' };
     return labelMarks(numbered, lettering(numbered, facts, { ...print, seams }).slice(0, 1));

@@ -46,6 +46,7 @@ const layouts = [
   { title: 5, text: 4, note: 4, width: 54 },
   { title: 4.5, text: 4, note: 4, width: 46 },
   { title: 4, text: 4, note: 4, width: 38 },
+  { title: 4, text: 4, note: 4, width: 30 },
 ] as const;
 
 /** The same for drawings at a half and a quarter. */
