@@ -112,9 +112,9 @@ export function styleOn(draws: StyleDraws, body: Body, levels: BodyLevels): Styl
     return styleOn({ ...draws, named: { ...draws.named, sleeve: 'none' } }, body, levels);
   if (fits(style) && sideIsFair(style, body, levels)) return style;
   // Ease, stretch and bands that do not go together, or that no fair side seam passes, are left open.
-  const { ease: _ease, stretch: _stretch, armEase: _armEase, ...eased } = style;
+  const { ease: _ease, stretch: _stretch, armEase: _armEase, ...plain } = style;
   // So is what was drawn between bounds that hang on them.
-  const { kneeFinished: _knee, hemSweep: _hem, train: _train, ...rest } = eased;
+  const { kneeFinished: _knee, hemSweep: _hem, train: _train, ...rest } = plain;
   // Without its ease a bust may be fuller than darts reach.
   return rest.shaping === 'darts' && !dartsReach(rest, body, levels)
     ? { ...rest, shaping: 'princess' }
