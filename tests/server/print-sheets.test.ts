@@ -223,6 +223,16 @@ describe('what is printed is what was planned', { timeout: 240_000 }, () => {
     expect(reply.headers.get('content-type')).toContain('application/pdf');
   });
 
+  it('a block is printed as a gown is, under its own name, and has no toile of a top it has not', async () => {
+    const block = { ...wanted({ paper: 'A3' }), inputs: { garment: 'skirt-block', card } };
+    const reply = await post(`${server.address}/api/prints/sheets`, block);
+    expect(reply.headers.get('content-disposition')).toContain('judith-amsel-skirt-block-a3.pdf');
+    expect((await printed(reply)).sheets).toContain('A1');
+    const toileOf = { ...block, order: toile };
+    const none = await refused(await post(`${server.address}/api/prints/sheets`, toileOf), 422);
+    expect(none.problems).toMatchObject([{ field: 'order.pieces', code: 'no-pieces' }]);
+  });
+
   it('the SVG has the pieces of the order and no others', async () => {
     const pieces = [{ piece: 'front-middle', copies: 2, how: 'on fold' }];
     const reply = await ask({ pieces }, { what: 'sheets.svg' });
