@@ -21,8 +21,9 @@ const neckShare = 0.25;
 const lengthOf = (piece: Piece, name: string): number =>
   pathLength(piece.edges.find((edge) => edge.name === name)?.path ?? []);
 
-/** Places along an edge that are tried for the one nearest to a point. */
+/** Places along an edge that are tried for the one nearest to a point, and how often it is drawn closer. */
 const places = 64;
+const refinements = 24;
 
 /** Length along an edge to its inner place nearest to a point: there a dart meets it squarely. */
 function nearestOn(piece: Piece, name: string, to: Point): number {
@@ -33,7 +34,14 @@ function nearestOn(piece: Piece, name: string, to: Point): number {
     return station ? distance(station.at, to) : Infinity;
   };
   const lengths = Array.from({ length: places - 1 }, (_, k) => (whole * (k + 1)) / places);
-  return lengths.reduce((best, each) => (off(each) < off(best) ? each : best), whole / 2);
+  const near = lengths.reduce((best, each) => (off(each) < off(best) ? each : best), whole / 2);
+  let [low, high] = [near - whole / places, near + whole / places];
+  for (let i = 0; i < refinements; i += 1) {
+    const [a, b] = [low + (high - low) / 3, high - (high - low) / 3];
+    if (off(a) < off(b)) high = b;
+    else low = a;
+  }
+  return (low + high) / 2;
 }
 
 /** What the places hang on: the bust notch along the side, the pivot, the allowance of the armhole. */
@@ -101,6 +109,9 @@ function endRadius(path: Path, length: number): number {
 /** Share of that reach at which the two are sure to meet, an armhole being no true circle. */
 const sureToMeet = 0.85;
 
+/** The cutting line beside the dart turns with at least this radius, mm: a tighter one is no line to fold on (our rule). */
+const roomToTurn = 5;
+
 /**
  * Whether a dart can be folded in a round armhole: where it is too wide, the cutting line of the armhole beside
  * it bends away from the middle of the dart before it reaches it, and no cap can be cut (two circles;
@@ -114,7 +125,7 @@ function foldsInArmhole(front: Piece, pivot: Point, allowance: number): boolean 
   const leg = distance(open.from, pivot);
   const radius = endRadius(beside, width / 2);
   const meets = ((leg + radius) * width) / (2 * leg) <= sureToMeet * (radius - allowance);
-  return !Number.isFinite(radius) || meets;
+  return !Number.isFinite(radius) || (meets && radius >= allowance + roomToTurn);
 }
 
 /** A front whose bust dart is sewn where the style card says, and the part of its angle that went there. */

@@ -17,6 +17,7 @@ export function shortTitle({ name, title, side, part }: Named): string {
     return `Flare ${front ? 'F' : 'B'}${gore === undefined ? centre : ` gore ${gore}`}`;
   }
   const half = front ? 'Front' : 'Back';
+  if (title.includes(' block, ')) return half;
   if (part === 'middle') return `${half} skirt`;
   if (name.endsWith('-centre')) return `${half} ${front ? 'CF' : 'CB'}`;
   return name.endsWith('-side') ? `${half} side` : `${half} top`;
