@@ -48,5 +48,16 @@ export const agreements: readonly Agreement[] = [
   { larger: 'shoulderWidth', smaller: 'shoulderLength', half: true, possible: [-20, far] },
   { larger: 'height', smaller: 'waistToFloor', possible: [400, 900], usual: [500, 750] },
   { larger: 'hipGirth', smaller: 'kneeGirth', half: true, possible: [-20, far] },
+  // Common practice, no source; the median shoulder girth of 260 women is 995 on a chest of 855 (Heinz et al. 2003, seen).
+  {
+    larger: 'shoulderGirth',
+    smaller: 'upperChestGirth',
+    possible: [0, 400],
+    usual: [40, 260],
+  },
+  { larger: 'upperArmGirth', smaller: 'wristGirth', possible: [20, 350] },
+  { larger: 'height', smaller: 'armLength', possible: [700, 1500] },
+  { larger: 'shoulderWidth', smaller: 'acrossFront', possible: [-60, 160] },
+  { larger: 'shoulderWidth', smaller: 'acrossBack', possible: [-80, 160] },
   { larger: 'bothKneesGirth', smaller: 'kneeGirth', possible: [100, 420] },
 ];

@@ -1,5 +1,5 @@
-/** A bend is seen where it swings a millimetre off its chord, or has a corner of two degrees [our rule]. */
-export const seenBend = { least: 1, kink: 2 } as const;
+/** A bend is seen where it swings a millimetre and a half off its chord, or has a corner of two degrees [our rule]. */
+export const seenBend = { least: 1.5, kink: 2 } as const;
 
 /** Girths nearer than this are alike, whole-body mm. */
 const alike = 4;

@@ -40,8 +40,14 @@ const runsToTheKnee = (piece: Piece): boolean =>
 
 const runsToTheHem = (piece: Piece): boolean => piece.edges.some(({ kind }) => kind === 'hem');
 
-/** A front top line bends down at its peak and level again towards the side; a back one only the latter. */
-const topChanges = { front: 2, back: 1 } as const;
+/**
+ * A front top line bends down at its peak and level again towards the side; a back one only the latter. Off
+ * the shoulder it may level out once more before the armhole.
+ */
+function topChanges(side: 'front' | 'back', tops: readonly Piece[]): number {
+  const offShoulder = tops.some(({ edges }) => edges.some(({ kind }) => kind === 'armhole'));
+  return (side === 'front' ? 2 : 1) + (offShoulder ? 1 : 0);
+}
 
 const title = (piece: Piece, edge: Edge): string => `${piece.title}, ${spoken(edge.name)}`;
 
@@ -65,7 +71,14 @@ function runsOf(pieces: readonly Piece[], ofSides: number): readonly Run[] {
       );
     if (tops.length === 0) continue;
     const name = side === 'front' ? 'Front top line' : 'Back top line';
-    runs.push({ title: name, most: topChanges[side], edges: tops });
+    runs.push({
+      title: name,
+      most: topChanges(
+        side,
+        tops.map(({ piece }) => piece),
+      ),
+      edges: tops,
+    });
   }
   const drawn = outer.flatMap((piece) => piece.edges.map((edge) => ({ piece, edge })));
   const carriedOn = new Set<Edge>();

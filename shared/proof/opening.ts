@@ -1,5 +1,6 @@
 import type { Construction } from '../drafting/construction.ts';
 import type { LevelLine, Notch, Piece } from '../drafting/piece.ts';
+import type { Point } from '../geometry/point.ts';
 import { type Said, fine, mm, said } from '../units/said.ts';
 import { atLeast, missing, proofLine } from './finding.ts';
 import { levelGirth, widthAtLevel } from './girths.ts';
@@ -20,22 +21,29 @@ const endsOn = (pieces: readonly Piece[]): readonly End[] =>
       piece.notches.filter(({ name }) => ends.includes(name)).map((notch) => ({ piece, notch })),
     );
 
-/** A level across a piece at the height of a mark, as far out as the piece goes at its hip. */
-function levelAt(piece: Piece, y: number): LevelLine | undefined {
-  const hip = piece.levels.find(({ level }) => level === 'hip');
-  return hip && { level: 'hip', from: { x: hip.from.x, y }, to: { x: hip.to.x, y } };
+const hipOf = (piece: Piece): LevelLine | undefined =>
+  piece.levels.find(({ level }) => level === 'hip');
+
+/** How far a mark lies below the hip level of its piece, mm; less than nothing above it. */
+function belowHip({ piece, notch: { at } }: End): number | undefined {
+  const hip = hipOf(piece);
+  if (!hip) return undefined;
+  const share = (at.x - hip.from.x) / (hip.to.x - hip.from.x);
+  return at.y - hip.from.y - share * (hip.to.y - hip.from.y);
 }
 
-/** Girth of the closed gown just under the opening, mm; the mark of the other half where one has none. */
+/** Girth of the closed gown just under the opening, mm, as far from the hip level as its mark is. */
 function girthAtEnd(pieces: readonly Piece[], marks: readonly End[]): number | undefined {
   let half = 0;
   for (const side of ['front', 'back'] as const) {
     const mark = marks.find(({ piece }) => piece.side === side) ?? marks[0];
-    if (!mark) return undefined;
+    const by = mark && belowHip(mark);
+    if (by === undefined) return undefined;
     for (const piece of pieces.filter((each) => each.side === side && each.part !== 'inner')) {
-      const level = levelAt(piece, mark.notch.at.y);
-      if (!level) continue;
-      const width = widthAtLevel(piece, level);
+      const hip = hipOf(piece);
+      if (!hip) continue;
+      const shifted = ({ x, y }: Point): Point => ({ x, y: y + by });
+      const width = widthAtLevel(piece, { ...hip, from: shifted(hip.from), to: shifted(hip.to) });
       if (width === undefined) return undefined;
       half += width;
     }

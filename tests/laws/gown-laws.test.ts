@@ -95,7 +95,7 @@ describe('on any body within the limits, in any style within its limits', () => 
   test('edges and girths measured anew from the exported SVG agree within half a millimetre', () => {
     onEveryDraft('measured anew from the SVG', (draft) => {
       const { edges, girths } = remeasure(piecesSvg(draft, 'cm'));
-      expect(edges.length).toBeGreaterThan(9);
+      expect(edges.length).toBeGreaterThan(6);
       expect(edges.filter((each) => !(Math.abs(each.difference) <= 0.5))).toEqual([]);
       for (const { level, wanted } of draft.construction.wanted) {
         if (level === 'chest') continue;

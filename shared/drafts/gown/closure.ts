@@ -38,10 +38,11 @@ export type ClosedGown = {
 
 /** The highest place from 20 above the hip down at which the closed gown still passes the hips. */
 function endOfOpening({ body, levels, pair, style }: ClosureInputs): number {
-  const wide = (y: number): number =>
-    2 * (xAt(pair.front.line, y) + xAt(pair.back.line, y)) * (1 + giveOf(style));
+  const { front, back } = pair;
+  const wide = (up: number): number =>
+    2 * (xAt(front.line, front.heights.hip - up) + xAt(back.line, back.heights.hip - up));
   for (let up = aboveHip; up > 0; up -= 1) {
-    if (wide(levels.hip - up) >= body.measures.hipGirth) return levels.hip - up;
+    if (wide(up) * (1 + giveOf(style)) >= body.measures.hipGirth) return levels.hip - up;
   }
   return levels.hip;
 }

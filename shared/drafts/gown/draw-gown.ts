@@ -14,6 +14,7 @@ import { closeGown } from './closure.ts';
 import { backEdgeIsHigh, drawTop } from './draw-top.ts';
 import { openingTurns } from './contour.ts';
 import { evenHems } from './even-hems.ts';
+import { warnOfShare } from './fair-side.ts';
 import { gownHandles } from './handles.ts';
 import type { Half } from './half.ts';
 import { fitOut } from './inner.ts';
@@ -92,6 +93,7 @@ export function drawGown(
   const shared: Shared = { pair, quarters, below, style, rules, across };
   const sides = [drawSide(table, 'front', shared), drawSide(table, 'back', shared)] as const;
   warnOfShift(table, pair);
+  warnOfShare(table, pair.sideShare, rules.sideShare);
   const wanted = [
     ...wantedGirths(
       body,

@@ -6,8 +6,10 @@ import {
   profilePath,
   xAt,
 } from '../../geometry/profile.ts';
+import type { DraftingTable } from '../../drafting/drafting-table.ts';
 import { seenBend } from '../../drafting/fair-bends.ts';
 import { bendChanges, turnsAlong } from '../../geometry/turns.ts';
+import { said } from '../../units/said.ts';
 import type { Half } from './half.ts';
 import type { SideLeans } from './side-line.ts';
 
@@ -54,4 +56,17 @@ export function fairSide(half: Half, most: number): SideLeans | undefined {
     best = tried;
   }
   return best;
+}
+
+/** Tells the maker where the side seams took another share of the suppression than the house's. */
+export function warnOfShare(table: DraftingTable, used: number, own: number): void {
+  if (used === own) return;
+  const per = (share: number): string => `${String(Math.round(share * 100))} %`;
+  table.warn({
+    code: 'side-share-moved',
+    severity: 'warning',
+    field: 'rules.sideShare',
+    with: ['card.waistGirth', 'card.hipGirth'],
+    said: said`With ${per(own)} of the suppression these side seams would bend too often or leave no cloth beside the darts, so they take ${per(used)}. Look at them in the toile.`,
+  });
 }

@@ -73,7 +73,7 @@ function lacedPiece(piece: Piece, centre: Edge, lacing: Lacing): Laced | undefin
   const laced = edge('lacing', 'zip', upwards(lacing, top, low));
   const met = pathCrossings(centre.path, point(0, lacing.end), point(1, lacing.end))[0];
   const seam: readonly Edge[] =
-    whole || !met ? [] : [{ ...centre, kind: 'seam', path: splitPath(centre.path, met)[0] }];
+    whole || !met ? [] : [{ ...centre, path: splitPath(centre.path, met)[0] }];
   const own = whole ? laced : { ...laced, corner: 180 };
   const edges = piece.edges.flatMap((each): readonly Edge[] =>
     each === centre

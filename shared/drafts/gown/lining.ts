@@ -96,6 +96,8 @@ const liningPiece = (piece: Piece, lined: ReadonlySet<string>): Piece => {
     cloth: 'lining',
     edges,
     notches: kept(piece.notches, edges),
+    // Eyelets are drilled in the gown alone.
+    drills: piece.drills.slice(0, piece.darts.length),
   };
 };
 
@@ -110,7 +112,7 @@ export function lineGown(paper: PartTable, pieces: readonly Piece[]): readonly P
   );
   paper.draw(
     'Lining',
-    said`The same seam lines as the gown, the hem ${mm(hemShorter)} shorter. Sew the long seams of the skirt ${mm(seamedInside)} inside the seam line, towards the edge: each then gives ${mm(2 * seamedInside)} of ease; those of the bodice as drawn, so that it stays smooth.${onFold ? ' Lay the fold of the back ' : ''}${onFold ? said`${mm(pleat)} beyond the centre line and press that into a pleat.` : ''}`,
+    said`The same seam lines as the gown, the hem ${mm(hemShorter)} shorter. Sew the long seams of the skirt ${mm(seamedInside)} nearer to the cut edge than the seam line: each then gives ${mm(2 * seamedInside)} of ease; those of the bodice as drawn, so that it stays smooth.${onFold ? ' Lay the fold of the back ' : ''}${onFold ? said`${mm(pleat)} beyond the centre line and press that into a pleat.` : ''}`,
     {
       why: said`A lining that is a little wider takes no strain, and one that is shorter never shows. Ease is given in the sewing, so that every seam line still meets its partner and is proven.`,
       pieces: lining.map(({ name }) => name),

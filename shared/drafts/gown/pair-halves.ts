@@ -17,6 +17,8 @@ import type { GownStyle } from './style-card.ts';
 export type PairedHalves = {
   readonly front: Half;
   readonly back: Half;
+  /** Share of the suppression that the side seams took; the house's own but where it would not do. */
+  readonly sideShare: number;
   readonly contour: { readonly front: Contour; readonly back: Contour; readonly moved: number };
 };
 
@@ -86,18 +88,46 @@ const cannotBeDrawn = (): DraftingError =>
   ]);
 
 /**
- * Draws front and back together: the front's side seam is master, their waist seams share a slope.
- * @throws DraftingError where no side seams of equal length join them, or intakes leave no cloth.
+ * Draws front and back together: the front's side seam is master, their waist seams share a slope. The side
+ * seams bend no oftener than their girths ask, by the house's share of the suppression or the nearest of a
+ * few that will do. Intakes given outright are drawn as they come.
+ * @throws DraftingError where no side seams of equal length join them, the side bends too often whatever
+ * its share, or intakes leave no cloth.
  */
 export function pairHalves(inputs: PairInputs): PairedHalves {
   // Where the side cannot help the darts and still be trued, the darts take all of it.
-  const darted = inputs.style.shaping === 'darts';
-  const pair = drawFairly(inputs, darted);
-  if (!pair || (inputs.style.waistSeam !== 'none' && cornersAtSeam(pair) > crookedCorner))
-    throw cannotBeDrawn();
-  refuseCrowdedIntakes(pair.front);
-  refuseCrowdedIntakes(pair.back);
-  return pair;
+  const helping = inputs.style.shaping === 'darts' ? [true, false] : [false];
+  const outright = inputs.rules.intakes !== undefined;
+  const most = outright ? Infinity : mostSideChanges(finishedGirths(inputs.quarters));
+  let refusal: DraftingError | undefined;
+  for (const sideShare of [inputs.rules.sideShare, ...(outright ? [] : otherShares)]) {
+    const shared = { ...inputs, rules: { ...inputs.rules, sideShare } };
+    for (const helps of helping) {
+      const pair = fairPair(shared, helps, most);
+      const why = pair ? whyNot(pair, inputs, most) : cannotBeDrawn();
+      if (pair && !why) return { ...pair, sideShare };
+      refusal ??= why;
+    }
+  }
+  throw refusal ?? cannotBeDrawn();
+}
+
+/** Why two halves cannot be cut; nothing where they can. */
+function whyNot(
+  pair: PairedHalves,
+  { style }: PairInputs,
+  most: number,
+): DraftingError | undefined {
+  if (style.waistSeam !== 'none' && cornersAtSeam(pair) > crookedCorner) return cannotBeDrawn();
+  if (!isFair(pair.front, most) || !isFair(pair.back, most)) return bendsTooOften(most);
+  try {
+    refuseCrowdedIntakes(pair.front);
+    refuseCrowdedIntakes(pair.back);
+    return undefined;
+  } catch (error) {
+    if (error instanceof DraftingError) return error;
+    throw error;
+  }
 }
 
 /** Finished girths from the chest to the knee seam, mm. */
@@ -132,28 +162,6 @@ const cornersAtSeam = ({ front, back }: Drawn): number => {
 
 type DartCounts = { readonly front: 1 | 2; readonly back: 1 | 2 };
 type Drawn = { readonly front: Half; readonly back: Half };
-
-/**
- * Both halves with side seams that bend no oftener than their girths ask, by the house's share of the
- * suppression or the nearest that will do. Intakes given outright are drawn as they come.
- * @throws DraftingError where the side would bend too often whatever its share.
- */
-function drawFairly(inputs: PairInputs, darted: boolean): PairedHalves | undefined {
-  const outright = inputs.rules.intakes !== undefined;
-  const most = outright ? Infinity : mostSideChanges(finishedGirths(inputs.quarters));
-  const shares = outright ? [] : otherShares;
-  let drawable = false;
-  for (const sideShare of [inputs.rules.sideShare, ...shares]) {
-    const shared = { ...inputs, rules: { ...inputs.rules, sideShare } };
-    for (const helps of darted ? [true, false] : [false]) {
-      const pair = fairPair(shared, helps, most);
-      if (pair && isFair(pair.front, most) && isFair(pair.back, most)) return pair;
-      drawable ||= pair !== undefined;
-    }
-  }
-  if (drawable) throw bendsTooOften(most);
-  return undefined;
-}
 
 /** Both halves, with sides that lean at bust or hip where upright they would bend too often. */
 function fairPair(inputs: PairInputs, sideHelps: boolean, most: number): PairedHalves | undefined {
@@ -235,7 +243,8 @@ function pairWith(inputs: PairInputs, sideHelps: boolean, leans: Leans): PairedH
     last = drawn;
     const next = seamed ? meanSlope(drawn) : 0;
     // A hundredth of a degree: the corners of the seam are proven to two degrees.
-    if (Math.abs(next - slope) < 1.7e-4) return { ...drawn, contour };
+    if (Math.abs(next - slope) < 1.7e-4)
+      return { ...drawn, contour, sideShare: inputs.rules.sideShare };
     slope = round < dampedFrom ? next : (slope + next) / 2;
   }
   return undefined;
