@@ -71,12 +71,6 @@ export function planBand(inputs: BandInputs): BandPlan {
   };
 }
 
-/** Length round a plain band at the foot of its armholes, mm: all there is round the arm there. */
-export const roundAtUnderarm = ({ path, lower, setIn, under, free }: BandPlan): number => {
-  const deep = (setIn.front + setIn.back) / 2;
-  return path + ((lower - path) * deep) / (deep + under) + free.front + free.back;
-};
-
 /** Height of a plain band at a share of its path from the front (0) to the back (1), and how fast it grows. */
 const heightAt = (
   { setIn: { front, back }, under }: BandPlan,
