@@ -1,19 +1,14 @@
-import AxeBuilder from '@axe-core/playwright';
 import type { Download, Page } from '@playwright/test';
 import { readFile } from 'node:fs/promises';
 
 import { walkTo } from '../fixtures/keyboard.ts';
 import { expect, test } from '../fixtures/maker.ts';
+import { keptTable } from '../fixtures/measures.ts';
 import { pagesOf } from '../fixtures/pdf.ts';
 import { patience, printRoom } from '../screens/print-room.ts';
 
 // A plan is a second of work; where many browsers share a small machine it waits for its turn.
 test.describe.configure({ timeout: 4 * patience });
-
-const faults = async (page: Page) => (await new AxeBuilder({ page }).analyze()).violations;
-
-const sideways = (page: Page) =>
-  page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
 
 async function downloaded(page: Page, act: () => Promise<void>): Promise<Download> {
   const saved = page.waitForEvent('download');
@@ -259,40 +254,24 @@ test('a kept gown is printed with what has just been changed on its table', asyn
   await expect(gown.field('style.flareLength')).toHaveValue('30.0');
 });
 
+test('a block drafted at the table is printed in the same room', async ({ page, table }) => {
+  await page.addInitScript((kept) => {
+    localStorage.setItem('ellwand.table', JSON.stringify({ ...kept, garment: 'skirt-block' }));
+  }, keptTable);
+  await table.open();
+  await expect(table.drawing).toBeVisible();
+  await page.goto('/try/print');
+  const room = printRoom(page);
+  await room.arranged();
+  await room.showCard('Pieces');
+  await expect(page.getByRole('button', { name: 'Bodice only' })).toBeHidden();
+  const saved = await downloaded(page, () => room.makePdf.click());
+  expect(saved.suggestedFilename()).toContain('skirt-block-a4.pdf');
+  expect(await pagesOf(saved)).toBe(await room.sheets());
+});
+
 test('without pieces there is a way back to the table', async ({ page }) => {
   await page.goto('/try/print');
   await page.getByRole('link', { name: 'To the table' }).click();
   await expect(page).toHaveURL(/\/try$/);
 });
-
-for (const colorScheme of ['light', 'dark'] as const) {
-  for (const width of [390, 1280]) {
-    test.describe(`${colorScheme}, ${width} px`, () => {
-      test.use({ colorScheme, viewport: { width, height: 844 } });
-
-      test('the print room has no fault that axe knows, refused or not', async ({
-        page,
-        drawnTable,
-      }) => {
-        await expect(drawnTable.drawing).toBeVisible();
-        await page.goto('/try/print');
-        const room = printRoom(page);
-        await room.arranged();
-        await room.sheet('A1').click();
-        expect(await faults(page)).toEqual([]);
-        for (const tab of await page.getByRole('tab').all()) {
-          await tab.click();
-          expect(await faults(page)).toEqual([]);
-          expect(await sideways(page)).toBe(0);
-        }
-        await room.showCard('Paper');
-        await room.field('overlap').fill('90');
-        await room.field('overlap').blur();
-        await expect(room.field('overlap')).toHaveAttribute('aria-invalid', 'true');
-        expect(await faults(page)).toEqual([]);
-        await page.setViewportSize({ width: 360, height: 740 });
-        expect(await sideways(page)).toBe(0);
-      });
-    });
-  }
-}
