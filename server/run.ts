@@ -27,6 +27,7 @@ export async function runServer(screens: {
   await settleDemoAccount(database, isOnThisMachineAlone(settings));
   const { limits, overHttps, trustedProxies } = settings;
   const drafter = openDrafter(limits);
+  drafter.begin();
   const printer = openPrinter(limits);
   const app = buildApp({
     database,

@@ -8,6 +8,8 @@ import type { Drawing } from './drawing.ts';
 
 /** Drafts in a thread of its own, so that everything else is answered meanwhile; each waits its turn. */
 export type Drafter = {
+  /** Begins the drafting thread; without it, the first draft does. */
+  readonly begin: () => void;
   /** A draft as the contract's JSON; throws RefusalError where it cannot be drawn or too many wait. */
   readonly reply: (inputs: DraftedInputs, turn: Turn) => Promise<Uint8Array>;
   /** What a gown keeps; none where it is incomplete or cannot be drawn. */
@@ -27,6 +29,7 @@ export function openDrafter(limits: Limits): Drafter {
   const thread = openThread<DraftOrder>(workerPaths.draft);
   const ask = (order: DraftOrder, turn: Turn) => queue(turn, () => thread.ask(order));
   return {
+    begin: thread.begin,
     reply: async (inputs, turn) => bytesIn(await ask({ what: 'reply', inputs }, turn)),
     drawing: async (content, turn) => drawingIn(await ask({ what: 'drawing', content }, turn)),
     redrawing: async (before, turn) => redrawingIn(await ask({ what: 'redrawing', before }, turn)),

@@ -6,6 +6,8 @@ import type { ThreadAnswer } from './thread-work.ts';
 
 /** A thread beside the one that answers requests; asked for one thing at a time. */
 export type WorkerThread<Order> = {
+  /** Begins the thread before anybody asks: the first to ask need not wait for it. */
+  readonly begin: () => void;
   /** Throws RefusalError where the thread refuses. Ends the thread when nobody waits for the answer any more. */
   readonly ask: (order: Order, gone?: AbortSignal) => Promise<unknown>;
   readonly close: () => Promise<void>;
@@ -27,11 +29,16 @@ export function openThread<Order>(
     await dropped?.terminate();
   }
 
+  function begun(): Worker {
+    worker ??= new Worker(program);
+    return worker;
+  }
+
   return {
+    begin: () => void begun(),
     ask: async (order, gone) => {
-      worker ??= new Worker(program);
       try {
-        return madeIn(await nextAnswer(worker, order, { patience, gone }));
+        return madeIn(await nextAnswer(begun(), order, { patience, gone }));
       } catch (error) {
         if (gone?.aborted === true || !(error instanceof RefusalError)) await drop();
         throw error;
