@@ -52,7 +52,7 @@ export const agreements: readonly Agreement[] = [
   {
     larger: 'shoulderGirth',
     smaller: 'upperChestGirth',
-    possible: [0, 400],
+    possible: [-150, 600],
     usual: [40, 260],
   },
   { larger: 'upperArmGirth', smaller: 'wristGirth', possible: [20, 350] },
