@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import type { DepthKey } from '../regrade/style-depths.ts';
 import { bodiceBlockCard, skirtBlockCard } from './block-style.ts';
 import { longestReason, measureCard, overruledWith } from './card.ts';
 import { endpoint } from './endpoint.ts';
@@ -156,7 +157,7 @@ export const noteCard = endpoint({
 });
 
 /**
- * Redraws the gown for another measure card, its depths as given. What stood there is kept as a
+ * Redraws what is kept for another measure card, a gown with its depths as given. What stood there is kept as a
  * revision, and the gown as regraded is kept as a revision that names it as its parent.
  */
 export const regradeGown = endpoint({
@@ -168,7 +169,13 @@ export const regradeGown = endpoint({
     baseVersion,
     engine: z.string().max(20),
     cardId: z.uuid(),
-    style: styleCard,
+    /** Depths of a gown's top edge on the other body, mm; one left out stays as the style card has it. */
+    depths: z.strictObject({
+      topDrop: z.number().optional(),
+      neckDepth: z.number().optional(),
+      sideDepth: z.number().optional(),
+      backDepth: z.number().optional(),
+    }) satisfies z.ZodType<{ readonly [K in DepthKey]?: number | undefined }>,
   }),
   reply: { kind: 'json', schema: saved },
 });

@@ -31,7 +31,7 @@ const bodies: Readonly<Record<string, () => object>> = {
     baseVersion: 1,
     engine: engineVersion,
     cardId: ids['cardId'],
-    style: {},
+    depths: {},
   }),
 };
 const cardBodies: typeof bodies = {

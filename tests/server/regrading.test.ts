@@ -37,7 +37,7 @@ const order = (cardId: string, baseVersion = 1) => ({
   baseVersion,
   engine: engineVersion,
   cardId,
-  style: { heelHeight: 60, topDrop: 190 },
+  depths: { topDrop: 190 },
 });
 
 describe('a regrade is refused', () => {

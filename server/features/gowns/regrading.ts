@@ -14,6 +14,7 @@ import { notFound } from '../../http/conflict.ts';
 import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
 import { RefusalError, refusalFor } from '../../http/refusal.ts';
 import { lastingTurn } from '../../http/turn-of.ts';
+import { contentOf } from './gown-view.ts';
 import { keepForGood } from './keep-as-revision.ts';
 import { findGown, type GownRow, holdGown, type LaidCard, setGownCard } from './repository.ts';
 import { countNamedRevisions } from './revision-repository.ts';
@@ -46,21 +47,25 @@ export async function noteCard(
   });
 }
 
-/** The gown on another card: figures are written anew where card or depths change them. */
-function contentOn(
-  row: GownRow,
-  card: LaidCard,
-  style: GownContent['inputs']['style'],
-): GownContent {
-  const kept = Object.entries(row.typed.fields).filter(([field]) => {
-    if (field.startsWith('card.')) return false;
-    const key = field.replace(/^style\./, '');
-    return Reflect.get(row.style, key) === Reflect.get(style, key);
-  });
+type DepthsGiven = Received<typeof regrading>['depths'];
+
+/** What is kept, on another card; only a gown has depths of a top edge. */
+function inputsOn(row: GownRow, card: LaidCard, depths: DepthsGiven): GownContent['inputs'] {
+  const { inputs } = contentOf(row);
+  if (inputs.garment !== undefined && inputs.garment !== 'gown')
+    return { ...inputs, card: card.card };
+  return { ...inputs, card: card.card, style: { ...inputs.style, ...depths } };
+}
+
+/** The content on another card: figures are written anew where card or depths change them. */
+function contentOn(row: GownRow, card: LaidCard, depths: DepthsGiven): GownContent {
+  const kept = Object.entries(row.typed.fields).filter(
+    ([field]) => !field.startsWith('card.') && !(field.replace(/^style\./, '') in depths),
+  );
   return {
     typed: { unit: row.typed.unit, fields: Object.fromEntries(kept) },
     unread: [],
-    inputs: { card: card.card, style, rules: row.rules },
+    inputs: inputsOn(row, card, depths),
   };
 }
 
@@ -99,7 +104,7 @@ export async function regradeGown(
   workroom: Workroom,
   maker: Maker,
   gownId: string,
-  { engine, cardId, style, ...save }: Received<typeof regrading>,
+  { engine, cardId, depths, ...save }: Received<typeof regrading>,
 ): Promise<Saved> {
   const { database } = workroom;
   const before = await lookAhead(workroom, maker, gownId, { engine, ...save });
@@ -114,7 +119,7 @@ export async function regradeGown(
   if (row === undefined) throw notFound('gown');
   const card = await laidCard(database, maker.accountId, cardId);
   refuseAnother(row, card);
-  const content = contentOn(row, card, style);
+  const content = contentOn(row, card, depths);
   const drawing = await drawnOrRefused(workroom, maker, content);
   return changeGown(workroom, maker, gownId, save, async (turn, held) => {
     const laid = await laidCard(turn, maker.accountId, cardId);

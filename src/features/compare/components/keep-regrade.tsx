@@ -3,6 +3,7 @@ import { useRef } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 
 import type { Gown } from '#shared/api/gowns.ts';
+import { depthKeys } from '#shared/regrade/style-depths.ts';
 import { engineVersion } from '#shared/engine/draft-gown.ts';
 import type { Drafted } from '#shared/engine/drafted.ts';
 
@@ -18,6 +19,12 @@ type KeepRegradeProps = {
   readonly after: Drafted;
 };
 
+/** The depths a gown was redrawn with; a block has none. */
+const depthsOf = ({ inputs }: Drafted) =>
+  inputs.garment === undefined || inputs.garment === 'gown'
+    ? Object.fromEntries(depthKeys.map((key) => [key, inputs.style[key]]))
+    : {};
+
 /** Keeps a regraded gown: a new revision of it, or a new gown where the card is another person's. */
 export const KeepRegrade = ({ gown, card, after }: KeepRegradeProps) => {
   const client = useQueryClient();
@@ -26,22 +33,20 @@ export const KeepRegrade = ({ gown, card, after }: KeepRegradeProps) => {
   const another = gown.personId !== null && gown.personId !== card.person.id;
   const keeping = useMutation({
     mutationFn: async () => {
-      if (after.garment !== 'gown') throw new Error('a gown was regraded into another garment');
-      const { style, rules } = after.inputs;
       if (!another) {
         await sendRegrade(gown.id, {
           saveId: saveId.current,
           baseVersion: gown.version,
           engine: engineVersion,
           cardId: card.id,
-          style,
+          depths: depthsOf(after),
         });
         return gown.id;
       }
       const content = {
         typed: { unit: gown.content.typed.unit, fields: {} },
         unread: [],
-        inputs: { card: after.inputs.card, style, rules },
+        inputs: after.inputs,
       };
       const title = `${gown.title} for ${card.person.name}`.slice(0, 80);
       return (await sendNewGown({ saveId: saveId.current, title, content, cardId: card.id })).id;

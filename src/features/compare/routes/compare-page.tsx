@@ -41,8 +41,9 @@ export const ComparePage = () => {
   const choices = useChoices();
   const firstKey = address.get('first') ?? choices[0]?.value;
   const secondKey = address.get('second') ?? `${same}no-ease`;
-  const garment = garments.find((each) => each === address.get('garment')) ?? 'gown';
   const first = useSource(firstKey);
+  const own = first.state === 'found' ? first.inputs.garment : undefined;
+  const garment = garments.find((each) => each === address.get('garment')) ?? own ?? 'gown';
   const alone = secondKey.startsWith(same);
   const other = useSource(alone ? firstKey : secondKey);
   const revisions = useRevisions(firstKey);

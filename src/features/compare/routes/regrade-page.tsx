@@ -90,6 +90,12 @@ const RegradeBench = ({ gown, cards }: { gown: Gown; cards: readonly ListedCard[
       {opened === null && (
         <Notice>This gown has not been drawn yet: draw it on the drafting table first.</Notice>
       )}
+      {opened !== null && !gown.fresh && (
+        <Notice>
+          Figures are still open on the drafting table, so what is drawn here is not what stands
+          there. Finish them first, then regrade.
+        </Notice>
+      )}
       {card === undefined ? (
         <p>
           There is no filled measure card yet. Start one with{' '}
@@ -130,7 +136,7 @@ const RegradeBench = ({ gown, cards }: { gown: Gown; cards: readonly ListedCard[
           unit={unit}
         />
       )}
-      {before && 'draft' in before && card && whole.success && (
+      {gown.fresh && before && 'draft' in before && card && whole.success && (
         <Regraded
           key={card.id}
           before={before.draft}
