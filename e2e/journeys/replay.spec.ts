@@ -4,6 +4,7 @@ import { expect, test } from '../fixtures/journey.ts';
 import { tenMeasures } from '../fixtures/measures.ts';
 import { pagesOf } from '../fixtures/pdf.ts';
 import { replay } from '../screens/replay.ts';
+import { styleScreen } from '../screens/style-card.ts';
 
 const sizes = [
   { name: '390 px', width: 390, height: 844 },
@@ -179,6 +180,20 @@ test.describe('where motion is unwanted', () => {
     );
     expect(names).toEqual(['none', 'none']);
   });
+});
+
+test('a block is told like a gown', async ({ page, drawnTable }) => {
+  const style = styleScreen(drawnTable);
+  await style.show();
+  await style.option('Garment', 'bodice block').check();
+  await drawnTable.tab('Steps').click();
+  await page.getByRole('link', { name: 'Replay' }).click();
+  const told = replay(page);
+  await told.choose('Bust dart');
+  await expect(told.title).toHaveText('Front · Bust dart');
+  await expect(told.newLines).toHaveCount(3);
+  await told.choose('Allowances');
+  await expect(told.drawing(/Allowances, 2 pieces/)).toBeVisible();
 });
 
 test('the worksheet is a file of several pages', async ({ page, drawnTable }) => {

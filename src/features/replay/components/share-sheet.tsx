@@ -16,6 +16,8 @@ import { WithdrawButton } from './withdraw-button.tsx';
 
 type ShareSheetProps = {
   readonly gownId: string;
+  /** What is drawn there, as the class would call it. */
+  readonly what: string;
   readonly step: string;
   readonly unit: Unit;
   readonly open: boolean;
@@ -35,9 +37,9 @@ const hourWords: { readonly [H in (typeof classHours)[number]]: string } = {
 
 /** Opens a class at this step and gives its link, once; those that are open can be withdrawn here. */
 export const ShareSheet = (props: ShareSheetProps) => {
-  const { gownId, step, unit, open, onClose, classes } = props;
+  const { gownId, what, step, unit, open, onClose, classes } = props;
   const client = useQueryClient();
-  const [title, setTitle] = useState('A gown, step by step');
+  const [title, setTitle] = useState(`A ${what}, step by step`);
   const [hours, setHours] = useState<(typeof classHours)[number]>(8);
   const sharing = useMutation({
     mutationFn: () => startClass(gownId, { title, step, unit, hours }),

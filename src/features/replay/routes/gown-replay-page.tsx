@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { useEffect, useState } from 'react';
 
 import type { Drafted } from '#shared/engine/drafted.ts';
+import { garmentTitles } from '#shared/exports/garment-titles.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { Button } from '../../../ui/button.tsx';
@@ -79,6 +80,7 @@ const Told = ({ gownId, draft, fresh, title, unit: first }: ToldProps) => {
       />
       <ShareSheet
         gownId={gownId}
+        what={garmentTitles[draft.garment].toLowerCase()}
         step={step}
         unit={unit}
         open={sharing}
