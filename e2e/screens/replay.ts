@@ -24,6 +24,7 @@ export function replay(page: Page) {
     leaveProjector: page.getByRole('button', { name: 'Leave projector view' }),
     /** Goes to a step by its name; on a narrow screen the list lies behind a button. */
     choose: async (title: string) => {
+      await telling.waitFor();
       const button = page.getByRole('button', { name: 'All steps' });
       const within = (await button.isVisible()) ? list : page;
       if (within === list) await button.click();
