@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { gownSchema, readGown, regradeGown } from '#shared/api/gowns.ts';
+import { createGown, gownSchema, readGown, regradeGown } from '#shared/api/gowns.ts';
 import { createMeasureCard, readMeasureCard, saveMeasureCard } from '#shared/api/measure-cards.ts';
 import { listRevisions, readRevision, returnToRevision } from '#shared/api/revisions.ts';
 import { engineVersion } from '#shared/engine/draft-gown.ts';
@@ -127,6 +127,32 @@ describe('a saved gown regraded a year later', () => {
     const lines = (pieces: typeof fresh.pieces) =>
       pieces.map(({ name, edges, darts, cutLine }) => ({ name, edges, darts, cutLine }));
     expect(lines(drawn.pieces)).toEqual(JSON.parse(JSON.stringify(lines(fresh.pieces))));
+  });
+
+  it('stays a block where it was one', async () => {
+    const { typed, inputs } = content();
+    const block = {
+      typed,
+      unread: [],
+      inputs: {
+        garment: 'skirt-block' as const,
+        card: inputs.card,
+        style: { length: 600 },
+        rules: inputs.rules,
+      },
+    };
+    const { id: gownId } = await maker.call(createGown, {
+      saveId: randomUUID(),
+      title: 'Skirt block',
+      content: block,
+    });
+    const cardId = await newCard({ waistGirth: 760 });
+    await maker.call(regradeGown, { ...order(cardId), depths: {} }, { gownId });
+    expect((await read(maker, { gownId })).content.inputs).toMatchObject({
+      garment: 'skirt-block',
+      style: { length: 600 },
+      card: { waistGirth: 760 },
+    });
   });
 
   it('goes back to what it was, and the card it was drawn from is still kept as it was', async () => {
