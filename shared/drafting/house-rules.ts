@@ -25,7 +25,7 @@ export const edgeKinds = [
 export type EdgeKind = (typeof edgeKinds)[number];
 
 /** The allowances every workroom has, and those it may give beside them, each with the one it else follows. */
-export const plainAllowances = ['seam', 'side', 'zip', 'top', 'hem'] as const;
+const plainAllowances = ['seam', 'side', 'zip', 'top', 'hem'] as const;
 export const allowanceFollows = {
   waist: 'seam',
   princess: 'seam',

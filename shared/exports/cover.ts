@@ -15,6 +15,7 @@ import { pagePlan } from './page-plan.ts';
 import { rod } from './rod.ts';
 import { type Block, paragraph, stack } from './text-block.ts';
 import { shorten } from './type-width.ts';
+import { warningWords } from './warning-words.ts';
 
 /** A page that a cover is drawn on, mm. */
 export type CoverPage = {

@@ -18,7 +18,7 @@ const longer = 25;
 const givePart = 0.5;
 
 /** How far a cloth may be stretched for a moment, as a part of its length. */
-export const giveOf = ({ cloth, stretch }: Pick<GownStyle, 'cloth' | 'stretch'>): number =>
+const giveOf = ({ cloth, stretch }: Pick<GownStyle, 'cloth' | 'stretch'>): number =>
   cloth === 'stretch' ? (givePart * stretch) / 100 : 0;
 
 /** What a closure is made from. */
