@@ -161,7 +161,7 @@ function listsBeside(
         (y) => paragraph(note, x, y, width, Math.min(2.8, size), { grey: 0.3 }),
         ...draft.warnings.map(
           (each) => (y: number) =>
-            paragraph(speak(each.said, unit), x, y, width, Math.min(2.8, size)),
+            paragraph(warningWords(each, unit), x, y, width, Math.min(2.8, size)),
         ),
       ],
       top,
