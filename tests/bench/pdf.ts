@@ -127,7 +127,11 @@ export async function benchPdf(): Promise<readonly PdfBench[]> {
   const sheets = planSheets(draft.pieces, order);
   const whole = tilesJob(draft, order, 'cm');
   const drawn = new Map(drawnPieces(draft.pieces, order).map((each) => [each.drawing, each]));
-  const labels = placedLabels(sheets, drawn, labelFacts('gown', middleBody, draft.number, balanced));
+  const labels = placedLabels(
+    sheets,
+    drawn,
+    labelFacts('gown', middleBody, draft.number, balanced),
+  );
   const job: PrintJob = { ...whole, pages: whole.pages.slice(1) };
   const what = `PDF of the demo gown, ${job.pages.length} A4 tiles`;
   const ours = () => pdfBytes(job);
