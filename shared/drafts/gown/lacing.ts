@@ -1,17 +1,20 @@
+import { DraftingError } from '../../drafting/drafting-error.ts';
 import { edge, notchAtHeight } from '../../drafting/outline.ts';
 import type { Edge, InnerLine, LevelLine, LevelName, Piece } from '../../drafting/piece.ts';
 import {
   endOf,
   pathCrossings,
   pathLength,
+  pointAt,
   reverse,
   splitPath,
   startOf,
   stationAtLength,
 } from '../../geometry/curve.ts';
-import { type Path, line } from '../../geometry/path.ts';
+import { type Path, type Segment, line } from '../../geometry/path.ts';
 import { type Point, point } from '../../geometry/point.ts';
 import { type Profile, cubicProfile, profilePath, xAt } from '../../geometry/profile.ts';
+import { mm, said } from '../../units/said.ts';
 import { type Closed, isBody, isCentreBack } from './zips.ts';
 
 /** The centre back edges stand apart by this from the top edge to the waist (common practice, no source). */
@@ -39,11 +42,33 @@ const halfGap = ({ top, waist, end }: Lacing): Profile => [
 const offAt = (lacing: Lacing, y: number): number =>
   y >= lacing.end ? 0 : xAt(halfGap(lacing), y);
 
+/** A back panel narrower than half the gap has nothing left to lace. */
+const noRoomForLacing = (): DraftingError =>
+  new DraftingError([
+    {
+      code: 'no-room-for-lacing',
+      severity: 'error',
+      field: 'style.closure',
+      with: ['style.shaping', 'card.underbustGirth'],
+      said: said`The centre back panel is narrower at its seam than half the lacing gap of ${mm(lacingGap)}: nothing is left to lace. Close the gown with a zip at the centre back.`,
+    },
+  ]);
+
 /** An edge that meets the centre line at one end, cut where it meets the lacing's edge. */
 function trimmed(path: Path, off: number, end: 'start' | 'end'): Path {
-  const met = pathCrossings(path, point(off, 0), point(off, 1));
-  const station = end === 'start' ? met[0] : met.at(-1);
-  if (!station) return path;
+  const reaches = ({ from, to }: Segment): boolean => (from.x - off) * (to.x - off) <= 0;
+  const index = end === 'start' ? path.findIndex(reaches) : path.findLastIndex(reaches);
+  const segment = path[index];
+  if (!segment) throw noRoomForLacing();
+  // Halved until it is met: a seam that runs nearly level is nearly a line, whose cubic roots are lost in rounding.
+  let [low, high] = [0, 1];
+  const outwards = segment.to.x > segment.from.x;
+  for (let i = 0; i < 60; i += 1) {
+    const t = (low + high) / 2;
+    if (pointAt(segment, t).x < off === outwards) low = t;
+    else high = t;
+  }
+  const station = { index, t: low };
   const [before, after] = splitPath(path, station);
   return end === 'start' ? after : before;
 }
