@@ -2,7 +2,7 @@ import { pathLength } from '../geometry/curve.ts';
 import type { Path } from '../geometry/path.ts';
 import { turnsAlong } from '../geometry/turns.ts';
 import { type AllowanceKind, type HouseRules, allowanceFor } from './house-rules.ts';
-import type { Edge } from './piece.ts';
+import type { Edge, Piece } from './piece.ts';
 
 /**
  * A hem that bends no more tightly than this is turned up like a straight one: its edge is then at most
@@ -28,4 +28,29 @@ export function allowanceKind({ kind, name, path, open, narrow }: Edge): Allowan
 export function edgeAllowance(edge: Edge, rules: HouseRules): number | undefined {
   const kind = allowanceKind(edge);
   return kind === undefined ? undefined : allowanceFor(kind, rules);
+}
+
+/** Each allowance as a maker calls the edges it lies outside of, in the order they are told. */
+const allowanceWords: readonly (readonly [AllowanceKind, string])[] = [
+  ['seam', 'seams'],
+  ['side', 'side seams'],
+  ['waist', 'waist seam'],
+  ['princess', 'princess seams'],
+  ['zip', 'the seam with the closure'],
+  ['top', 'enclosed edges'],
+  ['armhole', 'armhole edges'],
+  ['facing', 'free edges of facings'],
+  ['hem', 'circular hem'],
+  ['straightHem', 'straight hem'],
+];
+
+/** The allowances these pieces have, by name, mm. */
+export function allowancesOf(
+  pieces: readonly Piece[],
+  rules: HouseRules,
+): readonly { readonly name: string; readonly wide: number }[] {
+  const used = new Set(pieces.flatMap((piece) => piece.edges.map(allowanceKind)));
+  return allowanceWords
+    .filter(([kind]) => used.has(kind))
+    .map(([kind, name]) => ({ name, wide: allowanceFor(kind, rules) }));
 }

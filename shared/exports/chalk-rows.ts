@@ -1,3 +1,4 @@
+import { allowancesOf } from '../drafting/edge-allowance.ts';
 import type { Piece } from '../drafting/piece.ts';
 import type { Drafted } from '../engine/drafted.ts';
 import { formatInches, formatLength } from '../units/format-length.ts';
@@ -61,19 +62,13 @@ export const pointRows = (
 
 /** What the lines are, and what is added outside them. */
 export function allowanceRows(draft: Drafted, unit: Unit): readonly Row[] {
-  const { allowance } = draft.inputs.rules;
-  const pair = (name: string, mm: number): Row => ({
-    kind: 'pair',
-    name,
-    value: chalked(mm, unit),
-  });
   return [
     { kind: 'heading', text: `Add outside the lines, ${unit}` },
-    pair('seams', allowance.seam),
-    pair('side seams', allowance.side),
-    pair('centre back and zip', allowance.zip),
-    pair('top edge', allowance.top),
-    pair('hem', allowance.hem),
+    ...allowancesOf(draft.pieces, draft.inputs.rules).map(({ name, wide }): Row => ({
+      kind: 'pair',
+      name,
+      value: chalked(wide, unit),
+    })),
   ];
 }
 

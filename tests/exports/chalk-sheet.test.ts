@@ -3,10 +3,11 @@ import { describe, expect, it } from 'vitest';
 import { balanced } from '#shared/drafting/house-rule-presets.ts';
 import type { Draft } from '#shared/engine/draft.ts';
 import { styleChoices } from '#shared/drafts/gown/style-card.ts';
+import { draftAny, type Drafted } from '#shared/engine/drafted.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
 import { chalkPoints } from '#shared/exports/chalk-points.ts';
-import { chalked } from '#shared/exports/chalk-rows.ts';
+import { allowanceRows, chalked } from '#shared/exports/chalk-rows.ts';
 import { type ChalkChoice, chalkSheetJob } from '#shared/exports/chalk-sheet.ts';
 import type { Words } from '#shared/exports/drawing.ts';
 import { startOf } from '#shared/geometry/curve.ts';
@@ -126,4 +127,33 @@ describe('on any body', () => {
       { numRuns: 60, seed: 20261114 },
     );
   }, 30_000);
+});
+
+describe('the allowances a chalk sheet tells', () => {
+  const told = (draft: Drafted): readonly string[] =>
+    allowanceRows(draft, 'cm').flatMap((row) =>
+      row.kind === 'pair' ? [`${row.name} ${row.value}`] : [],
+    );
+
+  it('are those the pieces are cut with: a straight hem is turned up four centimetres', () => {
+    const block = draftAny({
+      garment: 'skirt-block',
+      card: middleBody,
+      style: {},
+      rules: { ...balanced, allowance: { ...balanced.allowance, waist: 12 } },
+    });
+    expect(told(block)).toContain('straight hem 4.0');
+    expect(told(block).filter((each) => each.startsWith('circular hem'))).toEqual([]);
+  });
+
+  it('name what only some gowns have', () => {
+    const gown = draftAny({
+      garment: 'gown',
+      card: middleBody,
+      style: { sleeve: 'pleatedBand', facing: 'faced' },
+      rules: balanced,
+    });
+    expect(told(gown)).toContain('free edges of facings 0.6');
+    expect(told(gown)).toContain('circular hem 1.0');
+  });
 });

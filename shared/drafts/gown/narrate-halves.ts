@@ -2,8 +2,8 @@ import type { DraftingTable, PartTable } from '../../drafting/drafting-table.ts'
 import { amount, leastSaid, worked } from '../../drafting/quantity.ts';
 import { line } from '../../geometry/path.ts';
 import { point } from '../../geometry/point.ts';
-import { profilePath, steepest, xAt } from '../../geometry/profile.ts';
-import { deg, mm, said } from '../../units/said.ts';
+import { profilePath, slopeAt, steepest, xAt } from '../../geometry/profile.ts';
+import { type Said, deg, mm, said } from '../../units/said.ts';
 import type { Contour } from './contour.ts';
 import { type Half, dartShares } from './half.ts';
 import type { PairedHalves } from './pair-halves.ts';
@@ -105,6 +105,17 @@ function narrateSuppression(table: DraftingTable, paper: PartTable, half: Half):
   }
 }
 
+/** A lean under this reads as upright, degrees. */
+const leastLean = 0.5;
+
+/** How the side stands at bust and hip: upright, or leaning where upright it would bend too often. */
+function uprightness({ line, heights }: Half): Said {
+  const leanAt = (y: number): number => (Math.abs(Math.atan(slopeAt(line, y))) * 180) / Math.PI;
+  const [bust, hip] = [leanAt(heights.bust), leanAt(heights.hip)];
+  if (bust < leastLean && hip < leastLean) return said`upright at bust and hip`;
+  return said`leaning ${deg(bust)} at the bust and ${deg(hip)} at the hip, where upright it would bend too often`;
+}
+
 function narrateSide(paper: PartTable, half: Half): void {
   const { line, heights, side } = half;
   const lean = (Math.atan(steepest(line, heights.bust, heights.hip)) * 180) / Math.PI;
@@ -114,7 +125,7 @@ function narrateSide(paper: PartTable, half: Half): void {
       : said`Its heights are trued: from the waist every level lies as far along the seam as on the front.`;
   paper.draw(
     'Side seam',
-    said`One fair curve through bust, waist, top hip and hip, upright at bust and hip, then upright into the knee seam; it leans ${deg(lean)} at most. ${trued}`,
+    said`One fair curve through bust, waist, top hip and hip, ${uprightness(half)}, then upright into the knee seam; it leans ${deg(lean)} at most. ${trued}`,
     {
       lines: [profilePath(line, heights.underarm, heights.knee)],
       points: {
