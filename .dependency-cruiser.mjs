@@ -7,8 +7,7 @@ const sharedArrows = {
   drafts: ['drafting', 'geometry', 'body', 'units'],
   finishing: ['drafting', 'geometry', 'units'],
   proof: ['drafting', 'geometry', 'body', 'units'],
-  narration: ['drafting', 'geometry', 'units'],
-  engine: ['drafts', 'finishing', 'proof', 'narration', 'drafting', 'geometry', 'body', 'units'],
+  engine: ['drafts', 'finishing', 'proof', 'drafting', 'geometry', 'body', 'units'],
   sheets: ['engine', 'drafting', 'geometry', 'units'],
   lesson: ['sheets', 'engine', 'drafting', 'geometry', 'body', 'units'],
   exports: [
@@ -19,7 +18,6 @@ const sharedArrows = {
     'engine',
     'finishing',
     'proof',
-    'narration',
     'drafts',
     'drafting',
     'geometry',
