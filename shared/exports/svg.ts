@@ -1,3 +1,4 @@
+import { allowancesOf } from '../drafting/edge-allowance.ts';
 import { formatWithUnit } from '../units/format-length.ts';
 import type { Unit } from '../units/said.ts';
 import { speak } from '../units/speak.ts';
@@ -12,9 +13,8 @@ const foot = 30;
 
 /** The legend: scale, what the lines mean, and the allowances in the reader's unit. */
 function legend(draft: Drafted, unit: Unit): readonly string[] {
-  const { seam, side, zip, top, hem } = draft.inputs.rules.allowance;
-  const allowances = Object.entries({ seams: seam, side, zip, 'top edge': top, hem })
-    .map(([name, mm]) => `${name} ${formatWithUnit(mm, unit)}`)
+  const allowances = allowancesOf(draft.pieces, draft.inputs.rules)
+    .map(({ name, wide }) => `${name} ${formatWithUnit(wide, unit)}`)
     .join(', ');
   return [
     `Draft ${draft.number} · print at 100 % · cut on the solid line, sew on the dashed line`,

@@ -157,7 +157,7 @@ describe('the exported SVG', () => {
         .map(({ text }) => text)
         .join(' ');
     expect(legend('cm')).toContain('seams 1.5 cm');
-    expect(legend('in')).toContain('side 1 in');
+    expect(legend('in')).toContain('side seams 1 in');
   });
 
   it('is the same file for the same inputs', () => {

@@ -147,7 +147,8 @@ export function pleatedBand(
       darts: [],
       levels: [],
       notches: notchAtLength('arm', bound, path / 2, 1),
-      grain: { from: point(0.2 * path, 0.5 * stayWidth), to: point(0.8 * path, 0.5 * stayWidth) },
+      // At one end: the strip is low, and its name needs the rest.
+      grain: { from: point(0.04 * path, 0.5 * stayWidth), to: point(0.2 * path, 0.5 * stayWidth) },
       drills: [],
     },
   ];

@@ -129,7 +129,10 @@ function outerEnd(
   };
 }
 
-/** The back opens above the bust only where its edge stands at least this far over bust level. */
+/**
+ * The back opens above the bust only where its edge stands at least this far over bust level, or over the
+ * tip where a dart takes the opening: a shorter dart cannot be sewn.
+ */
 const backEdgeOver = 30;
 
 /** Whether the back's top line, drawn with its opening, crosses it high enough over bust level. */
@@ -142,7 +145,8 @@ export function backEdgeIsHigh(inputs: Omit<TopInputs, 'footOf' | 'across'>): bo
     style.shaping === 'princess'
       ? princessAbove(half.axis, bust, opening, peak)
       : topDart(half.axis, bust, opening, peak, rules.dartClearance);
-  return bust - topLine(points, legs).crossing >= backEdgeOver;
+  const tip = style.shaping === 'princess' ? bust : bust - rules.dartClearance;
+  return tip - topLine(points, legs).crossing >= backEdgeOver;
 }
 
 const openingOf = (

@@ -103,7 +103,7 @@ const markedAt: { readonly [P in GodetPlace]: number } = {
   'back-princess': 0.35,
 };
 
-/** The mark on a seam of a godet, the same length under its point on both edges. */
+/** The marks on a seam of a godet: at its point, where the seam above it stops, and one down it, alike on both edges. */
 export function markOn(
   seam: Edge,
   place: GodetPlace,
@@ -112,7 +112,10 @@ export function markOn(
 ): Piece['notches'] {
   const length = pathLength(seam.path);
   const down = length * markedAt[place];
-  return notchAtLength(`godet-${place}`, seam, downwards ? down : length - down, strokes);
+  return [
+    ...notchAtLength(`godet-${place}-point`, seam, downwards ? 0 : length, strokes),
+    ...notchAtLength(`godet-${place}`, seam, downwards ? down : length - down, strokes),
+  ];
 }
 
 /** Which piece a seam of a godet is found on: divided godets have one for each of their seams. */

@@ -15,7 +15,7 @@ export function fitOut(
   { body, levels, style }: { body: Body; levels: BodyLevels; style: GownStyle },
 ): readonly Piece[] {
   const paper = table.part('Inside', 'both');
-  const lining = style.lining === 'lined' ? lineGown(paper, pieces) : [];
+  const lining = style.lining === 'lined' ? lineGown(paper, pieces, style.facing === 'faced') : [];
   const boned = style.boning === 'boned' ? boneGown(paper, pieces, levels.waist) : pieces;
   const stayed = style.boning === 'boned' ? stayWaist(paper, boned, body) : boned;
   const faced = style.facing === 'faced' ? faceGown(paper, stayed) : stayed;

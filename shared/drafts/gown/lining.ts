@@ -102,7 +102,11 @@ const liningPiece = (piece: Piece, lined: ReadonlySet<string>): Piece => {
 };
 
 /** The lining of every piece but the sleeves: the same seam lines, shorter at the hem. */
-export function lineGown(paper: PartTable, pieces: readonly Piece[]): readonly Piece[] {
+export function lineGown(
+  paper: PartTable,
+  pieces: readonly Piece[],
+  faced: boolean,
+): readonly Piece[] {
   const outer = pieces.filter(({ part }) => part !== 'inner' && part !== 'sleeve');
   const lined = new Set(outer.map(({ name }) => name));
   const lining = outer.map((piece) => liningPiece(piece, lined));
@@ -112,7 +116,7 @@ export function lineGown(paper: PartTable, pieces: readonly Piece[]): readonly P
   );
   paper.draw(
     'Lining',
-    said`The same seam lines as the gown, the hem ${mm(hemShorter)} shorter. Sew the long seams of the skirt ${mm(seamedInside)} nearer to the cut edge than the seam line: each then gives ${mm(2 * seamedInside)} of ease; those of the bodice as drawn, so that it stays smooth.${onFold ? ' Lay the fold of the back ' : ''}${onFold ? said`${mm(pleat)} beyond the centre line and press that into a pleat.` : ''}`,
+    said`The same seam lines as the gown, the hem ${mm(hemShorter)} shorter. Sew the long seams of the skirt ${mm(seamedInside)} nearer to the cut edge than the seam line: each then gives ${mm(2 * seamedInside)} of ease; those of the bodice as drawn, so that it stays smooth.${onFold ? ' Lay the fold of the back ' : ''}${onFold ? said`${mm(pleat)} beyond the centre line and press that into a pleat.` : ''}${faced ? ' Lay the facing on the lining, stitch it down along its lower edge, and sew both to the upper edge as one.' : ''}`,
     {
       why: said`A lining that is a little wider takes no strain, and one that is shorter never shows. Ease is given in the sewing, so that every seam line still meets its partner and is proven.`,
       pieces: lining.map(({ name }) => name),
