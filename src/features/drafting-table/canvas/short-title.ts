@@ -10,7 +10,7 @@ export function shortTitle({ name, title, side, part }: Named): string {
   const front = side === 'front';
   if (name.startsWith('lining-')) return `Lining ${shortTitle(lined({ name, title, side, part }))}`;
   if (part === 'sleeve' || part === 'inner') return title.split(',')[0] ?? title;
-  if (name.startsWith('godet')) return `Godet ${front ? 'F' : 'B'}`;
+  if (name.startsWith('godet-')) return godetTitle(name);
   if (part === 'flare') {
     const gore = /-(\d+)$/.exec(name)?.[1];
     const centre = title.includes('centre gore') ? ' centre' : '';
@@ -21,6 +21,18 @@ export function shortTitle({ name, title, side, part }: Named): string {
   if (part === 'middle') return `${half} skirt`;
   if (name.endsWith('-centre')) return `${half} ${front ? 'CF' : 'CB'}`;
   return name.endsWith('-side') ? `${half} side` : `${half} top`;
+}
+
+/** A godet by the seam it stands in: `Godet CB`, `Godet princess F`, and the half where it is cut in two. */
+function godetTitle(name: string): string {
+  const [place = name, half = ''] = name.slice('godet-'.length).split(/-(?=[ab]$)/);
+  const words: Readonly<Record<string, string>> = {
+    side: 'side',
+    'centre-back': 'CB',
+    'front-princess': 'princess F',
+    'back-princess': 'princess B',
+  };
+  return `Godet ${words[place] ?? place}${half === '' ? '' : ` ${half}`}`;
 }
 
 /** The piece of the gown a lining lies under. */

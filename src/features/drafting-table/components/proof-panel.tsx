@@ -111,8 +111,15 @@ export const ProofPanel = memo(function ProofPanel({
 
 const sentences = (text: string): string[] => text.split(/(?<=\.) /);
 
+/** Two lengths nearer than the proof's own bound for seams are one, mm. */
+const sameLength = 0.5;
+
 function partnerWords(row: SeamRow, unit: Unit): string {
-  if (!row.holds) return `${formatLength(row.second.length, unit)}: does not meet`;
+  const partner = formatLength(row.second.length, unit);
+  if (!row.holds) return `${partner}: does not meet`;
+  // Where both lengths stand and differ though the seam holds, one is gathered or pleated onto the other.
+  const longer = row.first.length - row.second.length - row.ease;
+  if (Math.abs(longer) > sameLength) return `${longer > 0 ? 'pleated into' : 'takes'} ${partner}`;
   return row.ease === 0 ? 'equal' : `eased ${formatLength(Math.abs(row.ease), unit)}`;
 }
 

@@ -55,3 +55,15 @@ test('the gores of a flare lie apart, and the levels stop before them', () => {
     }
   }
 });
+
+test('godets are told apart by the seam they stand in', () => {
+  const gown = draftGown({
+    card: middleBody,
+    style: { flare: 'godets', waistSeam: 'none' },
+    rules: balanced,
+  });
+  const names = gown.pieces.filter(({ name }) => name.startsWith('godet')).map(shortTitle);
+  expect(new Set(names).size).toBe(names.length);
+  expect(names).toContain('Godet side');
+  expect(names).toContain('Godet CB');
+});
