@@ -93,6 +93,35 @@ function checkPiece(
   return problems;
 }
 
+/** A piece listed again, or more outlines than are laid out together: copies are asked for by number. */
+function checkCount(listed: readonly PieceOrder[]): readonly Problem[] {
+  const names = listed.map(({ piece }) => piece);
+  const twice = names.findIndex((name, at) => names.indexOf(name) !== at);
+  const drawings = listed.reduce(
+    (sum, { copies, how }) => sum + copies * (how === 'mirrored pair' ? 2 : 1),
+    0,
+  );
+  return [
+    ...(twice < 0
+      ? []
+      : [
+          error({
+            code: 'piece-twice',
+            field: `order.pieces.${twice}.piece`,
+            said: said`The piece “${names[twice] ?? ''}” is listed twice: list it once, with its copies.`,
+          }),
+        ]),
+    ...(drawings <= orderLimits.drawings
+      ? []
+      : [
+          outOfRange(
+            'order.pieces',
+            said`That is ${drawings} outlines with all copies and pairs; at most ${orderLimits.drawings} are laid out together: print in two goes.`,
+          ),
+        ]),
+  ];
+}
+
 /**
  * What is wrong with an order for these pieces: figures outside their bounds, no piece at all, pieces the
  * draft has not got. Fields are those of the contract (`order.margin`).
@@ -109,6 +138,7 @@ export function checkOrder(order: PrintOrder, drafted: readonly Piece[]): readon
     ...checkMargin(margin),
     ...checkOverlap(overlap),
     ...listed.flatMap((each, at) => checkPiece(each, at, drafted)),
+    ...checkCount(listed),
     ...(none
       ? [
           error({

@@ -88,6 +88,8 @@ export const orderLimits = {
   shortSide: { least: 210, most: 1600 },
   longSide: { least: 275, most: 5000 },
   copies: { least: 1, most: 6 },
+  /** Outlines laid on the sheets together, copies and both of a pair counted: more is printed in two goes. */
+  drawings: 80,
 } as const;
 
 /** How far a long plan has come: moves made of all it may make, and the sheets it needs as it stands. */

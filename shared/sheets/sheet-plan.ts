@@ -30,6 +30,9 @@ export const coverSize = { width: 210, height: 297, white: 8 } as const;
 /** From this length of the shorter side on a sheet is too good for a cover alone, mm. */
 const largePaper = 500;
 
+/** Up to so many outlines are moved as often as the search asks. */
+const fullyMoved = 30;
+
 const coverShape = ({ width, height, white }: typeof coverSize): Shape => ({
   piece: coverDrawing,
   chain: [
@@ -79,9 +82,11 @@ export function* planInSteps(
   const [first] = papers;
   const among = first !== undefined && Math.min(first.width, first.height) >= largePaper;
   const shapes = shapesFor(pieces, order, among);
+  // A move costs more the more there is to move: very many outlines get fewer.
+  const spent = Math.round(moves * Math.min(1, fullyMoved / Math.max(1, shapes.length)));
   let best: SheetPlan | undefined;
   for (const [which, paper] of papers.entries()) {
-    const search = arrange(shapes, paper, order, moves);
+    const search = arrange(shapes, paper, order, spent);
     let step = search.next();
     while (!step.done) {
       const { moves: made, of, sheets } = step.value;

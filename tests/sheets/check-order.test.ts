@@ -67,3 +67,33 @@ describe('an order for a gown', () => {
     expect(checkOrder(order, skirt).map(({ field }) => field)).toEqual(['order.pieces']);
   });
 });
+
+describe('an order of very many outlines', () => {
+  const asked = (copies: number) =>
+    pieces.map((piece) => ({ piece: piece.name, copies, how: waysToDraw(piece)[0] ?? 'on fold' }));
+
+  it('is refused where a piece is listed twice', () => {
+    const [first] = asked(1);
+    expect(first && check({ pieces: [first, first] }).map(({ code }) => code)).toEqual([
+      'piece-twice',
+    ]);
+  });
+
+  it('is refused where there are more than are laid out together, pairs counted twice', () => {
+    const lined = draftGown({
+      card: middleBody,
+      style: { lining: 'lined', facing: 'faced' },
+      rules: balanced,
+    }).pieces;
+    const order = (copies: number): PrintOrder => ({
+      ...plainOrder,
+      pieces: lined.map((piece) => ({
+        piece: piece.name,
+        copies,
+        how: waysToDraw(piece).includes('mirrored pair') ? 'mirrored pair' : 'on fold',
+      })),
+    });
+    expect(checkOrder(order(1), lined)).toEqual([]);
+    expect(checkOrder(order(6), lined).map(({ field }) => field)).toEqual(['order.pieces']);
+  });
+});
