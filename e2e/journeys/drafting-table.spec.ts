@@ -2,7 +2,10 @@ import { expect, test } from '../fixtures/journey.ts';
 
 test.use({ viewport: { width: 1280, height: 900 } });
 
-test('the pieces follow every figure at once', async ({ drawnTable }) => {
+test('the pieces follow every figure at once, on a page no taller than the window', async ({
+  page,
+  drawnTable,
+}) => {
   const before = await drawnTable.drawing.locator('canvas').first().screenshot();
   await drawnTable.field('style.kneeFinished').fill('100');
   await expect(async () => {
@@ -10,6 +13,8 @@ test('the pieces follow every figure at once', async ({ drawnTable }) => {
     expect(after.equals(before)).toBe(false);
   }).toPass();
   await expect(drawnTable.panel.getByRole('row', { name: /^Knee seam —/ })).toContainText('100.0');
+  await page.setViewportSize({ width: 1280, height: 800 });
+  await expect.poll(() => page.evaluate(() => document.documentElement.scrollHeight)).toBe(800);
 });
 
 test('a seam lights with its partner and both lengths, pointed at or stepped to by key', async ({

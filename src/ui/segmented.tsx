@@ -9,7 +9,10 @@ type SegmentedProps<T extends string> = {
   readonly onChoose: (value: T) => void;
 };
 
-/** A few choices side by side, one of them taken: radio buttons in a row. */
+/**
+ * A few choices side by side, one of them taken: radio buttons in a row. The hidden legend stays inside the row,
+ * else a column that scrolls would lengthen the page by it.
+ */
 export function Segmented<T extends string>({
   legend,
   choices,
@@ -18,7 +21,7 @@ export function Segmented<T extends string>({
 }: SegmentedProps<T>) {
   const name = useId();
   return (
-    <fieldset className="inline-flex rounded-one border border-rule bg-cloth p-px">
+    <fieldset className="relative inline-flex rounded-one border border-rule bg-cloth p-px">
       <legend className="sr-only">{legend}</legend>
       {choices.map((choice) => (
         <label
