@@ -8,6 +8,13 @@ export const depthChoices = [
 ] as const;
 export type DepthChoice = (typeof depthChoices)[number]['value'];
 
+/** One sentence for each, below the choice. */
+export const depthHints: { readonly [C in DepthChoice]: string } = {
+  fixed: 'Peak, neck, side and back keep the figures they were drawn with, those left open too.',
+  proportional: 'They grow and shrink with side neck to bust point.',
+  open: 'What the style card leaves open follows the new body; what it gives stays.',
+};
+
 /** The rule for each depth. */
 export function depthsFor(choice: DepthChoice): Depths {
   switch (choice) {

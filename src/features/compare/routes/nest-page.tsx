@@ -5,18 +5,18 @@ import { Link, useParams } from 'react-router-dom';
 import type { Gown } from '#shared/api/gowns.ts';
 import { mostSizes } from '#shared/regrade/grade-rules.ts';
 import { nestOf } from '#shared/regrade/nest.ts';
-import type { Unit } from '#shared/units/said.ts';
 
 import { failureWords } from '../../../lib/failure-words.ts';
+import { useUnit } from '../../../lib/use-unit.ts';
 import { Notice } from '../../../ui/notice.tsx';
 import { Segmented } from '../../../ui/segmented.tsx';
 import { Select } from '../../../ui/select.tsx';
+import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { GradeRulesTable } from '../components/grade-rules-table.tsx';
 import { NestBench } from '../components/nest-bench.tsx';
 import { Labelled } from '../components/overlay-tools.tsx';
 import { ProblemList } from '../components/problem-list.tsx';
-import { UnitChoice } from '../components/unit-choice.tsx';
-import { depthChoices, depthsFor, type DepthChoice } from '../depth-choices.ts';
+import { depthChoices, depthHints, depthsFor, type DepthChoice } from '../depth-choices.ts';
 import { keepGradeRules, keptGradeRules } from '../kept-grade-rules.ts';
 import { gownQuery } from '../queries.ts';
 import { orProblems, useDraft } from '../use-draft.ts';
@@ -44,7 +44,7 @@ const upTo = (most: number) =>
   Array.from({ length: most + 1 }, (_, count) => ({ value: String(count), label: String(count) }));
 
 const NestOfGown = ({ gown }: { gown: Gown }) => {
-  const [unit, setUnit] = useState<Unit>(gown.content.typed.unit);
+  const [unit, setUnit] = useUnit(gown.content.typed.unit);
   const [rules, setRules] = useState(keptGradeRules);
   const [smaller, setSmaller] = useState(2);
   const [larger, setLarger] = useState(3);
@@ -123,6 +123,7 @@ const NestOfGown = ({ gown }: { gown: Gown }) => {
             value={choice}
             onChoose={setChoice}
           />
+          <p className="text-sm text-slate">{depthHints[choice]}</p>
         </div>
       </div>
       {tried && 'problems' in tried && (

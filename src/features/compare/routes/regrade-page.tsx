@@ -13,16 +13,17 @@ import { regradeTo } from '#shared/regrade/what-moved.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { failureWords } from '../../../lib/failure-words.ts';
+import { useUnit } from '../../../lib/use-unit.ts';
 import { Notice } from '../../../ui/notice.tsx';
 import { Segmented } from '../../../ui/segmented.tsx';
 import { Select } from '../../../ui/select.tsx';
+import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { KeepRegrade } from '../components/keep-regrade.tsx';
 import { OverlayBench } from '../components/overlay-bench.tsx';
 import { Labelled } from '../components/overlay-tools.tsx';
 import { ProblemList } from '../components/problem-list.tsx';
-import { UnitChoice } from '../components/unit-choice.tsx';
 import { WhatMoved } from '../components/what-moved.tsx';
-import { depthChoices, depthsFor, type DepthChoice } from '../depth-choices.ts';
+import { depthChoices, depthHints, depthsFor, type DepthChoice } from '../depth-choices.ts';
 import { cardQuery, cardsQuery, gownQuery, type ListedCard } from '../queries.ts';
 import { orProblems, useDraft } from '../use-draft.ts';
 
@@ -56,7 +57,7 @@ export const RegradePage = () => {
 
 const RegradeBench = ({ gown, cards }: { gown: Gown; cards: readonly ListedCard[] }) => {
   const [address, setAddress] = useSearchParams();
-  const [unit, setUnit] = useState<Unit>(gown.content.typed.unit);
+  const [unit, setUnit] = useUnit(gown.content.typed.unit);
   const [choice, setChoice] = useState<DepthChoice>('fixed');
   const hers = cards.filter(({ person }) => person.id === gown.personId);
   const order = [...hers, ...cards.filter((card) => !hers.includes(card))].filter(isWhole);
@@ -125,6 +126,7 @@ const RegradeBench = ({ gown, cards }: { gown: Gown; cards: readonly ListedCard[
               value={choice}
               onChoose={setChoice}
             />
+            <p className="text-sm text-slate">{depthHints[choice]}</p>
           </div>
         </div>
       )}
