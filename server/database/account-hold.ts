@@ -3,7 +3,11 @@ import type { Store } from './client.ts';
 import { accounts } from './schema/accounts.ts';
 import { sessions } from './schema/sessions.ts';
 
-/** Holds an account until the transaction ends, so that what is counted under it is counted in turn. */
+/**
+ * Holds an account until the transaction ends, so that what is counted under it is counted in turn.
+ * It is the one order of all locks: whatever writes to more than one gown, measure card or person holds
+ * the account before it touches any of them, so two requests of one maker never wait for each other.
+ */
 export async function holdAccount(store: Store, id: string): Promise<void> {
   await store
     .select({ id: accounts.id })

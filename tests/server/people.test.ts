@@ -1,6 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { createGown, duplicateGown, listGowns, noteCard, readGown } from '#shared/api/gowns.ts';
+import {
+  createGown,
+  duplicateGown,
+  listGowns,
+  noteCard,
+  readGown,
+  regradeGown,
+} from '#shared/api/gowns.ts';
 import {
   createMeasureCard,
   giveMeasureCard,
@@ -17,6 +24,8 @@ import {
   readPerson,
   renamePerson,
 } from '#shared/api/people.ts';
+import { nameRevision } from '#shared/api/revisions.ts';
+import { engineVersion } from '#shared/engine/draft-gown.ts';
 import { mostKept } from '#server/http/most-kept.ts';
 import { type Browser, content, openBrowser, openMaker } from './support/maker.ts';
 import { ask } from './support/question.ts';
@@ -195,6 +204,49 @@ describe('a measure card', () => {
     await maker.call(giveMeasureCard, person, card);
     expect((await readCard(card)).person.name).toBe('Runa Falk-Berg');
     expect((await maker.call(readGown, undefined, gown)).personId).toBe(person.personId);
+  });
+});
+
+describe('many requests at once for one card', () => {
+  it('take turns: laid, given, regraded and deleted together, none of them fails', async () => {
+    const [one, other] = [await newPerson('Wiebke Sand'), await newPerson('Wiebke Sander')];
+    const card = await newCard(one);
+    const made = { saveId: randomUUID(), title: 'Hers', content: content(), ...card };
+    const { id: gownId } = await maker.call(createGown, made);
+    const regrade = () => ({
+      saveId: randomUUID(),
+      baseVersion: 1,
+      engine: engineVersion,
+      depths: {},
+      ...card,
+    });
+    const everything = { cards: [card.cardId], gowns: [gownId] };
+    const asks = [
+      () => maker.send(noteCard, card, { gownId }),
+      () => maker.send(giveMeasureCard, one, card),
+      () =>
+        maker.send(
+          nameRevision,
+          { saveId: randomUUID(), baseVersion: 1, name: 'So far' },
+          { gownId },
+        ),
+      () => maker.send(giveMeasureCard, other, card),
+      () => maker.send(regradeGown, regrade(), { gownId }),
+      () => maker.send(deletePerson, { cards: [], gowns: [] }, other),
+    ];
+    const told = await Promise.all(
+      Array.from({ length: 10 }, () => asks.map((ask) => ask())).flat(),
+    );
+    const last = await Promise.all(
+      [one, other].flatMap((person) => [
+        maker.send(giveMeasureCard, one, card),
+        maker.send(deletePerson, everything, person),
+        maker.send(noteCard, card, { gownId }),
+      ]),
+    );
+    const statuses = [...told, ...last].map(({ status }) => status);
+    expect(statuses.filter((status) => ![200, 404, 409].includes(status))).toEqual([]);
+    expect(statuses).toContain(200);
   });
 });
 

@@ -9,6 +9,7 @@ import { engineVersion } from '#shared/engine/draft-gown.ts';
 import { dayInWords } from '#shared/exports/day.ts';
 import { error } from '#shared/units/problem.ts';
 import { said } from '#shared/units/said.ts';
+import { holdAccount } from '../../database/account-hold.ts';
 import type { Drawing } from '../../drafting/drawing.ts';
 import { notFound } from '../../http/conflict.ts';
 import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
@@ -38,6 +39,7 @@ export async function noteCard(
   { cardId }: Received<typeof noting>,
 ): Promise<Record<string, never>> {
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     const row = await holdGown(turn, accountId, gownId);
     if (row === undefined) throw notFound('gown');
     const card = await laidCard(turn, accountId, cardId);

@@ -5,6 +5,7 @@ import type {
   readRevision as reading,
   returnToRevision as returning,
 } from '#shared/api/revisions.ts';
+import { holdAccount } from '../../database/account-hold.ts';
 import type { Database } from '../../database/client.ts';
 import { acknowledge, acknowledgedSave } from '../../database/saves.ts';
 import { notFound, sameSave } from '../../http/conflict.ts';
@@ -70,6 +71,7 @@ export async function nameRevision(
 ): Promise<Listed> {
   const { accountId } = maker;
   return savedOrConflict(workroom, maker, async (turn) => {
+    await holdAccount(turn, accountId);
     const row = await holdGown(turn, accountId, gownId);
     if (row === undefined) throw notFound('gown');
     const before = await acknowledgedSave(turn, accountId, saveId);

@@ -23,7 +23,7 @@ import { doneTo } from '../../http/conflict.ts';
 import { type Own, serveOwn } from '../../http/serve-own.ts';
 import { listedGown } from './gown-view.ts';
 import * as regrading from './regrading.ts';
-import { deleteGownRow, listGownRows, setGownArchived, setGownTitle } from './repository.ts';
+import { listGownRows, setGownArchived, setGownTitle } from './repository.ts';
 import * as revisions from './revisions.ts';
 import * as service from './service.ts';
 
@@ -63,8 +63,8 @@ export function gownsRouter(own: Own): Router {
     doneTo('gown', await setGownArchived(database, caller.accountId, params.gownId, null)),
   );
 
-  serveOwn(router, sessions, deleteGown, async (_body, { caller, params }) =>
-    doneTo('gown', await deleteGownRow(database, caller.accountId, params.gownId)),
+  serveOwn(router, sessions, deleteGown, (_body, { caller, params }) =>
+    service.deleteGown(own, caller, params.gownId),
   );
 
   serveOwn(router, sessions, listRevisions, async (_body, { caller, params }) => ({

@@ -12,7 +12,7 @@ import { holdAccount } from '../../database/account-hold.ts';
 import type { Store } from '../../database/client.ts';
 import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
-import { notFound, sameSave } from '../../http/conflict.ts';
+import { doneTo, notFound, sameSave } from '../../http/conflict.ts';
 import type { Drawing } from '../../drafting/drawing.ts';
 import { RefusalError } from '../../http/refusal.ts';
 import { lastingTurn } from '../../http/turn-of.ts';
@@ -21,6 +21,7 @@ import { contentOf, gownView } from './gown-view.ts';
 import { keepAsRevision, keepForGood } from './keep-as-revision.ts';
 import {
   countGowns,
+  deleteGownRow,
   findGown,
   findLaidCard,
   type GownRow,
@@ -97,10 +98,10 @@ async function putGown(
   const now = new Date();
   const save = { accountId, saveId, record: randomUUID(), version: 1, savedAt: now };
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     if (!(await acknowledge(turn, save))) {
       return (await putBefore(turn, maker, saveId)) ?? savedAs(sameSave(save, undefined, 1));
     }
-    await holdAccount(turn, accountId);
     refuseOneTooMany('gowns', await countGowns(turn, accountId), mostKept.gowns);
     const card = parts.cardId ? await laidCard(turn, accountId, parts.cardId) : undefined;
     await insertGown(turn, {
@@ -192,6 +193,7 @@ export async function changeGown(
 ): Promise<Saved> {
   const { accountId } = maker;
   return savedOrConflict(workroom, maker, async (turn) => {
+    await holdAccount(turn, accountId);
     const row = await holdGown(turn, accountId, id);
     if (row === undefined) throw notFound('gown');
     const before = await savedBefore(turn, row, save);
@@ -213,6 +215,17 @@ export async function changeGown(
     return savedAs(acknowledged);
   });
 }
+
+/** Deletes a gown with all that is kept of it. */
+export const deleteGown = (
+  { database }: Workroom,
+  { accountId }: Maker,
+  id: string,
+): Promise<Record<string, never>> =>
+  database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
+    return doneTo('gown', await deleteGownRow(turn, accountId, id));
+  });
 
 function refuseOtherEngine(engine: string, row: GownRow): void {
   if (engine === engineVersion || engine === row.engine) return;

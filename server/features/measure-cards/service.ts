@@ -95,12 +95,12 @@ export async function createCard(
   const now = new Date();
   const save = { accountId, saveId, record: randomUUID(), version: 1, savedAt: now };
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     if (!(await acknowledge(turn, save))) {
       const before = await acknowledgedSave(turn, accountId, saveId);
       const card = before && (await findCard(turn, accountId, before.record));
       return savedAs(sameSave(before ?? save, card?.id, 1));
     }
-    await holdAccount(turn, accountId);
     refuseOneTooMany('measure cards', await countCards(turn, accountId), mostKept.measureCards);
     await insertCard(turn, {
       id: save.record,
@@ -152,6 +152,7 @@ export async function giveCard(
   { personId }: Received<typeof giving>,
 ): Promise<Record<string, never>> {
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     const row = await holdCard(turn, accountId, id);
     if (row === undefined) throw notFound('measure card');
     if (!(await isPerson(turn, accountId, personId))) throw notFound('person');
@@ -184,6 +185,7 @@ export async function deleteCard(
   id: string,
 ): Promise<Record<string, never>> {
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     const row = await holdCard(turn, accountId, id);
     if (row === undefined) throw notFound('measure card');
     await refuseUsed(turn, accountId, id, 'so it stays. Archive it to have it out of the way.');
@@ -218,6 +220,7 @@ export async function saveCard(
 ): Promise<Saved> {
   const { accountId } = caller;
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     const row = await holdCard(turn, accountId, id);
     if (row === undefined) throw notFound('measure card');
     const before = await acknowledgedSave(turn, accountId, saveId);

@@ -56,12 +56,12 @@ export async function createPerson(
   const savedAt = new Date();
   const save = { accountId, saveId, record: randomUUID(), version: 1, savedAt };
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     if (!(await acknowledge(turn, save))) {
       const before = await acknowledgedSave(turn, accountId, saveId);
       const person = before && (await findPerson(turn, accountId, before.record));
       return savedAs(sameSave(before ?? save, person?.id, 1));
     }
-    await holdAccount(turn, accountId);
     refuseOneTooMany('people', await countPeople(turn, accountId), mostKept.people);
     await insertPerson(turn, { id: save.record, accountId, name, createdAt: savedAt });
     return savedAs(save);
@@ -79,6 +79,7 @@ export async function deletePerson(
   named: Received<typeof deletion>,
 ): Promise<Record<string, never>> {
   return database.transaction(async (turn) => {
+    await holdAccount(turn, accountId);
     const row = await holdPerson(turn, accountId, id);
     if (row === undefined) throw notFound('person');
     const current = await view(turn, row);
