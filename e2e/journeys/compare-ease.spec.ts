@@ -28,6 +28,14 @@ for (const { name, width, height } of screens) {
     await expect(girths.getByRole('row', { name: /^Bust/ })).toHaveCount(0);
     await page.getByLabel('Also what is the same in both').check();
     await expect(girths.getByRole('row', { name: /^Bust/ })).toContainText('0');
+    // 100 cm are 39.37 in; read as a tape has it, and remembered at the next place.
+    await page.getByRole('radio', { name: 'inch' }).check();
+    await expect(girths.getByRole('row', { name: /^Hip/ })).toContainText(/39\s3⁄8/);
+    await page.reload();
+    await expect(page.getByRole('radio', { name: 'inch' })).toBeChecked();
+    await page.getByRole('radio', { name: 'cm' }).check();
+    await page.reload();
+    await expect(page.getByRole('radio', { name: 'cm' })).toBeChecked();
 
     await page.getByLabel('Laid together on').selectOption('Side at the hip');
     await page.getByLabel('Laid together on').selectOption('Seam: side');

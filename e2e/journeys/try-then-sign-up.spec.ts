@@ -14,6 +14,7 @@ for (const width of [390, 1280]) {
       drawnTable,
     }) => {
       await expect(drawnTable.drawing).toBeVisible();
+      await page.getByRole('radio', { name: 'inch' }).check();
       await page.getByRole('link', { name: 'Keep it' }).click();
       const email = `${randomUUID()}@example.org`;
       await page.getByLabel('E-mail').fill(email);
@@ -30,6 +31,7 @@ for (const width of [390, 1280]) {
       await expect(page.getByRole('listitem')).toHaveCount(1);
       await page.goto('/try');
       await expect(drawnTable.start.or(drawnTable.drawing)).toBeVisible();
+      await expect(page.getByRole('radio', { name: 'inch' })).toBeChecked();
     });
 
     test('signing in says the same of a wrong password and of an account that is not there', async ({

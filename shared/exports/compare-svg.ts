@@ -4,8 +4,8 @@ import { seamOutline } from '../compare/moved-piece.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
 import { reverse } from '../geometry/curve.ts';
 import { type Region, hatch } from '../geometry/region.ts';
-import { formatFine } from '../units/format-length.ts';
 import type { Unit } from '../units/said.ts';
+import { formatFigure } from './figure-words.ts';
 import { levelTitles } from './level-titles.ts';
 import { layStacks } from './overlaid.ts';
 import { pathData } from './path-data.ts';
@@ -71,7 +71,7 @@ function shading({ between }: PiecePair): string {
 
 /** A level's widths in both drafts, as they are written on it. */
 export const levelWords = ({ level, first, second }: LevelFigure, unit: Unit): string =>
-  `${levelTitles[level]} ${formatFine(first, unit)} \u2192 ${formatFine(second, unit)} ${unit}`;
+  `${levelTitles[level]} ${formatFigure('quarter', first, unit)} \u2192 ${formatFigure('quarter', second, unit)} ${unit}`;
 
 const levelText = (each: LevelFigure, unit: Unit): string =>
   element(

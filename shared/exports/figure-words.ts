@@ -2,6 +2,7 @@ import type { FigureRow } from '../compare/figures.ts';
 import type { FinishedPiece } from '../drafting/piece.ts';
 import { formatFine } from '../units/format-length.ts';
 import type { Unit } from '../units/said.ts';
+import { readInches } from '../units/speak.ts';
 import { levelTitles } from './level-titles.ts';
 
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
@@ -41,9 +42,11 @@ export const formatArea = (squareMm: number, unit: Unit): string =>
     ? `${Math.round(squareMm / 100)} cm\u00b2`
     : `${(squareMm / squareInch).toFixed(1)} sq in`;
 
-/** A figure in the reader's unit, to a tenth of a millimetre for lengths. */
-export const formatFigure = (kind: FigureRow['kind'], value: number, unit: Unit): string =>
-  kind === 'area' ? formatArea(value, unit) : formatFine(value, unit);
+/** A figure in the reader's unit: a length to a tenth of a millimetre, or as a tape in inches reads. */
+export function formatFigure(kind: FigureRow['kind'], value: number, unit: Unit): string {
+  if (kind === 'area') return formatArea(value, unit);
+  return unit === 'in' ? readInches(value) : formatFine(value, unit);
+}
 
 /** A difference with its sign; nothing where it would read as nought. */
 export function formatChange(kind: FigureRow['kind'], change: number, unit: Unit): string {

@@ -4,9 +4,9 @@ import { reverse } from '../geometry/curve.ts';
 import type { NestReport } from '../regrade/nest-report.ts';
 import { type Nest, sizeLabel } from '../regrade/nest.ts';
 import { papers } from '../sheets/papers.ts';
-import { formatFine } from '../units/format-length.ts';
 import type { Unit } from '../units/said.ts';
 import type { Mark, PrintJob } from './drawing.ts';
+import { formatFigure } from './figure-words.ts';
 import { type KeyTable, keyPage, tablePages } from './key-page.ts';
 import { levelTitles } from './level-titles.ts';
 import { outline, strokes, words } from './marks.ts';
@@ -32,7 +32,7 @@ function reportTables(report: NestReport, nest: Nest, unit: Unit): readonly KeyT
         inWords(levelTitles[level]),
         ...nest.sizes.map(({ step }) => {
           const found = girths.find((each) => each.step === step);
-          return found === undefined ? '\u2013' : formatFine(found.girth, unit);
+          return found === undefined ? '\u2013' : formatFigure('girth', found.girth, unit);
         }),
       ]),
     },
@@ -42,7 +42,7 @@ function reportTables(report: NestReport, nest: Nest, unit: Unit): readonly KeyT
       rows: report.off.map(({ piece, title, step, off }) => [
         `${titles.get(piece) ?? piece}, ${title}`,
         sizeLabel(step),
-        formatFine(off, unit),
+        formatFigure('seam', off, unit),
       ]),
     },
   ];

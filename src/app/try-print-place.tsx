@@ -1,13 +1,12 @@
 import { useState } from 'react';
 
-import { keptTable } from '../features/drafting-table/saved-table.ts';
+import { readersTable } from '../features/drafting-table/saved-table.ts';
 import { PrintRoomPage } from '../features/print-room/routes/print-room-page.tsx';
-import { measuresInInches } from '../lib/reader.ts';
 import { paths } from './paths.ts';
 
 /** The print room for what lies on the table at Try it. */
 export const TryPrintPlace = () => {
-  const [table] = useState(() => keptTable(measuresInInches() ? 'in' : 'cm'));
+  const [table] = useState(readersTable);
   const { drawn, name, unit } = table;
   return (
     <PrintRoomPage

@@ -2,12 +2,13 @@ import { balanced, quarterRule } from '#shared/drafting/house-rule-presets.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { browserStorage } from '../../lib/browser-storage.ts';
+import { readersUnit, rememberedUnit } from '../../lib/reader.ts';
 import { fieldKeys, readEntry, writeValue, type Entries, type FieldKey } from './fields.ts';
 import { keptHistory, noHistory, type History } from './history.ts';
 import { isRecord } from './is-record.ts';
 import { readOverruled, readRules } from './parts.ts';
 import { choicesFrom, tableChoiceKeys } from './style-choices.ts';
-import { emptyTable, redrawn, type TableState } from './table-state.ts';
+import { emptyTable, redrawn, tableState, type TableState } from './table-state.ts';
 
 const key = 'ellwand.table';
 const historyKey = 'ellwand.table.history';
@@ -28,6 +29,13 @@ export function keptTable(
   } catch {
     return empty;
   }
+}
+
+/** The table as this browser kept it, read in the unit that was last chosen at any place. */
+export function readersTable(): TableState {
+  const table = keptTable(readersUnit());
+  const unit = rememberedUnit() ?? table.unit;
+  return unit === table.unit ? table : tableState(table, { type: 'unit', unit });
 }
 
 /** Keeps the table in this browser; false where the browser does not allow it. */

@@ -10,8 +10,14 @@ import {
 import type { Unit } from '#shared/units/said.ts';
 
 import { browserStorage } from '../../lib/browser-storage.ts';
-import { printsOnLetter } from '../../lib/reader.ts';
-import { paperFields, plainChoices, type PaperField, type RoomChoices } from './room-choices.ts';
+import { printsOnLetter, rememberedUnit } from '../../lib/reader.ts';
+import {
+  inUnit,
+  paperFields,
+  plainChoices,
+  type PaperField,
+  type RoomChoices,
+} from './room-choices.ts';
 import { readLength, writtenLength, type TypedLength } from './typed-length.ts';
 
 /** What a maker's printer and habits ask for, whatever is printed; kept for good. */
@@ -49,11 +55,14 @@ type Keeping = {
   readonly place: string;
 };
 
-/** What this browser kept of a maker's choices; else the plain ones, in the unit of the table. */
+/** What this browser kept of a maker's choices; else the plain ones. Read in the unit last chosen, else the table's. */
 export function keptChoices({ maker, place }: Keeping, unit: Unit): RoomChoices {
   const kept = read('local', habitsKey(maker), habits);
   const own = read('session', draftKey(place), forDraft);
-  const plain = plainChoices(kept?.unit ?? unit, printsOnLetter() ? 'Letter' : 'A4');
+  const plain = plainChoices(
+    rememberedUnit() ?? kept?.unit ?? unit,
+    printsOnLetter() ? 'Letter' : 'A4',
+  );
   const settled =
     kept === undefined
       ? plain
@@ -63,10 +72,13 @@ export function keptChoices({ maker, place }: Keeping, unit: Unit): RoomChoices 
           orientation: kept.orientation,
           glueMarks: kept.glueMarks,
           inkSaving: kept.inkSaving,
-          lengths: {
-            ...plain.lengths,
-            ...fromFields((field) => lengthOf(kept.typed[field], kept.unit)),
-          },
+          lengths: inUnit(
+            {
+              ...plain.lengths,
+              ...fromFields((field) => lengthOf(kept.typed[field], kept.unit)),
+            },
+            plain.unit,
+          ),
         };
   if (own === undefined) return settled;
   const { lines, scale, pieces, leftOut } = own;

@@ -136,7 +136,8 @@ const withLength = (room: RoomChoices, field: LengthField, typed: TypedLength): 
   lengths: { ...room.lengths, [field]: typed },
 });
 
-const inUnit = (lengths: RoomChoices['lengths'], unit: Unit): RoomChoices['lengths'] => ({
+/** The lengths typed, for a reader of this unit. */
+export const inUnit = (lengths: RoomChoices['lengths'], unit: Unit): RoomChoices['lengths'] => ({
   margin: rewrittenLength(lengths.margin, unit),
   overlap: rewrittenLength(lengths.overlap, unit),
   width: rewrittenLength(lengths.width, unit),

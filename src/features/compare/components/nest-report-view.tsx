@@ -1,8 +1,9 @@
+import { formatFigure } from '#shared/exports/figure-words.ts';
 import { levelTitles } from '#shared/exports/level-titles.ts';
 import type { NestReport } from '#shared/regrade/nest-report.ts';
 import { type Nest, sizeLabel } from '#shared/regrade/nest.ts';
 import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
-import { formatFine, formatWithUnit } from '#shared/units/format-length.ts';
+import { formatWithUnit } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 
@@ -68,7 +69,7 @@ export const NestReportView = (props: NestReportProps) => {
                   const found = girths.find((each) => each.step === step);
                   return (
                     <td key={step} className="px-2 py-1 text-right whitespace-nowrap">
-                      {found === undefined ? 'none' : formatFine(found.girth, unit)}
+                      {found === undefined ? 'none' : formatFigure('girth', found.girth, unit)}
                     </td>
                   );
                 })}
@@ -87,7 +88,7 @@ export const NestReportView = (props: NestReportProps) => {
           <ul className="figures">
             {report.off.map(({ piece, title, step, off }) => (
               <li key={`${piece} ${title} ${step}`}>
-                {`${titles.get(piece) ?? piece}, ${title}, size ${sizeLabel(step)}: ${formatFine(off, unit)} ${unit}`}
+                {`${titles.get(piece) ?? piece}, ${title}, size ${sizeLabel(step)}: ${formatFigure('seam', off, unit)} ${unit}`}
               </li>
             ))}
           </ul>

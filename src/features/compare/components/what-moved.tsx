@@ -7,7 +7,7 @@ import {
 } from '#shared/exports/figure-words.ts';
 import { styleLabels } from '#shared/drafts/gown/style-labels.ts';
 import type { Cause, MovedFigure, MovedPoint, Regrade } from '#shared/regrade/what-moved.ts';
-import { formatAngle, formatFine, formatWithUnit } from '#shared/units/format-length.ts';
+import { formatAngle, formatWithUnit } from '#shared/units/format-length.ts';
 import type { Unit } from '#shared/units/said.ts';
 import { speak } from '#shared/units/speak.ts';
 
@@ -44,7 +44,7 @@ const pointBecause = ({ by }: MovedPoint, unit: Unit): string =>
     : by
         .map(
           ({ measure, change }) =>
-            `${small(measureGuide[measure].label)} ${formatFine(change, unit)}`,
+            `${small(measureGuide[measure].label)} ${formatChange('seam', change, unit)}`,
         )
         .join(', ');
 

@@ -2,16 +2,15 @@ import { useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 
 import { type Garment, garments } from '#shared/engine/drafted.ts';
-import type { Unit } from '#shared/units/said.ts';
 
 import { failureWords } from '../../../lib/failure-words.ts';
-import { measuresInInches } from '../../../lib/reader.ts';
+import { readersUnit } from '../../../lib/reader.ts';
 import { Notice } from '../../../ui/notice.tsx';
 import { Select } from '../../../ui/select.tsx';
+import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { OverlayBench } from '../components/overlay-bench.tsx';
 import { Labelled } from '../components/overlay-tools.tsx';
 import { ProblemList } from '../components/problem-list.tsx';
-import { UnitChoice } from '../components/unit-choice.tsx';
 import { asGarment, otherwiseFor } from '../otherwise.ts';
 import { type Found, useChoices, useRevisions, useSource } from '../sources.ts';
 import { useDraft } from '../use-draft.ts';
@@ -37,7 +36,7 @@ const FailedSource = ({ found, which }: { found: Found; which: string }) =>
 /** Any two drafts over each other. */
 export const ComparePage = () => {
   const [address, setAddress] = useSearchParams();
-  const [unit, setUnit] = useState<Unit>(measuresInInches() ? 'in' : 'cm');
+  const [unit, setUnit] = useState(readersUnit);
   const choices = useChoices();
   const firstKey = address.get('first') ?? choices[0]?.value;
   const secondKey = address.get('second') ?? `${same}no-ease`;

@@ -8,7 +8,7 @@ import { Button } from '../../../ui/button.tsx';
 import { Dialog } from '../../../ui/dialog.tsx';
 import { FullSheet } from '../../../ui/full-sheet.tsx';
 import { Notice } from '../../../ui/notice.tsx';
-import { Segmented } from '../../../ui/segmented.tsx';
+import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { bench } from '../bench.ts';
 import { cardChoices, cardContentOf, sameCard } from '../card-content.ts';
 import { readCurrentCard, sendCard } from '../card-queries.ts';
@@ -70,15 +70,7 @@ export const CardTable = ({ cardId, card, place, signIn }: CardTableProps) => {
         )}
         <span className="ml-auto flex items-center gap-3">
           <UndoButtons history={history} dispatch={dispatch} />
-          <Segmented
-            legend="Unit"
-            choices={[
-              { value: 'in', label: 'inch' },
-              { value: 'cm', label: 'cm' },
-            ]}
-            value={unit}
-            onChoose={(to) => dispatch({ type: 'unit', unit: to })}
-          />
+          <UnitChoice unit={unit} onUnit={(to) => dispatch({ type: 'unit', unit: to })} />
         </span>
       </header>
       {standing === 'refused' && <Notice>{`${message ?? ''} What you typed is kept here.`}</Notice>}

@@ -2,8 +2,8 @@ import type { Dispatch, ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 
 import { Button } from '../../../ui/button.tsx';
-import { Segmented } from '../../../ui/segmented.tsx';
 import { ThemeToggle } from '../../../ui/theme-toggle.tsx';
+import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { Wordmark } from '../../../ui/wordmark.tsx';
 import type { Bench, BenchAction } from '../bench.ts';
 import { UndoButtons } from './undo-buttons.tsx';
@@ -37,15 +37,7 @@ export const TableHeader = (props: TableHeaderProps) => {
         <ThemeToggle />
       </span>
       <span className="order-2 lg:order-4">
-        <Segmented
-          legend="Unit"
-          choices={[
-            { value: 'in', label: 'inch' },
-            { value: 'cm', label: 'cm' },
-          ]}
-          value={bench.table.unit}
-          onChoose={(unit) => dispatch({ type: 'unit', unit })}
-        />
+        <UnitChoice unit={bench.table.unit} onUnit={(unit) => dispatch({ type: 'unit', unit })} />
       </span>
       <Button kind="primary" className="order-2 lg:order-4" disabled={!drawn} onClick={onPrint}>
         Print

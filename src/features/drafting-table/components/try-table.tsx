@@ -7,7 +7,6 @@ import { garmentTitles } from '#shared/exports/garment-titles.ts';
 
 import { call } from '../../../lib/call.ts';
 import { newId } from '../../../lib/new-id.ts';
-import { measuresInInches } from '../../../lib/reader.ts';
 import { signedInHint } from '../../../lib/signed-in-hint.ts';
 import { Button } from '../../../ui/button.tsx';
 import { bench } from '../bench.ts';
@@ -15,8 +14,8 @@ import {
   clearKeptTable,
   keepTable,
   keepTableHistory,
-  keptTable,
   keptTableHistory,
+  readersTable,
 } from '../saved-table.ts';
 import { triedGown } from '../tried-gown.ts';
 import { useKeeping } from '../use-keeping.ts';
@@ -26,7 +25,7 @@ import { DraftingTable } from './drafting-table.tsx';
 /** The drafting table without an account: kept in this browser alone until somebody takes it along. */
 export const TryTable = () => {
   const [state, dispatch] = useReducer(bench, undefined, () => {
-    const table = keptTable(measuresInInches() ? 'in' : 'cm');
+    const table = readersTable();
     return { table, history: keptTableHistory(table) };
   });
   const [kept, setKept] = useState(true);

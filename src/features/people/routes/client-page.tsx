@@ -8,6 +8,7 @@ import { dayInWords } from '#shared/exports/day.ts';
 import { failureWords } from '../../../lib/failure-words.ts';
 import { momentWords } from '../../../lib/moment-words.ts';
 import { newId } from '../../../lib/new-id.ts';
+import { readersUnit } from '../../../lib/reader.ts';
 import { Button } from '../../../ui/button.tsx';
 import { Notice } from '../../../ui/notice.tsx';
 import { CardRow, DayField, today } from '../components/card-row.tsx';
@@ -101,7 +102,7 @@ const NewCard = ({ person }: { person: Person }) => {
         name: `Card of ${dayInWords(day)}`,
         personId: person.id,
         content: {
-          typed: { unit: 'cm', fields: { 'card.name': person.name } },
+          typed: { unit: readersUnit(), fields: { 'card.name': person.name } },
           card: { name: person.name, date: day },
         },
       }),

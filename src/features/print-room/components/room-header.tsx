@@ -1,8 +1,8 @@
 import type { Dispatch } from 'react';
 import { Link } from 'react-router-dom';
 
-import { Segmented } from '../../../ui/segmented.tsx';
 import { ThemeToggle } from '../../../ui/theme-toggle.tsx';
+import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { Wordmark } from '../../../ui/wordmark.tsx';
 import type { RoomAction } from '../room-choices.ts';
 import type { Unit } from '#shared/units/said.ts';
@@ -32,15 +32,7 @@ export const RoomHeader = ({ title, table, unit, dispatch }: RoomHeaderProps) =>
     <span className="order-3 hidden basis-full max-sm:block" />
     <span className="ml-auto flex items-center gap-2">
       <ThemeToggle className="max-sm:hidden" />
-      <Segmented
-        legend="Unit"
-        choices={[
-          { value: 'in', label: 'inch' },
-          { value: 'cm', label: 'cm' },
-        ]}
-        value={unit}
-        onChoose={(chosen) => dispatch({ type: 'unit', unit: chosen })}
-      />
+      <UnitChoice unit={unit} onUnit={(chosen) => dispatch({ type: 'unit', unit: chosen })} />
     </span>
   </header>
 );

@@ -8,8 +8,8 @@ import type { Unit } from '#shared/units/said.ts';
 import { useMedia } from '../../../lib/use-media.ts';
 import { Button } from '../../../ui/button.tsx';
 import { Dialog } from '../../../ui/dialog.tsx';
-import { Segmented } from '../../../ui/segmented.tsx';
 import { ThemeToggle } from '../../../ui/theme-toggle.tsx';
+import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { Wordmark } from '../../../ui/wordmark.tsx';
 import { useStepKeys } from '../use-step-keys.ts';
 import type { Steps } from '../use-steps.ts';
@@ -154,15 +154,7 @@ export const Replay = (props: ReplayProps) => {
             Projector view
           </Button>
         </div>
-        <Segmented
-          legend="Unit"
-          choices={[
-            { value: 'in', label: 'inch' },
-            { value: 'cm', label: 'cm' },
-          ]}
-          value={unit}
-          onChoose={onUnit}
-        />
+        <UnitChoice unit={unit} onUnit={onUnit} />
         <span className="hidden sm:block">
           <ThemeToggle />
         </span>

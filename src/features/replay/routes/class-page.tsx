@@ -10,6 +10,7 @@ import { placeOf } from '#shared/lesson/same-step.ts';
 
 import { failureWords } from '../../../lib/failure-words.ts';
 import { queryClient } from '../../../lib/query-client.ts';
+import { useUnit } from '../../../lib/use-unit.ts';
 import { Button } from '../../../ui/button.tsx';
 import { Notice } from '../../../ui/notice.tsx';
 import { ReplayedDraft } from '../components/replayed-draft.tsx';
@@ -75,7 +76,7 @@ type AttendedProps = ClassPageProps & {
 
 const Attended = ({ token, visit, onTable }: AttendedProps) => {
   const draft = useMemo(() => draftAny(visit.inputs), [visit.inputs]);
-  const [unit, setUnit] = useState(visit.unit);
+  const [unit, setUnit] = useUnit(visit.unit);
   const [following, setFollowing] = useState(true);
   const steps = useSteps(draft.steps);
   const tutor = useQuery(tutorsStepQuery(token, true));

@@ -5,6 +5,7 @@ import type { Drafted } from '#shared/engine/drafted.ts';
 import { garmentTitles } from '#shared/exports/garment-titles.ts';
 import type { Unit } from '#shared/units/said.ts';
 
+import { useUnit } from '../../../lib/use-unit.ts';
 import { Button } from '../../../ui/button.tsx';
 import { NothingDrawn } from '../components/nothing-drawn.tsx';
 import { ReplayedDraft } from '../components/replayed-draft.tsx';
@@ -33,7 +34,7 @@ export const GownReplayPage = ({ draft, ...rest }: GownReplayPageProps) =>
 type ToldProps = GownReplayPageProps & { readonly draft: Drafted };
 
 const Told = ({ gownId, draft, fresh, title, unit: first }: ToldProps) => {
-  const [unit, setUnit] = useState(first);
+  const [unit, setUnit] = useUnit(first);
   const [sharing, setSharing] = useState(false);
   const steps = useSteps(draft.steps);
   const step = draft.steps[steps.place]?.id ?? '';

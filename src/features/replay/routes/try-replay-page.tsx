@@ -1,10 +1,10 @@
 import { QueryClientProvider } from '@tanstack/react-query';
-import { useState } from 'react';
 
 import type { Drafted } from '#shared/engine/drafted.ts';
 import type { Unit } from '#shared/units/said.ts';
 
 import { queryClient } from '../../../lib/query-client.ts';
+import { useUnit } from '../../../lib/use-unit.ts';
 import { ReplayedDraft } from '../components/replayed-draft.tsx';
 import { NothingDrawn } from '../components/nothing-drawn.tsx';
 import { useSteps } from '../use-steps.ts';
@@ -29,7 +29,7 @@ export const TryReplayPage = ({ draft, unit }: TryReplayPageProps) =>
   );
 
 const Told = ({ draft, unit: first }: { readonly draft: Drafted; readonly unit: Unit }) => {
-  const [unit, setUnit] = useState(first);
+  const [unit, setUnit] = useUnit(first);
   const steps = useSteps(draft.steps);
   return (
     <ReplayedDraft

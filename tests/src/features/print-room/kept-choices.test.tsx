@@ -2,6 +2,7 @@ import { beforeEach, expect, test } from 'vitest';
 
 import { keepChoices, keptChoices } from '../../../../src/features/print-room/kept-choices.ts';
 import { plainChoices, roomChoices } from '../../../../src/features/print-room/room-choices.ts';
+import { rememberUnit } from '../../../../src/lib/reader.ts';
 
 const at = { maker: 'A', place: '/try' };
 const chosen = [
@@ -42,4 +43,12 @@ test('what somebody else wrote into the browser is not trusted', () => {
   localStorage.setItem('ellwand.print-room.A', '{"version":1,"paper":"A9"}');
   sessionStorage.setItem('ellwand.print-room.draft./try', 'nonsense');
   expect(keptChoices(at, 'cm')).toEqual(plainChoices('cm', 'Letter'));
+});
+
+test('a unit chosen at another place since is the unit of the print room', () => {
+  keepChoices(at, room);
+  rememberUnit('cm');
+  const next = keptChoices(at, 'in');
+  expect(next.unit).toBe('cm');
+  expect(next.lengths.margin).toEqual({ text: '1.3', read: { mm: 12.7 } });
 });

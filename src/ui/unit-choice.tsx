@@ -1,8 +1,9 @@
 import type { Unit } from '#shared/units/said.ts';
 
-import { Segmented } from '../../../ui/segmented.tsx';
+import { rememberUnit } from '../lib/reader.ts';
+import { Segmented } from './segmented.tsx';
 
-/** Centimetres or inches. */
+/** Centimetres or inches; what is chosen in one place is remembered in all. */
 export const UnitChoice = ({ unit, onUnit }: { unit: Unit; onUnit: (unit: Unit) => void }) => (
   <Segmented
     legend="Unit"
@@ -11,6 +12,9 @@ export const UnitChoice = ({ unit, onUnit }: { unit: Unit; onUnit: (unit: Unit) 
       { value: 'cm', label: 'cm' },
     ]}
     value={unit}
-    onChoose={onUnit}
+    onChoose={(chosen) => {
+      rememberUnit(chosen);
+      onUnit(chosen);
+    }}
   />
 );
