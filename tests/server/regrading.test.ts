@@ -1,11 +1,13 @@
 import { randomUUID } from 'node:crypto';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { Client } from 'pg';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { createGown, gownSchema, readGown, regradeGown } from '#shared/api/gowns.ts';
 import { createMeasureCard, readMeasureCard, saveMeasureCard } from '#shared/api/measure-cards.ts';
 import { listRevisions, readRevision, returnToRevision } from '#shared/api/revisions.ts';
 import { engineVersion } from '#shared/engine/draft-gown.ts';
 import { draftAny } from '#shared/engine/drafted.ts';
 import { type Browser, content, openBrowser, openMaker } from './support/maker.ts';
+import { ask } from './support/question.ts';
 import { newGown, read } from './support/saved-gown.ts';
 import { type ServerUnderTest, startServer } from './support/server-under-test.ts';
 
@@ -80,6 +82,78 @@ describe('a regrade is refused', () => {
     await maker.call(regradeGown, order(await newCard()), gown);
     const other = order(await newCard({ name: 'Somebody else' }), 2);
     expect((await maker.refused(409, regradeGown, other, gown)).code).toBe('another-person');
+  });
+});
+
+/**
+ * Saves a card beside the server each time a request waits for the gown. Two hands hold the gown in
+ * turn, the next one queued behind the request before the last one lets go.
+ */
+async function savingMeanwhile<T>(
+  gownId: string,
+  cardId: string,
+  waistGirths: readonly number[],
+  request: () => Promise<T>,
+): Promise<T> {
+  const hands = await Promise.all(
+    waistGirths.map(async () => {
+      const hand = new Client({ connectionString: server.databaseUrl });
+      await hand.connect();
+      await hand.query('begin');
+      return hand;
+    }),
+  );
+  const hold = (hand: Client | undefined) =>
+    hand?.query('select 1 from gowns where id = $1 for update', [gownId]);
+  const waiting = (count: number) => async () => {
+    const rows = await ask(
+      server.databaseUrl,
+      `select 1 from pg_stat_activity where datname = current_database() and wait_event_type = 'Lock'`,
+    );
+    return rows.length === count;
+  };
+  const wait = { timeout: 20_000, interval: 20 };
+  try {
+    await hold(hands[0]);
+    const answer = request();
+    for (const [index, hand] of hands.entries()) {
+      await vi.waitUntil(waiting(1), wait);
+      const next = hold(hands[index + 1]);
+      if (next !== undefined) await vi.waitUntil(waiting(2), wait);
+      await hand.query(
+        `update measure_cards set version = version + 1, card = jsonb_set(card, '{waistGirth}', $2) where id = $1`,
+        [cardId, String(waistGirths[index])],
+      );
+      await hand.query('commit');
+      await next;
+    }
+    return await answer;
+  } finally {
+    await Promise.all(hands.map((hand) => hand.end()));
+  }
+}
+
+describe('a card that is saved while a gown is drawn on it', () => {
+  it('is drawn again: the gown has the measures of the card it claims', async () => {
+    const gown = await newGown(maker);
+    const cardId = await newCard({ waistGirth: 730 });
+    const regrade = () => maker.call(regradeGown, order(cardId), gown);
+    await savingMeanwhile(gown.gownId, cardId, [760], regrade);
+    const after = await read(maker, gown);
+    expect(after).toMatchObject({ version: 2, cardId });
+    expect(after.content.inputs.card.waistGirth).toBe(760);
+    expect(after.drawn?.inputs.card.waistGirth).toBe(760);
+    const kept = await maker.call(readMeasureCard, undefined, { cardId });
+    expect(kept.content.card.waistGirth).toBe(760);
+  });
+
+  it('again and again is refused, with the gown as it stands', async () => {
+    const gown = await newGown(maker);
+    const cardId = await newCard({ waistGirth: 730 });
+    const regrade = () => maker.refused(409, regradeGown, order(cardId), gown);
+    const { code, current } = await savingMeanwhile(gown.gownId, cardId, [740, 750, 760], regrade);
+    expect(code).toBe('conflict');
+    expect(gownSchema.parse(current)).toMatchObject({ version: 1, cardId: null });
   });
 });
 

@@ -20,7 +20,7 @@ import { keepForGood } from './keep-as-revision.ts';
 import { findGown, type GownRow, holdGown, type LaidCard, setGownCard } from './repository.ts';
 import { countNamedRevisions } from './revision-repository.ts';
 import type { Maker, Workroom } from './saved-or-conflict.ts';
-import { changeGown, laidCard, lookAhead, type Saved } from './service.ts';
+import { changeGown, laidCard, lookAhead, readGown, type Saved } from './service.ts';
 
 /** A gown is one person's: her measures never stand in the past of somebody else's. */
 function refuseAnother(row: GownRow, card: LaidCard): void {
@@ -101,8 +101,40 @@ async function drawnOrRefused(
 
 const dayOf = ({ takenOn }: LaidCard): string => dayInWords(takenOn);
 
+/** The card was saved while the gown was drawn on it. */
+class CardChangedError extends Error {
+  constructor() {
+    super('The card was saved while the gown was drawn on it.');
+    this.name = 'CardChangedError';
+  }
+}
+
+/** A gown is drawn again so often for a card that is saved meanwhile. */
+const mostDrawings = 3;
+
 /** Redraws a gown for another card; what stood there and what comes of it are both kept for good. */
 export async function regradeGown(
+  workroom: Workroom,
+  maker: Maker,
+  gownId: string,
+  order: Received<typeof regrading>,
+): Promise<Saved> {
+  for (let drawing = 1; drawing <= mostDrawings; drawing += 1) {
+    try {
+      return await regradeOnce(workroom, maker, gownId, order);
+    } catch (error) {
+      if (!(error instanceof CardChangedError)) throw error;
+    }
+  }
+  throw new RefusalError(
+    'conflict',
+    'The measure card was saved again and again while the gown was drawn on it. The gown is as it was: regrade it once more.',
+    { current: await readGown(workroom, maker, gownId) },
+  );
+}
+
+/** The same from one reading of the card, which must still stand when the gown is saved. */
+async function regradeOnce(
   workroom: Workroom,
   maker: Maker,
   gownId: string,
@@ -126,6 +158,7 @@ export async function regradeGown(
   return changeGown(workroom, maker, gownId, save, async (turn, held) => {
     const laid = await laidCard(turn, maker.accountId, cardId);
     refuseAnother(held, laid);
+    if (laid.version !== card.version) throw new CardChangedError();
     refuseOneTooMany(
       'named revisions of one gown',
       (await countNamedRevisions(turn, gownId)) + 1,
