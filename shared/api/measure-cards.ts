@@ -68,7 +68,10 @@ export const startNextCard = endpoint({
   reply: created,
 });
 
-/** Says whose card it is after all; gowns it was laid on go along. */
+/**
+ * Says whose card it is after all; gowns it is laid on go along. Refused as `another-person` where a
+ * gown would then keep measures of two people, one of them in its revisions.
+ */
 export const giveMeasureCard = endpoint({
   method: 'POST',
   path: '/api/measure-cards/:cardId/give',

@@ -20,7 +20,7 @@ export const refusalCodes = [
   'account-full',
   /** The measure card was laid on a gown: its measures stay as they are. */
   'card-in-use',
-  /** The gown is made for somebody else than the measure card is. */
+  /** The gown is made, or keeps revisions, for somebody else than the measure card is. */
   'another-person',
   /** Saved meanwhile from somewhere else: `current` is how it now stands. */
   'conflict',

@@ -148,6 +148,25 @@ export async function insertPerson(store: Store, row: typeof people.$inferInsert
 export const countPeople = (store: Store, accountId: string): Promise<number> =>
   store.$count(people, eq(people.accountId, accountId));
 
+/** The revisions of gowns a card is laid on, and those drawn from it: each with whose its card and its gown are. */
+export const pastOfCard = (store: Store, { accountId, id }: CardRow) =>
+  store
+    .select({
+      title: gowns.title,
+      isLaidNow: sql<boolean>`${gowns.cardId} is not distinct from ${id}`,
+      gownPersonId: gowns.personId,
+      cardId: gownRevisions.cardId,
+      cardPersonId: measureCards.personId,
+      card: gownRevisions.card,
+    })
+    .from(gownRevisions)
+    .innerJoin(gowns, eq(gowns.id, gownRevisions.gownId))
+    .leftJoin(measureCards, eq(measureCards.id, gownRevisions.cardId))
+    .where(
+      and(eq(gowns.accountId, accountId), or(eq(gowns.cardId, id), eq(gownRevisions.cardId, id))),
+    )
+    .orderBy(asc(gowns.title));
+
 /** Gives a card, and every gown it is laid on, to somebody. */
 export async function giveCard(
   store: Store,

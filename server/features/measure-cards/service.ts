@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { isDeepStrictEqual } from 'node:util';
 import type { Received } from '#shared/api/endpoint.ts';
 import type {
   CardContent,
@@ -30,6 +31,7 @@ import {
   isPerson,
   listCardUses,
   type OwnedCardRow,
+  pastOfCard,
   replaceCard,
 } from './repository.ts';
 
@@ -144,6 +146,31 @@ export async function startNextCard(
   return createCard(database, caller, { ...wanted, personId, content, startedFrom: id });
 }
 
+/** The measures alone, without whose they are and when they were taken. */
+const measuresOf = ({
+  name: _name,
+  date: _date,
+  overruled: _kept,
+  ...measures
+}: CardContent['card']) => measures;
+
+/** The past of a gown stays one person's: a card goes to nobody else while a gown would have measures of two. */
+async function refuseMixedPast(turn: Store, row: CardRow, personId: string): Promise<void> {
+  const mixed = (await pastOfCard(turn, row)).find((past) => {
+    if (!past.isLaidNow) return past.gownPersonId !== null && past.gownPersonId !== personId;
+    if (past.cardId === row.id || past.cardPersonId === personId) return false;
+    // Typed before there was a card: they are the card's own measures, or somebody's.
+    return past.cardId !== null || !isDeepStrictEqual(measuresOf(past.card), measuresOf(row.card));
+  });
+  if (mixed === undefined) return;
+  throw new RefusalError(
+    'another-person',
+    mixed.isLaidNow
+      ? `“${mixed.title}” would go along, and its revisions keep measures that are not from this card. Copy this card and give the copy; card and gown stay whose they are.`
+      : `“${mixed.title}” keeps this card’s measures in its revisions and is made for somebody else. Copy this card and give the copy; card and gown stay whose they are.`,
+  );
+}
+
 /** Says whose a card is after all. */
 export async function giveCard(
   database: Database,
@@ -156,6 +183,7 @@ export async function giveCard(
     const row = await holdCard(turn, accountId, id);
     if (row === undefined) throw notFound('measure card');
     if (!(await isPerson(turn, accountId, personId))) throw notFound('person');
+    if (personId !== row.personId) await refuseMixedPast(turn, row, personId);
     await give(turn, row, personId);
     return {};
   });
