@@ -139,6 +139,13 @@ for (const width of [390, 1280]) {
       await room.field('across').fill('10');
       await room.field('down').fill('10,0');
       await expect(page.getByText('True to scale')).toBeVisible();
+      await room.field('across').fill('97');
+      await room.field('down').fill('97');
+      await expect(page.getByText('Did you mean 97 mm?')).toBeVisible();
+      await expect(page.getByText(/came out at/)).toBeHidden();
+      await page.getByRole('button', { name: 'Take 97 mm' }).click();
+      await expect(room.field('across')).toHaveValue('97 mm');
+      await expect(page.getByText(/came out at 97\.0 %/)).toBeVisible();
       await room.field('across').fill('94.1 mm');
       await room.field('down').fill('94 mm');
       await expect(page.getByText(/Everything came out at 94\.\d %/)).toBeVisible();

@@ -1,5 +1,6 @@
 import { millimetresPerInch } from '../units/format-length.ts';
-import { type Said, fine, mm, said } from '../units/said.ts';
+import { parseLength } from '../units/parse-length.ts';
+import { type Said, type Unit, fine, mm, said } from '../units/said.ts';
 import { paperOf, papers } from './papers.ts';
 import type { CustomPaper, SheetName } from './print-order.ts';
 
@@ -21,6 +22,24 @@ export type ScaleFinding = {
   readonly what: Said;
   readonly again: Said;
 };
+
+/**
+ * A figure typed without its unit that is far from the square's side in the reader's unit, yet near it in
+ * another: what was meant, with its unit (`97` for a reader of cm: `97 mm`). No answer where it has a unit, is
+ * no figure, or makes sense as it stands.
+ */
+export function meantInstead(typed: string, unit: Unit, square: SquareName): string | undefined {
+  const side = squareSides[square];
+  const read = parseLength(typed, unit);
+  if (!('mm' in read) || (read.mm >= side / 2 && read.mm <= side * 2)) return undefined;
+  return (['mm', 'cm', 'in'] as const)
+    .map((other) => `${typed.trim()} ${other}`)
+    .find((text) => {
+      // A figure that has its unit already takes no second one.
+      const meant = parseLength(text, unit);
+      return 'mm' in meant && Math.abs(meant.mm / side - 1) <= 0.2;
+    });
+}
 
 /** A ruler is read to half a millimetre (common practice, no source). */
 const readTo = 0.5;

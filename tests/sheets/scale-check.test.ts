@@ -1,5 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import { type MeasuredSquare, scaleCheck, squareSides } from '#shared/sheets/scale-check.ts';
+import {
+  type MeasuredSquare,
+  meantInstead,
+  scaleCheck,
+  squareSides,
+} from '#shared/sheets/scale-check.ts';
 import { speak } from '#shared/units/speak.ts';
 
 /** What is found where the metric square came out this much larger or smaller, both ways alike. */
@@ -88,5 +93,36 @@ describe('a square that was measured', () => {
     const finding = found(0.88, 'A3');
     expect(finding?.kind).toBe('scaled');
     expect(words(finding)).toContain('88.0 %');
+  });
+});
+
+describe('a figure typed without its unit', () => {
+  it.each([
+    ['97', 'cm', 'metric', '97 mm'],
+    [' 97,5 ', 'cm', 'metric', '97,5 mm'],
+    ['101', 'in', 'inch', '101 mm'],
+    ['10', 'in', 'metric', '10 cm'],
+    ['4', 'cm', 'inch', '4 in'],
+    ['3 7/8', 'cm', 'inch', '3 7/8 in'],
+  ] as const)(
+    '“%s” for a reader of %s at the %s square is asked about',
+    (typed, unit, square, meant) => {
+      expect(meantInstead(typed, unit, square)).toBe(meant);
+    },
+  );
+
+  it.each([
+    ['9.7', 'cm', 'metric'],
+    ['97 mm', 'cm', 'metric'],
+    ['97 cm', 'cm', 'metric'],
+    ['38 in', 'cm', 'metric'],
+    ['4"', 'cm', 'inch'],
+    ['6', 'cm', 'metric'],
+    ['79', 'cm', 'metric'],
+    ['121', 'cm', 'metric'],
+    ['', 'cm', 'metric'],
+    ['a lot', 'cm', 'metric'],
+  ] as const)('“%s” for a reader of %s at the %s square is not', (typed, unit, square) => {
+    expect(meantInstead(typed, unit, square)).toBeUndefined();
   });
 });

@@ -1,9 +1,10 @@
 import type { Dispatch } from 'react';
 
 import { plainOrder, type PrintOrder } from '#shared/sheets/print-order.ts';
-import { scaleCheck, type SquareName } from '#shared/sheets/scale-check.ts';
+import { meantInstead, scaleCheck, type SquareName } from '#shared/sheets/scale-check.ts';
 import { speak } from '#shared/units/speak.ts';
 
+import { Button } from '../../../ui/button.tsx';
 import { Segmented } from '../../../ui/segmented.tsx';
 import type { RoomAction, RoomChoices } from '../room-choices.ts';
 import { LengthField } from './length-field.tsx';
@@ -25,8 +26,12 @@ export const ScaleCheckCard = ({ room, paper, dispatch }: ScaleCheckCardProps) =
   const { unit, lengths } = room;
   const square = room.square ?? (unit === 'in' ? 'inch' : 'metric');
   const { across, down } = lengths;
+  const meant = (['across', 'down'] as const).flatMap((field) => {
+    const text = meantInstead(lengths[field].text, unit, square);
+    return text === undefined ? [] : [{ field, text }];
+  });
   const finding =
-    'mm' in across.read && 'mm' in down.read
+    meant.length === 0 && 'mm' in across.read && 'mm' in down.read
       ? scaleCheck({
           square,
           across: across.read.mm,
@@ -34,6 +39,7 @@ export const ScaleCheckCard = ({ room, paper, dispatch }: ScaleCheckCardProps) =
           paper: paper ?? plainOrder.paper,
         })
       : undefined;
+  const meantWords = [...new Set(meant.map(({ text }) => text))].join(' by ');
   return (
     <section aria-labelledby="scale-check">
       <h2 id="scale-check" className="heading">
@@ -62,6 +68,14 @@ export const ScaleCheckCard = ({ room, paper, dispatch }: ScaleCheckCardProps) =
         return <LengthField key={field} {...{ field, label, room, dispatch }} message={wrong} />;
       })}
       <div role="status" className="space-y-1 py-2 leading-snug">
+        {meant.length > 0 && (
+          <>
+            <p>{`Did you mean ${meantWords}?`}</p>
+            <Button
+              onClick={() => meant.forEach((each) => dispatch({ type: 'typed', ...each }))}
+            >{`Take ${meantWords}`}</Button>
+          </>
+        )}
         {finding !== undefined && (
           <>
             <p
