@@ -8,6 +8,19 @@ import { baseVersion, done, lastSave, saved, saveId, typed } from './saving.ts';
 export const cardContent = z.strictObject({ typed, card: partCard });
 export type CardContent = z.output<typeof cardContent>;
 
+/** Years a card may be dated in; others are slips of the keyboard, and no day the database can hold. */
+export const cardYears = { first: 1900, last: 2100 } as const;
+
+/** The day a card is dated with, as it may be sent: cards and gowns kept before are read as they are. */
+const daySent = z.iso.date().refine(
+  (day) => {
+    const year = Number(day.slice(0, 4));
+    return Number.isNaN(year) || (year >= cardYears.first && year <= cardYears.last);
+  },
+  { params: { outside: 'card-years' } },
+);
+const contentSent = cardContent.extend({ card: partCard.extend({ date: daySent.optional() }) });
+
 const summary = {
   id: z.uuid(),
   /** Of the card in the list; whose measures they are stands in the card itself. */
@@ -53,7 +66,7 @@ export const createMeasureCard = endpoint({
   body: z.strictObject({
     saveId,
     name: givenName,
-    content: cardContent,
+    content: contentSent,
     personId: z.uuid().optional(),
   }),
   reply: created,
@@ -64,7 +77,7 @@ export const startNextCard = endpoint({
   method: 'POST',
   path: '/api/measure-cards/:cardId/next',
   params: z.object({ cardId: z.uuid() }),
-  body: z.strictObject({ saveId, name: givenName, takenOn: z.iso.date() }),
+  body: z.strictObject({ saveId, name: givenName, takenOn: daySent }),
   reply: created,
 });
 
@@ -99,7 +112,7 @@ export const saveMeasureCard = endpoint({
   body: z.strictObject({
     saveId,
     baseVersion,
-    content: cardContent,
+    content: contentSent,
     keepReplaced: z.boolean().default(false),
   }),
   reply: { kind: 'json', schema: saved },

@@ -8,6 +8,7 @@ import { sheetNames } from '../sheets/print-order.ts';
 import { selections } from '../sheets/selection.ts';
 import { error, type Problem } from '../units/problem.ts';
 import { said, type Said } from '../units/said.ts';
+import { cardYears } from './measure-cards.ts';
 import { draftRequest } from './requests.ts';
 
 /** No more than this many problems at once: a body of nonsense gets a short answer. */
@@ -19,6 +20,8 @@ const names = new Map<string, string>([
   ),
   ...styleKeys.map((key) => [`style.${key}`, styleLabels[key]] as const),
   ['card', 'The measure card'],
+  ['card.date', 'The day of the card'],
+  ['takenOn', 'The day of the card'],
   ['style', 'The style card'],
   ['rules', 'The house rules'],
   ['', 'The request'],
@@ -123,6 +126,9 @@ function remedy(issue: z.core.$ZodIssue, field: string, value: unknown): Said {
   }
   if (issue.code === 'invalid_format' && issue.format === 'date') {
     return said`${name} must be a day written as year, month, day, such as 2026-11-14.`;
+  }
+  if (issue.code === 'custom' && issue.params?.['outside'] === 'card-years') {
+    return said`${name} must be between the years ${String(cardYears.first)} and ${String(cardYears.last)}: look at the year again.`;
   }
   if (issue.code === 'invalid_union' && unions[field] !== undefined) {
     return said`${name} must be ${unions[field]}.`;

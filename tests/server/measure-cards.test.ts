@@ -10,6 +10,7 @@ import {
   readMeasureCard,
   renameMeasureCard,
   saveMeasureCard,
+  startNextCard,
   unarchiveMeasureCard,
 } from '#shared/api/measure-cards.ts';
 import { createGown, deleteGown } from '#shared/api/gowns.ts';
@@ -54,6 +55,27 @@ describe('a measure card that cannot be kept is refused', () => {
     const { problems, message } = await maker.refused(422, createMeasureCard, odd);
     expect(problems?.[0]?.field).toBe('content.card.hipGirth');
     expect(message).toMatch(/^Hip must be/);
+  });
+
+  it.each(['0000-01-01', '1899-12-31', '2101-01-01'])('dated %s, by field', async (day) => {
+    const card = await newCard();
+    const { typed, card: measures } = filled();
+    const dated = { saveId: randomUUID(), content: { typed, card: { ...measures, date: day } } };
+    const next = { saveId: randomUUID(), name: 'Next', takenOn: day };
+    const told = [
+      await maker.refused(422, createMeasureCard, { ...dated, name: 'New' }),
+      await maker.refused(422, saveMeasureCard, { ...dated, baseVersion: 1 }, card),
+      await maker.refused(422, startNextCard, next, card),
+    ];
+    const fields = told.map(({ problems }) => problems?.map(({ field }) => field));
+    expect(fields).toEqual([['content.card.date'], ['content.card.date'], ['takenOn']]);
+    for (const { message } of told) {
+      expect(message).toBe(
+        'The day of the card must be between the years 1900 and 2100: look at the year again.',
+      );
+    }
+    const last = { ...next, saveId: randomUUID(), takenOn: '2100-12-31' };
+    await maker.call(startNextCard, last, card);
   });
 
   it('from a version that is gone, with the card as it stands', async () => {
