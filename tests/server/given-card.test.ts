@@ -8,7 +8,7 @@ import {
   readMeasureCard,
   startNextCard,
 } from '#shared/api/measure-cards.ts';
-import { createPerson } from '#shared/api/people.ts';
+import { createPerson, listPeople } from '#shared/api/people.ts';
 import { nameRevision } from '#shared/api/revisions.ts';
 import { engineVersion } from '#shared/engine/draft-gown.ts';
 import { type Browser, content, openMaker } from './support/maker.ts';
@@ -75,6 +75,36 @@ describe('a card is not given to another person', () => {
     await regraded(gown, card);
     const { code } = await maker.refused(409, giveMeasureCard, beth, card);
     expect(code).toBe('another-person');
+  });
+});
+
+describe('the name on a card', () => {
+  const named = (name: string) => {
+    const { typed, inputs } = content();
+    const card = { ...inputs.card, name };
+    return { saveId: randomUUID(), name: 'Card', content: { typed, card } };
+  };
+
+  it('with nothing to see in it puts nobody on the list, and no card', async () => {
+    const before = await maker.call(listPeople, undefined);
+    for (const name of ['\u200b\u200b', '\u202e', '\u2060 \u00ad', '\u0007']) {
+      const { code, problems } = await maker.refused(422, createMeasureCard, named(name));
+      expect(code).toBe('bad-input');
+      expect(problems?.[0]?.field).toBe('content.card.name');
+    }
+    expect(await maker.call(listPeople, undefined)).toEqual(before);
+  });
+
+  it('is cleaned as a name typed on the list is: the same person by both ways', async () => {
+    for (const name of ['Ruth\u202e Hall', 'Ruth\n\u0007Hall\u2066', ' Ruth\tAmsel ']) {
+      const person = { saveId: randomUUID(), name };
+      const { id: personId } = await maker.call(createPerson, person);
+      const { id: cardId } = await maker.call(createMeasureCard, named(name));
+      const { people } = await maker.call(listPeople, undefined);
+      const { person: onCard } = await maker.call(readMeasureCard, undefined, { cardId });
+      expect(onCard.name).toBe(people.find(({ id }) => id === personId)?.name);
+      expect(onCard.name).not.toMatch(/[\p{Cc}\p{Bidi_Control}]/u);
+    }
   });
 });
 

@@ -9,13 +9,16 @@ import type {
   saveMeasureCard as saving,
   startNextCard as starting,
 } from '#shared/api/measure-cards.ts';
+import { givenName } from '#shared/api/kept-text.ts';
+import { error } from '#shared/units/problem.ts';
+import { said } from '#shared/units/said.ts';
 import { holdAccount } from '../../database/account-hold.ts';
 import type { Database, Store } from '../../database/client.ts';
 import { mostKept, refuseOneTooMany } from '../../http/most-kept.ts';
 import { acknowledge, type Acknowledged, acknowledgedSave } from '../../database/saves.ts';
 import { conflict, notFound, sameSave } from '../../http/conflict.ts';
 import type { Caller } from '../../http/session.ts';
-import { RefusalError } from '../../http/refusal.ts';
+import { RefusalError, refusalFor } from '../../http/refusal.ts';
 import { cardView } from './card-view.ts';
 import {
   type CardRow,
@@ -57,19 +60,36 @@ export async function readCard(database: Database, caller: Caller, id: string): 
 /** Stands on the list for cards that name nobody. */
 const nobodyYet = 'Not named yet';
 
+/** Who is named on a card, by the rule for all names on the list. */
+function nameOn({ name = '' }: CardContent['card'], unit: CardContent['typed']['unit']): string {
+  if (name.trim() === '') return nobodyYet;
+  const read = givenName.safeParse(name);
+  if (read.success) return read.data;
+  throw refusalFor(
+    'bad-input',
+    [
+      error({
+        code: 'wrong-form',
+        field: 'content.card.name',
+        said: said`The name on the card has no letter that can be seen: type it anew, or leave it empty.`,
+      }),
+    ],
+    unit,
+  );
+}
+
 /** Whose a new card is: who is asked for, or who is named on it, put on the list where nobody is called so. */
 async function personFor(
   turn: Store,
   accountId: string,
   asked: string | undefined,
-  { card }: CardContent,
+  { card, typed }: CardContent,
 ): Promise<string> {
   if (asked !== undefined) {
     if (!(await isPerson(turn, accountId, asked))) throw notFound('person');
     return asked;
   }
-  const given = card.name?.trim() ?? '';
-  const name = given === '' ? nobodyYet : given;
+  const name = nameOn(card, typed.unit);
   const known = await findPersonNamed(turn, accountId, name);
   if (known !== undefined) return known;
   refuseOneTooMany('people', await countPeople(turn, accountId), mostKept.people);
