@@ -6,6 +6,7 @@ import { settleDemoAccount } from './database/demo-account.ts';
 import { migrate } from './database/migrate.ts';
 import { seedSamples } from './database/sample-seed.ts';
 import { openDrafter } from './drafting/drafter.ts';
+import { deleteExpiredClasses } from './features/lessons/repository.ts';
 import { openPrinter } from './features/print/printer.ts';
 import { isOnThisMachineAlone, ownOrigins } from './http/own-origins.ts';
 import { listen } from './listen.ts';
@@ -24,6 +25,7 @@ export async function runServer(screens: {
   });
   await migrate(database, places.migrations);
   await seedSamples(database);
+  await deleteExpiredClasses(database, new Date());
   await settleDemoAccount(database, isOnThisMachineAlone(settings));
   const { limits, overHttps, trustedProxies } = settings;
   const drafter = openDrafter(limits);

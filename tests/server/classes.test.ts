@@ -1,5 +1,6 @@
+import { spawn } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import {
   followClass,
   listClasses,
@@ -10,6 +11,8 @@ import {
 } from '#shared/api/classes.ts';
 import { saveGown } from '#shared/api/gowns.ts';
 import { draftAny } from '#shared/engine/drafted.ts';
+import { freePort } from '#server/ops/free-port.mjs';
+import { whoAnswers } from '#server/ops/server-process.mjs';
 import { type Browser, openBrowser, openMaker } from './support/maker.ts';
 import { ask } from './support/question.ts';
 import { card } from './support/request-bodies.ts';
@@ -96,6 +99,48 @@ describe('a class', () => {
     const { inputs } = await visitor.call(visitClass, undefined, { token });
     expect(inputs.card.waistGirth).toBe(card.waistGirth);
   });
+
+  it.each([visitClass, followClass])(
+    'that has run out is forgotten when somebody comes by its link ($path)',
+    async (line) => {
+      const { id, token } = await tutor.call(openClass, wish, gown);
+      await ask(server.databaseUrl, 'update classes set expires_at = now() where id = $1', [id]);
+      await openBrowser(server.address).refused(404, line, undefined, { token });
+      expect(await ask(server.databaseUrl, 'select 1 from classes where id = $1', [id])).toEqual(
+        [],
+      );
+    },
+  );
+
+  it('that has run out is forgotten when a server starts; an open one stays', async () => {
+    const [gone, open] = [
+      await tutor.call(openClass, wish, gown),
+      await tutor.call(openClass, wish, gown),
+    ];
+    await ask(server.databaseUrl, 'update classes set expires_at = now() where id = $1', [gone.id]);
+    const port = await freePort();
+    const child = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
+      stdio: 'inherit',
+      env: {
+        ...process.env,
+        LOG_LEVEL: 'warn',
+        PORT: String(port),
+        DATABASE_URL: server.databaseUrl,
+      },
+    });
+    try {
+      const answers = async () => (await whoAnswers(`http://127.0.0.1:${port}`)) === 'ellwand';
+      await vi.waitUntil(answers, { timeout: 60_000, interval: 100 });
+      const left = await ask(
+        server.databaseUrl,
+        'select id from classes where id = any($1::uuid[])',
+        [[gone.id, open.id]],
+      );
+      expect(left).toEqual([{ id: open.id }]);
+    } finally {
+      child.kill('SIGKILL');
+    }
+  }, 90_000);
 
   it('that has run out is forgotten when the next one is opened', async () => {
     const { id } = await tutor.call(openClass, wish, gown);

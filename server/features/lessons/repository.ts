@@ -85,6 +85,11 @@ export async function deleteClass(store: Store, accountId: string, id: string): 
   return ended.length > 0;
 }
 
+/** The same for one alone, by the digest of its link. */
+export async function deleteIfExpired(store: Store, digest: string, now: Date): Promise<void> {
+  await store.delete(classes).where(and(eq(classes.digest, digest), lte(classes.expiresAt, now)));
+}
+
 /** Forgets classes that have run out: nothing of them is of use any more. */
 export async function deleteExpiredClasses(store: Store, now: Date): Promise<void> {
   await store.delete(classes).where(lte(classes.expiresAt, now));

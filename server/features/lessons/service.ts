@@ -12,6 +12,7 @@ import {
   type ClassRow,
   countOpenClasses,
   deleteExpiredClasses,
+  deleteIfExpired,
   drawnFromOf,
   insertClass,
   openClassRows,
@@ -30,6 +31,7 @@ export async function openClass(
   gownId: string,
   { title, step, unit, hours }: Received<typeof opening>,
 ): Promise<Answer<typeof opening>> {
+  await deleteExpiredClasses(database, new Date());
   return database.transaction(async (turn) => {
     await holdAccount(turn, accountId);
     const drawnFrom = await drawnFromOf(turn, accountId, gownId);
@@ -41,7 +43,6 @@ export async function openClass(
       );
     }
     const now = new Date();
-    await deleteExpiredClasses(turn, now);
     refuseOneTooMany(
       'open classes',
       await countOpenClasses(turn, accountId, now),
@@ -81,17 +82,24 @@ export async function listClasses(database: Database, accountId: string): Promis
 const noClass = (): RefusalError =>
   new RefusalError('not-found', 'There is nothing at this address.');
 
+/** A link that opens nothing; where it did once, its measures go now. */
+async function nothingBehind(database: Database, digest: string, now: Date): Promise<never> {
+  await deleteIfExpired(database, digest, now);
+  throw noClass();
+}
+
 /** What a class sees. */
 export async function visit(database: Database, token: string): Promise<Answer<typeof visitClass>> {
-  const row = await classByDigest(database, digestOf(token), new Date());
-  if (row === undefined) throw noClass();
+  const [digest, now] = [digestOf(token), new Date()];
+  const row = await classByDigest(database, digest, now);
+  if (row === undefined) return nothingBehind(database, digest, now);
   const { title, unit, step, inputs, expiresAt } = row;
   return { title, unit, step, inputs, expiresAt: expiresAt.toISOString() };
 }
 
 /** Where the tutor stands. */
 export async function tutorsStep(database: Database, token: string): Promise<string> {
-  const step = await stepByDigest(database, digestOf(token), new Date());
-  if (step === undefined) throw noClass();
-  return step;
+  const [digest, now] = [digestOf(token), new Date()];
+  const step = await stepByDigest(database, digest, now);
+  return step ?? nothingBehind(database, digest, now);
 }
