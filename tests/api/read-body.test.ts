@@ -79,7 +79,7 @@ describe('what comes in from outside', () => {
       'a day that is none',
       { card: { ...middleBody, date: '14 November' } },
       [
-        'wrong-form card.date: “card.date” must be a day written as year, month, day, such as 2026-11-14.',
+        'wrong-form card.date: The date of the card must be a day written as year, month, day, such as 2026-11-14.',
       ],
     ],
     [

@@ -71,7 +71,7 @@ describe('a measure card that cannot be kept is refused', () => {
     expect(fields).toEqual([['content.card.date'], ['content.card.date'], ['takenOn']]);
     for (const { message } of told) {
       expect(message).toBe(
-        'The day of the card must be between the years 1900 and 2100: look at the year again.',
+        'The date of the card must be between the years 1900 and 2100: look at the year again.',
       );
     }
     const last = { ...next, saveId: randomUUID(), takenOn: '2100-12-31' };
