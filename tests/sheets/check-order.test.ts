@@ -70,7 +70,7 @@ describe('an order for a gown', () => {
 
 describe('an order of very many outlines', () => {
   const asked = (copies: number) =>
-    pieces.map((piece) => ({ piece: piece.name, copies, how: waysToDraw(piece)[0] ?? 'on fold' }));
+    pieces.map((piece) => ({ piece: piece.name, copies, how: waysToDraw(piece)[0] }));
 
   it('is refused where a piece is listed twice', () => {
     const [first] = asked(1);
