@@ -41,12 +41,13 @@ const runsToTheKnee = (piece: Piece): boolean =>
 const runsToTheHem = (piece: Piece): boolean => piece.edges.some(({ kind }) => kind === 'hem');
 
 /**
- * A front top line bends down at its peak and level again towards the side; a back one only the latter. Off
- * the shoulder it may level out once more before the armhole.
+ * A front top line bends out of its dip, down at its peak and level again towards the side; once more where a
+ * wide peak stands beyond the bust seam, and off the shoulder before the armhole. A back one levels once,
+ * off the shoulder twice.
  */
 function topChanges(side: 'front' | 'back', tops: readonly Piece[]): number {
-  const offShoulder = tops.some(({ edges }) => edges.some(({ kind }) => kind === 'armhole'));
-  return (side === 'front' ? 2 : 1) + (offShoulder ? 1 : 0);
+  if (side === 'front') return 3;
+  return tops.some(({ edges }) => edges.some(({ kind }) => kind === 'armhole')) ? 2 : 1;
 }
 
 const title = (piece: Piece, edge: Edge): string => `${piece.title}, ${spoken(edge.name)}`;

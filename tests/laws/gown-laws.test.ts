@@ -104,7 +104,8 @@ describe('on any body within the limits, in any style within its limits', () => 
       'measured anew from the SVG',
       (draft) => {
         const { edges, girths } = remeasure(piecesSvg(draft, 'cm'));
-        expect(edges.length).toBeGreaterThan(6);
+        // One piece a half, its seams run on to the hem: side, centre back and nothing else.
+        expect(edges.length).toBeGreaterThan(2);
         expect(edges.filter((each) => !(Math.abs(each.difference) <= 0.5))).toEqual([]);
         for (const { level, wanted } of draft.construction.wanted) {
           if (level === 'chest') continue;
