@@ -73,9 +73,17 @@ function trimmed(path: Path, off: number, end: 'start' | 'end'): Path {
   return end === 'start' ? after : before;
 }
 
+/** How far a level's end stands off the centre line: where the level, which may slant, meets the lacing's edge. */
+function offOn({ from, to }: LevelLine, lacing: Lacing): number {
+  const slant = (to.y - from.y) / (to.x - from.x);
+  let off = offAt(lacing, from.y);
+  for (let i = 0; i < 20; i += 1) off = offAt(lacing, from.y + slant * off);
+  return off;
+}
+
 function trimmedLevel(level: LevelLine, lacing: Lacing): LevelLine {
   const { from, to } = level;
-  const off = offAt(lacing, from.y);
+  const off = offOn(level, lacing);
   if (Math.abs(from.x) > 1e-6 || off === 0) return level;
   return { ...level, from: point(off, from.y + ((to.y - from.y) * off) / (to.x - from.x)) };
 }
@@ -204,9 +212,9 @@ function gapsOf(before: readonly Piece[], after: readonly Piece[], lacing: Lacin
   const gaps: { [L in LevelName]?: number } = {};
   for (const piece of before) {
     if (!piece.edges.some(isCentreBack) || !isBody(piece)) continue;
-    for (const { level, from } of piece.levels) {
-      const off = offAt(lacing, from.y);
-      if (off > 0) gaps[level] = 2 * off;
+    for (const each of piece.levels) {
+      const off = offOn(each, lacing);
+      if (off > 0) gaps[each.level] = 2 * off;
     }
   }
   const seamOf = (pieces: readonly Piece[]): number =>
