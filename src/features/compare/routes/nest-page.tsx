@@ -9,14 +9,14 @@ import { nestOf } from '#shared/regrade/nest.ts';
 import { failureWords } from '../../../lib/failure-words.ts';
 import { useUnit } from '../../../lib/use-unit.ts';
 import { Notice } from '../../../ui/notice.tsx';
-import { Segmented } from '../../../ui/segmented.tsx';
 import { Select } from '../../../ui/select.tsx';
 import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { GradeRulesTable } from '../components/grade-rules-table.tsx';
 import { NestBench } from '../components/nest-bench.tsx';
 import { Labelled } from '../components/overlay-tools.tsx';
 import { ProblemList } from '../components/problem-list.tsx';
-import { depthChoices, depthHints, depthsFor, type DepthChoice } from '../depth-choices.ts';
+import { TopEdgeDepths } from '../components/top-edge-depths.tsx';
+import { depthsFor, type DepthChoice } from '../depth-choices.ts';
 import { keepGradeRules, keptGradeRules } from '../kept-grade-rules.ts';
 import { gownQuery } from '../queries.ts';
 import { orProblems, useDraft } from '../use-draft.ts';
@@ -115,16 +115,7 @@ const NestOfGown = ({ gown }: { gown: Gown }) => {
             />
           )}
         </Labelled>
-        <div>
-          <p className="text-sm text-slate">Depths of the top edge</p>
-          <Segmented
-            legend="Depths of the top edge"
-            choices={depthChoices}
-            value={choice}
-            onChoose={setChoice}
-          />
-          <p className="text-sm text-slate">{depthHints[choice]}</p>
-        </div>
+        <TopEdgeDepths choice={choice} onChoose={setChoice} />
       </div>
       {tried && 'problems' in tried && (
         <ProblemList title="This nest cannot be drawn" problems={tried.problems} unit={unit} />

@@ -15,15 +15,15 @@ import type { Unit } from '#shared/units/said.ts';
 import { failureWords } from '../../../lib/failure-words.ts';
 import { useUnit } from '../../../lib/use-unit.ts';
 import { Notice } from '../../../ui/notice.tsx';
-import { Segmented } from '../../../ui/segmented.tsx';
 import { Select } from '../../../ui/select.tsx';
 import { UnitChoice } from '../../../ui/unit-choice.tsx';
 import { KeepRegrade } from '../components/keep-regrade.tsx';
 import { OverlayBench } from '../components/overlay-bench.tsx';
 import { Labelled } from '../components/overlay-tools.tsx';
 import { ProblemList } from '../components/problem-list.tsx';
+import { TopEdgeDepths } from '../components/top-edge-depths.tsx';
 import { WhatMoved } from '../components/what-moved.tsx';
-import { depthChoices, depthHints, depthsFor, type DepthChoice } from '../depth-choices.ts';
+import { depthsFor, type DepthChoice } from '../depth-choices.ts';
 import { cardQuery, cardsQuery, gownQuery, type ListedCard } from '../queries.ts';
 import { orProblems, useDraft } from '../use-draft.ts';
 
@@ -118,16 +118,7 @@ const RegradeBench = ({ gown, cards }: { gown: Gown; cards: readonly ListedCard[
               />
             )}
           </Labelled>
-          <div>
-            <p className="text-sm text-slate">Depths of the top edge</p>
-            <Segmented
-              legend="Depths of the top edge"
-              choices={depthChoices}
-              value={choice}
-              onChoose={setChoice}
-            />
-            <p className="text-sm text-slate">{depthHints[choice]}</p>
-          </div>
+          <TopEdgeDepths choice={choice} onChoose={setChoice} />
         </div>
       )}
       {kept.isError && <Notice>{failureWords(kept.error)}</Notice>}
