@@ -5,7 +5,7 @@ import type { DraftingTable } from '../../drafting/drafting-table.ts';
 import type { Piece } from '../../drafting/piece.ts';
 import { xAt } from '../../geometry/profile.ts';
 import { mm, said } from '../../units/said.ts';
-import { type Gaps, laceBack, lacingGap } from './lacing.ts';
+import { type Gaps, laceBack } from './lacing.ts';
 import type { PairedHalves } from './pair-halves.ts';
 import { type GownStyle, isOffShoulder } from './style-card.ts';
 import { zipCentreBack, zipSide } from './zips.ts';
@@ -76,10 +76,10 @@ export function closeGown(
   const ends = said`ends ${mm(end - levels.waist)} below the waist, ${levels.hip - end < 0.5 ? 'at the hip' : said`${mm(levels.hip - end)} above the hip`}`;
   const why = said`The gown is stepped into: what stays closed below has to pass the hips.`;
   if (style.closure === 'laced') {
-    const { pieces: laced, length, gaps, eyelets } = laceBack(pieces, levels.waist, end);
+    const { pieces: laced, length, gap, gaps, eyelets } = laceBack(pieces, levels.waist, end);
     paper.draw(
       'Lacing',
-      said`The centre back edges stand ${mm(lacingGap)} apart from the top edge to the waist and meet where the lacing ${ends}. Each edge is ${mm(length)} long and has ${String(eyelets)} eyelets about ${mm(25)} apart, ${mm(15)} from the edge, with a bone on either side of them; or sew loops ${mm(12)} to ${mm(15)} apart along it. A panel of its own lies behind.`,
+      said`The centre back edges stand ${mm(gap)} apart from the top edge to the waist and meet where the lacing ${ends}. Each edge is ${mm(length)} long and has ${String(eyelets)} eyelets about ${mm(25)} apart, ${mm(15)} from the edge, with a bone on either side of them; or sew loops ${mm(12)} to ${mm(15)} apart along it. A panel of its own lies behind.`,
       {
         why: said`The gap is counted in every girth, so that the gown fits laced as it is drawn and can be let out or drawn in. Lacing must allow a full breath: loosen it at once on numbness or faintness. The cords go over each other as many times as there are eyelets: about ${mm(length * 8)} of cord.`,
         pieces: ['modesty-panel'],

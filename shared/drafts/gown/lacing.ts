@@ -3,6 +3,7 @@ import { edge, notchAtHeight } from '../../drafting/outline.ts';
 import type { Edge, InnerLine, LevelLine, LevelName, Piece } from '../../drafting/piece.ts';
 import {
   endOf,
+  flatten,
   pathCrossings,
   pathLength,
   pointAt,
@@ -18,7 +19,9 @@ import { mm, said } from '../../units/said.ts';
 import { type Closed, isBody, isCentreBack } from './zips.ts';
 
 /** The centre back edges stand apart by this from the top edge to the waist (common practice, no source). */
-export const lacingGap = 50;
+const lacingGap = 50;
+/** On a narrow back they stand nearer, but not nearer than this: less could not be drawn in (our rule). */
+const leastGap = 20;
 /** Eyelets stand this far in from the edge, and as far apart as this or a little less (common practice, no source). */
 const eyeletsIn = 15;
 const eyeletsApart = 25;
@@ -30,19 +33,29 @@ const bonesIn = [6, 24] as const;
 const underlap = 50;
 const below = 30;
 
-/** A lacing: how far each edge stands off the centre line at every height, and where it ends. */
-type Lacing = { readonly top: number; readonly waist: number; readonly end: number };
+/** A lacing: half its gap, its top and where it ends; the gap is whole down to the waist. */
+type Lacing = {
+  readonly half: number;
+  readonly top: number;
+  readonly waist: number;
+  readonly end: number;
+};
 
 /** Half the gap by height: whole down to the waist, then closing smoothly to the end. */
-const halfGap = ({ top, waist, end }: Lacing): Profile => [
-  { from: top - 1000, to: waist, a: lacingGap / 2, b: 0, c: 0, d: 0 },
-  ...cubicProfile({ y: waist, x: lacingGap / 2 }, { y: end, x: 0 }, 0, 0),
+const halfGap = ({ half, top, waist, end }: Lacing): Profile => [
+  { from: top - 1000, to: waist, a: half, b: 0, c: 0, d: 0 },
+  ...cubicProfile({ y: waist, x: half }, { y: end, x: 0 }, 0, 0),
 ];
 
 const offAt = (lacing: Lacing, y: number): number =>
   y >= lacing.end ? 0 : xAt(halfGap(lacing), y);
 
-/** A back panel narrower than half the gap has nothing left to lace. */
+/** The bone farther in needs a little cloth beside it before the next seam or dart (our rule). */
+const leastCloth = bonesIn[1] + 4;
+/** Curves are looked at by chords this near to them. */
+const chord = 0.2;
+
+/** A back whose seams or darts come so near the centre that nothing is left to lace. */
 const noRoomForLacing = (): DraftingError =>
   new DraftingError([
     {
@@ -50,9 +63,31 @@ const noRoomForLacing = (): DraftingError =>
       severity: 'error',
       field: 'style.closure',
       with: ['style.shaping', 'card.underbustGirth'],
-      said: said`The centre back panel is narrower at its seam than half the lacing gap of ${mm(lacingGap)}: nothing is left to lace. Close the gown with a zip at the centre back.`,
+      said: said`A lacing stands at least ${mm(leastGap / 2)} off the centre back and needs ${mm(leastCloth)} of cloth beside it; the next seam or dart of the back comes nearer. Close the gown with a zip at the centre back.`,
     },
   ]);
+
+/**
+ * Half the gap on these back pieces, whole mm: the usual one, or as much as leaves the bones their cloth beside
+ * the next seam or dart.
+ * @throws DraftingError where not even the least gap does.
+ */
+function halfFor(pieces: readonly Piece[], { top, waist, end }: Omit<Lacing, 'half'>): number {
+  const shape = { half: 1, top, waist, end };
+  const rooms = pieces
+    .flatMap(({ edges, darts }) => [
+      ...edges.filter(({ name }) => /^(side|princess)\b/.test(name)).map(({ path }) => path),
+      ...darts.map(({ centreLeg }) => centreLeg),
+    ])
+    .flatMap((path) => flatten(path, chord))
+    .filter(({ y }) => y > top && y < end)
+    .map(({ x, y }) => ({ room: x - leastCloth, open: offAt(shape, y) }))
+    .filter(({ open }) => open > 0)
+    .map(({ room, open }) => room / open);
+  const half = Math.floor(Math.min(lacingGap / 2, ...rooms));
+  if (half < leastGap / 2) throw noRoomForLacing();
+  return half;
+}
 
 /** An edge that meets the centre line at one end, cut where it meets the lacing's edge. */
 function trimmed(path: Path, off: number, end: 'start' | 'end'): Path {
@@ -97,7 +132,7 @@ function lacedPiece(piece: Piece, centre: Edge, lacing: Lacing): Laced | undefin
   const after = piece.edges[(index + 1) % piece.edges.length];
   const foot = startOf(centre.path);
   if (!before || !after || !foot) return undefined;
-  const trimmedAfter = trimmed(after.path, lacingGap / 2, 'start');
+  const trimmedAfter = trimmed(after.path, lacing.half, 'start');
   const top = startOf(trimmedAfter);
   if (!top) return undefined;
   const whole = foot.y <= lacing.end;
@@ -143,7 +178,7 @@ const upwards = (lacing: Lacing, top: Point, foot: Point): Path =>
   foot.y <= lacing.waist
     ? [line(foot, top)]
     : reverse([
-        ...(top.y < lacing.waist ? [line(top, point(lacingGap / 2, lacing.waist))] : []),
+        ...(top.y < lacing.waist ? [line(top, point(lacing.half, lacing.waist))] : []),
         ...profilePath(halfGap(lacing), Math.max(top.y, lacing.waist), foot.y),
       ]);
 
@@ -176,8 +211,8 @@ const bonesBeside = ({ path }: Edge): readonly InnerLine[] =>
 const beside = (at: Point, off: number): Point => point(at.x + off, at.y);
 
 /** The panel that lies behind the lacing, half of it, on the fold. */
-function modestyPanel(top: number, end: number): Piece {
-  const right = lacingGap / 2 + underlap;
+function modestyPanel({ half, top, end }: Lacing): Piece {
+  const right = half + underlap;
   const foot = end + below;
   const corners = [point(0, top), point(right, top), point(right, foot), point(0, foot)] as const;
   const run = (from: Point, to: Point): Path => [line(from, to)];
@@ -231,13 +266,13 @@ export function laceBack(
   pieces: readonly Piece[],
   waist: number,
   end: number,
-): Closed & { readonly gaps: Gaps; readonly eyelets: number } {
-  const tops = pieces
-    .filter(isBody)
+): Closed & { readonly gap: number; readonly gaps: Gaps; readonly eyelets: number } {
+  const centres = pieces.filter((piece) => isBody(piece) && piece.edges.some(isCentreBack));
+  const tops = centres
     .flatMap((piece) => piece.edges.filter(isCentreBack))
     .map(({ path }) => endOf(path)?.y ?? Infinity);
-  const top = Math.min(...tops);
-  const lacing = { top, waist, end };
+  const height = { top: Math.min(...tops), waist, end };
+  const lacing = { half: halfFor(centres, height), ...height };
   const edges: Edge[] = [];
   let drills = 0;
   const laced = pieces.map((piece): Piece => {
@@ -249,7 +284,8 @@ export function laceBack(
     return changed.piece;
   });
   return {
-    pieces: [...laced, modestyPanel(top, end)],
+    pieces: [...laced, modestyPanel(lacing)],
+    gap: 2 * lacing.half,
     length: edges.reduce((sum, { path }) => sum + pathLength(path), 0),
     gaps: gapsOf(pieces, laced, lacing),
     eyelets: drills,
