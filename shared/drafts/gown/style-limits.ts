@@ -59,6 +59,8 @@ function backDepth(body: Body, levels: BodyLevels, initial: number): Limit {
   return limit(least, most, initial);
 }
 
+/** On a small bust the end is kept inside the side: the peak lies this far inside the bust's quarter. */
+const peakInside = 80;
 /** Off the shoulder the peak lies this far inside the end of the top line at least. */
 const insideEnd = 30;
 /** An armhole this deep at least lies between the band's edge and the underarm. */
@@ -124,11 +126,14 @@ function neck(
  */
 export function styleLimits(body: Body, levels: BodyLevels, style: StyleCard = {}): StyleLimits {
   const eases = easeLimits(body, style);
-  const { bustSpan, waistToHip } = body.measures;
+  const { bustGirth, bustSpan, waistToHip } = body.measures;
   const offShoulder = isOffShoulder(style);
   // Off the shoulder the peak lies inside the end of the top line.
   const outer = Math.max(body.measures.acrossFront / 2, bustSpan / 2 + outsideAxis);
-  const widestNeck = Math.min(bustSpan / 2 + 40, offShoulder ? outer - insideEnd : Infinity);
+  const widestNeck = Math.min(
+    bustSpan / 2 + 40,
+    offShoulder ? Math.min(outer - insideEnd, bustGirth / 4 - peakInside) : Infinity,
+  );
   const topDrop = offShoulder
     ? limit(90, Math.min(levels.bust - 60, levels.underarm - leastArmhole), 127)
     : limit(levels.bust - 110, levels.bust - 60, levels.bust - 85);
