@@ -53,7 +53,7 @@ export const styleDraws: fc.Arbitrary<StyleDraws> = fc.record({
     waistSeam: fc.constantFrom(...styleChoices.waistSeam, undefined),
     flare: fc.constantFrom(...styleChoices.flare, undefined),
     sleeve: fc.constantFrom(...styleChoices.sleeve, undefined),
-    closure: fc.constantFrom('centreBackZip' as const, 'sideZip' as const, undefined),
+    closure: fc.constantFrom(...styleChoices.closure, undefined),
     facing: fc.constantFrom(...styleChoices.facing, undefined),
     lining: fc.constantFrom(...styleChoices.lining, undefined),
     boning: fc.constantFrom(...styleChoices.boning, undefined),
