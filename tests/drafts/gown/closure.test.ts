@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { DraftingError } from '#shared/drafting/drafting-error.ts';
-import { balanced } from '#shared/drafting/house-rule-presets.ts';
+import { balanced, quarterRule } from '#shared/drafting/house-rule-presets.ts';
 import type { Piece } from '#shared/drafting/piece.ts';
 import type { StyleCard } from '#shared/drafts/gown/style-card.ts';
 import { draftGown } from '#shared/engine/draft-gown.ts';
@@ -127,6 +127,19 @@ describe('a laced back', () => {
     const foot = Math.max(...edges.flatMap(({ path }) => path.map(({ to }) => to.y)));
     const end = named(draft, 'back-middle').notches.find(({ name }) => name === 'lace-end');
     expect(foot - (end?.at.y ?? 0)).toBeCloseTo(30, 6);
+  });
+
+  test('stands nearer together on a narrow back, so that its bones keep their cloth', () => {
+    const narrow = draftGown({
+      card: { ...middleBody, bustGirth: 800, underbustGirth: 580, waistGirth: 540, hipGirth: 900 },
+      style: { closure: 'laced' },
+      rules: quarterRule,
+    });
+    const gap = narrow.construction.gaps?.underbust ?? 0;
+    expect(gap).toBeGreaterThanOrEqual(20);
+    expect(gap).toBeLessThan(50);
+    expect(narrow.proof.holds).toBe(true);
+    expect(stepOf(narrow, 'Lacing')).toContain(`stand ${(gap / 10).toFixed(1)} cm apart`);
   });
 
   test('says that lacing must allow a full breath', () => {
